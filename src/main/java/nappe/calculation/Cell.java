@@ -1,0 +1,111 @@
+package nappe.calculation;
+
+import java.util.Map;
+import nappe.formula.Formula;
+import nappe.formula.Value;
+import nappe.unit.Unit;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * One cell of the package: typed (an entry, a constant, a number of a cited table) or a formula under a scope. Its
+ * number, its spreadsheet text and its typeset equation are readings of the same formula with the same references. A
+ * cell is made after all that it refers to, so the order of making is an order of evaluation and no circle can arise.
+ */
+public final class Cell implements Reference {
+    /** What kind of content stands in a cell. */
+    public enum Kind {
+        /** Typed by the engineer. */
+        ENTRY,
+        /** A cited number or a conversion factor. */
+        CONSTANT,
+        /** A number or word of a cited table. */
+        TABLE,
+        /** A live formula. */
+        FORMULA
+    }
+
+    private final Kind kind;
+    private final Place place;
+    private final String symbol;
+    private final Unit unit;
+    private final @Nullable Value typed;
+    private final @Nullable Formula formula;
+    private final Map<String, Reference> references;
+    private final Sureness sureness;
+
+    private Cell(
+            Kind kind,
+            Place place,
+            String symbol,
+            Unit unit,
+            @Nullable Value typed,
+            @Nullable Formula formula,
+            Map<String, Reference> references,
+            Sureness sureness) {
+        this.kind = kind;
+        this.place = place;
+        this.symbol = symbol;
+        this.unit = unit;
+        this.typed = typed;
+        this.formula = formula;
+        this.references = Map.copyOf(references);
+        this.sureness = sureness;
+    }
+
+    /** A cell whose content is typed, in the unit given. */
+    public static Cell typed(Kind kind, Place place, String symbol, Unit unit, Value value) {
+        Sureness sureness = value instanceof Value.None ? Sureness.MAY_BE_WORDS : Sureness.SURE;
+        return new Cell(kind, place, symbol, unit, value, null, Map.of(), sureness);
+    }
+
+    /** A live cell; every symbol of its formula must be among the references. */
+    public static Cell live(
+            Place place, String symbol, Unit unit, Formula formula, Map<String, Reference> references, Sureness sureness) {
+        return new Cell(Kind.FORMULA, place, symbol, unit, null, formula, references, sureness);
+    }
+
+    public Kind kind() {
+        return kind;
+    }
+
+    public Place place() {
+        return place;
+    }
+
+    /** The symbol it stands for ({@code h_a}), or empty. */
+    public String symbol() {
+        return symbol;
+    }
+
+    /** The unit its number is in. */
+    public Unit unit() {
+        return unit;
+    }
+
+    /** What was typed, for a cell that is no formula. */
+    public @Nullable Value typed() {
+        return typed;
+    }
+
+    /** Its formula, for a live cell. */
+    public @Nullable Formula formula() {
+        return formula;
+    }
+
+    /**
+     * What the symbols of its formula point to. A quantity {@code 4 ft3/s} in the formula looks for the key {@code "1
+     * ft3/s"}: the cell that holds the size of the unit in the working system; where that size is 1 there is none.
+     */
+    public Map<String, Reference> references() {
+        return references;
+    }
+
+    public Sureness sureness() {
+        return sureness;
+    }
+
+    @Override
+    public String toString() {
+        return place.full() + (symbol.isEmpty() ? "" : " (" + symbol + ")");
+    }
+}

@@ -1,0 +1,64 @@
+package nappe.results;
+
+import java.math.BigDecimal;
+import java.math.RoundingMode;
+import nappe.unit.Dimension;
+import nappe.unit.Unit;
+
+/**
+ * How many digits are printed: lengths and levels to 0.001 ft or 0.1 mm, all else to four figures. Verdicts are made
+ * with full precision; only print is rounded.
+ */
+public final class Digits {
+    private static final int FIGURES = 4;
+
+    private Digits() {}
+
+    /** The decimals printed of a result in its working unit. */
+    public static int decimals(Unit unit, double value) {
+        if (unit.dimension().equals(Dimension.LENGTH)) {
+            return switch (unit.text()) {
+                case "m" -> 4;
+                case "ft" -> 3;
+                case "in" -> 2;
+                case "mm" -> 1;
+                default -> figures(value, FIGURES);
+            };
+        }
+        return figures(value, FIGURES);
+    }
+
+    /** The decimals that show so many figures of a value, at most 9. */
+    public static int figures(double value, int figures) {
+        if (value == 0) {
+            return 0;
+        }
+        int decimals = figures - 1 - (int) Math.floor(Math.log10(Math.abs(value)));
+        return Math.max(0, Math.min(9, decimals));
+    }
+
+    /** A result as printed. */
+    public static String print(Unit unit, double value) {
+        return print(value, decimals(unit, value));
+    }
+
+    /** A number with so many decimals, rounded half away from zero; never "-0". */
+    public static String print(double value, int decimals) {
+        BigDecimal rounded = BigDecimal.valueOf(value).setScale(decimals, RoundingMode.HALF_UP);
+        return (rounded.signum() == 0 ? rounded.abs() : rounded).toPlainString();
+    }
+
+    /** A number as typed: all its digits and no more. */
+    public static String asTyped(double value) {
+        BigDecimal number = BigDecimal.valueOf(value).stripTrailingZeros();
+        if (number.signum() != 0 && (Math.abs(value) < 1e-6 || Math.abs(value) >= 1e12)) {
+            return number.toString();
+        }
+        return number.scale() < 0 ? number.setScale(0).toPlainString() : number.toPlainString();
+    }
+
+    /** The workbook's number format for so many decimals: {@code 0.000}. */
+    public static String format(int decimals) {
+        return decimals == 0 ? "0" : "0." + "0".repeat(decimals);
+    }
+}

@@ -1,0 +1,5 @@
+/** A calculation into results: evaluation in order. */
+@NullMarked
+package nappe.solve;
+
+import org.jspecify.annotations.NullMarked;

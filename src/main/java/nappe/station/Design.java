@@ -1,0 +1,98 @@
+package nappe.station;
+
+import java.time.LocalDate;
+import java.util.List;
+import java.util.Map;
+import nappe.formula.Value;
+import nappe.unit.Unit;
+import nappe.unit.WorkingSystem;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * Everything typed in one input workbook.
+ *
+ * @param elements from the downstream end up
+ */
+public record Design(
+        Project project,
+        List<Element> elements,
+        List<FlowCase> cases,
+        List<Demand> demands,
+        List<Assumption> assumptions,
+        List<String> references,
+        List<Requirement> requirements,
+        List<RevisionNote> revisions) {
+
+    /** Where something was typed: sheet and cell of the input workbook. */
+    public record Origin(String sheet, String cell) {}
+
+    /**
+     * A typed quantity or word.
+     *
+     * @param value a number in the unit as typed, a word, or {@link Value.None} where it was left blank
+     * @param source source or basis, as typed
+     * @param standing "known" or "assumed"
+     */
+    public record Typed(Value value, Unit unit, String source, String standing, Origin origin) {}
+
+    /**
+     * @param number calculation number
+     * @param status "preliminary", "for checking", "issued" or "superseded"
+     * @param flowUnit reporting unit of flow beside the working one
+     * @param headUnit reporting unit of head beside the working one
+     * @param datum what elevations refer to
+     * @param workedCase name of the case worked in full; empty for the first
+     * @param release statement on the purpose of release of anything not issued
+     * @param sealSpace whether the cover keeps a clear space for a seal
+     */
+    public record Project(
+            String project,
+            String firm,
+            String client,
+            String number,
+            String subject,
+            String revision,
+            LocalDate date,
+            String status,
+            WorkingSystem system,
+            boolean letterPaper,
+            Unit flowUnit,
+            Unit headUnit,
+            String datum,
+            String workedCase,
+            String release,
+            boolean sealSpace) {}
+
+    /** A device with its tag ({@code F1}), the name of its method and what was typed for each symbol. */
+    public record Element(String tag, String title, String method, Map<String, Typed> typed) {}
+
+    /**
+     * One flow with one tailwater.
+     *
+     * @param typed what an element asks for in each case, by tag and symbol ({@code F1.h_g})
+     */
+    public record FlowCase(
+            String name,
+            String period,
+            String year,
+            Typed flow,
+            Typed tailwater,
+            String tailwaterReturn,
+            Map<String, Typed> typed) {}
+
+    /** A limit demanded by an authority or owner: a result of an element at most or at least a value, with citation. */
+    public record Demand(String tag, String symbol, boolean atMost, Typed value, String description, String citation) {}
+
+    /** @param open true until confirmed */
+    public record Assumption(String text, String basis, String owner, boolean open) {}
+
+    /** @param answer where it is answered: a title of a sheet, or words */
+    public record Requirement(String text, String citation, String answer) {}
+
+    public record RevisionNote(String revision, String date, String what) {}
+
+    /** The element with the tag, or null. */
+    public @Nullable Element element(String tag) {
+        return elements.stream().filter(e -> e.tag().equalsIgnoreCase(tag)).findFirst().orElse(null);
+    }
+}

@@ -1,0 +1,102 @@
+package nappe.unit;
+
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+import org.apache.commons.math3.fraction.Fraction;
+import org.jspecify.annotations.Nullable;
+import tech.units.indriya.function.RationalNumber;
+
+/** Reads one unit text: {@code term { (. | /) term }}, where a term is a name with an exponent, or {@code 1}. */
+final class UnitText {
+    private static final Pattern EXPONENT = Pattern.compile("^(?:\\^\\((-?\\d+)/(\\d+)\\)|\\^?(-?\\d+))");
+
+    private final String text;
+    private final UnitCatalogue catalogue;
+    private int at;
+
+    private Dimension dimension = Dimension.NONE;
+    private @Nullable RationalNumber exact = RationalNumber.ONE;
+    private double size = 1;
+
+    UnitText(String text, UnitCatalogue catalogue) {
+        this.text = text;
+        this.catalogue = catalogue;
+    }
+
+    Unit parse() {
+        if (text.isEmpty()) {
+            throw new UnitException("no unit is given; write 1 for a pure number");
+        }
+        boolean over = false;
+        while (true) {
+            term(over);
+            if (at == text.length()) {
+                return new Unit(text, dimension, exact, exact == null ? size : Unit.toDouble(exact), 0);
+            }
+            char sign = text.charAt(at++);
+            if (sign != '.' && sign != '/') {
+                throw unknown();
+            }
+            over = sign == '/';
+        }
+    }
+
+    private void term(boolean over) {
+        String rest = text.substring(at);
+        if (rest.startsWith("1") && (rest.length() == 1 || rest.charAt(1) == '/')) {
+            at++;
+            return;
+        }
+        String name = catalogue.nameAtStart(rest);
+        Unit unit = name == null ? null : catalogue.named(name);
+        if (name == null || unit == null) {
+            throw unknown();
+        }
+        at += name.length();
+        Fraction exponent = exponent();
+        if (unit.zeroInSi() != 0) {
+            throw new UnitException(text + ": " + name + " has a zero of its own and cannot stand in a compound unit");
+        }
+        multiply(unit, over ? exponent.negate() : exponent);
+    }
+
+    private Fraction exponent() {
+        Matcher matcher = EXPONENT.matcher(text.substring(at));
+        if (!matcher.find()) {
+            return Fraction.ONE;
+        }
+        at += matcher.end();
+        return matcher.group(3) != null
+                ? new Fraction(Integer.parseInt(matcher.group(3)))
+                : UnitCatalogue.fractionExponent(matcher.group(1), matcher.group(2));
+    }
+
+    private void multiply(Unit unit, Fraction exponent) {
+        dimension = dimension.times(unit.dimension().power(exponent));
+        size *= Math.pow(unit.sizeInSi(), exponent.doubleValue());
+        RationalNumber unitSize = unit.exact();
+        if (exact != null) {
+            if (unitSize == null) {
+                exact = null;
+            } else if (unitSize.equals(RationalNumber.ONE)) {
+                return;
+            } else if (exponent.getDenominator() == 1) {
+                exact = exact.multiply(unitSize.pow(exponent.getNumerator()));
+            } else {
+                exact = null;
+            }
+        }
+    }
+
+    private UnitException unknown() {
+        StringBuilder near = new StringBuilder();
+        for (UnitCatalogue.Entry entry : catalogue.entries()) {
+            String name = entry.unit().text();
+            if (name.equalsIgnoreCase(text)) {
+                near.append(near.isEmpty() ? "" : ", ").append(name);
+            }
+        }
+        return new UnitException(
+                "\"" + text + "\" is not a known unit" + (near.isEmpty() ? "" : "; did you mean " + near + "?"));
+    }
+}
