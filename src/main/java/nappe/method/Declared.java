@@ -1,6 +1,7 @@
 package nappe.method;
 
 import java.util.List;
+import nappe.formula.Sign;
 import nappe.unit.Unit;
 
 /**

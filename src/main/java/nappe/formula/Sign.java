@@ -1,6 +1,6 @@
-package nappe.method;
+package nappe.formula;
 
-/** Which signs a typed quantity may have. */
+/** Which signs a quantity may have. */
 public enum Sign {
     POSITIVE("greater than zero"),
     NOT_NEGATIVE("zero or greater"),
