@@ -1,0 +1,78 @@
+package nappe.formula;
+
+import java.util.function.UnaryOperator;
+
+/** The same formula with other names for its symbols. */
+public final class Renaming implements Reading<Formula> {
+    private final UnaryOperator<String> name;
+
+    private Renaming(UnaryOperator<String> name) {
+        this.name = name;
+    }
+
+    public static Formula of(Formula formula, UnaryOperator<String> name) {
+        return formula.read(new Renaming(name));
+    }
+
+    @Override
+    public Formula numeral(Formula.Numeral numeral) {
+        return numeral;
+    }
+
+    @Override
+    public Formula quantity(Formula.Quantity quantity) {
+        return quantity;
+    }
+
+    @Override
+    public Formula word(Formula.Word word) {
+        return word;
+    }
+
+    @Override
+    public Formula symbol(Formula.Symbol symbol) {
+        return new Formula.Symbol(name.apply(symbol.name()));
+    }
+
+    @Override
+    public Formula neighbour(Formula.Neighbour neighbour) {
+        return new Formula.Neighbour(neighbour.before(), name.apply(neighbour.name()));
+    }
+
+    @Override
+    public Formula summary(Formula.Summary summary) {
+        return new Formula.Summary(summary.kind(), name.apply(summary.name()));
+    }
+
+    @Override
+    public Formula negation(Formula.Negation negation) {
+        return new Formula.Negation(negation.of().read(this));
+    }
+
+    @Override
+    public Formula operation(Formula.Operation o) {
+        return new Formula.Operation(o.operator(), o.left().read(this), o.right().read(this));
+    }
+
+    @Override
+    public Formula comparison(Formula.Comparison c) {
+        return new Formula.Comparison(c.comparator(), c.left().read(this), c.right().read(this));
+    }
+
+    @Override
+    public Formula logic(Formula.Logic logic) {
+        return new Formula.Logic(
+                logic.kind(), logic.parts().stream().map(part -> part.read(this)).toList());
+    }
+
+    @Override
+    public Formula call(Formula.Call call) {
+        return new Formula.Call(
+                call.function(), call.arguments().stream().map(a -> a.read(this)).toList());
+    }
+
+    @Override
+    public Formula noResult(Formula.NoResult noResult) {
+        return noResult;
+    }
+}

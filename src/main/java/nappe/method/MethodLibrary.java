@@ -1,0 +1,64 @@
+package nappe.method;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
+import nappe.source.TextLibrary;
+
+/** The method sheets of a library, read when they are first asked for. */
+public final class MethodLibrary implements MethodCatalogue {
+    private final TextLibrary library;
+    private final Map<String, MethodSheet> sheets = new ConcurrentHashMap<>();
+
+    public MethodLibrary(TextLibrary library) {
+        this.library = library;
+    }
+
+    /** The sheet of a name; faults of its text as {@link MethodException}. */
+    public MethodSheet sheet(String name) {
+        return sheets.computeIfAbsent(name, n -> new MethodReader(library).read(n));
+    }
+
+    /** Names of the texts that start with "method"; others are parts to be included. */
+    @Override
+    public List<String> names() {
+        return library.names("methods").stream()
+                .filter(name -> name.endsWith(".txt") && startsWithMethod(name))
+                .map(name -> name.substring(0, name.length() - 4))
+                .toList();
+    }
+
+    private boolean startsWithMethod(String file) {
+        String text = library.text("methods/" + file);
+        return text != null
+                && text.lines().filter(l -> !l.isBlank() && !l.startsWith("#")).findFirst().orElse("").startsWith("method ");
+    }
+
+    @Override
+    public boolean knows(String name) {
+        return names().contains(name);
+    }
+
+    @Override
+    public String title(String name) {
+        return sheet(name).title();
+    }
+
+    @Override
+    public List<Declared> declared(String name) {
+        List<Declared> declared = new ArrayList<>();
+        for (Item item : sheet(name).items()) {
+            if (item instanceof Item.Given given && given.role().isEmpty() && given.from() != Item.From.NEIGHBOUR) {
+                Declared.Kind kind = switch (given.from()) {
+                    case CHOICE -> Declared.Kind.CHOICE;
+                    case CASE -> Declared.Kind.CASE;
+                    default -> Declared.Kind.ENTRY;
+                };
+                declared.add(new Declared(
+                        kind, given.symbol(), given.unit(), given.label(), given.sign(), given.optional(), given.words()));
+            }
+        }
+        return declared;
+    }
+}

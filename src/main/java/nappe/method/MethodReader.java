@@ -1,0 +1,65 @@
+package nappe.method;
+
+import java.util.Set;
+import nappe.formula.FormulaException;
+import nappe.source.TableException;
+import nappe.source.TextLibrary;
+import nappe.unit.UnitException;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * Reads the text form of method sheets. The statements are listed in DEVELOPERS.md; {@link StatementReader} has a method
+ * for each. All faults are collected, none that only follows from another.
+ */
+public final class MethodReader {
+    private final TextLibrary library;
+
+    public MethodReader(TextLibrary library) {
+        this.library = library;
+    }
+
+    /**
+     * The method sheet of a name: {@code parshall-flume} stands in {@code methods/parshall-flume.txt}.
+     *
+     * @throws MethodException with all faults
+     */
+    public MethodSheet read(String name) {
+        SheetDraft draft = new SheetDraft();
+        String text = library.text("methods/" + name + ".txt");
+        if (text == null) {
+            throw new MethodException(java.util.List.of(
+                    new MethodFault(name + ".txt", 1, 1, "there is no such method sheet", "method-missing", "")));
+        }
+        readInto(draft, name, text, null, Set.of(name));
+        if (draft.title.isEmpty()) {
+            draft.faults.add(new MethodFault(
+                    name + ".txt", 1, 1, "the first statement is \"method\" with a title", "title-missing", ""));
+        }
+        if (!draft.faults.isEmpty()) {
+            throw new MethodException(draft.faults);
+        }
+        return draft.finish(name);
+    }
+
+    /** Reads a text, or one that it includes, into the draft. */
+    void readInto(SheetDraft draft, String name, String text, @Nullable String subscript, Set<String> open) {
+        draft.text.append(text).append('\n');
+        for (Statement statement : Statement.of(name + ".txt", text)) {
+            StatementReader reader = new StatementReader(draft, statement, subscript, this, library, open);
+            try {
+                reader.read();
+            } catch (FormulaException e) {
+                reader.spoil();
+                if (!e.code().equals(SheetDraft.FOLLOWS)) {
+                    draft.faults.add(statement.fault(reader.base() + e.offset(), e.getMessage(), e.code()));
+                }
+            } catch (UnitException e) {
+                reader.spoil();
+                draft.faults.add(statement.fault(reader.base(), e.getMessage(), "unit-unknown"));
+            } catch (TableException e) {
+                reader.spoil();
+                draft.faults.add(statement.fault(reader.base(), e.getMessage(), "table-faulty"));
+            }
+        }
+    }
+}

@@ -1,0 +1,100 @@
+package nappe.method;
+
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import nappe.formula.DimensionReading;
+import nappe.formula.FormulaException;
+import nappe.source.CitedTable;
+import nappe.source.Publication;
+import org.jspecify.annotations.Nullable;
+
+/** A method sheet while it is being read: what is known so far, and the faults so far. */
+final class SheetDraft {
+    final List<MethodFault> faults = new ArrayList<>();
+    final List<String> about = new ArrayList<>();
+    final List<String> cautions = new ArrayList<>();
+    final Map<String, Publication> sources = new LinkedHashMap<>();
+    final List<Item> items = new ArrayList<>();
+    final List<Limit> limits = new ArrayList<>();
+    final List<Rating> ratings = new ArrayList<>();
+    final Map<String, String> gives = new LinkedHashMap<>();
+    final Map<String, CitedTable> tables = new LinkedHashMap<>();
+    final Map<String, Set<String>> reach = new LinkedHashMap<>();
+    final StringBuilder text = new StringBuilder();
+    String title = "";
+    @Nullable CitedTable openTable;
+    @Nullable String openRow;
+    @Nullable String openShare;
+
+    private final Map<String, DimensionReading.Outcome> outcomes = new LinkedHashMap<>();
+    private final Set<String> broken = new HashSet<>();
+
+    /** A fault that only follows from another; it is not reported. */
+    static final String FOLLOWS = "follows";
+
+    /** The outcome of a symbol that is defined above. */
+    DimensionReading.Outcome outcome(String symbol) {
+        DimensionReading.Outcome outcome = outcomes.get(symbol);
+        if (outcome != null) {
+            return outcome;
+        }
+        throw broken.contains(symbol)
+                ? new FormulaException(symbol, 0, 1, FOLLOWS)
+                : new FormulaException(symbol + " is not defined above", 0, symbol.length(), "symbol-unknown");
+    }
+
+    boolean knows(String symbol) {
+        return outcomes.containsKey(symbol);
+    }
+
+    void markBroken(String symbol) {
+        broken.add(symbol);
+    }
+
+    void define(String symbol, DimensionReading.Outcome outcome) {
+        outcomes.put(symbol, outcome);
+    }
+
+    /** Adds an item whose outputs have been defined, and works out what they rest on. */
+    void add(Item item) {
+        items.add(item);
+        Set<String> all = new LinkedHashSet<>();
+        for (String symbol : Closure.restsOn(item)) {
+            all.addAll(reach.getOrDefault(symbol, Set.of(symbol)));
+        }
+        String bound = bound(item);
+        if (bound != null) {
+            all.remove(bound);
+        }
+        for (String output : item.outputs()) {
+            Set<String> own = new LinkedHashSet<>(all);
+            own.add(output);
+            reach.put(output, own);
+        }
+    }
+
+    private static @Nullable String bound(Item item) {
+        return item instanceof Item.At at ? at.free() : item instanceof Item.Root root ? root.free() : null;
+    }
+
+    MethodSheet finish(String name) {
+        return new MethodSheet(
+                name,
+                title,
+                List.copyOf(about),
+                List.copyOf(cautions),
+                List.copyOf(sources.values()),
+                List.copyOf(items),
+                List.copyOf(limits),
+                List.copyOf(ratings),
+                Map.copyOf(gives),
+                new LinkedHashMap<>(tables),
+                new LinkedHashMap<>(reach),
+                text.toString());
+    }
+}
