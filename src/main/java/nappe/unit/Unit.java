@@ -88,6 +88,11 @@ public final class Unit {
                 .doubleValue();
     }
 
+    /** A whole power, negative ones too: the library's own {@code pow} fails on those. */
+    static RationalNumber power(RationalNumber number, int exponent) {
+        return exponent < 0 ? number.reciprocal().pow(-exponent) : number.pow(exponent);
+    }
+
     static Number narrow(Number number) {
         return Calculus.currentNumberSystem().narrow(number);
     }

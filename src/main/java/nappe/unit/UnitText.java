@@ -81,7 +81,7 @@ final class UnitText {
             } else if (unitSize.equals(RationalNumber.ONE)) {
                 return;
             } else if (exponent.getDenominator() == 1) {
-                exact = exact.multiply(unitSize.pow(exponent.getNumerator()));
+                exact = exact.multiply(Unit.power(unitSize, exponent.getNumerator()));
             } else {
                 exact = null;
             }

@@ -69,7 +69,7 @@ public enum WorkingSystem {
             if (base == null || exponent.getDenominator() != 1) {
                 return unit.sizeInSi() / coherentUnit(unit.dimension()).sizeInSi();
             }
-            size = size.divide(base.pow(exponent.getNumerator()));
+            size = size.divide(Unit.power(base, exponent.getNumerator()));
         }
         return Unit.toDouble(size);
     }
