@@ -1,0 +1,96 @@
+package nappe.calculation;
+
+import java.util.Map;
+import nappe.formula.Formula;
+import nappe.formula.PlainReading;
+import nappe.method.Item;
+
+/**
+ * Lays items of a method sheet as cells under a scope. One recursion serves case columns, trial rows and rating tables;
+ * they differ in the scope and the strip.
+ */
+public final class ItemLayout {
+    private final Cells cells;
+    private final TrialRows trialRows;
+
+    public ItemLayout(Cells cells, TrialRows trialRows) {
+        this.cells = cells;
+        this.trialRows = trialRows;
+        trialRows.use(this);
+    }
+
+    public Cells cells() {
+        return cells;
+    }
+
+    /** Lays one item; what it defines is then known in the scope. */
+    public void lay(Item item, Scope scope, Strip strip) {
+        if (item instanceof Item.Line line) {
+            lay(line, line.symbol(), "", scope, strip);
+        } else if (item instanceof Item.At at) {
+            lay(at, scope, strip);
+        } else if (item instanceof Item.Root root) {
+            lay(root, scope, strip);
+        }
+    }
+
+    private void lay(Item.Line line, String shownAs, String where, Scope scope, Strip strip) {
+        Cell cell = cells.live(
+                strip.next(), shownAs, line.unit(), line.formula(), scope, line.knownSign(), line.mayBeBlank());
+        scope.put(line.symbol(), cell);
+        strip.add(new Strip.Laid(shownAs, line.label() + where, "", line.source(), cell));
+    }
+
+    private void lay(Item.At at, Scope scope, Strip strip) {
+        Scope known = at.value() instanceof Formula.Symbol value ? scope.atRoot(value.name()) : null;
+        Scope inner = known != null && known.hasOwn(at.free()) ? known : scope.inner();
+        String where = ", at " + at.free() + " = " + PlainReading.of(at.value());
+        if (inner != known) {
+            bind(at, scope, inner, strip);
+        }
+        for (Item member : at.members()) {
+            if (member.outputs().stream().allMatch(inner::hasOwn)) {
+                continue;
+            }
+            if (member instanceof Item.Line line) {
+                lay(line, nameFor(at, line.symbol()), where, inner, strip);
+            } else {
+                lay(member, inner, strip);
+            }
+        }
+        at.results().forEach((name, symbol) -> scope.put(name, inner.cell(symbol)));
+    }
+
+    private void bind(Item.At at, Scope scope, Scope inner, Strip strip) {
+        if (at.value() instanceof Formula.Symbol value) {
+            inner.put(at.free(), scope.cell(value.name()));
+        } else {
+            Cell cell = cells.live(strip.next(), at.free(), null, at.value(), scope);
+            inner.put(at.free(), cell);
+            strip.add(new Strip.Laid(at.free(), "value of " + at.free(), "", "", cell));
+        }
+    }
+
+    private static String nameFor(Item.At at, String member) {
+        return at.results().entrySet().stream()
+                .filter(result -> result.getValue().equals(member))
+                .map(Map.Entry::getKey)
+                .findFirst()
+                .orElse(member);
+    }
+
+    private void lay(Item.Root root, Scope scope, Strip strip) {
+        Cell result = trialRows.lay(root, scope, strip);
+        scope.put(root.symbol(), result);
+        Scope inner = scope.inner();
+        inner.put(root.free(), result);
+        for (Item member : root.members()) {
+            if (member instanceof Item.Line line) {
+                lay(line, line.symbol(), ", at " + root.free() + " = " + root.symbol(), inner, strip);
+            } else {
+                lay(member, inner, strip);
+            }
+        }
+        scope.putAtRoot(root.symbol(), inner);
+    }
+}

@@ -1,0 +1,88 @@
+package nappe.calculation;
+
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * A sheet while it is being laid out, from top to bottom. Rows 0 to 3 are kept for the head of the sheet. One table at a
+ * time is open; it closes when the next block is added.
+ */
+public final class SheetDraft {
+    /** The first row for blocks. */
+    public static final int FIRST_ROW = 4;
+
+    private final String name;
+    private final String title;
+    private final List<Block> blocks = new ArrayList<>();
+    private int next = FIRST_ROW;
+
+    public SheetDraft(String name, String title) {
+        this.name = name;
+        this.title = title;
+    }
+
+    public String name() {
+        return name;
+    }
+
+    public String title() {
+        return title;
+    }
+
+    /** The row on which the next block starts. */
+    public int nextRow() {
+        return next;
+    }
+
+    public void heading(String text) {
+        blocks.add(new Block.Heading(next, text));
+        next++;
+    }
+
+    public void note(String text) {
+        blocks.add(new Block.Note(next, text, false));
+        next++;
+    }
+
+    public void caution(String text) {
+        blocks.add(new Block.Note(next, text, true));
+        next++;
+    }
+
+    /** A table to which rows are added; empty title for none. */
+    public TableDraft table(String title, List<Block.Column> columns) {
+        TableDraft table = new TableDraft(this, next, title, columns, false);
+        blocks.add(table.block());
+        next = table.nextRow();
+        return table;
+    }
+
+    /** A table that stands in the workbook only. */
+    public TableDraft workbookTable(String title, List<Block.Column> columns) {
+        TableDraft table = new TableDraft(this, next, title, columns, true);
+        blocks.add(table.block());
+        next = table.nextRow();
+        return table;
+    }
+
+    /** Lines of a calculation, whose rows were placed from {@link #nextRow()} + 1 on. */
+    public void lines(List<String> caseNames, int workedCase, List<Block.Line> lines) {
+        blocks.add(new Block.Lines(next, caseNames, workedCase, List.copyOf(lines)));
+        next += 1 + lines.size();
+        gap();
+    }
+
+    /** One empty row. */
+    public void gap() {
+        next++;
+    }
+
+    void grown(TableDraft table) {
+        next = table.nextRow();
+    }
+
+    /** The finished sheet. */
+    public Sheet finish(int number) {
+        return new Sheet(number, name, title, List.copyOf(blocks));
+    }
+}

@@ -1,0 +1,58 @@
+package nappe.calculation;
+
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * A run of places that lines are laid into: down a column of a calculation sheet, or along a row of a grid. The only
+ * thing that knows which.
+ */
+public final class Strip {
+    /**
+     * A line as laid.
+     *
+     * @param equation text in place of the cell's formula; empty for the formula itself
+     */
+    public record Laid(String symbol, String label, String equation, String source, Cell cell) {}
+
+    private final String sheet;
+    private final boolean down;
+    private int row;
+    private int column;
+    private final List<Laid> laid = new ArrayList<>();
+
+    private Strip(String sheet, int row, int column, boolean down) {
+        this.sheet = sheet;
+        this.row = row;
+        this.column = column;
+        this.down = down;
+    }
+
+    public static Strip down(String sheet, int row, int column) {
+        return new Strip(sheet, row, column, true);
+    }
+
+    public static Strip along(String sheet, int row, int column) {
+        return new Strip(sheet, row, column, false);
+    }
+
+    /** The next free place. */
+    Place next() {
+        Place place = new Place(sheet, row, column);
+        if (down) {
+            row++;
+        } else {
+            column++;
+        }
+        return place;
+    }
+
+    void add(Laid line) {
+        laid.add(line);
+    }
+
+    /** What has been laid, in order. */
+    public List<Laid> laid() {
+        return laid;
+    }
+}
