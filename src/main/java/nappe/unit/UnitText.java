@@ -8,7 +8,8 @@ import tech.units.indriya.function.RationalNumber;
 
 /** Reads one unit text: {@code term { (. | /) term }}, where a term is a name with an exponent, or {@code 1}. */
 final class UnitText {
-    private static final Pattern EXPONENT = Pattern.compile("^(?:\\^\\((-?\\d+)/(\\d+)\\)|\\^?(-?\\d+))");
+    /** At most two figures and never zero, so that a slip of typing is a fault and not a vast power. */
+    private static final Pattern EXPONENT = Pattern.compile("^(?:\\^\\((-?[1-9]\\d?)/([1-9]\\d?)\\)|\\^?(-?[1-9]\\d?))");
 
     private final String text;
     private final UnitCatalogue catalogue;
@@ -31,7 +32,7 @@ final class UnitText {
         while (true) {
             term(over);
             if (at == text.length()) {
-                return new Unit(text, dimension, exact, exact == null ? size : Unit.toDouble(exact), 0);
+                return new Unit(text, dimension, exact, exact == null ? size : Unit.toDouble(exact), RationalNumber.ZERO);
             }
             char sign = text.charAt(at++);
             if (sign != '.' && sign != '/') {
