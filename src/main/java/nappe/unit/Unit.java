@@ -14,9 +14,9 @@ public final class Unit {
     private final Dimension dimension;
     private final @Nullable RationalNumber exact;
     private final double size;
-    private final double zero;
+    private final RationalNumber zero;
 
-    Unit(String text, Dimension dimension, @Nullable RationalNumber exact, double size, double zero) {
+    Unit(String text, Dimension dimension, @Nullable RationalNumber exact, double size, RationalNumber zero) {
         this.text = text;
         this.dimension = dimension;
         this.exact = exact;
@@ -54,7 +54,7 @@ public final class Unit {
 
     /** What the zero of this unit is in coherent SI units: 273.15 for degC, 0 for nearly all. */
     public double zeroInSi() {
-        return zero;
+        return toDouble(zero);
     }
 
     /** How many coherent units of the system one of this unit is; exact to the last bit where it is a fraction. */
@@ -64,7 +64,8 @@ public final class Unit {
 
     /** What the zero of this unit is in coherent units of the system. */
     public double zeroIn(WorkingSystem system) {
-        return zero == 0 ? 0 : zero / system.coherentUnit(dimension).sizeInSi();
+        RationalNumber coherent = system.coherentUnit(dimension).exact();
+        return coherent == null || zero.signum() == 0 ? zeroInSi() : toDouble(zero.divide(coherent));
     }
 
     @Override

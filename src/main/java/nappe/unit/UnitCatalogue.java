@@ -104,7 +104,7 @@ public final class UnitCatalogue {
         if (!unit.getSystemUnit().equals(unit)) {
             throw new IllegalStateException(name + " is not a base unit");
         }
-        add(new Entry(new Unit(name, dimension, RationalNumber.ONE, 1, 0), description, "base unit of SI", "SI Brochure, 9th ed."));
+        add(new Entry(new Unit(name, dimension, RationalNumber.ONE, 1, RationalNumber.ZERO), description, "base unit of SI", "SI Brochure, 9th ed."));
     }
 
     private void add(Entry entry) {
@@ -141,14 +141,14 @@ public final class UnitCatalogue {
         String definition = factor + " " + of + (zero.isEmpty() ? "" : ", from " + zero + " " + of);
         Unit unit;
         if (factor.equals("pi/180")) {
-            unit = new Unit(row.get("name"), base.dimension(), null, base.sizeInSi() * Math.PI / 180, 0);
+            unit = new Unit(row.get("name"), base.dimension(), null, base.sizeInSi() * Math.PI / 180, RationalNumber.ZERO);
         } else {
             RationalNumber baseSize = base.exact();
             if (baseSize == null) {
                 throw new IllegalStateException("units.csv: " + of + " has no exact size");
             }
             RationalNumber size = fraction(factor).multiply(baseSize);
-            double zeroInSi = zero.isEmpty() ? 0 : Unit.toDouble(fraction(zero).multiply(baseSize));
+            RationalNumber zeroInSi = zero.isEmpty() ? RationalNumber.ZERO : fraction(zero).multiply(baseSize);
             unit = new Unit(row.get("name"), base.dimension(), size, throughLibrary(size), zeroInSi);
         }
         return new Entry(unit, row.get("description"), definition, row.get("source"));

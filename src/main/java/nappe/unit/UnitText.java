@@ -1,5 +1,6 @@
 package nappe.unit;
 
+import java.util.List;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import org.apache.commons.math3.fraction.Fraction;
@@ -8,7 +9,10 @@ import tech.units.indriya.function.RationalNumber;
 
 /** Reads one unit text: {@code term { (. | /) term }}, where a term is a name with an exponent, or {@code 1}. */
 final class UnitText {
-    private static final Pattern EXPONENT = Pattern.compile("^(?:\\^\\((-?\\d+)/(\\d+)\\)|\\^?(-?\\d+))");
+    /** At most two figures and never zero, so that a slip of typing is a fault and not a vast power. */
+    private static final Pattern EXPONENT = Pattern.compile("^(?:\\^\\((-?[1-9]\\d?)/([1-9]\\d?)\\)|\\^?(-?[1-9]\\d?))");
+
+    private static final Pattern LETTERS = Pattern.compile("[A-Za-z]+");
 
     private final String text;
     private final UnitCatalogue catalogue;
@@ -31,7 +35,7 @@ final class UnitText {
         while (true) {
             term(over);
             if (at == text.length()) {
-                return new Unit(text, dimension, exact, exact == null ? size : Unit.toDouble(exact), 0);
+                return new Unit(text, dimension, exact, exact == null ? size : Unit.toDouble(exact), RationalNumber.ZERO);
             }
             char sign = text.charAt(at++);
             if (sign != '.' && sign != '/') {
@@ -89,14 +93,27 @@ final class UnitText {
     }
 
     private UnitException unknown() {
-        StringBuilder near = new StringBuilder();
-        for (UnitCatalogue.Entry entry : catalogue.entries()) {
-            String name = entry.unit().text();
-            if (name.equalsIgnoreCase(text)) {
-                near.append(near.isEmpty() ? "" : ", ").append(name);
-            }
-        }
+        String near = String.join(", ", near());
         return new UnitException(
                 "\"" + text + "\" is not a known unit" + (near.isEmpty() ? "" : "; did you mean " + near + "?"));
+    }
+
+    /** Named units that differ in capitals or go on in brackets; else the same text in the letters of the catalogue. */
+    private List<String> near() {
+        List<String> names = catalogue.entries().stream()
+                .map(entry -> entry.unit().text())
+                .filter(name -> name.equalsIgnoreCase(text) || name.startsWith(text + "("))
+                .toList();
+        String respelt = respelt();
+        return names.isEmpty() && !respelt.equals(text) && catalogue.knows(respelt) ? List.of(respelt) : names;
+    }
+
+    private String respelt() {
+        String plain = text.replace(" ", "").replace('\u00b2', '2').replace('\u00b3', '3').replace('\u00b7', '.');
+        return LETTERS.matcher(plain).replaceAll(run -> catalogue.entries().stream()
+                .map(entry -> entry.unit().text())
+                .filter(name -> catalogue.named(run.group()) == null && name.equalsIgnoreCase(run.group()))
+                .findFirst()
+                .orElse(run.group()));
     }
 }
