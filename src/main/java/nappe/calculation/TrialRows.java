@@ -1,11 +1,19 @@
 package nappe.calculation;
 
+import static nappe.calculation.Formulas.call;
+import static nappe.calculation.Formulas.iff;
+import static nappe.calculation.Formulas.minus;
+import static nappe.calculation.Formulas.number;
+import static nappe.calculation.Formulas.over;
+import static nappe.calculation.Formulas.symbol;
+import static nappe.calculation.Formulas.times;
+import static nappe.calculation.Formulas.word;
+
 import java.util.ArrayList;
 import java.util.List;
 import nappe.formula.Comparator;
 import nappe.formula.Formula;
 import nappe.formula.Function;
-import nappe.formula.Operator;
 import nappe.formula.PlainReading;
 import nappe.formula.Value;
 import nappe.method.Item;
@@ -19,13 +27,13 @@ import org.jspecify.annotations.Nullable;
  */
 public final class TrialRows {
     /** How one root of one case went. */
-    public record Block(Item.Root root, String tag, String caseName, Cell status, Cell residual, List<Cell> trials) {}
+    public record Solved(Item.Root root, String tag, String caseName, Cell status, Cell residual, List<Cell> trials) {}
 
     private static final Formula ZERO = number("0");
 
     private final Cells cells;
     private final SheetDraft sheet;
-    private final List<Block> blocks = new ArrayList<>();
+    private final List<Solved> solved = new ArrayList<>();
     private @Nullable ItemLayout layout;
     private String tag = "";
     private String caseName = "";
@@ -46,8 +54,8 @@ public final class TrialRows {
     }
 
     /** Every root laid so far. */
-    public List<Block> blocks() {
-        return blocks;
+    public List<Solved> solved() {
+        return solved;
     }
 
     Cell lay(Item.Root root, Scope scope, Strip strip) {
@@ -72,7 +80,7 @@ public final class TrialRows {
         String equation = root.free() + " where " + PlainReading.of(root.left()) + " = " + PlainReading.of(root.right())
                 + ", in trial rows";
         strip.add(new Strip.Laid(root.symbol(), root.label(), equation, root.source(), result));
-        blocks.add(new Block(
+        solved.add(new Solved(
                 root, tag, caseName, status, last.difference, trials.stream().map(t -> t.difference).toList()));
         return result;
     }
@@ -91,8 +99,7 @@ public final class TrialRows {
         if (root.below() == null && root.above() == null) {
             return word("no root in the bracket");
         }
-        Formula nearLower = compare(
-                Comparator.BELOW, call(Function.ABS, symbol("d_1")), call(Function.ABS, symbol("d_2")));
+        Formula nearLower = compare(Comparator.BELOW, call(Function.ABS, symbol("d_1")), call(Function.ABS, symbol("d_2")));
         return iff(nearLower,
                 word(root.below() == null ? "no root in the bracket" : "below the bracket"),
                 word(root.above() == null ? "no root in the bracket" : "above the bracket"));
@@ -114,8 +121,8 @@ public final class TrialRows {
     private Trial row(Item.Root root, Scope scope, ItemLayout items, TableDraft table, List<Trial> before) {
         int k = before.size();
         Scope rows = scope.inner();
-        List<nappe.calculation.Block.Item> shown = new ArrayList<>();
-        shown.add(new nappe.calculation.Block.Text(Integer.toString(k + 1)));
+        List<Block.Item> shown = new ArrayList<>();
+        shown.add(new Block.Text(Integer.toString(k + 1)));
         if (k >= 1) {
             rows.put("d_1", before.get(0).difference);
         }
@@ -130,16 +137,16 @@ public final class TrialRows {
         }
         Formula formula = k == 0 ? root.from() : k == 1 ? root.to() : next();
         Cell x = cells.live(table.place(1), root.free(), root.unit(), formula, k < 2 ? scope : rows,
-                freeSign(scope, root), false);
-        shown.add(new nappe.calculation.Block.Content(x));
+                root.freeSign(), false);
+        shown.add(new Block.Content(x));
 
         Scope trial = scope.inner();
         trial.put(root.free(), x);
         Strip strip = Strip.along(table.place(2).sheet(), table.nextRow(), 2);
         root.members().forEach(member -> items.lay(member, trial, strip));
-        strip.laid().forEach(line -> shown.add(new nappe.calculation.Block.Content(line.cell())));
+        strip.laid().forEach(line -> shown.add(new Block.Content(line.cell())));
         Cell difference = cells.live(strip.next(), "d", null, difference(root), trial);
-        shown.add(new nappe.calculation.Block.Content(difference));
+        shown.add(new Block.Content(difference));
 
         Cell other = null;
         Cell weighted = null;
@@ -155,19 +162,14 @@ public final class TrialRows {
             }
             other = cells.live(strip.next(), "x_o", root.unit(), k == 1 ? symbol("x_p") : otherEnd(), ends);
             weighted = cells.live(strip.next(), "d_o", null, k == 1 ? symbol("d_p") : weighting(), ends);
-            shown.add(new nappe.calculation.Block.Content(other));
-            shown.add(new nappe.calculation.Block.Content(weighted));
+            shown.add(new Block.Content(other));
+            shown.add(new Block.Content(weighted));
         } else {
-            shown.add(new nappe.calculation.Block.Text(""));
-            shown.add(new nappe.calculation.Block.Text(""));
+            shown.add(new Block.Text(""));
+            shown.add(new Block.Text(""));
         }
         table.add(shown);
         return new Trial(x, difference, other, weighted);
-    }
-
-    /** The sign of the free symbol as its method sheet declares it: trials stay inside the bracket. */
-    private nappe.formula.@Nullable Sign freeSign(Scope scope, Item.Root root) {
-        return nappe.formula.Sign.POSITIVE;
     }
 
     /** {@code if(d_1*d_2 > 0, x_1, if(same(d_p, d_o), x_p, x_p - d_p*(x_p - x_o)/(d_p - d_o)))}. */
@@ -203,8 +205,8 @@ public final class TrialRows {
                 times(symbol("d_o"), weight));
     }
 
-    private List<nappe.calculation.Block.Column> columns(Item.Root root) {
-        List<nappe.calculation.Block.Column> columns = new ArrayList<>();
+    private List<Block.Column> columns(Item.Root root) {
+        List<Block.Column> columns = new ArrayList<>();
         columns.add(column("Trial"));
         columns.add(column(root.free() + " [" + cells.unit(root.unit().dimension()) + "]"));
         for (Item member : root.members()) {
@@ -223,43 +225,11 @@ public final class TrialRows {
         return unit == null || unit.dimension().isNone() ? "" : " [" + cells.unit(unit.dimension()) + "]";
     }
 
-    private static nappe.calculation.Block.Column column(String head) {
-        return new nappe.calculation.Block.Column(head, 16, nappe.calculation.Block.Align.RIGHT);
-    }
-
-    private static Formula symbol(String name) {
-        return new Formula.Symbol(name);
-    }
-
-    private static Formula word(String text) {
-        return new Formula.Word(text);
-    }
-
-    private static Formula number(String text) {
-        return new Formula.Numeral(Double.parseDouble(text), text);
-    }
-
-    private static Formula iff(Formula condition, Formula yes, Formula no) {
-        return call(Function.IF, condition, yes, no);
-    }
-
-    private static Formula call(Function function, Formula... arguments) {
-        return new Formula.Call(function, List.of(arguments));
+    private static Block.Column column(String head) {
+        return new Block.Column(head, 16, Block.Align.RIGHT);
     }
 
     private static Formula compare(Comparator comparator, Formula left, Formula right) {
-        return new Formula.Comparison(comparator, left, right);
-    }
-
-    private static Formula times(Formula a, Formula b) {
-        return new Formula.Operation(Operator.TIMES, a, b);
-    }
-
-    private static Formula over(Formula a, Formula b) {
-        return new Formula.Operation(Operator.OVER, a, b);
-    }
-
-    private static Formula minus(Formula a, Formula b) {
-        return new Formula.Operation(Operator.MINUS, a, b);
+        return Formulas.compare(left, comparator, right);
     }
 }

@@ -110,6 +110,7 @@ public sealed interface Item {
     record Root(
             String symbol,
             String free,
+            Sign freeSign,
             Formula left,
             Formula right,
             Formula from,

@@ -271,7 +271,7 @@ final class StatementReader {
         List<Item> members = Closure.of(draft.items, draft.reach, free, targets);
         define(symbol, unit);
         draft.add(new Item.Root(
-                symbol, free, left, right, from, to, below, above, trials, members, unit, text(2), source(3)));
+                symbol, free, signOf(free), left, right, from, to, below, above, trials, members, unit, text(2), source(3)));
     }
 
     private void at() {
@@ -452,6 +452,14 @@ final class StatementReader {
             throw fault(symbol + " is not a free symbol", "not-free");
         }
         return symbol;
+    }
+
+    private Sign signOf(String free) {
+        return draft.items.stream()
+                .filter(item -> item instanceof Item.Free f && f.symbol().equals(free))
+                .map(item -> ((Item.Free) item).sign())
+                .findFirst()
+                .orElse(Sign.ANY);
     }
 
     private Formula renamed(Formula formula) {
