@@ -1,0 +1,244 @@
+package nappe.deliver.xlsx;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.Collectors;
+import nappe.calculation.Cell;
+import nappe.calculation.Reference;
+import nappe.calculation.Run;
+import nappe.calculation.Sureness;
+import nappe.formula.Formula;
+import nappe.formula.Function;
+import nappe.formula.Guard;
+import nappe.formula.Operator;
+import nappe.formula.Reading;
+import nappe.formula.Value;
+import nappe.formula.Written;
+
+/**
+ * The formula of a live cell as spreadsheet text, without the leading equals sign: {@code IF(ISNUMBER(E5),4*(E6^1.5),E5)}.
+ *
+ * <p>Spreadsheet programs disagree on a leading minus before {@code ^} and on chained powers, so every negation that
+ * stands in something larger and every compound side of a power is in brackets. Comparisons of numbers carry the
+ * tolerance of {@link nappe.formula.Tolerance}. A unit whose size is one vanishes.
+ *
+ * <p>A cell passes on words by the rule of {@link Guard}: each symbol that must be a number and whose cell is not sure
+ * to hold one is asked first, in that order, and its words are shown. Inside these questions, a cell that may be outside
+ * its range of definition shows "no result" instead of an error.
+ */
+public final class SpreadsheetReading implements Reading<Written> {
+    private static final int ARITHMETIC = Operator.PLUS.binding();
+    private static final int MINUS_SIGN = Written.CONDITION;
+
+    private final Cell cell;
+
+    private SpreadsheetReading(Cell cell) {
+        this.cell = cell;
+    }
+
+    /** The spreadsheet text of a live cell. */
+    public static String of(Cell cell) {
+        Formula formula = cell.formula();
+        if (formula == null) {
+            throw new IllegalArgumentException(cell + " is typed and has no formula");
+        }
+        SpreadsheetReading reading = new SpreadsheetReading(cell);
+        String text = formula.read(reading).text();
+        if (cell.sureness() == Sureness.MAY_FAIL) {
+            text = "IFERROR(" + text + "," + quoted(Value.NO_RESULT) + ")";
+        }
+        List<String> guards = reading.guards(formula);
+        for (int i = guards.size() - 1; i >= 0; i--) {
+            text = "IF(ISNUMBER(" + guards.get(i) + ")," + text + "," + guards.get(i) + ")";
+        }
+        return text;
+    }
+
+    private List<String> guards(Formula formula) {
+        List<String> addresses = new ArrayList<>();
+        for (String symbol : Guard.guarded(formula)) {
+            if (cell.references().get(symbol) instanceof Cell other && other.sureness() != Sureness.SURE) {
+                addresses.add(addressOf(other));
+            }
+        }
+        return addresses;
+    }
+
+    @Override
+    public Written numeral(Formula.Numeral numeral) {
+        return numeral.value() < 0
+                ? new Written(number(numeral.value()), MINUS_SIGN)
+                : Written.whole(number(numeral.value()));
+    }
+
+    /** A unit whose size is not one stands in a cell of its own. */
+    @Override
+    public Written quantity(Formula.Quantity quantity) {
+        Reference size = cell.references().get("1 " + quantity.unit().text());
+        if (size == null) {
+            return numeral(new Formula.Numeral(quantity.value(), quantity.text()));
+        }
+        if (quantity.value() == 1) {
+            return Written.whole(address(size));
+        }
+        Written number = numeral(new Formula.Numeral(quantity.value(), quantity.text()));
+        return new Written(number.within(ARITHMETIC) + "*" + address(size), Operator.TIMES.binding());
+    }
+
+    @Override
+    public Written word(Formula.Word word) {
+        return Written.whole(quoted(word.text()));
+    }
+
+    @Override
+    public Written symbol(Formula.Symbol symbol) {
+        return Written.whole(address(reference(symbol.name())));
+    }
+
+    @Override
+    public Written neighbour(Formula.Neighbour neighbour) {
+        return Written.whole(address(reference(Guard.key(neighbour))));
+    }
+
+    @Override
+    public Written summary(Formula.Summary summary) {
+        if (!(reference(summary.name()) instanceof Run run)) {
+            throw new IllegalStateException(cell + ": " + summary.kind() + " needs a run of cells");
+        }
+        return Written.whole(
+                switch (summary.kind()) {
+                    case "last" -> addressOf(run.cells().get(run.cells().size() - 1));
+                    case "highest" -> "MAX(" + address(run) + ")";
+                    case "lowest" -> "MIN(" + address(run) + ")";
+                    default -> throw new IllegalStateException(cell + ": no such summary: " + summary.kind());
+                });
+    }
+
+    @Override
+    public Written negation(Formula.Negation negation) {
+        return new Written("-" + read(negation.of()).within(Written.WHOLE), MINUS_SIGN);
+    }
+
+    @Override
+    public Written operation(Formula.Operation operation) {
+        Operator operator = operation.operator();
+        boolean rightIsOne = isOne(operation.right());
+        if (rightIsOne && (operator == Operator.OVER || operator == Operator.TIMES)) {
+            return read(operation.left());
+        }
+        if (operator == Operator.TIMES && isOne(operation.left())) {
+            return read(operation.right());
+        }
+        int binding = operator.binding();
+        int sides = operator == Operator.POWER ? Written.WHOLE : binding;
+        String left = read(operation.left()).within(sides);
+        String right = read(operation.right()).within(sides == Written.WHOLE ? sides : sides + 1);
+        return new Written(left + operator.sign() + right, binding);
+    }
+
+    /** Whether it is a bare unit of size one, such as the 1 ft of h/1 ft. */
+    private boolean isOne(Formula formula) {
+        return formula instanceof Formula.Quantity quantity
+                && quantity.value() == 1
+                && !cell.references().containsKey("1 " + quantity.unit().text());
+    }
+
+    @Override
+    public Written comparison(Formula.Comparison comparison) {
+        Written a = read(comparison.left());
+        Written b = read(comparison.right());
+        if (Guard.comparesWords(comparison)) {
+            String sign = comparison.comparator().sign();
+            return new Written(a.within(ARITHMETIC) + sign + b.within(ARITHMETIC), Written.CONDITION);
+        }
+        String slack = "1E-9*ABS(" + b.text() + ")";
+        String over = a.within(ARITHMETIC) + "-" + b.within(ARITHMETIC + 1);
+        String under = b.within(ARITHMETIC) + "-" + a.within(ARITHMETIC + 1);
+        return new Written(
+                switch (comparison.comparator()) {
+                    case AT_MOST -> over + "<=" + slack;
+                    case BELOW -> over + "<-" + slack;
+                    case AT_LEAST -> under + "<=" + slack;
+                    case ABOVE -> under + "<-" + slack;
+                    case EQUAL -> "ABS(" + over + ")<=" + slack;
+                    case UNLIKE -> "ABS(" + over + ")>" + slack;
+                },
+                Written.CONDITION);
+    }
+
+    @Override
+    public Written logic(Formula.Logic logic) {
+        return function(
+                switch (logic.kind()) {
+                    case "and" -> "AND";
+                    case "or" -> "OR";
+                    case "not" -> "NOT";
+                    default -> throw new IllegalStateException(cell + ": no such condition: " + logic.kind());
+                },
+                logic.parts(),
+                "");
+    }
+
+    @Override
+    public Written call(Formula.Call call) {
+        Function function = call.function();
+        List<Formula> arguments = call.arguments();
+        return switch (function) {
+            case MATCH -> function("MATCH", arguments, ",0");
+            case MATCH_BELOW -> function("MATCH", arguments, ",1");
+            case LOWEST_OF -> function("MIN", arguments, "");
+            case TALLY -> function("COUNTIF", arguments, "");
+            case IS_NUMBER -> function("ISNUMBER", arguments, "");
+            case SAME -> new Written(
+                    read(arguments.get(0)).within(ARITHMETIC) + "=" + read(arguments.get(1)).within(ARITHMETIC),
+                    Written.CONDITION);
+            case IF, SQRT, EXP, LN, LOG10, SIN, COS, TAN, ASIN, ACOS, ATAN, TANH, ABS, MIN, MAX, INDEX, SMALL ->
+                function(function.name(), arguments, "");
+        };
+    }
+
+    @Override
+    public Written noResult(Formula.NoResult noResult) {
+        return Written.whole(quoted(noResult.why()));
+    }
+
+    private Written read(Formula formula) {
+        return formula.read(this);
+    }
+
+    private Written function(String name, List<Formula> arguments, String end) {
+        return Written.whole(arguments.stream()
+                .map(argument -> read(argument).text())
+                .collect(Collectors.joining(",", name + "(", end + ")")));
+    }
+
+    private Reference reference(String symbol) {
+        Reference reference = cell.references().get(symbol);
+        if (reference == null) {
+            throw new IllegalStateException(cell + ": " + symbol + " points to no cell");
+        }
+        return reference;
+    }
+
+    private String address(Reference reference) {
+        String sheet = cell.place().sheet();
+        return reference instanceof Run run ? run.fixedFrom(sheet) : addressOf((Cell) reference);
+    }
+
+    private String addressOf(Cell other) {
+        return other.place().from(cell.place().sheet());
+    }
+
+    /** Exact, with a point, without a needless ".0": {@code 4}, {@code 0.385}, {@code 1E-9}. */
+    private static String number(double value) {
+        if (!Double.isFinite(value)) {
+            throw new IllegalStateException("not a finite number: " + value);
+        }
+        String text = Double.toString(value);
+        return text.endsWith(".0") ? text.substring(0, text.length() - 2) : text.replace(".0E", "E");
+    }
+
+    private static String quoted(String text) {
+        return "\"" + text.replace("\"", "\"\"") + "\"";
+    }
+}
