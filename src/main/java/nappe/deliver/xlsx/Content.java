@@ -1,0 +1,18 @@
+package nappe.deliver.xlsx;
+
+import nappe.formula.Value;
+
+/** What a cell of a part holds. */
+sealed interface Content {
+    /** Nothing but its style. */
+    record Blank() implements Content {}
+
+    /** A text of the shared table, by its index. */
+    record Shared(int index) implements Content {}
+
+    /** A typed number. */
+    record Typed(double value) implements Content {}
+
+    /** A formula and the value that is shown until somebody recalculates. */
+    record Live(String formula, Value value) implements Content {}
+}

@@ -1,0 +1,144 @@
+package nappe.deliver.xlsx;
+
+import java.util.HashMap;
+import java.util.Map;
+import nappe.calculation.Block.Align;
+import org.apache.poi.ss.usermodel.BorderStyle;
+import org.apache.poi.ss.usermodel.FillPatternType;
+import org.apache.poi.ss.usermodel.Font;
+import org.apache.poi.ss.usermodel.FontScheme;
+import org.apache.poi.ss.usermodel.HorizontalAlignment;
+import org.apache.poi.ss.usermodel.IndexedColors;
+import org.apache.poi.ss.usermodel.VerticalAlignment;
+import org.apache.poi.xssf.usermodel.XSSFCellStyle;
+import org.apache.poi.xssf.usermodel.XSSFFont;
+import org.apache.poi.xssf.usermodel.XSSFWorkbook;
+
+/**
+ * The cell styles of the package. What was typed by the engineer stands in a dashed box and is not locked; a cited
+ * number stands in a full box. Nothing rests on colour.
+ */
+final class Styles {
+    /** The type of the body. */
+    static final String FACE = "Arial";
+
+    static final int POINTS = 10;
+
+    /** The number format that shows a number as typed. */
+    static final String AS_TYPED = "General";
+
+    /** What a cell is there for. */
+    enum Role {
+        SHEET_TITLE(14, true),
+        FURNITURE(9, false),
+        HEADING(12, true),
+        NOTE(POINTS, false),
+        CAUTION(POINTS, true),
+        TABLE_TITLE(POINTS, true),
+        HEAD(POINTS, true),
+        TEXT(POINTS, false),
+        STRONG(POINTS, true),
+        LINK(POINTS, false),
+        RESULT(POINTS, false),
+        VERDICT(POINTS, true),
+        ENTRY(POINTS, false),
+        CONSTANT(POINTS, false);
+
+        private final int points;
+        private final boolean bold;
+
+        Role(int points, boolean bold) {
+            this.points = points;
+            this.bold = bold;
+        }
+
+        int points() {
+            return points;
+        }
+
+        boolean bold() {
+            return bold;
+        }
+    }
+
+    private record Look(Role role, Align align, String format) {}
+
+    private final XSSFWorkbook workbook;
+    private final Map<Look, Integer> made = new HashMap<>();
+
+    Styles(XSSFWorkbook workbook) {
+        this.workbook = workbook;
+        XSSFFont body = workbook.getFontAt(0);
+        body.setScheme(FontScheme.NONE);
+        body.setFontName(FACE);
+        body.setFontHeightInPoints((short) POINTS);
+    }
+
+    int of(Role role, Align align) {
+        return of(role, align, AS_TYPED);
+    }
+
+    /** The index of a style in the workbook. */
+    int of(Role role, Align align, String format) {
+        return made.computeIfAbsent(new Look(role, align, format), look -> (int) make(look).getIndex());
+    }
+
+    private XSSFCellStyle make(Look look) {
+        Role role = look.role;
+        XSSFCellStyle style = workbook.createCellStyle();
+        XSSFFont font = font(workbook, role.points, role.bold);
+        if (role == Role.LINK) {
+            font.setUnderline(Font.U_SINGLE);
+        }
+        style.setFont(font);
+        style.setWrapText(true);
+        style.setVerticalAlignment(VerticalAlignment.TOP);
+        style.setAlignment(
+                switch (look.align) {
+                    case LEFT -> HorizontalAlignment.LEFT;
+                    case CENTRE -> HorizontalAlignment.CENTER;
+                    case RIGHT -> HorizontalAlignment.RIGHT;
+                });
+        if (!look.format.equals(AS_TYPED)) {
+            style.setDataFormat(workbook.createDataFormat().getFormat(look.format));
+        }
+        switch (role) {
+            case SHEET_TITLE, FURNITURE, HEADING, NOTE, CAUTION, TABLE_TITLE -> {}
+            case HEAD -> {
+                box(style, BorderStyle.THIN);
+                fill(style, FillPatternType.SOLID_FOREGROUND, IndexedColors.GREY_25_PERCENT);
+            }
+            case ENTRY -> {
+                box(style, BorderStyle.DASHED);
+                fill(style, FillPatternType.LEAST_DOTS, IndexedColors.BLACK);
+                style.setLocked(false);
+            }
+            case CONSTANT -> box(style, BorderStyle.THIN);
+            case TEXT, STRONG, LINK, RESULT, VERDICT -> box(style, BorderStyle.HAIR);
+        }
+        return style;
+    }
+
+    private static void box(XSSFCellStyle style, BorderStyle line) {
+        style.setBorderTop(line);
+        style.setBorderBottom(line);
+        style.setBorderLeft(line);
+        style.setBorderRight(line);
+    }
+
+    private static void fill(XSSFCellStyle style, FillPatternType pattern, IndexedColors colour) {
+        style.setFillPattern(pattern);
+        style.setFillForegroundColor(colour.getIndex());
+        if (pattern != FillPatternType.SOLID_FOREGROUND) {
+            style.setFillBackgroundColor(IndexedColors.WHITE.getIndex());
+        }
+    }
+
+    static XSSFFont font(XSSFWorkbook workbook, int points, boolean bold) {
+        XSSFFont font = workbook.createFont();
+        font.setFontName(FACE);
+        font.setFontHeightInPoints((short) points);
+        font.setBold(bold);
+        return font;
+    }
+}
