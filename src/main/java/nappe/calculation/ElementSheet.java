@@ -1,0 +1,214 @@
+package nappe.calculation;
+
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import nappe.formula.Formula;
+import nappe.formula.SymbolsReading;
+import nappe.method.Item;
+import nappe.method.Limit;
+import nappe.method.MethodSheet;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * Lays the calculation of one element: what is given, every line, every limit; what rests on a case once per case, all
+ * else once.
+ */
+public final class ElementSheet {
+    /** The column of what serves all cases. */
+    public static final int ALL_CASES = 6;
+
+    /** The column of the first case. */
+    public static final int FIRST_CASE = 7;
+
+    /** A limit with its verdicts: one for all cases, or one per case. */
+    public record LimitResult(String tag, String label, String source, List<@Nullable Cell> margins, List<Cell> verdicts) {
+        public boolean forAll() {
+            return verdicts.size() == 1;
+        }
+    }
+
+    /** A limit demanded by others, with the cells it brings along. */
+    public record Demanded(Limit limit, Map<String, Cell> cells) {}
+
+    private final String tag;
+    private final MethodSheet method;
+    private final ItemLayout items;
+    private final TrialRows trialRows;
+    private final SheetDraft sheet;
+    private final Scope scope;
+    private final List<String> caseNames;
+    private final List<Scope> cases;
+    private final List<Block.Line> lines = new ArrayList<>();
+    private final List<LimitResult> limits = new ArrayList<>();
+    private int firstRow;
+
+    /**
+     * @param scope knows the entries, constants and table columns of the element
+     * @param cases one scope per case under it, which know what is typed or taken per case
+     */
+    public ElementSheet(
+            String tag,
+            MethodSheet method,
+            ItemLayout items,
+            TrialRows trialRows,
+            SheetDraft sheet,
+            Scope scope,
+            List<String> caseNames,
+            List<Scope> cases) {
+        this.tag = tag;
+        this.method = method;
+        this.items = items;
+        this.trialRows = trialRows;
+        this.sheet = sheet;
+        this.scope = scope;
+        this.caseNames = caseNames;
+        this.cases = cases;
+    }
+
+    /** Lays everything; the scopes then know every symbol. */
+    public List<LimitResult> lay(int workedCase, List<Demanded> demands) {
+        firstRow = sheet.nextRow() + 1;
+        heading("Given");
+        for (Item item : method.items()) {
+            if (item instanceof Item.Given || item instanceof Item.Constant) {
+                given(item);
+            }
+        }
+        heading("Calculation");
+        for (Item item : method.items()) {
+            if (!(item instanceof Item.Given || item instanceof Item.Constant || item instanceof Item.Free)
+                    && item.outputs().stream().noneMatch(method::isTemplate)) {
+                boolean perCase = item.outputs().stream().anyMatch(method::perCase);
+                rows(perCase, (at, strip) -> items.lay(item, at, strip));
+            }
+        }
+        heading("Limits");
+        LimitRows limitRows = new LimitRows(items.cells());
+        for (Limit limit : method.limits()) {
+            limit(limitRows, limit, Map.of());
+        }
+        closings(limitRows);
+        if (!demands.isEmpty()) {
+            heading("Limits demanded by others");
+            demands.forEach(demand -> limit(limitRows, demand.limit(), demand.cells()));
+        }
+        sheet.lines(caseNames, workedCase, lines);
+        return List.copyOf(limits);
+    }
+
+    private void given(Item item) {
+        String symbol = item.outputs().get(0);
+        boolean perCase = method.perCase(symbol);
+        String label = item instanceof Item.Given g ? g.label() : ((Item.Constant) item).label();
+        String source = item instanceof Item.Constant c && c.citation() != null ? c.citation().shown() : "";
+        rows(perCase, (at, strip) -> {
+            Cell origin = at.cell(symbol);
+            Scope lookUp = Scope.ofElement();
+            lookUp.put(symbol, origin);
+            Cell cell = items.cells().raw(
+                    strip.next(), symbol, origin.unit(), new Formula.Symbol(symbol), lookUp, null, false);
+            at.put(symbol, cell);
+            strip.add(new Strip.Laid(symbol, label, "from sheet " + origin.place().sheet() + ", " + origin.place().address(), source, cell));
+        });
+    }
+
+    private void heading(String text) {
+        lines.add(new Block.Line(Block.LineKind.HEADING, "", text, "", "", "", "", null, List.of()));
+    }
+
+    private interface Laying {
+        void lay(Scope scope, Strip strip);
+    }
+
+    private List<List<Strip.Laid>> rows(boolean perCase, Laying laying) {
+        return rows(perCase, laying, false);
+    }
+
+    /** Lays the same rows once for all cases, or once per case beside each other. */
+    private List<List<Strip.Laid>> rows(boolean perCase, Laying laying, boolean isLimit) {
+        int row = firstRow + lines.size();
+        List<List<Strip.Laid>> laid = new ArrayList<>();
+        if (perCase) {
+            for (int c = 0; c < cases.size(); c++) {
+                trialRows.nowFor(tag, caseNames.get(c));
+                Strip strip = Strip.down(sheet.name(), row, FIRST_CASE + c);
+                laying.lay(cases.get(c), strip);
+                laid.add(strip.laid());
+            }
+        } else {
+            trialRows.nowFor(tag, "");
+            Strip strip = Strip.down(sheet.name(), row, ALL_CASES);
+            laying.lay(scope, strip);
+            laid.add(strip.laid());
+        }
+        for (int i = 0; i < laid.get(0).size(); i++) {
+            add(perCase, laid, i, isLimit);
+        }
+        return laid;
+    }
+
+    private void add(boolean perCase, List<List<Strip.Laid>> laid, int i, boolean isLimit) {
+        Strip.Laid first = laid.get(0).get(i);
+        List<Cell> perCaseCells = perCase ? laid.stream().map(l -> l.get(i).cell()).toList() : List.of();
+        int size = laid.get(0).size();
+        Block.LineKind kind = !isLimit || i < size - 2
+                ? Block.LineKind.QUANTITY
+                : i == size - 1 ? Block.LineKind.LIMIT_VERDICT : Block.LineKind.LIMIT_MARGIN;
+        lines.add(new Block.Line(
+                kind,
+                tag + "." + String.format(java.util.Locale.ROOT, "%03d", lines.size()),
+                first.label(),
+                first.symbol(),
+                first.equation(),
+                unitText(first),
+                first.source(),
+                perCase ? null : first.cell(),
+                perCaseCells));
+    }
+
+    private static String unitText(Strip.Laid line) {
+        return line.cell().unit().text().equals("1") ? "" : line.cell().unit().text();
+    }
+
+    private void limit(LimitRows limitRows, Limit limit, Map<String, Cell> brought) {
+        Set<String> symbols = new HashSet<>(SymbolsReading.of(limit.lesser()));
+        symbols.addAll(SymbolsReading.of(limit.greater()));
+        if (limit.scale() != null) {
+            symbols.addAll(SymbolsReading.of(limit.scale()));
+        }
+        if (limit.when() != null) {
+            symbols.addAll(SymbolsReading.of(limit.when()));
+        }
+        boolean perCase = symbols.stream().anyMatch(method::perCase);
+        List<LimitRows.Judged> judged = new ArrayList<>();
+        rows(perCase, (at, strip) -> {
+            Scope inner = at.inner();
+            brought.forEach(inner::put);
+            judged.add(limitRows.lay(limit, inner, strip));
+        }, true);
+        keep(limit.label(), limit.source(), judged);
+    }
+
+    private void closings(LimitRows limitRows) {
+        List<TrialRows.Solved> mine = trialRows.solved().stream().filter(s -> s.tag().equals(tag)).toList();
+        List<Item.Root> roots = mine.stream().map(TrialRows.Solved::root).distinct().toList();
+        for (Item.Root root : roots) {
+            List<TrialRows.Solved> ofRoot = mine.stream().filter(s -> s.root() == root).toList();
+            List<LimitRows.Judged> judged = new ArrayList<>();
+            boolean perCase = method.perCase(root.symbol());
+            int[] next = {0};
+            rows(perCase, (at, strip) -> judged.add(limitRows.closing(ofRoot.get(next[0]++), at, strip)), true);
+            keep("the trials for " + root.symbol() + " have closed", "", judged);
+        }
+    }
+
+    private void keep(String label, String source, List<LimitRows.Judged> judged) {
+        List<@Nullable Cell> margins = new ArrayList<>();
+        judged.forEach(j -> margins.add(j.margin()));
+        limits.add(new LimitResult(
+                tag, label, source, margins, judged.stream().map(LimitRows.Judged::verdict).toList()));
+    }
+}
