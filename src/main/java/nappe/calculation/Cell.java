@@ -58,6 +58,11 @@ public final class Cell implements Reference {
         return new Cell(kind, place, symbol, unit, value, null, Map.of(), sureness);
     }
 
+    /** A typed cell that may stay blank, and then holds words; a number may be typed into it later. */
+    public static Cell optional(Place place, String symbol, Unit unit, Value value) {
+        return new Cell(Kind.ENTRY, place, symbol, unit, value, null, Map.of(), Sureness.MAY_BE_WORDS);
+    }
+
     /** A live cell; every symbol of its formula must be among the references. */
     public static Cell live(
             Place place, String symbol, Unit unit, Formula formula, Map<String, Reference> references, Sureness sureness) {

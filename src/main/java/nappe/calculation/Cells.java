@@ -52,6 +52,11 @@ public final class Cells {
         return keep(Cell.typed(kind, place, symbol, unit, value), sign);
     }
 
+    /** A typed cell that may stay blank. */
+    public Cell optional(Place place, String symbol, Unit unit, Value value, Sign sign) {
+        return keep(Cell.optional(place, symbol, unit, value), sign);
+    }
+
     /** A live cell in the working unit of its dimension; null for words. */
     public Cell live(Place place, String symbol, @Nullable Unit unit, Formula formula, Scope scope) {
         return live(place, symbol, unit, formula, scope, null, false);

@@ -5,7 +5,6 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
-import nappe.formula.Formula;
 import nappe.formula.SymbolsReading;
 import nappe.method.Item;
 import nappe.method.Limit;
@@ -106,10 +105,7 @@ public final class ElementSheet {
         String source = item instanceof Item.Constant c && c.citation() != null ? c.citation().shown() : "";
         rows(perCase, (at, strip) -> {
             Cell origin = at.cell(symbol);
-            Scope lookUp = Scope.ofElement();
-            lookUp.put(symbol, origin);
-            Cell cell = items.cells().raw(
-                    strip.next(), symbol, origin.unit(), new Formula.Symbol(symbol), lookUp, null, false);
+            Cell cell = items.cells().factors().toWorking(strip.next(), symbol, origin);
             at.put(symbol, cell);
             strip.add(new Strip.Laid(symbol, label, "from sheet " + origin.place().sheet() + ", " + origin.place().address(), source, cell));
         });

@@ -99,8 +99,9 @@ public final class FactorTable {
     /** The cell's number in the working system, in a live cell of its own. */
     public Cell toWorking(Place place, String symbol, Cell typed) {
         Scope scope = Scope.ofElement();
-        scope.put("typed", typed);
-        Formula formula = new Formula.Symbol("typed");
+        String name = symbol.isEmpty() ? "typed" : symbol;
+        scope.put(name, typed);
+        Formula formula = new Formula.Symbol(name);
         Unit unit = typed.unit();
         Cell zero = zero(unit);
         if (cell(unit) != null) {

@@ -22,6 +22,11 @@ public final class TableDraft {
         return block;
     }
 
+    /** The table as a block of its sheet. */
+    public Block.Table table() {
+        return block instanceof Block.WorkbookOnly only ? only.table() : (Block.Table) block;
+    }
+
     /** The workbook row on which the next row of the table stands. */
     public int nextRow() {
         return firstRow + rows.size();

@@ -1,0 +1,246 @@
+package nappe.station;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.function.Function;
+import nappe.calculation.Block;
+import nappe.calculation.Cell;
+import nappe.calculation.Cells;
+import nappe.calculation.ElementSheet;
+import nappe.calculation.ItemLayout;
+import nappe.calculation.RatingGrid;
+import nappe.calculation.Run;
+import nappe.calculation.Scope;
+import nappe.calculation.Sheet;
+import nappe.calculation.SheetDraft;
+import nappe.calculation.TrialRows;
+import nappe.formula.Formula;
+import nappe.method.Item;
+import nappe.method.Limit;
+import nappe.method.MethodSheet;
+import nappe.unit.Dimension;
+import nappe.unit.Unit;
+
+/**
+ * Lays a design out as the sheets of a package: cells with formulas and no numbers. Levels are worked from the
+ * downstream end up: each element takes its neighbour's water level in the same case.
+ */
+public final class PackageLayout {
+    /** The sheets in order, and the cells in the order of evaluation. */
+    public record Layout(List<Sheet> sheets, List<Cell> cells, Map<String, Block.Table> ratings) {}
+
+    private final Design design;
+    private final Map<String, MethodSheet> methods = new LinkedHashMap<>();
+    private final List<SheetDraft> drafts = new ArrayList<>();
+    private final List<String> contents = new ArrayList<>();
+    private final List<String> caseNames;
+
+    private PackageLayout(Design design, Function<String, MethodSheet> methodOf) {
+        this.design = design;
+        design.elements().forEach(e -> methods.put(e.tag(), methodOf.apply(e.method())));
+        this.caseNames = design.cases().stream().map(Design.FlowCase::name).toList();
+    }
+
+    /**
+     * @param methodOf the method sheet of a name
+     * @throws StationException where entries do not fit the methods
+     */
+    public static Layout of(Design design, Function<String, MethodSheet> methodOf, SoftwareStatement software) {
+        PackageLayout layout = new PackageLayout(design, methodOf);
+        List<DesignFault> faults = DemandCheck.faults(design, layout.methods);
+        if (!faults.isEmpty()) {
+            throw new StationException(faults);
+        }
+        return layout.lay(software);
+    }
+
+    private SheetDraft draft(String name, String title, String content) {
+        SheetDraft draft = new SheetDraft(name, title);
+        drafts.add(draft);
+        contents.add(content);
+        return draft;
+    }
+
+    private Layout lay(SoftwareStatement software) {
+        SheetDraft cover = draft("Cover", "Cover", "what this calculation is for, status, approvals, cautions");
+        SheetDraft index = draft("Index", "Index, requirements and revisions", "this list; requirements and where they are answered");
+        SheetDraft limitSheet = draft("Limits", "Summary of limits", "every limit in its worst case, and in every case");
+        SheetDraft caseSheet = draft("Cases", "Design flows and water levels", "flow cases as typed and in working units");
+        SheetDraft entrySheet = draft("Entries", "Entries and demands, with sources", "what was typed, in its unit and in working units");
+        SheetDraft constantSheet = draft("Constants", "Constants and conversion factors", "cited numbers and factors in use");
+        SheetDraft tableSheet = draft("Tables", "Cited tables", "published coefficients that the lines look up");
+        Map<String, SheetDraft> elementSheets = new LinkedHashMap<>();
+        Map<String, SheetDraft> ratingSheets = new LinkedHashMap<>();
+        for (Design.Element element : design.elements()) {
+            String title = element.tag() + "  " + EntriesSheet.title(element, method(element));
+            elementSheets.put(element.tag(), draft(element.tag(), title, "method, one case worked in full, every case, limits"));
+            if (!method(element).ratings().isEmpty()) {
+                ratingSheets.put(element.tag(), draft(
+                        element.tag() + " rating", element.tag() + "  Rating table", "flow for equal steps of head, over the usable range"));
+            }
+        }
+        SheetDraft assumptionSheet = draft("Assumptions", "Assumptions", "each with basis and owner, open or closed");
+        SheetDraft referenceSheet = draft("References", "References", "publications and tables cited");
+        SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
+        SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
+
+        Cells cells = new Cells(design.project().system(), constantSheet);
+        Sources sources = new Sources(cells, constantSheet, tableSheet);
+        List<MethodSheet> distinct = methods.values().stream().distinct().toList();
+        Map<String, Map<String, Cell>> constants = sources.layConstants(distinct);
+        CasesSheet cases = new CasesSheet(cells, caseSheet, design.cases());
+        cases.lay(design.project().flowUnit(), design.project().datum());
+        EntriesSheet entries = new EntriesSheet(cells, entrySheet);
+        Map<String, Scope> scopes = new LinkedHashMap<>();
+        for (Design.Element element : design.elements()) {
+            Scope scope = Scope.ofElement();
+            entries.lay(element, method(element), scope);
+            constants.getOrDefault(element.method(), Map.of()).forEach(scope::put);
+            method(element).tables().values().forEach(table -> sources.layTable(table, scope));
+            scopes.put(element.tag(), scope);
+        }
+        Map<Design.Demand, Cell> demands = entries.layDemands(design.demands());
+
+        TrialRows trialRows = new TrialRows(cells, trialSheet);
+        ItemLayout items = new ItemLayout(cells, trialRows);
+        List<ElementSheet.LimitResult> limits = new ArrayList<>();
+        Map<String, Block.Table> ratings = new LinkedHashMap<>();
+        List<Scope> downstream = List.of();
+        MethodSheet below = null;
+        for (Design.Element element : design.elements()) {
+            MethodSheet method = method(element);
+            Scope scope = java.util.Objects.requireNonNull(scopes.get(element.tag()));
+            List<Scope> caseScopes = caseScopes(element, method, scope, cases, below, downstream);
+            SheetDraft sheet = java.util.Objects.requireNonNull(elementSheets.get(element.tag()));
+            method.about().forEach(sheet::note);
+            method.cautions().forEach(sheet::caution);
+            sheet.gap();
+            limits.addAll(new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes)
+                    .lay(workedCase(), demanded(element, demands)));
+            SheetDraft ratingSheet = ratingSheets.get(element.tag());
+            if (ratingSheet != null) {
+                ratings.put(element.tag(), rating(element, method, items, scope, ratingSheet, trialRows));
+            }
+            downstream = caseScopes;
+            below = method;
+        }
+
+        BackSheets back = new BackSheets(cells, design);
+        back.roots(trialSheet, trialRows.solved());
+        Run verdicts = new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
+        back.assumptions(assumptionSheet);
+        back.references(referenceSheet, distinct);
+        back.software(softwareSheet, software);
+        FrontSheets front = new FrontSheets(cells, design);
+        front.cover(cover, verdicts);
+        front.index(index, drafts, contents);
+
+        List<Sheet> sheets = new ArrayList<>();
+        for (int i = 0; i < drafts.size(); i++) {
+            sheets.add(drafts.get(i).finish(i + 1));
+        }
+        return new Layout(List.copyOf(sheets), List.copyOf(cells.all()), ratings);
+    }
+
+    private MethodSheet method(Design.Element element) {
+        return java.util.Objects.requireNonNull(methods.get(element.tag()));
+    }
+
+    private int workedCase() {
+        int i = caseNames.indexOf(design.project().workedCase());
+        return Math.max(0, i);
+    }
+
+    private List<Scope> caseScopes(
+            Design.Element element,
+            MethodSheet method,
+            Scope scope,
+            CasesSheet cases,
+            @org.jspecify.annotations.Nullable MethodSheet below,
+            List<Scope> downstream) {
+        List<Item.Given> asked = new ArrayList<>();
+        for (Item item : method.items()) {
+            if (item instanceof Item.Given given && given.from() == Item.From.CASE && given.role().isEmpty()) {
+                asked.add(given);
+            }
+        }
+        Map<String, List<Cell>> own = cases.layOwn(element.tag(), asked);
+        List<Scope> scopes = new ArrayList<>();
+        for (int c = 0; c < caseNames.size(); c++) {
+            Scope inner = scope.inner();
+            for (Map.Entry<String, List<Cell>> typed : own.entrySet()) {
+                inner.put(typed.getKey(), typed.getValue().get(c));
+            }
+            for (Item item : method.items()) {
+                if (item instanceof Item.Given given && !given.role().isEmpty()) {
+                    inner.put(given.symbol(), linked(given.role(), cases, c, below, downstream));
+                }
+            }
+            scopes.add(inner);
+        }
+        return scopes;
+    }
+
+    /** What a role is in a case: the flow, or a level from the neighbour downstream, or from the case at the end. */
+    private Cell linked(
+            String role,
+            CasesSheet cases,
+            int c,
+            @org.jspecify.annotations.Nullable MethodSheet below,
+            List<Scope> downstream) {
+        if (role.equals("flow")) {
+            return cases.flow(c);
+        }
+        String offered = below == null ? null : below.gives().get(role);
+        if (offered != null) {
+            return downstream.get(c).cell(offered);
+        }
+        if (below == null && (role.equals("water level") || role.equals("energy level"))) {
+            return cases.level(c);
+        }
+        throw new IllegalStateException("nothing downstream gives a " + role);
+    }
+
+    private List<ElementSheet.Demanded> demanded(Design.Element element, Map<Design.Demand, Cell> cells) {
+        List<ElementSheet.Demanded> demanded = new ArrayList<>();
+        int number = 1;
+        for (Design.Demand demand : design.demands()) {
+            if (demand.tag().equalsIgnoreCase(element.tag())) {
+                String name = "demand_" + number;
+                Formula value = new Formula.Symbol(demand.symbol());
+                Formula bound = new Formula.Symbol(name);
+                Limit limit = demand.atMost()
+                        ? new Limit(value, bound, true, null, null, demand.description(), demand.citation())
+                        : new Limit(bound, value, false, null, null, demand.description(), demand.citation());
+                demanded.add(new ElementSheet.Demanded(
+                        limit, Map.of(name, java.util.Objects.requireNonNull(cells.get(demand)))));
+            }
+            number++;
+        }
+        return demanded;
+    }
+
+    private Block.Table rating(
+            Design.Element element,
+            MethodSheet method,
+            ItemLayout items,
+            Scope scope,
+            SheetDraft sheet,
+            TrialRows trialRows) {
+        trialRows.nowFor(element.tag(), "rating");
+        Map<Dimension, Unit> reports = new LinkedHashMap<>();
+        for (Unit unit : List.of(design.project().flowUnit(), design.project().headUnit())) {
+            if (!unit.equals(items.cells().unit(unit.dimension()))) {
+                reports.put(unit.dimension(), unit);
+            }
+        }
+        sheet.note("Free flow only. Outside this range, and where the tailwater slows the device, no result is claimed.");
+        method.cautions().forEach(sheet::caution);
+        sheet.gap();
+        return new RatingGrid(items, method, reports)
+                .lay(method.ratings().get(0), scope, sheet, "Rating of " + element.tag())
+                .table();
+    }
+}

@@ -1,0 +1,13 @@
+package nappe.station;
+
+import java.util.List;
+
+/**
+ * What the package says of the program that made it.
+ *
+ * @param methods method name and the start of the hash of its text
+ * @param counts check values by method and kind, in words
+ * @param rows the check values that others published: id, method and entries, target, computed, expected, tolerance,
+ *     source, verdict
+ */
+public record SoftwareStatement(String version, List<List<String>> methods, List<List<String>> counts, List<List<String>> rows) {}

@@ -1,0 +1,131 @@
+package nappe.station;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import nappe.calculation.Block;
+import nappe.calculation.Cell;
+import nappe.calculation.Cells;
+import nappe.calculation.Run;
+import nappe.calculation.Scope;
+import nappe.calculation.SheetDraft;
+import nappe.calculation.TableDraft;
+import nappe.formula.Sign;
+import nappe.formula.Value;
+import nappe.method.Item;
+import nappe.method.MethodSheet;
+import nappe.source.CitedTable;
+import nappe.unit.Unit;
+
+/** Lays the constants and the cited tables that the methods of a station use; each once. */
+final class Sources {
+    private final Cells cells;
+    private final SheetDraft constants;
+    private final SheetDraft tables;
+    private final Map<String, Map<String, Run>> runs = new LinkedHashMap<>();
+
+    Sources(Cells cells, SheetDraft constants, SheetDraft tables) {
+        this.cells = cells;
+        this.constants = constants;
+        this.tables = tables;
+    }
+
+    /** Lays the constants of each method; they must stand before the first conversion factor is asked for. */
+    Map<String, Map<String, Cell>> layConstants(List<MethodSheet> methods) {
+        TableDraft table = constants.table(
+                "Constants of the methods",
+                List.of(
+                        new Block.Column("Symbol", 14, Block.Align.LEFT),
+                        new Block.Column("Value", 18, Block.Align.RIGHT),
+                        new Block.Column("Unit", 16, Block.Align.LEFT),
+                        new Block.Column("Description", 44, Block.Align.LEFT),
+                        new Block.Column("Source", 30, Block.Align.LEFT)));
+        Map<String, Map<String, Cell>> typed = new LinkedHashMap<>();
+        for (MethodSheet method : methods) {
+            Map<String, Cell> own = new LinkedHashMap<>();
+            for (Item item : method.items()) {
+                if (item instanceof Item.Constant constant) {
+                    own.put(constant.symbol(), constant(table, constant, method));
+                }
+            }
+            typed.put(method.name(), own);
+        }
+        if (table.isEmpty()) {
+            table.add(List.of(
+                    new Block.Text("none"), new Block.Text(""), new Block.Text(""), new Block.Text(""), new Block.Text("")));
+        }
+        constants.gap();
+        return typed;
+    }
+
+    private Cell constant(TableDraft table, Item.Constant constant, MethodSheet method) {
+        Sign sign = constant.value() > 0 ? Sign.POSITIVE : Sign.ANY;
+        Cell cell = cells.typed(
+                Cell.Kind.CONSTANT, table.place(1), constant.symbol(), constant.unit(), Value.of(constant.value()), sign);
+        String source = constant.citation() == null ? "" : constant.citation().shown();
+        table.add(List.of(
+                new Block.Symbol(constant.symbol()),
+                new Block.Content(cell),
+                new Block.Text(unitText(constant.unit())),
+                new Block.Text(constant.label() + " (" + method.name() + ")"),
+                new Block.Text(source)));
+        return cell;
+    }
+
+    /** Lays a table if it has not been laid, and makes its columns known to the scope. */
+    void layTable(CitedTable table, Scope scope) {
+        Map<String, Run> columns = runs.computeIfAbsent(table.name(), name -> lay(table));
+        columns.forEach(scope::put);
+    }
+
+    private Map<String, Run> lay(CitedTable table) {
+        tables.heading(table.title());
+        tables.note("Source: " + table.source());
+        table.remarks().forEach(tables::note);
+        List<Block.Column> heads = new ArrayList<>();
+        for (CitedTable.Column column : table.columns()) {
+            Unit unit = column.unit();
+            heads.add(new Block.Column(
+                    unit == null || unit.text().equals("1") ? column.symbol() : column.symbol() + " [" + unit + "]",
+                    width(column),
+                    column.isWords() ? Block.Align.LEFT : Block.Align.RIGHT));
+        }
+        TableDraft draft = tables.table("", heads);
+        List<List<Cell>> columns = new ArrayList<>();
+        table.columns().forEach(column -> columns.add(new ArrayList<>()));
+        for (int r = 0; r < table.rows(); r++) {
+            List<Block.Item> row = new ArrayList<>();
+            for (int c = 0; c < columns.size(); c++) {
+                CitedTable.Column column = table.columns().get(c);
+                Unit unit = column.unit() == null ? Unit.one() : column.unit();
+                Cell cell = cells.typed(
+                        Cell.Kind.TABLE, draft.place(c), "", unit, column.values().get(r), column.sign());
+                columns.get(c).add(cell);
+                row.add(new Block.Content(cell));
+            }
+            draft.add(row);
+        }
+        tables.gap();
+        Map<String, Run> known = new LinkedHashMap<>();
+        for (int c = 0; c < columns.size(); c++) {
+            known.put(table.name() + "." + table.columns().get(c).symbol(), new Run(columns.get(c)));
+        }
+        return known;
+    }
+
+    private static int width(CitedTable.Column column) {
+        if (!column.isWords()) {
+            return 10;
+        }
+        int longest = column.values().stream()
+                .mapToInt(value -> value instanceof Value.Word word ? word.text().length() : 8)
+                .max()
+                .orElse(8);
+        return Math.max(8, Math.min(30, longest + 2));
+    }
+
+    static String unitText(Unit unit) {
+        return unit.text().equals("1") ? "" : unit.text();
+    }
+}
