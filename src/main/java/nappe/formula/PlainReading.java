@@ -3,8 +3,9 @@ package nappe.formula;
 import java.util.stream.Collectors;
 
 /**
- * A formula as plain text, as a method sheet writes it: {@code C*(W/1 ft)*(h_a/1 ft)^n}. It has the fewest brackets;
- * {@code ^} groups to the right and binds tighter than a leading minus, as in mathematics.
+ * A formula as plain text, as a method sheet writes it: {@code 4 ft3/s * (W/1 ft)*(h_a/1 ft)^n}. It has few brackets;
+ * {@code ^} groups to the right and binds tighter than a leading minus, as in mathematics. Read again it gives the same
+ * formula.
  */
 public final class PlainReading implements Reading<Written> {
     private static final int OR = -3;
@@ -31,7 +32,7 @@ public final class PlainReading implements Reading<Written> {
 
     @Override
     public Written quantity(Formula.Quantity quantity) {
-        return new Written(quantity.text() + " " + quantity.unit().text(), Operator.POWER.binding());
+        return new Written(quantity.text() + " " + quantity.unit().text(), Operator.POWER.binding(), true);
     }
 
     @Override
@@ -56,7 +57,9 @@ public final class PlainReading implements Reading<Written> {
 
     @Override
     public Written negation(Formula.Negation negation) {
-        return new Written("-" + negation.of().read(this).within(MINUS_SIGN + 1), MINUS_SIGN);
+        Written of = negation.of().read(this);
+        int least = MINUS_SIGN + 1;
+        return new Written("-" + of.within(least), MINUS_SIGN, of.endsInUnit() && !of.needsBrackets(least));
     }
 
     @Override
@@ -65,12 +68,14 @@ public final class PlainReading implements Reading<Written> {
         int binding = operator.binding();
         Written left = operation.left().read(this);
         Written right = operation.right().read(this);
-        if (operator == Operator.POWER) {
-            return new Written(left.within(binding + 1) + "^" + right.within(binding), binding);
-        }
-        String blank = binding == Operator.PLUS.binding() ? " " : "";
+        int leastLeft = operator == Operator.POWER ? binding + 1 : binding;
+        int leastRight = operator == Operator.POWER ? binding : binding + 1;
+        boolean loose = binding == Operator.PLUS.binding() || left.endsInUnit() && !left.needsBrackets(leastLeft);
+        String sign = loose ? " " + operator.sign() + " " : operator.sign();
         return new Written(
-                left.within(binding) + blank + operator.sign() + blank + right.within(binding + 1), binding);
+                left.within(leastLeft) + sign + right.within(leastRight),
+                binding,
+                right.endsInUnit() && !right.needsBrackets(leastRight));
     }
 
     @Override
@@ -98,6 +103,9 @@ public final class PlainReading implements Reading<Written> {
 
     @Override
     public Written call(Formula.Call call) {
+        if (call.function() == Function.IS_NUMBER && call.arguments().get(0) instanceof Formula.Symbol symbol) {
+            return Written.whole("given(" + symbol.name() + ")");
+        }
         return Written.whole(call.arguments().stream()
                 .map(argument -> argument.read(this).text())
                 .collect(Collectors.joining(", ", call.function().word() + "(", ")")));
@@ -105,7 +113,7 @@ public final class PlainReading implements Reading<Written> {
 
     @Override
     public Written noResult(Formula.NoResult noResult) {
-        return Written.whole("none(" + quoted(noResult.why()) + ")");
+        return Written.whole(noResult.why().equals(Value.NO_RESULT) ? "none()" : "none(" + quoted(noResult.why()) + ")");
     }
 
     private static String quoted(String text) {

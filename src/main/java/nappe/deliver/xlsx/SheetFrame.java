@@ -18,7 +18,7 @@ import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /** All of a sheet but its rows: widths, panes, print set-up, protection, links, checks on what is typed. */
 final class SheetFrame {
-    private static final int PORTRAIT_FITS = 100;
+    private static final int PORTRAIT_FITS = 115;
     private static final int COLUMNS_HELD = 3;
     private static final int ROWS_HELD_AT_MOST = 7;
 

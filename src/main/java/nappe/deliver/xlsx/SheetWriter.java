@@ -255,7 +255,7 @@ final class SheetWriter {
 
     private void grow(int row, Role role, String text, int width) {
         double larger = role.points() / (double) Styles.POINTS * (role.bold() ? 1.08 : 1);
-        int lines = TextWidth.lines(text, (width - 1) / larger);
+        int lines = TextWidth.lines(text, (width - 1.5) / larger);
         rows.atLeast(row, Math.ceil(lines * role.points() * LINE + AIR));
     }
 

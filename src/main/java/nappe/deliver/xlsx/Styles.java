@@ -99,6 +99,9 @@ final class Styles {
                     case CENTRE -> HorizontalAlignment.CENTER;
                     case RIGHT -> HorizontalAlignment.RIGHT;
                 });
+        if (look.align == Align.RIGHT) {
+            style.setIndention((short) 1);
+        }
         if (!look.format.equals(AS_TYPED)) {
             style.setDataFormat(workbook.createDataFormat().getFormat(look.format));
         }

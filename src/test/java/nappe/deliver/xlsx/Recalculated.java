@@ -1,0 +1,172 @@
+package nappe.deliver.xlsx;
+
+import static org.junit.jupiter.api.Assumptions.assumeTrue;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.concurrent.TimeUnit;
+import java.util.stream.Stream;
+import nappe.calculation.Cell;
+import nappe.formula.Value;
+import nappe.results.Results;
+import org.apache.poi.ss.usermodel.CellType;
+import org.apache.poi.xssf.usermodel.XSSFWorkbook;
+
+/**
+ * A workbook as a spreadsheet program sees it after it has recalculated every cell: values by {@code "Sheet!A1"},
+ * numbers as Double, all else as String. LibreOffice hands on 15 digits, Gnumeric all of them.
+ */
+public final class Recalculated {
+    private static final long PATIENCE_SECONDS = 180;
+
+    /** As loose as the comparison of one value needs: LibreOffice rounds to 15 digits and snaps sums near zero. */
+    public static final double RELATIVE = 1e-9;
+
+    private Recalculated() {}
+
+    /** Recalculated by LibreOffice; the test is skipped, with a message, where it is not installed. */
+    public static Map<String, Object> byLibreOffice(Path workbook) {
+        require("soffice", "LibreOffice");
+        return in(folder -> {
+            Path profile = Files.createDirectories(folder.resolve("profile/user"));
+            Files.writeString(profile.resolve("registrymodifications.xcu"), """
+                    <?xml version="1.0" encoding="UTF-8"?>
+                    <oor:items xmlns:oor="http://openoffice.org/2001/registry">
+                    <item oor:path="/org.openoffice.Office.Calc/Formula/Load"><prop oor:name="OOXMLRecalcMode"
+                     oor:op="fuse"><value>0</value></prop></item>
+                    </oor:items>
+                    """);
+            Path copy = Files.copy(workbook, folder.resolve("book.xlsx"));
+            run(folder, "soffice", "-env:UserInstallation=" + folder.resolve("profile").toUri(), "--headless",
+                    "--convert-to", "xlsx", "--outdir", folder.resolve("out").toString(), copy.toString());
+            return read(folder.resolve("out/book.xlsx"));
+        });
+    }
+
+    /** Recalculated by Gnumeric; the test is skipped, with a message, where it is not installed. */
+    public static Map<String, Object> byGnumeric(Path workbook) {
+        require("ssconvert", "Gnumeric");
+        return in(folder -> {
+            Path out = folder.resolve("out.xlsx");
+            run(folder, "ssconvert", "--recalc", "-T", "Gnumeric_Excel:xlsx2", workbook.toString(), out.toString());
+            return read(out);
+        });
+    }
+
+    /** The values that are stored in a workbook, nothing recalculated. */
+    public static Map<String, Object> asStored(Path workbook) {
+        try {
+            return read(workbook);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    /** Where the values of a program and the results part, in words; empty where all agree. */
+    public static List<String> disagreements(Map<String, Object> values, Results results) {
+        return disagreements(values, results, 1e-12);
+    }
+
+    /**
+     * Where the values of a program and the results part, in words; empty where all agree.
+     *
+     * @param floor so much difference is none, whatever the size of the numbers
+     */
+    public static List<String> disagreements(Map<String, Object> values, Results results, double floor) {
+        List<String> faults = new ArrayList<>();
+        for (Cell cell : results.cells()) {
+            Object there = values.get(cell.place().sheet() + "!" + cell.place().address());
+            Value here = results.value(cell);
+            if (!agree(here, there, floor)) {
+                faults.add(cell + ": " + here + " here, " + there + " there"
+                        + (cell.formula() == null ? "" : ", =" + SpreadsheetReading.of(cell)));
+            }
+        }
+        return faults;
+    }
+
+    private static boolean agree(Value here, Object there, double floor) {
+        if (here instanceof Value.Number number) {
+            double a = number.value();
+            return there instanceof Double b
+                    && Math.abs(a - b) <= RELATIVE * Math.max(Math.abs(a), Math.abs(b)) + floor;
+        }
+        return SheetRows.words(here).equals(there);
+    }
+
+    private static Map<String, Object> read(Path workbook) throws IOException {
+        Map<String, Object> values = new LinkedHashMap<>();
+        try (InputStream in = Files.newInputStream(workbook);
+                XSSFWorkbook book = new XSSFWorkbook(in)) {
+            book.forEach(sheet -> sheet.forEach(row -> row.forEach(cell -> {
+                CellType type = cell.getCellType() == CellType.FORMULA
+                        ? cell.getCachedFormulaResultType()
+                        : cell.getCellType();
+                Object value = switch (type) {
+                    case NUMERIC -> (Object) cell.getNumericCellValue();
+                    case BOOLEAN -> cell.getBooleanCellValue() ? "TRUE" : "FALSE";
+                    case ERROR -> "error " + cell.getErrorCellValue();
+                    default -> cell.getStringCellValue();
+                };
+                if (type != CellType.BLANK) {
+                    values.put(sheet.getSheetName() + "!" + cell.getAddress(), value);
+                }
+            })));
+        }
+        return values;
+    }
+
+    private interface Work<T> {
+        T in(Path folder) throws IOException;
+    }
+
+    private static <T> T in(Work<T> work) {
+        try {
+            Path folder = Files.createTempDirectory("nappe-recalculated");
+            try {
+                return work.in(folder);
+            } finally {
+                try (Stream<Path> all = Files.walk(folder)) {
+                    all.sorted(Comparator.reverseOrder()).forEach(path -> path.toFile().delete());
+                }
+            }
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    private static void require(String program, String name) {
+        boolean found = Stream.of(System.getenv().getOrDefault("PATH", "").split(java.io.File.pathSeparator))
+                .anyMatch(folder -> Files.isExecutable(Path.of(folder, program)));
+        assumeTrue(found, "NOT PROVEN: " + name + " (" + program + ") is not installed, so no second program recalculated");
+    }
+
+    private static void run(Path folder, String... command) throws IOException {
+        Path log = folder.resolve("log.txt");
+        Process process = new ProcessBuilder(command)
+                .redirectErrorStream(true)
+                .redirectOutput(log.toFile())
+                .start();
+        try {
+            if (!process.waitFor(PATIENCE_SECONDS, TimeUnit.SECONDS)) {
+                process.destroyForcibly();
+                throw new IOException(command[0] + " did not end: " + Files.readString(log));
+            }
+        } catch (InterruptedException e) {
+            process.destroyForcibly();
+            Thread.currentThread().interrupt();
+            throw new IOException(command[0] + " was interrupted", e);
+        }
+        if (process.exitValue() != 0) {
+            throw new IOException(command[0] + " failed: " + Files.readString(log));
+        }
+    }
+}
