@@ -29,6 +29,10 @@ final class Faults {
         return new InputRefused(found);
     }
 
+    int count() {
+        return found.size();
+    }
+
     void throwIfAny() {
         if (!found.isEmpty()) {
             throw new InputRefused(found);

@@ -35,8 +35,7 @@ final class UnitOffer {
             Map.entry("cusec", "ft3/s"), Map.entry("fps", "ft/s"), Map.entry("gal/m", "gpm"), Map.entry("usgpm", "gpm"),
             Map.entry("cmh", "m3/h"), Map.entry("cmd", "m3/d"), Map.entry("acre", "ac"), Map.entry("litre", "L"),
             Map.entry("liter", "L"), Map.entry("percent", "%"), Map.entry("degrees", "deg"), Map.entry("°", "deg"),
-            Map.entry("°c", "degC"), Map.entry("°f", "degF"), Map.entry("-", "1"), Map.entry("none", "1"),
-            Map.entry("ft/ft", "1"), Map.entry("m/m", "1"));
+            Map.entry("°c", "degC"), Map.entry("°f", "degF"), Map.entry("-", "1"), Map.entry("none", "1"));
 
     private static final Map<Dimension, String> WORDS = words();
 
@@ -66,6 +65,18 @@ final class UnitOffer {
                 .filter(u -> u.dimension().equals(unit.dimension()))
                 .forEach(u -> offered.put(u.text(), u));
         return new ArrayList<>(offered.values());
+    }
+
+    /** Every unit that is offered anywhere, that of pure numbers first. */
+    static List<String> all() {
+        return Stream.of(
+                        Stream.of("1"),
+                        COMPOUND.stream(),
+                        Stream.of("m", "s", "kg", "K"),
+                        UnitCatalogue.standard().entries().stream().map(e -> e.unit().text()))
+                .flatMap(s -> s)
+                .distinct()
+                .toList();
     }
 
     /** Whether a quantity asked for in one unit may be typed in the other; an angle is no plain number. */
