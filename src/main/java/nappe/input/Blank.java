@@ -10,7 +10,7 @@ import java.util.stream.Stream;
 import nappe.input.BlankWriter.Chosen;
 import nappe.method.Declared;
 import nappe.method.MethodCatalogue;
-import nappe.method.Sign;
+import nappe.formula.Sign;
 import nappe.unit.Dimension;
 import nappe.unit.Unit;
 import nappe.unit.WorkingSystem;

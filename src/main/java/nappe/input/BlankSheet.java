@@ -1,7 +1,7 @@
 package nappe.input;
 
 import java.util.List;
-import nappe.method.Sign;
+import nappe.formula.Sign;
 import org.apache.poi.ss.usermodel.DataValidation.ErrorStyle;
 import org.apache.poi.ss.usermodel.DataValidationConstraint;
 import org.apache.poi.ss.usermodel.DataValidationConstraint.OperatorType;

@@ -7,7 +7,7 @@ import java.util.Locale;
 import nappe.formula.Value;
 import nappe.input.RawCell.Format;
 import nappe.input.RawCell.Kind;
-import nappe.method.Sign;
+import nappe.formula.Sign;
 import nappe.unit.Unit;
 import nappe.unit.UnitException;
 

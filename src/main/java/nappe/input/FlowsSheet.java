@@ -9,7 +9,7 @@ import nappe.input.ProjectSheet.Named;
 import nappe.input.TypedReader.Backing;
 import nappe.method.Declared;
 import nappe.method.MethodCatalogue;
-import nappe.method.Sign;
+import nappe.formula.Sign;
 import nappe.station.Design.FlowCase;
 import nappe.station.Design.Typed;
 import nappe.unit.Dimension;

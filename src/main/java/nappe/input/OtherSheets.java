@@ -4,7 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Function;
 import nappe.input.ProjectSheet.Named;
-import nappe.method.Sign;
+import nappe.formula.Sign;
 import nappe.station.Design.Assumption;
 import nappe.station.Design.Demand;
 import nappe.station.Design.Requirement;

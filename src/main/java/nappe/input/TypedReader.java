@@ -3,7 +3,7 @@ package nappe.input;
 import java.util.List;
 import nappe.formula.Value;
 import nappe.method.Declared;
-import nappe.method.Sign;
+import nappe.formula.Sign;
 import nappe.station.Design.Typed;
 import nappe.unit.Unit;
 
