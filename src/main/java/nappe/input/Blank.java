@@ -1,0 +1,288 @@
+package nappe.input;
+
+import static nappe.input.Layout.Label;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Collections;
+import java.util.List;
+import java.util.stream.Stream;
+import nappe.input.BlankWriter.Chosen;
+import nappe.method.Declared;
+import nappe.method.MethodCatalogue;
+import nappe.formula.Sign;
+import nappe.unit.Dimension;
+import nappe.unit.Unit;
+import nappe.unit.WorkingSystem;
+import org.apache.poi.xssf.usermodel.XSSFCellStyle;
+import org.apache.poi.xssf.usermodel.XSSFWorkbook;
+
+/** The sheets of one blank, in their order. */
+final class Blank {
+    private static final int CASE_ROWS = 24;
+    private static final String REQUIRED = "required";
+    private static final String OPTIONAL = "optional";
+    private static final String FRAMES = "Write only into the cells with a thick frame. ";
+
+    private final XSSFWorkbook workbook;
+    private final WorkingSystem system;
+    private final List<Chosen> elements;
+    private final MethodCatalogue methods;
+    private final BlankStyles styles;
+    private final DropDowns lists = new DropDowns();
+    private final List<BlankSheet> sheets = new ArrayList<>();
+
+    Blank(XSSFWorkbook workbook, WorkingSystem system, List<Chosen> elements, MethodCatalogue methods) {
+        this.workbook = workbook;
+        this.system = system;
+        this.elements = elements;
+        this.methods = methods;
+        this.styles = new BlankStyles(workbook);
+    }
+
+    void write() {
+        project();
+        flows();
+        elements.forEach(this::element);
+        demands();
+        list(Layout.ASSUMPTIONS, 30, Layout.ASSUMPTION_HEADS, List.of(REQUIRED, OPTIONAL, OPTIONAL, REQUIRED),
+                "One assumption a row, with its basis and who is to confirm it; open until it is confirmed.",
+                60, 50, 20, 12);
+        list(Layout.REFERENCES, 30, Layout.REFERENCE_HEADS, List.of(REQUIRED),
+                "One reference a row: drawings, surveys, reports and publications, each with its date or edition.", 130);
+        list(Layout.REQUIREMENTS, 24, Layout.REQUIREMENT_HEADS, List.of(REQUIRED, OPTIONAL, OPTIONAL),
+                "One requirement a row that the calculation has to answer, with its citation and the place of the answer.",
+                60, 40, 40);
+        list(Layout.REVISIONS, 16, Layout.REVISION_HEADS, List.of(REQUIRED, REQUIRED, OPTIONAL),
+                "One revision a row, the first at the top; the date as year-month-day.", 12, 14, 100);
+        lists();
+        sheets.forEach(sheet -> sheet.finish(system == WorkingSystem.US));
+    }
+
+    private BlankSheet sheet(String name, String title, int... widths) {
+        BlankSheet sheet = new BlankSheet(workbook, styles, name, title, widths);
+        sheets.add(sheet);
+        return sheet;
+    }
+
+    private void project() {
+        BlankSheet sheet = sheet(Layout.PROJECT, "Project", 32, 52, 62);
+        sheet.lines(List.of(
+                FRAMES + "What must be filled in is marked \"required\".",
+                "Numbers are written with a point and without their unit; the unit stands in a cell of its own."));
+        sheet.head(Layout.PROJECT_HEADS, false);
+        for (Label label : Label.values()) {
+            String note = (label.required() ? REQUIRED : OPTIONAL) + ". " + label.note();
+            int row = sheet.line(
+                    List.of(label.text(), filled(label), note), List.of(styles.label, styles.textEntry, styles.label));
+            offer(sheet, label, row);
+        }
+        sheet.skip();
+        sheet.line("Elements, from the downstream end up");
+        sheet.head(Layout.STATION_HEADS, false);
+        for (Chosen element : elements) {
+            sheet.line(
+                    List.of(element.tag(), element.method(), methods.title(element.method())),
+                    List.of(styles.label, styles.label, styles.textEntry));
+        }
+    }
+
+    private String filled(Label label) {
+        boolean us = system == WorkingSystem.US;
+        return switch (label) {
+            case STATUS -> Layout.STATUSES.get(0);
+            case SYSTEM -> system.title();
+            case PAPER -> Layout.PAPERS.get(us ? 0 : 1);
+            case FLOW_UNIT -> us ? "MGD" : "L/s";
+            case HEAD_UNIT -> us ? "in" : "mm";
+            case SEAL -> Layout.YES.get(0);
+            default -> "";
+        };
+    }
+
+    private void offer(BlankSheet sheet, Label label, int row) {
+        switch (label) {
+            case STATUS -> sheet.offer(row, row, 1, lists.range(label.text(), Layout.STATUSES), true);
+            case SYSTEM -> sheet.offer(row, row, 1, lists.range(label.text(), Layout.SYSTEMS), true);
+            case PAPER -> sheet.offer(row, row, 1, lists.range(label.text(), Layout.PAPERS), true);
+            case FLOW_UNIT -> sheet.offer(row, row, 1, units(system.coherentUnit(Dimension.FLOW)), false);
+            case HEAD_UNIT -> sheet.offer(row, row, 1, units(system.coherentUnit(Dimension.LENGTH)), false);
+            case SEAL -> sheet.offer(row, row, 1, lists.range("Yes or no", Layout.YES), true);
+            default -> {}
+        }
+    }
+
+    private String units(Unit unit) {
+        String measured = UnitOffer.measured(unit);
+        return lists.range("Units of " + measured,
+                UnitOffer.offered(unit).stream().map(Unit::text).sorted().toList());
+    }
+
+    /** A column of the sheet Flows. */
+    private record FlowColumn(String head, int width, String mark, boolean number, String filled) {}
+
+    private void flows() {
+        Unit flow = system.coherentUnit(Dimension.FLOW);
+        Unit level = system.coherentUnit(Dimension.LENGTH);
+        List<FlowColumn> columns = new ArrayList<>();
+        for (String head : Layout.FLOW_HEADS) {
+            columns.add(switch (head) {
+                case "Case" -> new FlowColumn(head, 26, REQUIRED, false, "");
+                case "Flow" -> new FlowColumn(head, 12, REQUIRED, true, "");
+                case "Flow unit" -> new FlowColumn(head, 10, REQUIRED, false, system == WorkingSystem.US ? "MGD" : "L/s");
+                case "Water level downstream" -> new FlowColumn(head, 13, OPTIONAL, true, "");
+                case "Water level unit" -> new FlowColumn(head, 10, OPTIONAL, false, level.text());
+                case "Source or basis" -> new FlowColumn(head, 36, OPTIONAL, false, "");
+                case "Standing" -> new FlowColumn(head, 11, REQUIRED, false, "");
+                default -> new FlowColumn(head, 14, OPTIONAL, false, "");
+            });
+        }
+        List<Declared> perCase = new ArrayList<>();
+        for (Chosen element : elements) {
+            for (Declared declared : methods.declared(element.method())) {
+                if (declared.kind() == Declared.Kind.CASE) {
+                    perCase.add(declared);
+                    String head = element.tag() + "." + declared.symbol();
+                    String mark = declared.optional() ? OPTIONAL : REQUIRED;
+                    boolean quantity = declared.words().isEmpty();
+                    columns.add(new FlowColumn(head, 12, mark, quantity, ""));
+                    columns.add(new FlowColumn(head + Layout.UNIT_OF, 12, quantity ? mark : OPTIONAL, false,
+                            UnitOffer.first(declared.unit(), system).text()));
+                }
+            }
+        }
+        BlankSheet sheet = sheet(Layout.FLOWS, "Flow cases",
+                columns.stream().mapToInt(FlowColumn::width).toArray());
+        List<String> lines = new ArrayList<>(List.of(
+                FRAMES + "One case a row; a case is one flow with one water level downstream, under a name of its own.",
+                "The same flow may stand in several cases. Rows without a name and a flow are passed over."));
+        perCase.forEach(d -> lines.add(d.symbol() + ": " + d.label() + ", for each case."));
+        sheet.lines(lines);
+        sheet.marks(columns.stream().map(FlowColumn::mark).toList());
+        sheet.head(columns.stream().map(FlowColumn::head).toList(), true);
+        List<XSSFCellStyle> cellStyles = columns.stream()
+                .map(c -> c.number() ? styles.numberEntry : styles.textEntry)
+                .toList();
+        int first = sheet.line(columns.stream().map(FlowColumn::filled).toList(), cellStyles);
+        int last = first;
+        while (last < first + CASE_ROWS - 1) {
+            last = sheet.line(columns.stream().map(FlowColumn::filled).toList(), cellStyles);
+        }
+        int at = Layout.FLOW_HEADS.indexOf("Flow");
+        sheet.number(first, last, at, Sign.POSITIVE, "Flow", "Flow of the case, greater than zero.");
+        sheet.offer(first, last, at + 1, units(flow), false);
+        sheet.number(first, last, at + 2, Sign.ANY, "Water level downstream",
+                "Level of the receiving water; blank where there is none.");
+        sheet.offer(first, last, at + 3, units(level), false);
+        sheet.offer(first, last, Layout.FLOW_HEADS.indexOf("Standing"),
+                lists.range("Standing", Layout.STANDINGS), true);
+        int column = Layout.FLOW_HEADS.size();
+        for (Declared declared : perCase) {
+            asks(sheet, first, last, column, declared);
+            if (declared.words().isEmpty()) {
+                sheet.offer(first, last, column + 1, units(declared.unit()), false);
+            }
+            column += 2;
+        }
+    }
+
+    private void element(Chosen element) {
+        BlankSheet sheet = sheet(element.tag(), element.tag() + ": " + methods.title(element.method()), 12, 46, 16, 14,
+                44, 12, 12);
+        sheet.lines(List.of(
+                FRAMES + "Method: " + element.method() + ".",
+                "Say of every value where it comes from, and whether it is known or assumed."));
+        sheet.head(Stream.concat(Layout.ENTRY_HEADS.stream(), Stream.of("To fill in")).toList(), true);
+        for (Declared declared : methods.declared(element.method())) {
+            if (declared.kind() == Declared.Kind.CASE) {
+                continue;
+            }
+            boolean quantity = declared.words().isEmpty();
+            int row = sheet.line(
+                    List.of(
+                            declared.symbol(),
+                            declared.label(),
+                            "",
+                            quantity ? UnitOffer.first(declared.unit(), system).text() : "",
+                            "",
+                            "",
+                            declared.optional() ? OPTIONAL : REQUIRED),
+                    List.of(
+                            styles.label,
+                            styles.label,
+                            quantity ? styles.numberEntry : styles.textEntry,
+                            quantity ? styles.textEntry : styles.label,
+                            styles.textEntry,
+                            styles.textEntry,
+                            styles.label));
+            asks(sheet, row, row, 2, declared);
+            if (quantity) {
+                sheet.offer(row, row, 3, units(declared.unit()), false);
+            }
+            sheet.offer(row, row, 5, lists.range("Standing", Layout.STANDINGS), true);
+        }
+    }
+
+    private void asks(BlankSheet sheet, int firstRow, int lastRow, int column, Declared declared) {
+        if (declared.words().isEmpty()) {
+            String prompt = declared.label() + ". " + (declared.optional() ? "May stay blank. " : "")
+                    + "Write " + UnitOffer.measured(declared.unit()) + ", " + declared.sign().words() + ".";
+            sheet.number(firstRow, lastRow, column, declared.sign(), declared.symbol(), prompt);
+        } else {
+            sheet.offer(firstRow, lastRow, column, lists.range(declared.symbol(), declared.words()), true);
+        }
+    }
+
+    private void demands() {
+        BlankSheet sheet = sheet(Layout.DEMANDS, "Limits demanded by others", 10, 12, 14, 12, 12, 50, 50);
+        sheet.lines(List.of(
+                FRAMES + "One limit a row: a result of an element, by its tag and symbol, at most or at least a value.",
+                "No limit of an authority is built in: each stands here with its citation."));
+        sheet.marks(List.of(REQUIRED, REQUIRED, REQUIRED, REQUIRED, REQUIRED, OPTIONAL, REQUIRED));
+        sheet.head(Layout.DEMAND_HEADS, true);
+        List<XSSFCellStyle> cellStyles = new ArrayList<>(Collections.nCopies(7, styles.textEntry));
+        cellStyles.set(3, styles.numberEntry);
+        int first = sheet.line(Collections.nCopies(7, ""), cellStyles);
+        int last = first;
+        while (last < first + CASE_ROWS - 1) {
+            last = sheet.line(Collections.nCopies(7, ""), cellStyles);
+        }
+        sheet.offer(first, last, 0, lists.range("Tags", elements.stream().map(Chosen::tag).toList()), true);
+        sheet.offer(first, last, 2, lists.range("At most or at least", Layout.SIDES), true);
+        sheet.number(first, last, 3, Sign.ANY, "Value", "The value demanded.");
+        sheet.offer(first, last, 4, lists.range("Units", UnitOffer.all()), false);
+    }
+
+    private void list(String name, int rows, List<String> heads, List<String> marks, String line, int... widths) {
+        BlankSheet sheet = sheet(name, name, widths);
+        sheet.lines(List.of(FRAMES + line));
+        sheet.marks(marks);
+        sheet.head(heads, true);
+        List<XSSFCellStyle> cellStyles = Collections.nCopies(heads.size(), styles.textEntry);
+        int first = sheet.line(Collections.nCopies(heads.size(), ""), cellStyles);
+        for (int i = 1; i < rows; i++) {
+            sheet.line(Collections.nCopies(heads.size(), ""), cellStyles);
+        }
+        if (heads.contains("Open or closed")) {
+            sheet.offer(first, first + rows - 1, heads.indexOf("Open or closed"),
+                    lists.range("Open or closed", Layout.OPEN), true);
+        }
+    }
+
+    private void lists() {
+        List<DropDowns.Column> columns = lists.columns();
+        int[] widths = new int[Math.max(columns.size(), 1)];
+        Arrays.fill(widths, 18);
+        BlankSheet sheet = sheet(Layout.LISTS, "Lists", widths);
+        sheet.line("The words and units that the other sheets offer. Nothing is written here.");
+        sheet.skip();
+        sheet.head(columns.stream().map(DropDowns.Column::title).toList(), false);
+        int longest = columns.stream().mapToInt(c -> c.words().size()).max().orElse(0);
+        for (int i = 0; i < longest; i++) {
+            int at = i;
+            sheet.line(
+                    columns.stream().map(c -> at < c.words().size() ? c.words().get(at) : "").toList(),
+                    Collections.nCopies(columns.size(), styles.line));
+        }
+    }
+}
