@@ -1,0 +1,93 @@
+package nappe.job;
+
+import java.nio.charset.StandardCharsets;
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
+import java.util.Collection;
+import java.util.HexFormat;
+import java.util.Map;
+import java.util.TreeMap;
+import nappe.formula.Value;
+import nappe.method.MethodSheet;
+import nappe.station.Design;
+
+/**
+ * The mark by which sheets, workbook and PDF are known to belong together: a hash of the typed values in a fixed order,
+ * the texts of the methods and the version; not of any file's bytes.
+ */
+public final class Fingerprint {
+    private final StringBuilder text = new StringBuilder();
+
+    private Fingerprint() {}
+
+    /** Sixteen hexadecimal digits in groups of four. */
+    public static String of(Design design, Collection<MethodSheet> methods, String version) {
+        Fingerprint fingerprint = new Fingerprint();
+        fingerprint.add("version", version);
+        methods.forEach(method -> fingerprint.add("method " + method.name(), method.text()));
+        fingerprint.add(design);
+        return fingerprint.shown();
+    }
+
+    /** The first eight digits of the hash of a text. */
+    public static String ofText(String text) {
+        return hash(text).substring(0, 8);
+    }
+
+    private void add(String key, String value) {
+        text.append(key).append('=').append(value.length()).append(':').append(value).append('\n');
+    }
+
+    private void add(Design design) {
+        Design.Project p = design.project();
+        add("project", String.join("|", p.project(), p.firm(), p.client(), p.number(), p.subject(), p.revision()));
+        add("date", p.date().toString());
+        add("status", p.status());
+        add("system", p.system().name() + p.letterPaper() + p.flowUnit() + p.headUnit() + p.sealSpace());
+        add("datum", p.datum());
+        add("worked", p.workedCase());
+        add("release", p.release());
+        for (Design.Element element : design.elements()) {
+            add("element", element.tag() + "|" + element.title() + "|" + element.method());
+            add(element.typed());
+        }
+        for (Design.FlowCase one : design.cases()) {
+            add("case", String.join("|", one.name(), one.period(), one.year(), one.tailwaterReturn()));
+            add("flow", shown(one.flow()));
+            add("tailwater", shown(one.tailwater()));
+            add(one.typed());
+        }
+        design.demands().forEach(d -> add("demand", String.join("|",
+                d.tag(), d.symbol(), Boolean.toString(d.atMost()), shown(d.value()), d.description(), d.citation())));
+        design.assumptions().forEach(a -> add("assumption", a.toString()));
+        design.references().forEach(r -> add("reference", r));
+        design.requirements().forEach(r -> add("requirement", r.toString()));
+        design.revisions().forEach(r -> add("revision", r.toString()));
+    }
+
+    private void add(Map<String, Design.Typed> typed) {
+        new TreeMap<>(typed).forEach((symbol, value) -> add(symbol, shown(value)));
+    }
+
+    private static String shown(Design.Typed typed) {
+        Value value = typed.value();
+        String content = value instanceof Value.Number number
+                ? Double.toString(number.value()) + " " + typed.unit()
+                : value instanceof Value.Word word ? word.text() : "";
+        return content + "|" + typed.source() + "|" + typed.standing();
+    }
+
+    private String shown() {
+        String hash = hash(text.toString());
+        return hash.substring(0, 4) + " " + hash.substring(4, 8) + " " + hash.substring(8, 12) + " " + hash.substring(12, 16);
+    }
+
+    private static String hash(String text) {
+        try {
+            byte[] digest = MessageDigest.getInstance("SHA-256").digest(text.getBytes(StandardCharsets.UTF_8));
+            return HexFormat.of().formatHex(digest);
+        } catch (NoSuchAlgorithmException e) {
+            throw new IllegalStateException(e);
+        }
+    }
+}

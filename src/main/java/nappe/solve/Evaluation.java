@@ -1,0 +1,89 @@
+package nappe.solve;
+
+import java.util.IdentityHashMap;
+import java.util.List;
+import java.util.Map;
+import nappe.calculation.Cell;
+import nappe.calculation.Reference;
+import nappe.calculation.Run;
+import nappe.calculation.Sureness;
+import nappe.formula.Formula;
+import nappe.formula.Guard;
+import nappe.formula.NumberReading;
+import nappe.formula.Value;
+import nappe.unit.Unit;
+
+/**
+ * Evaluates cells in their order. A cell first passes on the words of what its formula needs as a number, by the rule of
+ * {@link Guard} that the workbook's formulas follow too.
+ */
+public final class Evaluation {
+    private final Map<Cell, Value> values = new IdentityHashMap<>();
+
+    private Evaluation() {}
+
+    /**
+     * @param cells each after all that it refers to
+     * @return the value of each cell, by identity
+     */
+    public static Map<Cell, Value> of(List<Cell> cells) {
+        Evaluation evaluation = new Evaluation();
+        cells.forEach(cell -> evaluation.values.put(cell, evaluation.value(cell)));
+        return evaluation.values;
+    }
+
+    private Value value(Cell cell) {
+        Formula formula = cell.formula();
+        if (formula == null) {
+            return java.util.Objects.requireNonNull(cell.typed());
+        }
+        for (String symbol : Guard.guarded(formula)) {
+            if (cell.references().get(symbol) instanceof Cell needed && needed.sureness() != Sureness.SURE) {
+                Value there = known(needed);
+                if (!(there instanceof Value.Number)) {
+                    return there instanceof Value.Word word ? new Value.None(word.text()) : there;
+                }
+            }
+        }
+        return NumberReading.of(formula, new Seen(cell));
+    }
+
+    private Value known(Cell cell) {
+        Value value = values.get(cell);
+        if (value == null) {
+            throw new IllegalStateException(cell + " is referred to before it is evaluated");
+        }
+        return value;
+    }
+
+    /** What a cell's formula sees. */
+    private final class Seen implements NumberReading.Values {
+        private final Cell cell;
+
+        Seen(Cell cell) {
+            this.cell = cell;
+        }
+
+        @Override
+        public Value of(String symbol) {
+            if (cell.references().get(symbol) instanceof Cell one) {
+                return known(one);
+            }
+            throw new IllegalStateException(cell + " does not know " + symbol);
+        }
+
+        @Override
+        public List<Value> column(String symbol) {
+            if (cell.references().get(symbol) instanceof Run run) {
+                return run.cells().stream().map(Evaluation.this::known).toList();
+            }
+            throw new IllegalStateException(cell + " does not know the column " + symbol);
+        }
+
+        @Override
+        public double size(Unit unit) {
+            Reference factor = cell.references().get("1 " + unit.text());
+            return factor instanceof Cell one && known(one) instanceof Value.Number number ? number.value() : 1;
+        }
+    }
+}
