@@ -1,0 +1,77 @@
+package nappe.cli;
+
+import java.io.PrintWriter;
+import java.io.StringWriter;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import nappe.input.Fault;
+import nappe.input.InputRefused;
+import nappe.job.CheckException;
+import nappe.method.MethodException;
+import nappe.station.DesignFault;
+import nappe.station.StationException;
+import picocli.CommandLine;
+
+/** Turns what a command throws into messages and an exit status; never a stack trace on the screen. */
+final class Failures implements CommandLine.IExecutionExceptionHandler {
+    @Override
+    public int handleExecutionException(Exception failure, CommandLine line, CommandLine.ParseResult parsed) {
+        PrintWriter err = line.getErr();
+        if (failure instanceof InputRefused refused) {
+            return refused(err, refused.faults());
+        }
+        if (failure instanceof CheckException || failure instanceof MethodException) {
+            err.println(failure.getMessage());
+            return ExitStatus.INPUT_REFUSED;
+        }
+        if (failure instanceof Refusal refusal) {
+            err.println(refusal.getMessage());
+            return refusal.status();
+        }
+        if (failure instanceof java.io.IOException) {
+            err.println("nappe: " + inWords((java.io.IOException) failure) + " (fault: file)");
+            return ExitStatus.INTERNAL_FAULT;
+        }
+        return internal(err, failure);
+    }
+
+    private static int refused(PrintWriter err, List<Fault> faults) {
+        faults.forEach(fault -> err.println(fault));
+        err.println(faults.size() == 1 ? "1 fault; nothing was written." : faults.size() + " faults; nothing was written.");
+        return ExitStatus.INPUT_REFUSED;
+    }
+
+    /** The faults of a design at their cells of the input workbook. */
+    static InputRefused at(String file, StationException e) {
+        return new InputRefused(e.faults().stream().map(fault -> at(file, fault)).toList());
+    }
+
+    private static Fault at(String file, DesignFault fault) {
+        return new Fault(file, fault.origin().sheet(), fault.origin().cell(), fault.message(), fault.code());
+    }
+
+    private static String inWords(java.io.IOException failure) {
+        String message = String.valueOf(failure.getMessage());
+        if (failure instanceof java.nio.file.AccessDeniedException) {
+            return "no right to write " + message;
+        }
+        if (failure instanceof java.nio.file.NoSuchFileException) {
+            return "there is no " + message;
+        }
+        return message;
+    }
+
+    private static int internal(PrintWriter err, Exception failure) {
+        StringWriter trace = new StringWriter();
+        failure.printStackTrace(new PrintWriter(trace));
+        try {
+            Path report = Files.createTempFile("nappe-fault-", ".txt");
+            Files.writeString(report, trace.toString());
+            err.println("nappe: a fault of the program itself: " + failure + "; details in " + report + " (fault: internal)");
+        } catch (java.io.IOException e) {
+            err.println("nappe: a fault of the program itself: " + failure + " (fault: internal)");
+        }
+        return ExitStatus.INTERNAL_FAULT;
+    }
+}

@@ -1,0 +1,37 @@
+package nappe.cli;
+
+import java.io.PrintWriter;
+import java.nio.file.Path;
+import java.util.concurrent.Callable;
+import nappe.job.Job;
+import nappe.station.Design;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Parameters;
+
+/** {@code nappe inspect station.xlsx}. */
+@Command(
+        name = "inspect",
+        mixinStandardHelpOptions = true,
+        description = "Read an input workbook, report every fault at its cell or the verdicts on its limits, and write nothing.",
+        footer = {"", "Example:", "  nappe inspect headworks.xlsx"})
+final class InspectCommand implements Callable<Integer> {
+    @Parameters(paramLabel = "IN.xlsx", description = "the input workbook")
+    private Path input;
+
+    @CommandLine.Spec
+    private CommandLine.Model.CommandSpec spec;
+
+    @Override
+    public Integer call() {
+        Desk desk = new Desk();
+        Design design = desk.read(input);
+        Job.Done done = desk.compute(input, design);
+        PrintWriter out = spec.commandLine().getOut();
+        out.println(design.project().project() + ": " + design.project().subject());
+        out.println(design.elements().size() + " element(s), " + design.cases().size() + " flow case(s), no faults.");
+        out.println();
+        new VerdictList(done.results()).print(out);
+        return ExitStatus.DONE;
+    }
+}

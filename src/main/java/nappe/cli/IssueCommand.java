@@ -1,0 +1,74 @@
+package nappe.cli;
+
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.concurrent.Callable;
+import nappe.calculation.Block;
+import nappe.deliver.csv.RatingCsv;
+import nappe.deliver.pdf.PdfDelivery;
+import nappe.deliver.xlsx.XlsxDelivery;
+import nappe.job.Job;
+import nappe.results.Furniture;
+import nappe.results.Results;
+import nappe.station.Design;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+
+/** {@code nappe issue station.xlsx -o output}. */
+@Command(
+        name = "issue",
+        mixinStandardHelpOptions = true,
+        description = "Make the calculation package: a PDF, a workbook with live formulas, and the rating tables as CSV.",
+        footer = {
+            "",
+            "Example:",
+            "  nappe issue headworks.xlsx -o output",
+            "",
+            "The package goes into a folder of its own, named for the calculation number and the revision. A preliminary package is written"
+                    + " over; one whose status is issued never is."
+        })
+final class IssueCommand implements Callable<Integer> {
+    @Parameters(paramLabel = "IN.xlsx", description = "the input workbook")
+    private Path input;
+
+    @Option(names = "-o", paramLabel = "FOLDER", defaultValue = "output", description = "where the package goes (default: output)")
+    private Path folder;
+
+    @CommandLine.Spec
+    private CommandLine.Model.CommandSpec spec;
+
+    @Override
+    public Integer call() throws IOException {
+        Desk desk = new Desk();
+        Design design = desk.read(input);
+        PackageFolder target = PackageFolder.of(folder, design.project().number(), design.project().revision());
+        target.refuseIfIssued();
+        Job.Done done = desk.compute(input, design);
+        target.write(files(target.name(), done), done.results().furniture());
+        PrintWriter out = spec.commandLine().getOut();
+        out.println("Wrote " + target.path());
+        new VerdictList(done.results()).print(out);
+        return ExitStatus.DONE;
+    }
+
+    private Map<String, byte[]> files(String name, Job.Done done) {
+        Results results = done.results();
+        Furniture furniture = results.furniture();
+        Map<String, byte[]> files = new LinkedHashMap<>();
+        PdfDelivery.Rendered pdf = PdfDelivery.render(results);
+        pdf.warnings().forEach(warning -> spec.commandLine().getErr().println("nappe: " + warning));
+        files.put(name + ".pdf", pdf.bytes());
+        files.put(name + ".xlsx", XlsxDelivery.render(results));
+        for (Map.Entry<String, Block.Table> rating : done.ratings().entrySet()) {
+            String csv = RatingCsv.write(results, rating.getValue());
+            files.put(name + "_" + rating.getKey() + "-rating.csv", csv.getBytes(StandardCharsets.UTF_8));
+        }
+        return files;
+    }
+}

@@ -1,0 +1,48 @@
+package nappe.cli;
+
+import java.io.PrintWriter;
+import java.util.List;
+import nappe.calculation.Block;
+import nappe.calculation.Sheet;
+import nappe.formula.Value;
+import nappe.results.Digits;
+import nappe.results.Results;
+
+/** The summary of limits as lines of text. */
+final class VerdictList {
+    private final Results results;
+
+    VerdictList(Results results) {
+        this.results = results;
+    }
+
+    void print(PrintWriter out) {
+        Sheet sheet = results.sheets().stream()
+                .filter(s -> s.name().equals("Limits"))
+                .findFirst()
+                .orElseThrow();
+        for (Block block : sheet.blocks()) {
+            if (block instanceof Block.Table table) {
+                out.println(table.title() + ":");
+                for (Block.Row row : table.rows()) {
+                    List<String> texts = row.items().stream().map(this::text).toList();
+                    out.printf("  %-14s %10s  %-5s %s, %s%n", texts.get(3), texts.get(4), texts.get(1), texts.get(2), texts.get(5));
+                }
+                return;
+            }
+        }
+    }
+
+    private String text(Block.Item item) {
+        if (item instanceof Block.Text text) {
+            return text.text();
+        }
+        if (item instanceof Block.Content content) {
+            Value value = results.value(content.cell());
+            return value instanceof Value.Number number
+                    ? Digits.print(content.cell().unit(), number.value())
+                    : value instanceof Value.Word word ? word.text() : ((Value.None) value).why();
+        }
+        return "";
+    }
+}

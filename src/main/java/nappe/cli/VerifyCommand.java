@@ -1,0 +1,86 @@
+package nappe.cli;
+
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.concurrent.Callable;
+import nappe.job.CheckOutcome;
+import nappe.job.CheckRow;
+import nappe.job.Verification;
+import nappe.results.Digits;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Parameters;
+
+/** {@code nappe verify [FILE.csv...]}. */
+@Command(
+        name = "verify",
+        mixinStandardHelpOptions = true,
+        description = "Run check values through the method sheets: the built-in ones, or those of the files named.",
+        footer = {
+            "",
+            "Examples:",
+            "  nappe verify",
+            "  nappe verify firm-checks.csv",
+            "",
+            "A row of a file: id,method,entries,target,expected,unit,tolerance,source,kind,note",
+            "  H1,parshall-flume,\"size = \"\"3 ft\"\"; h = 2 ft\",Q_h,35.5,ft3/s,0.6 %,our test of 1 May,derived,"
+        })
+final class VerifyCommand implements Callable<Integer> {
+    @Parameters(arity = "0..*", paramLabel = "FILE.csv", description = "files with check values of your own")
+    private List<Path> files = new ArrayList<>();
+
+    @CommandLine.Spec
+    private CommandLine.Model.CommandSpec spec;
+
+    @Override
+    public Integer call() throws IOException {
+        Desk desk = new Desk();
+        List<CheckRow> rows = new ArrayList<>();
+        if (files.isEmpty()) {
+            rows.addAll(desk.checks());
+        }
+        for (Path file : files) {
+            if (!Files.isRegularFile(file)) {
+                throw new Refusal(ExitStatus.INPUT_REFUSED, "there is no file " + file + " (fault: file-missing)");
+            }
+            rows.addAll(CheckRow.read(file.toString(), Files.readString(file)));
+        }
+        Verification verification = new Verification(desk.methods());
+        PrintWriter out = spec.commandLine().getOut();
+        List<CheckOutcome> outcomes = rows.stream().map(verification::run).toList();
+        outcomes.forEach(outcome -> print(out, outcome));
+        out.println();
+        out.printf("%-24s %-12s %6s %6s%n", "Method", "Kind", "Rows", "Met");
+        for (List<String> count : CheckOutcome.counts(outcomes)) {
+            out.printf("%-24s %-12s %6s %6s%n", count.toArray());
+        }
+        long met = outcomes.stream().filter(CheckOutcome::met).count();
+        out.printf(Locale.ROOT, "%d rows, %d met, %d not met.%n", outcomes.size(), met, outcomes.size() - met);
+        return met == outcomes.size() ? ExitStatus.DONE : ExitStatus.INPUT_REFUSED;
+    }
+
+    private static void print(PrintWriter out, CheckOutcome outcome) {
+        CheckRow row = outcome.row();
+        String unit = row.unit().text().equals("1") ? "" : " " + row.unit();
+        out.printf(
+                "%-8s %-7s %s: %s%n         %s = %s%s, expected %s%s, difference %s, tolerance %s%n         %s (%s)%n",
+                row.id(),
+                outcome.met() ? "met" : "NOT MET",
+                row.method(),
+                row.entriesText(),
+                row.target(),
+                outcome.shown(),
+                unit,
+                Digits.asTyped(row.expected()),
+                unit,
+                outcome.difference(),
+                row.tolerance(),
+                row.source(),
+                row.kind());
+    }
+}
