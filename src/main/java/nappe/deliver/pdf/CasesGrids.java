@@ -106,16 +106,12 @@ final class CasesGrids {
             head.add(View.GridCell.of("right", View.Text.plain("", lines.caseNames().get(i))));
         }
         List<View.GridRow> body = new ArrayList<>();
-        Block.Line heading = null;
+        Between between = new Between(width);
         for (Block.Line line : lines.lines()) {
             if (line.kind() == Block.LineKind.HEADING) {
-                heading = line;
+                between.heading(line.description());
             } else if (!line.perCase().isEmpty()) {
-                if (heading != null) {
-                    body.add(between(heading, HEADS.size() + to - from));
-                    heading = null;
-                }
-                body.add(row(line, from, to));
+                body.add(between.above(row(line, from, to)));
             }
         }
         return new View.Grid(
@@ -124,12 +120,6 @@ final class CasesGrids {
                 List.of(View.Text.plain("tabletitle", title)),
                 List.of(new View.GridRow("", head)),
                 body);
-    }
-
-    private static View.GridRow between(Block.Line heading, int columns) {
-        return new View.GridRow(
-                "between",
-                List.of(new View.GridCell("", columns, List.of(View.Text.plain("", heading.description())))));
     }
 
     private View.GridRow row(Block.Line line, int from, int to) {

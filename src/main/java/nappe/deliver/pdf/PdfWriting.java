@@ -15,6 +15,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Set;
 import nappe.results.Furniture;
+import org.w3c.dom.Document;
 import org.xhtmlrenderer.pdf.DefaultPDFCreationListener;
 import org.xhtmlrenderer.pdf.ITextRenderer;
 
@@ -37,8 +38,12 @@ final class PdfWriting {
                 glyphs);
         renderer.setPDFVersion(PdfWriter.VERSION_1_7);
         renderer.setListener(new Stamp(xhtml, furniture));
-        renderer.setDocument(Xhtml.parse(xhtml), null, new PlainNames());
-        renderer.layout();
+        renderer.getSharedContext().setLineBreakingStrategy(new SpaceBreaks());
+        Document document = Xhtml.parse(xhtml);
+        do {
+            renderer.setDocument(document, null, new PlainNames());
+            renderer.layout();
+        } while (LonelyHeads.moved(renderer));
         ByteArrayOutputStream bytes = new ByteArrayOutputStream();
         renderer.createPDF(bytes);
         return new PdfDelivery(bytes.toByteArray(), warnings(glyphs.missing()));

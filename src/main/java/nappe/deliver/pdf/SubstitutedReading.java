@@ -1,5 +1,6 @@
 package nappe.deliver.pdf;
 
+import java.util.List;
 import nappe.calculation.Cell;
 import nappe.calculation.Reference;
 import nappe.calculation.Run;
@@ -27,7 +28,7 @@ final class SubstitutedReading {
     private Inline number(Cell cell, String name) {
         Reference reference = cell.references().get(name);
         if (reference instanceof Run run) {
-            return Inline.text(Links.unquoted(run.from(cell.place().sheet())));
+            return Inline.of(Inline.ATOM, List.of(Piece.whole(Links.unquoted(run.from(cell.place().sheet())))));
         }
         return reference instanceof Cell other ? number(other) : TypesetReading.name(name);
     }

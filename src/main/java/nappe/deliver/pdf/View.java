@@ -85,6 +85,13 @@ public final class View {
     }
 
     /**
+     * Pieces that follow one another.
+     *
+     * @param whole whether they are one word of several pieces, never broken over two lines
+     */
+    public record Word(boolean whole, List<Piece> pieces) {}
+
+    /**
      * Characters that are set as one line or paragraph.
      *
      * @param target id of what it links to, with the hash; empty for none
@@ -96,6 +103,11 @@ public final class View {
 
         static Text plain(String style, String text) {
             return of(style, List.of(Piece.plain(text)));
+        }
+
+        /** The same, gathered into words. */
+        public List<Word> words() {
+            return Words.of(pieces);
         }
 
         /** All characters in a row, for measuring. */

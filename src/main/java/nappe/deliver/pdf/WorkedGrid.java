@@ -39,7 +39,16 @@ final class WorkedGrid {
                         cell("", "Quantity, equation, the same with numbers"),
                         cell("right", "Result"),
                         cell("", "Source; workbook cell")));
-        List<View.GridRow> body = lines.lines().stream().map(this::row).toList();
+        List<View.GridRow> body = new ArrayList<>();
+        Between between = new Between(width);
+        for (Block.Line line : lines.lines()) {
+            if (line.kind() == Block.LineKind.HEADING) {
+                between.heading(line.description());
+            } else {
+                body.add(between.above(row(line)));
+            }
+        }
+        body.addAll(between.rest(4));
         List<Double> widths = List.of(CODE, width - CODE - RESULT - SOURCE, RESULT, SOURCE);
         return new View.Grid("worked", widths, titles, List.of(head), body);
     }
@@ -49,13 +58,9 @@ final class WorkedGrid {
     }
 
     private View.GridRow row(Block.Line line) {
-        if (line.kind() == Block.LineKind.HEADING) {
-            return new View.GridRow(
-                    "between", List.of(new View.GridCell("", 4, List.of(View.Text.plain("", line.description())))));
-        }
         Cell cell = cell(line);
         return new View.GridRow(
-                line.kind() == Block.LineKind.QUANTITY ? "" : "limit",
+                "",
                 List.of(
                         cell("", line.code()),
                         new View.GridCell("", 1, quantity(line, cell)),
@@ -79,20 +84,19 @@ final class WorkedGrid {
         }
         Inline inSymbols = TypesetReading.inSymbols(formula);
         Inline inNumbers = numbers.of(cell, formula);
-        texts.add(View.Text.of("equation", equation(line.symbol(), inSymbols)));
+        List<Piece> left = line.symbol().isEmpty() ? List.of() : SymbolPrint.pieces(line.symbol());
+        String equals = left.isEmpty() ? "" : "\u00a0= ";
+        texts.add(View.Text.of("equation", equation(left, equals, inSymbols)));
         if (!inNumbers.plain().equals(inSymbols.plain())) {
-            texts.add(View.Text.of("numbers", equation("", inNumbers)));
+            String again = line.kind() == Block.LineKind.LIMIT_VERDICT ? "" : "= ";
+            texts.add(View.Text.of("numbers", equation(List.of(), again, inNumbers)));
         }
         return texts;
     }
 
-    private static List<Piece> equation(String symbol, Inline right) {
-        List<Piece> pieces = new ArrayList<>();
-        if (!symbol.isEmpty()) {
-            pieces.addAll(SymbolPrint.pieces(symbol));
-            pieces.add(Piece.plain(" "));
-        }
-        pieces.add(Piece.plain("=\u00a0"));
+    private static List<Piece> equation(List<Piece> left, String equals, Inline right) {
+        List<Piece> pieces = new ArrayList<>(left);
+        pieces.add(Piece.plain(equals));
         pieces.addAll(right.pieces());
         return pieces;
     }
