@@ -1,0 +1,105 @@
+package nappe.deliver.pdf;
+
+import java.util.ArrayList;
+import java.util.List;
+import nappe.calculation.Block;
+import nappe.calculation.Place;
+import nappe.calculation.Sheet;
+import nappe.results.Results;
+
+/** The sheets of a package as the template prints them. */
+final class Leaves {
+    /** A note with these words, on the sheet named Cover, stands for a clear square. */
+    private static final String SEAL_SPACE = "(space for a seal)";
+
+    private static final String COVER = "Cover";
+
+    private final Results results;
+    private final PageSize page;
+
+    Leaves(Results results, PageSize page) {
+        this.results = results;
+        this.page = page;
+    }
+
+    List<View.Leaf> leaves() {
+        return results.sheets().stream().map(this::leaf).toList();
+    }
+
+    private View.Leaf leaf(Sheet sheet) {
+        Links links = new Links(results.sheets(), sheet.name());
+        boolean wide = sheet.blocks().stream()
+                .anyMatch(block -> block instanceof Block.Table table
+                        && new TableGrid(results, links, table).isWide(page));
+        double width = wide ? page.wide() : page.upright();
+        List<View.Part> parts = new ArrayList<>();
+        List<Block.Heading> headings = new ArrayList<>();
+        for (Block block : sheet.blocks()) {
+            if (block instanceof Block.Heading heading) {
+                headings.add(heading);
+            } else {
+                parts.addAll(parts(sheet, links, block, headings, width));
+                headings.clear();
+            }
+        }
+        parts.addAll(under(headings, List.of()));
+        String style = (wide ? "landscape" : "portrait") + (sheet.name().equals(COVER) ? " cover" : "");
+        return new View.Leaf(Links.id(sheet.number()), sheet.number(), XmlText.safe(sheet.title()), style, parts);
+    }
+
+    private List<View.Part> parts(
+            Sheet sheet, Links links, Block block, List<Block.Heading> headings, double width) {
+        List<View.Text> titles = headings.stream()
+                .map(heading -> View.Text.plain("heading", heading.text()))
+                .toList();
+        if (block instanceof Block.Table table) {
+            return List.of(new TableGrid(results, links, table).grid(titles, width));
+        } else if (block instanceof Block.Lines lines) {
+            List<View.Part> grids = new ArrayList<>();
+            grids.add(new WorkedGrid(results, links, lines).grid(titles, width));
+            grids.addAll(new CasesGrids(results, lines).grids(width));
+            return grids;
+        } else if (block instanceof Block.WorkbookOnly elsewhere) {
+            return under(headings, List.of(elsewhere(sheet, elsewhere.table())));
+        } else if (block instanceof Block.Note note) {
+            return under(headings, note(sheet, note));
+        }
+        throw new IllegalArgumentException("unknown block " + block);
+    }
+
+    /** Headings and what follows them, held on one page. */
+    private static List<View.Part> under(List<Block.Heading> headings, List<? extends View.Part> parts) {
+        if (headings.isEmpty()) {
+            return List.copyOf(parts);
+        }
+        List<View.Part> together = new ArrayList<>();
+        headings.forEach(heading ->
+                together.add(new View.Paragraph("heading", View.Text.plain("", heading.text()))));
+        together.addAll(parts);
+        return List.of(new View.Together(together));
+    }
+
+    private static List<View.Part> note(Sheet sheet, Block.Note note) {
+        if (sheet.name().equals(COVER) && note.text().equals(SEAL_SPACE)) {
+            return List.of(new View.SealSpace());
+        }
+        List<View.Part> paragraphs = new ArrayList<>();
+        for (String line : note.text().split("\n")) {
+            paragraphs.add(new View.Paragraph(note.caution() ? "warn" : "note", View.Text.plain("", line)));
+        }
+        return paragraphs;
+    }
+
+    private static View.Paragraph elsewhere(Sheet sheet, Block.Table table) {
+        int last = table.row() + 1 + table.rows().size();
+        String range = new Place(sheet.name(), table.row(), 0).address() + ":"
+                + new Place(sheet.name(), last, table.columns().size() - 1).address();
+        String title = table.title().isEmpty() ? "Rows" : table.title();
+        return new View.Paragraph(
+                "elsewhere",
+                View.Text.plain(
+                        "",
+                        title + ": " + table.rows().size() + " rows stand in the workbook only, sheet " + sheet.name()
+                                + ", cells " + range + "."));
+    }
+}

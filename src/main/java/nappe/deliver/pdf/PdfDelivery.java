@@ -1,0 +1,30 @@
+package nappe.deliver.pdf;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import nappe.results.Results;
+
+/**
+ * The PDF of a package.
+ *
+ * @param bytes the file; the same for the same results, on any machine with the same libraries
+ * @param warnings what a reader of the PDF would miss, one line each
+ */
+public record PdfDelivery(byte[] bytes, List<String> warnings) {
+    /** Prints the results: every sheet on pages of its own, no number that is not in the results. */
+    public static PdfDelivery render(Results results) {
+        PageSize page = PageSize.of(results.furniture().letterPaper());
+        Furnishing furnishing = Furnishing.of(results.furniture(), page);
+        String title = furnishing.number() + " " + furnishing.subject() + ", revision " + furnishing.revision();
+        String xhtml = Xhtml.fill(Map.of(
+                "title", title,
+                "furnishing", furnishing,
+                "pageRule", page.rules(furnishing.footHeight(page)),
+                "leaves", new Leaves(results, page).leaves()));
+        PdfDelivery written = PdfWriting.write(xhtml, results.furniture());
+        List<String> warnings = new ArrayList<>(furnishing.warnings(results.furniture()));
+        warnings.addAll(written.warnings());
+        return new PdfDelivery(written.bytes(), List.copyOf(warnings));
+    }
+}

@@ -1,0 +1,91 @@
+package nappe.deliver.pdf;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+import nappe.unit.Unit;
+import nappe.unit.UnitException;
+
+/** Sets a unit as written ({@code ft3/s}, {@code m^(1/3)/s}) with its exponents raised. */
+final class UnitPrint {
+    private static final String RAISED = "⁰¹²³⁴⁵⁶⁷⁸⁹";
+    private static final Pattern EXPONENT = Pattern.compile("(?<=[A-Za-z])\\^?(-?\\d)(?![\\dA-Za-z(])");
+    private static final Pattern FRACTION = Pattern.compile("\\^\\((-?\\d+/\\d+)\\)");
+
+    private static final Pattern IN_BRACKETS = Pattern.compile("\\(([^()\\s]+)\\)$");
+
+    private UnitPrint() {}
+
+    /** The pieces of a unit; none for the unit of pure numbers. */
+    static List<Piece> pieces(String unit) {
+        List<Piece> pieces = new ArrayList<>();
+        if (unit.equals("1")) {
+            return pieces;
+        }
+        Matcher fraction = FRACTION.matcher(unit);
+        int from = 0;
+        while (fraction.find()) {
+            pieces.add(Piece.whole(wholeExponents(unit.substring(from, fraction.start()))));
+            pieces.add(Piece.whole(fraction.group(1)).raised());
+            from = fraction.end();
+        }
+        if (from < unit.length()) {
+            pieces.add(Piece.whole(wholeExponents(unit.substring(from))));
+        }
+        return pieces;
+    }
+
+    /** The pieces of a unit that stands by itself: pure numbers have the unit 1. */
+    static List<Piece> named(String unit) {
+        return unit.equals("1") ? List.of(Piece.whole("1")) : pieces(unit);
+    }
+
+    /** The head of a column; a unit in brackets at its end is set as one. */
+    static View.Text head(String head) {
+        Matcher unit = IN_BRACKETS.matcher(head);
+        if (!unit.find() || !isUnit(unit.group(1))) {
+            return View.Text.plain("", head);
+        }
+        List<Piece> pieces = new ArrayList<>();
+        pieces.add(Piece.plain(head.substring(0, unit.start())));
+        List<Piece> named = named(unit.group(1));
+        for (int i = 0; i < named.size(); i++) {
+            String open = i == 0 ? "(" : "";
+            String close = i == named.size() - 1 ? ")" : "";
+            Piece piece = named.get(i);
+            pieces.add(new Piece(open + piece.text() + close, piece.face(), piece.shift()));
+        }
+        return View.Text.of("", pieces);
+    }
+
+    private static boolean isUnit(String text) {
+        try {
+            Unit.parse(text);
+            return true;
+        } catch (UnitException e) {
+            return false;
+        }
+    }
+
+    /** The pieces of a number with its unit, a fixed space between; never broken over two lines. */
+    static List<Piece> after(String number, String unit) {
+        List<Piece> pieces = new ArrayList<>(pieces(unit));
+        if (pieces.isEmpty()) {
+            pieces.add(Piece.whole(number));
+        } else {
+            Piece first = pieces.get(0);
+            pieces.set(0, Piece.whole(number + "\u00a0" + first.text()));
+        }
+        return pieces;
+    }
+
+    /** Whole exponents as raised digits, so that they stay in the text when it is copied. */
+    private static String wholeExponents(String unit) {
+        return EXPONENT.matcher(unit).replaceAll(found -> {
+            String digits = found.group(1);
+            String sign = digits.startsWith("-") ? "⁻" : "";
+            return sign + RAISED.charAt(digits.charAt(digits.length() - 1) - '0');
+        });
+    }
+}

@@ -1,0 +1,120 @@
+package nappe.deliver.pdf;
+
+import java.util.List;
+
+/** What the template prints: sheets of paragraphs and grids, all numbers already in words. Public for the template. */
+public final class View {
+    private View() {}
+
+    /**
+     * One sheet.
+     *
+     * @param id target of links to it
+     * @param style class names for the style sheet
+     */
+    public record Leaf(String id, int number, String title, String style, List<Part> parts) {}
+
+    /** A part of a sheet, by kind. */
+    public sealed interface Part {
+        /** The name of the template's fragment that prints it. */
+        String kind();
+    }
+
+    /** One paragraph. */
+    public record Paragraph(String style, Text text) implements Part {
+        @Override
+        public String kind() {
+            return "paragraph";
+        }
+    }
+
+    /** Parts that stay on one page. */
+    public record Together(List<Part> parts) implements Part {
+        @Override
+        public String kind() {
+            return "together";
+        }
+    }
+
+    /** A clear square for a seal; nothing is ever drawn in it. */
+    public record SealSpace() implements Part {
+        @Override
+        public String kind() {
+            return "seal";
+        }
+    }
+
+    /**
+     * A table. Its head repeats on every page.
+     *
+     * @param widths of the columns, in mm
+     * @param titles rows over the full width above the head, repeated with it
+     * @param head rows of the head
+     */
+    public record Grid(
+            String style, List<Double> widths, List<Text> titles, List<GridRow> head, List<GridRow> body)
+            implements Part {
+        @Override
+        public String kind() {
+            return "grid";
+        }
+
+        /** The width of the whole, for the style sheet. */
+        public String width() {
+            return mm(widths.stream().mapToDouble(w -> w).sum());
+        }
+
+        /** The width of each column, for the style sheet. */
+        public List<String> columns() {
+            return widths.stream().map(Grid::mm).toList();
+        }
+
+        private static String mm(double width) {
+            return "width: " + Math.round(width * 100) / 100.0 + "mm";
+        }
+    }
+
+    /** One row of a grid. */
+    public record GridRow(String style, List<GridCell> cells) {}
+
+    /** One cell of a grid, with its lines of text. */
+    public record GridCell(String style, int span, List<Text> texts) {
+        static GridCell of(String style, Text... texts) {
+            return new GridCell(style, 1, List.of(texts));
+        }
+    }
+
+    /**
+     * Pieces that follow one another.
+     *
+     * @param whole whether they are one word of several pieces, never broken over two lines
+     */
+    public record Word(boolean whole, List<Piece> pieces) {}
+
+    /**
+     * Characters that are set as one line or paragraph.
+     *
+     * @param target id of what it links to, with the hash; empty for none
+     */
+    public record Text(String style, List<Piece> pieces, String target) {
+        static Text of(String style, List<Piece> pieces) {
+            return new Text(style, List.copyOf(pieces), "");
+        }
+
+        static Text plain(String style, String text) {
+            return of(style, List.of(Piece.plain(text)));
+        }
+
+        /** The same, gathered into words. */
+        public List<Word> words() {
+            return Words.of(pieces);
+        }
+
+        /** All characters in a row, for measuring. */
+        String characters() {
+            StringBuilder all = new StringBuilder();
+            pieces.forEach(piece -> all.append(piece.text()));
+            return all.toString();
+        }
+    }
+}

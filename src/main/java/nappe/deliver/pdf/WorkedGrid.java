@@ -1,0 +1,138 @@
+package nappe.deliver.pdf;
+
+import java.util.ArrayList;
+import java.util.List;
+import nappe.calculation.Block;
+import nappe.calculation.Cell;
+import nappe.formula.Formula;
+import nappe.results.Results;
+import org.jspecify.annotations.Nullable;
+
+/** One case worked in full: each line with its equation in symbols, with numbers, its result, source and cell. */
+final class WorkedGrid {
+    private static final double CODE = 15;
+    private static final double RESULT = 33;
+    private static final double SOURCE = 40;
+
+    private final Results results;
+    private final Links links;
+    private final Block.Lines lines;
+    private final SubstitutedReading numbers;
+
+    WorkedGrid(Results results, Links links, Block.Lines lines) {
+        this.results = results;
+        this.links = links;
+        this.lines = lines;
+        this.numbers = new SubstitutedReading(results);
+    }
+
+    View.Grid grid(List<View.Text> headings, double width) {
+        List<View.Text> titles = new ArrayList<>(headings);
+        if (!lines.caseNames().isEmpty()) {
+            titles.add(View.Text.plain(
+                    "tabletitle", "Worked in full for case " + lines.caseNames().get(lines.workedCase())));
+        }
+        View.GridRow head = new View.GridRow(
+                "",
+                List.of(
+                        cell("", "Line"),
+                        cell("", "Quantity, equation, the same with numbers"),
+                        cell("right", "Result"),
+                        cell("", "Source; workbook cell")));
+        List<View.GridRow> body = new ArrayList<>();
+        Between between = new Between(width);
+        for (Block.Line line : lines.lines()) {
+            if (line.kind() == Block.LineKind.HEADING) {
+                between.heading(line.description());
+            } else {
+                body.add(between.above(row(line)));
+            }
+        }
+        body.addAll(between.rest(4));
+        List<Double> widths = List.of(CODE, width - CODE - RESULT - SOURCE, RESULT, SOURCE);
+        return new View.Grid("worked", widths, titles, List.of(head), body);
+    }
+
+    private static View.GridCell cell(String style, String text) {
+        return View.GridCell.of(style, View.Text.plain("", text));
+    }
+
+    private View.GridRow row(Block.Line line) {
+        Cell cell = cell(line);
+        return new View.GridRow(
+                "",
+                List.of(
+                        cell("", line.code()),
+                        new View.GridCell("", 1, quantity(line, cell)),
+                        new View.GridCell("right low", 1, cell == null ? List.of() : List.of(result(line, cell))),
+                        new View.GridCell("", 1, source(line, cell))));
+    }
+
+    private @Nullable Cell cell(Block.Line line) {
+        if (line.forAll() != null || line.perCase().isEmpty()) {
+            return line.forAll();
+        }
+        return line.perCase().get(lines.workedCase());
+    }
+
+    private List<View.Text> quantity(Block.Line line, @Nullable Cell cell) {
+        List<View.Text> texts = new ArrayList<>();
+        texts.add(View.Text.plain("", line.description()));
+        Formula formula = cell == null ? null : cell.formula();
+        if (cell == null || formula == null) {
+            return texts;
+        }
+        Inline inSymbols = TypesetReading.inSymbols(formula);
+        Inline inNumbers = numbers.of(cell, formula);
+        List<Piece> left = line.symbol().isEmpty() ? List.of() : SymbolPrint.pieces(line.symbol());
+        String equals = left.isEmpty() ? "" : "\u00a0= ";
+        texts.add(View.Text.of("equation", equation(left, equals, inSymbols)));
+        if (!inNumbers.plain().equals(inSymbols.plain())) {
+            String again = line.kind() == Block.LineKind.LIMIT_VERDICT ? "" : "= ";
+            texts.add(View.Text.of("numbers", equation(List.of(), again, inNumbers)));
+        }
+        return texts;
+    }
+
+    private static List<Piece> equation(List<Piece> left, String equals, Inline right) {
+        List<Piece> pieces = new ArrayList<>(left);
+        pieces.add(Piece.plain(equals));
+        pieces.addAll(right.pieces());
+        return pieces;
+    }
+
+    private View.Text result(Block.Line line, Cell cell) {
+        List<Piece> pieces = new ArrayList<>();
+        if (!line.symbol().isEmpty()) {
+            pieces.addAll(SymbolPrint.pieces(line.symbol()));
+            pieces.add(Piece.plain("\u00a0"));
+        }
+        if (Printed.isNumber(results, cell) || !line.symbol().isEmpty()) {
+            pieces.add(Piece.plain("= "));
+        }
+        pieces.addAll(Printed.withUnit(results, cell));
+        return View.Text.of("result", pieces);
+    }
+
+    private List<View.Text> source(Block.Line line, @Nullable Cell cell) {
+        List<View.Text> texts = new ArrayList<>();
+        if (!line.source().isEmpty()) {
+            texts.add(View.Text.plain("small", line.source()));
+        }
+        if (cell != null) {
+            String kind =
+                    switch (cell.kind()) {
+                        case ENTRY -> "entry, ";
+                        case CONSTANT -> "constant, ";
+                        case TABLE -> "from a table, ";
+                        case FORMULA -> "";
+                    };
+            String all = line.forAll() != null && lines.caseNames().size() > 1 ? ", all cases" : "";
+            texts.add(new View.Text(
+                    "small",
+                    List.of(Piece.plain(kind + "cell "), Piece.whole(links.address(cell)), Piece.plain(all)),
+                    links.to(cell)));
+        }
+        return texts;
+    }
+}
