@@ -22,7 +22,7 @@ final class Blank {
     private static final int CASE_ROWS = 24;
     private static final String REQUIRED = "required";
     private static final String OPTIONAL = "optional";
-    private static final String FRAMES = "Write only into the cells with a thick frame. ";
+    private static final String FRAMES = "Write only into the cells with a frame. ";
 
     private final XSSFWorkbook workbook;
     private final WorkingSystem system;

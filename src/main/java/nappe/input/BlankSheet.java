@@ -175,7 +175,7 @@ final class BlankSheet {
     private double height(List<String> texts) {
         int lines = 1;
         for (int i = 0; i < texts.size(); i++) {
-            int width = Math.max(4, widths[Math.min(i, widths.length - 1)] - 3);
+            int width = Math.max(4, widths[Math.min(i, widths.length - 1)] - 1);
             lines = Math.max(lines, (texts.get(i).length() + width - 1) / width);
         }
         return lines * POINTS_PER_LINE + 2;

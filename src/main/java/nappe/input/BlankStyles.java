@@ -8,7 +8,7 @@ import org.apache.poi.xssf.usermodel.XSSFCellStyle;
 import org.apache.poi.xssf.usermodel.XSSFFont;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
-/** The cell styles of a blank. Where to type is told by a thick frame, not by a colour. */
+/** The cell styles of a blank. Where to type is told by a frame, not by a colour; other cells have none. */
 final class BlankStyles {
     private static final String FONT = "Arial";
 
@@ -27,17 +27,17 @@ final class BlankStyles {
         plain.setFontHeightInPoints((short) 10);
         title = style(workbook, font(workbook, 14, true));
         line = style(workbook, plain);
-        head = framed(workbook, font(workbook, 10, true), BorderStyle.THIN);
+        head = wrapped(workbook, font(workbook, 10, true));
         head.setBorderBottom(BorderStyle.MEDIUM);
         XSSFFont slanted = font(workbook, 9, false);
         slanted.setItalic(true);
         mark = style(workbook, slanted);
-        label = framed(workbook, plain, BorderStyle.THIN);
-        textEntry = framed(workbook, plain, BorderStyle.MEDIUM);
-        textEntry.setLocked(false);
+        label = wrapped(workbook, plain);
+        label.setBorderBottom(BorderStyle.HAIR);
+        textEntry = entry(workbook, plain);
+        textEntry.setAlignment(HorizontalAlignment.LEFT);
         textEntry.setDataFormat(workbook.createDataFormat().getFormat("@"));
-        numberEntry = framed(workbook, plain, BorderStyle.MEDIUM);
-        numberEntry.setLocked(false);
+        numberEntry = entry(workbook, plain);
         numberEntry.setAlignment(HorizontalAlignment.RIGHT);
     }
 
@@ -56,13 +56,20 @@ final class BlankStyles {
         return style;
     }
 
-    private static XSSFCellStyle framed(XSSFWorkbook workbook, XSSFFont font, BorderStyle border) {
+    private static XSSFCellStyle wrapped(XSSFWorkbook workbook, XSSFFont font) {
         XSSFCellStyle style = style(workbook, font);
         style.setWrapText(true);
-        style.setBorderTop(border);
-        style.setBorderBottom(border);
-        style.setBorderLeft(border);
-        style.setBorderRight(border);
+        return style;
+    }
+
+    private static XSSFCellStyle entry(XSSFWorkbook workbook, XSSFFont font) {
+        XSSFCellStyle style = wrapped(workbook, font);
+        style.setLocked(false);
+        style.setIndention((short) 1);
+        style.setBorderTop(BorderStyle.MEDIUM);
+        style.setBorderBottom(BorderStyle.MEDIUM);
+        style.setBorderLeft(BorderStyle.MEDIUM);
+        style.setBorderRight(BorderStyle.MEDIUM);
         return style;
     }
 }

@@ -1,0 +1,69 @@
+package nappe.input;
+
+import java.io.ByteArrayInputStream;
+import java.io.ByteArrayOutputStream;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.function.UnaryOperator;
+import java.util.zip.ZipEntry;
+import java.util.zip.ZipInputStream;
+import java.util.zip.ZipOutputStream;
+
+/** A workbook taken apart, to be put together with something wrong in it. */
+final class Zips {
+    private final Map<String, byte[]> parts = new LinkedHashMap<>();
+
+    static Zips of(byte[] zip) throws IOException {
+        Zips zips = new Zips();
+        try (ZipInputStream in = new ZipInputStream(new ByteArrayInputStream(zip))) {
+            for (ZipEntry entry = in.getNextEntry(); entry != null; entry = in.getNextEntry()) {
+                zips.parts.put(entry.getName(), in.readAllBytes());
+            }
+        }
+        return zips;
+    }
+
+    /** The parts of a sound workbook. The sheet Flows is its second sheet. */
+    static Zips sound() throws IOException {
+        return of(Samples.filled().bytes());
+    }
+
+    Zips with(String name, String text) {
+        parts.put(name, text.getBytes(StandardCharsets.UTF_8));
+        return this;
+    }
+
+    Zips without(String name) {
+        parts.remove(name);
+        return this;
+    }
+
+    Zips change(String name, UnaryOperator<String> change) {
+        String before = new String(parts.get(name), StandardCharsets.UTF_8);
+        String after = change.apply(before);
+        if (after.equals(before)) {
+            throw new IllegalStateException("nothing was changed in " + name + ": " + before);
+        }
+        return with(name, after);
+    }
+
+    byte[] bytes() throws IOException {
+        ByteArrayOutputStream bytes = new ByteArrayOutputStream();
+        try (ZipOutputStream out = new ZipOutputStream(bytes)) {
+            for (Map.Entry<String, byte[]> part : parts.entrySet()) {
+                out.putNextEntry(new ZipEntry(part.getKey()));
+                out.write(part.getValue());
+                out.closeEntry();
+            }
+        }
+        return bytes.toByteArray();
+    }
+
+    Path save(Path file) throws IOException {
+        return Files.write(file, bytes());
+    }
+}
