@@ -61,7 +61,7 @@ final class IssueCommand implements Callable<Integer> {
         Results results = done.results();
         Furniture furniture = results.furniture();
         Map<String, byte[]> files = new LinkedHashMap<>();
-        PdfDelivery.Rendered pdf = PdfDelivery.render(results);
+        PdfDelivery pdf = PdfDelivery.render(results);
         pdf.warnings().forEach(warning -> spec.commandLine().getErr().println("nappe: " + warning));
         files.put(name + ".pdf", pdf.bytes());
         files.put(name + ".xlsx", XlsxDelivery.render(results));

@@ -59,7 +59,8 @@ final class EntriesSheet {
     }
 
     static String title(Design.Element element, MethodSheet method) {
-        return element.title().isEmpty() ? method.title() : element.title() + ": " + method.title();
+        boolean own = !element.title().isEmpty() && !element.title().equals(method.title());
+        return own ? element.title() + ": " + method.title() : method.title();
     }
 
     private void entry(TableDraft table, Item.Given given, Design.Element element, Scope scope) {
