@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import nappe.formula.Formula;
 import nappe.formula.Guard;
+import nappe.formula.Renaming;
 import nappe.formula.Sign;
 import nappe.formula.SignReading;
 import nappe.formula.SymbolsReading;
@@ -80,15 +81,21 @@ public final class Cells {
             Place place,
             String symbol,
             Unit unit,
-            Formula formula,
+            Formula written,
             Scope scope,
             @Nullable Sign knownSign,
             boolean mayBeBlank) {
+        Formula formula = Renaming.ofQuantities(written, this::withPlainZero);
         Map<String, Reference> references = references(formula, scope);
         SignReading.Finding finding = SignReading.of(formula, name -> sign(references, name));
         Sureness sureness = sureness(formula, references, finding.safe(), mayBeBlank);
         Cell cell = Cell.live(place, symbol, unit, formula, references, sureness);
         return keep(cell, knownSign == null ? finding.sign() : knownSign);
+    }
+
+    /** Nought is nought in every unit: it is written in the working unit, and needs no factor. */
+    private Formula.Quantity withPlainZero(Formula.Quantity quantity) {
+        return quantity.value() == 0 ? new Formula.Quantity(0, "0", unit(quantity.unit().dimension())) : quantity;
     }
 
     private Cell keep(Cell cell, Sign sign) {

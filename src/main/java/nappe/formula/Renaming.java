@@ -2,16 +2,22 @@ package nappe.formula;
 
 import java.util.function.UnaryOperator;
 
-/** The same formula with other names for its symbols. */
+/** The same formula with other names for its symbols, or other quantities. */
 public final class Renaming implements Reading<Formula> {
     private final UnaryOperator<String> name;
+    private final UnaryOperator<Formula.Quantity> quantity;
 
-    private Renaming(UnaryOperator<String> name) {
+    private Renaming(UnaryOperator<String> name, UnaryOperator<Formula.Quantity> quantity) {
         this.name = name;
+        this.quantity = quantity;
     }
 
     public static Formula of(Formula formula, UnaryOperator<String> name) {
-        return formula.read(new Renaming(name));
+        return formula.read(new Renaming(name, quantity -> quantity));
+    }
+
+    public static Formula ofQuantities(Formula formula, UnaryOperator<Formula.Quantity> quantity) {
+        return formula.read(new Renaming(name -> name, quantity));
     }
 
     @Override
@@ -20,8 +26,8 @@ public final class Renaming implements Reading<Formula> {
     }
 
     @Override
-    public Formula quantity(Formula.Quantity quantity) {
-        return quantity;
+    public Formula quantity(Formula.Quantity written) {
+        return quantity.apply(written);
     }
 
     @Override

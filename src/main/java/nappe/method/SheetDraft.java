@@ -52,6 +52,13 @@ final class SheetDraft {
         return outcomes.containsKey(symbol);
     }
 
+    /** Whether a symbol is typed once per case or comes from a neighbour. */
+    boolean isTypedPerCase(String symbol) {
+        return items.stream().anyMatch(item -> item instanceof Item.Given given
+                && given.symbol().equals(symbol)
+                && (given.from() == Item.From.CASE || given.from() == Item.From.NEIGHBOUR));
+    }
+
     void markBroken(String symbol) {
         broken.add(symbol);
     }

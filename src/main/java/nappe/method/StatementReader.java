@@ -328,9 +328,16 @@ final class StatementReader {
             draft.limits.add(new Limit(chain.get(0), chain.get(1), false, scale, when, label + ", lower end", source));
             draft.limits.add(new Limit(chain.get(1), chain.get(2), true, scale, when, label + ", upper end", source));
         } else {
-            boolean valueIsLesser = !isBound(chain.get(0));
+            boolean valueIsLesser = varies(chain.get(0)) || !varies(chain.get(1)) && !isBound(chain.get(0));
             draft.limits.add(new Limit(chain.get(0), chain.get(1), valueIsLesser, scale, when, label, source));
         }
+    }
+
+    /** Whether a side rests on a case: then it is what is judged. */
+    private boolean varies(Formula side) {
+        return SymbolsReading.of(side).stream()
+                .flatMap(symbol -> draft.reach.getOrDefault(symbol, Set.of()).stream())
+                .anyMatch(draft::isTypedPerCase);
     }
 
     /** Whether a side is what a result is judged by, not the result: a plain quantity. */

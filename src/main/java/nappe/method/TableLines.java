@@ -7,6 +7,7 @@ import nappe.formula.FormulaException;
 import nappe.formula.Function;
 import nappe.formula.Operator;
 import nappe.formula.Sign;
+import nappe.formula.Value;
 import nappe.source.CitedTable;
 import nappe.unit.Dimension;
 import nappe.unit.Unit;
@@ -71,10 +72,19 @@ final class TableLines {
         line(step, minus(next, below), "step of the table there", Sign.POSITIVE);
         line(share(table), new Formula.Operation(Operator.OVER, minus(symbol(inside), below), symbol(step)),
                 "share of the way to the next row", Sign.ANY);
-        draft.limits.add(new Limit(start, keyNumber, false, null, null,
+        Formula span = span(first);
+        draft.limits.add(new Limit(start, keyNumber, false, span, null,
                 key + " is inside the table " + table.name() + ", lower end", source));
-        draft.limits.add(new Limit(keyNumber, last, true, null, null,
+        draft.limits.add(new Limit(keyNumber, last, true, span, null,
                 key + " is inside the table " + table.name() + ", upper end", source));
+    }
+
+    /** What the margin to an end of the table is measured by: from its first row to its last. */
+    private static Formula span(CitedTable.Column first) {
+        double from = ((Value.Number) first.values().get(0)).value();
+        double to = ((Value.Number) first.values().get(first.values().size() - 1)).value();
+        String text = java.math.BigDecimal.valueOf(to).subtract(java.math.BigDecimal.valueOf(from)).toPlainString();
+        return new Formula.Numeral(Double.parseDouble(text), text);
     }
 
     /** Adds the line of one column of the table that was opened last. */

@@ -6,7 +6,8 @@ import nappe.unit.Dimension;
 import nappe.unit.Unit;
 
 /**
- * How many digits are printed: lengths and levels to 0.001 ft or 0.1 mm, all else to four figures. Verdicts are made
+ * How many digits are printed: lengths and levels to 0.001 ft or 0.1 mm, pure numbers that are whole without decimals,
+ * all else to four figures. Verdicts are made
  * with full precision; only print is rounded.
  */
 public final class Digits {
@@ -25,7 +26,8 @@ public final class Digits {
                 default -> figures(value, FIGURES);
             };
         }
-        return figures(value, FIGURES);
+        boolean whole = unit.dimension().isNone() && value == Math.rint(value) && Math.abs(value) < 1e6;
+        return whole ? 0 : figures(value, FIGURES);
     }
 
     /** The decimals that show so many figures of a value, at most 9. */

@@ -108,13 +108,11 @@ final class FrontSheets {
 
     void index(SheetDraft sheet, List<SheetDraft> all, List<String> contents) {
         TableDraft table = sheet.table("Sheets", List.of(
-                new Block.Column("Sheet", 8, Block.Align.RIGHT),
-                new Block.Column("Title", 50, Block.Align.LEFT),
-                new Block.Column("What it holds", 70, Block.Align.LEFT)));
+                new Block.Column("Sheet", 50, Block.Align.LEFT),
+                new Block.Column("What it holds", 80, Block.Align.LEFT)));
         for (int i = 0; i < all.size(); i++) {
             SheetDraft one = all.get(i);
             table.add(List.of(
-                    new Block.Text(Integer.toString(i + 1)),
                     new Block.SheetLink(i + 1, one.name(), one.title()),
                     new Block.Text(contents.get(i))));
         }
@@ -131,22 +129,19 @@ final class FrontSheets {
             sheet.note("none");
         } else {
             TableDraft revisions = sheet.table("", List.of(
-                    new Block.Column("Revision", 8, Block.Align.RIGHT),
-                    new Block.Column("Date", 50, Block.Align.LEFT),
-                    new Block.Column("What changed", 70, Block.Align.LEFT)));
+                    new Block.Column("Revision and date", 50, Block.Align.LEFT),
+                    new Block.Column("What changed", 80, Block.Align.LEFT)));
             design.revisions().forEach(r -> revisions.add(
-                    List.of(new Block.Text(r.revision()), new Block.Text(r.date()), new Block.Text(r.what()))));
+                    List.of(new Block.Text(r.revision() + ", " + r.date()), new Block.Text(r.what()))));
         }
     }
 
     private void requirements(SheetDraft sheet, List<SheetDraft> all) {
         TableDraft table = sheet.table("", List.of(
-                new Block.Column("No.", 8, Block.Align.RIGHT),
                 new Block.Column("Answered on", 50, Block.Align.LEFT),
-                new Block.Column("Requirement and its citation", 70, Block.Align.LEFT)));
-        int number = 1;
+                new Block.Column("Requirement and its citation", 80, Block.Align.LEFT)));
         for (Design.Requirement requirement : design.requirements()) {
-            List<Block.Item> row = new ArrayList<>(List.of(new Block.Text(Integer.toString(number++))));
+            List<Block.Item> row = new ArrayList<>();
             row.add(answer(requirement.answer(), all));
             row.add(new Block.Text(requirement.text()
                     + (requirement.citation().isEmpty() ? "" : " (" + requirement.citation() + ")")));

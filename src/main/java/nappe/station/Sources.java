@@ -20,6 +20,8 @@ import nappe.unit.Unit;
 
 /** Lays the constants and the cited tables that the methods of a station use; each once. */
 final class Sources {
+    private static final int LONG_WORDS = 20;
+
     private final Cells cells;
     private final SheetDraft constants;
     private final SheetDraft tables;
@@ -83,46 +85,71 @@ final class Sources {
         tables.heading(table.title());
         tables.note("Source: " + table.source());
         table.remarks().forEach(tables::note);
-        List<Block.Column> heads = new ArrayList<>();
-        for (CitedTable.Column column : table.columns()) {
-            Unit unit = column.unit();
-            heads.add(new Block.Column(
-                    unit == null || unit.text().equals("1") ? column.symbol() : column.symbol() + " [" + unit + "]",
-                    width(column),
-                    column.isWords() ? Block.Align.LEFT : Block.Align.RIGHT));
+        List<CitedTable.Column> narrow = table.columns().stream().filter(c -> !isRemark(c)).toList();
+        List<CitedTable.Column> remarks = table.columns().stream().filter(Sources::isRemark).toList();
+        Map<String, Run> known = new LinkedHashMap<>();
+        lay(table, narrow, "", known);
+        if (!remarks.isEmpty()) {
+            lay(table, remarks, "Standing of the numbers, row by row", known);
         }
-        TableDraft draft = tables.table("", heads);
-        List<List<Cell>> columns = new ArrayList<>();
-        table.columns().forEach(column -> columns.add(new ArrayList<>()));
+        return known;
+    }
+
+    /** A column of long words stands in a table of its own, with the key repeated, so that both stay readable. */
+    private static boolean isRemark(CitedTable.Column column) {
+        return column.isWords() && longest(column) > LONG_WORDS;
+    }
+
+    private void lay(CitedTable table, List<CitedTable.Column> columns, String title, Map<String, Run> known) {
+        CitedTable.Column key = table.columns().get(0);
+        boolean repeatsKey = !columns.contains(key);
+        List<Block.Column> heads = new ArrayList<>();
+        if (repeatsKey) {
+            heads.add(head(key));
+        }
+        columns.forEach(column -> heads.add(head(column)));
+        TableDraft draft = tables.table(title, heads);
+        List<List<Cell>> cellsOf = new ArrayList<>();
+        columns.forEach(column -> cellsOf.add(new ArrayList<>()));
         for (int r = 0; r < table.rows(); r++) {
             List<Block.Item> row = new ArrayList<>();
+            if (repeatsKey) {
+                row.add(new Block.Text(key.values().get(r) instanceof Value.Word word ? word.text() : ""));
+            }
             for (int c = 0; c < columns.size(); c++) {
-                CitedTable.Column column = table.columns().get(c);
+                CitedTable.Column column = columns.get(c);
                 Unit unit = column.unit() == null ? Unit.one() : column.unit();
                 Cell cell = cells.typed(
-                        Cell.Kind.TABLE, draft.place(c), "", unit, column.values().get(r), column.sign());
-                columns.get(c).add(cell);
+                        Cell.Kind.TABLE,
+                        draft.place(row.size()),
+                        "",
+                        unit,
+                        column.values().get(r),
+                        column.sign());
+                cellsOf.get(c).add(cell);
                 row.add(new Block.Content(cell));
             }
             draft.add(row);
         }
         tables.gap();
-        Map<String, Run> known = new LinkedHashMap<>();
         for (int c = 0; c < columns.size(); c++) {
-            known.put(table.name() + "." + table.columns().get(c).symbol(), new Run(columns.get(c)));
+            known.put(table.name() + "." + columns.get(c).symbol(), new Run(cellsOf.get(c)));
         }
-        return known;
     }
 
-    private static int width(CitedTable.Column column) {
-        if (!column.isWords()) {
-            return 10;
-        }
-        int longest = column.values().stream()
+    private static Block.Column head(CitedTable.Column column) {
+        Unit unit = column.unit();
+        return new Block.Column(
+                unit == null || unit.text().equals("1") ? column.symbol() : column.symbol() + " [" + unit + "]",
+                column.isWords() ? Math.max(10, Math.min(46, longest(column) + 2)) : 11,
+                column.isWords() ? Block.Align.LEFT : Block.Align.RIGHT);
+    }
+
+    private static int longest(CitedTable.Column column) {
+        return column.values().stream()
                 .mapToInt(value -> value instanceof Value.Word word ? word.text().length() : 8)
                 .max()
                 .orElse(8);
-        return Math.max(8, Math.min(30, longest + 2));
     }
 
     static String unitText(Unit unit) {
