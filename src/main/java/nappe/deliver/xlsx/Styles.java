@@ -61,7 +61,7 @@ final class Styles {
         }
     }
 
-    private record Look(Role role, Align align, String format) {}
+    private record Look(Role role, Align align, String format, boolean wraps) {}
 
     private final XSSFWorkbook workbook;
     private final Map<Look, Integer> made = new HashMap<>();
@@ -74,13 +74,18 @@ final class Styles {
         body.setFontHeightInPoints((short) POINTS);
     }
 
+    /** The index of a style for texts, which are broken into lines. */
     int of(Role role, Align align) {
-        return of(role, align, AS_TYPED);
+        return of(new Look(role, align, AS_TYPED, true));
     }
 
-    /** The index of a style in the workbook. */
+    /** The index of a style for numbers. Where numbers may be broken into lines, LibreOffice forgets the indent. */
     int of(Role role, Align align, String format) {
-        return made.computeIfAbsent(new Look(role, align, format), look -> (int) make(look).getIndex());
+        return of(new Look(role, align, format, false));
+    }
+
+    private int of(Look look) {
+        return made.computeIfAbsent(look, key -> (int) make(key).getIndex());
     }
 
     private XSSFCellStyle make(Look look) {
@@ -91,7 +96,7 @@ final class Styles {
             font.setUnderline(Font.U_SINGLE);
         }
         style.setFont(font);
-        style.setWrapText(true);
+        style.setWrapText(look.wraps);
         style.setVerticalAlignment(VerticalAlignment.TOP);
         style.setAlignment(
                 switch (look.align) {
