@@ -15,8 +15,8 @@ import org.apache.poi.xssf.usermodel.XSSFFont;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /**
- * The cell styles of the package. What was typed by the engineer stands in a dashed box and is not locked; a cited
- * number stands in a full box. Nothing rests on colour.
+ * The cell styles of the package. What was typed by the engineer stands in a box of thick dashes and is not locked; a
+ * cited number stands in a black box, all else in a grey one. Nothing rests on colour. No hatching: Gnumeric makes it black.
  */
 final class Styles {
     /** The type of the body. */
@@ -113,33 +113,29 @@ final class Styles {
         switch (role) {
             case SHEET_TITLE, FURNITURE, HEADING, NOTE, CAUTION, TABLE_TITLE -> {}
             case HEAD -> {
-                box(style, BorderStyle.THIN);
-                fill(style, FillPatternType.SOLID_FOREGROUND, IndexedColors.GREY_25_PERCENT);
+                box(style, BorderStyle.THIN, IndexedColors.BLACK);
+                style.setFillPattern(FillPatternType.SOLID_FOREGROUND);
+                style.setFillForegroundColor(IndexedColors.GREY_25_PERCENT.getIndex());
             }
             case ENTRY -> {
-                box(style, BorderStyle.DASHED);
-                fill(style, FillPatternType.LEAST_DOTS, IndexedColors.BLACK);
+                box(style, BorderStyle.MEDIUM_DASHED, IndexedColors.BLACK);
                 style.setLocked(false);
             }
-            case CONSTANT -> box(style, BorderStyle.THIN);
-            case TEXT, STRONG, LINK, RESULT, VERDICT -> box(style, BorderStyle.HAIR);
+            case CONSTANT -> box(style, BorderStyle.THIN, IndexedColors.BLACK);
+            case TEXT, STRONG, LINK, RESULT, VERDICT -> box(style, BorderStyle.THIN, IndexedColors.GREY_40_PERCENT);
         }
         return style;
     }
 
-    private static void box(XSSFCellStyle style, BorderStyle line) {
+    private static void box(XSSFCellStyle style, BorderStyle line, IndexedColors colour) {
         style.setBorderTop(line);
         style.setBorderBottom(line);
         style.setBorderLeft(line);
         style.setBorderRight(line);
-    }
-
-    private static void fill(XSSFCellStyle style, FillPatternType pattern, IndexedColors colour) {
-        style.setFillPattern(pattern);
-        style.setFillForegroundColor(colour.getIndex());
-        if (pattern != FillPatternType.SOLID_FOREGROUND) {
-            style.setFillBackgroundColor(IndexedColors.WHITE.getIndex());
-        }
+        style.setTopBorderColor(colour.getIndex());
+        style.setBottomBorderColor(colour.getIndex());
+        style.setLeftBorderColor(colour.getIndex());
+        style.setRightBorderColor(colour.getIndex());
     }
 
     static XSSFFont font(XSSFWorkbook workbook, int points, boolean bold) {
