@@ -15,7 +15,7 @@ import org.apache.poi.xssf.usermodel.XSSFFont;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /**
- * The cell styles of the package. What was typed by the engineer stands in a box of thick dashes and is not locked; a
+ * The cell styles of the package. What was typed by the engineer is slanted, stands in a box of thick dashes and is not locked; a
  * cited number stands in a black box, all else in a grey one. Nothing rests on colour. No hatching: Gnumeric makes it black.
  */
 final class Styles {
@@ -92,6 +92,7 @@ final class Styles {
         Role role = look.role;
         XSSFCellStyle style = workbook.createCellStyle();
         XSSFFont font = font(workbook, role.points, role.bold);
+        font.setItalic(role == Role.ENTRY);
         if (role == Role.LINK) {
             font.setUnderline(Font.U_SINGLE);
         }
