@@ -14,7 +14,7 @@ final class Columns {
             new Block.Column("Symbol", 8, Block.Align.LEFT),
             new Block.Column("Equation", 34, Block.Align.LEFT),
             new Block.Column("Unit", 9, Block.Align.LEFT),
-            new Block.Column("Source", 26, Block.Align.LEFT),
+            new Block.Column("Source", 28, Block.Align.LEFT),
             new Block.Column("All cases", 13, Block.Align.RIGHT));
 
     private static final int CASE = 13;

@@ -26,13 +26,13 @@ final class SharedTexts {
         below.setTypeOffset(Font.SS_SUB);
     }
 
-    Content.Shared text(String text) {
-        return new Content.Shared(texts.computeIfAbsent(
+    Filling.Shared text(String text) {
+        return new Filling.Shared(texts.computeIfAbsent(
                 text, key -> table.addSharedStringItem(new XSSFRichTextString(Texts.content(key)))));
     }
 
-    Content.Shared symbol(String symbol) {
-        return new Content.Shared(symbols.computeIfAbsent(symbol, key -> table.addSharedStringItem(rich(key))));
+    Filling.Shared symbol(String symbol) {
+        return new Filling.Shared(symbols.computeIfAbsent(symbol, key -> table.addSharedStringItem(rich(key))));
     }
 
     private XSSFRichTextString rich(String symbol) {

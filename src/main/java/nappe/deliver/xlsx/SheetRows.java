@@ -9,7 +9,7 @@ import nappe.formula.Value;
 final class SheetRows {
     private static final double TALLEST = 409;
 
-    private record Filled(int style, Content content) {}
+    private record Filled(int style, Filling content) {}
 
     private final String sheet;
     private final TreeMap<Integer, TreeMap<Integer, Filled>> rows = new TreeMap<>();
@@ -19,7 +19,7 @@ final class SheetRows {
         this.sheet = sheet;
     }
 
-    void put(int row, int column, int style, Content content) {
+    void put(int row, int column, int style, Filling content) {
         Filled before = rows.computeIfAbsent(row, key -> new TreeMap<>()).put(column, new Filled(style, content));
         if (before != null) {
             throw new IllegalStateException(
@@ -29,7 +29,7 @@ final class SheetRows {
 
     /** A style for a place that nothing else fills. */
     void fill(int row, int column, int style) {
-        rows.computeIfAbsent(row, key -> new TreeMap<>()).putIfAbsent(column, new Filled(style, new Content.Blank()));
+        rows.computeIfAbsent(row, key -> new TreeMap<>()).putIfAbsent(column, new Filled(style, new Filling.Blank()));
     }
 
     /** Makes a row at least so many points high. */
@@ -73,12 +73,12 @@ final class SheetRows {
         return out.append("</sheetData>").toString();
     }
 
-    private static void write(Content content, StringBuilder out) {
-        if (content instanceof Content.Shared shared) {
+    private static void write(Filling content, StringBuilder out) {
+        if (content instanceof Filling.Shared shared) {
             out.append(" t=\"s\"><v>").append(shared.index()).append("</v></c>");
-        } else if (content instanceof Content.Typed typed) {
+        } else if (content instanceof Filling.Typed typed) {
             out.append("><v>").append(number(typed.value())).append("</v></c>");
-        } else if (content instanceof Content.Live live) {
+        } else if (content instanceof Filling.Live live) {
             boolean isNumber = live.value() instanceof Value.Number;
             out.append(isNumber ? "><f>" : " t=\"str\"><f>");
             out.append(Texts.xml(Texts.formula(live.formula()))).append("</f><v>");

@@ -170,7 +170,7 @@ final class SheetWriter {
     private void cell(int row, int column, Cell cell, Align align, Role role) {
         Value value = results.value(cell);
         if (!isHere(cell)) {
-            put(row, column, role, align, cell, new Content.Live(cell.place().from(sheet.name()), value));
+            put(row, column, role, align, cell, new Filling.Live(cell.place().from(sheet.name()), value));
             return;
         }
         Place place = cell.place();
@@ -179,21 +179,23 @@ final class SheetWriter {
         }
         switch (cell.kind()) {
             case FORMULA -> put(place.row(), place.column(), role, align, cell,
-                    new Content.Live(SpreadsheetReading.of(cell), value));
+                    new Filling.Live(SpreadsheetReading.of(cell), value));
             case ENTRY -> put(place.row(), place.column(), Role.ENTRY, align, cell, typed(value));
             case CONSTANT, TABLE -> put(place.row(), place.column(), Role.CONSTANT, align, cell, typed(value));
         }
     }
 
-    private void put(int row, int column, Role role, Align align, Cell cell, Content content) {
+    private void put(int row, int column, Role role, Align align, Cell cell, Filling content) {
         Value value = results.value(cell);
-        rows.put(row, column, styles.of(role, align, format(cell, value)), content);
-        grow(row, role, value instanceof Value.Number ? "" : SheetRows.words(value), columns.width(column));
+        boolean isNumber = value instanceof Value.Number;
+        int style = isNumber ? styles.of(role, align, format(cell, value)) : styles.of(role, align);
+        rows.put(row, column, style, content);
+        grow(row, role, isNumber ? "" : SheetRows.words(value), columns.width(column));
     }
 
-    private Content typed(Value value) {
+    private Filling typed(Value value) {
         return value instanceof Value.Number number
-                ? new Content.Typed(number.value())
+                ? new Filling.Typed(number.value())
                 : texts.text(SheetRows.words(value));
     }
 

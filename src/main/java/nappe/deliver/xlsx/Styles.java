@@ -15,8 +15,8 @@ import org.apache.poi.xssf.usermodel.XSSFFont;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /**
- * The cell styles of the package. What was typed by the engineer stands in a dashed box and is not locked; a cited
- * number stands in a full box. Nothing rests on colour.
+ * The cell styles of the package. What was typed by the engineer is slanted, stands in a box of thick dashes and is not locked; a
+ * cited number stands in a black box, all else in a grey one. Nothing rests on colour. No hatching: Gnumeric makes it black.
  */
 final class Styles {
     /** The type of the body. */
@@ -61,7 +61,7 @@ final class Styles {
         }
     }
 
-    private record Look(Role role, Align align, String format) {}
+    private record Look(Role role, Align align, String format, boolean wraps) {}
 
     private final XSSFWorkbook workbook;
     private final Map<Look, Integer> made = new HashMap<>();
@@ -74,24 +74,30 @@ final class Styles {
         body.setFontHeightInPoints((short) POINTS);
     }
 
+    /** The index of a style for texts, which are broken into lines. */
     int of(Role role, Align align) {
-        return of(role, align, AS_TYPED);
+        return of(new Look(role, align, AS_TYPED, true));
     }
 
-    /** The index of a style in the workbook. */
+    /** The index of a style for numbers. Where numbers may be broken into lines, LibreOffice forgets the indent. */
     int of(Role role, Align align, String format) {
-        return made.computeIfAbsent(new Look(role, align, format), look -> (int) make(look).getIndex());
+        return of(new Look(role, align, format, false));
+    }
+
+    private int of(Look look) {
+        return made.computeIfAbsent(look, key -> (int) make(key).getIndex());
     }
 
     private XSSFCellStyle make(Look look) {
         Role role = look.role;
         XSSFCellStyle style = workbook.createCellStyle();
         XSSFFont font = font(workbook, role.points, role.bold);
+        font.setItalic(role == Role.ENTRY);
         if (role == Role.LINK) {
             font.setUnderline(Font.U_SINGLE);
         }
         style.setFont(font);
-        style.setWrapText(true);
+        style.setWrapText(look.wraps);
         style.setVerticalAlignment(VerticalAlignment.TOP);
         style.setAlignment(
                 switch (look.align) {
@@ -108,33 +114,29 @@ final class Styles {
         switch (role) {
             case SHEET_TITLE, FURNITURE, HEADING, NOTE, CAUTION, TABLE_TITLE -> {}
             case HEAD -> {
-                box(style, BorderStyle.THIN);
-                fill(style, FillPatternType.SOLID_FOREGROUND, IndexedColors.GREY_25_PERCENT);
+                box(style, BorderStyle.THIN, IndexedColors.BLACK);
+                style.setFillPattern(FillPatternType.SOLID_FOREGROUND);
+                style.setFillForegroundColor(IndexedColors.GREY_25_PERCENT.getIndex());
             }
             case ENTRY -> {
-                box(style, BorderStyle.DASHED);
-                fill(style, FillPatternType.LEAST_DOTS, IndexedColors.BLACK);
+                box(style, BorderStyle.MEDIUM_DASHED, IndexedColors.BLACK);
                 style.setLocked(false);
             }
-            case CONSTANT -> box(style, BorderStyle.THIN);
-            case TEXT, STRONG, LINK, RESULT, VERDICT -> box(style, BorderStyle.HAIR);
+            case CONSTANT -> box(style, BorderStyle.THIN, IndexedColors.BLACK);
+            case TEXT, STRONG, LINK, RESULT, VERDICT -> box(style, BorderStyle.THIN, IndexedColors.GREY_40_PERCENT);
         }
         return style;
     }
 
-    private static void box(XSSFCellStyle style, BorderStyle line) {
+    private static void box(XSSFCellStyle style, BorderStyle line, IndexedColors colour) {
         style.setBorderTop(line);
         style.setBorderBottom(line);
         style.setBorderLeft(line);
         style.setBorderRight(line);
-    }
-
-    private static void fill(XSSFCellStyle style, FillPatternType pattern, IndexedColors colour) {
-        style.setFillPattern(pattern);
-        style.setFillForegroundColor(colour.getIndex());
-        if (pattern != FillPatternType.SOLID_FOREGROUND) {
-            style.setFillBackgroundColor(IndexedColors.WHITE.getIndex());
-        }
+        style.setTopBorderColor(colour.getIndex());
+        style.setBottomBorderColor(colour.getIndex());
+        style.setLeftBorderColor(colour.getIndex());
+        style.setRightBorderColor(colour.getIndex());
     }
 
     static XSSFFont font(XSSFWorkbook workbook, int points, boolean bold) {

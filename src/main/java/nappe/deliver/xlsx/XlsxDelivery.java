@@ -85,6 +85,7 @@ public final class XlsxDelivery {
             parts.put(frame.getPackagePart().getPartName().getName(), writer.rows());
             written.addAll(writer.written());
         }
+        workbook.setActiveSheet(0);
         checkNothingIsMissing();
         CellNames.of(results.sheets()).forEach(this::name);
     }
