@@ -28,17 +28,21 @@ final class ElementSheet {
         Map<String, Typed> typed = new LinkedHashMap<>();
         Table table = Table.find(sheet, Layout.ENTRY_HEADS, faults);
         if (table != null) {
-            Map<String, Table.Row> rows = rows(table, named.method(), declared);
-            for (Declared one : declared) {
-                if (one.kind() != Declared.Kind.CASE) {
-                    Table.Row row = rows.get(one.symbol());
-                    if (row == null) {
-                        faults.add(sheet.name(), null, "row-missing", "there is no row for " + one.symbol() + " ("
-                                + one.label() + "); write that symbol in the column Symbol"
-                                + (one.optional() ? " and leave its value blank" : ", and its value"));
-                    } else {
-                        typed.put(one.symbol(), typed(one, row));
-                    }
+            List<Declared> asked = declared.stream()
+                    .filter(d -> d.kind() != Declared.Kind.CASE)
+                    .toList();
+            Map<String, Table.Row> strangers = new LinkedHashMap<>();
+            Map<String, Table.Row> rows = rows(table, asked, strangers);
+            List<Declared> missing =
+                    asked.stream().filter(d -> !rows.containsKey(d.symbol())).toList();
+            strangers.forEach((symbol, row) -> refuseStranger(symbol, row, named.method(), declared, missing));
+            if (missing.size() > strangers.size()) {
+                missing.forEach(this::refuseMissing);
+            }
+            for (Declared one : asked) {
+                Table.Row row = rows.get(one.symbol());
+                if (row != null) {
+                    typed.put(one.symbol(), typed(one, row));
                 }
             }
         }
@@ -52,31 +56,42 @@ final class ElementSheet {
         return typedReader.typed(declared, value, row.field("Unit"), backing);
     }
 
-    private Map<String, Table.Row> rows(Table table, String method, List<Declared> declared) {
+    /** Rows by the symbols that are asked for; those with other symbols go to the strangers. */
+    private Map<String, Table.Row> rows(Table table, List<Declared> asked, Map<String, Table.Row> strangers) {
         Map<String, Table.Row> rows = new LinkedHashMap<>();
-        List<String> asked = declared.stream()
-                .filter(d -> d.kind() != Declared.Kind.CASE)
-                .map(Declared::symbol)
-                .toList();
+        List<String> symbols = asked.stream().map(Declared::symbol).toList();
         for (Table.Row row : table.rows(List.of("Description", "Unit"), faults)) {
             Field field = row.field("Symbol");
             String symbol = entries.requiredText(field, "the symbol", Entries.LONGEST_NAME);
-            boolean perCase = declared.stream()
-                    .anyMatch(d -> d.kind() == Declared.Kind.CASE && d.symbol().equals(symbol));
-            if (perCase) {
-                entries.fault(field, "symbol-per-case", symbol + " is typed for each case on the sheet Flows, not here");
-            } else if (!symbol.isEmpty() && !asked.contains(symbol)) {
-                entries.fault(field, "symbol-unknown", Shown.quoted(symbol) + " is not asked for by the method " + method
-                        + question(symbol, asked));
-            } else if (!symbol.isEmpty() && rows.putIfAbsent(symbol, row) != null) {
+            Map<String, Table.Row> side = symbols.contains(symbol) ? rows : strangers;
+            if (!symbol.isEmpty() && side.putIfAbsent(symbol, row) != null) {
                 entries.fault(field, "symbol-twice", symbol + " stands here a second time; keep one row for it");
             }
         }
         return rows;
     }
 
-    private static String question(String symbol, List<String> asked) {
-        String near = Near.question(symbol, asked);
-        return near.isEmpty() ? "; it asks for " + String.join(", ", asked) : near;
+    private void refuseStranger(
+            String symbol, Table.Row row, String method, List<Declared> declared, List<Declared> missing) {
+        Field field = row.field("Symbol");
+        boolean perCase =
+                declared.stream().anyMatch(d -> d.kind() == Declared.Kind.CASE && d.symbol().equals(symbol));
+        if (perCase) {
+            entries.fault(field, "symbol-per-case", symbol + " is typed for each case on the sheet Flows, not here");
+            return;
+        }
+        String near = Near.question(symbol, missing.stream().map(Declared::symbol).toList());
+        List<String> all = declared.stream()
+                .filter(d -> d.kind() != Declared.Kind.CASE)
+                .map(Declared::symbol)
+                .toList();
+        entries.fault(field, "symbol-unknown", Shown.quoted(symbol) + " is not asked for by the method " + method
+                + (near.isEmpty() ? "; it asks for " + String.join(", ", all) : near));
+    }
+
+    private void refuseMissing(Declared declared) {
+        faults.add(sheet.name(), null, "row-missing", "there is no row for " + declared.symbol() + " ("
+                + declared.label() + "); write that symbol in the column Symbol"
+                + (declared.optional() ? " and leave its value blank" : ", and its value"));
     }
 }

@@ -160,8 +160,8 @@ final class Entries {
             return declared;
         }
         if (!UnitOffer.fits(unit, declared)) {
-            fault(field, "unit-dimension", Shown.quoted(typed) + " is a unit of " + UnitOffer.measured(unit) + ", but "
-                    + what + " is " + UnitOffer.measured(declared) + "; write one such as "
+            fault(field, "unit-dimension", Shown.quoted(typed) + " stands for " + UnitOffer.measured(unit) + ", but "
+                    + what + " asks for " + UnitOffer.measured(declared) + "; write one such as "
                     + UnitOffer.examples(declared));
             return declared;
         }

@@ -1,6 +1,7 @@
 package nappe.input;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 
@@ -25,8 +26,9 @@ final class Faults {
 
     /** A fault of the whole file after which nothing can be read: to be thrown, with those found before it. */
     InputRefused refuse(String code, String message) {
-        found.add(new Fault(file, null, null, message, code));
-        return new InputRefused(found);
+        List<Fault> all = inOrder();
+        all.add(new Fault(file, null, null, message, code));
+        return new InputRefused(all);
     }
 
     int count() {
@@ -35,7 +37,26 @@ final class Faults {
 
     void throwIfAny() {
         if (!found.isEmpty()) {
-            throw new InputRefused(found);
+            throw new InputRefused(inOrder());
         }
+    }
+
+    /** Sheet by sheet as they were read, in each from the top down and from left to right. */
+    private List<Fault> inOrder() {
+        List<String> sheets = found.stream().map(f -> String.valueOf(f.sheet())).distinct().toList();
+        List<Fault> ordered = new ArrayList<>(found);
+        ordered.sort(Comparator.comparingInt((Fault f) -> sheets.indexOf(String.valueOf(f.sheet())))
+                .thenComparingInt(f -> row(f.cell()))
+                .thenComparingInt(f -> column(f.cell()).length())
+                .thenComparing(f -> column(f.cell())));
+        return ordered;
+    }
+
+    private static int row(@Nullable String cell) {
+        return cell == null ? 0 : Integer.parseInt(cell.replaceAll("[A-Z]", ""));
+    }
+
+    private static String column(@Nullable String cell) {
+        return cell == null ? "" : cell.replaceAll("[0-9]", "");
     }
 }

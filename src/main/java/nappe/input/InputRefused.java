@@ -3,7 +3,7 @@ package nappe.input;
 import java.util.List;
 import java.util.stream.Collectors;
 
-/** An input workbook that can't be worked with; carries every fault found, in the order of reading. */
+/** An input workbook that can't be worked with; carries every fault found, sheet by sheet. */
 public final class InputRefused extends RuntimeException {
     private static final long serialVersionUID = 1L;
 

@@ -40,12 +40,12 @@ final class NumberTexts {
         Matcher feet = FEET.matcher(text);
         if (feet.matches()) {
             double length = Integer.parseInt(feet.group(1)) + Double.parseDouble(feet.group(2)) / 12;
-            return "write " + Plain.number(Math.round(length * 1e6) / 1e6) + " here and ft in the unit column";
+            return "write " + Plain.number(Math.round(length * 1e6) / 1e6) + " here and \"ft\" as its unit";
         }
         Matcher word = WITH_WORD.matcher(text);
         if (word.matches()) {
             String unit = word.group(2).equals("\"") ? "in" : word.group(2).equals("'") ? "ft" : word.group(2);
-            return "write " + word.group(1) + " here and " + unit + " in the unit column";
+            return "write " + word.group(1) + " here and \"" + unit + "\" as its unit";
         }
         return separators(text);
     }

@@ -5,7 +5,7 @@ import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.Collections;
-import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
@@ -21,7 +21,7 @@ final class Parts implements AutoCloseable {
 
     private final ZipFile zip;
     private final Faults faults;
-    private final Map<String, ZipEntry> entries = new HashMap<>();
+    private final Map<String, ZipEntry> entries = new LinkedHashMap<>();
 
     private Parts(ZipFile zip, Faults faults) {
         this.zip = zip;

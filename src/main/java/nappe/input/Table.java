@@ -1,11 +1,16 @@
 package nappe.input;
 
 import java.util.ArrayList;
+import java.util.BitSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.NavigableMap;
+import java.util.Objects;
+import java.util.Set;
+import java.util.TreeMap;
+import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 
 /** A table of one sheet: a row of head words and what stands in the rows below it. */
@@ -49,9 +54,7 @@ final class Table {
         int best = 0;
         int headRow = -1;
         for (Map.Entry<Integer, NavigableMap<Integer, RawCell>> row : sheet.rows().entrySet()) {
-            int matches = (int) heads.stream()
-                    .filter(head -> row.getValue().values().stream().anyMatch(c -> word(c).equals(key(head))))
-                    .count();
+            int matches = matches(row.getValue(), heads);
             if (matches > best) {
                 best = matches;
                 headRow = row.getKey();
@@ -69,7 +72,7 @@ final class Table {
         Map<String, Integer> columns = new LinkedHashMap<>();
         boolean whole = true;
         for (String head : heads) {
-            List<RawCell> cells = sheet.rows().getOrDefault(headRow, new java.util.TreeMap<>()).values().stream()
+            List<RawCell> cells = sheet.rows().getOrDefault(headRow, new TreeMap<>()).values().stream()
                     .filter(c -> word(c).equals(key(head)))
                     .toList();
             if (cells.isEmpty()) {
@@ -89,8 +92,12 @@ final class Table {
 
     /** Whether a sheet has a table with these head words. */
     static boolean looksLike(RawSheet sheet, List<String> heads) {
-        return sheet.rows().values().stream().anyMatch(row -> heads.stream()
-                .allMatch(head -> row.values().stream().anyMatch(c -> word(c).equals(key(head)))));
+        return sheet.rows().values().stream().anyMatch(row -> matches(row, heads) == heads.size());
+    }
+
+    private static int matches(NavigableMap<Integer, RawCell> row, List<String> heads) {
+        Set<String> words = row.values().stream().map(Table::word).collect(Collectors.toSet());
+        return (int) heads.stream().filter(head -> words.contains(key(head))).count();
     }
 
     /** The same table, ending above the head row of another. */
@@ -102,7 +109,7 @@ final class Table {
         return sheet.name();
     }
 
-    /** Texts of the head row that start with a tag and a point: {@code F1.h_g}. */
+    /** The cells of the head row, from the left. */
     List<RawCell> headCells() {
         NavigableMap<Integer, RawCell> row = sheet.rows().get(headRow);
         return row == null ? List.of() : List.copyOf(row.values());
@@ -115,37 +122,59 @@ final class Table {
      */
     List<Row> rows(List<String> prefilled, Faults faults) {
         List<Row> rows = new ArrayList<>();
+        BitSet told = new BitSet();
         for (NavigableMap<Integer, RawCell> cells : sheet.rows().subMap(headRow, false, end, false).values()) {
+            List<RawCell> filled = columns.values().stream()
+                    .map(cells::get)
+                    .filter(c -> c != null && !c.isBlank())
+                    .toList();
             List<RawCell> typed = columns.entrySet().stream()
                     .filter(e -> !prefilled.contains(e.getKey()))
                     .map(e -> cells.get(e.getValue()))
-                    .filter(c -> c != null && !c.isBlank())
+                    .filter(filled::contains)
                     .toList();
             if (!typed.isEmpty()) {
-                int index = typed.get(0).row();
-                rows.add(new Row(index));
-                for (RawCell cell : typed) {
-                    refuseUnseen(cell, faults);
-                }
+                rows.add(new Row(typed.get(0).row()));
+                refuseCovered(filled, faults);
+                refuseHidden(typed, told, faults);
             }
         }
         return rows;
     }
 
-    private void refuseUnseen(RawCell cell, Faults faults) {
-        RawSheet.Merge merge = sheet.over(cell.row(), cell.column());
-        String what = null;
-        if (merge != null) {
-            what = "it is covered by the merged cells " + merge + "; split them";
-        } else if (sheet.hiddenRows.get(cell.row())) {
-            what = "row " + (cell.row() + 1) + " is hidden; show it";
-        } else if (sheet.hiddenColumns.get(cell.column())) {
-            what = "its column is hidden; show it";
+    private void refuseCovered(List<RawCell> filled, Faults faults) {
+        for (RawCell cell : filled) {
+            RawSheet.Merge merge = sheet.over(cell.row(), cell.column());
+            if (merge != null) {
+                refuseUnseen(cell, "it is covered by the merged cells " + merge + "; split them", faults);
+            }
         }
-        if (what != null) {
-            faults.add(sheet.name(), cell.address(), "entry-unseen",
-                    Shown.quoted(cell.text()) + " can't be seen: " + what + " and check what stands there");
+    }
+
+    /** Once for each row and each column; a row with nothing but its printed symbol or label may be hidden. */
+    private void refuseHidden(List<RawCell> typed, BitSet told, Faults faults) {
+        List<RawCell> entries = typed.stream().filter(c -> !isLabel(c.column())).toList();
+        for (RawCell cell : entries) {
+            if (sheet.hiddenRows.get(cell.row())) {
+                refuseUnseen(cell, "row " + (cell.row() + 1) + " is hidden; show it", faults);
+                return;
+            }
+            if (sheet.hiddenColumns.get(cell.column()) && !told.get(cell.column())) {
+                told.set(cell.column());
+                refuseUnseen(cell, "its column is hidden; show it", faults);
+            }
         }
+    }
+
+    private boolean isLabel(int column) {
+        boolean entries = columns.containsKey("Description") || columns.containsKey("Label");
+        return entries && (Objects.equals(columns.get("Symbol"), column) || Objects.equals(columns.get("Label"), column)
+                || Objects.equals(columns.get("Note"), column));
+    }
+
+    private void refuseUnseen(RawCell cell, String what, Faults faults) {
+        faults.add(sheet.name(), cell.address(), "entry-unseen",
+                Shown.quoted(cell.text()) + " can't be seen: " + what + " and check what stands there");
     }
 
     private static String word(RawCell cell) {

@@ -209,12 +209,12 @@ class WorkbookReaderTest {
         assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("</sheetData>", row))))
                 .isEqualTo(
                         """
+                        in.xlsx, sheet Flows: the file is damaged: row 60 has a cell with the address "ZZZZ60" (fault: wild-address)
+                        in.xlsx, sheet Flows: the file is damaged: row 60 has a cell with the address "G61" (fault: wild-address)
                         in.xlsx, sheet Flows, cell D60: the file is damaged: it has a number cell holding "abc"; type the number again (fault: damaged-number)
                         in.xlsx, sheet Flows, cell E60: the file is damaged: it has a text that does not exist (number 99999); type the text again (fault: text-unknown)
                         in.xlsx, sheet Flows, cell F60: the file is damaged: it has a style that does not exist (number 999) (fault: style-unknown)
                         in.xlsx, sheet Flows, cell F60: the file is damaged: this cell appears twice (fault: cell-twice)
-                        in.xlsx, sheet Flows: the file is damaged: row 60 has a cell with the address "ZZZZ60" (fault: wild-address)
-                        in.xlsx, sheet Flows: the file is damaged: row 60 has a cell with the address "G61" (fault: wild-address)
                         in.xlsx, sheet Flows, cell H60: the file is damaged: it has a cell of the unknown kind "zz" (fault: cell-kind)
                         in.xlsx, sheet Flows, cell I60: the file is damaged: it has a number cell holding "NaN"; type the number again (fault: damaged-number)
                         in.xlsx, sheet Flows, cell J60: the file is damaged: it has a number cell holding "0x1p3"; type the number again (fault: damaged-number)
