@@ -44,7 +44,8 @@ public sealed interface Block {
      * One line of a calculation.
      *
      * @param kind how it is presented
-     * @param code its code on the sheet ("F1.07")
+     * @param code its code on the sheet ("F1.007")
+     * @param equation the formula as plain text, or what is printed in its place ("from sheet Entries")
      * @param source citation in words; empty where none is owed
      * @param forAll the cell that serves all cases, or null
      * @param perCase one cell per case, or empty

@@ -5,6 +5,8 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import nappe.formula.Formula;
+import nappe.formula.PlainReading;
 import nappe.formula.SymbolsReading;
 import nappe.method.Item;
 import nappe.method.Limit;
@@ -158,11 +160,16 @@ public final class ElementSheet {
                 tag + "." + String.format(java.util.Locale.ROOT, "%03d", lines.size()),
                 first.label(),
                 first.symbol(),
-                first.equation(),
+                equation(first),
                 unitText(first),
                 first.source(),
                 perCase ? null : first.cell(),
                 perCaseCells));
+    }
+
+    private static String equation(Strip.Laid line) {
+        Formula formula = line.cell().formula();
+        return !line.equation().isEmpty() || formula == null ? line.equation() : PlainReading.of(formula);
     }
 
     private static String unitText(Strip.Laid line) {

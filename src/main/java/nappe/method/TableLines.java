@@ -1,5 +1,6 @@
 package nappe.method;
 
+import java.util.ArrayList;
 import java.util.List;
 import nappe.formula.DimensionReading;
 import nappe.formula.Formula;
@@ -44,13 +45,13 @@ final class TableLines {
                     0, 1, "table-unclear");
         }
         draft.openTable = table;
-        draft.openRow = row(table);
-        draft.openShare = between ? share(table) : null;
+        draft.openRow = row();
+        draft.openShare = between ? share() : null;
         Formula column = new Formula.Symbol(name(table, first));
         if (between) {
             between(first, column);
         } else {
-            line(row(table), call(Function.MATCH, symbol(key), column), "row of the table " + table.name(), Sign.POSITIVE);
+            line(row(), call(Function.MATCH, symbol(key), column), "row of the table " + table.name(), Sign.POSITIVE);
         }
     }
 
@@ -61,16 +62,16 @@ final class TableLines {
                 : new Formula.Operation(Operator.OVER, symbol(key), new Formula.Quantity(1, "1", unit));
         Formula last = call(Function.INDEX, column, number(table.rows()));
         Formula start = call(Function.INDEX, column, number(1));
-        String inside = "x_" + suffix(table);
+        String inside = "x_" + suffix();
         line(inside, call(Function.MIN, call(Function.MAX, keyNumber, start), last),
                 key + " as looked up, not beyond the ends of the table", first.sign());
-        line(row(table), call(Function.MIN, call(Function.MATCH_BELOW, symbol(inside), column), number(table.rows() - 1)),
+        line(row(), call(Function.MIN, call(Function.MATCH_BELOW, symbol(inside), column), number(table.rows() - 1)),
                 "row of the table " + table.name() + " below it", Sign.POSITIVE);
-        Formula below = call(Function.INDEX, column, symbol(row(table)));
-        Formula next = call(Function.INDEX, column, plus(symbol(row(table)), number(1)));
-        String step = "d_" + suffix(table);
+        Formula below = call(Function.INDEX, column, symbol(row()));
+        Formula next = call(Function.INDEX, column, plus(symbol(row()), number(1)));
+        String step = "d_" + suffix();
         line(step, minus(next, below), "step of the table there", Sign.POSITIVE);
-        line(share(table), new Formula.Operation(Operator.OVER, minus(symbol(inside), below), symbol(step)),
+        line(share(), new Formula.Operation(Operator.OVER, minus(symbol(inside), below), symbol(step)),
                 "share of the way to the next row", Sign.ANY);
         Formula span = span(first);
         draft.limits.add(new Limit(start, keyNumber, false, span, null,
@@ -147,16 +148,17 @@ final class TableLines {
         return unit == null ? Unit.one() : unit;
     }
 
-    private static String suffix(CitedTable table) {
-        return table.name().replace('-', '_');
+    /** T1 for the first table of the sheet, T2 for the second. */
+    private String suffix() {
+        return "T" + (new ArrayList<>(draft.tables.keySet()).indexOf(table.name()) + 1);
     }
 
-    private static String row(CitedTable table) {
-        return "i_" + suffix(table);
+    private String row() {
+        return "i_" + suffix();
     }
 
-    private static String share(CitedTable table) {
-        return "t_" + suffix(table);
+    private String share() {
+        return "t_" + suffix();
     }
 
     private static Formula call(Function function, Formula... arguments) {

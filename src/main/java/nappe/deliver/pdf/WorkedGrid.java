@@ -5,6 +5,7 @@ import java.util.List;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.formula.Formula;
+import nappe.formula.PlainReading;
 import nappe.results.Results;
 import org.jspecify.annotations.Nullable;
 
@@ -80,6 +81,10 @@ final class WorkedGrid {
         texts.add(View.Text.plain("", line.description()));
         Formula formula = cell == null ? null : cell.formula();
         if (cell == null || formula == null) {
+            return texts;
+        }
+        if (!line.equation().isEmpty() && !line.equation().equals(PlainReading.of(formula))) {
+            texts.add(View.Text.plain("equation", line.equation()));
             return texts;
         }
         Inline inSymbols = TypesetReading.inSymbols(formula);
