@@ -104,9 +104,9 @@ final class Statement {
         return i < fields.size() ? fields.get(i) : new Field("", Math.max(0, text.length() - 1));
     }
 
-    /** Everything after the word, semicolons included. */
+    /** Everything after the word, semicolons included, as one paragraph. */
     String rest() {
-        return text.substring(Math.min(text.length(), word.length())).strip();
+        return text.substring(Math.min(text.length(), word.length())).strip().replaceAll("\\s+", " ");
     }
 
     /** A fault at an offset of the statement's text. */
