@@ -105,11 +105,11 @@ final class Styles {
                     case CENTRE -> HorizontalAlignment.CENTER;
                     case RIGHT -> HorizontalAlignment.RIGHT;
                 });
-        if (look.align == Align.RIGHT) {
+        if (look.align == Align.RIGHT && look.format.equals(AS_TYPED)) {
             style.setIndention((short) 1);
         }
         if (!look.format.equals(AS_TYPED)) {
-            style.setDataFormat(workbook.createDataFormat().getFormat(look.format));
+            style.setDataFormat(workbook.createDataFormat().getFormat(look.format + "_)"));
         }
         switch (role) {
             case SHEET_TITLE, FURNITURE, HEADING, NOTE, CAUTION, TABLE_TITLE -> {}
