@@ -217,9 +217,10 @@ final class SheetWriter {
                 .findFirst()
                 .orElse(null);
         Formula formula = cell == null ? null : cell.formula();
-        boolean itself = formula != null
-                && (line.equation().isEmpty() || line.equation().equals(PlainReading.of(formula)));
-        return itself ? PlainReading.of(line.symbol(), formula) : line.equation();
+        if (formula != null && (line.equation().isEmpty() || line.equation().equals(PlainReading.of(formula)))) {
+            return PlainReading.of(line.symbol(), formula);
+        }
+        return line.equation();
     }
 
     private static String equation(Cell cell) {
