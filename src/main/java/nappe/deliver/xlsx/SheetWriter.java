@@ -189,10 +189,17 @@ final class SheetWriter {
 
     private void put(int row, int column, Role role, Align align, Cell cell, Filling content) {
         Value value = results.value(cell);
-        boolean isNumber = value instanceof Value.Number;
-        int style = isNumber ? styles.of(role, align, format(cell, value)) : styles.of(role, align);
-        rows.put(row, column, style, content);
-        grow(row, role, isNumber ? "" : SheetRows.words(value), columns.width(column));
+        if (value instanceof Value.Number number) {
+            String format = format(cell, number.value());
+            rows.put(row, column, styles.of(role, align, format), content);
+            grow(row, role, "", columns.width(column));
+            if (!format.equals(Styles.AS_TYPED)) {
+                columns.fit(column, Digits.print(cell.unit(), number.value()));
+            }
+        } else {
+            rows.put(row, column, styles.of(role, align), content);
+            grow(row, role, SheetRows.words(value), columns.width(column));
+        }
     }
 
     private Filling typed(Value value) {
@@ -202,13 +209,10 @@ final class SheetWriter {
     }
 
     /** A result that is whole as issued is shown as typed: after a change its decimals would still have to be seen. */
-    private static String format(Cell cell, Value value) {
-        if (cell.kind() != Cell.Kind.FORMULA || !(value instanceof Value.Number number)) {
-            return Styles.AS_TYPED;
-        }
-        int decimals = Digits.decimals(cell.unit(), number.value());
-        boolean whole = decimals == 0 && number.value() == Math.rint(number.value());
-        return whole ? Styles.AS_TYPED : Digits.format(decimals);
+    private static String format(Cell cell, double value) {
+        int decimals = Digits.decimals(cell.unit(), value);
+        boolean whole = decimals == 0 && value == Math.rint(value);
+        return whole || cell.kind() != Cell.Kind.FORMULA ? Styles.AS_TYPED : Digits.format(decimals);
     }
 
     /** What the layout says in place of a formula, or the formula itself. */
