@@ -51,8 +51,12 @@ final class PdfWriting {
 
     private static List<String> warnings(Set<Integer> missing) {
         return missing.stream()
-                .map(character -> String.format(
-                        Locale.ROOT, "character U+%04X is in none of the typefaces; the PDF shows a box", character))
+                .map(character -> character == 0xFFFD
+                        ? "a control character or half a character in the input; the PDF shows a box"
+                        : String.format(
+                                Locale.ROOT,
+                                "character U+%04X is in none of the typefaces; the PDF shows a box",
+                                character))
                 .toList();
     }
 
