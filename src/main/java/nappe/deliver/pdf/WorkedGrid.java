@@ -59,12 +59,13 @@ final class WorkedGrid {
 
     private View.GridRow row(Block.Line line) {
         Cell cell = cell(line);
+        List<View.Text> quantity = quantity(line, cell);
         return new View.GridRow(
                 "",
                 List.of(
                         cell("", line.code()),
-                        new View.GridCell("", 1, quantity(line, cell)),
-                        new View.GridCell("right low", 1, cell == null ? List.of() : List.of(result(line, cell))),
+                        new View.GridCell("", 1, quantity),
+                        new View.GridCell(quantity.size() > 1 ? "right low" : "right", 1, cell == null ? List.of() : List.of(result(line, cell))),
                         new View.GridCell("", 1, source(line, cell))));
     }
 
@@ -121,7 +122,7 @@ final class WorkedGrid {
                 ? View.Text.plain("written", "brought into the working unit")
                 : new View.Text(
                         "written",
-                        List.of(Piece.plain("from cell "), Piece.whole(links.address(origin))),
+                        List.of(Piece.plain("from cell "), Piece.plain(links.address(origin))),
                         links.to(origin));
     }
 
@@ -161,7 +162,7 @@ final class WorkedGrid {
             String all = line.forAll() != null && lines.caseNames().size() > 1 ? ", all cases" : "";
             texts.add(new View.Text(
                     "small",
-                    List.of(Piece.plain(kind + "cell "), Piece.whole(links.address(cell)), Piece.plain(all)),
+                    List.of(Piece.plain(kind + "cell "), Piece.plain(links.address(cell)), Piece.plain(all)),
                     links.to(cell)));
         }
         return texts;
