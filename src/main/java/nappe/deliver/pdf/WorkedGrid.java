@@ -5,6 +5,7 @@ import java.util.List;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.formula.Formula;
+import nappe.formula.PlainReading;
 import nappe.results.Results;
 import org.jspecify.annotations.Nullable;
 
@@ -79,17 +80,19 @@ final class WorkedGrid {
     private List<View.Text> quantity(Block.Line line, @Nullable Cell cell) {
         List<View.Text> texts = new ArrayList<>();
         texts.add(View.Text.plain("", line.description()));
-        if (!line.equation().isEmpty()) {
+        Formula formula = cell == null ? null : cell.formula();
+        boolean noted = !line.equation().isEmpty()
+                && (formula == null || !line.equation().equals(PlainReading.of(formula)));
+        if (noted) {
             texts.add(View.Text.of("written", WrittenEquation.pieces(line.equation())));
         }
-        Formula formula = cell == null ? null : cell.formula();
         if (cell == null || formula == null) {
             return texts;
         }
         Inline inNumbers = numbers.of(cell, formula);
         boolean conversion = SubstitutedReading.isConversion(cell, formula);
-        if (handsOn(line, cell, formula) != null || conversion) {
-            if (line.equation().isEmpty()) {
+        if (noted || conversion || handsOn(line, cell, formula) != null) {
+            if (!noted) {
                 texts.add(origin(line, cell, formula));
             }
             if (conversion) {
