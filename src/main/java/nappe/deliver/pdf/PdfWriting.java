@@ -72,7 +72,7 @@ final class PdfWriting {
 
         @Override
         public void preOpen(ITextRenderer renderer) {
-            PdfWriter writer = renderer.getWriter();
+            PdfWriter writer = java.util.Objects.requireNonNull(renderer.getWriter());
             writer.setViewerPreferences(PdfWriter.PageModeUseOutlines);
             writer.addViewerPreference(PdfName.DISPLAYDOCTITLE, com.lowagie.text.pdf.PdfBoolean.PDFTRUE);
             writer.getExtraCatalog().put(PdfName.LANG, new PdfString("en"));
@@ -81,7 +81,7 @@ final class PdfWriting {
 
         @Override
         public void onClose(ITextRenderer renderer) {
-            stamp(renderer.getWriter());
+            stamp(java.util.Objects.requireNonNull(renderer.getWriter()));
         }
 
         private void stamp(PdfWriter writer) {
