@@ -2,6 +2,7 @@ package nappe.deliver.pdf;
 
 import java.util.HashSet;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 import org.w3c.dom.Element;
 import org.xhtmlrenderer.newtable.TableBox;
@@ -27,8 +28,9 @@ final class LonelyHeads {
 
     /** Marks such tables in the document that was laid out; true where there were any and it must be laid out again. */
     static boolean moved(ITextRenderer renderer) {
-        LonelyHeads heads = new LonelyHeads(renderer.getRootBox().getLayer().getPages());
-        heads.search(renderer.getRootBox(), -1);
+        Box root = Objects.requireNonNull(renderer.getRootBox());
+        LonelyHeads heads = new LonelyHeads(Objects.requireNonNull(root.getLayer()).getPages());
+        heads.search(root, -1);
         return heads.found;
     }
 

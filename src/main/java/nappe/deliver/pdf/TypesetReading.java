@@ -67,7 +67,8 @@ final class TypesetReading implements Reading<Inline> {
 
     @Override
     public Inline summary(Formula.Summary summary) {
-        return names.apply(summary.kind() + "(" + summary.name() + ")");
+        return Inline.join(
+                Inline.ATOM, Inline.text(summary.kind() + "("), names.apply(summary.name()), Inline.text(")"));
     }
 
     @Override
@@ -141,7 +142,7 @@ final class TypesetReading implements Reading<Inline> {
 
     private Inline part(Formula formula) {
         Inline part = formula.read(this);
-        return formula instanceof Formula.Logic ? part.bracketed() : part;
+        return formula instanceof Formula.Logic logic && !logic.kind().equals("not") ? part.bracketed() : part;
     }
 
     @Override

@@ -13,7 +13,7 @@ final class UnitPrint {
     private static final Pattern EXPONENT = Pattern.compile("(?<=[A-Za-z])\\^?(-?\\d)(?![\\dA-Za-z(])");
     private static final Pattern FRACTION = Pattern.compile("\\^\\((-?\\d+/\\d+)\\)");
 
-    private static final Pattern IN_BRACKETS = Pattern.compile("\\(([^()\\s]+)\\)$");
+    private static final Pattern IN_BRACKETS = Pattern.compile("[(\\[]([^\\s]+)[)\\]]$");
 
     private UnitPrint() {}
 
@@ -51,8 +51,8 @@ final class UnitPrint {
         pieces.add(Piece.plain(head.substring(0, unit.start())));
         List<Piece> named = named(unit.group(1));
         for (int i = 0; i < named.size(); i++) {
-            String open = i == 0 ? "(" : "";
-            String close = i == named.size() - 1 ? ")" : "";
+            String open = i == 0 ? head.substring(unit.start(), unit.start() + 1) : "";
+            String close = i == named.size() - 1 ? head.substring(head.length() - 1) : "";
             Piece piece = named.get(i);
             pieces.add(new Piece(open + piece.text() + close, piece.face(), piece.shift()));
         }

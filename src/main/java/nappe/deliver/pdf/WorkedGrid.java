@@ -80,23 +80,55 @@ final class WorkedGrid {
         List<View.Text> texts = new ArrayList<>();
         texts.add(View.Text.plain("", line.description()));
         Formula formula = cell == null ? null : cell.formula();
+        boolean written = !line.equation().isEmpty()
+                && (formula == null || !line.equation().equals(PlainReading.of(formula)));
+        if (written) {
+            texts.add(View.Text.of("written", WrittenEquation.pieces(line.equation())));
+        }
         if (cell == null || formula == null) {
             return texts;
         }
-        if (!line.equation().isEmpty() && !line.equation().equals(PlainReading.of(formula))) {
-            texts.add(View.Text.plain("equation", line.equation()));
+        Inline inNumbers = numbers.of(cell, formula);
+        boolean conversion = SubstitutedReading.isConversion(cell, formula);
+        if (handsOn(line, cell, formula) != null || conversion) {
+            if (!written) {
+                texts.add(origin(line, cell, formula));
+            }
+            if (conversion) {
+                texts.add(View.Text.of("numbers", equation(List.of(), "= ", inNumbers)));
+            }
+            return texts;
+        }
+        if (written) {
             return texts;
         }
         Inline inSymbols = TypesetReading.inSymbols(formula);
-        Inline inNumbers = numbers.of(cell, formula);
         List<Piece> left = line.symbol().isEmpty() ? List.of() : SymbolPrint.pieces(line.symbol());
-        String equals = left.isEmpty() ? "" : "\u00a0= ";
-        texts.add(View.Text.of("equation", equation(left, equals, inSymbols)));
+        texts.add(View.Text.of("equation", equation(left, left.isEmpty() ? "" : "\u00a0= ", inSymbols)));
         if (!inNumbers.plain().equals(inSymbols.plain())) {
             String again = line.kind() == Block.LineKind.LIMIT_VERDICT ? "" : "= ";
             texts.add(View.Text.of("numbers", equation(List.of(), again, inNumbers)));
         }
         return texts;
+    }
+
+    /** The cell whose content the line only hands on under the same symbol; null where it does more. */
+    private static @Nullable Cell handsOn(Block.Line line, Cell cell, Formula formula) {
+        return formula instanceof Formula.Symbol symbol
+                        && symbol.name().equals(line.symbol())
+                        && cell.references().get(symbol.name()) instanceof Cell origin
+                ? origin
+                : null;
+    }
+
+    private View.Text origin(Block.Line line, Cell cell, Formula formula) {
+        Cell origin = handsOn(line, cell, formula);
+        return origin == null
+                ? View.Text.plain("written", "brought into the working unit")
+                : new View.Text(
+                        "written",
+                        List.of(Piece.plain("from cell "), Piece.whole(links.address(origin))),
+                        links.to(origin));
     }
 
     private static List<Piece> equation(List<Piece> left, String equals, Inline right) {

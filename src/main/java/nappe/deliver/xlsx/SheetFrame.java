@@ -80,7 +80,6 @@ final class SheetFrame {
         sheet.getHeader().setLeft(margins.headLeft());
         sheet.getHeader().setRight(margins.headRight());
         sheet.getFooter().setLeft(margins.footLeft());
-        sheet.getFooter().setRight(margins.footRight());
         int index = workbook.getSheetIndex(sheet);
         workbook.setPrintArea(index, 0, content.rows().lastColumn(), 0, content.rows().lastRow());
     }

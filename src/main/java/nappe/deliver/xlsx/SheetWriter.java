@@ -56,9 +56,9 @@ final class SheetWriter {
         header();
         for (Block block : sheet.blocks()) {
             if (block instanceof Block.Heading heading) {
-                wide(heading.row(), Role.HEADING, heading.text());
+                wide(heading.row(), Role.HEADING, tidy(heading.text()));
             } else if (block instanceof Block.Note note) {
-                wide(note.row(), note.caution() ? Role.CAUTION : Role.NOTE, note.text());
+                wide(note.row(), note.caution() ? Role.CAUTION : Role.NOTE, tidy(note.text()));
             } else if (block instanceof Block.Table table) {
                 table(table);
             } else if (block instanceof Block.WorkbookOnly only) {
@@ -76,9 +76,10 @@ final class SheetWriter {
         wide(1, Role.FURNITURE, furniture.project() + "   Calculation " + furniture.number() + "   Revision "
                 + furniture.revision() + ", " + furniture.date() + "   Status: " + furniture.status());
         wide(2, Role.FURNITURE, String.join(" ", Stream.concat(
-                        Stream.of("Input fingerprint " + furniture.fingerprint() + ".", furniture.release()),
+                        Stream.of("Input fingerprint " + furniture.fingerprint(), furniture.release()),
                         furniture.cautions().stream())
                 .filter(text -> !text.isEmpty())
+                .map(text -> text.endsWith(".") ? text : text + ".")
                 .toList()));
         rows.atLeast(3, 6);
     }
@@ -86,7 +87,7 @@ final class SheetWriter {
     private void table(Block.Table table) {
         int row = table.row();
         if (!table.title().isEmpty()) {
-            wide(row++, Role.TABLE_TITLE, table.title());
+            wide(row++, Role.TABLE_TITLE, tidy(table.title()));
         }
         head(row, table.columns());
         for (Block.Row items : table.rows()) {
@@ -146,7 +147,7 @@ final class SheetWriter {
         text(row, 0, role, Align.LEFT, line.code());
         text(row, 1, role, Align.LEFT, line.description());
         symbol(row, 2, line.symbol(), Align.LEFT);
-        text(row, 3, Role.TEXT, Align.LEFT, line.equation());
+        text(row, 3, Role.TEXT, Align.LEFT, equation(line));
         text(row, 4, Role.TEXT, Align.LEFT, line.unit());
         text(row, 5, Role.TEXT, Align.LEFT, line.source());
         Role result = line.kind() == Block.LineKind.LIMIT_VERDICT ? Role.VERDICT : Role.RESULT;
@@ -164,6 +165,7 @@ final class SheetWriter {
         this.heads.add(row);
         for (int i = 0; i < heads.size(); i++) {
             text(row, i, Role.HEAD, heads.get(i).align(), heads.get(i).head());
+            rows.fill(row, i, styles.of(Role.HEAD, Align.LEFT));
         }
     }
 
@@ -199,11 +201,26 @@ final class SheetWriter {
                 : texts.text(SheetRows.words(value));
     }
 
-    /** A result that is zero as issued is shown as typed: any other number would still have to be seen. */
+    /** A result that is whole as issued is shown as typed: after a change its decimals would still have to be seen. */
     private static String format(Cell cell, Value value) {
-        return cell.kind() == Cell.Kind.FORMULA && value instanceof Value.Number number && number.value() != 0
-                ? Digits.format(Digits.decimals(cell.unit(), number.value()))
-                : Styles.AS_TYPED;
+        if (cell.kind() != Cell.Kind.FORMULA || !(value instanceof Value.Number number)) {
+            return Styles.AS_TYPED;
+        }
+        int decimals = Digits.decimals(cell.unit(), number.value());
+        boolean whole = decimals == 0 && number.value() == Math.rint(number.value());
+        return whole ? Styles.AS_TYPED : Digits.format(decimals);
+    }
+
+    /** What the layout says in place of a formula, or the formula itself. */
+    private static String equation(Block.Line line) {
+        Cell cell = Stream.concat(Stream.ofNullable(line.forAll()), line.perCase().stream())
+                .findFirst()
+                .orElse(null);
+        Formula formula = cell == null ? null : cell.formula();
+        if (formula != null && (line.equation().isEmpty() || line.equation().equals(PlainReading.of(formula)))) {
+            return PlainReading.of(line.symbol(), formula);
+        }
+        return line.equation();
     }
 
     private static String equation(Cell cell) {
@@ -220,9 +237,15 @@ final class SheetWriter {
 
     private void text(int row, int column, Role role, Align align, String text) {
         if (!text.isEmpty()) {
-            rows.put(row, column, styles.of(role, align), texts.text(text));
-            grow(row, role, text, columns.width(column));
+            String tidy = tidy(text);
+            rows.put(row, column, styles.of(role, align), texts.text(tidy));
+            grow(row, role, tidy, columns.width(column));
         }
+    }
+
+    /** Blanks that only laid out a text elsewhere would leave gaps here. */
+    private static String tidy(String text) {
+        return text.replaceAll(" {2,}", " ");
     }
 
     private void symbol(int row, int column, String symbol, Align align) {

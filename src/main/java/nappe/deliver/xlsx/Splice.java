@@ -37,7 +37,7 @@ final class Splice {
             ByteArrayOutputStream bytes = new ByteArrayOutputStream();
             try (ZipOutputStream zip = new ZipOutputStream(bytes, StandardCharsets.UTF_8)) {
                 for (String first : new String[] {"[Content_Types].xml", "_rels/.rels"}) {
-                    write(zip, first, parts.remove(first));
+                    write(zip, first, java.util.Objects.requireNonNull(parts.remove(first)));
                 }
                 for (Map.Entry<String, byte[]> part : parts.entrySet()) {
                     write(zip, part.getKey(), part.getValue());

@@ -27,6 +27,9 @@ final class Styles {
     /** The number format that shows a number as typed. */
     static final String AS_TYPED = "General";
 
+    /** Room behind a number, as wide as a bracket; an indent is not kept for numbers by LibreOffice. */
+    private static final String ROOM = "_)";
+
     /** What a cell is there for. */
     enum Role {
         SHEET_TITLE(14, true),
@@ -79,7 +82,7 @@ final class Styles {
         return of(new Look(role, align, AS_TYPED, true));
     }
 
-    /** The index of a style for numbers. Where numbers may be broken into lines, LibreOffice forgets the indent. */
+    /** The index of a style for numbers. */
     int of(Role role, Align align, String format) {
         return of(new Look(role, align, format, false));
     }
@@ -105,11 +108,11 @@ final class Styles {
                     case CENTRE -> HorizontalAlignment.CENTER;
                     case RIGHT -> HorizontalAlignment.RIGHT;
                 });
-        if (look.align == Align.RIGHT) {
+        if (look.align == Align.RIGHT && look.wraps) {
             style.setIndention((short) 1);
         }
-        if (!look.format.equals(AS_TYPED)) {
-            style.setDataFormat(workbook.createDataFormat().getFormat(look.format));
+        if (!look.wraps) {
+            style.setDataFormat(workbook.createDataFormat().getFormat(look.format + ROOM));
         }
         switch (role) {
             case SHEET_TITLE, FURNITURE, HEADING, NOTE, CAUTION, TABLE_TITLE -> {}
