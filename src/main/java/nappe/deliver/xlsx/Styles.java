@@ -27,7 +27,10 @@ final class Styles {
     /** The number format that shows a number as typed. */
     static final String AS_TYPED = "General";
 
-    /** Room behind a number, as wide as a bracket; an indent is not kept for numbers by LibreOffice. */
+    /**
+     * Room behind a number, as wide as a bracket: LibreOffice forgets the indent of some. Not behind a number as typed,
+     * which would no longer be cut to the width of its column.
+     */
     private static final String ROOM = "_)";
 
     /** What a cell is there for. */
@@ -108,10 +111,9 @@ final class Styles {
                     case CENTRE -> HorizontalAlignment.CENTER;
                     case RIGHT -> HorizontalAlignment.RIGHT;
                 });
-        if (look.align == Align.RIGHT && look.wraps) {
-            style.setIndention((short) 1);
-        }
-        if (!look.wraps) {
+        if (look.format.equals(AS_TYPED)) {
+            style.setIndention((short) (look.align == Align.RIGHT ? 1 : 0));
+        } else {
             style.setDataFormat(workbook.createDataFormat().getFormat(look.format + ROOM));
         }
         switch (role) {
