@@ -90,6 +90,8 @@ public final class PackageLayout {
             }
         }
         SheetDraft assumptionSheet = draft("Assumptions", "Assumptions", "each with basis and owner, open or closed");
+        SheetDraft glossarySheet = draft("Glossary", "Glossary and dependence", "every symbol, what it rests on, what rests on it");
+        SheetDraft checkerSheet = draft("Checker", "Checker's record", "every formula with its cell, room for tick, initials and comment");
         SheetDraft referenceSheet = draft("References", "References", "publications and tables cited");
         SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
@@ -115,6 +117,7 @@ public final class PackageLayout {
         ItemLayout items = new ItemLayout(cells, trialRows);
         List<ElementSheet.LimitResult> limits = new ArrayList<>();
         Map<String, Block.Table> ratings = new LinkedHashMap<>();
+        Map<String, List<Block.Line>> linesOf = new LinkedHashMap<>();
         List<Scope> downstream = List.of();
         MethodSheet below = null;
         for (Design.Element element : design.elements()) {
@@ -122,8 +125,10 @@ public final class PackageLayout {
             Scope scope = java.util.Objects.requireNonNull(scopes.get(element.tag()));
             List<Scope> caseScopes = caseScopes(element, method, scope, cases, below, downstream);
             SheetDraft sheet = java.util.Objects.requireNonNull(elementSheets.get(element.tag()));
-            limits.addAll(new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes)
-                    .lay(workedCase(), demanded(element, demands)));
+            ElementSheet laid =
+                    new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes);
+            limits.addAll(laid.lay(workedCase(), demanded(element, demands)));
+            linesOf.put(element.tag(), laid.lines());
             SheetDraft ratingSheet = ratingSheets.get(element.tag());
             if (ratingSheet != null) {
                 ratings.put(element.tag(), rating(element, method, items, scope, ratingSheet, trialRows));
@@ -135,6 +140,8 @@ public final class PackageLayout {
         BackSheets back = new BackSheets(cells, design);
         back.roots(trialSheet, trialRows.solved());
         Run verdicts = new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
+        CheckerSheets.glossary(glossarySheet, linesOf);
+        CheckerSheets.formulas(checkerSheet, linesOf);
         back.assumptions(assumptionSheet);
         back.references(referenceSheet, distinct);
         back.software(softwareSheet, software);
