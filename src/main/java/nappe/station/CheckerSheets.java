@@ -1,6 +1,8 @@
 package nappe.station;
 
 import java.util.ArrayList;
+import java.util.Collections;
+import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -8,6 +10,7 @@ import java.util.Map;
 import java.util.Set;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
+import nappe.calculation.Reference;
 import nappe.calculation.Run;
 import nappe.calculation.SheetDraft;
 import nappe.calculation.TableDraft;
@@ -15,6 +18,7 @@ import nappe.calculation.TableDraft;
 /** Lays what a checker works with: every formula with room for a tick, and every symbol with what it rests on. */
 final class CheckerSheets {
     private static final int LONGEST_LIST = 400;
+    private static final String TRIALS = "Trials";
 
     private CheckerSheets() {}
 
@@ -74,7 +78,7 @@ final class CheckerSheets {
                     new Block.Column("Meaning", 46, Block.Align.LEFT),
                     new Block.Column("Unit", 10, Block.Align.LEFT),
                     new Block.Column("Rests on", 36, Block.Align.LEFT),
-                    new Block.Column("Carries", 36, Block.Align.LEFT)));
+                    new Block.Column("What rests on it", 36, Block.Align.LEFT)));
             known.values().forEach(line -> table.add(List.of(
                     new Block.Symbol(line.symbol()),
                     new Block.Text(line.description()),
@@ -85,20 +89,29 @@ final class CheckerSheets {
         });
     }
 
-    /** The symbols of the same sheet that a line's formula refers to, by the cells it refers to. */
+    /** The symbols of the same sheet that a line rests on directly, or through the trial rows of a root. */
     private static Set<String> direct(Block.Line line, Map<String, Block.Line> known) {
         Set<String> symbols = new LinkedHashSet<>();
         Cell cell = first(line);
         if (cell != null) {
-            cell.references().values().forEach(reference -> {
-                List<Cell> cells = reference instanceof Run run ? run.cells() : List.of((Cell) reference);
-                cells.stream()
-                        .filter(c -> c.place().sheet().equals(cell.place().sheet()) && known.containsKey(c.symbol()))
-                        .forEach(c -> symbols.add(c.symbol()));
-            });
+            follow(cell, cell.place().sheet(), known, symbols, Collections.newSetFromMap(new IdentityHashMap<>()));
         }
         symbols.remove(line.symbol());
         return symbols;
+    }
+
+    private static void follow(
+            Cell cell, String sheet, Map<String, Block.Line> known, Set<String> symbols, Set<Cell> seen) {
+        for (Reference reference : cell.references().values()) {
+            for (Cell one : reference instanceof Run run ? run.cells() : List.of((Cell) reference)) {
+                boolean here = one.place().sheet().equals(sheet);
+                if (here && known.containsKey(one.symbol())) {
+                    symbols.add(one.symbol());
+                } else if ((here || one.place().sheet().equals(TRIALS)) && seen.add(one)) {
+                    follow(one, sheet, known, symbols, seen);
+                }
+            }
+        }
     }
 
     private static String listed(Set<String> symbols, String none) {
