@@ -91,6 +91,7 @@ final class TableGrid {
         return new View.GridRow("", cells);
     }
 
+    /** A row; one with nothing after its first words is a blank to be filled in by hand, and higher. */
     private View.GridRow row(List<View.Text> printed) {
         List<View.GridCell> cells = new ArrayList<>();
         for (int i = 0; i < printed.size(); i++) {
@@ -99,7 +100,9 @@ final class TableGrid {
             String room = column.align() == Block.Align.RIGHT ? decimals.get(i).room(text.characters()) : text.style();
             cells.add(View.GridCell.of(style(column), new View.Text(room, text.pieces(), text.target())));
         }
-        return new View.GridRow("", cells);
+        boolean blank = printed.size() > 1
+                && printed.stream().skip(1).allMatch(text -> text.characters().isEmpty());
+        return new View.GridRow(blank ? "blank" : "", cells);
     }
 
     private static String style(Block.Column column) {
