@@ -59,6 +59,28 @@ public record CheckRow(
         return rows;
     }
 
+    /** The rows of {@code checks/left-out.csv} for a method that are known to disagree: id and why. */
+    public static List<List<String>> knownToBeOff(TextLibrary library, String method) {
+        String text = library.text("checks/left-out.csv");
+        if (text == null) {
+            return List.of();
+        }
+        CSVFormat format = CSVFormat.DEFAULT.builder()
+                .setCommentMarker('#')
+                .setHeader()
+                .setSkipHeaderRecord(true)
+                .setTrim(true)
+                .get();
+        try (CSVParser parser = format.parse(new StringReader(text))) {
+            return parser.stream()
+                    .filter(row -> row.get("method").equals(method) && row.get("why").contains("known to be off"))
+                    .map(row -> List.of(row.get("id"), row.get("why")))
+                    .toList();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
     /**
      * Reads check values.
      *

@@ -77,6 +77,9 @@ public final class Job {
                 .map(verification::run)
                 .toList();
         List<List<String>> rows = outcomes.stream().map(CheckOutcome::printed).toList();
-        return new SoftwareStatement(version, texts, CheckOutcome.counts(outcomes), rows);
+        List<List<String>> off = used.keySet().stream()
+                .flatMap(method -> CheckRow.knownToBeOff(methods.library(), method).stream())
+                .toList();
+        return new SoftwareStatement(version, texts, CheckOutcome.counts(outcomes), rows, off);
     }
 }

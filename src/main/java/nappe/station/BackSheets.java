@@ -121,6 +121,8 @@ final class BackSheets {
         texts(sheet, "Method sheets used", List.of("Method", "Hash of its text"), List.of(40, 30), statement.methods());
         texts(sheet, "Check values run for these methods when this package was made",
                 List.of("Method", "Kind", "Rows", "Met"), List.of(40, 30, 12, 12), statement.counts());
+        texts(sheet, "Check values at hand that are known to disagree, and are not run",
+                List.of("Check value", "Why"), List.of(40, 60), statement.off());
         sheet.note("Kinds: published, a number printed by somebody else; library, a general-purpose library that was run; derived, a second"
                 + " evaluation of the same theory, which guards the coding and not the theory; memory, not confirmed.");
         texts(sheet, "Each check value",

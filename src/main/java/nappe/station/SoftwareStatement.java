@@ -9,5 +9,6 @@ import java.util.List;
  * @param counts check values by method and kind, in words
  * @param rows the check values: id, method and entries, target, computed, expected, tolerance,
  *     source, verdict
+ * @param off check values at hand that disagree and are not run: id and why
  */
-public record SoftwareStatement(String version, List<List<String>> methods, List<List<String>> counts, List<List<String>> rows) {}
+public record SoftwareStatement(String version, List<List<String>> methods, List<List<String>> counts, List<List<String>> rows, List<List<String>> off) {}
