@@ -4,7 +4,23 @@ package nappe.source;
 public final class TableException extends RuntimeException {
     private static final long serialVersionUID = 1L;
 
+    private static final String MARK = " (fault: ";
+
     public TableException(String message) {
         super(message);
+    }
+
+    /** The message without its code. */
+    public String fault() {
+        return getMessage().substring(0, mark());
+    }
+
+    /** Stable and searchable: "row-length". */
+    public String code() {
+        return getMessage().substring(mark() + MARK.length(), getMessage().length() - 1);
+    }
+
+    private int mark() {
+        return getMessage().lastIndexOf(MARK);
     }
 }
