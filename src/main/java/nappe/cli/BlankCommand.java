@@ -12,6 +12,7 @@ import java.util.concurrent.Callable;
 import nappe.input.BlankWriter;
 import nappe.input.Tags;
 import nappe.unit.WorkingSystem;
+import org.jspecify.annotations.Nullable;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -37,7 +38,7 @@ final class BlankCommand implements Callable<Integer> {
     private String units = "US";
 
     @Option(names = "-o", paramLabel = "FILE", description = "the file to write; it must not be there yet")
-    private Path file;
+    private @Nullable Path file;
 
     @Option(names = "--methods", description = "list the methods and write nothing")
     private boolean list;
@@ -55,14 +56,15 @@ final class BlankCommand implements Callable<Integer> {
             return ExitStatus.DONE;
         }
         List<BlankWriter.Chosen> chosen = chosen(desk);
-        if (file == null) {
+        Path target = file;
+        if (target == null) {
             throw usage("name the file to write: -o station.xlsx");
         }
-        if (Files.exists(file)) {
-            throw new Refusal(ExitStatus.WRONG_USAGE, file + " is there already; it is not written over. Name another file.");
+        if (Files.exists(target)) {
+            throw new Refusal(ExitStatus.WRONG_USAGE, target + " is there already; it is not written over. Name another file.");
         }
-        BlankWriter.write(file, system(), chosen, desk.methods());
-        spec.commandLine().getOut().println("Wrote " + file + ". Fill it in, then: nappe inspect " + file);
+        BlankWriter.write(target, system(), chosen, desk.methods());
+        spec.commandLine().getOut().println("Wrote " + target + ". Fill it in, then: nappe inspect " + target);
         return ExitStatus.DONE;
     }
 

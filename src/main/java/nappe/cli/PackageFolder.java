@@ -68,7 +68,7 @@ final class PackageFolder {
     }
 
     void write(Map<String, byte[]> files, Furniture furniture) throws IOException {
-        Path parent = path.toAbsolutePath().getParent();
+        Path parent = java.util.Objects.requireNonNull(path.toAbsolutePath().getParent());
         if (Files.exists(parent) && !Files.isDirectory(parent)) {
             throw new Refusal(ExitStatus.WRONG_USAGE, parent + " is a file, not a folder; name a folder with -o");
         }

@@ -95,7 +95,7 @@ public final class DimensionReading implements Reading<DimensionReading.Outcome>
         try {
             return symbols.apply(name);
         } catch (FormulaException e) {
-            throw new FormulaException(e.getMessage(), offsets.getOrDefault(node, 0), name.length(), e.code());
+            throw new FormulaException(String.valueOf(e.getMessage()), offsets.getOrDefault(node, 0), name.length(), e.code());
         }
     }
 

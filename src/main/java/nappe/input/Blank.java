@@ -19,10 +19,10 @@ import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /** The sheets of one blank, in their order. */
 final class Blank {
-    private static final int CASE_ROWS = 24;
-    private static final String REQUIRED = "required";
-    private static final String OPTIONAL = "optional";
-    private static final String FRAMES = "Write only into the cells with a frame. ";
+    static final int ROWS = 24;
+    static final String REQUIRED = "required";
+    static final String OPTIONAL = "optional";
+    static final String FRAMES = "Write only into the cells with a frame. ";
 
     private final XSSFWorkbook workbook;
     private final WorkingSystem system;
@@ -30,6 +30,7 @@ final class Blank {
     private final MethodCatalogue methods;
     private final BlankStyles styles;
     private final DropDowns lists = new DropDowns();
+    private final Offers offers = new Offers(lists);
     private final List<BlankSheet> sheets = new ArrayList<>();
 
     Blank(XSSFWorkbook workbook, WorkingSystem system, List<Chosen> elements, MethodCatalogue methods) {
@@ -42,7 +43,8 @@ final class Blank {
 
     void write() {
         project();
-        flows();
+        FlowsBlank flows = new FlowsBlank(system, elements, methods);
+        flows.write(sheet(Layout.FLOWS, "Flow cases", flows.widths()), styles, offers);
         elements.forEach(this::element);
         demands();
         list(Layout.ASSUMPTIONS, 30, Layout.ASSUMPTION_HEADS, List.of(REQUIRED, OPTIONAL, OPTIONAL, REQUIRED),
@@ -105,84 +107,10 @@ final class Blank {
             case STATUS -> sheet.offer(row, row, 1, lists.range(label.text(), Layout.STATUSES), true);
             case SYSTEM -> sheet.offer(row, row, 1, lists.range(label.text(), Layout.SYSTEMS), true);
             case PAPER -> sheet.offer(row, row, 1, lists.range(label.text(), Layout.PAPERS), true);
-            case FLOW_UNIT -> sheet.offer(row, row, 1, units(system.coherentUnit(Dimension.FLOW)), false);
-            case HEAD_UNIT -> sheet.offer(row, row, 1, units(system.coherentUnit(Dimension.LENGTH)), false);
+            case FLOW_UNIT -> sheet.offer(row, row, 1, offers.units(system.coherentUnit(Dimension.FLOW)), false);
+            case HEAD_UNIT -> sheet.offer(row, row, 1, offers.units(system.coherentUnit(Dimension.LENGTH)), false);
             case SEAL -> sheet.offer(row, row, 1, lists.range("Yes or no", Layout.YES), true);
             default -> {}
-        }
-    }
-
-    private String units(Unit unit) {
-        String measured = UnitOffer.measured(unit);
-        return lists.range("Units of " + measured,
-                UnitOffer.offered(unit).stream().map(Unit::text).sorted().toList());
-    }
-
-    /** A column of the sheet Flows. */
-    private record FlowColumn(String head, int width, String mark, boolean number, String filled) {}
-
-    private void flows() {
-        Unit flow = system.coherentUnit(Dimension.FLOW);
-        Unit level = system.coherentUnit(Dimension.LENGTH);
-        List<FlowColumn> columns = new ArrayList<>();
-        for (String head : Layout.FLOW_HEADS) {
-            columns.add(switch (head) {
-                case "Case" -> new FlowColumn(head, 26, REQUIRED, false, "");
-                case "Flow" -> new FlowColumn(head, 12, REQUIRED, true, "");
-                case "Flow unit" -> new FlowColumn(head, 10, REQUIRED, false, system == WorkingSystem.US ? "MGD" : "L/s");
-                case "Water level downstream" -> new FlowColumn(head, 13, OPTIONAL, true, "");
-                case "Water level unit" -> new FlowColumn(head, 10, OPTIONAL, false, level.text());
-                case "Source or basis" -> new FlowColumn(head, 36, OPTIONAL, false, "");
-                case "Standing" -> new FlowColumn(head, 11, REQUIRED, false, "");
-                default -> new FlowColumn(head, 14, OPTIONAL, false, "");
-            });
-        }
-        List<Declared> perCase = new ArrayList<>();
-        for (Chosen element : elements) {
-            for (Declared declared : methods.declared(element.method())) {
-                if (declared.kind() == Declared.Kind.CASE) {
-                    perCase.add(declared);
-                    String head = element.tag() + "." + declared.symbol();
-                    String mark = declared.optional() ? OPTIONAL : REQUIRED;
-                    boolean quantity = declared.words().isEmpty();
-                    columns.add(new FlowColumn(head, 12, mark, quantity, ""));
-                    columns.add(new FlowColumn(head + Layout.UNIT_OF, 12, quantity ? mark : OPTIONAL, false,
-                            UnitOffer.first(declared.unit(), system).text()));
-                }
-            }
-        }
-        BlankSheet sheet = sheet(Layout.FLOWS, "Flow cases",
-                columns.stream().mapToInt(FlowColumn::width).toArray());
-        List<String> lines = new ArrayList<>(List.of(
-                FRAMES + "One case a row; a case is one flow with one water level downstream, under a name of its own.",
-                "The same flow may stand in several cases. Rows without a name and a flow are passed over."));
-        perCase.forEach(d -> lines.add(d.symbol() + ": " + d.label() + ", for each case."));
-        sheet.lines(lines);
-        sheet.marks(columns.stream().map(FlowColumn::mark).toList());
-        sheet.head(columns.stream().map(FlowColumn::head).toList(), true);
-        List<XSSFCellStyle> cellStyles = columns.stream()
-                .map(c -> c.number() ? styles.numberEntry : styles.textEntry)
-                .toList();
-        int first = sheet.line(columns.stream().map(FlowColumn::filled).toList(), cellStyles);
-        int last = first;
-        while (last < first + CASE_ROWS - 1) {
-            last = sheet.line(columns.stream().map(FlowColumn::filled).toList(), cellStyles);
-        }
-        int at = Layout.FLOW_HEADS.indexOf("Flow");
-        sheet.number(first, last, at, Sign.POSITIVE, "Flow", "Flow of the case, greater than zero.");
-        sheet.offer(first, last, at + 1, units(flow), false);
-        sheet.number(first, last, at + 2, Sign.ANY, "Water level downstream",
-                "Level of the receiving water; blank where there is none.");
-        sheet.offer(first, last, at + 3, units(level), false);
-        sheet.offer(first, last, Layout.FLOW_HEADS.indexOf("Standing"),
-                lists.range("Standing", Layout.STANDINGS), true);
-        int column = Layout.FLOW_HEADS.size();
-        for (Declared declared : perCase) {
-            asks(sheet, first, last, column, declared);
-            if (declared.words().isEmpty()) {
-                sheet.offer(first, last, column + 1, units(declared.unit()), false);
-            }
-            column += 2;
         }
     }
 
@@ -215,21 +143,11 @@ final class Blank {
                             styles.textEntry,
                             styles.textEntry,
                             styles.label));
-            asks(sheet, row, row, 2, declared);
+            offers.entry(sheet, row, row, 2, declared);
             if (quantity) {
-                sheet.offer(row, row, 3, units(declared.unit()), false);
+                sheet.offer(row, row, 3, offers.units(declared.unit()), false);
             }
-            sheet.offer(row, row, 5, lists.range("Standing", Layout.STANDINGS), true);
-        }
-    }
-
-    private void asks(BlankSheet sheet, int firstRow, int lastRow, int column, Declared declared) {
-        if (declared.words().isEmpty()) {
-            String prompt = declared.label() + ". " + (declared.optional() ? "May stay blank. " : "")
-                    + "Write " + UnitOffer.measured(declared.unit()) + ", " + declared.sign().words() + ".";
-            sheet.number(firstRow, lastRow, column, declared.sign(), declared.symbol(), prompt);
-        } else {
-            sheet.offer(firstRow, lastRow, column, lists.range(declared.symbol(), declared.words()), true);
+            offers.standing(sheet, row, row, 5);
         }
     }
 
@@ -242,11 +160,8 @@ final class Blank {
         sheet.head(Layout.DEMAND_HEADS, true);
         List<XSSFCellStyle> cellStyles = new ArrayList<>(Collections.nCopies(7, styles.textEntry));
         cellStyles.set(3, styles.numberEntry);
-        int first = sheet.line(Collections.nCopies(7, ""), cellStyles);
-        int last = first;
-        while (last < first + CASE_ROWS - 1) {
-            last = sheet.line(Collections.nCopies(7, ""), cellStyles);
-        }
+        int first = sheet.rows(ROWS, Collections.nCopies(7, ""), cellStyles);
+        int last = first + ROWS - 1;
         sheet.offer(first, last, 0, lists.range("Tags", elements.stream().map(Chosen::tag).toList()), true);
         sheet.offer(first, last, 2, lists.range("At most or at least", Layout.SIDES), true);
         sheet.number(first, last, 3, Sign.ANY, "Value", "The value demanded.");
@@ -259,10 +174,7 @@ final class Blank {
         sheet.marks(marks);
         sheet.head(heads, true);
         List<XSSFCellStyle> cellStyles = Collections.nCopies(heads.size(), styles.textEntry);
-        int first = sheet.line(Collections.nCopies(heads.size(), ""), cellStyles);
-        for (int i = 1; i < rows; i++) {
-            sheet.line(Collections.nCopies(heads.size(), ""), cellStyles);
-        }
+        int first = sheet.rows(rows, Collections.nCopies(heads.size(), ""), cellStyles);
         if (heads.contains("Open or closed")) {
             sheet.offer(first, first + rows - 1, heads.indexOf("Open or closed"),
                     lists.range("Open or closed", Layout.OPEN), true);

@@ -17,6 +17,7 @@ import org.apache.poi.xssf.usermodel.XSSFDataValidationHelper;
 import org.apache.poi.xssf.usermodel.XSSFRow;
 import org.apache.poi.xssf.usermodel.XSSFSheet;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
+import org.jspecify.annotations.Nullable;
 
 /** One sheet of a blank as it is written from the top down. */
 final class BlankSheet {
@@ -83,13 +84,22 @@ final class BlankSheet {
         }
     }
 
-    /** The next row, as high as its texts need. */
+    /** The next row, as high as its texts need; returns its number. */
     int line(List<String> texts, List<XSSFCellStyle> cellStyles) {
         XSSFRow row = row(height(texts));
         for (int i = 0; i < texts.size(); i++) {
             cell(row, i, cellStyles.get(i), texts.get(i));
         }
         return next - 1;
+    }
+
+    /** So many rows alike; returns the first. */
+    int rows(int count, List<String> texts, List<XSSFCellStyle> cellStyles) {
+        int first = next;
+        for (int i = 0; i < count; i++) {
+            line(texts, cellStyles);
+        }
+        return first;
     }
 
     /** Offers the words of a range; others are refused, or only remarked on. */
@@ -141,7 +151,7 @@ final class BlankSheet {
         sheet.getFooter().setRight("Page &P of &N");
     }
 
-    private DataValidationConstraint decimal(int operator, String first, @org.jspecify.annotations.Nullable String second) {
+    private DataValidationConstraint decimal(int operator, String first, @Nullable String second) {
         return helper().createNumericConstraint(ValidationType.DECIMAL, operator, first, second);
     }
 

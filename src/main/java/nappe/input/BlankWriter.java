@@ -18,7 +18,8 @@ import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /** Writes the input workbook for chosen elements, to be filled in. */
 public final class BlankWriter {
-    static {
+    /** Keeps the logging of the spreadsheet library off standard output, unless somebody has set it up. */
+    static void quietLogging() {
         if (System.getProperty("log4j.provider") == null) {
             System.setProperty("log4j.provider", "org.apache.logging.log4j.simple.internal.SimpleProvider");
             System.setProperty("org.apache.logging.log4j.simplelog.level", "OFF");
@@ -44,6 +45,7 @@ public final class BlankWriter {
     }
 
     static byte[] bytes(WorkingSystem system, List<Chosen> elements, MethodCatalogue methods) throws IOException {
+        quietLogging();
         check(elements, methods);
         LocaleUtil.setUserLocale(Locale.ROOT);
         try (XSSFWorkbook workbook = new XSSFWorkbook()) {

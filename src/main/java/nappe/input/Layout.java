@@ -104,7 +104,7 @@ final class Layout {
             "PROJECT", "FLOWS", "DEMANDS", "LISTS", "REVISION", "HISTORY", "COVER", "INDEX", "SUMMARY", "GEOMETRY",
             "SKETCH", "METHOD", "METHODS", "LIMITS", "WORKED", "CASES", "PROFILE", "PROFILES", "RATING", "RATINGS",
             "SCREEN", "SIZES", "CARD", "ASBUILT", "SOFTWARE", "CHECKER", "CHECK", "CHECKS", "TRIAL", "TRIALS", "TABLE",
-            "TABLES", "CONSTANT", "UNITS", "LEVELS", "STATION", "TRUE", "FALSE");
+            "TABLES", "CONSTANT", "UNITS", "LEVELS", "STATION", "ENTRIES", "REGISTER", "FAULTS", "TRUE", "FALSE");
 
     private Layout() {}
 

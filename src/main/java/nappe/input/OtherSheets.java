@@ -17,10 +17,12 @@ import org.jspecify.annotations.Nullable;
 /** Reads the lists beside the station: demands, assumptions, references, requirements, revisions. */
 final class OtherSheets {
     private final Entries entries;
+    private final Quantities quantities;
     private final Faults faults;
 
     OtherSheets(Entries entries, Faults faults) {
         this.entries = entries;
+        this.quantities = new Quantities(entries);
         this.faults = faults;
     }
 
@@ -48,7 +50,7 @@ final class OtherSheets {
         }
         String citation = entries.requiredText(row.field("Citation"), "the citation", Entries.LONGEST_TEXT);
         Typed typed = new Typed(
-                entries.number(value, "the value demanded", Sign.ANY),
+                quantities.number(value, "the value demanded", Sign.ANY),
                 anyUnit(row.field("Unit")),
                 citation,
                 "known",
@@ -59,7 +61,7 @@ final class OtherSheets {
 
     /** A unit of any kind: what a demanded result measures is known only where it is calculated. */
     private Unit anyUnit(Field field) {
-        String text = entries.unitText(field, "the value demanded", Unit.one());
+        String text = quantities.unitText(field, "the value demanded", Unit.one());
         try {
             return text.isEmpty() ? Unit.one() : Unit.parse(text);
         } catch (UnitException | ArithmeticException | NumberFormatException e) {

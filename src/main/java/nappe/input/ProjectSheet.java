@@ -24,6 +24,7 @@ final class ProjectSheet {
     private final MethodCatalogue methods;
     private final Entries entries;
     private final Faults faults;
+    private final Quantities quantities;
     private final Map<Label, Field> fields = new EnumMap<>(Label.class);
 
     ProjectSheet(RawSheet sheet, MethodCatalogue methods, Entries entries, Faults faults) {
@@ -31,6 +32,7 @@ final class ProjectSheet {
         this.methods = methods;
         this.entries = entries;
         this.faults = faults;
+        this.quantities = new Quantities(entries);
     }
 
     /** What the labels say, or null where one of them is missing. */
@@ -115,7 +117,7 @@ final class ProjectSheet {
             Field tagField = row.field("Tag");
             String tag = tag(tagField, tags);
             String method = method(row.field("Method"));
-            String title = entries.text(row.field("Title"), "the title", Entries.LONGEST_NAME);
+            String title = entries.text(row.field("Title"), "the title", Entries.LONGEST_TITLE);
             if (!tag.isEmpty() && !method.isEmpty()) {
                 elements.add(new Named(tag, method, title.isEmpty() ? methods.title(method) : title, tagField));
             }
@@ -174,6 +176,6 @@ final class ProjectSheet {
     }
 
     private Unit unit(Label label, Unit declared) {
-        return entries.unit(field(label), label.text(), declared);
+        return quantities.unit(field(label), label.text(), declared);
     }
 }

@@ -13,9 +13,11 @@ final class TypedReader {
     record Backing(String source, String standing) {}
 
     private final Entries entries;
+    private final Quantities quantities;
 
     TypedReader(Entries entries) {
         this.entries = entries;
+        this.quantities = new Quantities(entries);
     }
 
     /** Source and standing; the standing must be given where something is typed. */
@@ -46,13 +48,13 @@ final class TypedReader {
         boolean blank = value.isBlank();
         Value number = new Value.None(Value.NOT_GIVEN);
         if (!blank) {
-            number = entries.number(value, what, sign);
+            number = quantities.number(value, what, sign);
         } else if (!optional) {
             entries.missing(value, what, "write a number"
                     + (sign == Sign.ANY ? "" : ", " + sign.words() + ",")
                     + (declared.dimension().isNone() ? "" : " of " + UnitOffer.examples(declared)));
         }
-        Unit unit = blank && unitField.isBlank() ? declared : entries.unit(unitField, what, declared);
+        Unit unit = blank && unitField.isBlank() ? declared : quantities.unit(unitField, what, declared);
         return new Typed(number, unit, backing.source(), backing.standing(), value.origin());
     }
 }

@@ -51,11 +51,11 @@ public final class MethodReader {
             } catch (FormulaException e) {
                 reader.spoil();
                 if (!e.code().equals(SheetDraft.FOLLOWS)) {
-                    draft.faults.add(statement.fault(reader.base() + e.offset(), e.getMessage(), e.code()));
+                    draft.faults.add(statement.fault(reader.base() + e.offset(), String.valueOf(e.getMessage()), e.code()));
                 }
             } catch (UnitException e) {
                 reader.spoil();
-                draft.faults.add(statement.fault(reader.base(), e.getMessage(), "unit-unknown"));
+                draft.faults.add(statement.fault(reader.base(), String.valueOf(e.getMessage()), "unit-unknown"));
             } catch (TableException e) {
                 reader.spoil();
                 draft.faults.add(statement.fault(reader.base(), e.fault(), e.code()));

@@ -6,21 +6,20 @@ public final class TableException extends RuntimeException {
 
     private static final String MARK = " (fault: ";
 
+    private final String message;
+
     public TableException(String message) {
         super(message);
+        this.message = message;
     }
 
     /** The message without its code. */
     public String fault() {
-        return getMessage().substring(0, mark());
+        return message.substring(0, message.lastIndexOf(MARK));
     }
 
     /** Stable and searchable: "row-length". */
     public String code() {
-        return getMessage().substring(mark() + MARK.length(), getMessage().length() - 1);
-    }
-
-    private int mark() {
-        return getMessage().lastIndexOf(MARK);
+        return message.substring(message.lastIndexOf(MARK) + MARK.length(), message.length() - 1);
     }
 }

@@ -71,11 +71,19 @@ public final class PackageLayout {
         SheetDraft entrySheet = draft("Entries", "Entries and demands, with sources", "what was typed, in its unit and in working units");
         SheetDraft constantSheet = draft("Constants", "Constants and conversion factors", "cited numbers and factors in use");
         SheetDraft tableSheet = draft("Tables", "Cited tables", "published coefficients that the lines look up");
+        SheetDraft standingSheet = hasRemarks()
+                ? draft("Standing", "Standing of the tabled numbers", "row by row: what was read where, what is from memory")
+                : tableSheet;
         Map<String, SheetDraft> elementSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> ratingSheets = new LinkedHashMap<>();
         for (Design.Element element : design.elements()) {
             String title = element.tag() + "  " + EntriesSheet.title(element, method(element));
-            elementSheets.put(element.tag(), draft(element.tag(), title, "method, one case worked in full, every case, limits"));
+            SheetDraft methodSheet = draft(
+                    element.tag() + " method", element.tag() + "  Method and limits of use", "what the method says, and where it holds");
+            method(element).about().forEach(methodSheet::note);
+            methodSheet.heading("Cautions");
+            method(element).cautions().forEach(methodSheet::caution);
+            elementSheets.put(element.tag(), draft(element.tag(), title, "one case worked in full, every case, limits"));
             if (!method(element).ratings().isEmpty()) {
                 ratingSheets.put(element.tag(), draft(
                         element.tag() + " rating", element.tag() + "  Rating table", "flow for equal steps of head, over the usable range"));
@@ -87,7 +95,7 @@ public final class PackageLayout {
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
 
         Cells cells = new Cells(design.project().system(), constantSheet);
-        Sources sources = new Sources(cells, constantSheet, tableSheet);
+        Sources sources = new Sources(cells, constantSheet, tableSheet, standingSheet);
         List<MethodSheet> distinct = methods.values().stream().distinct().toList();
         Map<String, Map<String, Cell>> constants = sources.layConstants(distinct);
         CasesSheet cases = new CasesSheet(cells, caseSheet, design.cases());
@@ -114,9 +122,6 @@ public final class PackageLayout {
             Scope scope = java.util.Objects.requireNonNull(scopes.get(element.tag()));
             List<Scope> caseScopes = caseScopes(element, method, scope, cases, below, downstream);
             SheetDraft sheet = java.util.Objects.requireNonNull(elementSheets.get(element.tag()));
-            method.about().forEach(sheet::note);
-            method.cautions().forEach(sheet::caution);
-            sheet.gap();
             limits.addAll(new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes)
                     .lay(workedCase(), demanded(element, demands)));
             SheetDraft ratingSheet = ratingSheets.get(element.tag());
@@ -142,6 +147,13 @@ public final class PackageLayout {
             sheets.add(drafts.get(i).finish(i + 1));
         }
         return new Layout(List.copyOf(sheets), List.copyOf(cells.all()), ratings);
+    }
+
+    private boolean hasRemarks() {
+        return methods.values().stream()
+                .flatMap(method -> method.tables().values().stream())
+                .flatMap(table -> table.columns().stream())
+                .anyMatch(Sources::isRemark);
     }
 
     private MethodSheet method(Design.Element element) {

@@ -14,21 +14,21 @@ import org.apache.poi.xssf.usermodel.XSSFSheet;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /** Fills in a blank by head words and labels, as an engineer would by hand. */
-final class Filler {
+public final class Filler {
     private final XSSFWorkbook workbook;
 
-    Filler(byte[] blank) throws IOException {
+    public Filler(byte[] blank) throws IOException {
         workbook = new XSSFWorkbook(new ByteArrayInputStream(blank));
     }
 
     /** The value of a label of the sheet Project. */
-    Filler project(String label, String value) {
+    public Filler project(String label, String value) {
         XSSFSheet sheet = workbook.getSheet("Project");
         return put(cell(sheet, rowOf(sheet, 0, label), 1), value);
     }
 
     /** An entry of an element: value, unit, source, standing; null leaves what is there. */
-    Filler entry(String tag, String symbol, Object value, String unit, String source, String standing) {
+    public Filler entry(String tag, String symbol, Object value, String unit, String source, String standing) {
         XSSFSheet sheet = workbook.getSheet(tag);
         int row = rowOf(sheet, 0, symbol);
         put(cell(sheet, row, 2), value);
@@ -38,7 +38,7 @@ final class Filler {
     }
 
     /** The next free row of a list, by its columns from the left; null leaves what is there. */
-    Filler row(String name, Object... values) {
+    public Filler row(String name, Object... values) {
         XSSFSheet sheet = workbook.getSheet(name);
         int row = rowOf(sheet, 0, heads(name).get(0)) + 1;
         while (!text(sheet, row, 0).isEmpty()) {
@@ -51,22 +51,22 @@ final class Filler {
     }
 
     /** The cell at an address, made if need be. */
-    XSSFCell cell(String sheet, String address) {
+    public XSSFCell cell(String sheet, String address) {
         org.apache.poi.ss.util.CellReference reference = new org.apache.poi.ss.util.CellReference(address);
         return cell(workbook.getSheet(sheet), reference.getRow(), reference.getCol());
     }
 
-    Filler set(String sheet, String address, Object value) {
+    public Filler set(String sheet, String address, Object value) {
         return put(cell(sheet, address), value);
     }
 
-    Filler change(Consumer<XSSFWorkbook> change) {
+    public Filler change(Consumer<XSSFWorkbook> change) {
         change.accept(workbook);
         return this;
     }
 
     /** Shows the number of a cell by a format of one's own. */
-    Filler format(String sheet, String address, String format) {
+    public Filler format(String sheet, String address, String format) {
         CellStyle style = workbook.createCellStyle();
         style.cloneStyleFrom(cell(sheet, address).getCellStyle());
         style.setDataFormat(workbook.createDataFormat().getFormat(format));
@@ -74,13 +74,13 @@ final class Filler {
         return this;
     }
 
-    byte[] bytes() throws IOException {
+    public byte[] bytes() throws IOException {
         ByteArrayOutputStream out = new ByteArrayOutputStream();
         workbook.write(out);
         return FixedZip.of(out.toByteArray());
     }
 
-    Path save(Path file) throws IOException {
+    public Path save(Path file) throws IOException {
         return Files.write(file, bytes());
     }
 

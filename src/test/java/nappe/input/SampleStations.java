@@ -48,7 +48,8 @@ public final class SampleStations {
         return new Filler(BlankWriter.bytes(system, List.of(new Chosen(tag, method)), METHODS));
     }
 
-    static Filler headworks() throws IOException {
+    /** The headworks, open to changes. */
+    public static Filler headworks() throws IOException {
         String brief = "Invented design brief DB-3, table 2";
         String river = "Invented river study RS-1, table 4";
         return filler(WorkingSystem.US, "F1", "parshall-flume")
@@ -91,7 +92,8 @@ public final class SampleStations {
                 .row("Revisions", "A", "2030-03-14", "First issue, preliminary.");
     }
 
-    static Filler weir() throws IOException {
+    /** The weir, open to changes. */
+    public static Filler weir() throws IOException {
         String log = "Invented pump schedule PS-2";
         return filler(WorkingSystem.SI, "W1", "rectangular-weir")
                 .project("Project", "Lantern Fen treatment plant, return water (fictional)")

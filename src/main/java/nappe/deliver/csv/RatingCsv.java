@@ -1,5 +1,7 @@
 package nappe.deliver.csv;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.regex.Pattern;
@@ -24,14 +26,17 @@ import nappe.results.Results;
  * 0.36,"no result"
  * </pre>
  *
- * <p>Lines that start with {@code #} say what the table belongs to. Numbers have a point, all their digits and no
- * quotes; every text is quoted, and one that a spreadsheet program would run as a formula has an apostrophe before it.
+ * <p>Lines that start with {@code #} say what the table belongs to. Numbers have a point, twelve figures at most and
+ * no quotes; every text is quoted, and one that a spreadsheet program would run as a formula has an apostrophe before it.
  * Lines end in carriage return and line feed.
  */
 public final class RatingCsv {
     private static final String END = "\r\n";
     private static final Pattern WOULD_RUN = Pattern.compile("^\\s*[=+\\-@\\t\\r]");
     private static final Pattern WOULD_RUN_AFTER_A_CUT = Pattern.compile("([,;\\t]\\s*)([=+\\-@])");
+
+    /** More than any instrument needs, few enough that 0.1 + 0.2 is 0.3. */
+    private static final MathContext FIGURES = new MathContext(12);
 
     private final Results results;
 
@@ -97,7 +102,7 @@ public final class RatingCsv {
 
     private static String content(Value value) {
         if (value instanceof Value.Number number) {
-            return Digits.asTyped(number.value());
+            return Digits.asTyped(new BigDecimal(number.value()).round(FIGURES).doubleValue());
         }
         return quoted(value instanceof Value.Word word ? word.text() : ((Value.None) value).why());
     }

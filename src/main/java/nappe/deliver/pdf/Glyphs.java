@@ -20,6 +20,9 @@ import org.xhtmlrenderer.render.JustificationInfo;
  * character that no face has is drawn as a box and remembered.
  */
 final class Glyphs extends ITextTextRenderer {
+    private static final float ASCENT = 0.93f;
+    private static final float DESCENT = 0.26f;
+
     private final FaceResolver faces;
     private final SortedSet<Integer> missing = new TreeSet<>();
 
@@ -65,14 +68,16 @@ final class Glyphs extends ITextTextRenderer {
 
     private static final FontContext NO_CONTEXT = new FontContext() {};
 
-    /** Ascent and descent of the text face: those of its bounding box, which the renderer takes, are far too tall. */
+    /**
+     * Ascent and descent that hold capitals with accents and descenders. Together they must not be more than the line
+     * height of the style sheet: the renderer draws a line that reaches over the edge of a page on both pages.
+     */
     @Override
     public FSFontMetrics getFSFontMetrics(FontContext context, FSFont font, String text) {
-        BaseFont face = face(font);
         float size = font.getSize2D();
         return new ITextFSFontMetrics(
-                face.getFontDescriptor(BaseFont.ASCENT, size),
-                -face.getFontDescriptor(BaseFont.DESCENT, size),
+                ASCENT * size,
+                DESCENT * size,
                 -size / 4,
                 size / 12,
                 size / 10,

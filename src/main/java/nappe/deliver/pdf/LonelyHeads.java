@@ -2,6 +2,7 @@ package nappe.deliver.pdf;
 
 import java.util.HashSet;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 import org.w3c.dom.Element;
 import org.xhtmlrenderer.newtable.TableBox;
@@ -27,20 +28,22 @@ final class LonelyHeads {
 
     /** Marks such tables in the document that was laid out; true where there were any and it must be laid out again. */
     static boolean moved(ITextRenderer renderer) {
-        LonelyHeads heads = new LonelyHeads(renderer.getRootBox().getLayer().getPages());
-        heads.search(renderer.getRootBox(), -1);
+        Box root = Objects.requireNonNull(renderer.getRootBox());
+        LonelyHeads heads = new LonelyHeads(Objects.requireNonNull(root.getLayer()).getPages());
+        heads.search(root, -1);
         return heads.found;
     }
 
     /** Of each sheet only the first is moved, since that moves all that follows on the sheet. */
     private void search(Box box, int sheet) {
-        if (box instanceof TableBox table && !changed.contains(sheet) && isLonely(table)) {
+        if (box instanceof TableBox table) {
             Element element = table.getElement();
-            if (element != null && !element.getAttribute("class").endsWith(MOVED)) {
+            if (element != null && !changed.contains(sheet) && isLonely(table) && !isMoved(element)) {
                 element.setAttribute("class", element.getAttribute("class") + MOVED);
                 changed.add(sheet);
                 found = true;
             }
+            return;
         }
         for (int i = 0; i < box.getChildCount(); i++) {
             Box child = box.getChild(i);
@@ -53,6 +56,10 @@ final class LonelyHeads {
     private boolean isLonely(TableBox table) {
         TableRowBox first = table.getFirstBodyRow();
         return first != null && page(first.getAbsY()) != page(table.getAbsY());
+    }
+
+    private static boolean isMoved(Element element) {
+        return element.getAttribute("class").endsWith(MOVED);
     }
 
     private int page(int y) {

@@ -51,8 +51,12 @@ final class PdfWriting {
 
     private static List<String> warnings(Set<Integer> missing) {
         return missing.stream()
-                .map(character -> String.format(
-                        Locale.ROOT, "character U+%04X is in none of the typefaces; the PDF shows a box", character))
+                .map(character -> character == 0xFFFD
+                        ? "a control character or half a character in the input; the PDF shows a box"
+                        : String.format(
+                                Locale.ROOT,
+                                "character U+%04X is in none of the typefaces; the PDF shows a box",
+                                character))
                 .toList();
     }
 
@@ -68,7 +72,7 @@ final class PdfWriting {
 
         @Override
         public void preOpen(ITextRenderer renderer) {
-            PdfWriter writer = renderer.getWriter();
+            PdfWriter writer = java.util.Objects.requireNonNull(renderer.getWriter());
             writer.setViewerPreferences(PdfWriter.PageModeUseOutlines);
             writer.addViewerPreference(PdfName.DISPLAYDOCTITLE, com.lowagie.text.pdf.PdfBoolean.PDFTRUE);
             writer.getExtraCatalog().put(PdfName.LANG, new PdfString("en"));
@@ -77,7 +81,7 @@ final class PdfWriting {
 
         @Override
         public void onClose(ITextRenderer renderer) {
-            stamp(renderer.getWriter());
+            stamp(java.util.Objects.requireNonNull(renderer.getWriter()));
         }
 
         private void stamp(PdfWriter writer) {

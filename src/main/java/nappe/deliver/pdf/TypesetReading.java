@@ -67,7 +67,8 @@ final class TypesetReading implements Reading<Inline> {
 
     @Override
     public Inline summary(Formula.Summary summary) {
-        return names.apply(summary.kind() + "(" + summary.name() + ")");
+        return Inline.join(
+                Inline.ATOM, Inline.text(summary.kind() + "("), names.apply(summary.name()), Inline.text(")"));
     }
 
     @Override
@@ -90,7 +91,8 @@ final class TypesetReading implements Reading<Inline> {
     }
 
     private static Inline infix(Operator operator, Inline left, String sign, Inline right) {
-        return Inline.join(operator.binding(), left, Inline.text(sign), right);
+        Inline second = right.startsWithMinus() ? right.bracketed() : right;
+        return Inline.join(operator.binding(), left, Inline.text(sign), second);
     }
 
     private static Inline times(Inline left, Inline right) {
@@ -141,7 +143,7 @@ final class TypesetReading implements Reading<Inline> {
 
     private Inline part(Formula formula) {
         Inline part = formula.read(this);
-        return formula instanceof Formula.Logic ? part.bracketed() : part;
+        return formula instanceof Formula.Logic logic && !logic.kind().equals("not") ? part.bracketed() : part;
     }
 
     @Override

@@ -60,12 +60,13 @@ final class WorkedGrid {
 
     private View.GridRow row(Block.Line line) {
         Cell cell = cell(line);
+        List<View.Text> quantity = quantity(line, cell);
         return new View.GridRow(
                 "",
                 List.of(
                         cell("", line.code()),
-                        new View.GridCell("", 1, quantity(line, cell)),
-                        new View.GridCell("right low", 1, cell == null ? List.of() : List.of(result(line, cell))),
+                        new View.GridCell("", 1, quantity),
+                        new View.GridCell(quantity.size() > 1 ? "right low" : "right", 1, cell == null ? List.of() : List.of(result(line, cell))),
                         new View.GridCell("", 1, source(line, cell))));
     }
 
@@ -80,23 +81,52 @@ final class WorkedGrid {
         List<View.Text> texts = new ArrayList<>();
         texts.add(View.Text.plain("", line.description()));
         Formula formula = cell == null ? null : cell.formula();
+        boolean noted = !line.equation().isEmpty()
+                && (formula == null || !line.equation().equals(PlainReading.of(formula)));
+        if (noted) {
+            texts.add(View.Text.of("written", WrittenEquation.pieces(line.equation())));
+        }
         if (cell == null || formula == null) {
             return texts;
         }
-        if (!line.equation().isEmpty() && !line.equation().equals(PlainReading.of(formula))) {
-            texts.add(View.Text.plain("equation", line.equation()));
+        Inline inNumbers = numbers.of(cell, formula);
+        boolean conversion = SubstitutedReading.isConversion(cell, formula);
+        if (noted || conversion || handsOn(line, cell, formula) != null) {
+            if (!noted) {
+                texts.add(origin(line, cell, formula));
+            }
+            if (conversion) {
+                texts.add(View.Text.of("numbers", equation(List.of(), "= ", inNumbers)));
+            }
             return texts;
         }
         Inline inSymbols = TypesetReading.inSymbols(formula);
-        Inline inNumbers = numbers.of(cell, formula);
         List<Piece> left = line.symbol().isEmpty() ? List.of() : SymbolPrint.pieces(line.symbol());
-        String equals = left.isEmpty() ? "" : "\u00a0= ";
-        texts.add(View.Text.of("equation", equation(left, equals, inSymbols)));
+        texts.add(View.Text.of("equation", equation(left, left.isEmpty() ? "" : "\u00a0= ", inSymbols)));
         if (!inNumbers.plain().equals(inSymbols.plain())) {
             String again = line.kind() == Block.LineKind.LIMIT_VERDICT ? "" : "= ";
             texts.add(View.Text.of("numbers", equation(List.of(), again, inNumbers)));
         }
         return texts;
+    }
+
+    /** The cell whose content the line only hands on under the same symbol; null where it does more. */
+    private static @Nullable Cell handsOn(Block.Line line, Cell cell, Formula formula) {
+        return formula instanceof Formula.Symbol symbol
+                        && symbol.name().equals(line.symbol())
+                        && cell.references().get(symbol.name()) instanceof Cell origin
+                ? origin
+                : null;
+    }
+
+    private View.Text origin(Block.Line line, Cell cell, Formula formula) {
+        Cell origin = handsOn(line, cell, formula);
+        return origin == null
+                ? View.Text.plain("written", "brought into the working unit")
+                : new View.Text(
+                        "written",
+                        List.of(Piece.plain("from cell "), Piece.plain(links.address(origin))),
+                        links.to(origin));
     }
 
     private static List<Piece> equation(List<Piece> left, String equals, Inline right) {
@@ -135,7 +165,7 @@ final class WorkedGrid {
             String all = line.forAll() != null && lines.caseNames().size() > 1 ? ", all cases" : "";
             texts.add(new View.Text(
                     "small",
-                    List.of(Piece.plain(kind + "cell "), Piece.whole(links.address(cell)), Piece.plain(all)),
+                    List.of(Piece.plain(kind + "cell "), Piece.plain(links.address(cell)), Piece.plain(all)),
                     links.to(cell)));
         }
         return texts;

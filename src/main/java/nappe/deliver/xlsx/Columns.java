@@ -68,13 +68,16 @@ final class Columns {
         return List.of();
     }
 
+    /** Makes a column wide enough for a text that can't be broken. */
+    void fit(int column, String text) {
+        widen(column, (int) Math.ceil(TextWidth.of(text) + 2));
+    }
+
     private void widen(int column, int width) {
-        int fair = Math.max(NARROWEST, Math.min(WIDEST, width));
-        if (column == widths.size()) {
-            widths.add(fair);
-        } else {
-            widths.set(column, Math.max(widths.get(column), fair));
+        while (column >= widths.size()) {
+            widths.add(NARROWEST);
         }
+        widths.set(column, Math.max(widths.get(column), Math.min(WIDEST, width)));
     }
 
     /** All widths that are set, those of columns that only a text reaches included. */

@@ -9,6 +9,7 @@ import nappe.results.Furniture;
  */
 final class Margins {
     private static final int LONGEST = 250;
+    private static final String SMALL = "&8";
     private static final int FIELD = 60;
 
     private final Furniture furniture;
@@ -22,27 +23,24 @@ final class Margins {
     }
 
     String headLeft() {
-        return "Project " + field(furniture.project()) + "\nCalculation " + field(furniture.number());
+        return SMALL + "Project " + field(furniture.project()) + "\nCalculation " + field(furniture.number());
     }
 
     String headRight() {
-        return "Revision " + field(furniture.revision()) + ", " + furniture.status() + "\nSheet " + sheet.number()
+        return SMALL + "Revision " + field(furniture.revision()) + ", " + furniture.status() + "\nSheet " + sheet.number()
                 + " of " + sheets + ", page &P of &N";
     }
 
     String footLeft() {
-        StringBuilder text = new StringBuilder("Input fingerprint " + field(furniture.fingerprint()));
+        StringBuilder text = new StringBuilder(
+                SMALL + "Input fingerprint " + field(furniture.fingerprint()) + ", Nappe " + field(furniture.version()));
         for (String caution : furniture.cautions()) {
             String line = "\n" + doubled(caution);
-            if (text.length() + line.length() + footRight().length() < LONGEST) {
+            if (text.length() + line.length() < LONGEST) {
                 text.append(line);
             }
         }
         return text.toString();
-    }
-
-    String footRight() {
-        return "Nappe " + field(furniture.version());
     }
 
     private static String field(String text) {

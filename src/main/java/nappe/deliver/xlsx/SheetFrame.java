@@ -25,11 +25,13 @@ final class SheetFrame {
     private final XSSFWorkbook workbook;
     private final XSSFSheet sheet;
     private final SheetWriter content;
+    private final Canvas canvas;
 
     SheetFrame(XSSFWorkbook workbook, XSSFSheet sheet, SheetWriter content) {
         this.workbook = workbook;
         this.sheet = sheet;
         this.content = content;
+        this.canvas = content.canvas();
     }
 
     void set(Furniture furniture, int sheets) {
@@ -37,36 +39,35 @@ final class SheetFrame {
         panes();
         print(furniture, sheets);
         protect();
-        content.merged()
+        canvas.merged()
                 .forEach(row -> sheet.addMergedRegionUnsafe(
-                        new CellRangeAddress(row, row, 0, content.columns().span() - 1)));
-        content.links().forEach(this::link);
-        checkNumbers(content.numbersTyped());
+                        new CellRangeAddress(row, row, 0, canvas.columns().span() - 1)));
+        canvas.links().forEach(this::link);
+        checkNumbers(canvas.numbersTyped());
     }
 
     private void widths() {
-        List<Integer> widths = content.columns().widths();
+        List<Integer> widths = canvas.columns().widths();
         for (int i = 0; i < widths.size(); i++) {
             sheet.setColumnWidth(i, widths.get(i) * 256);
         }
         sheet.setDisplayGridlines(false);
     }
 
-    /** The rows that stay in sight, and come again on each printed page. */
-    private int rowsHeld() {
-        List<Integer> heads = content.heads();
-        return heads.size() == 1 && heads.get(0) < ROWS_HELD_AT_MOST ? heads.get(0) + 1 : SheetWriter.HEADER_ROWS;
-    }
-
+    /** The heads stay in sight where they stand near the top; else the title does, so that the sheet can be seen. */
     private void panes() {
-        sheet.createFreezePane(content.hasLines() ? COLUMNS_HELD : 0, rowsHeld());
-        sheet.setRepeatingRows(new CellRangeAddress(0, rowsHeld() - 1, -1, -1));
+        int head = content.mainHead();
+        boolean nearTop = head >= 0 && head < ROWS_HELD_AT_MOST;
+        sheet.createFreezePane(content.hasLines() ? COLUMNS_HELD : 0, nearTop ? head + 1 : 1);
+        int first = nearTop || head < 0 ? 0 : head;
+        int last = head < 0 ? SheetWriter.HEADER_ROWS - 1 : head;
+        sheet.setRepeatingRows(new CellRangeAddress(first, last, -1, -1));
     }
 
     private void print(Furniture furniture, int sheets) {
         PrintSetup setup = sheet.getPrintSetup();
         setup.setPaperSize(furniture.letterPaper() ? PrintSetup.LETTER_PAPERSIZE : PrintSetup.A4_PAPERSIZE);
-        setup.setLandscape(content.columns().total() > PORTRAIT_FITS);
+        setup.setLandscape(canvas.columns().total() > PORTRAIT_FITS);
         sheet.setFitToPage(true);
         setup.setFitWidth((short) 1);
         setup.setFitHeight((short) 0);
@@ -80,9 +81,8 @@ final class SheetFrame {
         sheet.getHeader().setLeft(margins.headLeft());
         sheet.getHeader().setRight(margins.headRight());
         sheet.getFooter().setLeft(margins.footLeft());
-        sheet.getFooter().setRight(margins.footRight());
         int index = workbook.getSheetIndex(sheet);
-        workbook.setPrintArea(index, 0, content.rows().lastColumn(), 0, content.rows().lastRow());
+        workbook.setPrintArea(index, 0, canvas.rows().lastColumn(), 0, canvas.rows().lastRow());
     }
 
     private void protect() {
@@ -94,7 +94,7 @@ final class SheetFrame {
         sheet.lockSelectUnlockedCells(false);
     }
 
-    private void link(SheetWriter.Link link) {
+    private void link(Canvas.Link link) {
         XSSFHyperlink hyperlink = workbook.getCreationHelper().createHyperlink(HyperlinkType.DOCUMENT);
         hyperlink.setLocation(link.to());
         hyperlink.setCellReference(link.from().address());

@@ -26,39 +26,25 @@ final class SheetWriter {
     /** Rows that the sheet's own header takes. */
     static final int HEADER_ROWS = 4;
 
-    private static final double LINE = 1.28;
-    private static final double AIR = 3;
-
-    /** A place that leads to another. */
-    record Link(Place from, String to) {}
-
     private final Results results;
     private final Sheet sheet;
-    private final Styles styles;
-    private final SharedTexts texts;
-    private final Columns columns;
-    private final SheetRows rows;
-    private final Set<Cell> written = new LinkedHashSet<>();
-    private final List<Integer> merged = new ArrayList<>();
+    private final Canvas canvas;
     private final List<Integer> heads = new ArrayList<>();
-    private final List<Link> links = new ArrayList<>();
+    private int headOfLines = -1;
 
     SheetWriter(Results results, Sheet sheet, Styles styles, SharedTexts texts) {
         this.results = results;
         this.sheet = sheet;
-        this.styles = styles;
-        this.texts = texts;
-        this.columns = Columns.of(sheet);
-        this.rows = new SheetRows(sheet.name());
+        this.canvas = new Canvas(results, sheet, styles, texts);
     }
 
     SheetWriter write() {
         header();
         for (Block block : sheet.blocks()) {
             if (block instanceof Block.Heading heading) {
-                wide(heading.row(), Role.HEADING, heading.text());
+                canvas.wide(heading.row(), Role.HEADING, Canvas.tidy(heading.text()));
             } else if (block instanceof Block.Note note) {
-                wide(note.row(), note.caution() ? Role.CAUTION : Role.NOTE, note.text());
+                canvas.wide(note.row(), note.caution() ? Role.CAUTION : Role.NOTE, Canvas.tidy(note.text()));
             } else if (block instanceof Block.Table table) {
                 table(table);
             } else if (block instanceof Block.WorkbookOnly only) {
@@ -72,21 +58,22 @@ final class SheetWriter {
 
     private void header() {
         Furniture furniture = results.furniture();
-        wide(0, Role.SHEET_TITLE, "Sheet " + sheet.number() + " of " + results.sheets().size() + "   " + sheet.title());
-        wide(1, Role.FURNITURE, furniture.project() + "   Calculation " + furniture.number() + "   Revision "
+        canvas.wide(0, Role.SHEET_TITLE, "Sheet " + sheet.number() + " of " + results.sheets().size() + "   " + sheet.title());
+        canvas.wide(1, Role.FURNITURE, furniture.project() + "   Calculation " + furniture.number() + "   Revision "
                 + furniture.revision() + ", " + furniture.date() + "   Status: " + furniture.status());
-        wide(2, Role.FURNITURE, String.join(" ", Stream.concat(
-                        Stream.of("Input fingerprint " + furniture.fingerprint() + ".", furniture.release()),
+        canvas.wide(2, Role.FURNITURE, String.join(" ", Stream.concat(
+                        Stream.of("Input fingerprint " + furniture.fingerprint(), furniture.release()),
                         furniture.cautions().stream())
                 .filter(text -> !text.isEmpty())
+                .map(text -> text.endsWith(".") ? text : text + ".")
                 .toList()));
-        rows.atLeast(3, 6);
+        canvas.gap(3, 6);
     }
 
     private void table(Block.Table table) {
         int row = table.row();
         if (!table.title().isEmpty()) {
-            wide(row++, Role.TABLE_TITLE, table.title());
+            canvas.wide(row++, Role.TABLE_TITLE, Canvas.tidy(table.title()));
         }
         head(row, table.columns());
         for (Block.Row items : table.rows()) {
@@ -98,30 +85,30 @@ final class SheetWriter {
         int row = items.stream()
                 .filter(Block.Content.class::isInstance)
                 .map(item -> ((Block.Content) item).cell())
-                .filter(this::isHere)
+                .filter(canvas::isHere)
                 .map(cell -> cell.place().row())
                 .findFirst()
                 .orElse(next);
         for (int i = 0; i < items.size(); i++) {
             item(row, i, items.get(i), i < heads.size() ? heads.get(i).align() : Align.LEFT);
         }
-        fill(row, Math.max(items.size(), heads.size()));
+        canvas.fill(row, Math.max(items.size(), heads.size()), Role.TEXT);
         return row;
     }
 
     private void item(int row, int column, Block.Item item, Align align) {
         if (item instanceof Block.Text text) {
-            text(row, column, Role.TEXT, align, text.text());
+            canvas.text(row, column, Role.TEXT, align, text.text());
         } else if (item instanceof Block.Symbol symbol) {
-            symbol(row, column, symbol.symbol(), align);
+            canvas.symbol(row, column, symbol.symbol(), align);
         } else if (item instanceof Block.Content content) {
-            cell(row, column, content.cell(), align, Role.RESULT);
+            canvas.cell(row, column, content.cell(), align, Role.RESULT);
         } else if (item instanceof Block.Equation equation) {
-            text(row, column, Role.TEXT, align, equation(equation.cell()));
+            canvas.text(row, column, Role.TEXT, align, EquationText.of(equation.cell()));
         } else if (item instanceof Block.Address address) {
-            link(row, column, align, address.cell().place().from(sheet.name()), address.cell().place().full());
+            canvas.link(row, column, align, address.cell().place().from(sheet.name()), address.cell().place().full());
         } else if (item instanceof Block.SheetLink link) {
-            link(row, column, align, link.number() + "  " + link.title(), new Place(link.sheetName(), 0, 0).full());
+            canvas.link(row, column, align, link.number() + "  " + link.title(), new Place(link.sheetName(), 0, 0).full());
         }
     }
 
@@ -129,183 +116,61 @@ final class SheetWriter {
         List<Block.Column> all = new ArrayList<>(Columns.OF_LINES);
         block.caseNames().forEach(name -> all.add(new Block.Column(name, 0, Align.RIGHT)));
         head(block.row(), all);
+        headOfLines = block.row();
         int row = block.row();
         for (Block.Line line : block.lines()) {
             row = Stream.concat(Stream.ofNullable(line.forAll()), line.perCase().stream())
-                    .filter(this::isHere)
+                    .filter(canvas::isHere)
                     .map(cell -> cell.place().row())
                     .findFirst()
                     .orElse(row + 1);
             line(row, line);
-            fill(row, all.size());
+            canvas.fill(row, all.size(), Role.TEXT);
         }
     }
 
     private void line(int row, Block.Line line) {
         Role role = line.kind() == Block.LineKind.HEADING ? Role.STRONG : Role.TEXT;
-        text(row, 0, role, Align.LEFT, line.code());
-        text(row, 1, role, Align.LEFT, line.description());
-        symbol(row, 2, line.symbol(), Align.LEFT);
-        text(row, 3, Role.TEXT, Align.LEFT, line.equation());
-        text(row, 4, Role.TEXT, Align.LEFT, line.unit());
-        text(row, 5, Role.TEXT, Align.LEFT, line.source());
+        canvas.text(row, 0, role, Align.LEFT, line.code());
+        canvas.text(row, 1, role, Align.LEFT, line.description());
+        canvas.symbol(row, 2, line.symbol(), Align.LEFT);
+        canvas.text(row, 3, Role.TEXT, Align.LEFT, EquationText.of(line));
+        canvas.text(row, 4, Role.TEXT, Align.LEFT, line.unit());
+        canvas.text(row, 5, Role.TEXT, Align.LEFT, line.source());
         Role result = line.kind() == Block.LineKind.LIMIT_VERDICT ? Role.VERDICT : Role.RESULT;
         Cell forAll = line.forAll();
         int column = Columns.OF_LINES.size() - 1;
         if (forAll != null) {
-            cell(row, column, forAll, Align.RIGHT, result);
+            canvas.cell(row, column, forAll, Align.RIGHT, result);
         }
         for (Cell cell : line.perCase()) {
-            cell(row, ++column, cell, Align.RIGHT, result);
+            canvas.cell(row, ++column, cell, Align.RIGHT, result);
         }
     }
 
     private void head(int row, List<Block.Column> heads) {
         this.heads.add(row);
         for (int i = 0; i < heads.size(); i++) {
-            text(row, i, Role.HEAD, heads.get(i).align(), heads.get(i).head());
+            canvas.text(row, i, Role.HEAD, heads.get(i).align(), heads.get(i).head());
         }
-    }
-
-    private void cell(int row, int column, Cell cell, Align align, Role role) {
-        Value value = results.value(cell);
-        if (!isHere(cell)) {
-            put(row, column, role, align, cell, new Filling.Live(cell.place().from(sheet.name()), value));
-            return;
-        }
-        Place place = cell.place();
-        if (!written.add(cell)) {
-            return;
-        }
-        switch (cell.kind()) {
-            case FORMULA -> put(place.row(), place.column(), role, align, cell,
-                    new Filling.Live(SpreadsheetReading.of(cell), value));
-            case ENTRY -> put(place.row(), place.column(), Role.ENTRY, align, cell, typed(value));
-            case CONSTANT, TABLE -> put(place.row(), place.column(), Role.CONSTANT, align, cell, typed(value));
-        }
-    }
-
-    private void put(int row, int column, Role role, Align align, Cell cell, Filling content) {
-        Value value = results.value(cell);
-        boolean isNumber = value instanceof Value.Number;
-        int style = isNumber ? styles.of(role, align, format(cell, value)) : styles.of(role, align);
-        rows.put(row, column, style, content);
-        grow(row, role, isNumber ? "" : SheetRows.words(value), columns.width(column));
-    }
-
-    private Filling typed(Value value) {
-        return value instanceof Value.Number number
-                ? new Filling.Typed(number.value())
-                : texts.text(SheetRows.words(value));
-    }
-
-    /** A result that is zero as issued is shown as typed: any other number would still have to be seen. */
-    private static String format(Cell cell, Value value) {
-        return cell.kind() == Cell.Kind.FORMULA && value instanceof Value.Number number && number.value() != 0
-                ? Digits.format(Digits.decimals(cell.unit(), number.value()))
-                : Styles.AS_TYPED;
-    }
-
-    private static String equation(Cell cell) {
-        Formula formula = cell.formula();
-        return formula != null
-                ? PlainReading.of(cell.symbol(), formula)
-                : switch (cell.kind()) {
-                    case ENTRY -> "entry";
-                    case CONSTANT -> "constant";
-                    case TABLE -> "cited table";
-                    case FORMULA -> "";
-                };
-    }
-
-    private void text(int row, int column, Role role, Align align, String text) {
-        if (!text.isEmpty()) {
-            rows.put(row, column, styles.of(role, align), texts.text(text));
-            grow(row, role, text, columns.width(column));
-        }
-    }
-
-    private void symbol(int row, int column, String symbol, Align align) {
-        if (!symbol.isEmpty()) {
-            rows.put(row, column, styles.of(Role.TEXT, align), texts.symbol(symbol));
-            grow(row, Role.TEXT, symbol, columns.width(column));
-        }
-    }
-
-    private void link(int row, int column, Align align, String text, String to) {
-        rows.put(row, column, styles.of(Role.LINK, align), texts.text(text));
-        grow(row, Role.LINK, text, columns.width(column));
-        links.add(new Link(new Place(sheet.name(), row, column), to));
-    }
-
-    /** A text over the width of the sheet, in a row of its own. */
-    private void wide(int row, Role role, String text) {
-        int style = styles.of(role, Align.LEFT);
-        rows.put(row, 0, style, texts.text(text));
-        for (int column = 1; column < columns.span(); column++) {
-            rows.fill(row, column, style);
-        }
-        grow(row, role, text, columns.spanWidth());
-        merged.add(row);
-    }
-
-    private void fill(int row, int width) {
-        for (int column = 0; column < width; column++) {
-            rows.fill(row, column, styles.of(Role.TEXT, Align.LEFT));
-        }
-    }
-
-    private void grow(int row, Role role, String text, int width) {
-        double larger = role.points() / (double) Styles.POINTS * (role.bold() ? 1.08 : 1);
-        int lines = TextWidth.lines(text, (width - 1.5) / larger);
-        rows.atLeast(row, Math.ceil(lines * role.points() * LINE + AIR));
-    }
-
-    private boolean isHere(Cell cell) {
-        return cell.place().sheet().equals(sheet.name());
+        canvas.fill(row, heads.size(), Role.HEAD);
     }
 
     Sheet sheet() {
         return sheet;
     }
 
-    SheetRows rows() {
-        return rows;
+    Canvas canvas() {
+        return canvas;
     }
 
-    Columns columns() {
-        return columns;
-    }
-
-    /** The cells that stand on this sheet. */
-    Set<Cell> written() {
-        return written;
-    }
-
-    /** Rows that hold one text over the width of the sheet. */
-    List<Integer> merged() {
-        return merged;
-    }
-
-    /** Rows that hold the heads of a table. */
-    List<Integer> heads() {
-        return heads;
-    }
-
-    List<Link> links() {
-        return links;
+    /** The row whose heads matter on every page: that of a calculation, or of the only table; -1 for none. */
+    int mainHead() {
+        return hasLines() ? headOfLines : heads.size() == 1 ? heads.get(0) : -1;
     }
 
     /** Whether a calculation stands here, whose first columns say what a row is about. */
     boolean hasLines() {
-        return sheet.blocks().stream().anyMatch(Block.Lines.class::isInstance);
-    }
-
-    /** The places where the engineer types a number. */
-    List<Place> numbersTyped() {
-        return written.stream()
-                .filter(cell -> cell.kind() == Cell.Kind.ENTRY && !(cell.typed() instanceof Value.Word))
-                .map(Cell::place)
-                .toList();
+        return headOfLines >= 0;
     }
 }

@@ -7,6 +7,7 @@ import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.time.LocalDateTime;
 import java.util.Map;
+import java.util.Objects;
 import java.util.TreeMap;
 import java.util.zip.ZipEntry;
 import java.util.zip.ZipInputStream;
@@ -37,7 +38,7 @@ final class Splice {
             ByteArrayOutputStream bytes = new ByteArrayOutputStream();
             try (ZipOutputStream zip = new ZipOutputStream(bytes, StandardCharsets.UTF_8)) {
                 for (String first : new String[] {"[Content_Types].xml", "_rels/.rels"}) {
-                    write(zip, first, parts.remove(first));
+                    write(zip, first, Objects.requireNonNull(parts.remove(first)));
                 }
                 for (Map.Entry<String, byte[]> part : parts.entrySet()) {
                     write(zip, part.getKey(), part.getValue());

@@ -192,9 +192,26 @@ public final class SpreadsheetReading implements Reading<Written> {
             case SAME -> new Written(
                     read(arguments.get(0)).within(ARITHMETIC) + "=" + read(arguments.get(1)).within(ARITHMETIC),
                     Written.CONDITION);
-            case IF, SQRT, EXP, LN, LOG10, SIN, COS, TAN, ASIN, ACOS, ATAN, TANH, ABS, MIN, MAX, INDEX, SMALL ->
+            case INDEX -> index(arguments);
+            case IF, SQRT, EXP, LN, LOG10, SIN, COS, TAN, ASIN, ACOS, ATAN, TANH, ABS, MIN, MAX, SMALL ->
                 function(function.name(), arguments, "");
         };
+    }
+
+    /** Gnumeric neither guesses that a single place in a run along a row means the column, nor looks into one cell. */
+    private Written index(List<Formula> arguments) {
+        String column = read(arguments.get(0)).text();
+        Written place = read(arguments.get(1));
+        if (!(arguments.get(0) instanceof Formula.Symbol symbol && reference(symbol.name()) instanceof Run run)) {
+            throw new IllegalStateException(cell + ": index needs a run of cells");
+        }
+        Cell first = run.cells().get(0);
+        if (run.cells().size() == 1) {
+            return Written.whole("IF(" + place.within(ARITHMETIC) + "=1," + addressOf(first) + ","
+                    + quoted(Value.NO_RESULT) + ")");
+        }
+        boolean alongARow = first.place().row() == run.cells().get(1).place().row();
+        return Written.whole("INDEX(" + column + (alongARow ? ",1," : ",") + place.text() + ")");
     }
 
     @Override

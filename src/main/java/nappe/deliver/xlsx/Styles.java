@@ -27,6 +27,12 @@ final class Styles {
     /** The number format that shows a number as typed. */
     static final String AS_TYPED = "General";
 
+    /**
+     * Room behind a number, as wide as a bracket: LibreOffice forgets the indent of some. Not behind a number as typed,
+     * which would no longer be cut to the width of its column.
+     */
+    private static final String ROOM = "_)";
+
     /** What a cell is there for. */
     enum Role {
         SHEET_TITLE(14, true),
@@ -79,7 +85,7 @@ final class Styles {
         return of(new Look(role, align, AS_TYPED, true));
     }
 
-    /** The index of a style for numbers. Where numbers may be broken into lines, LibreOffice forgets the indent. */
+    /** The index of a style for numbers. */
     int of(Role role, Align align, String format) {
         return of(new Look(role, align, format, false));
     }
@@ -105,11 +111,10 @@ final class Styles {
                     case CENTRE -> HorizontalAlignment.CENTER;
                     case RIGHT -> HorizontalAlignment.RIGHT;
                 });
-        if (look.align == Align.RIGHT) {
-            style.setIndention((short) 1);
-        }
-        if (!look.format.equals(AS_TYPED)) {
-            style.setDataFormat(workbook.createDataFormat().getFormat(look.format));
+        if (look.format.equals(AS_TYPED)) {
+            style.setIndention((short) (look.align == Align.RIGHT ? 1 : 0));
+        } else {
+            style.setDataFormat(workbook.createDataFormat().getFormat(look.format + ROOM));
         }
         switch (role) {
             case SHEET_TITLE, FURNITURE, HEADING, NOTE, CAUTION, TABLE_TITLE -> {}

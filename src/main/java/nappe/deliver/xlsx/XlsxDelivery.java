@@ -82,8 +82,8 @@ public final class XlsxDelivery {
             SheetWriter writer = new SheetWriter(results, sheet, styles, texts).write();
             XSSFSheet frame = workbook.createSheet(sheet.name());
             new SheetFrame(workbook, frame, writer).set(results.furniture(), results.sheets().size());
-            parts.put(frame.getPackagePart().getPartName().getName(), writer.rows());
-            written.addAll(writer.written());
+            parts.put(frame.getPackagePart().getPartName().getName(), writer.canvas().rows());
+            written.addAll(writer.canvas().written());
         }
         workbook.setActiveSheet(0);
         checkNothingIsMissing();

@@ -22,7 +22,7 @@ class RatingCsvTest {
     @Test
     void isWrittenSo() {
         Block.Table table = new Block.Table(4, "Rating of M1", List.of(head("Head (ft)"), head("Flow (ft3/s)"), head("Remark")), List.of(
-                row(Value.of(0.35), Value.of(1.1379999999999999), "say \"when\""),
+                row(Value.of(0.1 + 0.2), Value.of(1.138), "say \"when\""),
                 row(Value.of(1e-7), new Value.None("no result"), "=1+1"),
                 row(Value.of(-2), Value.of(1200), " -x"),
                 row(Value.of(3), Value.word("free"), "two\nlines, one text")));
@@ -39,7 +39,7 @@ class RatingCsvTest {
                 # Input fingerprint: 1f3a 99c0
                 # Caution: Check before use.
                 "Head (ft)","Flow (ft3/s)","Remark"
-                0.35,1.138,"say ""when\"""
+                0.3,1.138,"say ""when\"""
                 1E-7,"no result","'=1+1"
                 -2,1200,"' -x"
                 3,"free","two lines, one text"

@@ -156,6 +156,11 @@ final class Invented {
         return new Block.Line(kind, code, description, "", "", "1", "Invented Manual, 2nd ed., sec. 7", null, cases);
     }
 
+    /** The river floods in one case, so that the flume drowns and words stand in place of numbers. */
+    private static double tailwater(int index) {
+        return index == 4 ? 0.9 : (index + 1) / 10.0;
+    }
+
     private Sheet flume() {
         Cell coefficient = typed(Cell.Kind.TABLE, 3, 6, "C", "1", 4);
         Cell exponent = typed(Cell.Kind.TABLE, 4, 6, "n", "1", 1.522);
@@ -175,7 +180,7 @@ final class Invented {
             int at = 7 + i;
             double q = flow + i * 0.731;
             Cell flowCell = typed(Cell.Kind.ENTRY, 10, at, "Q", "ft3/s", Math.round(q * 1e4) / 1e4);
-            Cell tail = typed(Cell.Kind.ENTRY, 11, at, "h_b", "ft", (i + 1) / 10.0);
+            Cell tail = typed(Cell.Kind.ENTRY, 11, at, "h_b", "ft", tailwater(i));
             double h = Math.pow(q / 4, 1 / 1.522);
             Cell head = live(
                     12, at, "h_f", "ft",
@@ -183,7 +188,7 @@ final class Invented {
                             op(Operator.OVER, symbol("Q"), op(Operator.TIMES, symbol("C"), one("ft3/s"))),
                             op(Operator.OVER, new Formula.Numeral(1, "1"), symbol("n")))),
                     Value.of(h), flowCell, coefficient, exponent);
-            double s = (i + 1) / 10.0 / h;
+            double s = tailwater(i) / h;
             Cell submergence = live(
                     13, at, "S_f", "1", op(Operator.OVER, symbol("h_b"), symbol("h_f")), Value.of(s), tail, head);
             Value result = s <= 0.62 ? Value.of(h) : new Value.None(Value.NO_RESULT);

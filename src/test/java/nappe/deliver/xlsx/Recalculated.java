@@ -1,7 +1,5 @@
 package nappe.deliver.xlsx;
 
-import static org.junit.jupiter.api.Assumptions.assumeTrue;
-
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
@@ -12,8 +10,8 @@ import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.concurrent.TimeUnit;
 import java.util.stream.Stream;
+import nappe.Tools;
 import nappe.calculation.Cell;
 import nappe.formula.Value;
 import nappe.results.Results;
@@ -25,8 +23,6 @@ import org.apache.poi.xssf.usermodel.XSSFWorkbook;
  * numbers as Double, all else as String. LibreOffice hands on 15 digits, Gnumeric all of them.
  */
 public final class Recalculated {
-    private static final long PATIENCE_SECONDS = 180;
-
     /** As loose as the comparison of one value needs: LibreOffice rounds to 15 digits and snaps sums near zero. */
     public static final double RELATIVE = 1e-9;
 
@@ -34,7 +30,12 @@ public final class Recalculated {
 
     /** Recalculated by LibreOffice; the test is skipped, with a message, where it is not installed. */
     public static Map<String, Object> byLibreOffice(Path workbook) {
-        require("soffice", "LibreOffice");
+        return byLibreOffice(List.of(workbook)).get(0);
+    }
+
+    /** Several workbooks recalculated by one run of LibreOffice, in their order. */
+    public static List<Map<String, Object>> byLibreOffice(List<Path> workbooks) {
+        Tools.require("soffice", "LibreOffice");
         return in(folder -> {
             Path profile = Files.createDirectories(folder.resolve("profile/user"));
             Files.writeString(profile.resolve("registrymodifications.xcu"), """
@@ -44,19 +45,27 @@ public final class Recalculated {
                      oor:op="fuse"><value>0</value></prop></item>
                     </oor:items>
                     """);
-            Path copy = Files.copy(workbook, folder.resolve("book.xlsx"));
-            run(folder, "soffice", "-env:UserInstallation=" + folder.resolve("profile").toUri(), "--headless",
-                    "--convert-to", "xlsx", "--outdir", folder.resolve("out").toString(), copy.toString());
-            return read(folder.resolve("out/book.xlsx"));
+            List<String> command = new ArrayList<>(List.of(
+                    "soffice", "-env:UserInstallation=" + folder.resolve("profile").toUri(), "--headless",
+                    "--convert-to", "xlsx", "--outdir", folder.resolve("out").toString()));
+            for (int i = 0; i < workbooks.size(); i++) {
+                command.add(Files.copy(workbooks.get(i), folder.resolve("book" + i + ".xlsx")).toString());
+            }
+            Tools.run(command.toArray(String[]::new));
+            List<Map<String, Object>> values = new ArrayList<>();
+            for (int i = 0; i < workbooks.size(); i++) {
+                values.add(read(folder.resolve("out/book" + i + ".xlsx")));
+            }
+            return values;
         });
     }
 
     /** Recalculated by Gnumeric; the test is skipped, with a message, where it is not installed. */
     public static Map<String, Object> byGnumeric(Path workbook) {
-        require("ssconvert", "Gnumeric");
+        Tools.require("ssconvert", "Gnumeric");
         return in(folder -> {
             Path out = folder.resolve("out.xlsx");
-            run(folder, "ssconvert", "--recalc", "-T", "Gnumeric_Excel:xlsx2", workbook.toString(), out.toString());
+            Tools.run("ssconvert", "--recalc", "-T", "Gnumeric_Excel:xlsx2", workbook.toString(), out.toString());
             return read(out);
         });
     }
@@ -140,33 +149,6 @@ public final class Recalculated {
             }
         } catch (IOException e) {
             throw new UncheckedIOException(e);
-        }
-    }
-
-    private static void require(String program, String name) {
-        boolean found = Stream.of(System.getenv().getOrDefault("PATH", "").split(java.io.File.pathSeparator))
-                .anyMatch(folder -> Files.isExecutable(Path.of(folder, program)));
-        assumeTrue(found, "NOT PROVEN: " + name + " (" + program + ") is not installed, so no second program recalculated");
-    }
-
-    private static void run(Path folder, String... command) throws IOException {
-        Path log = folder.resolve("log.txt");
-        Process process = new ProcessBuilder(command)
-                .redirectErrorStream(true)
-                .redirectOutput(log.toFile())
-                .start();
-        try {
-            if (!process.waitFor(PATIENCE_SECONDS, TimeUnit.SECONDS)) {
-                process.destroyForcibly();
-                throw new IOException(command[0] + " did not end: " + Files.readString(log));
-            }
-        } catch (InterruptedException e) {
-            process.destroyForcibly();
-            Thread.currentThread().interrupt();
-            throw new IOException(command[0] + " was interrupted", e);
-        }
-        if (process.exitValue() != 0) {
-            throw new IOException(command[0] + " failed: " + Files.readString(log));
         }
     }
 }

@@ -40,6 +40,8 @@ class SpreadsheetReadingTest {
             column.add(number("Tables", i, 1));
         }
         known.put("run", new Run(column));
+        known.put("single", new Run(List.of(number("F1", 6, 7))));
+        known.put("along", new Run(List.of(number("F1", 6, 7), number("F1", 6, 8))));
     }
 
     @ParameterizedTest
@@ -132,6 +134,18 @@ class SpreadsheetReadingTest {
         assertThat(text(new Formula.Summary("last", "run"), Sureness.SURE)).isEqualTo("'Tables'!B38");
         assertThat(text(new Formula.Summary("highest", "run"), Sureness.SURE))
                 .isEqualTo("MAX('Tables'!$B$4:$B$38)");
+    }
+
+    @Test
+    void aPlaceInARunAlongARowIsThatOfTheColumn() {
+        assertThat(text(Formulas.call(Function.INDEX, Formulas.symbol("along"), Formulas.symbol("a")), Sureness.SURE))
+                .isEqualTo("INDEX('F1'!$H$7:$I$7,1,B1)");
+    }
+
+    @Test
+    void aRunOfOneCellIsNotLookedInto() {
+        assertThat(text(Formulas.call(Function.INDEX, Formulas.symbol("single"), Formulas.symbol("a")), Sureness.SURE))
+                .isEqualTo("IF(B1=1,'F1'!H7,\"no result\")");
     }
 
     @Test

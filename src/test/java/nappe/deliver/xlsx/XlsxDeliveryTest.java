@@ -182,9 +182,9 @@ class XlsxDeliveryTest {
     void marginsFitAndAmpersandsAreDoubled() throws IOException {
         try (XSSFWorkbook book = open()) {
             String head = book.getSheetAt(0).getHeader().getLeft();
-            assertThat(head).isEqualTo("Project Weaver && Fox pretend works\nCalculation NW-007");
+            assertThat(head).isEqualTo("&8Project Weaver && Fox pretend works\nCalculation NW-007");
             assertThat(book.getSheetAt(1).getHeader().getRight())
-                    .isEqualTo("Revision B, for checking\nSheet 2 of 3, page &P of &N");
+                    .isEqualTo("&8Revision B, for checking\nSheet 2 of 3, page &P of &N");
             book.forEach(sheet -> assertThat(((XSSFSheet) sheet).getCTWorksheet().getHeaderFooter().getOddFooter())
                     .hasSizeLessThan(256)
                     .contains("1f3a 99c0 5e77 0b12"));

@@ -1,0 +1,161 @@
+package nappe.proof;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import nappe.deliver.xlsx.Recalculated;
+import nappe.deliver.xlsx.Spoiler;
+import nappe.proof.Typing.Demand;
+import nappe.proof.Typing.Entry;
+import nappe.proof.Typing.Flow;
+import nappe.proof.Typing.Head;
+import nappe.proof.Typing.Level;
+import nappe.station.Design;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** What a checker types into the issued workbook gives, recalculated, what issuing anew with that entry gives. */
+class CheckersEditTest {
+    @TempDir
+    Path folder;
+
+    private static final Map<String, List<Typing>> FLUME = new LinkedHashMap<>();
+    private static final Map<String, List<Typing>> WEIR = new LinkedHashMap<>();
+
+    private static void flume(String what, Typing... typings) {
+        FLUME.put(what, Arrays.asList(typings));
+    }
+
+    private static void weir(String what, Typing... typings) {
+        WEIR.put(what, Arrays.asList(typings));
+    }
+
+    static {
+        flume("smallest size", new Entry("F1", "size", "1 in"));
+        flume("size whose transition is under the published limit", new Entry("F1", "size", "6 in"));
+        flume("other size of the general formula", new Entry("F1", "size", "8 ft"));
+        flume("size of the other general formula", new Entry("F1", "size", "10 ft"));
+        flume("greatest size", new Entry("F1", "size", "50 ft"));
+        flume("ISO metric size", new Entry("F1", "size", "0.9 m"));
+        flume("ISO metric size without a general formula", new Entry("F1", "size", "0.152 m"));
+        flume("size that no table has", new Entry("F1", "size", "11 ft"));
+        flume("size in other letters", new Entry("F1", "size", "3 FT"));
+        flume("crest lower: most cases drown", new Entry("F1", "z_f", 411.1));
+        flume("crest higher: all flow free", new Entry("F1", "z_f", 414.5));
+        flume("crest below nought", new Entry("F1", "z_f", -2.5));
+        flume("no flow in a case", new Flow(1, 0));
+        flume("flow beyond the rating", new Flow(6, 40));
+        flume("smallest flow", new Flow(0, 1e-6));
+        flume("tailwater frees the flow", new Level(5, 413.2));
+        flume("tailwater drowns the least flow", new Level(0, 412.9));
+        flume("tailwater at the crest", new Level(2, 412.5));
+        flume("head read where none was given", new Head(4, "F1", 1.4));
+        flume("head read taken out, in words", new Head(1, "F1", "not given"));
+        flume("head read beyond the rating", new Head(1, "F1", 40));
+        flume("demand no longer met", new Demand(0, 413.0));
+        flume("many at once", new Entry("F1", "size", "2.4 m"), new Entry("F1", "z_f", 413.3), new Flow(3, 17), new Level(6, 416),
+                new Head(0, "F1", 0.2), new Head(1, "F1", 9), new Demand(1, 5));
+
+        weir("notch wider", new Entry("W1", "b", 850));
+        weir("notch as wide as the channel", new Entry("W1", "b", 1100));
+        weir("notch wider than the channel", new Entry("W1", "b", 1300));
+        weir("notch too narrow", new Entry("W1", "b", 90));
+        weir("width ratio in the zone that is refused", new Entry("W1", "b", 990));
+        weir("width ratio at the end of that zone", new Entry("W1", "b", 880));
+        weir("channel wider", new Entry("W1", "B", 2.75));
+        weir("channel narrower, in the zone that is refused", new Entry("W1", "B", 0.66));
+        weir("crest higher over the bed", new Entry("W1", "p", 1.2));
+        weir("crest height under its limit", new Entry("W1", "p", 0.04));
+        weir("crest level lower: less free", new Entry("W1", "z_c", 17.9));
+        weir("crest level higher: all free", new Entry("W1", "z_c", 18.6));
+        weir("no flow in a case", new Flow(1, 0));
+        weir("flow beyond the range", new Flow(3, 900));
+        weir("least flow", new Flow(0, 1e-4));
+        weir("flow so small that the head is under the bracket", new Flow(0, 1e-7));
+        weir("tailwater frees the nappe", new Level(4, 17.8));
+        weir("tailwater takes the nappe's freedom", new Level(2, 18.2));
+        weir("tailwater just where the nappe is no longer free", new Level(2, 18.19));
+        weir("head read where none was given", new Head(0, "W1", 0.05));
+        weir("head read taken out, in words", new Head(2, "W1", "not given"));
+        weir("many at once", new Entry("W1", "b", 400), new Entry("W1", "B", 0.7), new Entry("W1", "p", 0.3), new Entry("W1", "z_c", 18.3),
+                new Flow(4, 300), new Level(1, 18.29), new Head(3, "W1", 0.33));
+    }
+
+    private Path file(byte[] workbook) throws IOException {
+        return Files.write(Files.createTempFile(folder, "book", ".xlsx"), workbook);
+    }
+
+    private Path typed(Package issued, List<Typing> typings) throws IOException {
+        Edited edited = new Edited(Spoiler.spoil(issued.workbook()));
+        typings.forEach(typing -> edited.type(typing.place(issued), typing.content()));
+        return file(edited.bytes());
+    }
+
+    private static Package anew(Package issued, List<Typing> typings) {
+        Design design = issued.design();
+        for (Typing typing : typings) {
+            design = typing.in(design, issued);
+        }
+        return Package.of(design);
+    }
+
+    private static List<Typing> inJava(List<Typing> typings) {
+        return typings.stream()
+                .map(t -> t instanceof Head head && "not given".equals(head.content()) ? new Head(head.of(), head.tag(), null) : t)
+                .toList();
+    }
+
+    private void proven(String sample, Map<String, List<Typing>> edits, int byGnumericToo) throws IOException {
+        Package issued = Package.ofSample(sample);
+        List<Path> books = new ArrayList<>();
+        for (List<Typing> typings : edits.values()) {
+            books.add(typed(issued, typings));
+        }
+        List<Map<String, Object>> recalculated = Recalculated.byLibreOffice(books);
+        List<String> faults = new ArrayList<>();
+        int i = 0;
+        for (Map.Entry<String, List<Typing>> edit : edits.entrySet()) {
+            Package anew = anew(issued, inJava(edit.getValue()));
+            Map<String, Object> expected = Recalculated.asStored(file(anew.workbook()));
+            Comparison comparison = Comparison.of(recalculated.get(i), expected, anew.results());
+            System.out.println(sample + ", " + edit.getKey() + ": " + comparison);
+            comparison.faults().forEach(fault -> faults.add(edit.getKey() + ", LibreOffice: " + fault));
+            if (i % byGnumericToo == 0) {
+                Comparison.of(Recalculated.byGnumeric(books.get(i)), expected, anew.results())
+                        .faults()
+                        .forEach(fault -> faults.add(edit.getKey() + ", Gnumeric: " + fault));
+            }
+            i++;
+        }
+        assertThat(faults).isEmpty();
+    }
+
+    @Test
+    void editsOfTheFlumeGiveWhatIssuingAnewGives() throws IOException {
+        proven("headworks.xlsx", FLUME, 3);
+    }
+
+    @Test
+    void editsOfTheWeirGiveWhatIssuingAnewGives() throws IOException {
+        proven("return-weir.xlsx", WEIR, 3);
+    }
+
+    @Test
+    void anEditThatIsNotMadeInTheDesignIsReported() throws IOException {
+        Package issued = Package.ofSample("return-weir.xlsx");
+        Path edited = typed(issued, List.of(new Entry("W1", "p", 0.4500001)));
+        assertThat(Comparison.of(
+                                Recalculated.byLibreOffice(edited),
+                                Recalculated.asStored(file(issued.workbook())),
+                                issued.results())
+                        .faults())
+                .hasSizeGreaterThan(20);
+    }
+}

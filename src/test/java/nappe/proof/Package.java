@@ -1,0 +1,37 @@
+package nappe.proof;
+
+import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import nappe.deliver.xlsx.XlsxDelivery;
+import nappe.input.InputReader;
+import nappe.job.CheckRow;
+import nappe.job.Job;
+import nappe.method.MethodLibrary;
+import nappe.results.Results;
+import nappe.source.BuiltInLibrary;
+import nappe.station.Design;
+
+/** The package of one design: what was typed, what Java computed, the workbook that is issued. */
+record Package(Design design, Results results, byte[] workbook) {
+    private static final BuiltInLibrary LIBRARY = new BuiltInLibrary();
+    private static final MethodLibrary METHODS = new MethodLibrary(LIBRARY);
+    private static final Map<String, Package> SAMPLES = new LinkedHashMap<>();
+
+    static final Path INPUTS = Path.of("sample-inputs");
+
+    static Package of(Design design) {
+        Results results = new Job(METHODS, "0.0.0").run(design, CheckRow.builtIn(LIBRARY)).results();
+        return new Package(design, results, XlsxDelivery.render(results));
+    }
+
+    /** The package of an input workbook in {@code sample-inputs}, made once. */
+    static Package ofSample(String name) {
+        return SAMPLES.computeIfAbsent(name, key -> of(InputReader.read(INPUTS.resolve(key), METHODS)));
+    }
+
+    @Override
+    public String toString() {
+        return design.project().number();
+    }
+}
