@@ -34,6 +34,7 @@ public final class Bench {
     private final TrialRows trialRows;
     private final List<ElementSheet.LimitResult> limits;
     private final SheetDraft sheet = new SheetDraft("E1", "Element");
+    private final SheetDraft trials = new SheetDraft("Trials", "Trials");
     private final Map<Cell, Value> values;
     private final List<Block.Table> ratings = new ArrayList<>();
     private int next;
@@ -46,7 +47,7 @@ public final class Bench {
             MethodSheet method, WorkingSystem system, Map<String, String> entries, List<Map<String, String>> typedPerCase) {
         this.method = method;
         this.cells = new Cells(system, new SheetDraft("Constants", "Constants"));
-        this.trialRows = new TrialRows(cells, new SheetDraft("Trials", "Trials"));
+        this.trialRows = new TrialRows(cells, trials);
         ItemLayout items = new ItemLayout(cells, trialRows);
         method.tables().values().forEach(this::table);
         typedPerCase.forEach(c -> cases.add(scope.inner()));
@@ -120,6 +121,25 @@ public final class Bench {
     /** The verdict on the limit of a label in a case. */
     public Value verdict(String label, int oneCase) {
         return limit(label, oneCase, false);
+    }
+
+    /** The verdicts of every limit of a label. */
+    public List<List<Value>> verdicts(String label) {
+        return limits.stream()
+                .filter(l -> l.label().equals(label))
+                .map(l -> l.verdicts().stream().map(values::get).toList())
+                .toList();
+    }
+
+    /** The tables of trial rows. */
+    public List<Block.Table> trialTables() {
+        List<Block.Table> tables = new ArrayList<>();
+        for (Block block : trials.finish(1).blocks()) {
+            if (block instanceof Block.WorkbookOnly only) {
+                tables.add(only.table());
+            }
+        }
+        return tables;
     }
 
     public Value margin(String label, int oneCase) {

@@ -130,6 +130,8 @@ class TrialRowsTest {
         Bench bench = weir(width, channel, crest, new Weir(width, channel, crest).flow(crest * Math.pow(10, logHeadToCrest)));
         if (bench.value("b_e") instanceof Value.Number) {
             assertThat(bench.verdict("the trials for h_c have closed", 0)).isEqualTo(Value.word("met"));
+        }
+        if (bench.value("h_c", 0) instanceof Value.Number head && head.value() > 0) {
             List<Cell> trials = bench.trialRows().solved().get(0).trials();
             assertThat(trials).filteredOn(trial -> !bench.value(trial).equals(Value.of(0))).hasSizeLessThanOrEqualTo(13);
         }
