@@ -45,6 +45,7 @@ public final class ElementSheet {
     private final List<Block.Line> lines = new ArrayList<>();
     private final List<LimitResult> limits = new ArrayList<>();
     private int firstRow;
+    private int numbered;
 
     /**
      * @param scope knows the entries, constants and table columns of the element
@@ -67,6 +68,11 @@ public final class ElementSheet {
         this.scope = scope;
         this.caseNames = caseNames;
         this.cases = cases;
+    }
+
+    /** The lines laid, in order. */
+    public List<Block.Line> lines() {
+        return List.copyOf(lines);
     }
 
     /** Lays everything; the scopes then know every symbol. */
@@ -157,19 +163,27 @@ public final class ElementSheet {
                 : i == size - 1 ? Block.LineKind.LIMIT_VERDICT : Block.LineKind.LIMIT_MARGIN;
         lines.add(new Block.Line(
                 kind,
-                tag + "." + String.format(java.util.Locale.ROOT, "%03d", lines.size()),
+                tag + "." + String.format(java.util.Locale.ROOT, "%03d", ++numbered),
                 first.label(),
                 first.symbol(),
-                equation(first),
+                equation(laid, i),
                 unitText(first),
                 first.source(),
                 perCase ? null : first.cell(),
                 perCaseCells));
     }
 
-    private static String equation(Strip.Laid line) {
-        Formula formula = line.cell().formula();
-        return !line.equation().isEmpty() || formula == null ? line.equation() : PlainReading.of(formula);
+    /** The equation of a line; where each case has its own origin, the run of origins. */
+    private static String equation(List<List<Strip.Laid>> laid, int i) {
+        Strip.Laid first = laid.get(0).get(i);
+        Strip.Laid last = laid.get(laid.size() - 1).get(i);
+        Formula formula = first.cell().formula();
+        if (first.equation().isEmpty() && formula != null) {
+            return PlainReading.of(formula);
+        }
+        return first.equation().equals(last.equation())
+                ? first.equation()
+                : first.equation() + " to " + last.equation().replaceAll(".*, ", "") + ", one for each case";
     }
 
     private static String unitText(Strip.Laid line) {

@@ -1,6 +1,5 @@
 package nappe.job;
 
-import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -77,12 +76,7 @@ public final class Job {
                 .filter(row -> used.containsKey(row.method()))
                 .map(verification::run)
                 .toList();
-        List<List<String>> rows = new ArrayList<>();
-        for (CheckOutcome outcome : outcomes) {
-            if (outcome.row().kind().equals("published") || outcome.row().kind().equals("library")) {
-                rows.add(outcome.printed());
-            }
-        }
+        List<List<String>> rows = outcomes.stream().map(CheckOutcome::printed).toList();
         return new SoftwareStatement(version, texts, CheckOutcome.counts(outcomes), rows);
     }
 }
