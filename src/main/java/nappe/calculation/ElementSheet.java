@@ -214,11 +214,23 @@ public final class ElementSheet {
         List<Item.Root> roots = mine.stream().map(TrialRows.Solved::root).distinct().toList();
         for (Item.Root root : roots) {
             List<TrialRows.Solved> ofRoot = mine.stream().filter(s -> s.root() == root).toList();
-            List<LimitRows.Judged> judged = new ArrayList<>();
-            boolean perCase = method.perCase(root.symbol());
+            closings(limitRows, root, ofRoot, false);
+            closings(limitRows, root, ofRoot, true);
+        }
+    }
+
+    /** One limit for each time a root was laid: once for most, more often where at binds what it rests on. */
+    private void closings(LimitRows limitRows, Item.Root root, List<TrialRows.Solved> ofRoot, boolean perCase) {
+        List<List<TrialRows.Solved>> columns = (perCase ? caseNames : List.of("")).stream()
+                .map(name -> ofRoot.stream().filter(s -> s.caseName().equals(name)).toList())
+                .toList();
+        for (int k = 0; k < columns.get(0).size(); k++) {
+            int place = k;
             int[] next = {0};
-            rows(perCase, (at, strip) -> judged.add(limitRows.closing(ofRoot.get(next[0]++), at, strip)), true);
-            keep("the trials for " + root.symbol() + " have closed", "", judged);
+            List<LimitRows.Judged> judged = new ArrayList<>();
+            rows(perCase, (at, strip) ->
+                    judged.add(limitRows.closing(columns.get(next[0]++).get(place), at, strip)), true);
+            keep("the trials for " + root.symbol() + " have closed" + (k == 0 ? "" : " (" + (k + 1) + ")"), "", judged);
         }
     }
 

@@ -118,8 +118,9 @@ final class TableLines {
 
     /** A billionth of the table's range. */
     private static Formula nudge(CitedTable.Column first) {
-        double nudge = 1e-9 * ((Formula.Numeral) span(first)).value();
-        return new Formula.Numeral(nudge, Double.toString(nudge));
+        String span = ((Formula.Numeral) span(first)).text();
+        String text = new java.math.BigDecimal(span).stripTrailingZeros().scaleByPowerOfTen(-9).toString();
+        return new Formula.Numeral(Double.parseDouble(text), text);
     }
 
     /** Adds the line of one column of the table that was opened last. */
