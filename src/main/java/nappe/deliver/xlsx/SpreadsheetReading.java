@@ -185,7 +185,7 @@ public final class SpreadsheetReading implements Reading<Written> {
         List<Formula> arguments = call.arguments();
         return switch (function) {
             case MATCH -> function("MATCH", arguments, ",0");
-            case MATCH_BELOW -> function("MATCH", arguments, ",1");
+            case MATCH_BELOW -> matchBelow(arguments);
             case LOWEST_OF -> function("MIN", arguments, "");
             case TALLY -> function("COUNTIF", arguments, "");
             case IS_NUMBER -> function("ISNUMBER", arguments, "");
@@ -196,6 +196,14 @@ public final class SpreadsheetReading implements Reading<Written> {
             case IF, SQRT, EXP, LN, LOG10, SIN, COS, TAN, ASIN, ACOS, ATAN, TANH, ABS, MIN, MAX, SMALL ->
                 function(function.name(), arguments, "");
         };
+    }
+
+    /** With the tolerance of comparisons, or programs part where the key stands on a row of the table. */
+    private Written matchBelow(List<Formula> arguments) {
+        Written key = read(arguments.get(0));
+        String column = read(arguments.get(1)).text();
+        return Written.whole(
+                "MATCH(" + key.within(ARITHMETIC) + "+1E-9*ABS(" + key.text() + ")," + column + ",1)");
     }
 
     /** Gnumeric neither guesses that a single place in a run along a row means the column, nor looks into one cell. */

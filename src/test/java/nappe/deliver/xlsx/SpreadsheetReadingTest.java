@@ -122,7 +122,7 @@ class SpreadsheetReadingTest {
         assertThat(text(Formulas.call(Function.MATCH, Formulas.symbol("w"), run), Sureness.SURE))
                 .isEqualTo("MATCH(B6,'Tables'!$B$4:$B$38,0)");
         assertThat(text(Formulas.call(Function.MATCH_BELOW, a, run), Sureness.SURE))
-                .isEqualTo("MATCH(B1,'Tables'!$B$4:$B$38,1)");
+                .isEqualTo("MATCH(B1+1E-9*ABS(B1),'Tables'!$B$4:$B$38,1)");
         assertThat(text(Formulas.call(Function.INDEX, run, a), Sureness.SURE))
                 .isEqualTo("INDEX('Tables'!$B$4:$B$38,B1)");
         assertThat(text(Formulas.call(Function.SMALL, run, a), Sureness.SURE))
