@@ -42,7 +42,7 @@ public final class ItemLayout {
     }
 
     private void lay(Item.At at, Scope scope, Strip strip) {
-        Scope known = at.value() instanceof Formula.Symbol value ? scope.atRoot(value.name()) : null;
+        Scope known = at.value() instanceof Formula.Symbol value ? scope.ownAtRoot(value.name()) : null;
         Scope inner = known != null && known.hasOwn(at.free()) ? known : scope.inner();
         String where = ", at " + at.free() + " = " + PlainReading.of(at.value());
         if (inner != known) {

@@ -55,8 +55,11 @@ public final class Scope {
         atRoots.put(root, members);
     }
 
-    @Nullable Scope atRoot(String root) {
-        Scope found = atRoots.get(root);
-        return found != null || parent == null ? found : parent.atRoot(root);
+    /**
+     * The scope in which the members of a root stand, if the root was laid in this very scope: what a case adds to a root
+     * that serves all cases is laid once per case.
+     */
+    @Nullable Scope ownAtRoot(String root) {
+        return atRoots.get(root);
     }
 }

@@ -5,6 +5,7 @@ import java.util.Map;
 import java.util.function.Function;
 import nappe.unit.Dimension;
 import org.apache.commons.math3.fraction.Fraction;
+import org.apache.commons.math3.fraction.FractionConversionException;
 
 /**
  * What kind of thing a formula comes out as: a quantity of some dimension, words, or a condition. Refuses sums and
@@ -137,7 +138,7 @@ public final class DimensionReading implements Reading<DimensionReading.Outcome>
 
     private static @org.jspecify.annotations.Nullable Fraction plainNumber(Formula exponent) {
         if (exponent instanceof Formula.Numeral numeral) {
-            return new Fraction(numeral.value(), 1e-9, 1000);
+            return fraction(numeral.value());
         }
         if (exponent instanceof Formula.Negation negation) {
             Fraction positive = plainNumber(negation.of());
@@ -146,9 +147,17 @@ public final class DimensionReading implements Reading<DimensionReading.Outcome>
         if (exponent instanceof Formula.Operation over && over.operator() == Operator.OVER) {
             Fraction above = plainNumber(over.left());
             Fraction below = plainNumber(over.right());
-            return above == null || below == null ? null : above.divide(below);
+            return above == null || below == null || below.equals(Fraction.ZERO) ? null : above.divide(below);
         }
         return null;
+    }
+
+    private static @org.jspecify.annotations.Nullable Fraction fraction(double value) {
+        try {
+            return new Fraction(value, 1e-9, 1000);
+        } catch (FractionConversionException e) {
+            return null;
+        }
     }
 
     private Outcome alike(Formula whole, Formula left, Formula right, String verb) {

@@ -32,7 +32,9 @@ public final class PlainReading implements Reading<Written> {
 
     @Override
     public Written quantity(Formula.Quantity quantity) {
-        return new Written(quantity.text() + " " + quantity.unit().text(), Operator.POWER.binding(), true);
+        return quantity.unit().text().equals("1")
+                ? Written.whole(quantity.text())
+                : new Written(quantity.text() + " " + quantity.unit().text(), Operator.POWER.binding(), true);
     }
 
     @Override

@@ -149,7 +149,10 @@ public final class SignReading implements Reading<Sign> {
                 safe = false;
                 yield Sign.ANY;
             }
-            case EXP -> Sign.POSITIVE;
+            case EXP -> {
+                safe = false;
+                yield Sign.POSITIVE;
+            }
             case TANH, INDEX, SMALL, LOWEST_OF -> of.get(0);
             case ABS -> stronger(of.get(0), Sign.NOT_NEGATIVE);
             case MIN -> of.stream().reduce(Sign.POSITIVE, SignReading::weaker);

@@ -91,7 +91,7 @@ final class Tokens {
     }
 
     private @Nullable Unit unitAfterBlank() {
-        if (at + 1 >= text.length() || text.charAt(at) != ' ' || !Character.isLetter(text.charAt(at + 1)) && text.charAt(at + 1) != '%') {
+        if (at + 1 >= text.length() || text.charAt(at) != ' ' || !startsUnit(at + 1)) {
             return null;
         }
         int end = at + 1;
@@ -110,6 +110,12 @@ final class Tokens {
         }
         at = end;
         return Unit.parse(candidate);
+    }
+
+    /** Whether a unit may start there: a letter, {@code %}, or the 1 of {@code 1/s}. */
+    private boolean startsUnit(int place) {
+        char c = text.charAt(place);
+        return Character.isLetter(c) || c == '%' || text.startsWith("1/", place);
     }
 
     private @Nullable Matcher match(Pattern pattern) {

@@ -120,7 +120,7 @@ final class Entries {
         } catch (DateTimeException e) {
             // falls through to the fault
         }
-        fault(field, "date-expected", (cell.kind() == Kind.TEXT ? Shown.quoted(cell.text()) : cell.text())
+        fault(field, "date-expected", cell.shown()
                 + " is not a date for " + what + "; write year-month-day as 2030-01-31");
         return NO_DATE;
     }

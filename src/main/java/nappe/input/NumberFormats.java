@@ -22,7 +22,7 @@ final class NumberFormats {
     static NumberFormats read(Parts parts, String part) {
         NumberFormats formats = new NumberFormats();
         formats.styles.clear();
-        try (Xml xml = Xml.open(parts, part)) {
+        try (Xml xml = Xml.openShort(parts, part)) {
             boolean inCells = false;
             while (xml.next()) {
                 if (xml.starts("numFmt")) {

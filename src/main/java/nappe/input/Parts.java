@@ -5,6 +5,7 @@ import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.Collections;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
@@ -22,6 +23,7 @@ final class Parts implements AutoCloseable {
     private final ZipFile zip;
     private final Faults faults;
     private final Map<String, ZipEntry> entries = new LinkedHashMap<>();
+    private final Map<String, Long> sizes = new HashMap<>();
 
     private Parts(ZipFile zip, Faults faults) {
         this.zip = zip;
@@ -50,6 +52,11 @@ final class Parts implements AutoCloseable {
 
     boolean has(String name) {
         return entries.containsKey(key(name));
+    }
+
+    /** How many bytes the part unpacks to. */
+    long size(String name) {
+        return sizes.getOrDefault(key(name), 0L);
     }
 
     /** The part as a stream; the caller has asked {@link #has}. */
@@ -98,6 +105,7 @@ final class Parts implements AutoCloseable {
         byte[] buffer = new byte[65_536];
         long total = 0;
         for (ZipEntry entry : entries.values()) {
+            long before = total;
             CRC32 sum = new CRC32();
             try (InputStream in = zip.getInputStream(entry)) {
                 for (int n = in.read(buffer); n >= 0; n = in.read(buffer)) {
@@ -111,6 +119,7 @@ final class Parts implements AutoCloseable {
             } catch (IOException e) {
                 throw faults.refuse("damaged", "the file is damaged: its part " + entry.getName() + " can't be unpacked");
             }
+            sizes.put(key(entry.getName()), total - before);
             if (sum.getValue() != entry.getCrc()) {
                 throw faults.refuse("damaged", "the file is damaged: the checksum of its part " + entry.getName()
                         + " does not agree");

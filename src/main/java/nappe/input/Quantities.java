@@ -27,7 +27,7 @@ final class Quantities {
         if (cell == null || field.isBlank() || !entries.isReadable(field, cell, what)) {
             return none;
         }
-        String shown = cell.kind() == Kind.TEXT ? Shown.quoted(cell.text().strip()) : cell.text();
+        String shown = cell.kind() == Kind.BOOLEAN ? cell.text() : cell.shown();
         if (cell.format() == Format.DATE) {
             entries.fault(field, "date-in-number", "a date or time stands where " + what + " belongs; set the format of the "
                     + "cell to a plain number and write the number again");

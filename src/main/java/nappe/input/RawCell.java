@@ -44,6 +44,11 @@ record RawCell(int row, int column, Kind kind, String text, boolean formula, For
         return Double.parseDouble(text);
     }
 
+    /** As a message shows it: a number as a person writes it, anything else in quotes. */
+    String shown() {
+        return kind == Kind.NUMBER ? Plain.number(number()) : Shown.quoted(text.strip());
+    }
+
     /** Whether nothing can be seen in it. */
     boolean isBlank() {
         return kind == Kind.TEXT && text.codePoints().allMatch(c -> Character.isWhitespace(c) || Character.isSpaceChar(c));

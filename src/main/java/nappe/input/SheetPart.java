@@ -95,7 +95,7 @@ final class SheetPart {
             } else if (xml.starts("rPh")) {
                 xml.text();
             } else if (xml.starts("t")) {
-                inline.append(xml.text());
+                xml.appendText(inline);
             }
         }
         if (!placed) {
@@ -215,9 +215,17 @@ final class SheetPart {
 
     /** A count from 1 as an index from 0, at most the limit; below -1 where the text is no such count. */
     private static int index(@Nullable String text, int limit) {
-        if (text == null || !text.matches("\\d{1,9}")) {
+        if (text == null || text.isEmpty() || text.length() > 9) {
             return -2;
         }
-        return Math.min(Integer.parseInt(text), limit) - 1;
+        int count = 0;
+        for (int i = 0; i < text.length(); i++) {
+            int digit = text.charAt(i) - '0';
+            if (digit < 0 || digit > 9) {
+                return -2;
+            }
+            count = count * 10 + digit;
+        }
+        return Math.min(count, limit) - 1;
     }
 }

@@ -10,6 +10,7 @@ import java.util.NavigableMap;
 import java.util.Objects;
 import java.util.Set;
 import java.util.TreeMap;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 
@@ -36,6 +37,8 @@ final class Table {
                     merge == null ? "" : merge.toString());
         }
     }
+
+    private static final Pattern BLANKS = Pattern.compile("[\\p{Z}\\s]+");
 
     private final RawSheet sheet;
     private final int headRow;
@@ -97,7 +100,7 @@ final class Table {
 
     private static int matches(NavigableMap<Integer, RawCell> row, List<String> heads) {
         Set<String> words = row.values().stream().map(Table::word).collect(Collectors.toSet());
-        return (int) heads.stream().filter(head -> words.contains(key(head))).count();
+        return (int) heads.stream().map(Table::key).filter(words::contains).count();
     }
 
     /** The same table, ending above the head row of another. */
@@ -174,7 +177,7 @@ final class Table {
 
     private void refuseUnseen(RawCell cell, String what, Faults faults) {
         faults.add(sheet.name(), cell.address(), "entry-unseen",
-                Shown.quoted(cell.text()) + " can't be seen: " + what + " and check what stands there");
+                cell.shown() + " can't be seen: " + what + " and check what stands there");
     }
 
     private static String word(RawCell cell) {
@@ -182,6 +185,6 @@ final class Table {
     }
 
     private static String key(String text) {
-        return text.replaceAll("[\\p{Z}\\s]+", " ").strip().toLowerCase(Locale.ROOT);
+        return BLANKS.matcher(text).replaceAll(" ").strip().toLowerCase(Locale.ROOT);
     }
 }

@@ -60,7 +60,7 @@ final class WorkbookReader {
         }
         List<SheetEntry> entries = new ArrayList<>();
         boolean from1904 = false;
-        try (Xml xml = Xml.open(parts, main)) {
+        try (Xml xml = Xml.openShort(parts, main)) {
             if (xml.namespace().startsWith("http://purl.oclc.org/ooxml/")) {
                 throw strictVariant();
             }
@@ -132,7 +132,7 @@ final class WorkbookReader {
                 } else if (xml.starts("rPh")) {
                     xml.text();
                 } else if (xml.starts("t")) {
-                    text.append(xml.text());
+                    xml.appendText(text);
                 } else if (xml.ends("si")) {
                     texts.add(SheetPart.unescaped(text.toString()));
                     length += text.length() + 20;
@@ -174,7 +174,7 @@ final class WorkbookReader {
 
     private String contentType(String part) {
         String byExtension = "";
-        try (Xml xml = Xml.open(parts, "[Content_Types].xml")) {
+        try (Xml xml = Xml.openShort(parts, "[Content_Types].xml")) {
             while (xml.next()) {
                 String type = xml.isStart() ? xml.attribute("ContentType", "").toLowerCase(Locale.ROOT) : "";
                 if (xml.starts("Override") && xml.attribute("PartName", "").equalsIgnoreCase("/" + part)) {
@@ -195,7 +195,7 @@ final class WorkbookReader {
         if (!parts.has(part)) {
             return relations;
         }
-        try (Xml xml = Xml.open(parts, part)) {
+        try (Xml xml = Xml.openShort(parts, part)) {
             do {
                 if (xml.starts("Relationship") && !xml.attribute("TargetMode", "").equals("External")) {
                     relations.put(

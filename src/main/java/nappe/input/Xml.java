@@ -1,6 +1,5 @@
 package nappe.input;
 
-import java.io.FilterInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import javax.xml.stream.XMLInputFactory;
@@ -13,12 +12,15 @@ import org.jspecify.annotations.Nullable;
 final class Xml implements AutoCloseable {
     static final String MAIN = "http://schemas.openxmlformats.org/spreadsheetml/2006/main";
     private static final int LONGEST_TEXT = 300_000;
+    private static final int LONGEST_SHORT_PART = 5_000_000;
+    private static final int DEEPEST = 100;
     private static final XMLInputFactory FACTORY = factory();
 
     private final String part;
     private final Faults faults;
     private final InputStream in;
     private final XMLStreamReader reader;
+    private int depth;
 
     private Xml(String part, Faults faults, InputStream in, XMLStreamReader reader) {
         this.part = part;
@@ -33,6 +35,15 @@ final class Xml implements AutoCloseable {
         factory.setProperty(XMLInputFactory.IS_SUPPORTING_EXTERNAL_ENTITIES, false);
         factory.setProperty(XMLInputFactory.IS_COALESCING, false);
         return factory;
+    }
+
+    /** Opens a part that can't be long in a sound workbook, and stands on its root element. */
+    static Xml openShort(Parts parts, String part) {
+        if (parts.size(part) > LONGEST_SHORT_PART) {
+            throw parts.faults().refuse("too-large", "the part " + part + " has more than "
+                    + LONGEST_SHORT_PART / 1_000_000 + " MB, the most that it may have in an input workbook");
+        }
+        return open(parts, part);
     }
 
     /** Opens a part and stands on its root element. */
@@ -60,6 +71,10 @@ final class Xml implements AutoCloseable {
             if (event == XMLStreamConstants.DTD || event == XMLStreamConstants.ENTITY_REFERENCE) {
                 throw faults.refuse("doctype", "the part " + part + " has a document type declaration, which no "
                         + "spreadsheet program writes; the file is not read");
+            }
+            depth += event == XMLStreamConstants.START_ELEMENT ? 1 : event == XMLStreamConstants.END_ELEMENT ? -1 : 0;
+            if (depth > DEEPEST) {
+                throw faults.refuse("too-large", "the part " + part + " is nested more than " + DEEPEST + " deep");
             }
             return true;
         } catch (XMLStreamException | RuntimeException e) {
@@ -120,24 +135,25 @@ final class Xml implements AutoCloseable {
     /** The text of the element that the reader stands on, up to its end; what is nested is left out. */
     String text() {
         StringBuilder text = new StringBuilder();
-        int depth = 1;
-        while (depth > 0 && next()) {
-            switch (reader.getEventType()) {
-                case XMLStreamConstants.START_ELEMENT -> depth++;
-                case XMLStreamConstants.END_ELEMENT -> depth--;
-                case XMLStreamConstants.CHARACTERS, XMLStreamConstants.CDATA, XMLStreamConstants.SPACE -> {
-                    if (depth == 1) {
-                        text.append(reader.getText());
-                    }
-                }
-                default -> {}
+        appendText(text);
+        return text.toString();
+    }
+
+    /** Adds the text of the element to what came before it. */
+    void appendText(StringBuilder text) {
+        int start = depth;
+        while (depth >= start && next()) {
+            boolean characters = reader.getEventType() == XMLStreamConstants.CHARACTERS
+                    || reader.getEventType() == XMLStreamConstants.CDATA
+                    || reader.getEventType() == XMLStreamConstants.SPACE;
+            if (depth == start && characters) {
+                text.append(reader.getText());
             }
             if (text.length() > LONGEST_TEXT) {
                 throw faults.refuse("too-large", "the part " + part + " holds a text of more than " + LONGEST_TEXT
                         + " characters");
             }
         }
-        return text.toString();
     }
 
     private static InputRefused damaged(Faults faults, String part, Exception e) {
@@ -157,40 +173,6 @@ final class Xml implements AutoCloseable {
             in.close();
         } catch (IOException | XMLStreamException e) {
             throw damaged(faults, part, e);
-        }
-    }
-
-    /** Stops where a million bytes go by without a tag, before they pile up in memory. */
-    private static final class RunLimit extends FilterInputStream {
-        static final String SAID = "run of text without end";
-        private static final int LONGEST = 1_000_000;
-        private int run;
-
-        RunLimit(InputStream in) {
-            super(in);
-        }
-
-        @Override
-        public int read() throws IOException {
-            int c = super.read();
-            count(c);
-            return c;
-        }
-
-        @Override
-        public int read(byte[] to, int from, int most) throws IOException {
-            int n = super.read(to, from, most);
-            for (int i = from; i < from + n; i++) {
-                count(to[i]);
-            }
-            return n;
-        }
-
-        private void count(int c) throws IOException {
-            run = c == '<' ? 0 : run + 1;
-            if (run > LONGEST) {
-                throw new IOException(SAID);
-            }
         }
     }
 }

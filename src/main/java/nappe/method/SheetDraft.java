@@ -30,9 +30,12 @@ final class SheetDraft {
     @Nullable CitedTable openTable;
     @Nullable String openRow;
     @Nullable String openShare;
+    boolean openTableIsBroken;
 
     private final Map<String, DimensionReading.Outcome> outcomes = new LinkedHashMap<>();
     private final Set<String> broken = new HashSet<>();
+    private final Set<String> brokenTables = new HashSet<>();
+    private final List<String> lookUps = new ArrayList<>();
 
     /** A fault that only follows from another; it is not reported. */
     static final String FOLLOWS = "follows";
@@ -57,6 +60,31 @@ final class SheetDraft {
         return items.stream().anyMatch(item -> item instanceof Item.Given given
                 && given.symbol().equals(symbol)
                 && (given.from() == Item.From.CASE || given.from() == Item.From.NEIGHBOUR));
+    }
+
+    boolean isFree(String symbol) {
+        return items.stream().anyMatch(item -> item instanceof Item.Free free && free.symbol().equals(symbol));
+    }
+
+    boolean isBrokenTable(String name) {
+        return brokenTables.contains(name);
+    }
+
+    void markBrokenTable(String name) {
+        brokenTables.add(name);
+    }
+
+    void markReadTable(String name) {
+        brokenTables.remove(name);
+    }
+
+    /** The number of a look-up, from 1: the same table looked up by the same key is one look-up. */
+    int lookUp(String table, String key) {
+        String lookUp = table + " " + key;
+        if (!lookUps.contains(lookUp)) {
+            lookUps.add(lookUp);
+        }
+        return lookUps.indexOf(lookUp) + 1;
     }
 
     void markBroken(String symbol) {

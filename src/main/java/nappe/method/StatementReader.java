@@ -7,6 +7,8 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import nappe.formula.Comparator;
 import nappe.formula.DimensionReading;
 import nappe.formula.Formula;
@@ -27,6 +29,10 @@ import org.jspecify.annotations.Nullable;
 /** Reads one statement into the draft; a method for each statement word. */
 final class StatementReader {
     private static final String WORDS = "words";
+    /** Both ends of the bracket, and one step from them. */
+    private static final int LEAST_TRIALS = 3;
+
+    private static final Pattern NAME = Pattern.compile("[A-Za-z][A-Za-z0-9_]*");
 
     private final SheetDraft draft;
     private final Statement statement;
@@ -62,7 +68,23 @@ final class StatementReader {
         defining.stream().filter(symbol -> !draft.knows(symbol)).forEach(draft::markBroken);
     }
 
+    /** Notes the symbols that the statement would define, however much of it can be read. */
+    private void noteDefined() {
+        String defines = switch (statement.word()) {
+            case "method", "about", "caution", "source", "include", "table", "limit", "rating", "give" -> "";
+            case "at" -> text(0).substring(text(0).indexOf(':') + 1);
+            default -> text(0).split(",", 2)[0];
+        };
+        for (String part : defines.split(",")) {
+            Matcher name = NAME.matcher(part.strip());
+            if (name.lookingAt()) {
+                defining.add(symbolOf(name.group()));
+            }
+        }
+    }
+
     void read() {
+        noteDefined();
         switch (statement.word()) {
             case "method" -> draft.title = statement.rest();
             case "about" -> draft.about.add(statement.rest());
@@ -91,10 +113,13 @@ final class StatementReader {
 
     private void source() {
         String key = text(0);
+        if (!key.isEmpty()) {
+            draft.sources.putIfAbsent(key, new Publication(key, text(1), text(2).equals("memory")));
+        }
         if (key.isEmpty() || text(1).isEmpty()) {
             throw fault("a source has a key and a publication: source KEY ; publication", "source-unclear");
         }
-        draft.sources.putIfAbsent(key, new Publication(key, text(1), memory(2)));
+        memory(2);
     }
 
     private void include() {
@@ -118,7 +143,9 @@ final class StatementReader {
     }
 
     private void requires() {
-        String symbol = symbolOf(text(0));
+        FormulaParser parser = parser(0);
+        String symbol = symbolOf(parser.name());
+        parser.end();
         DimensionReading.Outcome outcome = draft.outcome(symbol);
         DimensionReading.Outcome wanted = new DimensionReading.Quantity(unit(1).dimension());
         if (!outcome.equals(wanted)) {
@@ -163,6 +190,7 @@ final class StatementReader {
         if (!first.isWords()) {
             throw fault("the first column of " + table.name() + " does not hold words", "choice-unclear");
         }
+        base = statement.field(0).offset();
         List<String> keys = first.values().stream()
                 .map(value -> ((Value.Word) value).text())
                 .toList();
@@ -196,14 +224,19 @@ final class StatementReader {
     }
 
     private void table() {
+        draft.openTable = null;
+        draft.openTableIsBroken = true;
+        base = statement.field(0).offset();
         String[] words = text(0).split("\\s+");
         if (words.length != 3 || !(words[1].equals("by") || words[1].equals("between"))) {
             throw fault("write: table name by choice, or: table name between number", "table-unclear");
         }
         CitedTable table = tableNamed(words[0]);
         String key = symbolOf(words[2]);
-        draft.outcome(key);
-        new TableLines(draft, table, key, source(1)).open(words[1].equals("between"));
+        DimensionReading.Outcome outcome = draft.outcome(key);
+        hasValue(new Formula.Symbol(key));
+        new TableLines(draft, table, key, source(1)).open(words[1].equals("between"), outcome);
+        draft.openTableIsBroken = false;
     }
 
     private void column() {
@@ -256,6 +289,9 @@ final class StatementReader {
         @Nullable Formula above = parser.passes("above") ? renamed(parser.sum()) : null;
         int trials = parser.passes("trials") ? parser.count() : 20;
         parser.end();
+        if (trials < LEAST_TRIALS) {
+            throw fault("a root takes " + LEAST_TRIALS + " trials or more", "trials-few");
+        }
         DimensionReading dimensions = dimensions(parser);
         if (!dimensions.dimension(left).equals(dimensions.dimension(right))) {
             throw fault(
@@ -263,8 +299,12 @@ final class StatementReader {
                     "unlike-dimensions");
         }
         Unit unit = unit(1);
-        for (Formula end : List.of(from, to)) {
-            sameDimension(unit, end.read(dimensions));
+        sameDimension(unit, draft.outcome(free));
+        for (Formula end : java.util.Arrays.asList(from, to, below, above)) {
+            if (end != null) {
+                sameDimension(unit, end.read(dimensions));
+                doesNotRestOn(free, end);
+            }
         }
         Set<String> targets = new LinkedHashSet<>(SymbolsReading.of(left));
         targets.addAll(SymbolsReading.of(right));
@@ -283,6 +323,7 @@ final class StatementReader {
         if (!outcome.equals(draft.outcome(free))) {
             throw fault(free + " and its value differ in dimension", "unlike-dimensions");
         }
+        doesNotRestOn(free, value);
         parser.expect(":");
         Map<String, String> results = new LinkedHashMap<>();
         do {
@@ -316,8 +357,18 @@ final class StatementReader {
                 throw fault("the sides of the limit differ in dimension", "unlike-dimensions");
             }
         }
+        if (scale != null && !dimensions.dimension(scale).equals(dimensions.dimension(chain.get(0)))) {
+            throw fault("the scale of the limit differs from its sides in dimension", "unlike-dimensions");
+        }
         if (when != null) {
             dimensions.condition(when);
+        }
+        chain.forEach(this::hasValue);
+        if (scale != null) {
+            hasValue(scale);
+        }
+        if (when != null) {
+            hasValue(when);
         }
         String label = text(1);
         String source = source(2);
@@ -361,11 +412,22 @@ final class StatementReader {
         } while (parser.passes(","));
         parser.end();
         results.forEach(draft::outcome);
+        DimensionReading dimensions = dimensions(parser);
+        for (Formula end : List.of(from, to)) {
+            if (!end.read(dimensions).equals(draft.outcome(free))) {
+                throw fault(free + " and an end of its table differ in dimension", "unlike-dimensions");
+            }
+            hasValue(end);
+        }
+        if (steps < 1) {
+            throw fault("a rating takes 1 step or more", "steps-few");
+        }
         List<Item> members = Closure.of(draft.items, draft.reach, free, Set.copyOf(results));
         draft.ratings.add(new Rating(free, from, to, steps, List.copyOf(results), members));
     }
 
     private void give() {
+        base = statement.field(0).offset();
         String text = text(0);
         int equals = text.indexOf('=');
         if (equals < 0) {
@@ -373,6 +435,7 @@ final class StatementReader {
         }
         String symbol = symbolOf(text.substring(equals + 1).strip());
         draft.outcome(symbol);
+        hasValue(new Formula.Symbol(symbol));
         draft.gives.put(text.substring(0, equals).strip(), symbol);
     }
 
@@ -428,12 +491,17 @@ final class StatementReader {
         if (known != null) {
             return known;
         }
+        if (draft.isBrokenTable(name)) {
+            throw fault(name, SheetDraft.FOLLOWS);
+        }
+        draft.markBrokenTable(name);
         String text = library.text("tables/" + name + ".csv");
         if (text == null) {
             throw fault("there is no table tables/" + name + ".csv", "table-missing");
         }
         CitedTable table = CitedTable.read(name, text);
         draft.tables.put(name, table);
+        draft.markReadTable(name);
         draft.text.append(text).append('\n');
         return table;
     }
@@ -453,12 +521,34 @@ final class StatementReader {
 
     private String freeSymbol(String symbol) {
         draft.outcome(symbol);
-        boolean free = draft.items.stream()
-                .anyMatch(item -> item instanceof Item.Free f && f.symbol().equals(symbol));
-        if (!free) {
+        if (!draft.isFree(symbol)) {
             throw fault(symbol + " is not a free symbol", "not-free");
         }
         return symbol;
+    }
+
+    /** Refuses what rests on a free symbol where a value is needed. */
+    private void hasValue(Formula formula) {
+        for (String symbol : SymbolsReading.of(formula)) {
+            for (String free : draft.reach.getOrDefault(symbol, Set.of())) {
+                if (draft.isFree(free)) {
+                    throw fault(
+                            symbol.equals(free)
+                                    ? symbol + " is free and has no value by itself; bind it with at"
+                                    : symbol + " rests on the free symbol " + free + " and has no value by itself; name one with at",
+                            "no-value");
+                }
+            }
+        }
+    }
+
+    /** Refuses an end of a bracket, or a value, that rests on the very symbol that is bound. */
+    private void doesNotRestOn(String free, Formula formula) {
+        for (String symbol : SymbolsReading.of(formula)) {
+            if (draft.reach.getOrDefault(symbol, Set.of()).contains(free)) {
+                throw fault(symbol + " rests on " + free + ", which is bound here", "rests-on-itself");
+            }
+        }
     }
 
     private Sign signOf(String free) {

@@ -1,6 +1,5 @@
 package nappe.method;
 
-import java.util.ArrayList;
 import java.util.List;
 import nappe.formula.DimensionReading;
 import nappe.formula.Formula;
@@ -32,7 +31,7 @@ final class TableLines {
     }
 
     /** Defines the columns and lays the lines that find the row. */
-    void open(boolean between) {
+    void open(boolean between, DimensionReading.Outcome keyOutcome) {
         for (CitedTable.Column column : table.columns()) {
             draft.define(name(table, column), outcome(column));
             draft.reach.put(name(table, column), java.util.Set.of(name(table, column)));
@@ -44,6 +43,18 @@ final class TableLines {
                             : "the first column of " + table.name() + " holds numbers: write \"between\"",
                     0, 1, "table-unclear");
         }
+        DimensionReading.Outcome wanted = between
+                ? new DimensionReading.Quantity(unitOf(first).dimension())
+                : new DimensionReading.Words();
+        if (!keyOutcome.equals(wanted)) {
+            throw new FormulaException(
+                    between ? key + " is not " + unitOf(first).dimension() + ", as the first column of " + table.name() + " is"
+                            : key + " does not hold words, as the first column of " + table.name() + " does",
+                    0, 1, "unlike-dimensions");
+        }
+        if (between) {
+            checkRises(first);
+        }
         draft.openTable = table;
         draft.openRow = row();
         draft.openShare = between ? share() : null;
@@ -52,6 +63,21 @@ final class TableLines {
             between(first, column);
         } else {
             line(row(), call(Function.MATCH, symbol(key), column), "row of the table " + table.name(), Sign.POSITIVE);
+        }
+    }
+
+    /** Only in a rising column, in two rows or more, is there a row below and a row above. */
+    private void checkRises(CitedTable.Column first) {
+        double last = Double.NEGATIVE_INFINITY;
+        for (Value value : first.values()) {
+            if (!(value instanceof Value.Number number) || number.value() <= last) {
+                throw new FormulaException(
+                        "the first column of " + table.name() + " must rise from row to row, without blanks", 0, 1, "table-not-rising");
+            }
+            last = number.value();
+        }
+        if (first.values().size() < 2) {
+            throw new FormulaException("the table " + table.name() + " has one row; two are needed", 0, 1, "table-not-rising");
         }
     }
 
@@ -93,6 +119,9 @@ final class TableLines {
             SheetDraft draft, String symbol, String columnName, @Nullable Unit unit, String label, String source) {
         CitedTable table = draft.openTable;
         String row = draft.openRow;
+        if (draft.openTableIsBroken) {
+            throw new FormulaException(symbol, 0, 1, SheetDraft.FOLLOWS);
+        }
         if (table == null || row == null) {
             throw new FormulaException("a column follows the table it is of", 0, 1, "table-missing");
         }
@@ -148,9 +177,9 @@ final class TableLines {
         return unit == null ? Unit.one() : unit;
     }
 
-    /** T1 for the first table of the sheet, T2 for the second. */
+    /** T1 for the first look-up of the sheet, T2 for the second. */
     private String suffix() {
-        return "T" + (new ArrayList<>(draft.tables.keySet()).indexOf(table.name()) + 1);
+        return "T" + draft.lookUp(table.name(), key);
     }
 
     private String row() {

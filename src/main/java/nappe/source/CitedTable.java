@@ -134,14 +134,21 @@ public final class CitedTable {
                 .setIgnoreSurroundingSpaces(true)
                 .get();
         try (CSVParser parser = format.parse(new StringReader(text))) {
-            List<CSVRecord> records = parser.getRecords();
-            if (records.size() < 2) {
+            List<Row> rows = new ArrayList<>();
+            for (CSVRecord row : parser) {
+                rows.add(new Row(row, parser.getCurrentLineNumber()));
+            }
+            if (rows.size() < 2) {
                 throw new TableException(file + ":1: the table has no rows (fault: table-empty)");
             }
-            int skipped = (int) text.lines().takeWhile(line -> line.startsWith("#")).count();
             List<Column> columns = new ArrayList<>();
-            for (int i = 0; i < records.get(0).size(); i++) {
-                columns.add(readColumn(file, skipped, records, i));
+            for (int i = 0; i < rows.get(0).fields().size(); i++) {
+                Column column = readColumn(file, rows, i);
+                if (columns.stream().anyMatch(c -> c.symbol().equals(column.symbol()))) {
+                    throw new TableException(file + ":" + rows.get(0).line() + ": there are two columns " + column.symbol()
+                            + " (fault: head-twice)");
+                }
+                columns.add(column);
             }
             return List.copyOf(columns);
         } catch (IOException | java.io.UncheckedIOException e) {
@@ -149,27 +156,30 @@ public final class CitedTable {
         }
     }
 
-    private static Column readColumn(String file, int skipped, List<CSVRecord> records, int i) {
-        Matcher head = HEAD.matcher(records.get(0).get(i));
+    /** A row of the file with the line it ends on. */
+    private record Row(CSVRecord fields, long line) {}
+
+    private static Column readColumn(String file, List<Row> rows, int i) {
+        Row first = rows.get(0);
+        Matcher head = HEAD.matcher(first.fields().get(i));
         if (!head.matches()) {
-            throw new TableException(file + ":" + (skipped + 1) + ": column head \"" + records.get(0).get(i)
+            throw new TableException(file + ":" + first.line() + ": column head \"" + first.fields().get(i)
                     + "\" is not a symbol with its unit in brackets, such as h [m] (fault: head-unclear)");
         }
-        Unit unit = unit(file, skipped + 1, head.group(2));
+        Unit unit = unit(file, first.line(), head.group(2));
         List<Value> values = new ArrayList<>();
-        for (int r = 1; r < records.size(); r++) {
-            int line = skipped + r + 1;
-            CSVRecord row = records.get(r);
-            if (row.size() != records.get(0).size()) {
-                throw new TableException(file + ":" + line + ": " + row.size() + " columns where the head has "
-                        + records.get(0).size() + " (fault: row-length)");
+        for (Row row : rows.subList(1, rows.size())) {
+            if (row.fields().size() != first.fields().size()) {
+                throw new TableException(file + ":" + row.line() + ": " + row.fields().size() + " columns where the head has "
+                        + first.fields().size() + " (fault: row-length)");
             }
-            values.add(unit == null ? Value.word(row.get(i)) : number(file, line, row.get(i)));
+            String field = row.fields().get(i);
+            values.add(unit == null ? Value.word(field) : number(file, row.line(), field));
         }
         return new Column(head.group(1), unit, List.copyOf(values));
     }
 
-    private static @Nullable Unit unit(String file, int line, @Nullable String text) {
+    private static @Nullable Unit unit(String file, long line, @Nullable String text) {
         try {
             return text == null ? null : Unit.parse(text);
         } catch (UnitException e) {
@@ -177,11 +187,11 @@ public final class CitedTable {
         }
     }
 
-    private static Value number(String file, int line, String text) {
+    private static Value number(String file, long line, String text) {
         if (text.isEmpty()) {
             return new Value.None(Value.NOT_GIVEN);
         }
-        if (!text.matches("-?\\d+(\\.\\d+)?([eE][+-]?\\d+)?")) {
+        if (!text.matches("-?\\d+(\\.\\d+)?([eE][+-]?\\d+)?") || !Double.isFinite(Double.parseDouble(text))) {
             throw new TableException(
                     file + ":" + line + ": \"" + text + "\" is not a number (fault: number-expected)");
         }

@@ -164,7 +164,7 @@ class InputFaultsTest {
     void formatThatShowsAUnitIsTold() throws IOException {
         assertThat(faults(Samples.filled().format("R1", "C7", "0.00 \"mm\"")))
                 .isEqualTo("headworks.xlsx, sheet R1, cell C7: the format of the cell shows words or a scale beside the "
-                        + "number 120.0; set it to a plain number and give the unit in the unit column "
+                        + "number 120; set it to a plain number and give the unit in the unit column "
                         + "(fault: format-with-words)");
     }
 
@@ -217,7 +217,7 @@ class InputFaultsTest {
                 .isEqualTo("headworks.xlsx, sheet F1, cell E9: \"invented drawing 1\" can't be seen: it is covered by the "
                         + "merged cells E8:E9; split them and check what stands there (fault: entry-unseen)");
         assertThat(faults(Samples.filled().change(w -> w.getSheet("F1").getRow(8).setZeroHeight(true))))
-                .contains("cell C9: \"48.0\" can't be seen: row 9 is hidden; show it");
+                .contains("cell C9: 48 can't be seen: row 9 is hidden; show it");
         assertThat(faults(Samples.filled().change(w -> w.getSheet("F1").setColumnHidden(4, true))))
                 .contains("cell E7: \"invented\" can't be seen: its column is hidden; show it");
         assertThat(faults(Samples.filled().change(w -> w.setSheetHidden(w.getSheetIndex("F1"), true))))
@@ -282,7 +282,7 @@ class InputFaultsTest {
         assertThat(fault("Project", "B13", "3/4/2030"))
                 .isEqualTo("headworks.xlsx, sheet Project, cell B13: \"3/4/2030\" is not a date for Revision date; write "
                         + "year-month-day as 2030-01-31 (fault: date-expected)");
-        assertThat(fault("Project", "B13", 47514)).contains("47514.0 is not a date");
+        assertThat(fault("Project", "B13", 47514)).contains("47514 is not a date");
     }
 
     @Test

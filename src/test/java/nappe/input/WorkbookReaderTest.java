@@ -277,6 +277,30 @@ class WorkbookReaderTest {
     }
 
     @Test
+    void whatWouldPileUpInMemoryIsRefused() throws IOException {
+        assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("<sheetData>", "<!--" + "<".repeat(2_000_000) + "-->"))))
+                .isEqualTo("in.xlsx: the part xl/worksheets/sheet2.xml holds a run of text without end (fault: too-large)");
+        assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("<sheetData>", "<sheetData>" + "<a>".repeat(1000)))))
+                .isEqualTo("in.xlsx: the part xl/worksheets/sheet2.xml is nested more than 100 deep (fault: too-large)");
+        String texts = "<row r=\"99\"><c t=\"inlineStr\"><is>" + "<t>xxxxxxxxx</t>".repeat(50_000) + "</is></c></row></sheetData>";
+        assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("</sheetData>", texts))))
+                .contains("holds a text of more than 300000 characters (fault: too-large)");
+        assertThat(refusal(Zips.sound().change("xl/styles.xml", s -> s.replace("<cellXfs", "<x/>".repeat(2_000_000) + "<cellXfs"))))
+                .isEqualTo("in.xlsx: the part xl/styles.xml has more than 5 MB, the most that it may have in an input "
+                        + "workbook (fault: too-large)");
+    }
+
+    @Test
+    void commentsAndCharacterSectionsAreRead() throws IOException {
+        Path file = Zips.sound()
+                .change(FLOWS, s -> s.replace("<sheetData>", "<!-- a > b --><sheetData>"
+                        + "<row r=\"900\"><c r=\"Z900\" t=\"inlineStr\"><is><t><![CDATA[a<b]]></t></is></c></row>"))
+                .save(folder.resolve("in.xlsx"));
+        RawSheet sheet = WorkbookReader.read(file, new Faults("in.xlsx")).sheets().get(1);
+        assertThat(sheet.cell(899, 25)).extracting(RawCell::text).isEqualTo("a<b");
+    }
+
+    @Test
     void tooManyPartsCellsOrSheetsAreRefused() throws IOException {
         Zips parts = Zips.sound();
         for (int i = 0; i < 1000; i++) {

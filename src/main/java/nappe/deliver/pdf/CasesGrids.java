@@ -18,6 +18,12 @@ final class CasesGrids {
 
     private static final double LARGEST_CASE = 24;
 
+    /** A longer word in the name of a case is broken. */
+    private static final double LARGEST_NAME = 23;
+
+    /** Tables of so many rows stay on one page. */
+    private static final int SHORT = 20;
+
     private final Results results;
     private final Block.Lines lines;
     private final ColumnWidths fixed;
@@ -70,14 +76,15 @@ final class CasesGrids {
     }
 
     private double measureCases() {
+        ColumnWidths names = new ColumnWidths(1, SIZE);
+        lines.caseNames().forEach(name -> names.text(0, name, true));
         ColumnWidths widths = new ColumnWidths(1, SIZE);
-        lines.caseNames().forEach(name -> widths.text(0, name, true));
         for (Block.Line line : perCase(lines)) {
             for (int i = 0; i < lines.caseNames().size(); i++) {
                 widths.text(0, value(line, i).characters(), true);
             }
         }
-        return Math.max(LEAST_CASE, widths.least());
+        return Math.max(Math.max(LEAST_CASE, widths.least()), Math.min(names.least(), LARGEST_NAME));
     }
 
     private static List<Block.Line> perCase(Block.Lines lines) {
@@ -115,7 +122,7 @@ final class CasesGrids {
             }
         }
         return new View.Grid(
-                "cases",
+                body.size() <= SHORT ? "together" : "",
                 widths(to - from, width),
                 List.of(View.Text.plain("tabletitle", title)),
                 List.of(new View.GridRow("", head)),
@@ -146,7 +153,7 @@ final class CasesGrids {
         Cell cell = line.perCase().get(index);
         String value = Printed.value(results, cell);
         boolean number = Printed.isNumber(results, cell);
-        Piece piece = number ? Piece.whole(value) : Verdicts.weigh(value);
+        Piece piece = number ? Piece.plain(value) : Verdicts.weigh(value);
         return View.Text.of("", List.of(piece));
     }
 }

@@ -53,6 +53,10 @@ record Inline(List<Piece> pieces, int binding, boolean numberFirst, boolean unit
         return binding >= least ? this : bracketed();
     }
 
+    boolean startsWithMinus() {
+        return plain().startsWith("-") || plain().startsWith("−");
+    }
+
     Inline bracketed() {
         return join(ATOM, text("("), this, text(")"));
     }

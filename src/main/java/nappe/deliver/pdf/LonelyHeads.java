@@ -36,13 +36,14 @@ final class LonelyHeads {
 
     /** Of each sheet only the first is moved, since that moves all that follows on the sheet. */
     private void search(Box box, int sheet) {
-        if (box instanceof TableBox table && !changed.contains(sheet) && isLonely(table)) {
+        if (box instanceof TableBox table) {
             Element element = table.getElement();
-            if (element != null && !element.getAttribute("class").endsWith(MOVED)) {
+            if (element != null && !changed.contains(sheet) && isLonely(table) && !isMoved(element)) {
                 element.setAttribute("class", element.getAttribute("class") + MOVED);
                 changed.add(sheet);
                 found = true;
             }
+            return;
         }
         for (int i = 0; i < box.getChildCount(); i++) {
             Box child = box.getChild(i);
@@ -55,6 +56,10 @@ final class LonelyHeads {
     private boolean isLonely(TableBox table) {
         TableRowBox first = table.getFirstBodyRow();
         return first != null && page(first.getAbsY()) != page(table.getAbsY());
+    }
+
+    private static boolean isMoved(Element element) {
+        return element.getAttribute("class").endsWith(MOVED);
     }
 
     private int page(int y) {

@@ -7,8 +7,6 @@ public record Piece(String text, Face face, Shift shift) {
         PLAIN,
         /** A symbol that stands for a quantity. */
         ITALIC,
-        /** Never broken over two lines. */
-        WHOLE,
         BOLD
     }
 
@@ -31,10 +29,6 @@ public record Piece(String text, Face face, Shift shift) {
 
     static Piece bold(String text) {
         return new Piece(text, Face.BOLD, Shift.NONE);
-    }
-
-    static Piece whole(String text) {
-        return new Piece(text, Face.WHOLE, Shift.NONE);
     }
 
     static Piece italic(String text) {
@@ -63,7 +57,6 @@ public record Piece(String text, Face face, Shift shift) {
                 switch (face) {
                     case PLAIN -> "t";
                     case ITALIC -> "i";
-                    case WHOLE -> "w";
                     case BOLD -> "b";
                 };
         return switch (shift) {

@@ -69,7 +69,7 @@ final class SubstitutedReading {
         Reference reference = cell.references().get(key(name));
         if (reference instanceof Run run) {
             String address = Links.unquoted(run.from(cell.place().sheet()));
-            return Inline.of(Inline.ATOM, List.of(Piece.whole(address)));
+            return Inline.of(Inline.ATOM, List.of(Piece.plain(address)));
         }
         return reference instanceof Cell other ? number(other) : TypesetReading.name(name);
     }

@@ -96,7 +96,7 @@ final class TableGrid {
             Block.Column column = table.columns().get(i);
             String room = column.align() == Block.Align.RIGHT
                     ? decimals.get(i).room(text.characters())
-                    : "";
+                    : text.style();
             cells.add(View.GridCell.of(
                     style(column), new View.Text(room, text.pieces(), text.target())));
         }
@@ -115,15 +115,15 @@ final class TableGrid {
         if (item instanceof Block.Text words) {
             return column.head().equals("Unit")
                     ? View.Text.of("whole", UnitPrint.named(words.text()))
-                    : View.Text.plain("", words.text());
+                    : View.Text.of("", List.of(Verdicts.weigh(words.text())));
         } else if (item instanceof Block.Symbol symbol) {
             return View.Text.of("whole", SymbolPrint.pieces(symbol.symbol()));
         } else if (item instanceof Block.Content content) {
             return content(content.cell());
         } else if (item instanceof Block.Equation equation) {
-            return View.Text.of("", equation(equation.cell()));
+            return View.Text.of("formula", equation(equation.cell()));
         } else if (item instanceof Block.Address address) {
-            return new View.Text("whole", List.of(Piece.whole(links.address(address.cell()))), links.to(address.cell()));
+            return new View.Text("whole", List.of(Piece.plain(links.address(address.cell()))), links.to(address.cell()));
         } else if (item instanceof Block.SheetLink link) {
             return new View.Text(
                     "", List.of(Piece.plain(link.number() + "\u2002" + link.title())), Links.to(link.number()));
@@ -134,8 +134,8 @@ final class TableGrid {
     private View.Text content(Cell cell) {
         String value = Printed.value(results, cell);
         return Printed.isNumber(results, cell)
-                ? View.Text.of("whole", List.of(Piece.whole(value)))
-                : View.Text.plain("", value);
+                ? View.Text.of("whole", List.of(Piece.plain(value)))
+                : View.Text.of("", List.of(Verdicts.weigh(value)));
     }
 
     /** The symbol and the formula behind a live cell; nothing for a typed one. */

@@ -91,7 +91,8 @@ final class TypesetReading implements Reading<Inline> {
     }
 
     private static Inline infix(Operator operator, Inline left, String sign, Inline right) {
-        return Inline.join(operator.binding(), left, Inline.text(sign), right);
+        Inline second = right.startsWithMinus() ? right.bracketed() : right;
+        return Inline.join(operator.binding(), left, Inline.text(sign), second);
     }
 
     private static Inline times(Inline left, Inline right) {

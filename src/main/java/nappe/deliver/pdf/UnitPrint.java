@@ -26,19 +26,19 @@ final class UnitPrint {
         Matcher fraction = FRACTION.matcher(unit);
         int from = 0;
         while (fraction.find()) {
-            pieces.add(Piece.whole(wholeExponents(unit.substring(from, fraction.start()))));
-            pieces.add(Piece.whole(fraction.group(1)).raised());
+            pieces.add(Piece.plain(wholeExponents(unit.substring(from, fraction.start()))));
+            pieces.add(Piece.plain(fraction.group(1)).raised());
             from = fraction.end();
         }
         if (from < unit.length()) {
-            pieces.add(Piece.whole(wholeExponents(unit.substring(from))));
+            pieces.add(Piece.plain(wholeExponents(unit.substring(from))));
         }
         return pieces;
     }
 
     /** The pieces of a unit that stands by itself: pure numbers have the unit 1. */
     static List<Piece> named(String unit) {
-        return unit.equals("1") ? List.of(Piece.whole("1")) : pieces(unit);
+        return unit.equals("1") ? List.of(Piece.plain("1")) : pieces(unit);
     }
 
     /** The head of a column; a unit in brackets at its end is set as one. */
@@ -72,10 +72,10 @@ final class UnitPrint {
     static List<Piece> after(String number, String unit) {
         List<Piece> pieces = new ArrayList<>(pieces(unit));
         if (pieces.isEmpty()) {
-            pieces.add(Piece.whole(number));
+            pieces.add(Piece.plain(number));
         } else {
             Piece first = pieces.get(0);
-            pieces.set(0, Piece.whole(number + "\u00a0" + first.text()));
+            pieces.set(0, Piece.plain(number + "\u00a0" + first.text()));
         }
         return pieces;
     }

@@ -60,12 +60,13 @@ final class WorkedGrid {
 
     private View.GridRow row(Block.Line line) {
         Cell cell = cell(line);
+        List<View.Text> quantity = quantity(line, cell);
         return new View.GridRow(
                 "",
                 List.of(
                         cell("", line.code()),
-                        new View.GridCell("", 1, quantity(line, cell)),
-                        new View.GridCell("right low", 1, cell == null ? List.of() : List.of(result(line, cell))),
+                        new View.GridCell("", 1, quantity),
+                        new View.GridCell(quantity.size() > 1 ? "right low" : "right", 1, cell == null ? List.of() : List.of(result(line, cell))),
                         new View.GridCell("", 1, source(line, cell))));
     }
 
@@ -80,9 +81,9 @@ final class WorkedGrid {
         List<View.Text> texts = new ArrayList<>();
         texts.add(View.Text.plain("", line.description()));
         Formula formula = cell == null ? null : cell.formula();
-        boolean written = !line.equation().isEmpty()
+        boolean noted = !line.equation().isEmpty()
                 && (formula == null || !line.equation().equals(PlainReading.of(formula)));
-        if (written) {
+        if (noted) {
             texts.add(View.Text.of("written", WrittenEquation.pieces(line.equation())));
         }
         if (cell == null || formula == null) {
@@ -90,16 +91,13 @@ final class WorkedGrid {
         }
         Inline inNumbers = numbers.of(cell, formula);
         boolean conversion = SubstitutedReading.isConversion(cell, formula);
-        if (handsOn(line, cell, formula) != null || conversion) {
-            if (!written) {
+        if (noted || conversion || handsOn(line, cell, formula) != null) {
+            if (!noted) {
                 texts.add(origin(line, cell, formula));
             }
             if (conversion) {
                 texts.add(View.Text.of("numbers", equation(List.of(), "= ", inNumbers)));
             }
-            return texts;
-        }
-        if (written) {
             return texts;
         }
         Inline inSymbols = TypesetReading.inSymbols(formula);
@@ -127,7 +125,7 @@ final class WorkedGrid {
                 ? View.Text.plain("written", "brought into the working unit")
                 : new View.Text(
                         "written",
-                        List.of(Piece.plain("from cell "), Piece.whole(links.address(origin))),
+                        List.of(Piece.plain("from cell "), Piece.plain(links.address(origin))),
                         links.to(origin));
     }
 
@@ -167,7 +165,7 @@ final class WorkedGrid {
             String all = line.forAll() != null && lines.caseNames().size() > 1 ? ", all cases" : "";
             texts.add(new View.Text(
                     "small",
-                    List.of(Piece.plain(kind + "cell "), Piece.whole(links.address(cell)), Piece.plain(all)),
+                    List.of(Piece.plain(kind + "cell "), Piece.plain(links.address(cell)), Piece.plain(all)),
                     links.to(cell)));
         }
         return texts;
