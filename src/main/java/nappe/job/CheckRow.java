@@ -38,6 +38,7 @@ public record CheckRow(
         String kind,
         String note) {
 
+    private static final String NUMBER = "(\\d+\\.?\\d*|\\.\\d+)([eE][-+]?\\d{1,3})?";
     private static final List<String> KINDS = List.of("published", "library", "derived", "memory");
 
     /** How far the computed value may be off, in the unit of the row. */
@@ -86,8 +87,16 @@ public record CheckRow(
 
     private static CheckRow row(String file, long line, CSVRecord record) {
         try {
+            if (!record.isConsistent()) {
+                throw new CheckException("the row has " + record.size() + " values, the head row names "
+                        + record.getParser().getHeaderNames().size());
+            }
+            String expected = record.get("expected");
+            if (!expected.matches("[-+]?" + NUMBER)) {
+                throw new CheckException("expected value \"" + expected + "\" is not a number");
+            }
             String tolerance = record.get("tolerance");
-            if (!tolerance.matches("[0-9.eE-]+ (%|abs)")) {
+            if (!tolerance.matches(NUMBER + " (%|abs)")) {
                 throw new CheckException("tolerance \"" + tolerance + "\" is neither like 0.1 % nor like 0.005 abs");
             }
             if (!KINDS.contains(record.get("kind"))) {
@@ -102,7 +111,7 @@ public record CheckRow(
                     record.get("entries"),
                     entries(record.get("entries")),
                     record.get("target"),
-                    Double.parseDouble(record.get("expected")),
+                    Double.parseDouble(expected),
                     Unit.parse(record.get("unit")),
                     tolerance,
                     record.get("source"),

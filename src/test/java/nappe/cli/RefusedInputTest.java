@@ -47,10 +47,6 @@ class RefusedInputTest {
         FAULTS.put(name, new Fault(change, where));
     }
 
-    private static String cell(String sheet, String symbol, String column) {
-        return address(sheet, symbol, column);
-    }
-
     static {
         fault("missing sheet", f -> f.change(w -> w.removeSheetAt(w.getSheetIndex("Flows"))), "sheet Flows", "sheet-missing");
         fault("missing entry", f -> f.cell("F1", at("z_f", "C")).setBlank(), "sheet F1, cell " + at("z_f", "C"), "entry-missing");
@@ -60,7 +56,7 @@ class RefusedInputTest {
         fault("number stored as text", f -> f.set("F1", at("z_f", "C"), "412.5"), "cell " + at("z_f", "C"), "stored as text");
         fault("unknown unit", f -> f.set("F1", at("z_f", "D"), "feet"), "cell " + at("z_f", "D"), "unit-unknown");
         fault("wrong dimension", f -> f.set("F1", at("z_f", "D"), "MGD"), "cell " + at("z_f", "D"), "unit-dimension");
-        fault("choice out of range", f -> f.set("F1", at("size", "C"), "11 ft"), "cell " + at("size", "C"), "3 ft");
+        fault("choice out of range", f -> f.set("F1", at("size", "C"), "11 ft"), "cell " + at("size", "C"), "word-unknown");
         fault("duplicate case", f -> f.set("Flows", flow(3, "A"), "Start-up, average day"), "cell " + flow(3, "A"));
         fault("duplicate tag", f -> secondElement(f, "F1"), "sheet Project", "F1");
         fault("impossible sign", f -> f.set("Flows", flow(2, "D"), -12.5), "sheet Flows, cell " + flow(2, "D"));
@@ -78,7 +74,7 @@ class RefusedInputTest {
     }
 
     private static String at(String symbol, String column) {
-        return cell("F1", symbol, column);
+        return address("F1", symbol, column);
     }
 
     /** The cell of a flow case of the sample, counted from 1. */
