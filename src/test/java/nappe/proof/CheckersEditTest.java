@@ -13,6 +13,7 @@ import java.util.Map;
 import nappe.calculation.Cell;
 import nappe.deliver.xlsx.Recalculated;
 import nappe.deliver.xlsx.Spoiler;
+import nappe.formula.Value;
 import nappe.proof.Typing.Demand;
 import nappe.proof.Typing.Entry;
 import nappe.proof.Typing.Flow;
@@ -118,10 +119,8 @@ class CheckersEditTest {
         for (List<Typing> typings : edits.values()) {
             books.add(typed(issued, typings));
         }
-        long start = System.nanoTime();
         List<Map<String, Object>> recalculated = Recalculated.byLibreOffice(books);
         List<String> faults = new ArrayList<>();
-        System.out.println("T " + (System.nanoTime() - start) / 1e9);
         int i = 0;
         for (Map.Entry<String, List<Typing>> edit : edits.entrySet()) {
             Package anew = anew(issued, inJava(edit.getValue()));
@@ -147,6 +146,30 @@ class CheckersEditTest {
     @Test
     void editsOfTheWeirGiveWhatIssuingAnewGives() throws IOException {
         proven("return-weir.xlsx", WEIR, 5);
+    }
+
+    /** A cell that is emptied is empty where "not given" stood; all that rests on it reads as not given. */
+    @Test
+    void headReadThatIsDeletedIsNotGiven() throws IOException {
+        Package issued = Package.ofSample("return-weir.xlsx");
+        Head deleted = new Head(2, "W1", null);
+        Package anew = anew(issued, List.of(deleted));
+        String emptied = "Cases!" + deleted.place(issued).address();
+        Map<String, Object> expected = new LinkedHashMap<>(Recalculated.asStored(file(anew.workbook())));
+        assertThat(expected.remove(emptied)).isEqualTo("not given");
+        Path file = typed(issued, List.of(deleted));
+        assertThat(Comparison.of(Recalculated.byLibreOffice(file), expected, anew.results()).faults()).isEmpty();
+        assertThat(Comparison.of(Recalculated.byGnumeric(file), expected, anew.results()).faults()).isEmpty();
+    }
+
+    /** What may be typed over in the issued workbook is what these edits type over: numbers and choices. */
+    @Test
+    void wordsThatAreUnlockedAreChoices() {
+        for (String sample : List.of("headworks.xlsx", "return-weir.xlsx")) {
+            assertThat(Package.ofSample(sample).results().cells())
+                    .filteredOn(c -> c.kind() == Cell.Kind.ENTRY && c.typed() instanceof Value.Word)
+                    .allMatch(c -> c.symbol().equals("size"));
+        }
     }
 
     @Test
