@@ -69,6 +69,11 @@ public final class ElementSheet {
         this.cases = cases;
     }
 
+    /** The lines laid, in order. */
+    public List<Block.Line> lines() {
+        return List.copyOf(lines);
+    }
+
     /** Lays everything; the scopes then know every symbol. */
     public List<LimitResult> lay(int workedCase, List<Demanded> demands) {
         firstRow = sheet.nextRow() + 1;

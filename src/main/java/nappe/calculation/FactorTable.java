@@ -4,6 +4,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import nappe.formula.Formula;
+import nappe.formula.Function;
 import nappe.formula.Operator;
 import nappe.formula.Sign;
 import nappe.formula.Value;
@@ -110,6 +111,11 @@ public final class FactorTable {
         if (zero != null) {
             scope.put("zero", zero);
             formula = new Formula.Operation(Operator.PLUS, formula, new Formula.Symbol("zero"));
+        }
+        if (typed.kind() == Cell.Kind.ENTRY && typed.sureness() != Sureness.SURE) {
+            // an entry that may stay blank may also be cleared in the workbook, and is then not nought
+            Formula given = Formulas.call(Function.IS_NUMBER, new Formula.Symbol(name));
+            formula = Formulas.iff(given, formula, new Formula.NoResult(Value.NOT_GIVEN));
         }
         return cells.live(place, symbol, unit, formula, scope);
     }

@@ -33,8 +33,8 @@ final class LimitRows {
 
     Judged lay(Limit limit, Scope scope, Strip strip) {
         Scope inner = scope.inner();
-        Formula lesser = side(limit.lesser(), "lesser", "lesser side", inner, strip);
-        Formula greater = side(limit.greater(), "greater", "greater side", inner, strip);
+        Formula lesser = side(limit.lesser(), "lesser", limit.label() + ": lesser side", inner, strip);
+        Formula greater = side(limit.greater(), "greater", limit.label() + ": greater side", inner, strip);
         Formula bound = limit.valueIsLesser() ? greater : lesser;
         Formula scale = limit.scale() == null ? call(Function.ABS, bound) : limit.scale();
         Cell margin = cells.live(strip.next(), "", nappe.unit.Unit.one(), over(minus(greater, lesser), scale), inner);

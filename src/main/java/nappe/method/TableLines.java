@@ -91,7 +91,9 @@ final class TableLines {
         String inside = "x_" + suffix();
         line(inside, call(Function.MIN, call(Function.MAX, keyNumber, start), last),
                 key + " as looked up, not beyond the ends of the table", first.sign());
-        line(row(), call(Function.MIN, call(Function.MATCH_BELOW, symbol(inside), column), number(table.rows() - 1)),
+        // A value at a row of the table is found at that row in every program, whatever its last bits are.
+        Formula nudged = plus(symbol(inside), nudge(first));
+        line(row(), call(Function.MIN, call(Function.MATCH_BELOW, nudged, column), number(table.rows() - 1)),
                 "row of the table " + table.name() + " below it", Sign.POSITIVE);
         Formula below = call(Function.INDEX, column, symbol(row()));
         Formula next = call(Function.INDEX, column, plus(symbol(row()), number(1)));
@@ -112,6 +114,12 @@ final class TableLines {
         double to = ((Value.Number) first.values().get(first.values().size() - 1)).value();
         String text = java.math.BigDecimal.valueOf(to).subtract(java.math.BigDecimal.valueOf(from)).toPlainString();
         return new Formula.Numeral(Double.parseDouble(text), text);
+    }
+
+    /** A billionth of the table's range. */
+    private static Formula nudge(CitedTable.Column first) {
+        double nudge = 1e-9 * ((Formula.Numeral) span(first)).value();
+        return new Formula.Numeral(nudge, Double.toString(nudge));
     }
 
     /** Adds the line of one column of the table that was opened last. */

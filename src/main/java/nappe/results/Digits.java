@@ -35,6 +35,9 @@ public final class Digits {
         if (value == 0) {
             return 0;
         }
+        if (Math.abs(value) < 5e-10) {
+            return figures;
+        }
         int decimals = figures - 1 - (int) Math.floor(Math.log10(Math.abs(value)));
         return Math.max(0, Math.min(9, decimals));
     }

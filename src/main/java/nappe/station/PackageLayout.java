@@ -71,23 +71,33 @@ public final class PackageLayout {
         SheetDraft entrySheet = draft("Entries", "Entries and demands, with sources", "what was typed, in its unit and in working units");
         SheetDraft constantSheet = draft("Constants", "Constants and conversion factors", "cited numbers and factors in use");
         SheetDraft tableSheet = draft("Tables", "Cited tables", "published coefficients that the lines look up");
+        SheetDraft standingSheet = hasRemarks()
+                ? draft("Standing", "Standing of the tabled numbers", "row by row: what was read where, what is from memory")
+                : tableSheet;
         Map<String, SheetDraft> elementSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> ratingSheets = new LinkedHashMap<>();
         for (Design.Element element : design.elements()) {
             String title = element.tag() + "  " + EntriesSheet.title(element, method(element));
-            elementSheets.put(element.tag(), draft(element.tag(), title, "method, one case worked in full, every case, limits"));
+            SheetDraft methodSheet = draft(
+                    element.tag() + " method", element.tag() + "  Method and limits of use", "what the method says, and where it holds");
+            method(element).about().forEach(methodSheet::note);
+            methodSheet.heading("Cautions");
+            method(element).cautions().forEach(methodSheet::caution);
+            elementSheets.put(element.tag(), draft(element.tag(), title, "one case worked in full, every case, limits"));
             if (!method(element).ratings().isEmpty()) {
                 ratingSheets.put(element.tag(), draft(
                         element.tag() + " rating", element.tag() + "  Rating table", "flow for equal steps of head, over the usable range"));
             }
         }
         SheetDraft assumptionSheet = draft("Assumptions", "Assumptions", "each with basis and owner, open or closed");
+        SheetDraft glossarySheet = draft("Glossary", "Glossary and dependence", "every symbol, what it rests on, what rests on it");
+        SheetDraft checkerSheet = draft("Checker", "Checker's record", "every formula with its cell, room for tick, initials and comment");
         SheetDraft referenceSheet = draft("References", "References", "publications and tables cited");
         SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
 
         Cells cells = new Cells(design.project().system(), constantSheet);
-        Sources sources = new Sources(cells, constantSheet, tableSheet);
+        Sources sources = new Sources(cells, constantSheet, tableSheet, standingSheet);
         List<MethodSheet> distinct = methods.values().stream().distinct().toList();
         Map<String, Map<String, Cell>> constants = sources.layConstants(distinct);
         CasesSheet cases = new CasesSheet(cells, caseSheet, design.cases());
@@ -107,6 +117,7 @@ public final class PackageLayout {
         ItemLayout items = new ItemLayout(cells, trialRows);
         List<ElementSheet.LimitResult> limits = new ArrayList<>();
         Map<String, Block.Table> ratings = new LinkedHashMap<>();
+        Map<String, List<Block.Line>> linesOf = new LinkedHashMap<>();
         List<Scope> downstream = List.of();
         MethodSheet below = null;
         for (Design.Element element : design.elements()) {
@@ -114,11 +125,10 @@ public final class PackageLayout {
             Scope scope = java.util.Objects.requireNonNull(scopes.get(element.tag()));
             List<Scope> caseScopes = caseScopes(element, method, scope, cases, below, downstream);
             SheetDraft sheet = java.util.Objects.requireNonNull(elementSheets.get(element.tag()));
-            method.about().forEach(sheet::note);
-            method.cautions().forEach(sheet::caution);
-            sheet.gap();
-            limits.addAll(new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes)
-                    .lay(workedCase(), demanded(element, demands)));
+            ElementSheet laid =
+                    new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes);
+            limits.addAll(laid.lay(workedCase(), demanded(element, demands)));
+            linesOf.put(element.tag(), laid.lines());
             SheetDraft ratingSheet = ratingSheets.get(element.tag());
             if (ratingSheet != null) {
                 ratings.put(element.tag(), rating(element, method, items, scope, ratingSheet, trialRows));
@@ -130,6 +140,8 @@ public final class PackageLayout {
         BackSheets back = new BackSheets(cells, design);
         back.roots(trialSheet, trialRows.solved());
         Run verdicts = new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
+        CheckerSheets.glossary(glossarySheet, linesOf);
+        CheckerSheets.formulas(checkerSheet, linesOf);
         back.assumptions(assumptionSheet);
         back.references(referenceSheet, distinct);
         back.software(softwareSheet, software);
@@ -142,6 +154,13 @@ public final class PackageLayout {
             sheets.add(drafts.get(i).finish(i + 1));
         }
         return new Layout(List.copyOf(sheets), List.copyOf(cells.all()), ratings);
+    }
+
+    private boolean hasRemarks() {
+        return methods.values().stream()
+                .flatMap(method -> method.tables().values().stream())
+                .flatMap(table -> table.columns().stream())
+                .anyMatch(Sources::isRemark);
     }
 
     private MethodSheet method(Design.Element element) {

@@ -25,12 +25,14 @@ final class Sources {
     private final Cells cells;
     private final SheetDraft constants;
     private final SheetDraft tables;
+    private final SheetDraft standing;
     private final Map<String, Map<String, Run>> runs = new LinkedHashMap<>();
 
-    Sources(Cells cells, SheetDraft constants, SheetDraft tables) {
+    Sources(Cells cells, SheetDraft constants, SheetDraft tables, SheetDraft standing) {
         this.cells = cells;
         this.constants = constants;
         this.tables = tables;
+        this.standing = standing;
     }
 
     /** Lays the constants of each method; they must stand before the first conversion factor is asked for. */
@@ -88,19 +90,19 @@ final class Sources {
         List<CitedTable.Column> narrow = table.columns().stream().filter(c -> !isRemark(c)).toList();
         List<CitedTable.Column> remarks = table.columns().stream().filter(Sources::isRemark).toList();
         Map<String, Run> known = new LinkedHashMap<>();
-        lay(table, narrow, "", known);
+        lay(table, narrow, tables, "", known);
         if (!remarks.isEmpty()) {
-            lay(table, remarks, "Standing of the numbers, row by row", known);
+            lay(table, remarks, standing, table.title(), known);
         }
         return known;
     }
 
-    /** A column of long words stands in a table of its own, with the key repeated, so that both stay readable. */
-    private static boolean isRemark(CitedTable.Column column) {
+    /** A column of long words stands on a sheet of its own, with the key repeated, so that both stay readable. */
+    static boolean isRemark(CitedTable.Column column) {
         return column.isWords() && longest(column) > LONG_WORDS;
     }
 
-    private void lay(CitedTable table, List<CitedTable.Column> columns, String title, Map<String, Run> known) {
+    private void lay(CitedTable table, List<CitedTable.Column> columns, SheetDraft sheet, String title, Map<String, Run> known) {
         CitedTable.Column key = table.columns().get(0);
         boolean repeatsKey = !columns.contains(key);
         List<Block.Column> heads = new ArrayList<>();
@@ -108,7 +110,7 @@ final class Sources {
             heads.add(head(key));
         }
         columns.forEach(column -> heads.add(head(column)));
-        TableDraft draft = tables.table(title, heads);
+        TableDraft draft = sheet.table(title, heads);
         List<List<Cell>> cellsOf = new ArrayList<>();
         columns.forEach(column -> cellsOf.add(new ArrayList<>()));
         for (int r = 0; r < table.rows(); r++) {
@@ -131,7 +133,7 @@ final class Sources {
             }
             draft.add(row);
         }
-        tables.gap();
+        sheet.gap();
         for (int c = 0; c < columns.size(); c++) {
             known.put(table.name() + "." + columns.get(c).symbol(), new Run(cellsOf.get(c)));
         }
