@@ -176,7 +176,8 @@ class SpreadsheetReadingTest {
                 .isEqualTo("IF(ISNUMBER(B8),IF(ISNUMBER(B7),B7+B8,0),IF(B8=\"\",\"not given\",B8))");
         assertThat(text(FormulaParser.parse("if(u = \"free\", a, b)"), Sureness.SURE))
                 .isEqualTo("IF(B7=\"free\",B1,B2)");
-        assertThat(text(FormulaParser.parse("u"), Sureness.MAY_BE_WORDS)).isEqualTo("B7");
+        assertThat(text(FormulaParser.parse("u"), Sureness.MAY_BE_WORDS))
+                .isEqualTo("IF(B7=\"\",\"not given\",B7)");
     }
 
     @Test
