@@ -180,7 +180,7 @@ final class TableLines {
     private String keyLabel() {
         return draft.items.stream()
                 .filter(item -> item.outputs().contains(key))
-                .map(item -> item instanceof Item.Line line ? line.label() : key)
+                .map(item -> item instanceof Item.Line line ? line.label() : item instanceof Item.Given given ? given.label() : key)
                 .findFirst()
                 .orElse(key);
     }
