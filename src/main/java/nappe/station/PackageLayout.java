@@ -11,7 +11,6 @@ import nappe.calculation.Cells;
 import nappe.calculation.ElementSheet;
 import nappe.calculation.ItemLayout;
 import nappe.calculation.RatingGrid;
-import nappe.calculation.Run;
 import nappe.calculation.Scope;
 import nappe.calculation.Sheet;
 import nappe.calculation.SheetDraft;
@@ -90,6 +89,8 @@ public final class PackageLayout {
             }
         }
         SheetDraft assumptionSheet = draft("Assumptions", "Assumptions", "each with basis and owner, open or closed");
+        SheetDraft glossarySheet = draft("Glossary", "Glossary and dependence", "every symbol, what it rests on, what rests on it");
+        SheetDraft checkerSheet = draft("Checker", "Checker's record", "every formula with its cell, room for tick, initials and comment");
         SheetDraft referenceSheet = draft("References", "References", "publications and tables cited");
         SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
@@ -115,6 +116,7 @@ public final class PackageLayout {
         ItemLayout items = new ItemLayout(cells, trialRows);
         List<ElementSheet.LimitResult> limits = new ArrayList<>();
         Map<String, Block.Table> ratings = new LinkedHashMap<>();
+        Map<String, List<Block.Line>> linesOf = new LinkedHashMap<>();
         List<Scope> downstream = List.of();
         MethodSheet below = null;
         for (Design.Element element : design.elements()) {
@@ -122,8 +124,10 @@ public final class PackageLayout {
             Scope scope = java.util.Objects.requireNonNull(scopes.get(element.tag()));
             List<Scope> caseScopes = caseScopes(element, method, scope, cases, below, downstream);
             SheetDraft sheet = java.util.Objects.requireNonNull(elementSheets.get(element.tag()));
-            limits.addAll(new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes)
-                    .lay(workedCase(), demanded(element, demands)));
+            ElementSheet laid =
+                    new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes);
+            limits.addAll(laid.lay(workedCase(), demanded(element, demands)));
+            linesOf.put(element.tag(), laid.lines());
             SheetDraft ratingSheet = ratingSheets.get(element.tag());
             if (ratingSheet != null) {
                 Block.Table table = rating(element, method, items, scope, ratingSheet, trialRows);
@@ -137,12 +141,14 @@ public final class PackageLayout {
 
         BackSheets back = new BackSheets(cells, design);
         back.roots(trialSheet, trialRows.solved());
-        Run verdicts = new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
+        SummarySheet.Sorted sorted = new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
+        CheckerSheets.glossary(glossarySheet, linesOf);
+        CheckerSheets.formulas(checkerSheet, linesOf);
         back.assumptions(assumptionSheet);
         back.references(referenceSheet, distinct);
         back.software(softwareSheet, software);
         FrontSheets front = new FrontSheets(cells, design);
-        front.cover(cover, verdicts);
+        front.cover(cover, sorted);
         front.index(index, drafts, contents);
 
         List<Sheet> sheets = new ArrayList<>();
@@ -220,21 +226,28 @@ public final class PackageLayout {
 
     private List<ElementSheet.Demanded> demanded(Design.Element element, Map<Design.Demand, Cell> cells) {
         List<ElementSheet.Demanded> demanded = new ArrayList<>();
-        int number = 1;
         for (Design.Demand demand : design.demands()) {
             if (demand.tag().equalsIgnoreCase(element.tag())) {
-                String name = "demand_" + number;
+                String name = "bound";
                 Formula value = new Formula.Symbol(demand.symbol());
                 Formula bound = new Formula.Symbol(name);
+                Formula scale = scale(demand);
                 Limit limit = demand.atMost()
-                        ? new Limit(value, bound, true, null, null, demand.description(), demand.citation())
-                        : new Limit(bound, value, false, null, null, demand.description(), demand.citation());
+                        ? new Limit(value, bound, true, scale, null, demand.description(), demand.citation())
+                        : new Limit(bound, value, false, scale, null, demand.description(), demand.citation());
                 demanded.add(new ElementSheet.Demanded(
                         limit, Map.of(name, java.util.Objects.requireNonNull(cells.get(demand)))));
             }
-            number++;
         }
         return demanded;
+    }
+
+    /** A fraction of an elevation means nothing: what is left to a demanded length or level is counted in feet or metres. */
+    private Formula scale(Design.Demand demand) {
+        Dimension dimension = demand.value().unit().dimension();
+        return dimension.equals(Dimension.LENGTH)
+                ? new Formula.Quantity(1, "1", design.project().system().coherentUnit(dimension))
+                : new Formula.Call(nappe.formula.Function.ABS, List.of(new Formula.Symbol("bound")));
     }
 
     private Block.Table rating(
@@ -251,7 +264,7 @@ public final class PackageLayout {
                 reports.put(unit.dimension(), unit);
             }
         }
-        sheet.note("Free flow only. Outside this range, and where the tailwater slows the device, no result is claimed.");
+        sheet.note("Only for free flow as the method defines it. Outside this range, or where a limit of the device is not met, no result is claimed.");
         method.cautions().forEach(sheet::caution);
         sheet.gap();
         return new RatingGrid(items, method, reports)

@@ -110,7 +110,7 @@ final class RatingCurve {
                 new Block.Column(head + " [" + up + "]", 14, Block.Align.RIGHT),
                 new Block.Column("marked at " + flow, 14, Block.Align.RIGHT),
                 new Block.Column("marked at " + head, 14, Block.Align.RIGHT),
-                new Block.Column("Case", 14, Block.Align.LEFT)));
+                new Block.Column("Case", 14, Block.Align.LEFT)), cases.size());
         List<Cell> flows = new ArrayList<>();
         List<Cell> heads = new ArrayList<>();
         for (int c = 0; c < cases.size(); c++) {
@@ -125,7 +125,6 @@ final class RatingCurve {
                     new Block.Content(heads.get(c)),
                     new Block.Text(caseNames.get(c))));
         }
-        sheet.gap();
         return new Block.Series("flow cases", false, new Run(flows), new Run(heads));
     }
 

@@ -45,6 +45,7 @@ final class Between {
         return waiting.isEmpty()
                 ? List.of()
                 : List.of(new View.GridRow(
-                        "", List.of(new View.GridCell("", columns, List.of(View.Text.plain("between wraps", waiting))))));
+                        "",
+                        List.of(new View.GridCell("", columns, List.of(View.Text.plain("between wraps", waiting))))));
     }
 }

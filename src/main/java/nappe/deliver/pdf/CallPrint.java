@@ -19,11 +19,11 @@ final class CallPrint {
             case ASIN -> named("arcsin", of);
             case ACOS -> named("arccos", of);
             case ATAN -> named("arctan", of);
-            case EXP, LN, SIN, COS, TAN, TANH, MIN, MAX -> named(
-                    call.function().name().toLowerCase(Locale.ROOT), of);
+            case EXP, LN, SIN, COS, TAN, TANH, MIN, MAX ->
+                named(call.function().name().toLowerCase(Locale.ROOT), of);
             case MATCH -> words("place of ", of.get(0), " in ", of.get(1));
             case MATCH_BELOW -> words("place of the last not above ", of.get(0), " in ", of.get(1));
-            case INDEX -> words("entry of ", of.get(0), " at ", of.get(1).bracketed());
+            case INDEX -> words("entry ", of.get(1).within(Inline.POWER), " of ", of.get(0));
             case SMALL -> words("number ", of.get(1), " from the smallest of ", of.get(0));
             case LOWEST_OF -> Inline.join(Inline.SUM, Inline.text("smallest of "), of.get(0));
             case TALLY -> words("count of ", of.get(1), " in ", of.get(0));
@@ -34,8 +34,7 @@ final class CallPrint {
 
     /** {@code a if c, otherwise b}; a chain of choices reads on without brackets. */
     private static Inline choice(Formula.Call call, List<Inline> of) {
-        boolean chained =
-                call.arguments().get(2) instanceof Formula.Call other && other.function() == call.function();
+        boolean chained = call.arguments().get(2) instanceof Formula.Call other && other.function() == call.function();
         Inline yes = call.arguments().get(1) instanceof Formula.Call inner && inner.function() == call.function()
                 ? of.get(1).bracketed()
                 : of.get(1);
@@ -57,7 +56,8 @@ final class CallPrint {
     }
 
     private static Inline lowered(String name, String below) {
-        return Inline.of(Inline.ATOM, List.of(Piece.plain(name), Piece.plain(below).lowered()));
+        return Inline.of(
+                Inline.ATOM, List.of(Piece.plain(name), Piece.plain(below).lowered()));
     }
 
     private static Inline words(String before, Inline first, String between, Inline second) {

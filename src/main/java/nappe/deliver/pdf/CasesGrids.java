@@ -110,7 +110,8 @@ final class CasesGrids {
             head.add(View.GridCell.of("", View.Text.plain("", name)));
         }
         for (int i = from; i < to; i++) {
-            head.add(View.GridCell.of("right", View.Text.plain("", lines.caseNames().get(i))));
+            head.add(View.GridCell.of(
+                    "right", View.Text.plain("", lines.caseNames().get(i))));
         }
         List<View.GridRow> body = new ArrayList<>();
         Between between = new Between(width);
@@ -133,7 +134,7 @@ final class CasesGrids {
         List<View.GridCell> cells = new ArrayList<>();
         cells.add(View.GridCell.of("", View.Text.plain("", line.code())));
         cells.add(View.GridCell.of("", symbol(line)));
-        cells.add(View.GridCell.of("", View.Text.plain("", line.description())));
+        cells.add(View.GridCell.of("", View.Text.of("", SymbolPrint.inText(line.description()))));
         cells.add(View.GridCell.of("", View.Text.of("", unit(line))));
         for (int i = from; i < to; i++) {
             cells.add(View.GridCell.of("right", value(line, i)));

@@ -51,8 +51,9 @@ public record Furnishing(
                 "calculation number", furniture.number(),
                 "revision", furniture.revision(),
                 "status", furniture.status()));
-        whole.values().removeIf(text -> Stream.of(firm, project, client, subject, number, revision, status)
-                .anyMatch(printed -> printed.equals(XmlText.safe(text))));
+        whole.values()
+                .removeIf(text -> Stream.of(firm, project, client, subject, number, revision, status)
+                        .anyMatch(printed -> printed.equals(XmlText.safe(text))));
         return whole.keySet().stream()
                 .map(field -> "the " + field + " is too long for the head of the page and is cut there")
                 .toList();
@@ -60,7 +61,7 @@ public record Furnishing(
 
     /** The height of the page foot in mm. */
     double footHeight(PageSize page) {
-        double width = page.upright() * 0.66;
+        double width = page.upright() * 0.72;
         double height = 2;
         for (String caution : cautions) {
             height += lines(caution, width, 7) * 7 * POINT_LINE;

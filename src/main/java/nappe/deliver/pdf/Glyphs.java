@@ -51,7 +51,11 @@ final class Glyphs extends ITextTextRenderer {
 
     @Override
     public void drawString(
-            OutputDevice device, String text, float x, float y, @org.jspecify.annotations.Nullable JustificationInfo info) {
+            OutputDevice device,
+            String text,
+            float x,
+            float y,
+            @org.jspecify.annotations.Nullable JustificationInfo info) {
         FSFont font = device instanceof Paper paper ? paper.font() : null;
         if (font == null) {
             throw new IllegalStateException("no font is set");
@@ -75,13 +79,7 @@ final class Glyphs extends ITextTextRenderer {
     @Override
     public FSFontMetrics getFSFontMetrics(FontContext context, FSFont font, String text) {
         float size = font.getSize2D();
-        return new ITextFSFontMetrics(
-                ASCENT * size,
-                DESCENT * size,
-                -size / 4,
-                size / 12,
-                size / 10,
-                size / 20);
+        return new ITextFSFontMetrics(ASCENT * size, DESCENT * size, -size / 4, size / 12, size / 10, size / 20);
     }
 
     private static BaseFont face(FSFont font) {

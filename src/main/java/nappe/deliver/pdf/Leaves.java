@@ -9,7 +9,7 @@ import nappe.results.Results;
 
 /** The sheets of a package as the template prints them. */
 final class Leaves {
-    /** A note with these words, on the sheet named Cover, stands for a clear square. */
+    /** A note with these words, on the sheet named Cover, stands for a clear square at the head of the cover, right. */
     private static final String SEAL_SPACE = "(space for a seal)";
 
     private static final String COVER = "Cover";
@@ -29,15 +29,19 @@ final class Leaves {
     private View.Leaf leaf(Sheet sheet) {
         Links links = new Links(results.sheets(), sheet.name());
         boolean wide = sheet.blocks().stream()
-                .anyMatch(block -> block instanceof Block.Table table
-                        && new TableGrid(results, links, table).isWide(page));
-        double width = wide ? page.wide() : page.upright();
+                .anyMatch(block ->
+                        block instanceof Block.Table table && new TableGrid(results, links, table).isWide(page));
+        boolean sealed = sheet.blocks().stream().anyMatch(block -> isSealSpace(sheet, block));
+        double width = wide ? page.wide() : page.upright() - (sealed ? View.SealSpace.ROOM : 0);
         List<View.Part> parts = new ArrayList<>();
+        if (sealed) {
+            parts.add(new View.SealSpace());
+        }
         List<Block.Heading> headings = new ArrayList<>();
         for (Block block : sheet.blocks()) {
             if (block instanceof Block.Heading heading) {
                 headings.add(heading);
-            } else {
+            } else if (!isSealSpace(sheet, block)) {
                 parts.addAll(parts(sheet, links, block, headings, width));
                 headings.clear();
             }
@@ -47,8 +51,7 @@ final class Leaves {
         return new View.Leaf(Links.id(sheet.number()), sheet.number(), XmlText.safe(sheet.title()), style, parts);
     }
 
-    private List<View.Part> parts(
-            Sheet sheet, Links links, Block block, List<Block.Heading> headings, double width) {
+    private List<View.Part> parts(Sheet sheet, Links links, Block block, List<Block.Heading> headings, double width) {
         List<View.Text> titles = headings.stream()
                 .map(heading -> View.Text.plain("heading", heading.text()))
                 .toList();
@@ -62,7 +65,7 @@ final class Leaves {
         } else if (block instanceof Block.WorkbookOnly elsewhere) {
             return under(headings, List.of(elsewhere(sheet, elsewhere.table())));
         } else if (block instanceof Block.Note note) {
-            return under(headings, note(sheet, note));
+            return under(headings, note(note));
         } else if (block instanceof Block.Chart) {
             return under(headings, List.of());
         }
@@ -75,16 +78,18 @@ final class Leaves {
             return List.copyOf(parts);
         }
         List<View.Part> together = new ArrayList<>();
-        headings.forEach(heading ->
-                together.add(new View.Paragraph("heading", View.Text.plain("", heading.text()))));
+        headings.forEach(heading -> together.add(new View.Paragraph("heading", View.Text.plain("", heading.text()))));
         together.addAll(parts);
         return List.of(new View.Together(together));
     }
 
-    private static List<View.Part> note(Sheet sheet, Block.Note note) {
-        if (sheet.name().equals(COVER) && note.text().equals(SEAL_SPACE)) {
-            return List.of(new View.SealSpace());
-        }
+    private static boolean isSealSpace(Sheet sheet, Block block) {
+        return sheet.name().equals(COVER)
+                && block instanceof Block.Note note
+                && note.text().equals(SEAL_SPACE);
+    }
+
+    private static List<View.Part> note(Block.Note note) {
         List<View.Part> paragraphs = new ArrayList<>();
         for (String line : note.text().split("\n")) {
             paragraphs.add(new View.Paragraph(note.caution() ? "warn" : "note", View.Text.plain("", line)));

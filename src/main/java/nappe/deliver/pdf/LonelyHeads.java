@@ -29,7 +29,8 @@ final class LonelyHeads {
     /** Marks such tables in the document that was laid out; true where there were any and it must be laid out again. */
     static boolean moved(ITextRenderer renderer) {
         Box root = Objects.requireNonNull(renderer.getRootBox());
-        LonelyHeads heads = new LonelyHeads(Objects.requireNonNull(root.getLayer()).getPages());
+        LonelyHeads heads =
+                new LonelyHeads(Objects.requireNonNull(root.getLayer()).getPages());
         heads.search(root, -1);
         return heads.found;
     }

@@ -18,10 +18,14 @@ public record PdfDelivery(byte[] bytes, List<String> warnings) {
         Furnishing furnishing = Furnishing.of(results.furniture(), page);
         String title = furnishing.number() + " " + furnishing.subject() + ", revision " + furnishing.revision();
         String xhtml = Xhtml.fill(Map.of(
-                "title", title,
-                "furnishing", furnishing,
-                "pageRule", page.rules(furnishing.footHeight(page)),
-                "leaves", new Leaves(results, page).leaves()));
+                "title",
+                title,
+                "furnishing",
+                furnishing,
+                "pageRule",
+                page.rules(furnishing.footHeight(page)),
+                "leaves",
+                new Leaves(results, page).leaves()));
         PdfDelivery written = PdfWriting.write(xhtml, results.furniture());
         List<String> warnings = new ArrayList<>(furnishing.warnings(results.furniture()));
         warnings.addAll(written.warnings());

@@ -42,23 +42,21 @@ public record Piece(String text, Face face, Shift shift) {
 
     /** The same as part of an exponent. */
     Piece raised() {
-        Shift higher =
-                switch (shift) {
-                    case NONE -> Shift.RAISED;
-                    case LOWERED, LOWERED_IN_RAISED -> Shift.LOWERED_IN_RAISED;
-                    case RAISED, RAISED_TWICE -> Shift.RAISED_TWICE;
-                };
+        Shift higher = switch (shift) {
+            case NONE -> Shift.RAISED;
+            case LOWERED, LOWERED_IN_RAISED -> Shift.LOWERED_IN_RAISED;
+            case RAISED, RAISED_TWICE -> Shift.RAISED_TWICE;
+        };
         return new Piece(text, face, higher);
     }
 
     /** Class names for the style sheet. */
     public String style() {
-        String look =
-                switch (face) {
-                    case PLAIN -> "t";
-                    case ITALIC -> "i";
-                    case BOLD -> "b";
-                };
+        String look = switch (face) {
+            case PLAIN -> "t";
+            case ITALIC -> "i";
+            case BOLD -> "b";
+        };
         return switch (shift) {
             case NONE -> look;
             case LOWERED -> look + " sub";

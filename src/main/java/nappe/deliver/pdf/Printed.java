@@ -28,8 +28,6 @@ final class Printed {
     /** The value with its unit, where it is a number. */
     static List<Piece> withUnit(Results results, Cell cell) {
         String value = value(results, cell);
-        return isNumber(results, cell)
-                ? UnitPrint.after(value, cell.unit().text())
-                : List.of(Piece.plain(value));
+        return isNumber(results, cell) ? UnitPrint.after(value, cell.unit().text()) : List.of(Piece.plain(value));
     }
 }

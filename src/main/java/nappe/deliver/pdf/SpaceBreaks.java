@@ -32,7 +32,8 @@ final class SpaceBreaks implements LineBreakingStrategy {
     private static boolean mayBreak(String text, int at) {
         char before = text.charAt(at - 1);
         char after = text.charAt(at);
-        boolean hyphen = before == '-' && at > 1 && Character.isLetter(text.charAt(at - 2)) && Character.isLetter(after);
+        boolean hyphen =
+                before == '-' && at > 1 && Character.isLetter(text.charAt(at - 2)) && Character.isLetter(after);
         return before == ' ' && after != ' ' || hyphen;
     }
 }

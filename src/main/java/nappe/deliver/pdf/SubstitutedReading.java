@@ -16,6 +16,9 @@ final class SubstitutedReading {
     /** Digits beyond those of a result, so that a hand calculation from the printed numbers gives the printed result. */
     private static final int EXTRA = 2;
 
+    /** Whole numbers up to here are printed without decimals: they are exact as they stand. */
+    private static final double LARGEST_WHOLE = 1e6;
+
     private final Results results;
 
     SubstitutedReading(Results results) {
@@ -90,7 +93,8 @@ final class SubstitutedReading {
     }
 
     private static String digits(Cell cell, double value) {
-        return cell.kind() == Cell.Kind.FORMULA
+        boolean whole = value == Math.rint(value) && Math.abs(value) < LARGEST_WHOLE;
+        return cell.kind() == Cell.Kind.FORMULA && !whole
                 ? Digits.print(value, Math.min(12, Digits.decimals(cell.unit(), value) + EXTRA))
                 : Digits.asTyped(value);
     }

@@ -2,6 +2,7 @@ package nappe.deliver.pdf;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.formula.Formula;
@@ -45,7 +46,8 @@ final class TableGrid {
 
     private void measure(int column, View.Text text, boolean head) {
         String characters = text.characters();
-        boolean whole = !head && (Decimals.isNumber(characters) || text.style().equals("whole"));
+        boolean whole = !head
+                && (Decimals.isNumber(characters) || text.style().equals("whole") || Verdicts.isGrave(characters));
         for (ColumnWidths widths : List.of(measured, tight)) {
             if (whole) {
                 widths.whole(column, characters + "00");
@@ -68,7 +70,7 @@ final class TableGrid {
     View.Grid grid(List<View.Text> headings, double width) {
         List<View.Text> titles = new ArrayList<>(headings);
         if (!table.title().isEmpty()) {
-            titles.add(View.Text.plain("tabletitle", table.title()));
+            titles.add(View.Text.of("tabletitle", SymbolPrint.inText(table.title())));
         }
         double over = titles.stream()
                 .mapToDouble(title -> Typefaces.width(title.characters(), Typefaces.BOLD, 11) + 4)
@@ -89,18 +91,18 @@ final class TableGrid {
         return new View.GridRow("", cells);
     }
 
+    /** A row; one with nothing after its first words is a blank to be filled in by hand, and higher. */
     private View.GridRow row(List<View.Text> printed) {
         List<View.GridCell> cells = new ArrayList<>();
         for (int i = 0; i < printed.size(); i++) {
             View.Text text = printed.get(i);
             Block.Column column = table.columns().get(i);
-            String room = column.align() == Block.Align.RIGHT
-                    ? decimals.get(i).room(text.characters())
-                    : text.style();
-            cells.add(View.GridCell.of(
-                    style(column), new View.Text(room, text.pieces(), text.target())));
+            String room = column.align() == Block.Align.RIGHT ? decimals.get(i).room(text.characters()) : text.style();
+            cells.add(View.GridCell.of(style(column), new View.Text(room, text.pieces(), text.target())));
         }
-        return new View.GridRow("", cells);
+        boolean blank = printed.size() > 1
+                && printed.stream().skip(1).allMatch(text -> text.characters().isEmpty());
+        return new View.GridRow(blank ? "blank" : "", cells);
     }
 
     private static String style(Block.Column column) {
@@ -113,7 +115,7 @@ final class TableGrid {
 
     private View.Text text(Block.Item item, Block.Column column) {
         if (item instanceof Block.Text words) {
-            return column.head().equals("Unit")
+            return column.head().toLowerCase(Locale.ROOT).endsWith("unit")
                     ? View.Text.of("whole", UnitPrint.named(words.text()))
                     : View.Text.of("", List.of(Verdicts.weigh(words.text())));
         } else if (item instanceof Block.Symbol symbol) {
@@ -123,7 +125,8 @@ final class TableGrid {
         } else if (item instanceof Block.Equation equation) {
             return View.Text.of("formula", equation(equation.cell()));
         } else if (item instanceof Block.Address address) {
-            return new View.Text("whole", List.of(Piece.plain(links.address(address.cell()))), links.to(address.cell()));
+            return new View.Text(
+                    "whole", List.of(Piece.plain(links.address(address.cell()))), links.to(address.cell()));
         } else if (item instanceof Block.Jump jump) {
             return new View.Text("", List.of(Piece.plain(jump.text())), links.to(jump.to()));
         } else if (item instanceof Block.SheetLink link) {

@@ -15,23 +15,31 @@ final class TypesetReading implements Reading<Inline> {
     private static final String THIN = "\u2009";
 
     private final Function<String, Inline> names;
+    private final boolean crosses;
 
-    private TypesetReading(Function<String, Inline> names) {
+    private TypesetReading(Function<String, Inline> names, boolean crosses) {
         this.names = names;
+        this.crosses = crosses;
     }
 
     /** The formula in symbols. */
     static Inline inSymbols(Formula formula) {
-        return formula.read(new TypesetReading(TypesetReading::name));
+        return formula.read(new TypesetReading(TypesetReading::name, false));
     }
 
-    /** The formula with what the function gives for each name. */
+    /** The formula with what the function gives for each name, and a cross for every product. */
     static Inline with(Function<String, Inline> names, Formula formula) {
-        return formula.read(new TypesetReading(names));
+        return formula.read(new TypesetReading(names, true));
     }
 
-    /** A name as a symbol; {@code before(x)} and the like keep their word. */
+    /** A name as a symbol; {@code before(x)} and the like keep their word; {@code sizes.C} is a column of a table. */
     static Inline name(String name) {
+        int point = name.lastIndexOf('.');
+        if (point > 0 && point < name.length() - 1) {
+            Inline column = Inline.of(Inline.ATOM, SymbolPrint.pieces(name.substring(point + 1)));
+            return Inline.join(
+                    Inline.ATOM, Inline.text("column "), column, Inline.text(" of " + name.substring(0, point)));
+        }
         int bracket = name.indexOf('(');
         if (bracket > 0 && name.endsWith(")")) {
             Inline of = name(name.substring(bracket + 1, name.length() - 1));
@@ -95,8 +103,8 @@ final class TypesetReading implements Reading<Inline> {
         return Inline.join(operator.binding(), left, Inline.text(sign), second);
     }
 
-    private static Inline times(Inline left, Inline right) {
-        boolean cross = right.numberFirst() || left.unitLast();
+    private Inline times(Inline left, Inline right) {
+        boolean cross = crosses || right.numberFirst() || left.unitLast();
         return infix(Operator.TIMES, left, cross ? " × " : " ", right);
     }
 
@@ -132,7 +140,8 @@ final class TypesetReading implements Reading<Inline> {
     public Inline logic(Formula.Logic logic) {
         List<Formula> parts = logic.parts();
         if (logic.kind().equals("not")) {
-            return Inline.join(Inline.LOOSE, Inline.text("not "), parts.get(0).read(this).within(Inline.SUM));
+            return Inline.join(
+                    Inline.LOOSE, Inline.text("not "), parts.get(0).read(this).within(Inline.SUM));
         }
         Inline all = part(parts.get(0));
         for (Formula part : parts.subList(1, parts.size())) {

@@ -45,10 +45,10 @@ final class UnitPrint {
     static View.Text head(String head) {
         Matcher unit = IN_BRACKETS.matcher(head);
         if (!unit.find() || !isUnit(unit.group(1))) {
-            return View.Text.plain("", head);
+            return View.Text.of("", symbol(head));
         }
         List<Piece> pieces = new ArrayList<>();
-        pieces.add(Piece.plain(head.substring(0, unit.start())));
+        pieces.addAll(symbol(head.substring(0, unit.start())));
         List<Piece> named = named(unit.group(1));
         for (int i = 0; i < named.size(); i++) {
             String open = i == 0 ? head.substring(unit.start(), unit.start() + 1) : "";
@@ -57,6 +57,11 @@ final class UnitPrint {
             pieces.add(new Piece(open + piece.text() + close, piece.face(), piece.shift()));
         }
         return View.Text.of("", pieces);
+    }
+
+    /** A head that is one letter is a symbol, and so is a letter with a subscript. */
+    private static List<Piece> symbol(String head) {
+        return head.strip().length() == 1 ? List.of(Piece.italic(head)) : SymbolPrint.inText(head);
     }
 
     private static boolean isUnit(String text) {

@@ -9,8 +9,12 @@ final class Verdicts {
 
     private Verdicts() {}
 
+    static boolean isGrave(String words) {
+        return GRAVE.contains(words);
+    }
+
     /** The words, in bold where they say that something is not in order. */
     static Piece weigh(String words) {
-        return GRAVE.contains(words) ? Piece.bold(words) : Piece.plain(words);
+        return isGrave(words) ? Piece.bold(words) : Piece.plain(words);
     }
 }

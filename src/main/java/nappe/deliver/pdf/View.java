@@ -38,6 +38,9 @@ public final class View {
 
     /** A clear square for a seal; nothing is ever drawn in it. */
     public record SealSpace() implements Part {
+        /** What it takes of the width of the page, with a gap, in mm. */
+        static final double ROOM = 75;
+
         @Override
         public String kind() {
             return "seal";
@@ -51,8 +54,7 @@ public final class View {
      * @param titles rows over the full width above the head, repeated with it
      * @param head rows of the head
      */
-    public record Grid(
-            String style, List<Double> widths, List<Text> titles, List<GridRow> head, List<GridRow> body)
+    public record Grid(String style, List<Double> widths, List<Text> titles, List<GridRow> head, List<GridRow> body)
             implements Part {
         @Override
         public String kind() {

@@ -15,6 +15,9 @@ final class WorkedGrid {
     private static final double RESULT = 33;
     private static final double SOURCE = 40;
 
+    /** Words longer than this stand under the equation, not in the column of results. */
+    private static final int LONGEST_RESULT = 18;
+
     private final Results results;
     private final Links links;
     private final Block.Lines lines;
@@ -60,13 +63,20 @@ final class WorkedGrid {
 
     private View.GridRow row(Block.Line line) {
         Cell cell = cell(line);
-        List<View.Text> quantity = quantity(line, cell);
+        List<View.Text> quantity = new ArrayList<>(quantity(line, cell));
+        boolean wordy = cell != null && Printed.value(results, cell).length() > LONGEST_RESULT;
+        if (cell != null && wordy) {
+            quantity.add(View.Text.of("numbers", result(line, cell).pieces()));
+        }
         return new View.GridRow(
                 "",
                 List.of(
                         cell("", line.code()),
                         new View.GridCell("", 1, quantity),
-                        new View.GridCell(quantity.size() > 1 ? "right low" : "right", 1, cell == null ? List.of() : List.of(result(line, cell))),
+                        new View.GridCell(
+                                quantity.size() > 1 ? "right low" : "right",
+                                1,
+                                cell == null || wordy ? List.of() : List.of(result(line, cell))),
                         new View.GridCell("", 1, source(line, cell))));
     }
 
@@ -79,12 +89,12 @@ final class WorkedGrid {
 
     private List<View.Text> quantity(Block.Line line, @Nullable Cell cell) {
         List<View.Text> texts = new ArrayList<>();
-        texts.add(View.Text.plain("", line.description()));
+        texts.add(View.Text.of("", SymbolPrint.inText(line.description())));
         Formula formula = cell == null ? null : cell.formula();
         boolean noted = !line.equation().isEmpty()
                 && (formula == null || !line.equation().equals(PlainReading.of(formula)));
         if (noted) {
-            texts.add(View.Text.of("written", WrittenEquation.pieces(line.equation())));
+            texts.add(new View.Text("written", WrittenEquation.pieces(line.equation()), target(line, cell)));
         }
         if (cell == null || formula == null) {
             return texts;
@@ -108,6 +118,11 @@ final class WorkedGrid {
             texts.add(View.Text.of("numbers", equation(List.of(), again, inNumbers)));
         }
         return texts;
+    }
+
+    /** The sheet of the cell of the same symbol that the line rests on; empty where there is none. */
+    private String target(Block.Line line, @Nullable Cell cell) {
+        return cell != null && cell.references().get(line.symbol()) instanceof Cell origin ? links.to(origin) : "";
     }
 
     /** The cell whose content the line only hands on under the same symbol; null where it does more. */
@@ -155,13 +170,12 @@ final class WorkedGrid {
             texts.add(View.Text.plain("small", line.source()));
         }
         if (cell != null) {
-            String kind =
-                    switch (cell.kind()) {
-                        case ENTRY -> "entry, ";
-                        case CONSTANT -> "constant, ";
-                        case TABLE -> "from a table, ";
-                        case FORMULA -> "";
-                    };
+            String kind = switch (cell.kind()) {
+                case ENTRY -> "entry, ";
+                case CONSTANT -> "constant, ";
+                case TABLE -> "from a table, ";
+                case FORMULA -> "";
+            };
             String all = line.forAll() != null && lines.caseNames().size() > 1 ? ", all cases" : "";
             texts.add(new View.Text(
                     "small",

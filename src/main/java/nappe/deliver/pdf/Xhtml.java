@@ -5,6 +5,7 @@ import java.io.StringReader;
 import java.util.Locale;
 import java.util.Map;
 import javax.xml.XMLConstants;
+import javax.xml.parsers.DocumentBuilder;
 import javax.xml.parsers.DocumentBuilderFactory;
 import javax.xml.parsers.ParserConfigurationException;
 import org.thymeleaf.TemplateEngine;
@@ -14,6 +15,7 @@ import org.thymeleaf.templateresolver.ClassLoaderTemplateResolver;
 import org.w3c.dom.Document;
 import org.xml.sax.InputSource;
 import org.xml.sax.SAXException;
+import org.xml.sax.helpers.DefaultHandler;
 
 /** The template filled in, as text and as a document. */
 final class Xhtml {
@@ -45,7 +47,9 @@ final class Xhtml {
             factory.setFeature(XMLConstants.FEATURE_SECURE_PROCESSING, true);
             factory.setFeature("http://apache.org/xml/features/disallow-doctype-decl", true);
             factory.setNamespaceAware(false);
-            return factory.newDocumentBuilder().parse(new InputSource(new StringReader(xhtml)));
+            DocumentBuilder builder = factory.newDocumentBuilder();
+            builder.setErrorHandler(new DefaultHandler());
+            return builder.parse(new InputSource(new StringReader(xhtml)));
         } catch (ParserConfigurationException | SAXException | IOException e) {
             throw new IllegalStateException("the filled template is no document", e);
         }

@@ -15,6 +15,11 @@ final class XmlText {
     }
 
     private static boolean allowed(int c) {
-        return c == '\t' || c == '\n' || c == '\r' || c >= 0x20 && c < 0xD800 || c >= 0xE000 && c < 0xFFFE || c > 0xFFFF;
+        return c == '\t'
+                || c == '\n'
+                || c == '\r'
+                || c >= 0x20 && c < 0xD800
+                || c >= 0xE000 && c < 0xFFFE
+                || c > 0xFFFF;
     }
 }

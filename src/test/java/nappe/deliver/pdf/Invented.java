@@ -93,8 +93,12 @@ final class Invented {
                 "Calculation package",
                 List.of(
                         new Block.Heading(0, "Example Creek interceptor, flow-measurement station 4 (invented)"),
-                        new Block.Note(1, "Open assumptions: yes. They must be closed before issue for construction.", true),
-                        new Block.Note(2, "The rating applies only inside the flow, head and submergence limits listed.", false),
+                        new Block.Note(
+                                1, "Open assumptions: yes. They must be closed before issue for construction.", true),
+                        new Block.Note(
+                                2,
+                                "The rating applies only inside the flow, head and submergence limits listed.",
+                                false),
                         new Block.Heading(3, "Seal and signature"),
                         new Block.Note(4, "(space for a seal)", false),
                         new Block.Heading(5, "Index"),
@@ -135,8 +139,7 @@ final class Invented {
             references.put(cell.symbol(), cell);
         }
         return keep(
-                Cell.live(
-                        new Place("F1", row, column), symbol, Unit.parse(unit), formula, references, Sureness.SURE),
+                Cell.live(new Place("F1", row, column), symbol, Unit.parse(unit), formula, references, Sureness.SURE),
                 value);
     }
 
@@ -148,8 +151,7 @@ final class Invented {
 
     private static Block.Line line(
             String code, String description, String symbol, String unit, String source, Cell forAll, List<Cell> cases) {
-        return new Block.Line(
-                Block.LineKind.QUANTITY, code, description, symbol, "", unit, source, forAll, cases);
+        return new Block.Line(Block.LineKind.QUANTITY, code, description, symbol, "", unit, source, forAll, cases);
     }
 
     private static Block.Line line(Block.LineKind kind, String code, String description, List<Cell> cases) {
@@ -183,39 +185,96 @@ final class Invented {
             Cell tail = typed(Cell.Kind.ENTRY, 11, at, "h_b", "ft", tailwater(i));
             double h = Math.pow(q / 4, 1 / 1.522);
             Cell head = live(
-                    12, at, "h_f", "ft",
-                    op(Operator.TIMES, one("ft"), op(Operator.POWER,
-                            op(Operator.OVER, symbol("Q"), op(Operator.TIMES, symbol("C"), one("ft3/s"))),
-                            op(Operator.OVER, new Formula.Numeral(1, "1"), symbol("n")))),
-                    Value.of(h), flowCell, coefficient, exponent);
+                    12,
+                    at,
+                    "h_f",
+                    "ft",
+                    op(
+                            Operator.TIMES,
+                            one("ft"),
+                            op(
+                                    Operator.POWER,
+                                    op(Operator.OVER, symbol("Q"), op(Operator.TIMES, symbol("C"), one("ft3/s"))),
+                                    op(Operator.OVER, new Formula.Numeral(1, "1"), symbol("n")))),
+                    Value.of(h),
+                    flowCell,
+                    coefficient,
+                    exponent);
             double s = tailwater(i) / h;
-            Cell submergence = live(
-                    13, at, "S_f", "1", op(Operator.OVER, symbol("h_b"), symbol("h_f")), Value.of(s), tail, head);
+            Cell submergence =
+                    live(13, at, "S_f", "1", op(Operator.OVER, symbol("h_b"), symbol("h_f")), Value.of(s), tail, head);
             Value result = s <= 0.62 ? Value.of(h) : new Value.None(Value.NO_RESULT);
             Cell choice = live(
-                    14, at, "h_a", "ft",
-                    call(Function.IF,
+                    14,
+                    at,
+                    "h_a",
+                    "ft",
+                    call(
+                            Function.IF,
                             new Formula.Comparison(Comparator.AT_MOST, symbol("S_f"), symbol("S_lim")),
                             symbol("h_f"),
                             new Formula.NoResult(Value.NO_RESULT)),
-                    result, submergence, limit, head);
+                    result,
+                    submergence,
+                    limit,
+                    head);
             Formula area = op(Operator.TIMES, symbol("W"), op(Operator.PLUS, symbol("h_a"), symbol("h_b")));
             Cell velocity = live(
-                    15, at, "Delta_v_max", "ft/s",
-                    op(Operator.MINUS,
-                            call(Function.SQRT, op(Operator.TIMES, op(Operator.TIMES, new Formula.Numeral(2, "2"), symbol("g")), symbol("h_f"))),
-                            op(Operator.OVER, op(Operator.TIMES, symbol("Q"), op(Operator.POWER, symbol("n_M"), new Formula.Negation(op(Operator.OVER, new Formula.Numeral(2, "2"), new Formula.Numeral(3, "3"))))), area)),
-                    s <= 0.62 ? Value.of(8.0 * h) : new Value.None(Value.NO_RESULT), gravity, head, flowCell, width, choice, tail, roughness);
+                    15,
+                    at,
+                    "Delta_v_max",
+                    "ft/s",
+                    op(
+                            Operator.MINUS,
+                            call(
+                                    Function.SQRT,
+                                    op(
+                                            Operator.TIMES,
+                                            op(Operator.TIMES, new Formula.Numeral(2, "2"), symbol("g")),
+                                            symbol("h_f"))),
+                            op(
+                                    Operator.OVER,
+                                    op(
+                                            Operator.TIMES,
+                                            symbol("Q"),
+                                            op(
+                                                    Operator.POWER,
+                                                    symbol("n_M"),
+                                                    new Formula.Negation(op(
+                                                            Operator.OVER,
+                                                            new Formula.Numeral(2, "2"),
+                                                            new Formula.Numeral(3, "3"))))),
+                                    area)),
+                    s <= 0.62 ? Value.of(8.0 * h) : new Value.None(Value.NO_RESULT),
+                    gravity,
+                    head,
+                    flowCell,
+                    width,
+                    choice,
+                    tail,
+                    roughness);
             Cell verdict = live(
-                    17, at, "", "1",
-                    call(Function.IF,
+                    17,
+                    at,
+                    "",
+                    "1",
+                    call(
+                            Function.IF,
                             new Formula.Comparison(Comparator.AT_MOST, symbol("S_f"), symbol("S_lim")),
-                            new Formula.Word("met"), new Formula.Word("not met")),
-                    Value.word(s <= 0.62 ? "met" : "not met"), submergence, limit);
+                            new Formula.Word("met"),
+                            new Formula.Word("not met")),
+                    Value.word(s <= 0.62 ? "met" : "not met"),
+                    submergence,
+                    limit);
             Cell margin = live(
-                    18, at, "", "1",
+                    18,
+                    at,
+                    "",
+                    "1",
                     op(Operator.OVER, op(Operator.MINUS, symbol("S_lim"), symbol("S_f")), symbol("S_lim")),
-                    Value.of((0.62 - s) / 0.62), limit, submergence);
+                    Value.of((0.62 - s) / 0.62),
+                    limit,
+                    submergence);
             flows.add(flowCell);
             tailwaters.add(tail);
             heads.add(head);
@@ -228,14 +287,18 @@ final class Invented {
         List<Cell> column = new ArrayList<>();
         for (int i = 0; i < 5; i++) {
             column.add(keep(
-                    Cell.typed(Cell.Kind.TABLE, new Place("Tables", 3 + i, 1), "C", Unit.one(), new Value.Number(4 + i)),
+                    Cell.typed(
+                            Cell.Kind.TABLE, new Place("Tables", 3 + i, 1), "C", Unit.one(), new Value.Number(4 + i)),
                     new Value.Number(4 + i)));
         }
         Cell looked = keep(
                 Cell.live(
-                        new Place("F1", 9, 6), "C_2", Unit.one(),
+                        new Place("F1", 9, 6),
+                        "C_2",
+                        Unit.one(),
                         call(Function.INDEX, symbol("C"), call(Function.MATCH_BELOW, symbol("W"), symbol("C"))),
-                        Map.of("C", new Run(column), "W", width), Sureness.SURE),
+                        Map.of("C", new Run(column), "W", width),
+                        Sureness.SURE),
                 Value.of(4));
         String source = "Invented Manual of Flumes, 2nd ed. (fiction), table 8-2, p. 8-47";
         List<Block.Line> lines = List.of(
@@ -252,13 +315,25 @@ final class Invented {
                 line("F1.10", "gauge head in free flow", "h_f", "ft", source, null, heads),
                 line("F1.11", "submergence if flow were free", "S_f", "1", source, null, submergences),
                 line("F1.12", "gauge head, no result where the flume is drowned", "h_a", "ft", source, null, measured),
-                line("F1.13", "a long invented difference of velocities", "Delta_v_max", "ft/s", source, null, velocities),
+                line(
+                        "F1.13",
+                        "a long invented difference of velocities",
+                        "Delta_v_max",
+                        "ft/s",
+                        source,
+                        null,
+                        velocities),
                 new Block.Line(Block.LineKind.HEADING, "", "Limits of use", "", "", "", "", null, List.of()),
                 line(Block.LineKind.LIMIT_VERDICT, "F1.14", "tailwater does not slow the flume", verdicts),
                 line(Block.LineKind.LIMIT_MARGIN, "F1.14m", "margin, as a fraction of the limit", margins));
         List<String> names = List.of(
-                "Start-up minimum", "Start-up average", "Design average", "Peak hour", "Peak hour, river in flood",
-                "Peak instantaneous", "free flow is lost (found)");
+                "Start-up minimum",
+                "Start-up average",
+                "Design average",
+                "Peak hour",
+                "Peak hour, river in flood",
+                "Peak instantaneous",
+                "free flow is lost (found)");
         return new Sheet(
                 2,
                 "F1",
@@ -294,11 +369,21 @@ final class Invented {
         List<Block.Row> points = new ArrayList<>();
         for (int i = 0; i < 12; i++) {
             Cell head = keep(
-                    Cell.typed(Cell.Kind.TABLE, new Place("Register", 80 + i, 0), "h", Unit.parse("ft"), new Value.Number(i / 20.0)),
+                    Cell.typed(
+                            Cell.Kind.TABLE,
+                            new Place("Register", 80 + i, 0),
+                            "h",
+                            Unit.parse("ft"),
+                            new Value.Number(i / 20.0)),
                     new Value.Number(i / 20.0));
             Cell rated = keep(
-                    Cell.live(new Place("Register", 80 + i, 1), "Q", Unit.parse("ft3/s"),
-                            op(Operator.TIMES, new Formula.Numeral(4, "4"), symbol("h")), Map.of("h", head), Sureness.SURE),
+                    Cell.live(
+                            new Place("Register", 80 + i, 1),
+                            "Q",
+                            Unit.parse("ft3/s"),
+                            op(Operator.TIMES, new Formula.Numeral(4, "4"), symbol("h")),
+                            Map.of("h", head),
+                            Sureness.SURE),
                     Value.of(4 * Math.pow(i / 20.0, 1.522)));
             points.add(new Block.Row(List.of(new Block.Content(head), new Block.Content(rated))));
         }

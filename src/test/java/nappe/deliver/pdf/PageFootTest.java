@@ -21,17 +21,29 @@ import org.junit.jupiter.api.Test;
 class PageFootTest {
     private static final int POSITIONS = 26;
     private static final List<String> ALONE = List.of(
-            "Heading of a note", "Heading of a table", "Head of a table", "Head of column", "Heading of lines", "cell",
-            "for case one", "Every case", "two", "Between");
+            "Heading of a note",
+            "Heading of a table",
+            "Head of a table",
+            "Head of column",
+            "Heading of lines",
+            "cell",
+            "for case one",
+            "Every case",
+            "two",
+            "Between");
 
     @Test
     void noHeadingStandsAloneAtTheFootOfAPage() throws IOException {
         List<String> lonely = new ArrayList<>();
         for (int filler = 12; filler < 12 + POSITIONS; filler++) {
-            try (PdfReader reader = new PdfReader(PdfDelivery.render(package_(filler)).bytes())) {
+            try (PdfReader reader =
+                    new PdfReader(PdfDelivery.render(package_(filler)).bytes())) {
                 PdfTextExtractor extractor = new PdfTextExtractor(reader);
                 for (int page = 1; page <= reader.getNumberOfPages(); page++) {
-                    String content = extractor.getTextFromPage(page).replaceAll("\\s+", " ").strip();
+                    String content = extractor
+                            .getTextFromPage(page)
+                            .replaceAll("\\s+", " ")
+                            .strip();
                     if (ALONE.stream().anyMatch(content::endsWith)) {
                         lonely.add(filler + " lines before: ..." + content.substring(content.length() - 30));
                     }
@@ -46,18 +58,19 @@ class PageFootTest {
         for (int i = 0; i < filler; i++) {
             blocks.add(new Block.Note(i, "filler " + i, false));
         }
-        Cell cell = Cell.typed(
-                Cell.Kind.ENTRY, new Place("A", 0, 0), "W", Unit.parse("ft"), new Value.Number(2));
+        Cell cell = Cell.typed(Cell.Kind.ENTRY, new Place("A", 0, 0), "W", Unit.parse("ft"), new Value.Number(2));
         blocks.add(new Block.Heading(60, "Heading of a note"));
         blocks.add(new Block.Note(61, "note under it", false));
         blocks.add(new Block.Heading(62, "Heading of a table"));
         Block.Row row = new Block.Row(List.of(new Block.Text("row")));
         blocks.add(new Block.Table(
-                63, "Head of a table", List.of(new Block.Column("Head of column", 9, Block.Align.LEFT)),
+                63,
+                "Head of a table",
+                List.of(new Block.Column("Head of column", 9, Block.Align.LEFT)),
                 List.of(row, row, row)));
         blocks.add(new Block.Heading(70, "Heading of lines"));
-        blocks.add(new Block.Lines(71, List.of("one", "two"), 0, List.of(
-                between(), quantity(cell), between(), quantity(cell))));
+        blocks.add(new Block.Lines(
+                71, List.of("one", "two"), 0, List.of(between(), quantity(cell), between(), quantity(cell))));
         return new Results(
                 Invented.furniture(true, "For checking only.", "preliminary"),
                 List.of(new Sheet(1, "A", "A sheet", blocks)),
@@ -70,7 +83,6 @@ class PageFootTest {
     }
 
     private static Block.Line quantity(Cell cell) {
-        return new Block.Line(
-                Block.LineKind.QUANTITY, "A.1", "width", "W", "", "ft", "", null, List.of(cell, cell));
+        return new Block.Line(Block.LineKind.QUANTITY, "A.1", "width", "W", "", "ft", "", null, List.of(cell, cell));
     }
 }

@@ -65,8 +65,9 @@ class PdfDeliveryTest {
         Block.Lines lines = (Block.Lines) RESULTS.sheets().get(1).blocks().get(3);
         for (Block.Line line : lines.lines()) {
             for (Cell cell : line.perCase()) {
-                assertThat(all).containsPattern(Pattern.quote(line.code()) + "(?!m).*?"
-                        + Pattern.quote(Printed.value(RESULTS, cell)));
+                assertThat(all)
+                        .containsPattern(
+                                Pattern.quote(line.code()) + "(?!m).*?" + Pattern.quote(Printed.value(RESULTS, cell)));
             }
         }
     }
@@ -74,7 +75,8 @@ class PdfDeliveryTest {
     @Test
     void aChangedNumberChangesTheText() throws IOException {
         String before = String.join(" ", PAGES);
-        String after = String.join(" ", pages(PdfDelivery.render(Invented.results(1.3456)).bytes()));
+        String after = String.join(
+                " ", pages(PdfDelivery.render(Invented.results(1.3456)).bytes()));
         assertThat(before).contains("1.2345").doesNotContain("1.3456");
         assertThat(after).contains("1.3456").doesNotContain("1.2345");
     }
@@ -155,7 +157,8 @@ class PdfDeliveryTest {
     void noRowIsPrintedTwice() throws IOException {
         String all = String.join(" ", PAGES);
         for (int i = 0; i < 60; i++) {
-            Matcher row = Pattern.compile("2 F1 Parshall flume ?F1\\." + (10 + i)).matcher(all);
+            Matcher row =
+                    Pattern.compile("2 F1 Parshall flume ?F1\\." + (10 + i)).matcher(all);
             assertThat(row.results().count()).isEqualTo(1);
         }
     }
@@ -185,7 +188,10 @@ class PdfDeliveryTest {
                     .map(sheet -> sheet.number() + " " + sheet.title())
                     .toList();
             assertThat(titles).isEqualTo(expected);
-            assertThat(reader.getPageN(1).getAsArray(com.lowagie.text.pdf.PdfName.ANNOTS).size()).isGreaterThanOrEqualTo(2);
+            assertThat(reader.getPageN(1)
+                            .getAsArray(com.lowagie.text.pdf.PdfName.ANNOTS)
+                            .size())
+                    .isGreaterThanOrEqualTo(2);
         }
     }
 
@@ -278,8 +284,9 @@ class PdfDeliveryTest {
         assumeTrue(isInstalled("qpdf"), "SKIPPED: qpdf is not installed, the PDF's structure was not checked");
         Path file = folder.resolve("package.pdf");
         Files.write(file, PDF);
-        Process process =
-                new ProcessBuilder("qpdf", "--check", file.toString()).redirectErrorStream(true).start();
+        Process process = new ProcessBuilder("qpdf", "--check", file.toString())
+                .redirectErrorStream(true)
+                .start();
         String said = new String(process.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
         assertThat(process.waitFor()).as(said).isZero();
         assertThat(said).doesNotContain("WARNING");
@@ -293,7 +300,11 @@ class PdfDeliveryTest {
         Process process = new ProcessBuilder("pdftotext", "-layout", "-enc", "UTF-8", file.toString(), "-").start();
         String text = new String(process.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
         assertThat(process.waitFor()).isZero();
-        String row = text.lines().filter(line -> line.strip().startsWith("F1.10 ")).skip(1).findFirst().orElse("");
+        String row = text.lines()
+                .filter(line -> line.strip().startsWith("F1.10 "))
+                .skip(1)
+                .findFirst()
+                .orElse("");
         assertThat(row).containsPattern("gauge head in free flow +ft +0\\.462 +0\\.627 +0\\.772");
         for (Cell cell : RESULTS.cells()) {
             if (!cell.place().sheet().equals("Tables")) {

@@ -12,7 +12,8 @@ final class PrintSample {
         PdfDelivery letter = PdfDelivery.render(Invented.results());
         Files.write(Path.of(arguments[0]), letter.bytes());
         if (arguments.length > 1) {
-            Files.write(Path.of(arguments[1]), PdfDelivery.render(Invented.onA4()).bytes());
+            Files.write(
+                    Path.of(arguments[1]), PdfDelivery.render(Invented.onA4()).bytes());
         }
     }
 }

@@ -37,7 +37,11 @@ class SubstitutedReadingTest {
         Formula parsed = FormulaParser.parse(formula);
         Cell cell = Cell.live(new Place("F1", 4, 2), "y", Unit.one(), parsed, references, Sureness.SURE);
         Results results = new Results(Invented.furniture(true, "", "issued"), List.of(), List.of(), values);
-        return new SubstitutedReading(results).of(cell, parsed).plain().replace('\u00a0', ' ').replace("\u2009", "");
+        return new SubstitutedReading(results)
+                .of(cell, parsed)
+                .plain()
+                .replace('\u00a0', ' ')
+                .replace("\u2009", "");
     }
 
     @Test
@@ -65,7 +69,8 @@ class SubstitutedReadingTest {
     void wordsStandInTheirPlace() {
         assertThat(read("s = \"free\"", Map.of("s", typed("1", Value.word("submerged")))))
                 .isEqualTo("“submerged” = “free”");
-        assertThat(read("h*2", Map.of("h", typed("1", new Value.None("not given"))))).isEqualTo("(not given) × 2");
+        assertThat(read("h*2", Map.of("h", typed("1", new Value.None("not given")))))
+                .isEqualTo("(not given) × 2");
     }
 
     @Test
@@ -78,7 +83,8 @@ class SubstitutedReadingTest {
 
     @Test
     void aConversionShowsItsFactor() {
-        Cell factor = Cell.typed(Cell.Kind.CONSTANT, new Place("Factors", 3, 1), "1 in", Unit.parse("m"), Value.of(0.0254));
+        Cell factor =
+                Cell.typed(Cell.Kind.CONSTANT, new Place("Factors", 3, 1), "1 in", Unit.parse("m"), Value.of(0.0254));
         values.put(factor, Value.of(0.0254));
         assertThat(read("W * 1 in", Map.of("W", typed("in", Value.of(12)), "1 in", factor)))
                 .isEqualTo("12 in × (0.0254 m)/(1 in)");

@@ -16,12 +16,13 @@ class TypesetReadingTest {
     private static String marked(List<Piece> pieces) {
         return pieces.stream()
                 .map(piece -> switch (piece.shift()) {
-                    case NONE -> "";
-                    case LOWERED -> "_";
-                    case RAISED -> "^";
-                    case LOWERED_IN_RAISED -> "^_";
-                    case RAISED_TWICE -> "^^";
-                } + (piece.face() == Piece.Face.ITALIC ? "/" + piece.text() + "/" : piece.text()))
+                            case NONE -> "";
+                            case LOWERED -> "_";
+                            case RAISED -> "^";
+                            case LOWERED_IN_RAISED -> "^_";
+                            case RAISED_TWICE -> "^^";
+                        }
+                        + (piece.face() == Piece.Face.ITALIC ? "/" + piece.text() + "/" : piece.text()))
                 .collect(Collectors.joining());
     }
 
