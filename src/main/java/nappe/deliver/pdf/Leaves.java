@@ -66,6 +66,8 @@ final class Leaves {
             return under(headings, List.of(elsewhere(sheet, elsewhere.table())));
         } else if (block instanceof Block.Note note) {
             return under(headings, note(note));
+        } else if (block instanceof Block.Chart) {
+            return under(headings, List.of());
         }
         throw new IllegalArgumentException("unknown block " + block);
     }
