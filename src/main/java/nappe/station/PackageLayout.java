@@ -28,17 +28,37 @@ import nappe.unit.Unit;
  * downstream end up: each element takes its neighbour's water level in the same case.
  */
 public final class PackageLayout {
-    /** The sheets in order, and the cells in the order of evaluation. */
-    public record Layout(List<Sheet> sheets, List<Cell> cells, Map<String, Block.Table> ratings) {}
+    /**
+     * The sheets in order, and the cells in the order of evaluation.
+     *
+     * @param ratings the rating table of an element, by its tag
+     * @param cases the scopes of an element's cases, by its tag
+     * @param workedCase index of the case worked in full
+     */
+    public record Layout(
+            List<Sheet> sheets,
+            List<Cell> cells,
+            Map<String, Block.Table> ratings,
+            Map<String, List<Scope>> cases,
+            int workedCase) {}
+
+    /** Keys of the figures. */
+    public static final String LIMITS_FIGURE = "limits";
+
+    public static final String GEOMETRY_FIGURE = " geometry";
+    public static final String RATING_FIGURE = " rating";
 
     private final Design design;
     private final Map<String, MethodSheet> methods = new LinkedHashMap<>();
     private final List<SheetDraft> drafts = new ArrayList<>();
     private final List<String> contents = new ArrayList<>();
     private final List<String> caseNames;
+    private final Function<MethodSheet, List<String>> drawn;
 
-    private PackageLayout(Design design, Function<String, MethodSheet> methodOf) {
+    private PackageLayout(
+            Design design, Function<String, MethodSheet> methodOf, Function<MethodSheet, List<String>> drawn) {
         this.design = design;
+        this.drawn = drawn;
         design.elements().forEach(e -> methods.put(e.tag(), methodOf.apply(e.method())));
         this.caseNames = design.cases().stream().map(Design.FlowCase::name).toList();
     }
@@ -48,7 +68,20 @@ public final class PackageLayout {
      * @throws StationException where entries do not fit the methods
      */
     public static Layout of(Design design, Function<String, MethodSheet> methodOf, SoftwareStatement software) {
-        PackageLayout layout = new PackageLayout(design, methodOf);
+        return of(design, methodOf, method -> List.of(), software);
+    }
+
+    /**
+     * @param methodOf the method sheet of a name
+     * @param drawn the symbols whose values the drawing of a method shows; empty for a method without drawing
+     * @throws StationException where entries do not fit the methods
+     */
+    public static Layout of(
+            Design design,
+            Function<String, MethodSheet> methodOf,
+            Function<MethodSheet, List<String>> drawn,
+            SoftwareStatement software) {
+        PackageLayout layout = new PackageLayout(design, methodOf, drawn);
         List<DesignFault> faults = DemandCheck.faults(design, layout.methods);
         if (!faults.isEmpty()) {
             throw new StationException(faults);
@@ -75,6 +108,7 @@ public final class PackageLayout {
                 ? draft("Standing", "Standing of the tabled numbers", "row by row: what was read where, what is from memory")
                 : tableSheet;
         Map<String, SheetDraft> elementSheets = new LinkedHashMap<>();
+        Map<String, SheetDraft> figureSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> ratingSheets = new LinkedHashMap<>();
         for (Design.Element element : design.elements()) {
             String title = element.tag() + "  " + EntriesSheet.title(element, method(element));
@@ -83,6 +117,10 @@ public final class PackageLayout {
             method(element).about().forEach(methodSheet::note);
             methodSheet.heading("Cautions");
             method(element).cautions().forEach(methodSheet::caution);
+            if (!drawn.apply(method(element)).isEmpty()) {
+                figureSheets.put(element.tag(), draft(
+                        element.tag() + " figure", element.tag() + "  Geometry and levels", "the device drawn, with its dimensions and levels"));
+            }
             elementSheets.put(element.tag(), draft(element.tag(), title, "one case worked in full, every case, limits"));
             if (!method(element).ratings().isEmpty()) {
                 ratingSheets.put(element.tag(), draft(
@@ -117,6 +155,7 @@ public final class PackageLayout {
         ItemLayout items = new ItemLayout(cells, trialRows);
         List<ElementSheet.LimitResult> limits = new ArrayList<>();
         Map<String, Block.Table> ratings = new LinkedHashMap<>();
+        Map<String, List<Scope>> casesOf = new LinkedHashMap<>();
         Map<String, List<Block.Line>> linesOf = new LinkedHashMap<>();
         List<Scope> downstream = List.of();
         MethodSheet below = null;
@@ -129,6 +168,11 @@ public final class PackageLayout {
                     new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes);
             limits.addAll(laid.lay(workedCase(), demanded(element, demands)));
             linesOf.put(element.tag(), laid.lines());
+            casesOf.put(element.tag(), caseScopes);
+            SheetDraft figureSheet = figureSheets.get(element.tag());
+            if (figureSheet != null) {
+                new DrawnSheet(method, figureSheet).lay(element.tag(), drawn.apply(method), caseScopes.get(workedCase()));
+            }
             SheetDraft ratingSheet = ratingSheets.get(element.tag());
             if (ratingSheet != null) {
                 ratings.put(element.tag(), rating(element, method, items, scope, ratingSheet, trialRows));
@@ -142,6 +186,7 @@ public final class PackageLayout {
         Run verdicts = new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
         CheckerSheets.glossary(glossarySheet, linesOf);
         CheckerSheets.formulas(checkerSheet, linesOf);
+        limitSheet.figure("Margins of the limits, each in its worst case", LIMITS_FIGURE);
         back.assumptions(assumptionSheet);
         back.references(referenceSheet, distinct);
         back.software(softwareSheet, software);
@@ -153,7 +198,7 @@ public final class PackageLayout {
         for (int i = 0; i < drafts.size(); i++) {
             sheets.add(drafts.get(i).finish(i + 1));
         }
-        return new Layout(List.copyOf(sheets), List.copyOf(cells.all()), ratings);
+        return new Layout(List.copyOf(sheets), List.copyOf(cells.all()), ratings, casesOf, workedCase());
     }
 
     private boolean hasRemarks() {
@@ -258,6 +303,7 @@ public final class PackageLayout {
         sheet.note("Free flow only. Outside this range, and where the tailwater slows the device, no result is claimed.");
         method.cautions().forEach(sheet::caution);
         sheet.gap();
+        sheet.figure("Rating curve of " + element.tag(), element.tag() + RATING_FIGURE);
         return new RatingGrid(items, method, reports)
                 .lay(method.ratings().get(0), scope, sheet, "Rating of " + element.tag())
                 .table();
