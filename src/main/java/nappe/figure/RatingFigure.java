@@ -85,7 +85,7 @@ public final class RatingFigure {
             marks.add(new Curve.Case(name, flow, head));
         } else {
             missing.add("Case " + name + " is not marked: "
-                    + (head == null ? "the method names no head at the gauge" : "its head at the gauge is " + words(isNumber(flow) ? head : flow)) + ".");
+                    + (head == null ? "the method names no head at the gauge" : "head at the gauge: " + words(isNumber(flow) ? head : flow)) + ".");
         }
     }
 

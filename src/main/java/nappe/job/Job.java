@@ -80,7 +80,7 @@ public final class Job {
                 .filter(sheet -> sheet.blocks().stream()
                         .anyMatch(block -> block instanceof Block.Figure f && f.key().equals(PackageLayout.LIMITS_FIGURE)))
                 .forEach(sheet -> figures.put(
-                        PackageLayout.LIMITS_FIGURE, MarginBars.of(sheet, "Margins of the limits, each in its worst case")));
+                        PackageLayout.LIMITS_FIGURE, MarginBars.of(sheet, layout.limits(), values, "Margins of the limits, each in its tightest case")));
         for (Design.Element element : design.elements()) {
             MethodSheet method = methods.sheet(element.method());
             List<Scope> cases = java.util.Objects.requireNonNull(layout.cases().get(element.tag()));

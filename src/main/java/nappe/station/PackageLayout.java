@@ -32,6 +32,7 @@ public final class PackageLayout {
      *
      * @param ratings the rating table of an element, by its tag
      * @param cases the scopes of an element's cases, by its tag
+     * @param limits every limit with its margins
      * @param workedCase index of the case worked in full
      */
     public record Layout(
@@ -39,6 +40,7 @@ public final class PackageLayout {
             List<Cell> cells,
             Map<String, Block.Table> ratings,
             Map<String, List<Scope>> cases,
+            List<ElementSheet.LimitResult> limits,
             int workedCase) {}
 
     /** Keys of the figures. */
@@ -185,7 +187,7 @@ public final class PackageLayout {
         SummarySheet.Sorted sorted = new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
         CheckerSheets.glossary(glossarySheet, linesOf);
         CheckerSheets.formulas(checkerSheet, linesOf);
-        limitSheet.figure("Margins of the limits, each in its worst case", LIMITS_FIGURE);
+        limitSheet.figure("Margins of the limits", LIMITS_FIGURE);
         back.assumptions(assumptionSheet);
         back.references(referenceSheet, distinct);
         back.software(softwareSheet, software);
@@ -197,7 +199,7 @@ public final class PackageLayout {
         for (int i = 0; i < drafts.size(); i++) {
             sheets.add(drafts.get(i).finish(i + 1));
         }
-        return new Layout(List.copyOf(sheets), List.copyOf(cells.all()), ratings, casesOf, workedCase());
+        return new Layout(List.copyOf(sheets), List.copyOf(cells.all()), ratings, casesOf, List.copyOf(limits), workedCase());
     }
 
     private boolean hasRemarks() {

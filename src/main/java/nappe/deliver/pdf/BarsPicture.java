@@ -22,7 +22,7 @@ final class BarsPicture {
     private static final double WORDS = 42;
 
     private final Results results;
-    private final Sketch sketch = new Sketch();
+    private final Sketch sketch;
     private final double width;
     private final double half;
     private final double zero;
@@ -30,6 +30,7 @@ final class BarsPicture {
     private BarsPicture(Results results, double width) {
         this.results = results;
         this.width = width;
+        this.sketch = new Sketch(width);
         double room = width * 0.4;
         this.half = (width - room - WORDS) / 2 - 2;
         this.zero = room + 1 + half;
@@ -47,13 +48,13 @@ final class BarsPicture {
     private Picture make(String title, List<Bars.Bar> bars) {
         double height = HEAD + bars.size() * ROW;
         sketch.centred(new At(zero - half, 3), SMALL, 0, List.of(Piece.plain("\u2212100 %")));
-        sketch.centred(new At(zero - half / 2, 3), SMALL, 0, List.of(Piece.plain("missing")));
+        sketch.centred(new At(zero - half / 2, 3), SMALL, 0, List.of(Piece.plain("what is missing")));
         sketch.centred(new At(zero, 3), SMALL, 0, List.of(Piece.plain("limit")));
-        sketch.centred(new At(zero + half / 2, 3), SMALL, 0, List.of(Piece.plain("left")));
+        sketch.centred(new At(zero + half / 2, 3), SMALL, 0, List.of(Piece.plain("what is left")));
         sketch.centred(new At(zero + half, 3), SMALL, 0, List.of(Piece.plain("100 %")));
         for (double share : new double[] {-1, -0.5, 0.5, 1}) {
             double x = zero + half * share;
-            sketch.stroke(0.1, Sketch.DASHED, new At(x, 5), new At(x, height - 1));
+            sketch.grid(new At(x, 5), new At(x, height - 1));
         }
         double y = HEAD - 2;
         for (Bars.Bar bar : bars) {
@@ -61,7 +62,7 @@ final class BarsPicture {
             y += ROW;
         }
         sketch.stroke(Sketch.MEDIUM, Sketch.WHOLE, new At(zero, 4.4), new At(zero, height - 1));
-        return sketch.finish(width, height, title);
+        return sketch.finish(height, title);
     }
 
     private void row(Bars.Bar bar, double top) {
@@ -75,12 +76,15 @@ final class BarsPicture {
         String verdict = words(bar.verdict());
         double right = zero + half + 4;
         List<Piece> said = new ArrayList<>(List.of(Verdicts.weigh(verdict)));
-        if (margin instanceof Value.Number number) {
+        if (margin instanceof Value.Number number && !bar.unit().text().equals("1")) {
+            said.add(Piece.plain(", " + (number.value() < 0 ? "missing " : "left ")));
+            said.addAll(UnitPrint.after(Digits.print(bar.unit(), Math.abs(number.value())), bar.unit().text()));
+        } else if (margin instanceof Value.Number number) {
             said.add(Piece.plain(", " + percent(number.value())));
             bar(number.value(), middle);
         }
         sketch.text(new At(right, middle - 0.7), SIZE, said);
-        List<String> worst = lines(words(bar.worst()), WORDS - 4);
+        List<String> worst = lines(words(bar.where()), WORDS - 4);
         sketch.text(new At(right, middle + 2.7), SMALL, List.of(Piece.plain(worst.get(0) + (worst.size() > 1 ? "\u2026" : ""))));
     }
 

@@ -2,7 +2,6 @@ package nappe.deliver.pdf;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import nappe.calculation.Cell;
 import nappe.deliver.pdf.Ink.At;
 import nappe.formula.Value;
@@ -20,7 +19,7 @@ final class CurvePicture {
 
     private final Results results;
     private final Curve curve;
-    private final Sketch sketch = new Sketch();
+    private final Sketch sketch;
     private final double width;
     private final double height;
     private LogAxis across;
@@ -30,6 +29,7 @@ final class CurvePicture {
         this.results = results;
         this.curve = curve;
         this.width = width;
+        this.sketch = new Sketch(width);
         this.height = height;
         List<Double> flows = new ArrayList<>();
         List<Double> heads = new ArrayList<>();
@@ -61,7 +61,7 @@ final class CurvePicture {
         curve.cases().stream()
                 .filter(one -> number(one.flow()) > 0 && number(one.head()) > 0)
                 .forEach(this::mark);
-        return sketch.finish(width, height, curve.title());
+        return sketch.finish(height, curve.title());
     }
 
     private double number(Cell cell) {
@@ -76,12 +76,12 @@ final class CurvePicture {
         double foot = height - FOOT;
         for (LogAxis.Tick tick : across.ticks()) {
             double x = across.place(tick.value());
-            sketch.stroke(tick.text().isEmpty() ? 0.06 : 0.1, Sketch.WHOLE, new At(x, TOP), new At(x, foot));
+            sketch.grid(new At(x, TOP), new At(x, foot));
             sketch.centred(new At(x, foot + 3.8), SIZE, 0, List.of(Piece.plain(tick.text())));
         }
         for (LogAxis.Tick tick : up.ticks()) {
             double y = up.place(tick.value());
-            sketch.stroke(tick.text().isEmpty() ? 0.06 : 0.1, Sketch.WHOLE, new At(LEFT, y), new At(width - RIGHT, y));
+            sketch.grid(new At(LEFT, y), new At(width - RIGHT, y));
             List<Piece> text = List.of(Piece.plain(tick.text()));
             sketch.text(new At(LEFT - 1.2 - Sketch.width(text, SIZE), y + 1), SIZE, text);
         }
@@ -123,14 +123,12 @@ final class CurvePicture {
         }
     }
 
+    /** Sets a text at the best of the places within the frame; at the first place where none is. */
     private void choose(List<Piece> pieces, List<At> places, double turned) {
-        At place = Optional.ofNullable(places.stream()
-                        .filter(at -> isInside(new Ink.Lettering(at, SIZE, turned, pieces)))
-                        .filter(at -> sketch.isFree(new Ink.Lettering(at, SIZE, turned, pieces)))
-                        .findFirst()
-                        .orElse(null))
-                .orElse(places.get(0));
-        sketch.turned(place, SIZE, turned, pieces);
+        List<Ink.Lettering> all =
+                places.stream().map(at -> new Ink.Lettering(at, SIZE, turned, pieces)).toList();
+        List<Ink.Lettering> inside = all.stream().filter(this::isInside).toList();
+        sketch.choose(inside.isEmpty() ? all : inside);
     }
 
     private boolean isInside(Ink.Lettering text) {
@@ -148,10 +146,11 @@ final class CurvePicture {
         pieces.addAll(Printed.withUnit(results, one.head()));
         double w = Sketch.width(pieces, SIZE);
         List<At> places = new ArrayList<>();
-        for (int row = 0; row < 6; row++) {
-            places.add(new At(at.x() + 2.2, at.y() + 3.6 + 3.8 * row));
-            places.add(new At(at.x() - 2.2 - w, at.y() - 1.6 - 3.8 * row));
-            places.add(new At(at.x() + 6, at.y() + 3.6 + 3.8 * row));
+        for (int row = 0; row < 8; row++) {
+            for (double right : new double[] {2.2, -2.2 - w, 6, -6 - w}) {
+                places.add(new At(at.x() + right, at.y() + 3.6 + 3.8 * row));
+                places.add(new At(at.x() + right, at.y() - 1.6 - 3.8 * row));
+            }
         }
         choose(pieces, places, 0);
     }

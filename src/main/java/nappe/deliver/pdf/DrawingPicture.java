@@ -16,13 +16,12 @@ final class DrawingPicture {
     private static final double GAP = 5;
     private static final double[] SCALES = {1, 1.25, 1.5, 2, 2.5, 3, 4, 5, 6, 7.5, 8};
 
-    private final Results results;
     private final Drawing drawing;
     private final List<ViewSketch> views = new ArrayList<>();
-    private final Sketch sketch = new Sketch();
+    private final Sketch sketch;
 
-    private DrawingPicture(Results results, Drawing drawing) {
-        this.results = results;
+    private DrawingPicture(Results results, Drawing drawing, double width) {
+        this.sketch = new Sketch(width);
         this.drawing = drawing;
         for (Drawing.View view : drawing.views()) {
             views.add(new ViewSketch(results, view, sketch));
@@ -31,7 +30,7 @@ final class DrawingPicture {
 
     /** @param height that it may take at most, in mm */
     static Picture of(Results results, Drawing drawing, double width, double height) {
-        return new DrawingPicture(results, drawing).make(width, height);
+        return new DrawingPicture(results, drawing, width).make(width, height);
     }
 
     private Picture make(double width, double height) {
@@ -61,7 +60,7 @@ final class DrawingPicture {
             view.draw(indent, y + view.height() * perUnit, perUnit);
             y += view.height() * perUnit + view.below() + GAP;
         }
-        return sketch.finish(width, y - GAP, drawing.title());
+        return sketch.finish(y - GAP, drawing.title());
     }
 
     /** The next usual scale: 1:20, 1:25, 1:30... */

@@ -6,8 +6,14 @@ import java.util.List;
 sealed interface Ink {
     record At(double x, double y) {}
 
-    /** @param dash lengths in mm, empty for a whole line */
-    record Stroke(double width, List<Double> dash, boolean closed, List<At> points) implements Ink {}
+    /**
+     * A line through points.
+     *
+     * @param width in mm
+     * @param dash lengths in mm, empty for a whole line
+     * @param grey 0 for black, up to 1 for white
+     */
+    record Stroke(double width, List<Double> dash, double grey, boolean closed, List<At> points) implements Ink {}
 
     /** An area, filled with grey between 0 for black and 1 for white. */
     record Fill(double grey, List<At> points) implements Ink {}
@@ -28,10 +34,15 @@ sealed interface Ink {
 
         /** Its corners: along the foot, then back along the head. */
         List<At> corners() {
-            double width = Sketch.width(pieces, size);
-            double up = size * Sketch.MM_PER_POINT * 0.75;
-            double down = size * Sketch.MM_PER_POINT * 0.25;
-            return List.of(corner(0, down), corner(width, down), corner(width, -up), corner(0, -up));
+            return corners(0);
+        }
+
+        /** The same with room around it, in mm. */
+        List<At> corners(double room) {
+            double end = Sketch.width(pieces, size) + room;
+            double up = size * Sketch.MM_PER_POINT * 0.75 + room / 2;
+            double down = size * Sketch.MM_PER_POINT * 0.25 + room / 2;
+            return List.of(corner(-room, down), corner(end, down), corner(end, -up), corner(-room, -up));
         }
 
         private At corner(double along, double down) {

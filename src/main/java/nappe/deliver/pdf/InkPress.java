@@ -24,7 +24,6 @@ final class InkPress {
 
     void print(Picture picture) {
         page.saveState();
-        page.setGrayStroke(0);
         page.setLineCap(PdfContentByte.LINE_CAP_BUTT);
         page.setLineJoin(PdfContentByte.LINE_JOIN_ROUND);
         picture.inks().forEach(this::print);
@@ -34,6 +33,7 @@ final class InkPress {
     private void print(Ink ink) {
         if (ink instanceof Ink.Stroke stroke) {
             page.setLineWidth(points(stroke.width()));
+            page.setGrayStroke((float) stroke.grey());
             dash(stroke.dash());
             path(stroke.points());
             if (stroke.closed()) {

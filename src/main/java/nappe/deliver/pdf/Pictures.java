@@ -63,7 +63,8 @@ final class Pictures {
             together.add(picture(BarsPicture.of(results, bars.title(), bars.bars().subList(from, to), width)));
             if (to == bars.bars().size()) {
                 together.add(note("Grey: what is left to the limit, as a share of its scale. Hatched: what is missing. An arrow: the bar"
-                        + " is longer than the figure. No bar: there is no margin to measure."));
+                        + " is longer than the figure. No bar: there is no margin,"
+                        + " or it is a length."));
             }
             parts.add(new View.Together(together));
         }

@@ -19,15 +19,29 @@ final class Sketch {
     private static final double SUB = 0.72;
     private static final double ARROW = 2.2;
 
+    /** Room that a text keeps from lines, in mm. */
+    private static final double AIR = 0.6;
+
+    private final double width;
     private final List<Ink> strokes = new ArrayList<>();
     private final List<Ink.Lettering> texts = new ArrayList<>();
 
+    /** @param width in mm, over which no text is to reach */
+    Sketch(double width) {
+        this.width = width;
+    }
+
     void stroke(double width, List<Double> dash, At... points) {
-        strokes.add(new Ink.Stroke(width, dash, false, List.of(points)));
+        stroke(width, dash, false, List.of(points));
     }
 
     void stroke(double width, List<Double> dash, boolean closed, List<At> points) {
-        strokes.add(new Ink.Stroke(width, dash, closed, List.copyOf(points)));
+        strokes.add(new Ink.Stroke(width, dash, 0, closed, List.copyOf(points)));
+    }
+
+    /** A line of a grid, which texts may cover. */
+    void grid(At from, At to) {
+        strokes.add(new Ink.Stroke(0.1, WHOLE, 0.65, false, List.of(from, to)));
     }
 
     void fill(double grey, At... points) {
@@ -42,7 +56,7 @@ final class Sketch {
             rim.add(new At(centre.x() + radius * Math.cos(angle), centre.y() + radius * Math.sin(angle)));
         }
         strokes.add(new Ink.Fill(open ? 1 : 0, rim));
-        strokes.add(new Ink.Stroke(MEDIUM, WHOLE, true, rim));
+        strokes.add(new Ink.Stroke(MEDIUM, WHOLE, 0, true, rim));
     }
 
     /** The head of an arrow that points from one place to another. */
@@ -76,27 +90,71 @@ final class Sketch {
         turned(new At(at.x() - half * Math.cos(angle), at.y() + half * Math.sin(angle)), size, degrees, pieces);
     }
 
-    /** Whether a text there would lie on one that is there already. */
-    boolean isFree(Ink.Lettering text) {
-        return texts.stream().noneMatch(other -> overlap(text, other));
+    /** Sets a text at the place where it hides least; the first of equals. */
+    Ink.Lettering choose(List<Ink.Lettering> places) {
+        Ink.Lettering best = places.get(0);
+        double least = Double.POSITIVE_INFINITY;
+        for (Ink.Lettering place : places) {
+            double hidden = hidden(place);
+            if (hidden < least - 1e-9) {
+                best = place;
+                least = hidden;
+            }
+        }
+        texts.add(best);
+        return best;
+    }
+
+    /** How much a text would hide of what is there already: another text much, a heavy line some, a thin one little. */
+    private double hidden(Ink.Lettering text) {
+        double hidden = 0;
+        for (Ink.Lettering other : texts) {
+            hidden += separated(text.corners(AIR), other.corners()) <= 0 ? 100 : 0;
+        }
+        List<At> corners = text.corners(AIR);
+        for (At corner : text.corners()) {
+            hidden += corner.x() < 0 || corner.x() > width || corner.y() < 0 ? 1000 : 0;
+        }
+        for (Ink ink : strokes) {
+            if (ink instanceof Ink.Stroke stroke && stroke.grey() == 0) {
+                hidden += crosses(stroke, corners) ? 10 * stroke.width() : 0;
+            } else if (ink instanceof Ink.Fill fill && separated(fill.points(), corners) <= 0) {
+                hidden += 2;
+            }
+        }
+        return hidden;
+    }
+
+    private static boolean crosses(Ink.Stroke stroke, List<At> corners) {
+        List<At> points = stroke.points();
+        int last = stroke.closed() ? points.size() : points.size() - 1;
+        for (int i = 0; i < last; i++) {
+            if (separated(corners, List.of(points.get(i), points.get((i + 1) % points.size()))) <= 0) {
+                return true;
+            }
+        }
+        return false;
     }
 
     static boolean overlap(Ink.Lettering a, Ink.Lettering b) {
         return separated(a.corners(), b.corners()) <= 0;
     }
 
-    /** The widest gap between the shadows of two quadrilaterals on the sides of either; not above 0 where they overlap. */
+    /**
+     * The widest gap between the shadows of two convex shapes, across the sides of either; not above 0 where they
+     * overlap.
+     */
     private static double separated(List<At> a, List<At> b) {
         double widest = Double.NEGATIVE_INFINITY;
         for (List<At> shape : List.of(a, b)) {
-            for (int i = 0; i < 2; i++) {
+            for (int i = 0; i < shape.size(); i++) {
                 At from = shape.get(i);
-                At to = shape.get(i + 1);
+                At to = shape.get((i + 1) % shape.size());
                 double length = Math.max(1e-9, Math.hypot(to.x() - from.x(), to.y() - from.y()));
-                double ux = (to.x() - from.x()) / length;
-                double uy = (to.y() - from.y()) / length;
-                double[] first = shadow(a, ux, uy);
-                double[] second = shadow(b, ux, uy);
+                double across = -(to.y() - from.y()) / length;
+                double up = (to.x() - from.x()) / length;
+                double[] first = shadow(a, across, up);
+                double[] second = shadow(b, across, up);
                 widest = Math.max(widest, Math.max(second[0] - first[1], first[0] - second[1]));
             }
         }
@@ -120,7 +178,7 @@ final class Sketch {
         return piece.shift() == Piece.Shift.NONE ? 1 : SUB;
     }
 
-    Picture finish(double width, double height, String words) {
+    Picture finish(double height, String words) {
         List<Ink> inks = new ArrayList<>(strokes);
         texts.forEach(text -> inks.add(new Ink.Fill(1, text.corners())));
         inks.addAll(texts);

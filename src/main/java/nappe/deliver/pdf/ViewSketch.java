@@ -68,11 +68,15 @@ final class ViewSketch {
     }
 
     double above() {
-        return Math.max(margin(Side.ABOVE), margin(Side.ALONG)) + 5;
+        return Math.max(margin(Side.ABOVE), margin(Side.ALONG)) + (hasWater() ? 6 : 1);
     }
 
     double below() {
-        return margin(Side.BELOW) + 4;
+        return margin(Side.BELOW) + (hasWater() ? 5 : 1);
+    }
+
+    private boolean hasWater() {
+        return !DrawingPicture.parts(view, Drawing.Water.class).isEmpty();
     }
 
     /** The room that dimensions take on a side. */
@@ -91,13 +95,16 @@ final class ViewSketch {
         originY = y + lowest * perUnit;
         scale = perUnit;
         DrawingPicture.parts(view, Drawing.Path.class).forEach(this::path);
-        DrawingPicture.parts(view, Drawing.Dimension.class).forEach(this::dimension);
-        DrawingPicture.parts(view, Drawing.Water.class).forEach(this::water);
+        DrawingPicture.parts(view, Drawing.Water.class).forEach(this::surface);
         DrawingPicture.parts(view, Drawing.Flow.class).forEach(this::flow);
+        DrawingPicture.parts(view, Drawing.Gauge.class).forEach(gauge -> mark(at(gauge.at())));
+        DrawingPicture.parts(view, Drawing.Dimension.class).forEach(this::dimension);
+        DrawingPicture.parts(view, Drawing.Water.class).forEach(this::surfaceLevel);
         DrawingPicture.parts(view, Drawing.Level.class).forEach(this::level);
-        DrawingPicture.parts(view, Drawing.Gauge.class).forEach(this::gauge);
+        DrawingPicture.parts(view, Drawing.Gauge.class)
+                .forEach(gauge -> near(at(gauge.at()), 4.4, List.of(Piece.plain(gauge.words()))));
         DrawingPicture.parts(view, Drawing.Label.class)
-                .forEach(label -> note(at(label.at()), List.of(Piece.plain(label.words()))));
+                .forEach(label -> near(at(label.at()), 1, List.of(Piece.plain(label.words()))));
     }
 
     private At at(Drawing.Point point) {
@@ -135,22 +142,40 @@ final class ViewSketch {
         }
     }
 
-    private void water(Drawing.Water water) {
-        At from = at(water.from());
-        At to = at(water.to());
-        sketch.stroke(Sketch.MEDIUM, Sketch.WHOLE, from, to);
-        double x = from.x() + (to.x() - from.x()) * 0.35;
-        double y = from.y();
+    private void surface(Drawing.Water water) {
+        sketch.stroke(Sketch.MEDIUM, Sketch.WHOLE, at(water.from()), at(water.to()));
+        At sign = sign(water);
+        double x = sign.x();
+        double y = sign.y();
         sketch.stroke(Sketch.THIN, Sketch.WHOLE, true, List.of(new At(x, y), new At(x - 1.2, y - 2), new At(x + 1.2, y - 2)));
         for (int i = 1; i <= 3; i++) {
             double half = 1.5 - 0.4 * i;
             sketch.stroke(Sketch.THIN, Sketch.WHOLE, new At(x - half, y + 0.6 * i), new At(x + half, y + 0.6 * i));
         }
+    }
+
+    /** Where the sign of a water surface stands. */
+    private At sign(Drawing.Water water) {
+        At from = at(water.from());
+        return new At(from.x() + (at(water.to()).x() - from.x()) * 0.2, from.y());
+    }
+
+    /** The level of a water surface, above its sign or near it. */
+    private void surfaceLevel(Drawing.Water water) {
         Drawing.Quantity level = water.level();
-        if (level != null) {
-            place(new At(x, y - 2.8), quantity(level), List.of(
-                    new At(0, 0), new At(0, -3.4), new At(0, -6.8), new At(14, 0), new At(-14, 0), new At(0, 8)));
+        if (level == null) {
+            return;
         }
+        At sign = sign(water);
+        List<Piece> pieces = quantity(level);
+        double width = Sketch.width(pieces, SIZE);
+        List<Ink.Lettering> places = new ArrayList<>();
+        for (double up : new double[] {2.9, 6.3, 9.7, -5.6, -9, 13.1}) {
+            for (double share : new double[] {0.5, 0.35, 0.65, 0.1, 0.9, -0.15, 1.15}) {
+                places.add(new Ink.Lettering(new At(sign.x() - share * width, sign.y() - up), SIZE, 0, pieces));
+            }
+        }
+        sketch.choose(places);
     }
 
     private void flow(Drawing.Flow flow) {
@@ -166,51 +191,39 @@ final class ViewSketch {
         sketch.centred(new At((from.x() + end.x()) / 2, from.y() - 1.2), SIZE, 0, List.of(Piece.plain("flow")));
     }
 
+    /** A level at a point: a dot, a leader, and the text where it hides least. */
     private void level(Drawing.Level level) {
         At at = at(level.at());
         List<Piece> pieces = quantity(level.value());
         double width = Sketch.width(pieces, SIZE);
-        At[] places = {new At(5, 9), new At(-5 - width, 9), new At(5, 13), new At(-5 - width, 13), new At(5, -9)};
-        for (At place : places) {
-            Ink.Lettering text = new Ink.Lettering(new At(at.x() + place.x(), at.y() + place.y()), SIZE, 0, pieces);
-            if (sketch.isFree(text)) {
-                leader(at, text, width);
-                return;
+        List<Ink.Lettering> places = new ArrayList<>();
+        for (double down : new double[] {9, -8, 13, -12, 17, -16, -20}) {
+            for (double right : new double[] {5, -5 - width, 9, -9 - width, 14, -14 - width}) {
+                places.add(new Ink.Lettering(new At(at.x() + right, at.y() + down), SIZE, 0, pieces));
             }
         }
-        leader(at, new Ink.Lettering(new At(at.x() + 5, at.y() + 9), SIZE, 0, pieces), width);
-    }
-
-    private void leader(At at, Ink.Lettering text, double width) {
+        Ink.Lettering text = sketch.choose(places);
         sketch.circle(at, 0.5, false);
-        boolean right = text.at().x() >= at.x();
-        double y = text.at().y() - 0.9;
-        At near = new At(right ? text.at().x() - 0.8 : text.at().x() + width + 0.8, y);
-        sketch.stroke(Sketch.THIN, Sketch.WHOLE, at, near);
-        sketch.text(text.at(), text.size(), text.pieces());
+        boolean isRight = text.at().x() >= at.x();
+        sketch.stroke(Sketch.THIN, Sketch.WHOLE, at,
+                new At(isRight ? text.at().x() - 0.8 : text.at().x() + width + 0.8, text.at().y() - 0.9));
     }
 
-    private void gauge(Drawing.Gauge gauge) {
-        At at = at(gauge.at());
+    private void mark(At at) {
         sketch.circle(at, 1.1, true);
         sketch.circle(at, 0.35, false);
-        List<Piece> pieces = List.of(Piece.plain(gauge.words()));
-        place(new At(at.x(), at.y() + 4.4), pieces, List.of(new At(0, 0), new At(0, 2), new At(-8, -3), new At(8, -3)));
     }
 
-    private void note(At at, List<Piece> pieces) {
-        place(at, pieces, List.of(new At(0, 0), new At(0, -3.4), new At(0, 3.4), new At(12, 0), new At(-12, 0)));
-    }
-
-    /** Sets a text with its middle at the first of the places where it lies on no other. */
-    private void place(At at, List<Piece> pieces, List<At> shifts) {
+    /** A text with its middle so far below a place, or near it. */
+    private void near(At at, double below, List<Piece> pieces) {
         double half = Sketch.width(pieces, SIZE) / 2;
-        At chosen = shifts.stream()
-                .map(shift -> new At(at.x() + shift.x() - half, at.y() + shift.y()))
-                .filter(start -> sketch.isFree(new Ink.Lettering(start, SIZE, 0, pieces)))
-                .findFirst()
-                .orElse(new At(at.x() - half, at.y()));
-        sketch.text(chosen, SIZE, pieces);
+        List<Ink.Lettering> places = new ArrayList<>();
+        for (double down : new double[] {below, below + 3, 1 - below, -2 - below}) {
+            for (double right : new double[] {0, half + 2, -half - 2}) {
+                places.add(new Ink.Lettering(new At(at.x() - half + right, at.y() + down), SIZE, 0, pieces));
+            }
+        }
+        sketch.choose(places);
     }
 
     private List<Piece> quantity(Drawing.Quantity quantity) {
@@ -274,15 +287,32 @@ final class ViewSketch {
         double width = Sketch.width(pieces, SIZE);
         At middle = new At((start.x() + end.x()) / 2, (start.y() + end.y()) / 2);
         boolean upright = Math.abs(ux) < 0.1;
-        if (upright && width > length - 2) {
-            At beside = new At(middle.x() + 1.2, middle.y() + 1);
-            sketch.text(beside, SIZE, pieces);
-            return;
-        }
         double angle = upright ? 90 : Math.toDegrees(Math.atan2(-uy * Math.signum(ux), Math.abs(ux)));
         double radians = Math.toRadians(angle);
-        At above = new At(middle.x() - 0.9 * Math.sin(radians), middle.y() - 0.9 * Math.cos(radians));
-        sketch.centred(above, SIZE, angle, pieces);
+        List<Ink.Lettering> places = new ArrayList<>();
+        if (width <= length - 2) {
+            double x = middle.x() - 0.9 * Math.sin(radians) - width / 2 * Math.cos(radians);
+            double y = middle.y() - 0.9 * Math.cos(radians) + width / 2 * Math.sin(radians);
+            for (double share : new double[] {0, 0.25, -0.25}) {
+                double along = share * (length - width - 2);
+                places.add(new Ink.Lettering(
+                        new At(x + along * Math.cos(radians), y - along * Math.sin(radians)), SIZE, angle, pieces));
+            }
+        } else if (upright) {
+            double foot = Math.max(start.y(), end.y());
+            double head = Math.min(start.y(), end.y());
+            for (double y : new double[] {middle.y() + 1, foot + 3.4, head - 1.5, foot + 6.8}) {
+                places.add(new Ink.Lettering(new At(middle.x() + 1.2, y), SIZE, 0, pieces));
+                places.add(new Ink.Lettering(new At(middle.x() - 1.2 - width, y), SIZE, 0, pieces));
+            }
+        } else {
+            for (double up : new double[] {0.9, -3.2, 4.3}) {
+                for (double right : new double[] {-width / 2, length / 2 + 4.5, -length / 2 - 4.5 - width}) {
+                    places.add(new Ink.Lettering(new At(middle.x() + right, middle.y() - up), SIZE, 0, pieces));
+                }
+            }
+        }
+        sketch.choose(places);
     }
 
     private void extension(At from, At to) {
