@@ -13,6 +13,7 @@ import java.time.format.DateTimeFormatter;
 import java.util.HexFormat;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Set;
 import nappe.results.Furniture;
 import org.w3c.dom.Document;
@@ -23,7 +24,7 @@ import org.xhtmlrenderer.pdf.ITextRenderer;
 final class PdfWriting {
     private PdfWriting() {}
 
-    static PdfDelivery write(String xhtml, Furniture furniture) {
+    static PdfDelivery write(String xhtml, Furniture furniture, Map<String, Picture> pictures) {
         float dots = ITextRenderer.DEFAULT_DOTS_PER_POINT;
         FaceResolver faces = new FaceResolver();
         Glyphs glyphs = new Glyphs(faces);
@@ -34,7 +35,7 @@ final class PdfWriting {
                 paper,
                 new ClosedAgent(paper),
                 faces,
-                new NothingReplaced(),
+                new PictureFactory(pictures, dots),
                 glyphs);
         renderer.setPDFVersion(PdfWriter.VERSION_1_7);
         renderer.setListener(new Stamp(xhtml, furniture));
