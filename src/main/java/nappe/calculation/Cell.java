@@ -1,5 +1,7 @@
 package nappe.calculation;
 
+import java.util.Collections;
+import java.util.LinkedHashMap;
 import java.util.Map;
 import nappe.formula.Formula;
 import nappe.formula.Sign;
@@ -51,7 +53,7 @@ public final class Cell implements Reference {
         this.unit = unit;
         this.typed = typed;
         this.formula = formula;
-        this.references = Map.copyOf(references);
+        this.references = Collections.unmodifiableMap(new LinkedHashMap<>(references));
         this.sureness = sureness;
         this.allowed = allowed;
     }
