@@ -17,6 +17,7 @@ public record PdfDelivery(byte[] bytes, List<String> warnings) {
         PageSize page = PageSize.of(results.furniture().letterPaper());
         Furnishing furnishing = Furnishing.of(results.furniture(), page);
         String title = furnishing.number() + " " + furnishing.subject() + ", revision " + furnishing.revision();
+        Drawings drawings = new Drawings();
         String xhtml = Xhtml.fill(Map.of(
                 "title",
                 title,
@@ -25,8 +26,8 @@ public record PdfDelivery(byte[] bytes, List<String> warnings) {
                 "pageRule",
                 page.rules(furnishing.footHeight(page)),
                 "leaves",
-                new Leaves(results, page).leaves()));
-        PdfDelivery written = PdfWriting.write(xhtml, results.furniture());
+                new Leaves(results, page, drawings).leaves()));
+        PdfDelivery written = PdfWriting.write(xhtml, drawings, results.furniture());
         List<String> warnings = new ArrayList<>(furnishing.warnings(results.furniture()));
         warnings.addAll(written.warnings());
         return new PdfDelivery(written.bytes(), List.copyOf(warnings));

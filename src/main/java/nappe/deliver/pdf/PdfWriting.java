@@ -14,6 +14,8 @@ import java.util.HexFormat;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
+import java.util.SortedSet;
+import java.util.TreeSet;
 import nappe.results.Furniture;
 import org.w3c.dom.Document;
 import org.xhtmlrenderer.pdf.DefaultPDFCreationListener;
@@ -23,7 +25,7 @@ import org.xhtmlrenderer.pdf.ITextRenderer;
 final class PdfWriting {
     private PdfWriting() {}
 
-    static PdfDelivery write(String xhtml, Furniture furniture) {
+    static PdfDelivery write(String xhtml, Drawings drawings, Furniture furniture) {
         float dots = ITextRenderer.DEFAULT_DOTS_PER_POINT;
         FaceResolver faces = new FaceResolver();
         Glyphs glyphs = new Glyphs(faces);
@@ -34,7 +36,7 @@ final class PdfWriting {
                 paper,
                 new ClosedAgent(paper),
                 faces,
-                new NothingReplaced(),
+                new DrawnElements(drawings, dots),
                 glyphs);
         renderer.setPDFVersion(PdfWriter.VERSION_1_7);
         renderer.setListener(new Stamp(xhtml, furniture));
@@ -46,7 +48,9 @@ final class PdfWriting {
         } while (LonelyHeads.moved(renderer));
         ByteArrayOutputStream bytes = new ByteArrayOutputStream();
         renderer.createPDF(bytes);
-        return new PdfDelivery(bytes.toByteArray(), warnings(glyphs.missing()));
+        SortedSet<Integer> missing = new TreeSet<>(glyphs.missing());
+        missing.addAll(drawings.missing());
+        return new PdfDelivery(bytes.toByteArray(), warnings(missing));
     }
 
     private static List<String> warnings(Set<Integer> missing) {
