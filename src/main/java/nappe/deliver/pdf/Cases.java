@@ -27,7 +27,7 @@ final class Cases {
         for (int i = 0; i < values.size(); i++) {
             rows.add(beside ? beside(i, column, room) : below(i));
         }
-        return Box.column(rows, 1.35 * type.size(), 0.4 * type.size());
+        return Box.column(rows, 1.35 * type.size(), 0.45 * type.size());
     }
 
     private Box beside(int row, double column, double room) {

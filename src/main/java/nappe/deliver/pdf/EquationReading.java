@@ -202,6 +202,12 @@ final class EquationReading implements Reading<BoxRow> {
     }
 
     private BoxRow over(Formula.Operation operation) {
+        if (operation.left() instanceof Formula.Operation product
+                && product.operator() == Operator.TIMES
+                && product.right() instanceof Formula.Numeral
+                && operation.right() instanceof Formula.Numeral) {
+            return times(new Formula.Operation(Operator.TIMES, product.left(), quotient(product, operation)));
+        }
         if (!type.hasSlashes()) {
             EquationReading inner = at(type.inFraction());
             BoxRow above = operation.left().read(inner);
@@ -216,6 +222,11 @@ final class EquationReading implements Reading<BoxRow> {
         return above.then(gap, AT_PRODUCT, BoxRow.atom(type.upright("/")))
                 .then(gap, below)
                 .bound(Operator.OVER.binding());
+    }
+
+    /** Of {@code C*2/3}, the {@code 2/3}: two numbers that belong together are set as one fraction. */
+    private static Formula quotient(Formula.Operation product, Formula.Operation whole) {
+        return new Formula.Operation(Operator.OVER, product.right(), whole.right());
     }
 
     private BoxRow power(Formula.Operation operation) {

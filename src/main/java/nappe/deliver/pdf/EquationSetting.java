@@ -87,8 +87,9 @@ final class EquationSetting {
     Equation equation() {
         Box all = Box.column(lines, 1.35 * size, 0.5 * size);
         double above = Math.max(all.above() + CLEAR * size, LINE_ABOVE * size);
-        return new Equation(
-                new Box(all.width(), above, Math.max(all.below(), LINE_BELOW * size), all.ink(), all.parts()), texts);
+        double last = -all.parts().get(all.parts().size() - 1).y();
+        double below = Math.max(all.below(), last + LINE_BELOW * size);
+        return new Equation(new Box(all.width(), above, below, all.ink(), all.parts()), texts);
     }
 
     private boolean ownLine() {

@@ -91,11 +91,22 @@ class PdfDeliveryTest {
 
     @Test
     void anEquationIsOneSpanThatCopiesAsItsPlainFormula() throws IOException {
+        List<String> spans = spans(PDF);
+        assertThat(spans)
+                .contains(
+                        "h_f = 1 ft * (Q/(C*1 ft3/s))^(1/n)",
+                        "= 1 ft * (2.6965 ft3/s / (4*1 ft3/s))^(1/1.522)",
+                        "h_a = if(S_f <= S_lim, h_f, none())");
+    }
+
+    /** The plain texts of the equations on all pages; each is one span with the characters in it. */
+    private static List<String> spans(byte[] pdf) throws IOException {
         List<String> spans = new ArrayList<>();
-        try (PdfReader reader = new PdfReader(PDF)) {
+        try (PdfReader reader = new PdfReader(pdf)) {
             for (int page = 1; page <= reader.getNumberOfPages(); page++) {
                 String content = new String(reader.getPageContent(page), StandardCharsets.ISO_8859_1);
-                Matcher span = Pattern.compile("/Span <</ActualText\\((.*?)\\)>> ?BDC\n").matcher(content);
+                Matcher span = Pattern.compile("/Span <</ActualText\\((.*?)\\)>> ?BDC\n")
+                        .matcher(content);
                 while (span.find()) {
                     spans.add(span.group(1).replace("\\(", "(").replace("\\)", ")"));
                     String within = content.substring(span.end(), content.indexOf("EMC", span.end()));
@@ -103,11 +114,29 @@ class PdfDeliveryTest {
                 }
             }
         }
-        assertThat(spans)
-                .contains(
-                        "h_f = 1 ft * (Q/(C*1 ft3/s))^(1/n)",
-                        "= 1 ft * (2.6965 ft3/s / (4*1 ft3/s))^(1/1.522)",
-                        "h_a = if(S_f <= S_lim, h_f, none())");
+        return spans;
+    }
+
+    /** The renderer would draw on both pages what reaches over the edge of one. */
+    @Test
+    void everyEquationStandsOnOnePageWhole() throws IOException {
+        Drawings drawings = new Drawings();
+        List<String> set = new ArrayList<>();
+        for (View.Leaf leaf :
+                new Leaves(RESULTS, PageSize.of(RESULTS.furniture().letterPaper()), drawings).leaves()) {
+            for (View.Part part : leaf.parts()) {
+                if (part instanceof View.Grid grid) {
+                    grid.body().stream()
+                            .flatMap(row -> row.cells().stream())
+                            .flatMap(cell -> cell.texts().stream())
+                            .filter(text -> text.picture() != null)
+                            .forEach(text -> set.addAll(
+                                    ((Equation) drawings.named(text.picture().name())).texts()));
+                }
+            }
+        }
+        assertThat(set).hasSizeGreaterThan(50);
+        assertThat(spans(PDF)).isEqualTo(set);
     }
 
     @Test
