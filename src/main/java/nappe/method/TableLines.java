@@ -62,7 +62,7 @@ final class TableLines {
         if (between) {
             between(first, column);
         } else {
-            line(row(), call(Function.MATCH, symbol(key), column), "row of the table " + table.name(), Sign.POSITIVE);
+            line(row(), call(Function.MATCH, symbol(key), column), "row in the table: " + table.title(), Sign.POSITIVE);
         }
     }
 
@@ -90,22 +90,20 @@ final class TableLines {
         Formula start = call(Function.INDEX, column, number(1));
         String inside = "x_" + suffix();
         line(inside, call(Function.MIN, call(Function.MAX, keyNumber, start), last),
-                key + " as looked up, not beyond the ends of the table", first.sign());
-        // A value at a row of the table is found at that row in every program, whatever its last bits are.
-        Formula nudged = plus(symbol(inside), nudge(first));
-        line(row(), call(Function.MIN, call(Function.MATCH_BELOW, nudged, column), number(table.rows() - 1)),
-                "row of the table " + table.name() + " below it", Sign.POSITIVE);
+                keyLabel() + " as looked up, not beyond the ends of the table: " + table.title(), first.sign());
+        line(row(), call(Function.MIN, call(Function.MATCH_BELOW, symbol(inside), column), number(table.rows() - 1)),
+                "row below it in the table: " + table.title(), Sign.POSITIVE);
         Formula below = call(Function.INDEX, column, symbol(row()));
         Formula next = call(Function.INDEX, column, plus(symbol(row()), number(1)));
         String step = "d_" + suffix();
-        line(step, minus(next, below), "step of the table there", Sign.POSITIVE);
+        line(step, minus(next, below), "step of the table from this row to the next", Sign.POSITIVE);
         line(share(), new Formula.Operation(Operator.OVER, minus(symbol(inside), below), symbol(step)),
                 "share of the way to the next row", Sign.ANY);
         Formula span = span(first);
         draft.limits.add(new Limit(start, keyNumber, false, span, null,
-                key + " is inside the table " + table.name() + ", lower end", source));
+                keyLabel() + " is within the table, lower end: " + table.title(), source));
         draft.limits.add(new Limit(keyNumber, last, true, span, null,
-                key + " is inside the table " + table.name() + ", upper end", source));
+                keyLabel() + " is within the table, upper end: " + table.title(), source));
     }
 
     /** What the margin to an end of the table is measured by: from its first row to its last. */
@@ -114,12 +112,6 @@ final class TableLines {
         double to = ((Value.Number) first.values().get(first.values().size() - 1)).value();
         String text = java.math.BigDecimal.valueOf(to).subtract(java.math.BigDecimal.valueOf(from)).toPlainString();
         return new Formula.Numeral(Double.parseDouble(text), text);
-    }
-
-    /** A billionth of the table's range. */
-    private static Formula nudge(CitedTable.Column first) {
-        double nudge = 1e-9 * ((Formula.Numeral) span(first)).value();
-        return new Formula.Numeral(nudge, Double.toString(nudge));
     }
 
     /** Adds the line of one column of the table that was opened last. */
@@ -183,6 +175,14 @@ final class TableLines {
     private static Unit unitOf(CitedTable.Column column) {
         Unit unit = column.unit();
         return unit == null ? Unit.one() : unit;
+    }
+
+    private String keyLabel() {
+        return draft.items.stream()
+                .filter(item -> item.outputs().contains(key))
+                .map(item -> item instanceof Item.Line line ? line.label() : key)
+                .findFirst()
+                .orElse(key);
     }
 
     /** T1 for the first look-up of the sheet, T2 for the second. */

@@ -121,23 +121,32 @@ final class BackSheets {
         texts(sheet, "Method sheets used", List.of("Method", "Hash of its text"), List.of(40, 30), statement.methods());
         texts(sheet, "Check values run for these methods when this package was made",
                 List.of("Method", "Kind", "Rows", "Met"), List.of(40, 30, 12, 12), statement.counts());
+        texts(sheet, "Check values at hand that are known to disagree, and are not run",
+                List.of("Check value", "Why"), List.of(40, 60), statement.off());
         sheet.note("Kinds: published, a number printed by somebody else; library, a general-purpose library that was run; derived, a second"
                 + " evaluation of the same theory, which guards the coding and not the theory; memory, not confirmed.");
-        texts(sheet, "Check values that others published or computed",
-                List.of("Method and entries", "Source", "Symbol", "Computed", "Expected", "Tolerance", "Verdict"),
-                List.of(40, 44, 10, 16, 16, 12, 10), statement.rows());
+        if (!statement.rows().isEmpty()) {
+            TableDraft table = sheet.workbookTable("Each check value", columns(
+                    List.of("Method and entries", "Source", "Symbol", "Computed", "Expected", "Tolerance", "Verdict"),
+                    List.of(40, 44, 10, 16, 16, 12, 10)), statement.rows().size());
+            statement.rows().forEach(row -> table.add(row.stream().<Block.Item>map(Block.Text::new).toList()));
+        }
     }
 
-    private static void texts(SheetDraft sheet, String title, List<String> heads, List<Integer> widths, List<List<String>> rows) {
+    private static List<Block.Column> columns(List<String> heads, List<Integer> widths) {
         List<Block.Column> columns = new ArrayList<>();
         for (int i = 0; i < heads.size(); i++) {
             columns.add(new Block.Column(heads.get(i), widths.get(i), Block.Align.LEFT));
         }
+        return columns;
+    }
+
+    private static void texts(SheetDraft sheet, String title, List<String> heads, List<Integer> widths, List<List<String>> rows) {
         if (rows.isEmpty()) {
             sheet.heading(title);
             sheet.note("none");
         } else {
-            TableDraft table = sheet.table(title, columns);
+            TableDraft table = sheet.table(title, columns(heads, widths));
             rows.forEach(row -> table.add(row.stream().<Block.Item>map(Block.Text::new).toList()));
         }
         sheet.gap();
@@ -157,7 +166,7 @@ final class BackSheets {
                 new Block.Column("Case", 26, Block.Align.LEFT),
                 new Block.Column("Trials", 24, Block.Align.LEFT),
                 new Block.Column("Trials used", 15, Block.Align.RIGHT),
-                new Block.Column("Difference left", 12, Block.Align.RIGHT)));
+                new Block.Column("Difference left (0: within 1e-12 of the right side)", 20, Block.Align.RIGHT)));
         for (TrialRows.Solved root : roots) {
             Scope scope = Scope.ofElement();
             scope.put("closing", root.status());
