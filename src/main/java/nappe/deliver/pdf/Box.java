@@ -10,8 +10,8 @@ import java.util.List;
  * @param above from the baseline up to its upper edge
  * @param below from the baseline down to its lower edge; negative where the edge is above the baseline
  */
-record Box(double width, double above, double below, Ink ink, List<Part> parts) {
-    private static final Ink NONE = new Ink.None();
+record Box(double width, double above, double below, Mark ink, List<Part> parts) {
+    private static final Mark NONE = new Mark.None();
 
     /** A box in another; the left end of its baseline stands at x and y of the other's, upward. */
     record Part(Box box, double x, double y) {
@@ -33,7 +33,7 @@ record Box(double width, double above, double below, Ink ink, List<Part> parts) 
     }
 
     /** A box with something drawn in it. */
-    static Box of(double width, double above, double below, Ink ink) {
+    static Box of(double width, double above, double below, Mark ink) {
         return new Box(width, above, below, ink, List.of());
     }
 

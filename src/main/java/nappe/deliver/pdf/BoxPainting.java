@@ -9,7 +9,7 @@ final class BoxPainting {
     private final PdfContentByte page;
     private final List<Spot> characters = new ArrayList<>();
 
-    private record Spot(Ink.Characters characters, double x, double y) {}
+    private record Spot(Mark.Characters characters, double x, double y) {}
 
     private BoxPainting(PdfContentByte page) {
         this.page = page;
@@ -23,17 +23,17 @@ final class BoxPainting {
     }
 
     private void areas(Box box, double x, double y) {
-        if (box.ink() instanceof Ink.Area area) {
+        if (box.ink() instanceof Mark.Area area) {
             fill(area, x, y);
-        } else if (box.ink() instanceof Ink.Characters text && !text.text().isBlank()) {
+        } else if (box.ink() instanceof Mark.Characters text && !text.text().isBlank()) {
             characters.add(new Spot(text, x, y));
         }
         box.parts().forEach(part -> areas(part.box(), x + part.x(), y + part.y()));
     }
 
-    private void fill(Ink.Area area, double x, double y) {
+    private void fill(Mark.Area area, double x, double y) {
         page.moveTo((float) (x + area.x()), (float) (y + area.y()));
-        for (Ink.Curve curve : area.edge()) {
+        for (Mark.Curve curve : area.edge()) {
             float toX = (float) (x + curve.x());
             float toY = (float) (y + curve.y());
             if (curve.isStraight()) {

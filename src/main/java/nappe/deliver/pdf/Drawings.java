@@ -16,10 +16,10 @@ final class Drawings {
      *
      * @param text what stands for it, in characters
      */
-    View.Picture add(Drawn drawn, String text) {
+    View.Inset add(Drawn drawn, String text) {
         String name = "d" + (drawings.size() + 1);
         drawings.put(name, drawn);
-        return new View.Picture(name, XmlText.safe(text));
+        return new View.Inset(name, XmlText.safe(text));
     }
 
     Drawn named(String name) {

@@ -21,7 +21,7 @@ final class Shapes {
         double gap = 0.16 * size;
         double bar = Math.max(above.width(), below.width()) + 2 * overhang;
         double half = type.rule() / 2;
-        Box rule = Box.of(bar, type.rule(), 0, Ink.Area.rule(bar, type.rule()));
+        Box rule = Box.of(bar, type.rule(), 0, Mark.Area.rule(bar, type.rule()));
         return Box.holding(
                 bar + 2 * side,
                 List.of(
@@ -66,19 +66,19 @@ final class Shapes {
         double tick = Math.min(0.5 * height, 0.55 * size) - foot;
         double slope = sign - 0.28 * size;
         double thick = 1.7 * rule;
-        List<Ink.Curve> edge = List.of(
-                Ink.Curve.straight(0.12 * size, tick),
-                Ink.Curve.straight(0.28 * size, -foot + 2.2 * rule),
-                Ink.Curve.straight(0.28 * size + slope - 0.2 * rule, top),
-                Ink.Curve.straight(sign + under.width() + 0.08 * size, top),
-                Ink.Curve.straight(sign + under.width() + 0.08 * size, top - rule),
-                Ink.Curve.straight(sign + 0.6 * rule, top - rule),
-                Ink.Curve.straight(0.28 * size + 0.3 * rule, -foot),
-                Ink.Curve.straight(0.28 * size - 0.5 * rule, -foot),
-                Ink.Curve.straight(0.12 * size - thick * 0.2, tick - thick),
-                Ink.Curve.straight(0.02 * size, tick - thick - 0.03 * size));
+        List<Mark.Curve> edge = List.of(
+                Mark.Curve.straight(0.12 * size, tick),
+                Mark.Curve.straight(0.28 * size, -foot + 2.2 * rule),
+                Mark.Curve.straight(0.28 * size + slope - 0.2 * rule, top),
+                Mark.Curve.straight(sign + under.width() + 0.08 * size, top),
+                Mark.Curve.straight(sign + under.width() + 0.08 * size, top - rule),
+                Mark.Curve.straight(sign + 0.6 * rule, top - rule),
+                Mark.Curve.straight(0.28 * size + 0.3 * rule, -foot),
+                Mark.Curve.straight(0.28 * size - 0.5 * rule, -foot),
+                Mark.Curve.straight(0.12 * size - thick * 0.2, tick - thick),
+                Mark.Curve.straight(0.02 * size, tick - thick - 0.03 * size));
         double width = sign + under.width() + 0.14 * size;
-        Box radical = Box.of(width, top, foot, new Ink.Area(0.02 * size, tick - 0.05 * size, edge));
+        Box radical = Box.of(width, top, foot, new Mark.Area(0.02 * size, tick - 0.05 * size, edge));
         return new Box(width, top, foot, radical.ink(), List.of(new Box.Part(under, sign + 0.03 * size, 0)));
     }
 
@@ -103,21 +103,21 @@ final class Shapes {
                 width,
                 top,
                 -bottom,
-                new Ink.Area(
+                new Mark.Area(
                         far,
                         top,
                         List.of(
-                                new Ink.Curve(near, top - 0.25 * half, near, top - arm, near, type.axis()),
-                                new Ink.Curve(near, bottom + arm, near, bottom + 0.25 * half, far, bottom),
-                                Ink.Curve.straight(far, bottom + 2 * tip),
-                                new Ink.Curve(
+                                new Mark.Curve(near, top - 0.25 * half, near, top - arm, near, type.axis()),
+                                new Mark.Curve(near, bottom + arm, near, bottom + 0.25 * half, far, bottom),
+                                Mark.Curve.straight(far, bottom + 2 * tip),
+                                new Mark.Curve(
                                         near + in * thick,
                                         bottom + 0.3 * half,
                                         near + in * thick,
                                         bottom + arm,
                                         near + in * thick,
                                         type.axis()),
-                                new Ink.Curve(
+                                new Mark.Curve(
                                         near + in * thick,
                                         top - arm,
                                         near + in * thick,
@@ -131,7 +131,7 @@ final class Shapes {
         double top = Math.max(above, 0.7 * size) + 0.04 * size;
         double foot = Math.max(below, 0.12 * size) + 0.04 * size;
         double thick = 1.1 * type.rule();
-        Box rule = Box.of(thick, top + foot, 0, Ink.Area.rule(thick, top + foot));
+        Box rule = Box.of(thick, top + foot, 0, Mark.Area.rule(thick, top + foot));
         return Box.holding(thick + 0.16 * size, List.of(new Box.Part(rule, 0.08 * size, -foot)));
     }
 
@@ -147,40 +147,40 @@ final class Shapes {
         double hair = 0.5 * type.rule();
         double end = 0.48 * size;
         double tip = 0.03 * size;
-        List<Ink.Curve> edge = List.of(
-                new Ink.Curve(spine + 0.1 * size, top, spine, top - 0.4 * bend, spine, top - bend),
-                Ink.Curve.straight(spine, axis + bend),
-                new Ink.Curve(spine, axis + 0.4 * bend, spine - 0.06 * size, axis + hair, tip, axis),
-                new Ink.Curve(spine - 0.06 * size, axis - hair, spine, axis - 0.4 * bend, spine, axis - bend),
-                Ink.Curve.straight(spine, bottom + bend),
-                new Ink.Curve(spine, bottom + 0.4 * bend, spine + 0.1 * size, bottom, end, bottom),
-                Ink.Curve.straight(end, bottom + 2 * hair),
-                new Ink.Curve(
+        List<Mark.Curve> edge = List.of(
+                new Mark.Curve(spine + 0.1 * size, top, spine, top - 0.4 * bend, spine, top - bend),
+                Mark.Curve.straight(spine, axis + bend),
+                new Mark.Curve(spine, axis + 0.4 * bend, spine - 0.06 * size, axis + hair, tip, axis),
+                new Mark.Curve(spine - 0.06 * size, axis - hair, spine, axis - 0.4 * bend, spine, axis - bend),
+                Mark.Curve.straight(spine, bottom + bend),
+                new Mark.Curve(spine, bottom + 0.4 * bend, spine + 0.1 * size, bottom, end, bottom),
+                Mark.Curve.straight(end, bottom + 2 * hair),
+                new Mark.Curve(
                         spine + thick + 0.06 * size,
                         bottom + 2 * hair,
                         spine + thick,
                         bottom + 0.5 * bend,
                         spine + thick,
                         bottom + bend),
-                Ink.Curve.straight(spine + thick, axis - bend),
-                new Ink.Curve(
+                Mark.Curve.straight(spine + thick, axis - bend),
+                new Mark.Curve(
                         spine + thick, axis - 0.5 * bend, spine + 0.5 * thick, axis - 2 * hair, tip + thick, axis),
-                new Ink.Curve(
+                new Mark.Curve(
                         spine + 0.5 * thick,
                         axis + 2 * hair,
                         spine + thick,
                         axis + 0.5 * bend,
                         spine + thick,
                         axis + bend),
-                Ink.Curve.straight(spine + thick, top - bend),
-                new Ink.Curve(
+                Mark.Curve.straight(spine + thick, top - bend),
+                new Mark.Curve(
                         spine + thick,
                         top - 0.5 * bend,
                         spine + thick + 0.06 * size,
                         top - 2 * hair,
                         end,
                         top - 2 * hair));
-        Box brace = Box.of(braceWidth(), top, -bottom, new Ink.Area(end, top, edge));
+        Box brace = Box.of(braceWidth(), top, -bottom, new Mark.Area(end, top, edge));
         double y = axis + rows.height() / 2 - rows.above();
         return Box.holding(0, List.of(new Box.Part(brace, 0, 0), new Box.Part(rows, braceWidth(), y)));
     }

@@ -115,10 +115,10 @@ final class TableGrid {
             Block.Column column = table.columns().get(i);
             String room = column.align() == Block.Align.RIGHT ? decimals.get(i).room(text.characters()) : text.style();
             cells.add(
-                    View.GridCell.of(style(column), new View.Text(room, text.pieces(), text.target(), text.picture())));
+                    View.GridCell.of(style(column), new View.Text(room, text.pieces(), text.target(), text.inset())));
         }
         boolean blank = printed.size() > 1
-                && printed.stream().skip(1).allMatch(text -> text.characters().isEmpty() && text.picture() == null);
+                && printed.stream().skip(1).allMatch(text -> text.characters().isEmpty() && text.inset() == null);
         return new View.GridRow(blank ? "blank" : "", cells);
     }
 

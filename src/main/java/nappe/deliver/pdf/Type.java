@@ -118,6 +118,6 @@ record Type(double size, int level) {
                 face.getWidthPoint(text, (float) size),
                 top * size,
                 -bottom * size,
-                new Ink.Characters(text, face, size));
+                new Mark.Characters(text, face, size));
     }
 }

@@ -100,25 +100,25 @@ public final class View {
      * @param name of the drawing
      * @param text what stands for it, in characters
      */
-    public record Picture(String name, String text) {}
+    public record Inset(String name, String text) {}
 
     /**
      * Characters that are set as one line or paragraph.
      *
      * @param target id of what it links to, with the hash; empty for none
-     * @param picture drawn after the pieces; null for none
+     * @param inset drawn after the pieces; null for none
      */
     public record Text(
             String style,
             List<Piece> pieces,
             String target,
-            @Nullable Picture picture) {
+            @Nullable Inset inset) {
         Text(String style, List<Piece> pieces, String target) {
             this(style, pieces, target, null);
         }
 
         /** The same with something drawn at its end. */
-        Text with(Picture drawn) {
+        Text with(Inset drawn) {
             return new Text(style, pieces, target, drawn);
         }
 

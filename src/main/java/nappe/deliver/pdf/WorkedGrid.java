@@ -173,7 +173,7 @@ final class WorkedGrid {
 
     /** The result on the baseline of the last equation beside it. */
     private View.Text level(View.Text result, List<View.Text> quantity) {
-        View.Picture last = quantity.get(quantity.size() - 1).picture();
+        View.Inset last = quantity.get(quantity.size() - 1).inset();
         return last != null && drawings.named(last.name()) instanceof Equation equation
                 ? result.with(drawings.add(Equation.strut(SIZE, equation.lastBelow()), ""))
                 : result;

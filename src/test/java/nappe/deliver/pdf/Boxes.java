@@ -23,12 +23,12 @@ final class Boxes {
         return marked.toString();
     }
 
-    private static String ink(Ink ink) {
-        if (ink instanceof Ink.Characters characters) {
+    private static String ink(Mark ink) {
+        if (ink instanceof Mark.Characters characters) {
             return characters.face() == Typefaces.ITALIC ? "/" + characters.text() + "/" : characters.text();
         }
-        if (ink instanceof Ink.Area area) {
-            return area.edge().stream().allMatch(Ink.Curve::isStraight) && area.edge().size() == 3 ? "—" : "~";
+        if (ink instanceof Mark.Area area) {
+            return area.edge().stream().allMatch(Mark.Curve::isStraight) && area.edge().size() == 3 ? "—" : "~";
         }
         return "";
     }

@@ -129,9 +129,9 @@ class PdfDeliveryTest {
                     grid.body().stream()
                             .flatMap(row -> row.cells().stream())
                             .flatMap(cell -> cell.texts().stream())
-                            .filter(text -> text.picture() != null)
+                            .filter(text -> text.inset() != null)
                             .forEach(text -> set.addAll(
-                                    ((Equation) drawings.named(text.picture().name())).texts()));
+                                    ((Equation) drawings.named(text.inset().name())).texts()));
                 }
             }
         }

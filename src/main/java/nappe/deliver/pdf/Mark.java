@@ -4,15 +4,15 @@ import com.lowagie.text.pdf.BaseFont;
 import java.util.List;
 
 /** What is drawn in a box of an equation; in points from the left end of its baseline, upward. */
-sealed interface Ink {
+sealed interface Mark {
     /** Nothing: a box that only holds others, or a gap. */
-    record None() implements Ink {}
+    record None() implements Mark {}
 
     /** Characters of one face; all of them are in it. */
-    record Characters(String text, BaseFont face, double size) implements Ink {}
+    record Characters(String text, BaseFont face, double size) implements Mark {}
 
     /** An area filled: a rule, a radical, a bracket that has grown. */
-    record Area(double x, double y, List<Curve> edge) implements Ink {
+    record Area(double x, double y, List<Curve> edge) implements Mark {
         public Area {
             edge = List.copyOf(edge);
         }
