@@ -31,6 +31,18 @@ public sealed interface Block {
     }
 
     /**
+     * A figure: drawn in the PDF; in the workbook one row that says where it is.
+     *
+     * @param key by which the results know it
+     */
+    record Figure(int row, String title, String key) implements Block {
+        /** What the workbook says in its place. */
+        public String words() {
+            return "Figure: " + title + ". It is drawn in the PDF, on the sheet of the same number.";
+        }
+    }
+
+    /**
      * The calculation of one element. In the workbook one table: code, description, symbol, equation, unit, source,
      * value for all cases, then one column per case. In the PDF two: one case worked in full with equations and
      * numbers, then every case.

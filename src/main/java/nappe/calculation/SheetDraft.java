@@ -75,6 +75,13 @@ public final class SheetDraft {
         gap();
     }
 
+    /** A figure, by the key under which the results know it. */
+    public void figure(String figureTitle, String key) {
+        blocks.add(new Block.Figure(next, figureTitle, key));
+        next++;
+        gap();
+    }
+
     /** One empty row. */
     public void gap() {
         next++;

@@ -13,14 +13,16 @@ import org.xhtmlrenderer.render.BlockBox;
 import org.xhtmlrenderer.render.RenderingContext;
 import org.xhtmlrenderer.simple.extend.FormSubmissionListener;
 
-/** Draws our own drawings where an element names one; every other element is text: no images, no form fields. */
+/** Draws our own drawings where an element names one; every other element is left to another factory. */
 final class DrawnElements implements ReplacedElementFactory {
     private final Drawings drawings;
     private final float dotsPerPoint;
+    private final ReplacedElementFactory others;
 
-    DrawnElements(Drawings drawings, float dotsPerPoint) {
+    DrawnElements(Drawings drawings, float dotsPerPoint, ReplacedElementFactory others) {
         this.drawings = drawings;
         this.dotsPerPoint = dotsPerPoint;
+        this.others = others;
     }
 
     @Override
@@ -29,7 +31,7 @@ final class DrawnElements implements ReplacedElementFactory {
         Element element = box.getElement();
         return element != null && element.hasAttribute(Drawings.ATTRIBUTE)
                 ? new Place(drawings.named(element.getAttribute(Drawings.ATTRIBUTE)), dotsPerPoint)
-                : null;
+                : others.createReplacedElement(context, box, agent, cssWidth, cssHeight);
     }
 
     @Override

@@ -17,14 +17,16 @@ final class Leaves {
     private final Results results;
     private final PageSize page;
     private final Drawings drawings;
+    private final Pictures pictures;
 
     /**
-     * @param drawings takes in what is drawn on the sheets
+     * @param drawings takes in what is drawn in the lines of the sheets
      */
-    Leaves(Results results, PageSize page, Drawings drawings) {
+    Leaves(Results results, PageSize page, Drawings drawings, Pictures pictures) {
         this.results = results;
         this.page = page;
         this.drawings = drawings;
+        this.pictures = pictures;
     }
 
     List<View.Leaf> leaves() {
@@ -71,6 +73,8 @@ final class Leaves {
             return under(headings, List.of(elsewhere(sheet, elsewhere.table())));
         } else if (block instanceof Block.Note note) {
             return under(headings, note(note));
+        } else if (block instanceof Block.Figure figure) {
+            return under(headings, pictures.parts(figure, width, width > page.upright()));
         }
         throw new IllegalArgumentException("unknown block " + block);
     }

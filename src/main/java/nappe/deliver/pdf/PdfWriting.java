@@ -13,6 +13,7 @@ import java.time.format.DateTimeFormatter;
 import java.util.HexFormat;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Set;
 import java.util.SortedSet;
 import java.util.TreeSet;
@@ -25,7 +26,7 @@ import org.xhtmlrenderer.pdf.ITextRenderer;
 final class PdfWriting {
     private PdfWriting() {}
 
-    static PdfDelivery write(String xhtml, Drawings drawings, Furniture furniture) {
+    static PdfDelivery write(String xhtml, Furniture furniture, Drawings drawings, Map<String, Picture> pictures) {
         float dots = ITextRenderer.DEFAULT_DOTS_PER_POINT;
         FaceResolver faces = new FaceResolver();
         Glyphs glyphs = new Glyphs(faces);
@@ -36,7 +37,7 @@ final class PdfWriting {
                 paper,
                 new ClosedAgent(paper),
                 faces,
-                new DrawnElements(drawings, dots),
+                new DrawnElements(drawings, dots, new PictureFactory(pictures, dots)),
                 glyphs);
         renderer.setPDFVersion(PdfWriter.VERSION_1_7);
         renderer.setListener(new Stamp(xhtml, furniture));

@@ -45,6 +45,8 @@ final class SheetWriter {
                 canvas.wide(heading.row(), Role.HEADING, Canvas.tidy(heading.text()));
             } else if (block instanceof Block.Note note) {
                 canvas.wide(note.row(), note.caution() ? Role.CAUTION : Role.NOTE, Canvas.tidy(note.text()));
+            } else if (block instanceof Block.Figure figure) {
+                canvas.wide(figure.row(), Role.NOTE, Canvas.tidy(figure.words()));
             } else if (block instanceof Block.Table table) {
                 table(table);
             } else if (block instanceof Block.WorkbookOnly only) {

@@ -122,8 +122,8 @@ class PdfDeliveryTest {
     void everyEquationStandsOnOnePageWhole() throws IOException {
         Drawings drawings = new Drawings();
         List<String> set = new ArrayList<>();
-        for (View.Leaf leaf :
-                new Leaves(RESULTS, PageSize.of(RESULTS.furniture().letterPaper()), drawings).leaves()) {
+        PageSize page = PageSize.of(RESULTS.furniture().letterPaper());
+        for (View.Leaf leaf : new Leaves(RESULTS, page, drawings, new Pictures(RESULTS)).leaves()) {
             for (View.Part part : leaf.parts()) {
                 if (part instanceof View.Grid grid) {
                     grid.body().stream()
