@@ -114,8 +114,7 @@ final class TableGrid {
             View.Text text = printed.get(i);
             Block.Column column = table.columns().get(i);
             String room = column.align() == Block.Align.RIGHT ? decimals.get(i).room(text.characters()) : text.style();
-            cells.add(
-                    View.GridCell.of(style(column), new View.Text(room, text.pieces(), text.target(), text.inset())));
+            cells.add(View.GridCell.of(style(column), new View.Text(room, text.pieces(), text.target(), text.inset())));
         }
         boolean blank = printed.size() > 1
                 && printed.stream().skip(1).allMatch(text -> text.characters().isEmpty() && text.inset() == null);

@@ -64,7 +64,8 @@ public final class View {
 
         /** The size, for the style sheet. */
         public String size() {
-            return "width: " + Math.round(width * 100) / 100.0 + "mm; height: " + Math.round(height * 100) / 100.0 + "mm";
+            return "width: " + Math.round(width * 100) / 100.0 + "mm; height: " + Math.round(height * 100) / 100.0
+                    + "mm";
         }
     }
 

@@ -28,7 +28,10 @@ final class Boxes {
             return characters.face() == Typefaces.ITALIC ? "/" + characters.text() + "/" : characters.text();
         }
         if (ink instanceof Mark.Area area) {
-            return area.edge().stream().allMatch(Mark.Curve::isStraight) && area.edge().size() == 3 ? "—" : "~";
+            return area.edge().stream().allMatch(Mark.Curve::isStraight)
+                            && area.edge().size() == 3
+                    ? "—"
+                    : "~";
         }
         return "";
     }

@@ -78,8 +78,7 @@ class EquationReadingTest {
                         FormulaParser.parse("S_f <= S_x"),
                         FormulaParser.parse("h_f"),
                         new Formula.NoResult("no result")));
-        assertThat(Boxes.marked(box(choice, false)))
-                .isEqualTo("~^{/h/_{f}if/S/_{f}≤/S/_{x}_{noresultotherwise}}");
+        assertThat(Boxes.marked(box(choice, false))).isEqualTo("~^{/h/_{f}if/S/_{f}≤/S/_{x}_{noresultotherwise}}");
         assertThat(set("if(a < b, \"free\", if(a < c, \"submerged\", \"drowned\"))"))
                 .isEqualTo("~^{“free”if/a/</b/_{“submerged”if/a/</c/}_{“drowned”otherwise}}");
         assertThat(set("2*if(a < b, c, d)")).isEqualTo("2~~^{/c/if/a/</b/_{/d/otherwise}}~");
@@ -88,9 +87,7 @@ class EquationReadingTest {
     @Test
     void whatIsNotGivenIsBracketedInAProduct() {
         Formula product = new Formula.Operation(
-                nappe.formula.Operator.TIMES,
-                new Formula.NoResult("not given"),
-                new Formula.Numeral(2, "2"));
+                nappe.formula.Operator.TIMES, new Formula.NoResult("not given"), new Formula.Numeral(2, "2"));
         assertThat(Boxes.marked(box(product, true))).isEqualTo("(notgiven)×2");
     }
 

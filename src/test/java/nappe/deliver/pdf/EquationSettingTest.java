@@ -30,15 +30,16 @@ class EquationSettingTest {
     void anEquationReadsAsItsPlainFormula() {
         assertThat(set("h_f", "h_0*(Q/(Q_0*C))^(1/n)", "1 ft * (2.5 ft3/s / (1 ft3/s * 4))^(1/1.522)", WIDTH)
                         .texts())
-                .containsExactly(
-                        "h_f = h_0*(Q/(Q_0*C))^(1/n)", "= 1 ft * (2.5 ft3/s / (1 ft3/s * 4))^(1/1.522)");
+                .containsExactly("h_f = h_0*(Q/(Q_0*C))^(1/n)", "= 1 ft * (2.5 ft3/s / (1 ft3/s * 4))^(1/1.522)");
     }
 
     @Test
     void theNumbersAreAlignedAtTheEqualsSign() {
         Box box = set("Q_max", "q*Q_0", "50.4*1 ft3/s", WIDTH).box();
-        double symbols = box.parts().get(0).x() + box.parts().get(0).box().parts().get(1).x();
-        double numbers = box.parts().get(1).x() + box.parts().get(1).box().parts().get(0).x();
+        double symbols =
+                box.parts().get(0).x() + box.parts().get(0).box().parts().get(1).x();
+        double numbers =
+                box.parts().get(1).x() + box.parts().get(1).box().parts().get(0).x();
         assertThat(Boxes.marked(box.parts().get(0).box())).isEqualTo("/Q/_{max}=/q//Q/_{0}");
         assertThat(Boxes.marked(box.parts().get(1).box())).isEqualTo("=50.4×1ft³/s");
         assertThat(symbols).isEqualTo(numbers).isGreaterThan(20);
@@ -83,8 +84,10 @@ class EquationSettingTest {
 
     @Property(tries = 400)
     void noBoxReachesOutOfItsParentOrOverAnother(@ForAll("formulas") Formula formula) {
-        Equation equation =
-                new EquationSetting("h_f", 9.5, WIDTH).symbols(formula).numbers(formula).equation();
+        Equation equation = new EquationSetting("h_f", 9.5, WIDTH)
+                .symbols(formula)
+                .numbers(formula)
+                .equation();
         assertThat(Boxes.faults(equation.box())).isEmpty();
     }
 
@@ -106,7 +109,8 @@ class EquationSettingTest {
 
     private static Arbitrary<Formula> formulas(int depth) {
         Arbitrary<Formula> leaves = Arbitraries.oneOf(
-                Arbitraries.of("a", "Q_max", "rho_1", "series", "sizes.C", "F1!B4:B10").map(Formula.Symbol::new),
+                Arbitraries.of("a", "Q_max", "rho_1", "series", "sizes.C", "F1!B4:B10")
+                        .map(Formula.Symbol::new),
                 Arbitraries.of("0.5", "19.3404", "123456")
                         .map(text -> new Formula.Numeral(Double.parseDouble(text), text)),
                 Arbitraries.of("ft3/s", "m^(1/3)/s", "1")
@@ -124,8 +128,7 @@ class EquationSettingTest {
                         .as(Formula.Operation::new),
                 Combinators.combine(inner, inner)
                         .as((a, b) -> new Formula.Comparison(nappe.formula.Comparator.AT_MOST, a, b)),
-                Combinators.combine(inner, inner)
-                        .as((a, b) -> new Formula.Logic("and", List.of(a, b))),
+                Combinators.combine(inner, inner).as((a, b) -> new Formula.Logic("and", List.of(a, b))),
                 Combinators.combine(inner, inner, inner)
                         .as((a, b, c) -> new Formula.Call(Function.IF, List.of(a, b, c))),
                 Combinators.combine(Arbitraries.of(Function.SQRT, Function.ABS, Function.LOG10), inner)
