@@ -2,9 +2,11 @@ package nappe.figure;
 
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import nappe.calculation.Cell;
 import nappe.calculation.Scope;
 import nappe.formula.Formula;
@@ -30,6 +32,9 @@ public final class Drafting {
     private final Map<Cell, Value> values;
     private final WorkingSystem system;
     private final Map<String, Value> lets = new LinkedHashMap<>();
+
+    /** What is said in place of parts that are left out. */
+    private final Set<String> said = new LinkedHashSet<>();
 
     /** Why a symbol has no number, in the order in which it was missed. */
     private final Map<String, String> missed = new LinkedHashMap<>();
@@ -64,7 +69,7 @@ public final class Drafting {
         List<Drawing.View> views = new ArrayList<>();
         for (FigureSheet.View view : figure.views()) {
             List<Drawing.Part> parts = new ArrayList<>();
-            view.parts().forEach(part -> part(part).ifPresent(parts::add));
+            view.parts().forEach(placed -> placed(placed).ifPresent(parts::add));
             views.add(new Drawing.View(view.title(), parts));
         }
         return new Drawing(
@@ -73,6 +78,18 @@ public final class Drafting {
                 isSchematic && schematic != null ? schematic.why() : "",
                 views,
                 notes());
+    }
+
+    private Optional<Drawing.Part> placed(FigureSheet.Placed placed) {
+        Optional<Drawing.Part> part = part(placed.part());
+        Formula when = placed.when();
+        if (part.isPresent() && when != null && !reading().holds(when)) {
+            if (!placed.otherwise().isEmpty()) {
+                said.add(placed.otherwise());
+            }
+            return Optional.empty();
+        }
+        return part;
     }
 
     private Optional<Drawing.Part> part(FigureSheet.Part part) {
@@ -196,6 +213,7 @@ public final class Drafting {
         Map<String, List<String>> byWords = new LinkedHashMap<>();
         missed.forEach((symbol, words) -> byWords.computeIfAbsent(words, w -> new ArrayList<>()).add(symbol));
         byWords.forEach((words, symbols) -> notes.add("Not drawn, since there is " + why(words) + ": " + named(symbols) + "."));
+        notes.addAll(said);
         notes.addAll(figure.notes());
         return notes;
     }

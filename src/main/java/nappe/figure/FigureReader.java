@@ -39,7 +39,8 @@ import org.jspecify.annotations.Nullable;
  * note      text
  * </pre>
  *
- * Coordinates are formulas of dimension length over the symbols of the method. All faults are collected.
+ * Any part of a view may end in {@code ; when CONDITION ; words}: where the condition does not hold it is left out, and the
+ * words are said below the drawing. Coordinates are formulas of dimension length over the symbols of the method. All faults are collected.
  */
 final class FigureReader {
     private final MethodSheet method;
@@ -86,13 +87,13 @@ final class FigureReader {
             case "let" -> let();
             case "schematic" -> schematic();
             case "view" -> views.add(new FigureSheet.View(text(0), new ArrayList<>()));
-            case "wall" -> add(new FigureSheet.Path(Pen.WALL, false, points(0, statement.fieldCount())));
-            case "outline" -> add(new FigureSheet.Path(Pen.WALL, true, points(0, statement.fieldCount())));
-            case "line" -> add(new FigureSheet.Path(Pen.LINE, false, points(0, statement.fieldCount())));
-            case "hidden" -> add(new FigureSheet.Path(Pen.HIDDEN, false, points(0, statement.fieldCount())));
-            case "axis" -> add(new FigureSheet.Path(Pen.AXIS, false, points(0, statement.fieldCount())));
-            case "floor" -> add(new FigureSheet.Path(Pen.FLOOR, false, points(0, statement.fieldCount())));
-            case "water" -> add(new FigureSheet.Water(points(0, 2), text(2).isEmpty() ? "" : length(2), text(3)));
+            case "wall" -> add(new FigureSheet.Path(Pen.WALL, false, points(0, own())));
+            case "outline" -> add(new FigureSheet.Path(Pen.WALL, true, points(0, own())));
+            case "line" -> add(new FigureSheet.Path(Pen.LINE, false, points(0, own())));
+            case "hidden" -> add(new FigureSheet.Path(Pen.HIDDEN, false, points(0, own())));
+            case "axis" -> add(new FigureSheet.Path(Pen.AXIS, false, points(0, own())));
+            case "floor" -> add(new FigureSheet.Path(Pen.FLOOR, false, points(0, own())));
+            case "water" -> add(new FigureSheet.Water(points(0, 2), own() < 3 || text(2).isEmpty() ? "" : length(2), own() < 4 ? "" : text(3)));
             case "dimension" -> dimension();
             case "level" -> add(new FigureSheet.Level(points(0, 1), length(1), text(2)));
             case "gauge" -> add(new FigureSheet.Gauge(points(0, 1), text(1)));
@@ -110,7 +111,24 @@ final class FigureReader {
             base = 0;
             throw new FormulaException("a view comes first: view title", 0, 1, "view-missing");
         }
-        views.get(views.size() - 1).parts().add(part);
+        Formula when = null;
+        if (own() < statement.fieldCount()) {
+            FormulaParser parser = parser(own());
+            parser.expect("when");
+            when = parser.condition();
+            parser.end();
+            dimensions(parser).condition(when);
+        }
+        views.get(views.size() - 1).parts().add(new FigureSheet.Placed(part, when, text(own() + 1)));
+    }
+
+    /** How many fields stand before the condition under which a part is drawn. */
+    private int own() {
+        int fields = 0;
+        while (fields < statement.fieldCount() && !text(fields).startsWith("when ")) {
+            fields++;
+        }
+        return fields;
     }
 
     private void let() {

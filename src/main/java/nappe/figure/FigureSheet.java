@@ -35,7 +35,15 @@ public record FigureSheet(
     /** A result in words that is printed below the drawing. */
     public record Worded(String symbol, String words) {}
 
-    public record View(String title, List<Part> parts) {}
+    public record View(String title, List<Placed> parts) {}
+
+    /**
+     * A part, and where it is drawn at all.
+     *
+     * @param when null for always
+     * @param otherwise what is said in its place
+     */
+    public record Placed(Part part, @Nullable Formula when, String otherwise) {}
 
     public record Point(Formula x, Formula y) {}
 
@@ -63,7 +71,8 @@ public record FigureSheet(
     public List<String> printed() {
         Set<String> symbols = new LinkedHashSet<>();
         for (View view : views) {
-            for (Part part : view.parts()) {
+            for (Placed placed : view.parts()) {
+                Part part = placed.part();
                 if (part instanceof Dimension dimension) {
                     symbols.add(dimension.symbol());
                 } else if (part instanceof Level level) {

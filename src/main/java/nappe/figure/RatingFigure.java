@@ -81,7 +81,9 @@ public final class RatingFigure {
     }
 
     private void mark(String name, Cell flow, @Nullable Cell head, List<Curve.Case> marks, List<String> missing) {
-        if (head != null && isNumber(flow) && isNumber(head)) {
+        if (head != null && isNumber(flow) && isNumber(head) && !(number(flow) > 0 && number(head) > 0)) {
+            missing.add("Case " + name + " is not marked: there is no nought on a logarithmic scale.");
+        } else if (head != null && isNumber(flow) && isNumber(head)) {
             marks.add(new Curve.Case(name, flow, head));
         } else {
             missing.add("Case " + name + " is not marked: "

@@ -73,6 +73,8 @@ final class Leaves {
             return under(headings, List.of(elsewhere(sheet, elsewhere.table())));
         } else if (block instanceof Block.Note note) {
             return under(headings, note(note));
+        } else if (block instanceof Block.Chart) {
+            return under(headings, List.of());
         } else if (block instanceof Block.Figure figure) {
             return under(headings, pictures.parts(figure, width, width > page.upright()));
         }

@@ -22,6 +22,7 @@ final class ViewSketch {
     private final double highest;
     private final double leftmost;
     private final double rightmost;
+    private final List<Figure> figures = new ArrayList<>();
     private double originX;
     private double originY;
     private double scale;
@@ -99,6 +100,7 @@ final class ViewSketch {
         DrawingPicture.parts(view, Drawing.Flow.class).forEach(this::flow);
         DrawingPicture.parts(view, Drawing.Gauge.class).forEach(gauge -> mark(at(gauge.at())));
         DrawingPicture.parts(view, Drawing.Dimension.class).forEach(this::dimension);
+        placeFigures();
         DrawingPicture.parts(view, Drawing.Water.class).forEach(this::surfaceLevel);
         DrawingPicture.parts(view, Drawing.Level.class).forEach(this::level);
         DrawingPicture.parts(view, Drawing.Gauge.class)
@@ -280,17 +282,45 @@ final class ViewSketch {
             sketch.head(before, start);
             sketch.head(after, end);
         }
-        figure(start, end, ux, uy, length, pieces);
+        figures.add(new Figure(start, end, pieces));
     }
 
-    private void figure(At start, At end, double ux, double uy, double length, List<Piece> pieces) {
-        double width = Sketch.width(pieces, SIZE);
+    /** The text of a dimension line, not yet placed. */
+    private record Figure(At start, At end, List<Piece> pieces) {
+        double length() {
+            return Math.hypot(end.x() - start.x(), end.y() - start.y());
+        }
+
+        double width() {
+            return Sketch.width(pieces, SIZE);
+        }
+
+        boolean fits() {
+            return width() <= length() - 2;
+        }
+    }
+
+    /** First the texts that fit between their arrows: they have no other place. */
+    private void placeFigures() {
+        figures.stream().filter(Figure::fits).forEach(this::place);
+        figures.stream().filter(figure -> !figure.fits()).forEach(this::place);
+        figures.clear();
+    }
+
+    private void place(Figure figure) {
+        At start = figure.start();
+        At end = figure.end();
+        List<Piece> pieces = figure.pieces();
+        double length = figure.length();
+        double width = figure.width();
+        double ux = length < 1e-9 ? 0 : (end.x() - start.x()) / length;
+        double uy = length < 1e-9 ? 1 : (end.y() - start.y()) / length;
         At middle = new At((start.x() + end.x()) / 2, (start.y() + end.y()) / 2);
         boolean upright = Math.abs(ux) < 0.1;
         double angle = upright ? 90 : Math.toDegrees(Math.atan2(-uy * Math.signum(ux), Math.abs(ux)));
         double radians = Math.toRadians(angle);
         List<Ink.Lettering> places = new ArrayList<>();
-        if (width <= length - 2) {
+        if (figure.fits()) {
             double x = middle.x() - 0.9 * Math.sin(radians) - width / 2 * Math.cos(radians);
             double y = middle.y() - 0.9 * Math.cos(radians) + width / 2 * Math.sin(radians);
             for (double share : new double[] {0, 0.25, -0.25}) {
