@@ -5,7 +5,8 @@ import java.util.List;
 
 /** Measures the columns of a table and shares out the width of the page between them. */
 final class ColumnWidths {
-    private static final double PADDING = 2.6;
+    /** What is left free at both sides of a column together, in mm. */
+    static final double PADDING = 2.6;
 
     /** A single word longer than this, in mm, is broken. */
     private static final double LONGEST_WORD = 42;

@@ -16,11 +16,16 @@ final class Leaves {
 
     private final Results results;
     private final PageSize page;
+    private final Drawings drawings;
     private final Pictures pictures;
 
-    Leaves(Results results, PageSize page, Pictures pictures) {
+    /**
+     * @param drawings takes in what is drawn in the lines of the sheets
+     */
+    Leaves(Results results, PageSize page, Drawings drawings, Pictures pictures) {
         this.results = results;
         this.page = page;
+        this.drawings = drawings;
         this.pictures = pictures;
     }
 
@@ -31,8 +36,8 @@ final class Leaves {
     private View.Leaf leaf(Sheet sheet) {
         Links links = new Links(results.sheets(), sheet.name());
         boolean wide = sheet.blocks().stream()
-                .anyMatch(block ->
-                        block instanceof Block.Table table && new TableGrid(results, links, table).isWide(page));
+                .anyMatch(block -> block instanceof Block.Table table
+                        && new TableGrid(results, links, drawings, table).isWide(page));
         boolean sealed = sheet.blocks().stream().anyMatch(block -> isSealSpace(sheet, block));
         double width = wide ? page.wide() : page.upright() - (sealed ? View.SealSpace.ROOM : 0);
         List<View.Part> parts = new ArrayList<>();
@@ -58,10 +63,10 @@ final class Leaves {
                 .map(heading -> View.Text.plain("heading", heading.text()))
                 .toList();
         if (block instanceof Block.Table table) {
-            return List.of(new TableGrid(results, links, table).grid(titles, width));
+            return List.of(new TableGrid(results, links, drawings, table).grid(titles, width));
         } else if (block instanceof Block.Lines lines) {
             List<View.Part> grids = new ArrayList<>();
-            grids.add(new WorkedGrid(results, links, lines).grid(titles, width));
+            grids.add(new WorkedGrid(results, links, drawings, lines).grid(titles, width));
             grids.addAll(new CasesGrids(results, lines).grids(width));
             return grids;
         } else if (block instanceof Block.WorkbookOnly elsewhere) {

@@ -17,6 +17,7 @@ public record PdfDelivery(byte[] bytes, List<String> warnings) {
         PageSize page = PageSize.of(results.furniture().letterPaper());
         Furnishing furnishing = Furnishing.of(results.furniture(), page);
         String title = furnishing.number() + " " + furnishing.subject() + ", revision " + furnishing.revision();
+        Drawings drawings = new Drawings();
         Pictures pictures = new Pictures(results);
         String xhtml = Xhtml.fill(Map.of(
                 "title",
@@ -26,8 +27,8 @@ public record PdfDelivery(byte[] bytes, List<String> warnings) {
                 "pageRule",
                 page.rules(furnishing.footHeight(page)),
                 "leaves",
-                new Leaves(results, page, pictures).leaves()));
-        PdfDelivery written = PdfWriting.write(xhtml, results.furniture(), pictures.made());
+                new Leaves(results, page, drawings, pictures).leaves()));
+        PdfDelivery written = PdfWriting.write(xhtml, results.furniture(), drawings, pictures.made());
         List<String> warnings = new ArrayList<>(furnishing.warnings(results.furniture()));
         warnings.addAll(written.warnings());
         return new PdfDelivery(written.bytes(), List.copyOf(warnings));

@@ -15,6 +15,8 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
+import java.util.SortedSet;
+import java.util.TreeSet;
 import nappe.results.Furniture;
 import org.w3c.dom.Document;
 import org.xhtmlrenderer.pdf.DefaultPDFCreationListener;
@@ -24,7 +26,7 @@ import org.xhtmlrenderer.pdf.ITextRenderer;
 final class PdfWriting {
     private PdfWriting() {}
 
-    static PdfDelivery write(String xhtml, Furniture furniture, Map<String, Picture> pictures) {
+    static PdfDelivery write(String xhtml, Furniture furniture, Drawings drawings, Map<String, Picture> pictures) {
         float dots = ITextRenderer.DEFAULT_DOTS_PER_POINT;
         FaceResolver faces = new FaceResolver();
         Glyphs glyphs = new Glyphs(faces);
@@ -35,7 +37,7 @@ final class PdfWriting {
                 paper,
                 new ClosedAgent(paper),
                 faces,
-                new PictureFactory(pictures, dots),
+                new DrawnElements(drawings, dots, new PictureFactory(pictures, dots)),
                 glyphs);
         renderer.setPDFVersion(PdfWriter.VERSION_1_7);
         renderer.setListener(new Stamp(xhtml, furniture));
@@ -47,7 +49,9 @@ final class PdfWriting {
         } while (LonelyHeads.moved(renderer));
         ByteArrayOutputStream bytes = new ByteArrayOutputStream();
         renderer.createPDF(bytes);
-        return new PdfDelivery(bytes.toByteArray(), warnings(glyphs.missing()));
+        SortedSet<Integer> missing = new TreeSet<>(glyphs.missing());
+        missing.addAll(drawings.missing());
+        return new PdfDelivery(bytes.toByteArray(), warnings(missing));
     }
 
     private static List<String> warnings(Set<Integer> missing) {

@@ -1,17 +1,17 @@
 package nappe.deliver.pdf;
 
-import java.util.List;
 import nappe.calculation.Cell;
 import nappe.calculation.Reference;
 import nappe.calculation.Run;
 import nappe.formula.Formula;
 import nappe.formula.Operator;
+import nappe.formula.Renaming;
 import nappe.formula.Value;
 import nappe.results.Digits;
 import nappe.results.Results;
 import nappe.unit.Unit;
 
-/** The typeset reading with the numbers and units of the referenced cells in place of symbols. */
+/** A formula with the numbers and units of the referenced cells in place of symbols, digits as printed. */
 final class SubstitutedReading {
     /** Digits beyond those of a result, so that a hand calculation from the printed numbers gives the printed result. */
     private static final int EXTRA = 2;
@@ -25,12 +25,11 @@ final class SubstitutedReading {
         this.results = results;
     }
 
-    /** The formula of a live cell with the numbers it was evaluated with. */
-    Inline of(Cell cell, Formula formula) {
-        if (isConversion(cell, formula)) {
-            return converted(cell, (Formula.Operation) formula);
-        }
-        return TypesetReading.with(name -> number(cell, name), formula);
+    /** The formula of a live cell with the numbers it was evaluated with in place of what it names. */
+    Formula of(Cell cell, Formula formula) {
+        return isConversion(cell, formula)
+                ? converted(cell, (Formula.Operation) formula)
+                : Renaming.ofNamed(formula, named -> value(cell, named));
     }
 
     /** Whether the formula only brings a typed number, which is in its own unit, into the working unit. */
@@ -49,47 +48,54 @@ final class SubstitutedReading {
                 && typed.unit().equals(quantity.unit());
     }
 
-    /** {@code 12 in × (0.0254 m)/(1 in)}, with the zero of the scale where it has one. */
-    private Inline converted(Cell cell, Formula.Operation formula) {
+    /** {@code 12 in * (0.0254 m / 1 in)}, with the zero of the scale where it has one. */
+    private Formula converted(Cell cell, Formula.Operation formula) {
         if (formula.operator() == Operator.PLUS) {
-            Inline scaled = converted(cell, (Formula.Operation) formula.left());
-            return Inline.join(Inline.SUM, scaled, Inline.text(" + "), of(cell, formula.right()));
+            Formula scaled = converted(cell, (Formula.Operation) formula.left());
+            return new Formula.Operation(Operator.PLUS, scaled, of(cell, formula.right()));
         }
-        Unit unit = ((Formula.Quantity) formula.right()).unit();
-        Inline typed = of(cell, formula.left());
-        if (!(cell.references().get("1 " + unit.text()) instanceof Cell factor)) {
+        Formula.Quantity one = (Formula.Quantity) formula.right();
+        Formula typed = of(cell, formula.left());
+        if (!(cell.references().get("1 " + one.unit().text()) instanceof Cell factor)) {
             return typed;
         }
-        Inline ratio = Inline.join(
-                Inline.PRODUCT,
-                number(factor).bracketed(),
-                Inline.text("/"),
-                Inline.number("1", unit.text()).bracketed());
-        return Inline.join(Inline.PRODUCT, typed, Inline.text(" × "), ratio);
+        Formula ratio = new Formula.Operation(Operator.OVER, value(factor), new Formula.Quantity(1, "1", one.unit()));
+        return new Formula.Operation(Operator.TIMES, typed, ratio);
     }
 
-    private Inline number(Cell cell, String name) {
-        Reference reference = cell.references().get(key(name));
+    private Formula value(Cell cell, Formula named) {
+        Reference reference = cell.references().get(key(named));
         if (reference instanceof Run run) {
             String address = Links.unquoted(run.from(cell.place().sheet()));
-            return Inline.of(Inline.ATOM, List.of(Piece.plain(address)));
+            return named instanceof Formula.Summary summary
+                    ? new Formula.Summary(summary.kind(), address)
+                    : new Formula.Symbol(address);
         }
-        return reference instanceof Cell other ? number(other) : TypesetReading.name(name);
+        return reference instanceof Cell other && !(named instanceof Formula.Summary) ? value(other) : named;
     }
 
     /** References to a neighbour have a key of their own: {@code before x}. */
-    private static String key(String name) {
-        return name.replaceFirst("^(before|after)\\((.*)\\)$", "$1 $2");
+    private static String key(Formula named) {
+        if (named instanceof Formula.Neighbour neighbour) {
+            return (neighbour.before() ? "before " : "after ") + neighbour.name();
+        }
+        return named instanceof Formula.Symbol symbol ? symbol.name() : ((Formula.Summary) named).name();
     }
 
-    private Inline number(Cell cell) {
+    private Formula value(Cell cell) {
         Value value = results.value(cell);
         if (value instanceof Value.Number number) {
-            return Inline.number(digits(cell, number.value()), cell.unit().text());
+            return number(digits(cell, number.value()), number.value(), cell.unit());
         }
         return value instanceof Value.Word word
-                ? Inline.text("“" + word.text() + "”")
-                : Inline.text("(" + ((Value.None) value).why() + ")");
+                ? new Formula.Word(word.text())
+                : new Formula.NoResult(((Value.None) value).why());
+    }
+
+    private static Formula number(String digits, double value, Unit unit) {
+        return digits.startsWith("-")
+                ? new Formula.Negation(new Formula.Quantity(-value, digits.substring(1), unit))
+                : new Formula.Quantity(value, digits, unit);
     }
 
     private static String digits(Cell cell, double value) {

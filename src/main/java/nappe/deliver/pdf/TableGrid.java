@@ -6,6 +6,7 @@ import java.util.Locale;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.formula.Formula;
+import nappe.formula.PlainReading;
 import nappe.results.Results;
 
 /** A table of a sheet as a grid: columns measured, numbers with their decimal points in line. */
@@ -15,15 +16,17 @@ final class TableGrid {
 
     private final Results results;
     private final Links links;
+    private final Drawings drawings;
     private final Block.Table table;
     private final List<Decimals> decimals = new ArrayList<>();
     private final ColumnWidths measured;
     private final ColumnWidths tight;
     private final List<List<View.Text>> texts = new ArrayList<>();
 
-    TableGrid(Results results, Links links, Block.Table table) {
+    TableGrid(Results results, Links links, Drawings drawings, Block.Table table) {
         this.results = results;
         this.links = links;
+        this.drawings = drawings;
         this.table = table;
         int columns = table.columns().size();
         this.measured = new ColumnWidths(columns, SIZE);
@@ -78,9 +81,22 @@ final class TableGrid {
                 .orElse(0);
         boolean cramped = measured.least() > width;
         List<View.GridRow> body = new ArrayList<>();
-        texts.forEach(row -> body.add(row(row)));
-        return new View.Grid(
-                cramped ? "tight" : "", (cramped ? tight : measured).fit(width, over), titles, List.of(head()), body);
+        List<Double> widths = (cramped ? tight : measured).fit(width, over);
+        for (int i = 0; i < texts.size(); i++) {
+            body.add(row(drawn(i, widths, cramped)));
+        }
+        return new View.Grid(cramped ? "tight" : "", widths, titles, List.of(head()), body);
+    }
+
+    /** The texts of a row, its equations drawn. */
+    private List<View.Text> drawn(int row, List<Double> widths, boolean cramped) {
+        List<View.Text> drawn = new ArrayList<>(texts.get(row));
+        for (int i = 0; i < drawn.size(); i++) {
+            if (table.rows().get(row).items().get(i) instanceof Block.Equation equation) {
+                drawn.set(i, equation(equation.cell(), widths.get(i), cramped));
+            }
+        }
+        return drawn;
     }
 
     private View.GridRow head() {
@@ -98,10 +114,10 @@ final class TableGrid {
             View.Text text = printed.get(i);
             Block.Column column = table.columns().get(i);
             String room = column.align() == Block.Align.RIGHT ? decimals.get(i).room(text.characters()) : text.style();
-            cells.add(View.GridCell.of(style(column), new View.Text(room, text.pieces(), text.target())));
+            cells.add(View.GridCell.of(style(column), new View.Text(room, text.pieces(), text.target(), text.inset())));
         }
         boolean blank = printed.size() > 1
-                && printed.stream().skip(1).allMatch(text -> text.characters().isEmpty());
+                && printed.stream().skip(1).allMatch(text -> text.characters().isEmpty() && text.inset() == null);
         return new View.GridRow(blank ? "blank" : "", cells);
     }
 
@@ -123,7 +139,7 @@ final class TableGrid {
         } else if (item instanceof Block.Content content) {
             return content(content.cell());
         } else if (item instanceof Block.Equation equation) {
-            return View.Text.of("formula", equation(equation.cell()));
+            return View.Text.plain("formula", plain(equation.cell()));
         } else if (item instanceof Block.Address address) {
             return new View.Text(
                     "whole", List.of(Piece.plain(links.address(address.cell()))), links.to(address.cell()));
@@ -143,18 +159,21 @@ final class TableGrid {
                 : View.Text.of("", List.of(Verdicts.weigh(value)));
     }
 
-    /** The symbol and the formula behind a live cell; nothing for a typed one. */
-    static List<Piece> equation(Cell cell) {
+    /** The symbol and the formula behind a live cell as plain text, to be measured and then drawn. */
+    private static String plain(Cell cell) {
+        Formula formula = cell.formula();
+        return formula == null ? "" : PlainReading.of(cell.symbol(), formula);
+    }
+
+    private View.Text equation(Cell cell, double width, boolean cramped) {
         Formula formula = cell.formula();
         if (formula == null) {
-            return List.of();
+            return View.Text.of("", List.of());
         }
-        List<Piece> pieces = new ArrayList<>();
-        if (!cell.symbol().isEmpty()) {
-            pieces.addAll(SymbolPrint.pieces(cell.symbol()));
-            pieces.add(Piece.plain(" = "));
-        }
-        pieces.addAll(TypesetReading.inSymbols(formula).pieces());
-        return pieces;
+        Equation equation = new EquationSetting(
+                        cell.symbol(), cramped ? TIGHT : SIZE, Typefaces.points(width - ColumnWidths.PADDING))
+                .symbols(formula)
+                .equation();
+        return View.Text.of("formula", List.of()).with(drawings.add(equation, equation.text()));
     }
 }

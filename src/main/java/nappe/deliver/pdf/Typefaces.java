@@ -54,6 +54,10 @@ final class Typefaces {
         return !Character.isISOControl(character) && character != '\u00a0';
     }
 
+    static double points(double mm) {
+        return mm * POINTS_PER_MM;
+    }
+
     /** The width of a text in mm at a size in points. */
     static double width(String text, BaseFont face, double size) {
         double points = 0;

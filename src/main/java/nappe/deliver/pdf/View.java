@@ -1,6 +1,7 @@
 package nappe.deliver.pdf;
 
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 
 /** What the template prints: sheets of paragraphs and grids, all numbers already in words. Public for the template. */
 public final class View {
@@ -63,7 +64,8 @@ public final class View {
 
         /** The size, for the style sheet. */
         public String size() {
-            return "width: " + Math.round(width * 100) / 100.0 + "mm; height: " + Math.round(height * 100) / 100.0 + "mm";
+            return "width: " + Math.round(width * 100) / 100.0 + "mm; height: " + Math.round(height * 100) / 100.0
+                    + "mm";
         }
     }
 
@@ -114,11 +116,33 @@ public final class View {
     public record Word(boolean whole, List<Piece> pieces) {}
 
     /**
+     * Something drawn that stands in a line.
+     *
+     * @param name of the drawing
+     * @param text what stands for it, in characters
+     */
+    public record Inset(String name, String text) {}
+
+    /**
      * Characters that are set as one line or paragraph.
      *
      * @param target id of what it links to, with the hash; empty for none
+     * @param inset drawn after the pieces; null for none
      */
-    public record Text(String style, List<Piece> pieces, String target) {
+    public record Text(
+            String style,
+            List<Piece> pieces,
+            String target,
+            @Nullable Inset inset) {
+        Text(String style, List<Piece> pieces, String target) {
+            this(style, pieces, target, null);
+        }
+
+        /** The same with something drawn at its end. */
+        Text with(Inset drawn) {
+            return new Text(style, pieces, target, drawn);
+        }
+
         static Text of(String style, List<Piece> pieces) {
             return new Text(style, List.copyOf(pieces), "");
         }

@@ -15,17 +15,25 @@ final class WorkedGrid {
     private static final double RESULT = 33;
     private static final double SOURCE = 40;
 
+    /** Of the type of equations, in points. */
+    private static final double SIZE = 9.5;
+
+    /** What the style sheet leaves free at both sides of an equation, in mm. */
+    private static final double SIDES = 5.4;
+
     /** Words longer than this stand under the equation, not in the column of results. */
     private static final int LONGEST_RESULT = 18;
 
     private final Results results;
     private final Links links;
+    private final Drawings drawings;
     private final Block.Lines lines;
     private final SubstitutedReading numbers;
 
-    WorkedGrid(Results results, Links links, Block.Lines lines) {
+    WorkedGrid(Results results, Links links, Drawings drawings, Block.Lines lines) {
         this.results = results;
         this.links = links;
+        this.drawings = drawings;
         this.lines = lines;
         this.numbers = new SubstitutedReading(results);
     }
@@ -45,11 +53,12 @@ final class WorkedGrid {
                         cell("", "Source; workbook cell")));
         List<View.GridRow> body = new ArrayList<>();
         Between between = new Between(width);
+        double room = Typefaces.points(width - CODE - RESULT - SOURCE - SIDES);
         for (Block.Line line : lines.lines()) {
             if (line.kind() == Block.LineKind.HEADING) {
                 between.heading(line.description());
             } else {
-                body.add(between.above(row(line)));
+                body.add(between.above(row(line, room)));
             }
         }
         body.addAll(between.rest(4));
@@ -61,9 +70,12 @@ final class WorkedGrid {
         return View.GridCell.of(style, View.Text.plain("", text));
     }
 
-    private View.GridRow row(Block.Line line) {
+    /**
+     * @param room for an equation, in points
+     */
+    private View.GridRow row(Block.Line line, double room) {
         Cell cell = cell(line);
-        List<View.Text> quantity = new ArrayList<>(quantity(line, cell));
+        List<View.Text> quantity = new ArrayList<>(quantity(line, cell, room));
         boolean wordy = cell != null && Printed.value(results, cell).length() > LONGEST_RESULT;
         if (cell != null && wordy) {
             quantity.add(View.Text.of("numbers", result(line, cell).pieces()));
@@ -76,7 +88,7 @@ final class WorkedGrid {
                         new View.GridCell(
                                 quantity.size() > 1 ? "right low" : "right",
                                 1,
-                                cell == null || wordy ? List.of() : List.of(result(line, cell))),
+                                cell == null || wordy ? List.of() : List.of(level(result(line, cell), quantity))),
                         new View.GridCell("", 1, source(line, cell))));
     }
 
@@ -87,37 +99,52 @@ final class WorkedGrid {
         return line.perCase().get(lines.workedCase());
     }
 
-    private List<View.Text> quantity(Block.Line line, @Nullable Cell cell) {
+    private List<View.Text> quantity(Block.Line line, @Nullable Cell cell, double room) {
         List<View.Text> texts = new ArrayList<>();
         texts.add(View.Text.of("", SymbolPrint.inText(line.description())));
         Formula formula = cell == null ? null : cell.formula();
         boolean noted = !line.equation().isEmpty()
                 && (formula == null || !line.equation().equals(PlainReading.of(formula)));
         if (noted) {
-            texts.add(new View.Text("written", WrittenEquation.pieces(line.equation()), target(line, cell)));
+            texts.add(written(line, cell, room));
         }
         if (cell == null || formula == null) {
             return texts;
         }
-        Inline inNumbers = numbers.of(cell, formula);
         boolean conversion = SubstitutedReading.isConversion(cell, formula);
         if (noted || conversion || handsOn(line, cell, formula) != null) {
             if (!noted) {
                 texts.add(origin(line, cell, formula));
             }
             if (conversion) {
-                texts.add(View.Text.of("numbers", equation(List.of(), "= ", inNumbers)));
+                texts.add(drawn("equation", new EquationSetting("", SIZE, room).numbers(numbers.of(cell, formula))));
             }
             return texts;
         }
-        Inline inSymbols = TypesetReading.inSymbols(formula);
-        List<Piece> left = line.symbol().isEmpty() ? List.of() : SymbolPrint.pieces(line.symbol());
-        texts.add(View.Text.of("equation", equation(left, left.isEmpty() ? "" : "\u00a0= ", inSymbols)));
-        if (!inNumbers.plain().equals(inSymbols.plain())) {
-            String again = line.kind() == Block.LineKind.LIMIT_VERDICT ? "" : "= ";
-            texts.add(View.Text.of("numbers", equation(List.of(), again, inNumbers)));
+        Formula inNumbers = numbers.of(cell, formula);
+        EquationSetting setting = new EquationSetting(line.symbol(), SIZE, room).symbols(formula);
+        if (!inNumbers.equals(formula) && line.kind() == Block.LineKind.LIMIT_VERDICT) {
+            setting.numbersAlone(inNumbers);
+        } else if (!inNumbers.equals(formula)) {
+            setting.numbers(inNumbers);
         }
+        texts.add(drawn("equation", setting));
         return texts;
+    }
+
+    private View.Text drawn(String style, EquationSetting setting) {
+        Equation equation = setting.equation();
+        return View.Text.of(style, List.of()).with(drawings.add(equation, equation.text()));
+    }
+
+    private View.Text written(Block.Line line, @Nullable Cell cell, double room) {
+        String target = target(line, cell);
+        return WrittenEquation.of(line.equation())
+                .map(root -> new EquationSetting("", SIZE, room)
+                        .words(root::set, line.equation())
+                        .equation())
+                .map(root -> new View.Text("equation", List.of(), target).with(drawings.add(root, root.text())))
+                .orElse(new View.Text("written", List.of(Piece.plain(line.equation())), target));
     }
 
     /** The sheet of the cell of the same symbol that the line rests on; empty where there is none. */
@@ -144,11 +171,12 @@ final class WorkedGrid {
                         links.to(origin));
     }
 
-    private static List<Piece> equation(List<Piece> left, String equals, Inline right) {
-        List<Piece> pieces = new ArrayList<>(left);
-        pieces.add(Piece.plain(equals));
-        pieces.addAll(right.pieces());
-        return pieces;
+    /** The result on the baseline of the last equation beside it. */
+    private View.Text level(View.Text result, List<View.Text> quantity) {
+        View.Inset last = quantity.get(quantity.size() - 1).inset();
+        return last != null && drawings.named(last.name()) instanceof Equation equation
+                ? result.with(drawings.add(Equation.strut(SIZE, equation.lastBelow()), ""))
+                : result;
     }
 
     private View.Text result(Block.Line line, Cell cell) {

@@ -84,9 +84,59 @@ class PdfDeliveryTest {
     @Test
     void aWorkedLineShowsEquationNumbersResultSourceAndCell() throws IOException {
         assertThat(String.join(" ", PAGES).replace(" ", ""))
-                .contains("F1.10gaugeheadinfreeflowhf=1ft×(Q/(C×1ft³/s))1/n=1ft×((2.6965ft³/s)/(4×1ft³/s))1/1.522"
+                .contains("F1.10gaugeheadinfreeflowhf=1ft×QC×1ft³/s1/n=1ft×2.6965ft³/s4×1ft³/s1/1.522"
                         + "hf=0.772ft"
                         + "InventedManualofFlumes,2nded.(fiction),table8-2,p.8-47cellJ13");
+    }
+
+    @Test
+    void anEquationIsOneSpanThatCopiesAsItsPlainFormula() throws IOException {
+        List<String> spans = spans(PDF);
+        assertThat(spans)
+                .contains(
+                        "h_f = 1 ft * (Q/(C*1 ft3/s))^(1/n)",
+                        "= 1 ft * (2.6965 ft3/s / (4*1 ft3/s))^(1/1.522)",
+                        "h_a = if(S_f <= S_lim, h_f, none())");
+    }
+
+    /** The plain texts of the equations on all pages; each is one span with the characters in it. */
+    private static List<String> spans(byte[] pdf) throws IOException {
+        List<String> spans = new ArrayList<>();
+        try (PdfReader reader = new PdfReader(pdf)) {
+            for (int page = 1; page <= reader.getNumberOfPages(); page++) {
+                String content = new String(reader.getPageContent(page), StandardCharsets.ISO_8859_1);
+                Matcher span = Pattern.compile("/Span <</ActualText\\((.*?)\\)>> ?BDC\n")
+                        .matcher(content);
+                while (span.find()) {
+                    spans.add(span.group(1).replace("\\(", "(").replace("\\)", ")"));
+                    String within = content.substring(span.end(), content.indexOf("EMC", span.end()));
+                    assertThat(within).contains("BT", "Tj", "ET").doesNotContain("BDC");
+                }
+            }
+        }
+        return spans;
+    }
+
+    /** The renderer would draw on both pages what reaches over the edge of one. */
+    @Test
+    void everyEquationStandsOnOnePageWhole() throws IOException {
+        Drawings drawings = new Drawings();
+        List<String> set = new ArrayList<>();
+        PageSize page = PageSize.of(RESULTS.furniture().letterPaper());
+        for (View.Leaf leaf : new Leaves(RESULTS, page, drawings, new Pictures(RESULTS)).leaves()) {
+            for (View.Part part : leaf.parts()) {
+                if (part instanceof View.Grid grid) {
+                    grid.body().stream()
+                            .flatMap(row -> row.cells().stream())
+                            .flatMap(cell -> cell.texts().stream())
+                            .filter(text -> text.inset() != null)
+                            .forEach(text -> set.addAll(
+                                    ((Equation) drawings.named(text.inset().name())).texts()));
+                }
+            }
+        }
+        assertThat(set).hasSizeGreaterThan(50);
+        assertThat(spans(PDF)).isEqualTo(set);
     }
 
     @Test
