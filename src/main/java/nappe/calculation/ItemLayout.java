@@ -38,7 +38,7 @@ public final class ItemLayout {
         Cell cell = cells.live(
                 strip.next(), shownAs, line.unit(), line.formula(), scope, line.knownSign(), line.mayBeBlank());
         scope.put(line.symbol(), cell);
-        strip.add(new Strip.Laid(shownAs, line.label() + where, "", line.source(), cell));
+        strip.add(new Strip.Laid(shownAs, line.label() + where, LookUp.inWords(line.formula()), line.source(), cell));
     }
 
     private void lay(Item.At at, Scope scope, Strip strip) {
