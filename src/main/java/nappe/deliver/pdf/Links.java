@@ -8,6 +8,8 @@ import nappe.calculation.Sheet;
 
 /** Where links within the PDF lead, and workbook addresses as they read from one sheet. */
 final class Links {
+    private static final String INDEX = "Index";
+
     private final Map<String, Integer> numbers = new HashMap<>();
     private final String here;
 
@@ -26,6 +28,15 @@ final class Links {
 
     static String to(int number) {
         return "#" + id(number);
+    }
+
+    /** The link to the list of the sheets; empty where there is none. */
+    static String toIndex(List<Sheet> sheets) {
+        return sheets.stream()
+                .filter(sheet -> sheet.name().equals(INDEX))
+                .map(sheet -> to(sheet.number()))
+                .findFirst()
+                .orElse("");
     }
 
     /** The link to the sheet on which a cell stands; empty for this sheet and for one that is not in the package. */
