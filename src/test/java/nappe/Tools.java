@@ -15,7 +15,7 @@ import java.util.stream.Stream;
  * {@code NAPPE_ALL_TOOLS=1} stands in the environment they fail instead.
  */
 public final class Tools {
-    private static final long PATIENCE_SECONDS = 180;
+    private static final long PATIENCE_SECONDS = 600;
 
     private Tools() {}
 

@@ -7,6 +7,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import nappe.formula.Formula;
+import nappe.formula.Function;
 import nappe.formula.Guard;
 import nappe.formula.Renaming;
 import nappe.formula.Sign;
@@ -137,7 +138,8 @@ public final class Cells {
 
     private static Sureness sureness(
             Formula formula, Map<String, Reference> references, boolean safe, boolean mayBeBlank) {
-        if (!safe) {
+        boolean looksUpAlone = formula instanceof Formula.Call call && call.function() == Function.INDEX;
+        if (!safe || mayBeBlank && !looksUpAlone) {
             return Sureness.MAY_FAIL;
         }
         List<String> passedOn = formula instanceof Formula.Symbol bare ? List.of(bare.name()) : Guard.guarded(formula);

@@ -45,6 +45,7 @@ public final class ElementSheet {
     private final List<Block.Line> lines = new ArrayList<>();
     private final List<LimitResult> limits = new ArrayList<>();
     private int firstRow;
+    private int numbered;
 
     /**
      * @param scope knows the entries, constants and table columns of the element
@@ -162,19 +163,27 @@ public final class ElementSheet {
                 : i == size - 1 ? Block.LineKind.LIMIT_VERDICT : Block.LineKind.LIMIT_MARGIN;
         lines.add(new Block.Line(
                 kind,
-                tag + "." + String.format(java.util.Locale.ROOT, "%03d", lines.size()),
+                tag + "." + String.format(java.util.Locale.ROOT, "%03d", ++numbered),
                 first.label(),
                 first.symbol(),
-                equation(first),
+                equation(laid, i),
                 unitText(first),
                 first.source(),
                 perCase ? null : first.cell(),
                 perCaseCells));
     }
 
-    private static String equation(Strip.Laid line) {
-        Formula formula = line.cell().formula();
-        return !line.equation().isEmpty() || formula == null ? line.equation() : PlainReading.of(formula);
+    /** The equation of a line; where each case has its own origin, the run of origins. */
+    private static String equation(List<List<Strip.Laid>> laid, int i) {
+        Strip.Laid first = laid.get(0).get(i);
+        Strip.Laid last = laid.get(laid.size() - 1).get(i);
+        Formula formula = first.cell().formula();
+        if (first.equation().isEmpty() && formula != null) {
+            return PlainReading.of(formula);
+        }
+        return first.equation().equals(last.equation())
+                ? first.equation()
+                : first.equation() + " to " + last.equation().replaceAll(".*, ", "") + ", one for each case";
     }
 
     private static String unitText(Strip.Laid line) {
@@ -205,11 +214,23 @@ public final class ElementSheet {
         List<Item.Root> roots = mine.stream().map(TrialRows.Solved::root).distinct().toList();
         for (Item.Root root : roots) {
             List<TrialRows.Solved> ofRoot = mine.stream().filter(s -> s.root() == root).toList();
-            List<LimitRows.Judged> judged = new ArrayList<>();
-            boolean perCase = method.perCase(root.symbol());
+            closings(limitRows, root, ofRoot, false);
+            closings(limitRows, root, ofRoot, true);
+        }
+    }
+
+    /** One limit for each time a root was laid: once for most, more often where at binds what it rests on. */
+    private void closings(LimitRows limitRows, Item.Root root, List<TrialRows.Solved> ofRoot, boolean perCase) {
+        List<List<TrialRows.Solved>> columns = (perCase ? caseNames : List.of("")).stream()
+                .map(name -> ofRoot.stream().filter(s -> s.caseName().equals(name)).toList())
+                .toList();
+        for (int k = 0; k < columns.get(0).size(); k++) {
+            int place = k;
             int[] next = {0};
-            rows(perCase, (at, strip) -> judged.add(limitRows.closing(ofRoot.get(next[0]++), at, strip)), true);
-            keep("the trials for " + root.symbol() + " have closed", "", judged);
+            List<LimitRows.Judged> judged = new ArrayList<>();
+            rows(perCase, (at, strip) ->
+                    judged.add(limitRows.closing(columns.get(next[0]++).get(place), at, strip)), true);
+            keep("the trials for " + root.symbol() + " have closed" + (k == 0 ? "" : " (" + (k + 1) + ")"), "", judged);
         }
     }
 

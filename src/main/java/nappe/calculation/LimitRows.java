@@ -37,7 +37,15 @@ final class LimitRows {
         Formula greater = side(limit.greater(), "greater", limit.label() + ": greater side", inner, strip);
         Formula bound = limit.valueIsLesser() ? greater : lesser;
         Formula scale = limit.scale() == null ? call(Function.ABS, bound) : limit.scale();
-        Cell margin = cells.live(strip.next(), "", nappe.unit.Unit.one(), over(minus(greater, lesser), scale), inner);
+        Formula left = minus(greater, lesser);
+        nappe.unit.Unit unit = unitOf(limit.greater(), inner);
+        if (!unit.dimension().isNone()) {
+            Cell leftCell = cells.raw(strip.next(), "left", unit, left, inner, null, false);
+            inner.put("left", leftCell);
+            strip.add(new Strip.Laid("", limit.label() + ": left to the limit", "", "", leftCell));
+            left = symbol("left");
+        }
+        Cell margin = cells.live(strip.next(), "", nappe.unit.Unit.one(), over(left, scale), inner);
         strip.add(new Strip.Laid("", limit.label() + ": margin", "", limit.source(), margin));
         Formula comparison = iff(compare(lesser, Comparator.AT_MOST, greater), word(MET), word(NOT_MET));
         Formula verdict = limit.when() == null ? comparison : iff(limit.when(), comparison, word(DOES_NOT_APPLY));

@@ -42,9 +42,13 @@ public final class RatingGrid {
         inner.put("h_from", end(cells, ends, "from", rating.from(), free, scope));
         inner.put("h_to", end(cells, ends, "to", rating.to(), free, scope));
         sheet.gap();
-        TableDraft table = sheet.table(title, columns(rating, free));
+        List<Block.Column> columns = new ArrayList<>();
+        TableDraft table = sheet.table(title, columns);
         for (int i = 0; i <= rating.steps(); i++) {
-            row(rating, free, inner, table, i);
+            Strip members = row(rating, free, inner, table, i);
+            if (i == 0) {
+                columns.addAll(columns(rating, free, members));
+            }
         }
         sheet.gap();
         return table;
@@ -56,7 +60,7 @@ public final class RatingGrid {
         return cell;
     }
 
-    private void row(Rating rating, Item.Free free, Scope ends, TableDraft table, int i) {
+    private Strip row(Rating rating, Item.Free free, Scope ends, TableDraft table, int i) {
         Cells cells = items.cells();
         List<Block.Item> shown = new ArrayList<>(List.of(new Block.Text(Integer.toString(i))));
         Formula share = over(times(minus(symbol("h_to"), symbol("h_from")), number(Integer.toString(i))),
@@ -85,9 +89,10 @@ public final class RatingGrid {
             }
         }
         table.add(shown);
+        return strip;
     }
 
-    private List<Block.Column> columns(Rating rating, Item.Free free) {
+    private List<Block.Column> columns(Rating rating, Item.Free free, Strip members) {
         List<Block.Column> columns = new ArrayList<>();
         columns.add(new Block.Column("Step", 6, Block.Align.RIGHT));
         columns.add(column(head(free.symbol(), free.unit())));
@@ -95,11 +100,7 @@ public final class RatingGrid {
         if (freeReport != null) {
             columns.add(column(free.symbol() + " [" + freeReport + "]"));
         }
-        for (Item member : rating.members()) {
-            if (member instanceof Item.Line line) {
-                columns.add(column(line.unit() == null ? line.symbol() : head(line.symbol(), line.unit())));
-            }
-        }
+        members.heads().forEach(head -> columns.add(column(head)));
         for (String result : rating.results()) {
             if (method.item(result) instanceof Item.Line line && line.unit() != null) {
                 Unit report = reports.get(line.unit().dimension());

@@ -49,7 +49,7 @@ public final class SheetDraft {
         next++;
     }
 
-    /** A table to which rows are added; empty title for none. */
+    /** A table to which rows are added; empty title for none. Columns may be added to the list with the first row. */
     public TableDraft table(String title, List<Block.Column> columns) {
         TableDraft table = new TableDraft(this, next, title, columns, false);
         blocks.add(table.block());
@@ -57,11 +57,14 @@ public final class SheetDraft {
         return table;
     }
 
-    /** A table that stands in the workbook only. */
-    public TableDraft workbookTable(String title, List<Block.Column> columns) {
+    /**
+     * A table that stands in the workbook only. Its rows are kept free from the start: what is laid before it is full,
+     * such as a root inside its trial rows, stands below it.
+     */
+    public TableDraft workbookTable(String title, List<Block.Column> columns, int rows) {
         TableDraft table = new TableDraft(this, next, title, columns, true);
         blocks.add(table.block());
-        next = table.nextRow();
+        next = table.nextRow() + rows + 1;
         return table;
     }
 
@@ -78,7 +81,7 @@ public final class SheetDraft {
     }
 
     void grown(TableDraft table) {
-        next = table.nextRow();
+        next = Math.max(next, table.nextRow());
     }
 
     /** The finished sheet. */

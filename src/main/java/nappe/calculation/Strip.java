@@ -51,6 +51,14 @@ public final class Strip {
         laid.add(line);
     }
 
+    /** The heads of what has been laid, each with its unit: {@code h_e [m]}; the label where there is no symbol. */
+    List<String> heads() {
+        return laid.stream()
+                .map(line -> (line.symbol().isEmpty() ? line.label() : line.symbol())
+                        + (line.cell().unit().text().equals("1") ? "" : " [" + line.cell().unit() + "]"))
+                .toList();
+    }
+
     /** What has been laid, in order. */
     public List<Laid> laid() {
         return laid;

@@ -17,7 +17,6 @@ import nappe.formula.Function;
 import nappe.formula.PlainReading;
 import nappe.formula.Value;
 import nappe.method.Item;
-import nappe.unit.Unit;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -37,6 +36,7 @@ public final class TrialRows {
     private @Nullable ItemLayout layout;
     private String tag = "";
     private String caseName = "";
+    private int depth;
 
     public TrialRows(Cells cells, SheetDraft sheet) {
         this.cells = cells;
@@ -53,7 +53,7 @@ public final class TrialRows {
         this.caseName = nameOfCase;
     }
 
-    /** Every root laid so far. */
+    /** Every root laid so far, but for those inside the trial rows of another: that one does not close unless they do. */
     public List<Solved> solved() {
         return solved;
     }
@@ -63,11 +63,13 @@ public final class TrialRows {
         String title = tag + " " + root.symbol() + (caseName.isEmpty() ? "" : ", " + caseName) + ": " + root.label() + ", where "
                 + PlainReading.of(root.left()) + " = " + PlainReading.of(root.right());
         List<Trial> trials = new ArrayList<>();
-        TableDraft table = sheet.workbookTable(title, columns(root));
+        List<Block.Column> columns = new ArrayList<>();
+        TableDraft table = sheet.workbookTable(title, columns, root.trials());
+        depth++;
         for (int k = 0; k < root.trials(); k++) {
-            trials.add(row(root, scope, items, table, trials));
+            trials.add(row(root, scope, items, table, columns, trials));
         }
-        sheet.gap();
+        depth--;
         Trial last = trials.get(trials.size() - 1);
         Scope end = scope.inner();
         end.put("d_1", trials.get(0).difference);
@@ -80,8 +82,10 @@ public final class TrialRows {
         String equation = root.free() + " where " + PlainReading.of(root.left()) + " = " + PlainReading.of(root.right())
                 + ", in trial rows";
         strip.add(new Strip.Laid(root.symbol(), root.label(), equation, root.source(), result));
-        solved.add(new Solved(
-                root, tag, caseName, status, last.difference, trials.stream().map(t -> t.difference).toList()));
+        if (depth == 0) {
+            solved.add(new Solved(
+                    root, tag, caseName, status, last.difference, trials.stream().map(t -> t.difference).toList()));
+        }
         return result;
     }
 
@@ -118,7 +122,7 @@ public final class TrialRows {
 
     private record Trial(Cell x, Cell difference, @Nullable Cell other, @Nullable Cell weighted) {}
 
-    private Trial row(Item.Root root, Scope scope, ItemLayout items, TableDraft table, List<Trial> before) {
+    private Trial row(Item.Root root, Scope scope, ItemLayout items, TableDraft table, List<Block.Column> columns, List<Trial> before) {
         int k = before.size();
         Scope rows = scope.inner();
         List<Block.Item> shown = new ArrayList<>();
@@ -145,6 +149,9 @@ public final class TrialRows {
         Strip strip = Strip.along(table.place(2).sheet(), table.nextRow(), 2);
         root.members().forEach(member -> items.lay(member, trial, strip));
         strip.laid().forEach(line -> shown.add(new Block.Content(line.cell())));
+        if (k == 0) {
+            columns.addAll(columns(root, strip));
+        }
         Cell difference = cells.live(strip.next(), "d", null, difference(root), trial);
         shown.add(new Block.Content(difference));
 
@@ -205,24 +212,15 @@ public final class TrialRows {
                 times(symbol("d_o"), weight));
     }
 
-    private List<Block.Column> columns(Item.Root root) {
+    private List<Block.Column> columns(Item.Root root, Strip members) {
         List<Block.Column> columns = new ArrayList<>();
         columns.add(column("Trial"));
         columns.add(column(root.free() + " [" + cells.unit(root.unit().dimension()) + "]"));
-        for (Item member : root.members()) {
-            for (String symbol : member.outputs()) {
-                columns.add(column(symbol + unitOf(member)));
-            }
-        }
+        members.heads().forEach(head -> columns.add(column(head)));
         columns.add(column("difference"));
         columns.add(column("other end"));
         columns.add(column("its difference"));
         return columns;
-    }
-
-    private String unitOf(Item member) {
-        Unit unit = member instanceof Item.Line line ? line.unit() : null;
-        return unit == null || unit.dimension().isNone() ? "" : " [" + cells.unit(unit.dimension()) + "]";
     }
 
     private static Block.Column column(String head) {

@@ -26,11 +26,23 @@ final class VerdictList {
                 out.println(table.title() + ":");
                 for (Block.Row row : table.rows()) {
                     List<String> texts = row.items().stream().map(this::text).toList();
-                    out.printf("  %-14s %10s  %-5s %s, %s%n", texts.get(3), texts.get(4), texts.get(1), texts.get(2), texts.get(5));
+                    out.printf(
+                            "  %-14s %-4s %s; tightest margin %s in %s%s%s%n",
+                            texts.get(3),
+                            texts.get(1),
+                            texts.get(2),
+                            texts.get(6),
+                            texts.get(7),
+                            count(texts.get(4), "not met"),
+                            count(texts.get(5), "without result"));
                 }
                 return;
             }
         }
+    }
+
+    private static String count(String cases, String what) {
+        return cases.equals("0") ? "" : "; " + what + " in " + cases + (cases.equals("1") ? " case" : " cases");
     }
 
     private String text(Block.Item item) {

@@ -28,7 +28,7 @@ import picocli.CommandLine.Parameters;
             "  nappe verify firm-checks.csv",
             "",
             "A row of a file: id,method,entries,target,expected,unit,tolerance,source,kind,note",
-            "  H1,parshall-flume,\"size = \"\"3 ft\"\"; h = 2 ft\",Q_h,35.5,ft3/s,0.6 %,our test of 1 May,derived,"
+            "  H1,parshall-flume,\"size = \"\"3 ft\"\"; h = 2 ft\",Q_h,35.5,ft3/s,0.6 %%,our test of 1 May,derived,"
         })
 final class VerifyCommand implements Callable<Integer> {
     @Parameters(arity = "0..*", paramLabel = "FILE.csv", description = "files with check values of your own")

@@ -222,7 +222,7 @@ public final class NumberReading implements Reading<Value> {
         double key = number(arguments.get(0));
         int place = 0;
         for (double number : numbers(arguments.get(1))) {
-            if (number > key) {
+            if (!Tolerance.holds(Comparator.AT_MOST, number, key)) {
                 break;
             }
             place++;

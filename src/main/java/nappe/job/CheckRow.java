@@ -38,6 +38,9 @@ public record CheckRow(
         String kind,
         String note) {
 
+    private static final List<String> HEAD =
+            List.of("id", "method", "entries", "target", "expected", "unit", "tolerance", "source", "kind", "note");
+
     private static final List<String> KINDS = List.of("published", "library", "derived", "memory");
 
     /** How far the computed value may be off, in the unit of the row. */
@@ -59,6 +62,28 @@ public record CheckRow(
         return rows;
     }
 
+    /** The rows of {@code checks/left-out.csv} for a method that are known to disagree: id and why. */
+    public static List<List<String>> knownToBeOff(TextLibrary library, String method) {
+        String text = library.text("checks/left-out.csv");
+        if (text == null) {
+            return List.of();
+        }
+        CSVFormat format = CSVFormat.DEFAULT.builder()
+                .setCommentMarker('#')
+                .setHeader()
+                .setSkipHeaderRecord(true)
+                .setTrim(true)
+                .get();
+        try (CSVParser parser = format.parse(new StringReader(text))) {
+            return parser.stream()
+                    .filter(row -> row.get("method").equals(method) && row.get("why").contains("known to be off"))
+                    .map(row -> List.of(row.get("id"), row.get("why")))
+                    .toList();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
     /**
      * Reads check values.
      *
@@ -73,43 +98,58 @@ public record CheckRow(
                 .get();
         List<CheckRow> rows = new ArrayList<>();
         try (CSVParser parser = format.parse(new StringReader(text))) {
-            for (CSVRecord record : parser) {
-                rows.add(row(file, parser.getCurrentLineNumber(), record));
+            List<String> lacking = HEAD.stream().filter(name -> !parser.getHeaderNames().contains(name)).toList();
+            if (!lacking.isEmpty()) {
+                long line = parser.getCurrentLineNumber();
+                throw new CheckException(file + ":" + line + ": the head lacks " + String.join(", ", lacking)
+                        + " (fault: head-unclear)");
             }
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        } catch (IllegalArgumentException | UncheckedIOException e) {
-            throw new CheckException(file + ": " + e.getMessage());
+            for (CSVRecord record : parser) {
+                rows.add(row(file + ":" + parser.getCurrentLineNumber() + ": ", record, parser.getHeaderNames().size()));
+            }
+        } catch (IOException | IllegalArgumentException | UncheckedIOException e) {
+            throw new CheckException(file + ": " + e.getMessage() + " (fault: table-unreadable)");
         }
         return rows;
     }
 
-    private static CheckRow row(String file, long line, CSVRecord record) {
+    private static CheckRow row(String place, CSVRecord record, int columns) {
+        if (record.size() != columns) {
+            throw new CheckException(place + record.size() + " columns where the head has " + columns + " (fault: row-length)");
+        }
+        String tolerance = record.get("tolerance");
+        if (!tolerance.matches("\\d+(\\.\\d+)?([eE][+-]?\\d+)? (%|abs)")) {
+            throw new CheckException(place + "tolerance \"" + tolerance
+                    + "\" is neither like 0.1 % nor like 0.005 abs (fault: tolerance-unclear)");
+        }
+        if (!KINDS.contains(record.get("kind"))) {
+            throw new CheckException(place + "kind \"" + record.get("kind") + "\" is none of " + String.join(", ", KINDS)
+                    + " (fault: kind-unknown)");
+        }
+        if (record.get("source").isEmpty()) {
+            throw new CheckException(place + "a check value names its source (fault: source-missing)");
+        }
+        String expected = record.get("expected");
+        if (!expected.matches("-?\\d+(\\.\\d+)?([eE][+-]?\\d+)?")) {
+            throw new CheckException(place + "\"" + expected + "\" is not a number (fault: number-expected)");
+        }
         try {
-            String tolerance = record.get("tolerance");
-            if (!tolerance.matches("[0-9.eE-]+ (%|abs)")) {
-                throw new CheckException("tolerance \"" + tolerance + "\" is neither like 0.1 % nor like 0.005 abs");
-            }
-            if (!KINDS.contains(record.get("kind"))) {
-                throw new CheckException("kind \"" + record.get("kind") + "\" is none of " + String.join(", ", KINDS));
-            }
-            if (record.get("source").isEmpty()) {
-                throw new CheckException("a check value names its source");
-            }
             return new CheckRow(
                     record.get("id"),
                     record.get("method"),
                     record.get("entries"),
                     entries(record.get("entries")),
                     record.get("target"),
-                    Double.parseDouble(record.get("expected")),
+                    Double.parseDouble(expected),
                     Unit.parse(record.get("unit")),
                     tolerance,
                     record.get("source"),
                     record.get("kind"),
                     record.get("note"));
-        } catch (FormulaException | UnitException | IllegalArgumentException | CheckException e) {
-            throw new CheckException(file + ":" + line + ": " + e.getMessage());
+        } catch (FormulaException e) {
+            throw new CheckException(place + e.getMessage() + " (fault: " + e.code() + ")");
+        } catch (UnitException e) {
+            throw new CheckException(place + e.getMessage() + " (fault: unit-unknown)");
         }
     }
 

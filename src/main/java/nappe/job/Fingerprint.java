@@ -40,24 +40,24 @@ public final class Fingerprint {
 
     private void add(Design design) {
         Design.Project p = design.project();
-        add("project", String.join("|", p.project(), p.firm(), p.client(), p.number(), p.subject(), p.revision()));
+        add("project", joined(p.project(), p.firm(), p.client(), p.number(), p.subject(), p.revision()));
         add("date", p.date().toString());
         add("status", p.status());
-        add("system", p.system().name() + p.letterPaper() + p.flowUnit() + p.headUnit() + p.sealSpace());
+        add("system", joined(p.system().name(), p.letterPaper() + "", p.flowUnit().text(), p.headUnit().text(), p.sealSpace() + ""));
         add("datum", p.datum());
         add("worked", p.workedCase());
         add("release", p.release());
         for (Design.Element element : design.elements()) {
-            add("element", element.tag() + "|" + element.title() + "|" + element.method());
+            add("element", joined(element.tag(), element.title(), element.method()));
             add(element.typed());
         }
         for (Design.FlowCase one : design.cases()) {
-            add("case", String.join("|", one.name(), one.period(), one.year(), one.tailwaterReturn()));
+            add("case", joined(one.name(), one.period(), one.year(), one.tailwaterReturn()));
             add("flow", shown(one.flow()));
             add("tailwater", shown(one.tailwater()));
             add(one.typed());
         }
-        design.demands().forEach(d -> add("demand", String.join("|",
+        design.demands().forEach(d -> add("demand", joined(
                 d.tag(), d.symbol(), Boolean.toString(d.atMost()), shown(d.value()), d.description(), d.citation())));
         design.assumptions().forEach(a -> add("assumption", a.toString()));
         design.references().forEach(r -> add("reference", r));
@@ -74,7 +74,16 @@ public final class Fingerprint {
         String content = value instanceof Value.Number number
                 ? Double.toString(number.value()) + " " + typed.unit()
                 : value instanceof Value.Word word ? word.text() : "";
-        return content + "|" + typed.source() + "|" + typed.standing();
+        return joined(content, typed.source(), typed.standing());
+    }
+
+    /** The parts with their lengths, so that no two lists of parts give one text. */
+    private static String joined(String... parts) {
+        StringBuilder joined = new StringBuilder();
+        for (String part : parts) {
+            joined.append(part.length()).append(':').append(part).append('|');
+        }
+        return joined.toString();
     }
 
     private String shown() {

@@ -1,6 +1,5 @@
 package nappe.job;
 
-import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -77,12 +76,10 @@ public final class Job {
                 .filter(row -> used.containsKey(row.method()))
                 .map(verification::run)
                 .toList();
-        List<List<String>> rows = new ArrayList<>();
-        for (CheckOutcome outcome : outcomes) {
-            if (outcome.row().kind().equals("published") || outcome.row().kind().equals("library")) {
-                rows.add(outcome.printed());
-            }
-        }
-        return new SoftwareStatement(version, texts, CheckOutcome.counts(outcomes), rows);
+        List<List<String>> rows = outcomes.stream().map(CheckOutcome::printed).toList();
+        List<List<String>> off = used.keySet().stream()
+                .flatMap(method -> CheckRow.knownToBeOff(methods.library(), method).stream())
+                .toList();
+        return new SoftwareStatement(version, texts, CheckOutcome.counts(outcomes), rows, off);
     }
 }

@@ -15,6 +15,11 @@ public final class MethodLibrary implements MethodCatalogue {
         this.library = library;
     }
 
+    /** Where the texts are read from. */
+    public TextLibrary library() {
+        return library;
+    }
+
     /** The sheet of a name; faults of its text as {@link MethodException}. */
     public MethodSheet sheet(String name) {
         return sheets.computeIfAbsent(name, n -> new MethodReader(library).read(n));

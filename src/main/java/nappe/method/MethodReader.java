@@ -58,7 +58,7 @@ public final class MethodReader {
                 draft.faults.add(statement.fault(reader.base(), String.valueOf(e.getMessage()), "unit-unknown"));
             } catch (TableException e) {
                 reader.spoil();
-                draft.faults.add(statement.fault(reader.base(), String.valueOf(e.getMessage()), "table-faulty"));
+                draft.faults.add(statement.fault(reader.base(), e.fault(), e.code()));
             }
         }
     }

@@ -29,6 +29,9 @@ import org.jspecify.annotations.Nullable;
 /** Reads one statement into the draft; a method for each statement word. */
 final class StatementReader {
     private static final String WORDS = "words";
+    /** What a symbol may be to the station. */
+    private static final List<String> ROLES = List.of("flow", "water level", "energy level");
+
     /** Both ends of the bracket, and one step from them. */
     private static final int LEAST_TRIALS = 3;
 
@@ -162,6 +165,12 @@ final class StatementReader {
         }
         if (from == Item.From.NEIGHBOUR && role.isEmpty()) {
             throw fault("what is taken has a role: take z_t = water level", "role-missing");
+        }
+        if (from == Item.From.ENTRY && !role.isEmpty()) {
+            throw fault("an entry has no role; it is typed", "role-unknown");
+        }
+        if (!role.isEmpty()) {
+            checkRole(role);
         }
         Unit unit = unit(1);
         String rules = text(3);
@@ -436,7 +445,15 @@ final class StatementReader {
         String symbol = symbolOf(text.substring(equals + 1).strip());
         draft.outcome(symbol);
         hasValue(new Formula.Symbol(symbol));
-        draft.gives.put(text.substring(0, equals).strip(), symbol);
+        String role = text.substring(0, equals).strip();
+        checkRole(role);
+        draft.gives.put(role, symbol);
+    }
+
+    private void checkRole(String role) {
+        if (!ROLES.contains(role)) {
+            throw fault("\"" + role + "\" is no role; roles are " + String.join(", ", ROLES), "role-unknown");
+        }
     }
 
     // --- parts of statements

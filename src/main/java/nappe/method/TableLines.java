@@ -62,7 +62,7 @@ final class TableLines {
         if (between) {
             between(first, column);
         } else {
-            line(row(), call(Function.MATCH, symbol(key), column), "row of the table " + table.name(), Sign.POSITIVE);
+            line(row(), call(Function.MATCH, symbol(key), column), "row of cited table " + suffix() + ", " + table.title(), Sign.POSITIVE);
         }
     }
 
@@ -90,22 +90,22 @@ final class TableLines {
         Formula start = call(Function.INDEX, column, number(1));
         String inside = "x_" + suffix();
         line(inside, call(Function.MIN, call(Function.MAX, keyNumber, start), last),
-                key + " as looked up, not beyond the ends of the table", first.sign());
+                keyLabel() + " as looked up, not beyond the ends of cited table " + suffix(), first.sign());
         // A value at a row of the table is found at that row in every program, whatever its last bits are.
         Formula nudged = plus(symbol(inside), nudge(first));
         line(row(), call(Function.MIN, call(Function.MATCH_BELOW, nudged, column), number(table.rows() - 1)),
-                "row of the table " + table.name() + " below it", Sign.POSITIVE);
+                "row of cited table " + suffix() + " below it", Sign.POSITIVE);
         Formula below = call(Function.INDEX, column, symbol(row()));
         Formula next = call(Function.INDEX, column, plus(symbol(row()), number(1)));
         String step = "d_" + suffix();
-        line(step, minus(next, below), "step of the table there", Sign.POSITIVE);
+        line(step, minus(next, below), "step of the table from this row to the next", Sign.POSITIVE);
         line(share(), new Formula.Operation(Operator.OVER, minus(symbol(inside), below), symbol(step)),
                 "share of the way to the next row", Sign.ANY);
         Formula span = span(first);
         draft.limits.add(new Limit(start, keyNumber, false, span, null,
-                key + " is inside the table " + table.name() + ", lower end", source));
+                keyLabel() + " is within the cited table " + suffix() + ", lower end", source));
         draft.limits.add(new Limit(keyNumber, last, true, span, null,
-                key + " is inside the table " + table.name() + ", upper end", source));
+                keyLabel() + " is within the cited table " + suffix() + ", upper end", source));
     }
 
     /** What the margin to an end of the table is measured by: from its first row to its last. */
@@ -118,8 +118,9 @@ final class TableLines {
 
     /** A billionth of the table's range. */
     private static Formula nudge(CitedTable.Column first) {
-        double nudge = 1e-9 * ((Formula.Numeral) span(first)).value();
-        return new Formula.Numeral(nudge, Double.toString(nudge));
+        String span = ((Formula.Numeral) span(first)).text();
+        String text = new java.math.BigDecimal(span).stripTrailingZeros().scaleByPowerOfTen(-9).toString();
+        return new Formula.Numeral(Double.parseDouble(text), text);
     }
 
     /** Adds the line of one column of the table that was opened last. */
@@ -183,6 +184,14 @@ final class TableLines {
     private static Unit unitOf(CitedTable.Column column) {
         Unit unit = column.unit();
         return unit == null ? Unit.one() : unit;
+    }
+
+    private String keyLabel() {
+        return draft.items.stream()
+                .filter(item -> item.outputs().contains(key))
+                .map(item -> item instanceof Item.Line line ? line.label() : key)
+                .findFirst()
+                .orElse(key);
     }
 
     /** T1 for the first look-up of the sheet, T2 for the second. */

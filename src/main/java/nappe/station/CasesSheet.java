@@ -86,7 +86,7 @@ final class CasesSheet {
 
     private void flow(TableDraft table, Design.FlowCase one, Unit flowReport) {
         Design.Typed typed = one.flow();
-        Cell name = cells.typed(Cell.Kind.ENTRY, table.place(0), "", Unit.one(), Value.word(one.name()), Sign.POSITIVE);
+        Cell name = cells.typed(Cell.Kind.TABLE, table.place(0), "", Unit.one(), Value.word(one.name()), Sign.POSITIVE);
         names.add(name);
         Cell flow = cells.typed(Cell.Kind.ENTRY, table.place(3), "Q", typed.unit(), typed.value(), Sign.NOT_NEGATIVE);
         Cell working = cells.factors().toWorking(table.place(5), "Q", flow);

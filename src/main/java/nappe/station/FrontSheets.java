@@ -21,7 +21,7 @@ final class FrontSheets {
     /** The text of the note that stands for a clear space on the cover. */
     static final String SEAL_SPACE = "(space for a seal)";
 
-    private static final List<String> VERDICTS = List.of("no result", "not met", "not given", "met", "does not apply");
+    private static final List<String> VERDICTS = List.of("not met", "no result", "not given", "met", "does not apply");
 
     private static final List<String> CAUTIONS = List.of(
             "The ratings hold only within the limits of flow, head and submergence listed. Outside them no result is claimed.",
@@ -46,7 +46,7 @@ final class FrontSheets {
         this.design = design;
     }
 
-    void cover(SheetDraft sheet, Run verdicts) {
+    void cover(SheetDraft sheet, SummarySheet.Sorted limits) {
         Design.Project project = design.project();
         TableDraft head = sheet.table("", List.of(
                 new Block.Column("Calculation", 26, Block.Align.LEFT), new Block.Column("", 60, Block.Align.LEFT)));
@@ -64,8 +64,17 @@ final class FrontSheets {
         row(head, "Working units", project.system().title());
         long open = design.assumptions().stream().filter(Design.Assumption::open).count();
         row(head, "Open assumptions", open == 0 ? "none" : "YES: " + open + " to be confirmed, see sheet Assumptions");
+        long assumed = design.elements().stream()
+                        .flatMap(e -> e.typed().values().stream())
+                        .filter(t -> t.standing().equals("assumed"))
+                        .count()
+                + design.cases().stream()
+                        .filter(c -> c.flow().standing().equals("assumed"))
+                        .count();
+        row(head, "Entries assumed", assumed == 0 ? "none" : assumed + ", see sheet Assumptions");
         sheet.gap();
-        verdicts(sheet, verdicts);
+        verdicts(sheet, limits.verdicts());
+        worst(sheet, limits);
         if (!project.release().isEmpty()) {
             sheet.caution(project.release());
             sheet.gap();
@@ -84,7 +93,7 @@ final class FrontSheets {
     }
 
     private void verdicts(SheetDraft sheet, Run verdicts) {
-        TableDraft table = sheet.table("Limits, each counted by its worst case", List.of(
+        TableDraft table = sheet.table("Limits, each counted by its worst verdict over the cases", List.of(
                 new Block.Column("Verdict", 26, Block.Align.LEFT), new Block.Column("Limits", 60, Block.Align.LEFT)));
         Scope scope = Scope.ofElement();
         scope.put("verdicts", verdicts);
@@ -92,6 +101,25 @@ final class FrontSheets {
             Cell count = cells.raw(
                     table.place(1), "", Unit.one(), call(Function.TALLY, symbol("verdicts"), word(verdict)), scope, null, false);
             table.add(List.of(new Block.Text(verdict), new Block.Content(count)));
+        }
+        sheet.gap();
+    }
+
+    private void worst(SheetDraft sheet, SummarySheet.Sorted limits) {
+        TableDraft table = sheet.table("The three worst limits", List.of(
+                new Block.Column("Verdict", 26, Block.Align.LEFT),
+                new Block.Column("Limit", 60, Block.Align.LEFT),
+                new Block.Column("Tightest in case", 30, Block.Align.LEFT)));
+        for (int i = 0; i < Math.min(3, limits.verdicts().cells().size()); i++) {
+            List<Block.Item> row = new ArrayList<>();
+            int column = 0;
+            for (Run run : List.of(limits.verdicts(), limits.limits(), limits.cases())) {
+                Scope scope = Scope.ofElement();
+                scope.put("worst", run.cells().get(i));
+                row.add(new Block.Content(
+                        cells.raw(table.place(column++), "", Unit.one(), symbol("worst"), scope, null, false)));
+            }
+            table.add(row);
         }
         sheet.gap();
     }
@@ -109,12 +137,14 @@ final class FrontSheets {
     void index(SheetDraft sheet, List<SheetDraft> all, List<String> contents) {
         TableDraft table = sheet.table("Sheets", List.of(
                 new Block.Column("Sheet", 50, Block.Align.LEFT),
-                new Block.Column("What it holds", 80, Block.Align.LEFT)));
+                new Block.Column("What it holds", 80, Block.Align.LEFT),
+                new Block.Column("Workbook tab", 16, Block.Align.LEFT)));
         for (int i = 0; i < all.size(); i++) {
             SheetDraft one = all.get(i);
             table.add(List.of(
                     new Block.SheetLink(i + 1, one.name(), one.title()),
-                    new Block.Text(contents.get(i))));
+                    new Block.Text(contents.get(i)),
+                    new Block.Text(one.name())));
         }
         sheet.gap();
         sheet.heading("Requirements, and where they are answered");

@@ -7,7 +7,8 @@ import java.util.List;
  *
  * @param methods method name and the start of the hash of its text
  * @param counts check values by method and kind, in words
- * @param rows the check values that others published: id, method and entries, target, computed, expected, tolerance,
+ * @param rows the check values: id, method and entries, target, computed, expected, tolerance,
  *     source, verdict
+ * @param off check values at hand that disagree and are not run: id and why
  */
-public record SoftwareStatement(String version, List<List<String>> methods, List<List<String>> counts, List<List<String>> rows) {}
+public record SoftwareStatement(String version, List<List<String>> methods, List<List<String>> counts, List<List<String>> rows, List<List<String>> off) {}

@@ -10,8 +10,10 @@ import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import nappe.calculation.Cell;
 import nappe.deliver.xlsx.Recalculated;
 import nappe.deliver.xlsx.Spoiler;
+import nappe.formula.Value;
 import nappe.proof.Typing.Demand;
 import nappe.proof.Typing.Entry;
 import nappe.proof.Typing.Flow;
@@ -45,7 +47,6 @@ class CheckersEditTest {
         flume("greatest size", new Entry("F1", "size", "50 ft"));
         flume("ISO metric size", new Entry("F1", "size", "0.9 m"));
         flume("ISO metric size without a general formula", new Entry("F1", "size", "0.152 m"));
-        flume("size that no table has", new Entry("F1", "size", "11 ft"));
         flume("size in other letters", new Entry("F1", "size", "3 FT"));
         flume("crest lower: most cases drown", new Entry("F1", "z_f", 411.1));
         flume("crest higher: all flow free", new Entry("F1", "z_f", 414.5));
@@ -139,12 +140,49 @@ class CheckersEditTest {
 
     @Test
     void editsOfTheFlumeGiveWhatIssuingAnewGives() throws IOException {
-        proven("headworks.xlsx", FLUME, 3);
+        proven("headworks.xlsx", FLUME, 5);
     }
 
     @Test
     void editsOfTheWeirGiveWhatIssuingAnewGives() throws IOException {
-        proven("return-weir.xlsx", WEIR, 3);
+        proven("return-weir.xlsx", WEIR, 5);
+    }
+
+    /** A cell that is emptied is empty where "not given" stood; all that rests on it reads as not given. */
+    @Test
+    void headReadThatIsDeletedIsNotGiven() throws IOException {
+        Package issued = Package.ofSample("return-weir.xlsx");
+        Head deleted = new Head(2, "W1", null);
+        Package anew = anew(issued, List.of(deleted));
+        String emptied = "Cases!" + deleted.place(issued).address();
+        Map<String, Object> expected = new LinkedHashMap<>(Recalculated.asStored(file(anew.workbook())));
+        assertThat(expected.remove(emptied)).isEqualTo("not given");
+        Path file = typed(issued, List.of(deleted));
+        assertThat(Comparison.of(Recalculated.byLibreOffice(file), expected, anew.results()).faults()).isEmpty();
+        assertThat(Comparison.of(Recalculated.byGnumeric(file), expected, anew.results()).faults()).isEmpty();
+    }
+
+    /** What may be typed over in the issued workbook is what these edits type over: numbers and choices. */
+    @Test
+    void wordsThatAreUnlockedAreChoices() {
+        for (String sample : List.of("headworks.xlsx", "return-weir.xlsx")) {
+            assertThat(Package.ofSample(sample).results().cells())
+                    .filteredOn(c -> c.kind() == Cell.Kind.ENTRY && c.typed() instanceof Value.Word)
+                    .allMatch(c -> c.symbol().equals("size"));
+        }
+    }
+
+    @Test
+    void sizeThatNoTableHasLeavesNoNumber() throws IOException {
+        Package issued = Package.ofSample("headworks.xlsx");
+        Map<String, Object> values =
+                Recalculated.byLibreOffice(typed(issued, List.of(new Entry("F1", "size", "11 ft"))));
+        assertThat(issued.results().cells().stream()
+                        .filter(c -> c.kind() == Cell.Kind.FORMULA && List.of("h_f", "h_a", "z_u", "Q_h", "Q_min").contains(c.symbol())
+                                && !c.place().sheet().equals("Entries"))
+                        .map(c -> values.get(c.place().sheet() + "!" + c.place().address())))
+                .hasSizeGreaterThan(20)
+                .noneMatch(Double.class::isInstance);
     }
 
     @Test

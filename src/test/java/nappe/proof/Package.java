@@ -3,6 +3,7 @@ package nappe.proof;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import nappe.calculation.Block;
 import nappe.deliver.xlsx.XlsxDelivery;
 import nappe.input.InputReader;
 import nappe.job.CheckRow;
@@ -13,7 +14,7 @@ import nappe.source.BuiltInLibrary;
 import nappe.station.Design;
 
 /** The package of one design: what was typed, what Java computed, the workbook that is issued. */
-record Package(Design design, Results results, byte[] workbook) {
+record Package(Design design, Results results, Map<String, Block.Table> ratings, byte[] workbook) {
     private static final BuiltInLibrary LIBRARY = new BuiltInLibrary();
     private static final MethodLibrary METHODS = new MethodLibrary(LIBRARY);
     private static final Map<String, Package> SAMPLES = new LinkedHashMap<>();
@@ -21,8 +22,8 @@ record Package(Design design, Results results, byte[] workbook) {
     static final Path INPUTS = Path.of("sample-inputs");
 
     static Package of(Design design) {
-        Results results = new Job(METHODS, "0.0.0").run(design, CheckRow.builtIn(LIBRARY)).results();
-        return new Package(design, results, XlsxDelivery.render(results));
+        Job.Done done = new Job(METHODS, "0.0.0").run(design, CheckRow.builtIn(LIBRARY));
+        return new Package(design, done.results(), done.ratings(), XlsxDelivery.render(done.results()));
     }
 
     /** The package of an input workbook in {@code sample-inputs}, made once. */

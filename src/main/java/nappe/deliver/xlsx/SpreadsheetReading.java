@@ -43,25 +43,39 @@ public final class SpreadsheetReading implements Reading<Written> {
             throw new IllegalArgumentException(cell + " is typed and has no formula");
         }
         SpreadsheetReading reading = new SpreadsheetReading(cell);
-        String text = formula.read(reading).text();
+        boolean handsOn = formula instanceof Formula.Symbol && cell.sureness() != Sureness.SURE;
+        String text = handsOn ? reading.handedOn((Formula.Symbol) formula) : formula.read(reading).text();
         if (cell.sureness() == Sureness.MAY_FAIL) {
             text = "IFERROR(" + text + "," + quoted(Value.NO_RESULT) + ")";
         }
-        List<String> guards = reading.guards(formula);
+        List<Cell> guards = reading.guards(formula);
         for (int i = guards.size() - 1; i >= 0; i--) {
-            text = "IF(ISNUMBER(" + guards.get(i) + ")," + text + "," + guards.get(i) + ")";
+            String address = reading.addressOf(guards.get(i));
+            text = "IF(ISNUMBER(" + address + ")," + text + "," + reading.orNotGiven(guards.get(i)) + ")";
         }
         return text;
     }
 
-    private List<String> guards(Formula formula) {
-        List<String> addresses = new ArrayList<>();
+    private List<Cell> guards(Formula formula) {
+        List<Cell> guards = new ArrayList<>();
         for (String symbol : Guard.guarded(formula)) {
             if (cell.references().get(symbol) instanceof Cell other && other.sureness() != Sureness.SURE) {
-                addresses.add(addressOf(other));
+                guards.add(other);
             }
         }
-        return addresses;
+        return guards;
+    }
+
+    private String handedOn(Formula.Symbol symbol) {
+        return reference(symbol.name()) instanceof Cell other ? orNotGiven(other) : read(symbol).text();
+    }
+
+    /** A cell that may hold words, and is not given where it is typed and somebody has emptied it: it would count as 0. */
+    private String orNotGiven(Cell other) {
+        String address = addressOf(other);
+        return other.kind() == Cell.Kind.ENTRY
+                ? "IF(" + address + "=\"\"," + quoted(Value.NOT_GIVEN) + "," + address + ")"
+                : address;
     }
 
     @Override
@@ -185,7 +199,7 @@ public final class SpreadsheetReading implements Reading<Written> {
         List<Formula> arguments = call.arguments();
         return switch (function) {
             case MATCH -> function("MATCH", arguments, ",0");
-            case MATCH_BELOW -> function("MATCH", arguments, ",1");
+            case MATCH_BELOW -> matchBelow(arguments);
             case LOWEST_OF -> function("MIN", arguments, "");
             case TALLY -> function("COUNTIF", arguments, "");
             case IS_NUMBER -> function("ISNUMBER", arguments, "");
@@ -196,6 +210,14 @@ public final class SpreadsheetReading implements Reading<Written> {
             case IF, SQRT, EXP, LN, LOG10, SIN, COS, TAN, ASIN, ACOS, ATAN, TANH, ABS, MIN, MAX, SMALL ->
                 function(function.name(), arguments, "");
         };
+    }
+
+    /** With the tolerance of comparisons, or programs part where the key stands on a row of the table. */
+    private Written matchBelow(List<Formula> arguments) {
+        Written key = read(arguments.get(0));
+        String column = read(arguments.get(1)).text();
+        return Written.whole(
+                "MATCH(" + key.within(ARITHMETIC) + "+1E-9*ABS(" + key.text() + ")," + column + ",1)");
     }
 
     /** Gnumeric neither guesses that a single place in a run along a row means the column, nor looks into one cell. */

@@ -122,7 +122,7 @@ class SpreadsheetReadingTest {
         assertThat(text(Formulas.call(Function.MATCH, Formulas.symbol("w"), run), Sureness.SURE))
                 .isEqualTo("MATCH(B6,'Tables'!$B$4:$B$38,0)");
         assertThat(text(Formulas.call(Function.MATCH_BELOW, a, run), Sureness.SURE))
-                .isEqualTo("MATCH(B1,'Tables'!$B$4:$B$38,1)");
+                .isEqualTo("MATCH(B1+1E-9*ABS(B1),'Tables'!$B$4:$B$38,1)");
         assertThat(text(Formulas.call(Function.INDEX, run, a), Sureness.SURE))
                 .isEqualTo("INDEX('Tables'!$B$4:$B$38,B1)");
         assertThat(text(Formulas.call(Function.SMALL, run, a), Sureness.SURE))
@@ -158,7 +158,7 @@ class SpreadsheetReadingTest {
     @Test
     void wordsArePassedOnInTheOrderOfTheSymbols() {
         assertThat(text(FormulaParser.parse("v*a + u/v"), Sureness.MAY_BE_WORDS))
-                .isEqualTo("IF(ISNUMBER(B8),IF(ISNUMBER(B7),B8*B1+B7/B8,B7),B8)");
+                .isEqualTo("IF(ISNUMBER(B8),IF(ISNUMBER(B7),B8*B1+B7/B8,IF(B7=\"\",\"not given\",B7)),IF(B8=\"\",\"not given\",B8))");
     }
 
     @Test
@@ -166,17 +166,18 @@ class SpreadsheetReadingTest {
         assertThat(text(FormulaParser.parse("sqrt(a - b)"), Sureness.MAY_FAIL))
                 .isEqualTo("IFERROR(SQRT(B1-B2),\"no result\")");
         assertThat(text(FormulaParser.parse("sqrt(u)"), Sureness.MAY_FAIL))
-                .isEqualTo("IF(ISNUMBER(B7),IFERROR(SQRT(B7),\"no result\"),B7)");
+                .isEqualTo("IF(ISNUMBER(B7),IFERROR(SQRT(B7),\"no result\"),IF(B7=\"\",\"not given\",B7))");
     }
 
     @Test
     void whatTheFormulaTestsItselfIsNotGuarded() {
         Formula isNumber = Formulas.call(Function.IS_NUMBER, Formulas.symbol("u"));
         assertThat(text(Formulas.iff(isNumber, FormulaParser.parse("u + v"), Formulas.number("0")), Sureness.MAY_BE_WORDS))
-                .isEqualTo("IF(ISNUMBER(B8),IF(ISNUMBER(B7),B7+B8,0),B8)");
+                .isEqualTo("IF(ISNUMBER(B8),IF(ISNUMBER(B7),B7+B8,0),IF(B8=\"\",\"not given\",B8))");
         assertThat(text(FormulaParser.parse("if(u = \"free\", a, b)"), Sureness.SURE))
                 .isEqualTo("IF(B7=\"free\",B1,B2)");
-        assertThat(text(FormulaParser.parse("u"), Sureness.MAY_BE_WORDS)).isEqualTo("B7");
+        assertThat(text(FormulaParser.parse("u"), Sureness.MAY_BE_WORDS))
+                .isEqualTo("IF(B7=\"\",\"not given\",B7)");
     }
 
     @Test
