@@ -1,71 +1,84 @@
 package nappe.deliver.pdf;
 
+import com.lowagie.text.pdf.PdfDestination;
+import com.lowagie.text.pdf.PdfOutline;
+import com.lowagie.text.pdf.PdfWriter;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
-import java.util.Set;
+import java.util.Map;
+import java.util.regex.Pattern;
 import org.w3c.dom.Document;
 import org.w3c.dom.Element;
 import org.w3c.dom.NodeList;
+import org.xhtmlrenderer.pdf.ITextRenderer;
+import org.xhtmlrenderer.pdf.PagePosition;
 
-/** Bookmarks: the sheets, the headings of each, and under them the headings between the rows of its grids. */
+/**
+ * Bookmarks: the sheets, the headings of each, the titles of its tables and the headings between their rows. The renderer's
+ * own bookmarks lead to a wrong height where pages are of two kinds.
+ */
 final class Outline {
-    private final Document document;
+    /** Classes of the template, from the sheet inwards. */
+    private static final List<String> RANKS = List.of("title", "heading", "tabletitle", "between");
 
-    private Outline(Document document) {
-        this.document = document;
-    }
+    private static final Pattern IDS = Pattern.compile("^(sheet|heading)-\\d+$");
 
-    /** Writes the bookmarks into the head of the page, where the renderer looks for them. */
-    static void write(Document document) {
-        Outline outline = new Outline(document);
-        Element bookmarks = document.createElement("bookmarks");
-        for (Element leaf : outline.named("div", document.getDocumentElement(), "leaf")) {
-            outline.sheet(leaf, bookmarks);
-        }
-        document.getElementsByTagName("head").item(0).appendChild(bookmarks);
-    }
+    private record Entry(int rank, String words, String id) {}
 
-    private void sheet(Element leaf, Element bookmarks) {
-        String id = leaf.getAttribute("id");
-        String title = leaf.getElementsByTagName("h1").item(0).getTextContent();
-        Element sheet = bookmark(bookmarks, id.substring(id.indexOf('-') + 1) + " " + title, id);
-        Element heading = sheet;
-        int count = 0;
-        for (Element line : named("p", leaf, "heading", "between")) {
-            String words = line.getTextContent().replace('\u00a0', ' ').strip();
-            if (words.isEmpty()) {
-                continue;
-            }
-            String its = "heading-" + id + "-" + ++count;
-            line.setAttribute("id", its);
-            if (classes(line).contains("heading")) {
-                heading = bookmark(sheet, words, its);
-            } else {
-                bookmark(heading, words, its);
-            }
-        }
-    }
+    private final List<Entry> entries = new ArrayList<>();
 
-    private Element bookmark(Element under, String name, String id) {
-        Element bookmark = document.createElement("bookmark");
-        bookmark.setAttribute("name", name);
-        bookmark.setAttribute("href", "#" + id);
-        under.appendChild(bookmark);
-        return bookmark;
-    }
+    private Outline() {}
 
-    private List<Element> named(String tag, Element within, String... anyOf) {
-        List<Element> elements = new ArrayList<>();
-        NodeList all = within.getElementsByTagName(tag);
+    /** Finds what gets a bookmark, and gives each heading an id by which it is found on the page. */
+    static Outline of(Document document) {
+        Outline outline = new Outline();
+        NodeList all = document.getElementsByTagName("*");
         for (int i = 0; i < all.getLength(); i++) {
-            if (all.item(i) instanceof Element element && !java.util.Collections.disjoint(classes(element), List.of(anyOf))) {
-                elements.add(element);
+            if (all.item(i) instanceof Element element) {
+                outline.add(element);
             }
         }
-        return elements;
+        return outline;
     }
 
-    private static Set<String> classes(Element element) {
-        return Set.copyOf(List.of(element.getAttribute("class").split(" ", -1)));
+    private void add(Element element) {
+        int rank = RANKS.indexOf(element.getAttribute("class").split(" ", -1)[0]);
+        if (rank == 0) {
+            String id = element.getAttribute("id");
+            String title = element.getElementsByTagName("h1").item(0).getTextContent();
+            entries.add(new Entry(rank, id.substring(id.indexOf('-') + 1) + " " + title, id));
+        } else if (rank > 0) {
+            String words = element.getTextContent().replace('\u00a0', ' ').strip();
+            if (!words.isEmpty()) {
+                String id = "heading-" + entries.size();
+                element.setAttribute("id", id);
+                entries.add(new Entry(rank, words, id));
+            }
+        }
+    }
+
+    /** Writes the bookmarks; those of the sheets are closed. Before the first page is painted, which moves table heads. */
+    void write(ITextRenderer renderer, PdfWriter writer) {
+        Map<String, PagePosition> places = new HashMap<>();
+        renderer.findPagePositionsByID(IDS).forEach(place -> places.put(place.getId(), place));
+        PdfOutline[] open = new PdfOutline[RANKS.size() + 1];
+        for (Entry entry : entries) {
+            PagePosition place = places.get(entry.id());
+            if (place == null) {
+                throw new IllegalStateException("no place for the bookmark " + entry.words());
+            }
+            PdfDestination top =
+                    new PdfDestination(PdfDestination.XYZ, 0, place.getY() + place.getHeight(), 0);
+            top.addPage(writer.getPageReference(place.getPageNo() + 1));
+            open[0] = writer.getRootOutline();
+            int rank = entry.rank();
+            PdfOutline under = open[rank];
+            for (int above = rank - 1; under == null; above--) {
+                under = open[above];
+            }
+            open[rank + 1] = new PdfOutline(under, top, entry.words(), false);
+            java.util.Arrays.fill(open, rank + 2, open.length, null);
+        }
     }
 }

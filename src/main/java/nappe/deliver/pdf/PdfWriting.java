@@ -27,10 +27,9 @@ final class PdfWriting {
                 new NothingReplaced(),
                 glyphs);
         renderer.setPDFVersion(PdfWriter.VERSION_1_7);
-        renderer.setListener(new Stamp(xhtml, furniture, attachments));
         renderer.getSharedContext().setLineBreakingStrategy(new SpaceBreaks());
         Document document = Xhtml.parse(xhtml);
-        Outline.write(document);
+        renderer.setListener(new Stamp(xhtml, furniture, attachments, Outline.of(document)));
         do {
             renderer.setDocument(document, null, new PlainNames());
             renderer.layout();

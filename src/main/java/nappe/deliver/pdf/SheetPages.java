@@ -19,12 +19,10 @@ final class SheetPages {
     /** The pages of what was laid out. */
     static SheetPages of(ITextRenderer renderer) {
         SheetPages pages = new SheetPages();
-        Map<Integer, Integer> found = new TreeMap<>();
-        for (PagePosition place : renderer.findPagePositionsByID(SHEETS)) {
-            int sheet = Integer.parseInt(place.getId().substring(Links.id(0).length() - 1));
-            found.merge(sheet, place.getPageNo() + 1, Math::min);
+        for (PagePosition title : renderer.findPagePositionsByID(SHEETS)) {
+            int sheet = Integer.parseInt(title.getId().substring(Links.id(0).length() - 1));
+            pages.firsts.put(title.getPageNo() + 1, sheet);
         }
-        found.forEach((sheet, page) -> pages.firsts.put(page, sheet));
         return pages;
     }
 

@@ -26,11 +26,13 @@ final class Stamp extends DefaultPDFCreationListener {
     private final String xhtml;
     private final Furniture furniture;
     private final List<Attachment> attachments;
+    private final Outline outline;
 
-    Stamp(String xhtml, Furniture furniture, List<Attachment> attachments) {
+    Stamp(String xhtml, Furniture furniture, List<Attachment> attachments, Outline outline) {
         this.xhtml = xhtml;
         this.furniture = furniture;
         this.attachments = attachments;
+        this.outline = outline;
     }
 
     @Override
@@ -49,6 +51,7 @@ final class Stamp extends DefaultPDFCreationListener {
         writer.setPageLabels(pages.labels());
         writer.setPageEvent(new PageLabel(pages));
         SignatureField.add(renderer, writer);
+        outline.write(renderer, writer);
     }
 
     @Override
