@@ -35,7 +35,7 @@ final class TableGrid {
         for (Block.Row row : table.rows()) {
             List<View.Text> printed = new ArrayList<>();
             for (int i = 0; i < row.items().size(); i++) {
-                View.Text text = text(row.items().get(i), table.columns().get(i));
+                View.Text text = links.ofElement(text(row.items().get(i), table.columns().get(i)), table.columns().get(i));
                 printed.add(text);
                 decimals.get(i).add(text.characters());
                 measure(i, text, false);
