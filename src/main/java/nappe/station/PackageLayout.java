@@ -218,7 +218,10 @@ public final class PackageLayout {
         if (below == null && (role.equals("water level") || role.equals("energy level"))) {
             return cases.level(c);
         }
-        throw new IllegalStateException("nothing downstream gives a " + role);
+        throw new StationException(List.of(new DesignFault(
+                new Design.Origin("Project", ""),
+                "nothing downstream gives a " + role + " to this element; put an element below it that does, or take it away",
+                "link-missing")));
     }
 
     private List<ElementSheet.Demanded> demanded(Design.Element element, Map<Design.Demand, Cell> cells) {

@@ -110,7 +110,7 @@ final class Sources {
             heads.add(head(key));
         }
         columns.forEach(column -> heads.add(head(column)));
-        TableDraft draft = sheet.table(title, heads);
+        TableDraft draft = repeatsKey ? sheet.workbookTable(title, heads, table.rows()) : sheet.table(title, heads);
         List<List<Cell>> cellsOf = new ArrayList<>();
         columns.forEach(column -> cellsOf.add(new ArrayList<>()));
         for (int r = 0; r < table.rows(); r++) {

@@ -113,7 +113,7 @@ class MethodReaderTest {
     @Test
     void aTableBetweenNumbersIsAShareOfTheWayInCellsOfTheirOwn() {
         assertThat(formula("x_T2")).isEqualTo("min(max(b/1 mm, index(pretend-curve.r, 1)), index(pretend-curve.r, 3))");
-        assertThat(formula("i_T2")).isEqualTo("min(match_below(x_T2 + 6E-8, pretend-curve.r), 2)");
+        assertThat(formula("i_T2")).isEqualTo("min(match_below(x_T2, pretend-curve.r), 2)");
         assertThat(formula("d_T2")).isEqualTo("index(pretend-curve.r, i_T2 + 1) - index(pretend-curve.r, i_T2)");
         assertThat(formula("t_T2")).isEqualTo("(x_T2 - index(pretend-curve.r, i_T2))/d_T2");
         assertThat(formula("c")).isEqualTo(
