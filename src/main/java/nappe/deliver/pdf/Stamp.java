@@ -63,7 +63,11 @@ final class Stamp extends DefaultPDFCreationListener {
         try {
             // "PDFA/1" makes the library name the intent as PDF/A of every part wants it.
             writer.setOutputIntents(
-                    "sRGB IEC61966-2.1", "PDFA/1", "http://www.color.org", "sRGB IEC61966-2.1", ICC_Profile.getInstance(ColorSpace.CS_sRGB));
+                    "sRGB IEC61966-2.1",
+                    "PDFA/1",
+                    "http://www.color.org",
+                    "sRGB IEC61966-2.1",
+                    ICC_Profile.getInstance(ColorSpace.CS_sRGB));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
