@@ -75,6 +75,19 @@ public final class SheetDraft {
         gap();
     }
 
+    /** A chart in the workbook, over so many rows. */
+    public void chart(int rows, String chartTitle, String across, String up, List<Block.Series> series) {
+        blocks.add(new Block.Chart(next, rows, chartTitle, across, up, List.copyOf(series)));
+        next += rows;
+    }
+
+    /** A figure, by the key under which the results know it. */
+    public void figure(String figureTitle, String key) {
+        blocks.add(new Block.Figure(next, figureTitle, key));
+        next++;
+        gap();
+    }
+
     /** One empty row. */
     public void gap() {
         next++;

@@ -5,15 +5,24 @@ import java.util.List;
 import java.util.Map;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
+import nappe.calculation.Scope;
+import nappe.figure.Drafting;
+import nappe.figure.FigureLibrary;
+import nappe.figure.FigureSheet;
+import nappe.figure.MarginBars;
+import nappe.figure.RatingFigure;
 import nappe.formula.Value;
 import nappe.method.MethodLibrary;
 import nappe.method.MethodSheet;
+import nappe.results.Figure;
 import nappe.results.Furniture;
 import nappe.results.Results;
 import nappe.solve.Evaluation;
+import nappe.source.BuiltInLibrary;
 import nappe.station.Design;
 import nappe.station.PackageLayout;
 import nappe.station.SoftwareStatement;
+import nappe.unit.WorkingSystem;
 
 /** One design carried through: laid out, evaluated, ready to be delivered. */
 public final class Job {
@@ -25,10 +34,18 @@ public final class Job {
             "Printed values are rounded; the workbook carries full precision.");
 
     private final MethodLibrary methods;
+    private final FigureLibrary drawings;
     private final String version;
 
+    /** With the built-in drawings of the devices. */
     public Job(MethodLibrary methods, String version) {
+        this(methods, new FigureLibrary(new BuiltInLibrary()), version);
+    }
+
+    /** @param drawings the figure files beside the method sheets */
+    public Job(MethodLibrary methods, FigureLibrary drawings, String version) {
         this.methods = methods;
+        this.drawings = drawings;
         this.version = version;
     }
 
@@ -43,10 +60,40 @@ public final class Job {
         Map<String, MethodSheet> used = new LinkedHashMap<>();
         design.elements().forEach(e -> used.computeIfAbsent(e.method(), methods::sheet));
         SoftwareStatement software = statement(used, checks);
-        PackageLayout.Layout layout = PackageLayout.of(design, methods::sheet, software);
+        PackageLayout.Layout layout = PackageLayout.of(
+                design,
+                methods::sheet,
+                method -> drawings.of(method).map(FigureSheet::printed).orElse(List.of()),
+                software);
         Map<Cell, Value> values = Evaluation.of(layout.cells());
         return new Done(
-                new Results(furniture(design, used), layout.sheets(), layout.cells(), values), layout.ratings());
+                new Results(
+                        furniture(design, used), layout.sheets(), layout.cells(), values, figures(design, layout, values)),
+                layout.ratings());
+    }
+
+    private Map<String, Figure> figures(Design design, PackageLayout.Layout layout, Map<Cell, Value> values) {
+        Map<String, Figure> figures = new LinkedHashMap<>();
+        WorkingSystem system = design.project().system();
+        List<String> names = design.cases().stream().map(Design.FlowCase::name).toList();
+        layout.sheets().stream()
+                .filter(sheet -> sheet.blocks().stream()
+                        .anyMatch(block -> block instanceof Block.Figure f && f.key().equals(PackageLayout.LIMITS_FIGURE)))
+                .forEach(sheet -> figures.put(
+                        PackageLayout.LIMITS_FIGURE, MarginBars.of(sheet, layout.limits(), values, "Margins of the limits, each in its tightest case")));
+        for (Design.Element element : design.elements()) {
+            MethodSheet method = methods.sheet(element.method());
+            List<Scope> cases = java.util.Objects.requireNonNull(layout.cases().get(element.tag()));
+            drawings.of(method).ifPresent(sheet -> figures.put(
+                    element.tag() + PackageLayout.GEOMETRY_FIGURE,
+                    Drafting.draw(sheet, method, cases.get(layout.workedCase()), values, system, names.get(layout.workedCase()))));
+            Block.Table rating = layout.ratings().get(element.tag());
+            if (rating != null) {
+                RatingFigure.of(method, rating, names, cases, values, system)
+                        .ifPresent(curve -> figures.put(element.tag() + PackageLayout.RATING_FIGURE, curve));
+            }
+        }
+        return figures;
     }
 
     private Furniture furniture(Design design, Map<String, MethodSheet> used) {

@@ -7,9 +7,9 @@ import java.util.List;
  * One statement of a method sheet: a word, then fields separated by semicolons. Indented lines continue it; {@code #}
  * starts a comment.
  */
-final class Statement {
+public final class Statement {
     /** A field with the place of its first character in the statement's text. */
-    record Field(String text, int offset) {}
+    public record Field(String text, int offset) {}
 
     private final String file;
     private final List<String> sheet;
@@ -31,7 +31,7 @@ final class Statement {
     }
 
     /** The statements of a text, in order. */
-    static List<Statement> of(String file, String text) {
+    public static List<Statement> of(String file, String text) {
         List<String> sheet = text.lines().toList();
         List<Statement> statements = new ArrayList<>();
         StringBuilder joined = new StringBuilder();
@@ -91,26 +91,26 @@ final class Statement {
         return result;
     }
 
-    String word() {
+    public String word() {
         return word;
     }
 
-    int fieldCount() {
+    public int fieldCount() {
         return fields.size();
     }
 
     /** Field i, or an empty one where the statement is shorter. */
-    Field field(int i) {
+    public Field field(int i) {
         return i < fields.size() ? fields.get(i) : new Field("", Math.max(0, text.length() - 1));
     }
 
     /** Everything after the word, semicolons included, as one paragraph. */
-    String rest() {
+    public String rest() {
         return text.substring(Math.min(text.length(), word.length())).strip().replaceAll("\\s+", " ");
     }
 
     /** A fault at an offset of the statement's text. */
-    MethodFault fault(int offset, String message, String code) {
+    public MethodFault fault(int offset, String message, String code) {
         int i = Math.max(0, Math.min(offset, lines.length - 1));
         return new MethodFault(file, lines[i] + 1, columns[i] + 1, message, code, sheet.get(lines[i]));
     }

@@ -30,7 +30,7 @@ import org.jspecify.annotations.Nullable;
 final class StatementReader {
     private static final String WORDS = "words";
     /** What a symbol may be to the station. */
-    private static final List<String> ROLES = List.of("flow", "water level", "energy level");
+    private static final List<String> ROLES = List.of("flow", "water level", "energy level", "head at the gauge");
 
     /** Both ends of the bracket, and one step from them. */
     private static final int LEAST_TRIALS = 3;

@@ -149,10 +149,13 @@ final class TableLines {
             Formula next = call(Function.INDEX, run, plus(symbol(row), number(1)));
             found = plus(found, new Formula.Operation(Operator.TIMES, symbol(share), minus(next, found)));
         }
-        if (unit != null && !unitOf(column).text().equals("1")) {
-            found = new Formula.Operation(Operator.TIMES, found, new Formula.Quantity(1, "1", unitOf(column)));
-        }
         boolean blanks = !column.isWords() && column.hasBlanks();
+        if (unit != null && !unitOf(column).text().equals("1")) {
+            Formula size = new Formula.Operation(Operator.TIMES, found, new Formula.Quantity(1, "1", unitOf(column)));
+            found = blanks
+                    ? call(Function.IF, call(Function.IS_NUMBER, found), size, new Formula.NoResult(Value.NOT_GIVEN))
+                    : size;
+        }
         draft.add(new Item.Line(symbol, found, unit, label, source, column.isWords() ? null : column.sign(), blanks));
     }
 
@@ -180,7 +183,7 @@ final class TableLines {
     private String keyLabel() {
         return draft.items.stream()
                 .filter(item -> item.outputs().contains(key))
-                .map(item -> item instanceof Item.Line line ? line.label() : key)
+                .map(item -> item instanceof Item.Line line ? line.label() : item instanceof Item.Given given ? given.label() : key)
                 .findFirst()
                 .orElse(key);
     }

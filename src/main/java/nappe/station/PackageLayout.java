@@ -27,17 +27,39 @@ import nappe.unit.Unit;
  * downstream end up: each element takes its neighbour's water level in the same case.
  */
 public final class PackageLayout {
-    /** The sheets in order, and the cells in the order of evaluation. */
-    public record Layout(List<Sheet> sheets, List<Cell> cells, Map<String, Block.Table> ratings) {}
+    /**
+     * The sheets in order, and the cells in the order of evaluation.
+     *
+     * @param ratings the rating table of an element, by its tag
+     * @param cases the scopes of an element's cases, by its tag
+     * @param limits every limit with its margins
+     * @param workedCase index of the case worked in full
+     */
+    public record Layout(
+            List<Sheet> sheets,
+            List<Cell> cells,
+            Map<String, Block.Table> ratings,
+            Map<String, List<Scope>> cases,
+            List<ElementSheet.LimitResult> limits,
+            int workedCase) {}
+
+    /** Keys of the figures. */
+    public static final String LIMITS_FIGURE = "limits";
+
+    public static final String GEOMETRY_FIGURE = " geometry";
+    public static final String RATING_FIGURE = " rating";
 
     private final Design design;
     private final Map<String, MethodSheet> methods = new LinkedHashMap<>();
     private final List<SheetDraft> drafts = new ArrayList<>();
     private final List<String> contents = new ArrayList<>();
     private final List<String> caseNames;
+    private final Function<MethodSheet, List<String>> drawn;
 
-    private PackageLayout(Design design, Function<String, MethodSheet> methodOf) {
+    private PackageLayout(
+            Design design, Function<String, MethodSheet> methodOf, Function<MethodSheet, List<String>> drawn) {
         this.design = design;
+        this.drawn = drawn;
         design.elements().forEach(e -> methods.put(e.tag(), methodOf.apply(e.method())));
         this.caseNames = design.cases().stream().map(Design.FlowCase::name).toList();
     }
@@ -47,7 +69,20 @@ public final class PackageLayout {
      * @throws StationException where entries do not fit the methods
      */
     public static Layout of(Design design, Function<String, MethodSheet> methodOf, SoftwareStatement software) {
-        PackageLayout layout = new PackageLayout(design, methodOf);
+        return of(design, methodOf, method -> List.of(), software);
+    }
+
+    /**
+     * @param methodOf the method sheet of a name
+     * @param drawn the symbols whose values the drawing of a method shows; empty for a method without drawing
+     * @throws StationException where entries do not fit the methods
+     */
+    public static Layout of(
+            Design design,
+            Function<String, MethodSheet> methodOf,
+            Function<MethodSheet, List<String>> drawn,
+            SoftwareStatement software) {
+        PackageLayout layout = new PackageLayout(design, methodOf, drawn);
         List<DesignFault> faults = DemandCheck.faults(design, layout.methods);
         if (!faults.isEmpty()) {
             throw new StationException(faults);
@@ -74,6 +109,7 @@ public final class PackageLayout {
                 ? draft("Standing", "Standing of the tabled numbers", "row by row: what was read where, what is from memory")
                 : tableSheet;
         Map<String, SheetDraft> elementSheets = new LinkedHashMap<>();
+        Map<String, SheetDraft> figureSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> ratingSheets = new LinkedHashMap<>();
         for (Design.Element element : design.elements()) {
             String title = element.tag() + "  " + EntriesSheet.title(element, method(element));
@@ -82,6 +118,10 @@ public final class PackageLayout {
             method(element).about().forEach(methodSheet::note);
             methodSheet.heading("Cautions");
             method(element).cautions().forEach(methodSheet::caution);
+            if (!drawn.apply(method(element)).isEmpty()) {
+                figureSheets.put(element.tag(), draft(
+                        element.tag() + " figure", element.tag() + "  Geometry and levels", "the device drawn, with its dimensions and levels"));
+            }
             elementSheets.put(element.tag(), draft(element.tag(), title, "one case worked in full, every case, limits"));
             if (!method(element).ratings().isEmpty()) {
                 ratingSheets.put(element.tag(), draft(
@@ -105,9 +145,9 @@ public final class PackageLayout {
         Map<String, Scope> scopes = new LinkedHashMap<>();
         for (Design.Element element : design.elements()) {
             Scope scope = Scope.ofElement();
+            method(element).tables().values().forEach(table -> sources.layTable(table, scope));
             entries.lay(element, method(element), scope);
             constants.getOrDefault(element.method(), Map.of()).forEach(scope::put);
-            method(element).tables().values().forEach(table -> sources.layTable(table, scope));
             scopes.put(element.tag(), scope);
         }
         Map<Design.Demand, Cell> demands = entries.layDemands(design.demands());
@@ -116,6 +156,7 @@ public final class PackageLayout {
         ItemLayout items = new ItemLayout(cells, trialRows);
         List<ElementSheet.LimitResult> limits = new ArrayList<>();
         Map<String, Block.Table> ratings = new LinkedHashMap<>();
+        Map<String, List<Scope>> casesOf = new LinkedHashMap<>();
         Map<String, List<Block.Line>> linesOf = new LinkedHashMap<>();
         List<Scope> downstream = List.of();
         MethodSheet below = null;
@@ -128,9 +169,17 @@ public final class PackageLayout {
                     new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes);
             limits.addAll(laid.lay(workedCase(), demanded(element, demands)));
             linesOf.put(element.tag(), laid.lines());
+            casesOf.put(element.tag(), caseScopes);
+            SheetDraft figureSheet = figureSheets.get(element.tag());
+            if (figureSheet != null) {
+                new DrawnSheet(method, figureSheet).lay(element.tag(), drawn.apply(method), caseScopes.get(workedCase()));
+            }
             SheetDraft ratingSheet = ratingSheets.get(element.tag());
             if (ratingSheet != null) {
-                ratings.put(element.tag(), rating(element, method, items, scope, ratingSheet, trialRows));
+                Block.Table table = rating(element, method, items, scope, ratingSheet, trialRows);
+                ratings.put(element.tag(), table);
+                new RatingCurve(cells, method, ratingSheet)
+                        .lay(table, method.ratings().get(0), "Rating curve of " + element.tag(), caseNames, caseScopes);
             }
             downstream = caseScopes;
             below = method;
@@ -141,6 +190,7 @@ public final class PackageLayout {
         SummarySheet.Sorted sorted = new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
         CheckerSheets.glossary(glossarySheet, linesOf);
         CheckerSheets.formulas(checkerSheet, linesOf);
+        limitSheet.figure("Margins of the limits", LIMITS_FIGURE);
         back.assumptions(assumptionSheet);
         back.references(referenceSheet, distinct);
         back.software(softwareSheet, software);
@@ -152,7 +202,7 @@ public final class PackageLayout {
         for (int i = 0; i < drafts.size(); i++) {
             sheets.add(drafts.get(i).finish(i + 1));
         }
-        return new Layout(List.copyOf(sheets), List.copyOf(cells.all()), ratings);
+        return new Layout(List.copyOf(sheets), List.copyOf(cells.all()), ratings, casesOf, List.copyOf(limits), workedCase());
     }
 
     private boolean hasRemarks() {
@@ -267,6 +317,7 @@ public final class PackageLayout {
         sheet.note("Only for free flow as the method defines it. Outside this range, or where a limit of the device is not met, no result is claimed.");
         method.cautions().forEach(sheet::caution);
         sheet.gap();
+        sheet.figure("Rating curve of " + element.tag(), element.tag() + RATING_FIGURE);
         return new RatingGrid(items, method, reports)
                 .lay(method.ratings().get(0), scope, sheet, "Rating of " + element.tag())
                 .table();

@@ -244,7 +244,9 @@ final class SummarySheet {
         for (int i = 0; i < limits.size(); i++) {
             LimitResult limit = limits.get(i);
             List<Block.Item> row = new ArrayList<>(List.of(
-                    new Block.Text(Integer.toString(i + 1)), new Block.Text(limit.tag()), new Block.Text(limit.label())));
+                    new Block.Text(Integer.toString(i + 1)),
+                    new Block.Jump(limit.tag(), limit.verdicts().get(0)),
+                    new Block.Text(limit.label())));
             for (int c = 0; c < caseNames.size(); c++) {
                 Scope scope = Scope.ofElement();
                 scope.put("verdict", limit.verdicts().get(limit.forAll() ? 0 : c));

@@ -123,7 +123,7 @@ class MethodReaderTest {
     @Test
     void aTableBetweenNumbersBringsTheLimitsOfItsEnds() {
         assertThat(TROUGH.limits().subList(0, 2)).extracting(Limit::label).containsExactly(
-                "b is inside the table pretend-curve, lower end", "b is inside the table pretend-curve, upper end");
+                "width is within the table, lower end: Pretend table", "width is within the table, upper end: Pretend table");
     }
 
     @Test

@@ -16,10 +16,12 @@ final class Leaves {
 
     private final Results results;
     private final PageSize page;
+    private final Pictures pictures;
 
-    Leaves(Results results, PageSize page) {
+    Leaves(Results results, PageSize page, Pictures pictures) {
         this.results = results;
         this.page = page;
+        this.pictures = pictures;
     }
 
     List<View.Leaf> leaves() {
@@ -66,6 +68,10 @@ final class Leaves {
             return under(headings, List.of(elsewhere(sheet, elsewhere.table())));
         } else if (block instanceof Block.Note note) {
             return under(headings, note(note));
+        } else if (block instanceof Block.Chart) {
+            return under(headings, List.of());
+        } else if (block instanceof Block.Figure figure) {
+            return under(headings, pictures.parts(figure, width, width > page.upright()));
         }
         throw new IllegalArgumentException("unknown block " + block);
     }

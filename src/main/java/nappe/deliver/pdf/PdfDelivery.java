@@ -26,6 +26,7 @@ public record PdfDelivery(byte[] bytes, List<String> warnings) {
         PageSize page = PageSize.of(results.furniture().letterPaper());
         Furnishing furnishing = Furnishing.of(results.furniture(), page);
         String title = furnishing.number() + " " + furnishing.subject() + ", revision " + furnishing.revision();
+        Pictures pictures = new Pictures(results);
         String xhtml = Xhtml.fill(Map.of(
                 "title",
                 title,
@@ -34,10 +35,10 @@ public record PdfDelivery(byte[] bytes, List<String> warnings) {
                 "pageRule",
                 page.rules(furnishing.footHeight(page)),
                 "leaves",
-                new Leaves(results, page).leaves(),
+                new Leaves(results, page, pictures).leaves(),
                 "index",
                 Links.toIndex(results.sheets())));
-        PdfDelivery written = PdfWriting.write(xhtml, results.furniture(), attachments);
+        PdfDelivery written = PdfWriting.write(xhtml, results.furniture(), pictures.made(), attachments);
         List<String> warnings = new ArrayList<>(furnishing.warnings(results.furniture()));
         warnings.addAll(written.warnings());
         return new PdfDelivery(written.bytes(), List.copyOf(warnings));

@@ -4,6 +4,7 @@ import com.lowagie.text.pdf.PdfWriter;
 import java.io.ByteArrayOutputStream;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Set;
 import nappe.results.Furniture;
 import org.w3c.dom.Document;
@@ -13,7 +14,8 @@ import org.xhtmlrenderer.pdf.ITextRenderer;
 final class PdfWriting {
     private PdfWriting() {}
 
-    static PdfDelivery write(String xhtml, Furniture furniture, List<Attachment> attachments) {
+    static PdfDelivery write(
+            String xhtml, Furniture furniture, Map<String, Picture> pictures, List<Attachment> attachments) {
         float dots = ITextRenderer.DEFAULT_DOTS_PER_POINT;
         FaceResolver faces = new FaceResolver();
         Glyphs glyphs = new Glyphs(faces);
@@ -24,7 +26,7 @@ final class PdfWriting {
                 paper,
                 new ClosedAgent(paper),
                 faces,
-                new NothingReplaced(),
+                new PictureFactory(pictures, dots),
                 glyphs);
         renderer.setPDFVersion(PdfWriter.VERSION_1_7);
         renderer.getSharedContext().setLineBreakingStrategy(new SpaceBreaks());

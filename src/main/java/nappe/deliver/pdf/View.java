@@ -48,6 +48,26 @@ public final class View {
     }
 
     /**
+     * A picture of a fixed size.
+     *
+     * @param id by which the page asks for it
+     * @param words what it shows
+     * @param width in mm
+     * @param height in mm
+     */
+    public record Picture(String id, String words, double width, double height) implements Part {
+        @Override
+        public String kind() {
+            return "picture";
+        }
+
+        /** The size, for the style sheet. */
+        public String size() {
+            return "width: " + Math.round(width * 100) / 100.0 + "mm; height: " + Math.round(height * 100) / 100.0 + "mm";
+        }
+    }
+
+    /**
      * A table. Its head repeats on every page.
      *
      * @param widths of the columns, in mm
