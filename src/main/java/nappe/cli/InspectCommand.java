@@ -26,6 +26,7 @@ final class InspectCommand implements Callable<Integer> {
     public Integer call() {
         Desk desk = new Desk();
         Design design = desk.read(input);
+        Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
         Job.Done done = desk.compute(input, design);
         PrintWriter out = spec.commandLine().getOut();
         out.println(design.project().project() + ": " + design.project().subject());

@@ -48,6 +48,7 @@ final class IssueCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         Desk desk = new Desk();
         Design design = desk.read(input);
+        Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
         PackageFolder target = PackageFolder.of(folder, design.project().number(), design.project().revision());
         target.refuseIfIssued();
         Job.Done done = desk.compute(input, design);

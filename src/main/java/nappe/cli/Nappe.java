@@ -21,7 +21,7 @@ import picocli.CommandLine.Command;
         },
         footer = {
             "",
-            "Exit status: 0 done (limits not met are results, not errors), 1 internal fault, 2 wrong usage, 3 input refused, 4 would overwrite"
+            "Exit status: 0 done (limits not met are results, not errors), 1 internal fault, 2 wrong usage, 3 input refused or a check value not met, 4 would overwrite"
                     + " an issued revision.",
             "",
             "Start with:  nappe blank F1=parshall-flume -o station.xlsx"

@@ -30,7 +30,7 @@ final class RatingCurve {
     /** What an element gives where its head in a case is the head of its rating. */
     static final String GAUGE_HEAD = "head at the gauge";
 
-    private static final int ROWS = 24;
+    private static final int ROWS = 22;
 
     private final Cells cells;
     private final MethodSheet method;
@@ -110,7 +110,7 @@ final class RatingCurve {
                 new Block.Column(head + " [" + up + "]", 14, Block.Align.RIGHT),
                 new Block.Column("marked at " + flow, 14, Block.Align.RIGHT),
                 new Block.Column("marked at " + head, 14, Block.Align.RIGHT),
-                new Block.Column("Case", 14, Block.Align.LEFT)), cases.size());
+                new Block.Column("Case", 26, Block.Align.LEFT)), cases.size());
         List<Cell> flows = new ArrayList<>();
         List<Cell> heads = new ArrayList<>();
         for (int c = 0; c < cases.size(); c++) {

@@ -2,12 +2,9 @@ package nappe.proof;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import com.lowagie.text.pdf.PdfReader;
-import com.lowagie.text.pdf.parser.PdfTextExtractor;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.List;
 import nappe.Tools;
 import org.junit.jupiter.api.Test;
@@ -43,14 +40,7 @@ class ChartPrintTest {
         assertThat(pages).filteredOn(page -> page.contains("flow [m3/s]") && page.contains("flow cases")).hasSize(1);
     }
 
-    private static List<String> pages(Path pdf) throws IOException {
-        List<String> pages = new ArrayList<>();
-        try (PdfReader reader = new PdfReader(Files.readAllBytes(pdf))) {
-            PdfTextExtractor text = new PdfTextExtractor(reader);
-            for (int page = 1; page <= reader.getNumberOfPages(); page++) {
-                pages.add(text.getTextFromPage(page));
-            }
-        }
-        return pages;
+    private List<String> pages(Path pdf) throws IOException {
+        return PdfPages.of(Files.readAllBytes(pdf), folder).all();
     }
 }

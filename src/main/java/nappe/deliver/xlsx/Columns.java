@@ -10,14 +10,14 @@ final class Columns {
     /** Heads and widths of a calculation, before the columns of its cases. */
     static final List<Block.Column> OF_LINES = List.of(
             new Block.Column("Code", 8, Block.Align.LEFT),
-            new Block.Column("Description", 34, Block.Align.LEFT),
+            new Block.Column("Description", 32, Block.Align.LEFT),
             new Block.Column("Symbol", 8, Block.Align.LEFT),
-            new Block.Column("Equation", 34, Block.Align.LEFT),
-            new Block.Column("Unit", 9, Block.Align.LEFT),
-            new Block.Column("Source", 28, Block.Align.LEFT),
-            new Block.Column("All cases", 16, Block.Align.RIGHT));
+            new Block.Column("Equation", 32, Block.Align.LEFT),
+            new Block.Column("Unit", 8, Block.Align.LEFT),
+            new Block.Column("Source", 22, Block.Align.LEFT),
+            new Block.Column("All cases", 14, Block.Align.RIGHT));
 
-    private static final int CASE = 13;
+    private static final int CASE = 12;
     private static final int NARROWEST = 5;
     private static final int WIDEST = 120;
     private static final int UNUSED = 9;

@@ -28,7 +28,7 @@ final class Pages {
     /** Upright is wide enough down to this scale, and a wide page down to that. */
     private static final double LEAST_UPRIGHT = 0.65;
 
-    private static final double LEAST_WIDE = 0.56;
+    private static final double LEAST_WIDE = 0.52;
 
     /** What takes no more pages than this is printed smaller on one, unless it gets smaller than the least scale. */
     private static final double NEARLY_ONE = 1.3;

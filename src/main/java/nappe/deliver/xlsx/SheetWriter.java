@@ -1,6 +1,7 @@
 package nappe.deliver.xlsx;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
@@ -217,7 +218,8 @@ final class SheetWriter {
                 .filter(reference -> reference instanceof Cell other && !canvas.isHere(other))
                 .map(reference -> ((Cell) reference).place())
                 .filter(place -> !place.sheet().equals("Constants") || line.equation().contains("Constants"))
-                .findFirst()
+                // references have no order that is the same in every run
+                .min(Comparator.comparing(Place::sheet).thenComparing(Place::row).thenComparing(Place::column))
                 .orElse(null);
     }
 
