@@ -52,7 +52,8 @@ class PackageTreeTest {
                 new Row("results", "calculation source formula unit", ""),
                 new Row("station", "results calculation method source formula unit", ""),
                 new Row("solve", "results calculation formula unit", "org.apache.commons.math3.."),
-                new Row("job", "station solve results calculation method source formula unit", CSV),
+                new Row("figure", "results calculation method source formula unit", ""),
+                new Row("job", "figure station solve results calculation method source formula unit", CSV),
                 new Row("input", "station method source formula unit", "org.apache.poi.. " + XML),
                 new Row("deliver.csv", "results calculation formula source unit", ""),
                 new Row("deliver.xlsx", "results calculation formula source unit", "org.apache.poi.. org.openxmlformats.. " + XML),
@@ -85,7 +86,7 @@ class PackageTreeTest {
                 .isInstanceOf(AssertionError.class)
                 .hasMessageContaining("nappe.method.StatementReader")
                 .hasMessageContaining("nappe.formula.FormulaParser");
-        assertThatThrownBy(() -> new Row("job", "station solve results calculation method source formula unit", "").rule().check(NAPPE))
+        assertThatThrownBy(() -> new Row("job", "figure station solve results calculation method source formula unit", "").rule().check(NAPPE))
                 .isInstanceOf(AssertionError.class)
                 .hasMessageContaining("org.apache.commons.csv");
     }

@@ -9,6 +9,7 @@ import java.util.Map;
 import java.util.concurrent.Callable;
 import nappe.calculation.Block;
 import nappe.deliver.csv.RatingCsv;
+import nappe.deliver.pdf.Attachment;
 import nappe.deliver.pdf.PdfDelivery;
 import nappe.deliver.xlsx.XlsxDelivery;
 import nappe.job.Job;
@@ -62,10 +63,11 @@ final class IssueCommand implements Callable<Integer> {
         Results results = done.results();
         Furniture furniture = results.furniture();
         Map<String, byte[]> files = new LinkedHashMap<>();
-        PdfDelivery pdf = PdfDelivery.render(results);
+        byte[] workbook = XlsxDelivery.render(results);
+        PdfDelivery pdf = PdfDelivery.render(results, new Attachment(name + ".xlsx", workbook));
         pdf.warnings().forEach(warning -> spec.commandLine().getErr().println("nappe: " + warning));
         files.put(name + ".pdf", pdf.bytes());
-        files.put(name + ".xlsx", XlsxDelivery.render(results));
+        files.put(name + ".xlsx", workbook);
         for (Map.Entry<String, Block.Table> rating : done.ratings().entrySet()) {
             String csv = RatingCsv.write(results, rating.getValue());
             files.put(name + "_" + rating.getKey() + "-rating.csv", csv.getBytes(StandardCharsets.UTF_8));

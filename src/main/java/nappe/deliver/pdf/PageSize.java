@@ -5,8 +5,9 @@ import java.util.Locale;
 /** The paper, in mm: US letter or A4, with a binding edge at the left of upright pages and at the head of wide ones. */
 record PageSize(double width, double height) {
     private static final double BINDING = 25;
-    private static final double SIDE = 14;
+    static final double SIDE = 14;
     private static final double HEAD = 35;
+    private static final double CLEAR = 10;
 
     static PageSize of(boolean letter) {
         return letter ? new PageSize(215.9, 279.4) : new PageSize(210, 297);
@@ -28,7 +29,7 @@ record PageSize(double width, double height) {
      * @param foot height of the page foot
      */
     String rules(double foot) {
-        return rule("upright", width, height, HEAD + 10, SIDE, foot + 10, BINDING)
+        return rule("upright", width, height, HEAD + CLEAR, SIDE, foot + 10, BINDING)
                 + rule("wide", height, width, HEAD + BINDING, SIDE, foot + 10, SIDE)
                 + ".landscape {width: " + number(wide()) + "mm}\n.portrait {width: " + number(upright()) + "mm}\n";
     }
@@ -39,6 +40,16 @@ record PageSize(double width, double height) {
                 + "mm " + number(right) + "mm " + number(bottom) + "mm " + number(left) + "mm;\n"
                 + "@top-left {content: element(head); vertical-align: bottom; padding-bottom: 4mm; width: 100%}\n"
                 + "@bottom-left {content: element(foot); vertical-align: top; padding-top: 3mm; width: 100%}}\n";
+    }
+
+    /** The space above the page head, in mm. */
+    static double aboveHead(boolean wide) {
+        return wide ? BINDING : CLEAR;
+    }
+
+    /** Millimetres as points. */
+    static float points(double mm) {
+        return (float) (mm / 25.4 * 72);
     }
 
     private static String number(double mm) {

@@ -38,7 +38,8 @@ final class TableGrid {
         for (Block.Row row : table.rows()) {
             List<View.Text> printed = new ArrayList<>();
             for (int i = 0; i < row.items().size(); i++) {
-                View.Text text = text(row.items().get(i), table.columns().get(i));
+                Block.Column column = table.columns().get(i);
+                View.Text text = links.ofElement(text(row.items().get(i), column), column);
                 printed.add(text);
                 decimals.get(i).add(text.characters());
                 measure(i, text, false);

@@ -33,6 +33,7 @@ final class Typefaces {
             BaseFont font = BaseFont.createFont(
                     name + ".ttf", BaseFont.IDENTITY_H, BaseFont.EMBEDDED, false, in.readAllBytes(), null);
             font.setSecureRandom(new FixedTag(name));
+            font.setIncludeCidSet(false);
             return font;
         } catch (IOException e) {
             throw new UncheckedIOException(e);

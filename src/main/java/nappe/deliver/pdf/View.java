@@ -10,7 +10,7 @@ public final class View {
     /**
      * One sheet.
      *
-     * @param id target of links to it
+     * @param id of its title, the target of links to it
      * @param style class names for the style sheet
      */
     public record Leaf(String id, int number, String title, String style, List<Part> parts) {}
