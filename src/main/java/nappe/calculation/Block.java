@@ -43,6 +43,22 @@ public sealed interface Block {
     }
 
     /**
+     * A chart of curves and points, drawn by the workbook from its cells; it stands in the workbook only.
+     *
+     * @param rows workbook rows that it takes
+     * @param across what is measured along the foot, with its unit
+     * @param up what is measured along the side, with its unit
+     */
+    record Chart(int row, int rows, String title, String across, String up, List<Series> series) implements Block {}
+
+    /**
+     * What a chart draws: a line through its places, or a mark at each.
+     *
+     * @param across runs of equal length with the other
+     */
+    record Series(String name, boolean isLine, Run across, Run up) {}
+
+    /**
      * The calculation of one element. In the workbook one table: code, description, symbol, equation, unit, source,
      * value for all cases, then one column per case. In the PDF two: one case worked in full with equations and
      * numbers, then every case.
@@ -113,6 +129,9 @@ public sealed interface Block {
 
     /** The workbook address of a cell; in the workbook a link to it. */
     record Address(Cell cell) implements Item {}
+
+    /** A text that leads to a cell. */
+    record Jump(String text, Cell to) implements Item {}
 
     /** A sheet, by its number and title; a link to it. */
     record SheetLink(int number, String sheetName, String title) implements Item {}

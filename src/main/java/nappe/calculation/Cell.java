@@ -2,6 +2,7 @@ package nappe.calculation;
 
 import java.util.Map;
 import nappe.formula.Formula;
+import nappe.formula.Sign;
 import nappe.formula.Value;
 import nappe.unit.Unit;
 import org.jspecify.annotations.Nullable;
@@ -32,6 +33,7 @@ public final class Cell implements Reference {
     private final @Nullable Formula formula;
     private final Map<String, Reference> references;
     private final Sureness sureness;
+    private final @Nullable Allowed allowed;
 
     private Cell(
             Kind kind,
@@ -41,7 +43,8 @@ public final class Cell implements Reference {
             @Nullable Value typed,
             @Nullable Formula formula,
             Map<String, Reference> references,
-            Sureness sureness) {
+            Sureness sureness,
+            @Nullable Allowed allowed) {
         this.kind = kind;
         this.place = place;
         this.symbol = symbol;
@@ -50,23 +53,31 @@ public final class Cell implements Reference {
         this.formula = formula;
         this.references = Map.copyOf(references);
         this.sureness = sureness;
+        this.allowed = allowed;
     }
 
     /** A cell whose content is typed, in the unit given. */
     public static Cell typed(Kind kind, Place place, String symbol, Unit unit, Value value) {
         Sureness sureness = value instanceof Value.None ? Sureness.MAY_BE_WORDS : Sureness.SURE;
-        return new Cell(kind, place, symbol, unit, value, null, Map.of(), sureness);
+        Allowed allowed = kind == Kind.ENTRY && !(value instanceof Value.Word) ? new Allowed.Numbers(Sign.ANY) : null;
+        return new Cell(kind, place, symbol, unit, value, null, Map.of(), sureness, allowed);
     }
 
     /** A typed cell that may stay blank, and then holds words; a number may be typed into it later. */
     public static Cell optional(Place place, String symbol, Unit unit, Value value) {
-        return new Cell(Kind.ENTRY, place, symbol, unit, value, null, Map.of(), Sureness.MAY_BE_WORDS);
+        return new Cell(
+                Kind.ENTRY, place, symbol, unit, value, null, Map.of(), Sureness.MAY_BE_WORDS, new Allowed.Numbers(Sign.ANY));
+    }
+
+    /** The same typed cell, into which only such a thing may be typed later. */
+    public Cell allowing(Allowed only) {
+        return new Cell(kind, place, symbol, unit, typed, formula, references, sureness, only);
     }
 
     /** A live cell; every symbol of its formula must be among the references. */
     public static Cell live(
             Place place, String symbol, Unit unit, Formula formula, Map<String, Reference> references, Sureness sureness) {
-        return new Cell(Kind.FORMULA, place, symbol, unit, null, formula, references, sureness);
+        return new Cell(Kind.FORMULA, place, symbol, unit, null, formula, references, sureness, null);
     }
 
     public Kind kind() {
@@ -107,6 +118,11 @@ public final class Cell implements Reference {
 
     public Sureness sureness() {
         return sureness;
+    }
+
+    /** What may be typed into it, for an entry; null where any words may, and for a cell that is none. */
+    public @Nullable Allowed allowed() {
+        return allowed;
     }
 
     @Override

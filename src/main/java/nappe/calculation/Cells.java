@@ -51,12 +51,21 @@ public final class Cells {
 
     /** A typed cell: an entry, a constant, a number of a table. */
     public Cell typed(Cell.Kind kind, Place place, String symbol, Unit unit, Value value, Sign sign) {
-        return keep(Cell.typed(kind, place, symbol, unit, value), sign);
+        Cell cell = Cell.typed(kind, place, symbol, unit, value);
+        return keep(cell.allowed() == null ? cell : cell.allowing(new Allowed.Numbers(sign)), sign);
     }
 
     /** A typed cell that may stay blank. */
     public Cell optional(Place place, String symbol, Unit unit, Value value, Sign sign) {
-        return keep(Cell.optional(place, symbol, unit, value), sign);
+        return keep(Cell.optional(place, symbol, unit, value).allowing(new Allowed.Numbers(sign)), sign);
+    }
+
+    /** An entry that is one of the words of a run, or may stay blank besides. */
+    public Cell choice(Place place, String symbol, Value value, Run words, boolean mayBeBlank) {
+        Cell cell = mayBeBlank
+                ? Cell.optional(place, symbol, Unit.one(), value)
+                : Cell.typed(Cell.Kind.ENTRY, place, symbol, Unit.one(), value);
+        return keep(cell.allowing(new Allowed.Words(words)), Sign.ANY);
     }
 
     /** A live cell in the working unit of its dimension; null for words. */

@@ -82,6 +82,12 @@ public final class SheetDraft {
         gap();
     }
 
+    /** A chart in the workbook, over so many rows. */
+    public void chart(int rows, String chartTitle, String across, String up, List<Block.Series> series) {
+        blocks.add(new Block.Chart(next, rows, chartTitle, across, up, List.copyOf(series)));
+        next += rows;
+    }
+
     /** One empty row. */
     public void gap() {
         next++;

@@ -48,7 +48,8 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
     }
 
     private static Fault at(String file, DesignFault fault) {
-        return new Fault(file, fault.origin().sheet(), fault.origin().cell(), fault.message(), fault.code());
+        String cell = fault.origin().cell();
+        return new Fault(file, fault.origin().sheet(), cell.isEmpty() ? null : cell, fault.message(), fault.code());
     }
 
     private static String inWords(java.io.IOException failure) {
@@ -57,7 +58,7 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
             return "no right to write " + message;
         }
         if (failure instanceof java.nio.file.NoSuchFileException) {
-            return "there is no " + message;
+            return "cannot write " + message + ": there is no such folder, or no right to make one";
         }
         return message;
     }

@@ -49,8 +49,16 @@ public final class Nappe implements Runnable {
                 .setOut(out)
                 .setErr(err)
                 .setUsageHelpWidth(110)
+                .setParameterExceptionHandler(Nappe::wrongUsage)
                 .setExecutionExceptionHandler(new Failures());
         return line.execute(args);
+    }
+
+    private static int wrongUsage(CommandLine.ParameterException e, String[] args) {
+        CommandLine line = e.getCommandLine();
+        line.getErr().println("nappe: " + e.getMessage());
+        line.getErr().println("How it is used:  " + line.getCommandSpec().qualifiedName() + " --help");
+        return ExitStatus.WRONG_USAGE;
     }
 
     /** Without a command: what to do next. */

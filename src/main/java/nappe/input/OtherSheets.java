@@ -56,7 +56,8 @@ final class OtherSheets {
                 "known",
                 value.origin());
         String what = entries.text(row.field("What is demanded"), "what is demanded", Entries.LONGEST_TEXT);
-        return new Demand(tag, symbol, atMost, typed, what, citation);
+        return new Demand(
+                tag, symbol, atMost, typed, what, citation, row.field("Symbol").origin(), row.field("Unit").origin());
     }
 
     /** A unit of any kind: what a demanded result measures is known only where it is calculated. */

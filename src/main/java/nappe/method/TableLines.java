@@ -62,7 +62,7 @@ final class TableLines {
         if (between) {
             between(first, column);
         } else {
-            line(row(), call(Function.MATCH, symbol(key), column), "row of cited table " + suffix() + ", " + table.title(), Sign.POSITIVE);
+            line(row(), call(Function.MATCH, symbol(key), column), "row in the table: " + table.title(), Sign.POSITIVE);
         }
     }
 
@@ -90,11 +90,9 @@ final class TableLines {
         Formula start = call(Function.INDEX, column, number(1));
         String inside = "x_" + suffix();
         line(inside, call(Function.MIN, call(Function.MAX, keyNumber, start), last),
-                keyLabel() + " as looked up, not beyond the ends of cited table " + suffix(), first.sign());
-        // A value at a row of the table is found at that row in every program, whatever its last bits are.
-        Formula nudged = plus(symbol(inside), nudge(first));
-        line(row(), call(Function.MIN, call(Function.MATCH_BELOW, nudged, column), number(table.rows() - 1)),
-                "row of cited table " + suffix() + " below it", Sign.POSITIVE);
+                keyLabel() + " as looked up, not beyond the ends of the table: " + table.title(), first.sign());
+        line(row(), call(Function.MIN, call(Function.MATCH_BELOW, symbol(inside), column), number(table.rows() - 1)),
+                "row below it in the table: " + table.title(), Sign.POSITIVE);
         Formula below = call(Function.INDEX, column, symbol(row()));
         Formula next = call(Function.INDEX, column, plus(symbol(row()), number(1)));
         String step = "d_" + suffix();
@@ -103,9 +101,9 @@ final class TableLines {
                 "share of the way to the next row", Sign.ANY);
         Formula span = span(first);
         draft.limits.add(new Limit(start, keyNumber, false, span, null,
-                keyLabel() + " is within the cited table " + suffix() + ", lower end", source));
+                keyLabel() + " is within the table, lower end: " + table.title(), source));
         draft.limits.add(new Limit(keyNumber, last, true, span, null,
-                keyLabel() + " is within the cited table " + suffix() + ", upper end", source));
+                keyLabel() + " is within the table, upper end: " + table.title(), source));
     }
 
     /** What the margin to an end of the table is measured by: from its first row to its last. */
@@ -113,13 +111,6 @@ final class TableLines {
         double from = ((Value.Number) first.values().get(0)).value();
         double to = ((Value.Number) first.values().get(first.values().size() - 1)).value();
         String text = java.math.BigDecimal.valueOf(to).subtract(java.math.BigDecimal.valueOf(from)).toPlainString();
-        return new Formula.Numeral(Double.parseDouble(text), text);
-    }
-
-    /** A billionth of the table's range. */
-    private static Formula nudge(CitedTable.Column first) {
-        String span = ((Formula.Numeral) span(first)).text();
-        String text = new java.math.BigDecimal(span).stripTrailingZeros().scaleByPowerOfTen(-9).toString();
         return new Formula.Numeral(Double.parseDouble(text), text);
     }
 
@@ -192,7 +183,7 @@ final class TableLines {
     private String keyLabel() {
         return draft.items.stream()
                 .filter(item -> item.outputs().contains(key))
-                .map(item -> item instanceof Item.Line line ? line.label() : key)
+                .map(item -> item instanceof Item.Line line ? line.label() : item instanceof Item.Given given ? given.label() : key)
                 .findFirst()
                 .orElse(key);
     }

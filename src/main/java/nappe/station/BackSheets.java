@@ -125,21 +125,28 @@ final class BackSheets {
                 List.of("Check value", "Why"), List.of(40, 60), statement.off());
         sheet.note("Kinds: published, a number printed by somebody else; library, a general-purpose library that was run; derived, a second"
                 + " evaluation of the same theory, which guards the coding and not the theory; memory, not confirmed.");
-        texts(sheet, "Each check value",
-                List.of("Method and entries", "Source", "Symbol", "Computed", "Expected", "Tolerance", "Verdict"),
-                List.of(40, 44, 10, 16, 16, 12, 10), statement.rows());
+        if (!statement.rows().isEmpty()) {
+            TableDraft table = sheet.workbookTable("Each check value", columns(
+                    List.of("Method and entries", "Source", "Symbol", "Computed", "Expected", "Tolerance", "Verdict"),
+                    List.of(40, 44, 10, 16, 16, 12, 10)), statement.rows().size());
+            statement.rows().forEach(row -> table.add(row.stream().<Block.Item>map(Block.Text::new).toList()));
+        }
     }
 
-    private static void texts(SheetDraft sheet, String title, List<String> heads, List<Integer> widths, List<List<String>> rows) {
+    private static List<Block.Column> columns(List<String> heads, List<Integer> widths) {
         List<Block.Column> columns = new ArrayList<>();
         for (int i = 0; i < heads.size(); i++) {
             columns.add(new Block.Column(heads.get(i), widths.get(i), Block.Align.LEFT));
         }
+        return columns;
+    }
+
+    private static void texts(SheetDraft sheet, String title, List<String> heads, List<Integer> widths, List<List<String>> rows) {
         if (rows.isEmpty()) {
             sheet.heading(title);
             sheet.note("none");
         } else {
-            TableDraft table = sheet.table(title, columns);
+            TableDraft table = sheet.table(title, columns(heads, widths));
             rows.forEach(row -> table.add(row.stream().<Block.Item>map(Block.Text::new).toList()));
         }
         sheet.gap();

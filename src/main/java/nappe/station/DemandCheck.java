@@ -23,26 +23,39 @@ final class DemandCheck {
             Unit unit = unit(method, demand.symbol());
             if (unit == null) {
                 faults.add(new DesignFault(
-                        demand.value().origin(),
-                        "\"" + demand.symbol() + "\" is not a result of " + demand.tag() + "; it has "
-                                + String.join(", ", results(method)),
+                        demand.symbolAt(),
+                        "\"" + demand.symbol() + "\" is not a result of " + demand.tag() + "; it has " + results(method),
                         "symbol-unknown"));
             } else if (!unit.dimension().equals(demand.value().unit().dimension())) {
                 faults.add(new DesignFault(
-                        demand.value().origin(),
-                        demand.symbol() + " is " + unit.dimension() + ", but " + demand.value().unit() + " is "
-                                + demand.value().unit().dimension() + "; write a unit such as " + unit,
+                        demand.unitAt(),
+                        demand.symbol() + " is measured in " + unit + ", and " + demand.value().unit()
+                                + " does not measure the same (" + demand.value().unit().dimension() + " against "
+                                + unit.dimension() + "); write a unit such as " + unit,
                         "unit-dimension"));
             }
         }
         return faults;
     }
 
-    private static List<String> results(MethodSheet method) {
+    /** The results that a demand may name, each with its description: those that stand in the case columns. */
+    private static String results(MethodSheet method) {
         return method.items().stream()
                 .flatMap(item -> item.outputs().stream())
-                .filter(symbol -> unit(method, symbol) != null)
-                .toList();
+                .filter(symbol -> unit(method, symbol) != null && method.perCase(symbol))
+                .map(symbol -> symbol + label(method, symbol))
+                .collect(java.util.stream.Collectors.joining(", "));
+    }
+
+    private static String label(MethodSheet method, String symbol) {
+        Item item = method.item(symbol);
+        if (item instanceof Item.Line line) {
+            return " (" + line.label() + ")";
+        }
+        if (item instanceof Item.Root root) {
+            return " (" + root.label() + ")";
+        }
+        return item instanceof Item.Given given ? " (" + given.label() + ")" : "";
     }
 
     /** The unit of a result, through names that an {@code at} gave it; null where there is no such result. */

@@ -80,8 +80,21 @@ public record Design(
             String tailwaterReturn,
             Map<String, Typed> typed) {}
 
-    /** A limit demanded by an authority or owner: a result of an element at most or at least a value, with citation. */
-    public record Demand(String tag, String symbol, boolean atMost, Typed value, String description, String citation) {}
+    /** A limit demanded by an authority or owner: a result of an element at most or at least a value, with citation and cells. */
+    public record Demand(
+            String tag,
+            String symbol,
+            boolean atMost,
+            Typed value,
+            String description,
+            String citation,
+            Origin symbolAt,
+            Origin unitAt) {
+        /** A demand whose parts all stand where its value stands. */
+        public Demand(String tag, String symbol, boolean atMost, Typed value, String description, String citation) {
+            this(tag, symbol, atMost, value, description, citation, value.origin(), value.origin());
+        }
+    }
 
     /** @param open true until confirmed */
     public record Assumption(String text, String basis, String owner, boolean open) {}

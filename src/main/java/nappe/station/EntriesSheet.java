@@ -7,6 +7,7 @@ import java.util.Map;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
+import nappe.calculation.Place;
 import nappe.calculation.Scope;
 import nappe.calculation.SheetDraft;
 import nappe.calculation.TableDraft;
@@ -46,7 +47,7 @@ final class EntriesSheet {
         this.sheet = sheet;
     }
 
-    /** Lays the entries of an element; its scope then knows them. */
+    /** Lays the entries of an element, whose scope knows the tables it chooses from, and then knows the entries too. */
     void lay(Design.Element element, MethodSheet method, Scope scope) {
         TableDraft table = sheet.table(element.tag() + "  " + title(element, method), ENTRY_COLUMNS);
         for (Item item : method.items()) {
@@ -67,9 +68,7 @@ final class EntriesSheet {
         Design.Typed typed = element.typed().get(given.symbol());
         Value value = typed == null ? new Value.None(Value.NOT_GIVEN) : typed.value();
         Unit unit = typed == null ? given.unit() : typed.unit();
-        Cell cell = given.optional() || value instanceof Value.None
-                ? cells.optional(table.place(2), given.symbol(), unit, value, given.sign())
-                : cells.typed(Cell.Kind.ENTRY, table.place(2), given.symbol(), unit, value, given.sign());
+        Cell cell = cell(table.place(2), given, unit, value, scope);
         Cell working = cells.factors().toWorking(table.place(4), given.symbol(), cell);
         scope.put(given.symbol(), working);
         table.add(List.of(
@@ -81,6 +80,16 @@ final class EntriesSheet {
                 new Block.Text(unitText(working.unit())),
                 new Block.Text(typed == null ? "" : typed.source()),
                 new Block.Text(typed == null ? "" : typed.standing())));
+    }
+
+    private Cell cell(Place place, Item.Given given, Unit unit, Value value, Scope scope) {
+        boolean mayBeBlank = given.optional() || value instanceof Value.None;
+        if (given.from() == Item.From.CHOICE) {
+            return cells.choice(place, given.symbol(), value, Sources.keys(scope, given.table()), mayBeBlank);
+        }
+        return mayBeBlank
+                ? cells.optional(place, given.symbol(), unit, value, given.sign())
+                : cells.typed(Cell.Kind.ENTRY, place, given.symbol(), unit, value, given.sign());
     }
 
     /** Lays the demands and returns the working cell of each. */

@@ -145,9 +145,9 @@ public final class PackageLayout {
         Map<String, Scope> scopes = new LinkedHashMap<>();
         for (Design.Element element : design.elements()) {
             Scope scope = Scope.ofElement();
+            method(element).tables().values().forEach(table -> sources.layTable(table, scope));
             entries.lay(element, method(element), scope);
             constants.getOrDefault(element.method(), Map.of()).forEach(scope::put);
-            method(element).tables().values().forEach(table -> sources.layTable(table, scope));
             scopes.put(element.tag(), scope);
         }
         Map<Design.Demand, Cell> demands = entries.layDemands(design.demands());
@@ -176,7 +176,10 @@ public final class PackageLayout {
             }
             SheetDraft ratingSheet = ratingSheets.get(element.tag());
             if (ratingSheet != null) {
-                ratings.put(element.tag(), rating(element, method, items, scope, ratingSheet, trialRows));
+                Block.Table table = rating(element, method, items, scope, ratingSheet, trialRows);
+                ratings.put(element.tag(), table);
+                new RatingCurve(cells, method, ratingSheet)
+                        .lay(table, method.ratings().get(0), "Rating curve of " + element.tag(), caseNames, caseScopes);
             }
             downstream = caseScopes;
             below = method;
@@ -265,7 +268,10 @@ public final class PackageLayout {
         if (below == null && (role.equals("water level") || role.equals("energy level"))) {
             return cases.level(c);
         }
-        throw new IllegalStateException("nothing downstream gives a " + role);
+        throw new StationException(List.of(new DesignFault(
+                new Design.Origin("Project", ""),
+                "nothing downstream gives a " + role + " to this element; put an element below it that does, or take it away",
+                "link-missing")));
     }
 
     private List<ElementSheet.Demanded> demanded(Design.Element element, Map<Design.Demand, Cell> cells) {

@@ -22,6 +22,9 @@ import nappe.unit.Unit;
 final class Sources {
     private static final int LONG_WORDS = 20;
 
+    /** Behind the name of a table: its first column. No column can have this name. */
+    private static final String KEY = ".(key)";
+
     private final Cells cells;
     private final SheetDraft constants;
     private final SheetDraft tables;
@@ -83,6 +86,11 @@ final class Sources {
         columns.forEach(scope::put);
     }
 
+    /** The words of a table that was laid, from which an entry chooses. */
+    static Run keys(Scope scope, String table) {
+        return (Run) java.util.Objects.requireNonNull(scope.find(table + KEY));
+    }
+
     private Map<String, Run> lay(CitedTable table) {
         tables.heading(table.title());
         tables.note("Source: " + table.source());
@@ -94,6 +102,8 @@ final class Sources {
         if (!remarks.isEmpty()) {
             lay(table, remarks, standing, table.title(), known);
         }
+        String keys = table.name() + "." + table.columns().get(0).symbol();
+        known.put(table.name() + KEY, java.util.Objects.requireNonNull(known.get(keys)));
         return known;
     }
 
@@ -110,7 +120,7 @@ final class Sources {
             heads.add(head(key));
         }
         columns.forEach(column -> heads.add(head(column)));
-        TableDraft draft = sheet.table(title, heads);
+        TableDraft draft = repeatsKey ? sheet.workbookTable(title, heads, table.rows()) : sheet.table(title, heads);
         List<List<Cell>> cellsOf = new ArrayList<>();
         columns.forEach(column -> cellsOf.add(new ArrayList<>()));
         for (int r = 0; r < table.rows(); r++) {

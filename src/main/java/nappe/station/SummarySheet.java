@@ -197,7 +197,7 @@ final class SummarySheet {
                 + " its worst over the cases. Margin: what is left to the limit over the size of the bound, unless the limit names another"
                 + " scale; for lengths and levels demanded by others, what is left in the working unit.");
         TableDraft table = summary.table("Limits, the worst first", List.of(
-                new Block.Column("No.", 6, Block.Align.RIGHT),
+                new Block.Column("Rank", 6, Block.Align.RIGHT),
                 new Block.Column("Element", 9, Block.Align.LEFT),
                 new Block.Column("Limit", 44, Block.Align.LEFT),
                 new Block.Column("Worst verdict", 15, Block.Align.LEFT),
@@ -233,7 +233,7 @@ final class SummarySheet {
 
     private void matrix(List<LimitResult> limits) {
         List<Block.Column> columns = new ArrayList<>(List.of(
-                new Block.Column("No.", 6, Block.Align.RIGHT),
+                new Block.Column("Line", 6, Block.Align.RIGHT),
                 new Block.Column("Element", 9, Block.Align.LEFT),
                 new Block.Column("Limit", 44, Block.Align.LEFT)));
         List<Integer> widths = List.of(15, 12, 14, 14, 26, 28);
@@ -244,7 +244,9 @@ final class SummarySheet {
         for (int i = 0; i < limits.size(); i++) {
             LimitResult limit = limits.get(i);
             List<Block.Item> row = new ArrayList<>(List.of(
-                    new Block.Text(Integer.toString(i + 1)), new Block.Text(limit.tag()), new Block.Text(limit.label())));
+                    new Block.Text(Integer.toString(i + 1)),
+                    new Block.Jump(limit.tag(), limit.verdicts().get(0)),
+                    new Block.Text(limit.label())));
             for (int c = 0; c < caseNames.size(); c++) {
                 Scope scope = Scope.ofElement();
                 scope.put("verdict", limit.verdicts().get(limit.forAll() ? 0 : c));

@@ -103,7 +103,8 @@ class MethodReaderTest {
     void aTableByAWordIsARowAndALookUpPerColumn() {
         assertThat(formula("i_T1")).isEqualTo("match(size, pretend-sizes.size)");
         assertThat(formula("C")).isEqualTo("index(pretend-sizes.C, i_T1)");
-        assertThat(formula("d_T")).isEqualTo("index(pretend-sizes.d, i_T1)*1 mm");
+        assertThat(formula("d_T")).isEqualTo(
+                "if(is_number(index(pretend-sizes.d, i_T1)), index(pretend-sizes.d, i_T1)*1 mm, none(\"not given\"))");
         assertThat(line("C").source()).isEqualTo("INV p. 5 (from memory)");
         assertThat(line("d_T").mayBeBlank()).isTrue();
         assertThat(line("C").mayBeBlank()).isFalse();
@@ -113,7 +114,7 @@ class MethodReaderTest {
     @Test
     void aTableBetweenNumbersIsAShareOfTheWayInCellsOfTheirOwn() {
         assertThat(formula("x_T2")).isEqualTo("min(max(b/1 mm, index(pretend-curve.r, 1)), index(pretend-curve.r, 3))");
-        assertThat(formula("i_T2")).isEqualTo("min(match_below(x_T2 + 6E-8, pretend-curve.r), 2)");
+        assertThat(formula("i_T2")).isEqualTo("min(match_below(x_T2, pretend-curve.r), 2)");
         assertThat(formula("d_T2")).isEqualTo("index(pretend-curve.r, i_T2 + 1) - index(pretend-curve.r, i_T2)");
         assertThat(formula("t_T2")).isEqualTo("(x_T2 - index(pretend-curve.r, i_T2))/d_T2");
         assertThat(formula("c")).isEqualTo(
@@ -123,7 +124,7 @@ class MethodReaderTest {
     @Test
     void aTableBetweenNumbersBringsTheLimitsOfItsEnds() {
         assertThat(TROUGH.limits().subList(0, 2)).extracting(Limit::label).containsExactly(
-                "b is inside the table pretend-curve, lower end", "b is inside the table pretend-curve, upper end");
+                "width is within the table, lower end: Pretend table", "width is within the table, upper end: Pretend table");
     }
 
     @Test

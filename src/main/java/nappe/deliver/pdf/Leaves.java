@@ -70,6 +70,8 @@ final class Leaves {
             return under(headings, note(note));
         } else if (block instanceof Block.Figure figure) {
             return under(headings, pictures.parts(figure, width, width > page.upright()));
+        } else if (block instanceof Block.Chart) {
+            return under(headings, List.of());
         }
         throw new IllegalArgumentException("unknown block " + block);
     }

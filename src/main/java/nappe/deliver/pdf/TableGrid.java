@@ -127,6 +127,8 @@ final class TableGrid {
         } else if (item instanceof Block.Address address) {
             return new View.Text(
                     "whole", List.of(Piece.plain(links.address(address.cell()))), links.to(address.cell()));
+        } else if (item instanceof Block.Jump jump) {
+            return new View.Text("", List.of(Piece.plain(jump.text())), links.to(jump.to()));
         } else if (item instanceof Block.SheetLink link) {
             return new View.Text(
                     "", List.of(Piece.plain(link.number() + "\u2002" + link.title())), Links.to(link.number()));

@@ -1,9 +1,12 @@
 package nappe.deliver.xlsx;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
+import nappe.calculation.Allowed;
 import nappe.calculation.Block.Align;
 import nappe.calculation.Cell;
 import nappe.calculation.Place;
@@ -119,6 +122,19 @@ final class Canvas {
         links.add(new Link(new Place(sheet, row, column), to));
     }
 
+    /** A small text without a box that leads to a place. */
+    void plainLink(int row, int column, String text, String to) {
+        rows.put(row, column, styles.of(Role.BACK, Align.LEFT), texts.text(text));
+        columns.fit(column, text);
+        grow(row, Role.BACK, text, columns.width(column));
+        leads(row, column, to);
+    }
+
+    /** Makes what stands in a cell lead to a place. */
+    void leads(int row, int column, String to) {
+        links.add(new Link(new Place(sheet, row, column), to));
+    }
+
     /** A text over the width of the sheet, in a row of its own. */
     void wide(int row, Role role, String text) {
         int style = styles.of(role, Align.LEFT);
@@ -170,11 +186,15 @@ final class Canvas {
         return links;
     }
 
-    /** The places where the engineer types a number. */
-    List<Place> numbersTyped() {
-        return written.stream()
-                .filter(cell -> cell.kind() == Cell.Kind.ENTRY && !(cell.typed() instanceof Value.Word))
-                .map(Cell::place)
-                .toList();
+    /** Where something is typed, by what may be typed there. */
+    Map<Allowed, List<Place>> typedInto() {
+        Map<Allowed, List<Place>> places = new LinkedHashMap<>();
+        for (Cell cell : written) {
+            Allowed allowed = cell.allowed();
+            if (allowed != null) {
+                places.computeIfAbsent(allowed, key -> new ArrayList<>()).add(cell.place());
+            }
+        }
+        return places;
     }
 }

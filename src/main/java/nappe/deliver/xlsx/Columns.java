@@ -15,7 +15,7 @@ final class Columns {
             new Block.Column("Equation", 34, Block.Align.LEFT),
             new Block.Column("Unit", 9, Block.Align.LEFT),
             new Block.Column("Source", 28, Block.Align.LEFT),
-            new Block.Column("All cases", 13, Block.Align.RIGHT));
+            new Block.Column("All cases", 16, Block.Align.RIGHT));
 
     private static final int CASE = 13;
     private static final int NARROWEST = 5;

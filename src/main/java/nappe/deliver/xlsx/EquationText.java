@@ -5,6 +5,7 @@ import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.formula.Formula;
 import nappe.formula.PlainReading;
+import org.jspecify.annotations.Nullable;
 
 /** The formula of a line or a cell as text in symbols, or what is said in its place. */
 final class EquationText {
@@ -12,16 +13,21 @@ final class EquationText {
 
     /** What the layout says in place of a formula, or the formula itself. */
     static String of(Block.Line line) {
-        Cell cell = Stream.concat(Stream.ofNullable(line.forAll()), line.perCase().stream())
+        Formula formula = formula(line);
+        return formula == null || isWords(line) ? line.equation() : PlainReading.of(line.symbol(), formula);
+    }
+
+    /** Whether the layout says something in place of the formula. */
+    static boolean isWords(Block.Line line) {
+        Formula formula = formula(line);
+        return !line.equation().isEmpty() && (formula == null || !line.equation().equals(PlainReading.of(formula)));
+    }
+
+    private static @Nullable Formula formula(Block.Line line) {
+        return Stream.concat(Stream.ofNullable(line.forAll()), line.perCase().stream())
                 .findFirst()
+                .map(Cell::formula)
                 .orElse(null);
-        Formula formula = cell == null ? null : cell.formula();
-        if (formula == null) {
-            return line.equation();
-        }
-        String text = PlainReading.of(formula);
-        boolean itself = line.equation().isEmpty() || line.equation().equals(text);
-        return itself ? PlainReading.of(line.symbol(), formula) : line.equation();
     }
 
     /** The formula of a cell; for a typed one what kind it is. */

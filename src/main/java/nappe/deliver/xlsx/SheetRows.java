@@ -8,6 +8,7 @@ import nappe.formula.Value;
 /** The rows of one sheet, written without the help of a library, in ascending order. */
 final class SheetRows {
     private static final double TALLEST = 409;
+    private static final double PLAIN = 13;
 
     private record Filled(int style, Filling content) {}
 
@@ -48,6 +49,11 @@ final class SheetRows {
                 .mapToInt(TreeMap::lastKey)
                 .max()
                 .orElse(0);
+    }
+
+    /** The height of a row in points; of one that asks for none, that of plain type. */
+    double height(int row) {
+        return heights.getOrDefault(row, PLAIN);
     }
 
     String dimension() {

@@ -17,19 +17,30 @@ import nappe.formula.Value;
 import nappe.results.Digits;
 import nappe.results.Furniture;
 import nappe.results.Results;
+import org.jspecify.annotations.Nullable;
 
 /**
  * The blocks of one sheet into rows. A cell is written at its own place, and the texts that belong to it in the same
  * row; a cell of another sheet becomes a link to it.
  */
 final class SheetWriter {
+    /** The sheet to which each other leads back. */
+    private static final String INDEX = "Index";
+
     /** Rows that the sheet's own header takes. */
     static final int HEADER_ROWS = 4;
+
+    private static final double CHART_ROW = 15;
+
+    /** A table of no more rows is kept on one page. */
+    private static final int SMALL_TABLE = 8;
 
     private final Results results;
     private final Sheet sheet;
     private final Canvas canvas;
     private final List<Integer> heads = new ArrayList<>();
+    private final List<Block.Chart> charts = new ArrayList<>();
+    private final List<Pages.Kept> kept = new ArrayList<>();
     private int headOfLines = -1;
 
     SheetWriter(Results results, Sheet sheet, Styles styles, SharedTexts texts) {
@@ -40,7 +51,11 @@ final class SheetWriter {
 
     SheetWriter write() {
         header();
+        int headings = -1;
         for (Block block : sheet.blocks()) {
+            int first = headings < 0 ? block.row() : headings;
+            headings = block instanceof Block.Heading ? first : -1;
+            kept.add(new Pages.Kept(first, lastKept(block)));
             if (block instanceof Block.Heading heading) {
                 canvas.wide(heading.row(), Role.HEADING, Canvas.tidy(heading.text()));
             } else if (block instanceof Block.Note note) {
@@ -53,9 +68,29 @@ final class SheetWriter {
                 table(only.table());
             } else if (block instanceof Block.Lines lines) {
                 lines(lines);
+            } else if (block instanceof Block.Chart chart) {
+                for (int row = 0; row < chart.rows(); row++) {
+                    canvas.gap(chart.row() + row, CHART_ROW);
+                }
+                charts.add(chart);
             }
         }
         return this;
+    }
+
+    /** A chart is kept whole, of a table its title, its head and two rows, of lines two. */
+    private static int lastKept(Block block) {
+        if (block instanceof Block.Chart chart) {
+            return chart.row() + chart.rows() - 1;
+        }
+        if (block instanceof Block.Table table) {
+            int last = table.row() + (table.title().isEmpty() ? 0 : 1) + table.rows().size();
+            return Math.min(table.row() + (table.rows().size() <= SMALL_TABLE ? SMALL_TABLE + 1 : 3), last);
+        }
+        if (block instanceof Block.WorkbookOnly only) {
+            return lastKept(only.table());
+        }
+        return block instanceof Block.Lines lines ? lines.row() + Math.min(2, lines.lines().size()) : block.row();
     }
 
     private void header() {
@@ -69,7 +104,18 @@ final class SheetWriter {
                 .filter(text -> !text.isEmpty())
                 .map(text -> text.endsWith(".") ? text : text + ".")
                 .toList()));
-        canvas.gap(3, 6);
+        String index = results.sheets().stream()
+                .map(Sheet::name)
+                .filter(name -> name.equals(INDEX) && !name.equals(sheet.name()))
+                .map(name -> new Place(name, 0, 0).full())
+                .findFirst()
+                .orElse("");
+        if (index.isEmpty()) {
+            canvas.gap(3, 6);
+        } else {
+            canvas.leads(0, 0, index);
+            canvas.plainLink(3, 0, INDEX, index);
+        }
     }
 
     private void table(Block.Table table) {
@@ -109,6 +155,8 @@ final class SheetWriter {
             canvas.text(row, column, Role.TEXT, align, EquationText.of(equation.cell()));
         } else if (item instanceof Block.Address address) {
             canvas.link(row, column, align, address.cell().place().from(sheet.name()), address.cell().place().full());
+        } else if (item instanceof Block.Jump jump) {
+            canvas.link(row, column, align, jump.text(), jump.to().place().full());
         } else if (item instanceof Block.SheetLink link) {
             canvas.link(row, column, align, link.number() + "  " + link.title(), new Place(link.sheetName(), 0, 0).full());
         }
@@ -136,7 +184,13 @@ final class SheetWriter {
         canvas.text(row, 0, role, Align.LEFT, line.code());
         canvas.text(row, 1, role, Align.LEFT, line.description());
         canvas.symbol(row, 2, line.symbol(), Align.LEFT);
-        canvas.text(row, 3, Role.TEXT, Align.LEFT, EquationText.of(line));
+        String equation = EquationText.of(line);
+        Place origin = origin(line);
+        if (origin == null) {
+            canvas.text(row, 3, Role.TEXT, Align.LEFT, equation);
+        } else {
+            canvas.link(row, 3, Align.LEFT, equation, origin.full());
+        }
         canvas.text(row, 4, Role.TEXT, Align.LEFT, line.unit());
         canvas.text(row, 5, Role.TEXT, Align.LEFT, line.source());
         Role result = line.kind() == Block.LineKind.LIMIT_VERDICT ? Role.VERDICT : Role.RESULT;
@@ -148,6 +202,23 @@ final class SheetWriter {
         for (Cell cell : line.perCase()) {
             canvas.cell(row, ++column, cell, Align.RIGHT, result);
         }
+    }
+
+    /**
+     * Where a line comes from, if words stand in place of its formula and it rests on a cell of another sheet: an entry,
+     * a constant, the trial rows of a root. Of several cases that of the first.
+     */
+    private @Nullable Place origin(Block.Line line) {
+        Cell cell = line.forAll() != null ? line.forAll() : line.perCase().isEmpty() ? null : line.perCase().get(0);
+        if (cell == null || line.symbol().isEmpty() || !EquationText.isWords(line)) {
+            return null;
+        }
+        return cell.references().values().stream()
+                .filter(reference -> reference instanceof Cell other && !canvas.isHere(other))
+                .map(reference -> ((Cell) reference).place())
+                .filter(place -> !place.sheet().equals("Constants") || line.equation().contains("Constants"))
+                .findFirst()
+                .orElse(null);
     }
 
     private void head(int row, List<Block.Column> heads) {
@@ -164,6 +235,15 @@ final class SheetWriter {
 
     Canvas canvas() {
         return canvas;
+    }
+
+    /** Rows that belong on one page, each from its heading on. */
+    List<Pages.Kept> kept() {
+        return kept;
+    }
+
+    List<Block.Chart> charts() {
+        return charts;
     }
 
     /** The row whose heads matter on every page: that of a calculation, or of the only table; -1 for none. */

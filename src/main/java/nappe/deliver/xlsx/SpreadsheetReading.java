@@ -165,6 +165,9 @@ public final class SpreadsheetReading implements Reading<Written> {
             String sign = comparison.comparator().sign();
             return new Written(a.within(ARITHMETIC) + sign + b.within(ARITHMETIC), Written.CONDITION);
         }
+        if (isNought(comparison.right())) {
+            return new Written(a.within(ARITHMETIC) + comparison.comparator().sign() + "0", Written.CONDITION);
+        }
         String slack = "1E-9*ABS(" + b.text() + ")";
         String over = a.within(ARITHMETIC) + "-" + b.within(ARITHMETIC + 1);
         String under = b.within(ARITHMETIC) + "-" + a.within(ARITHMETIC + 1);
@@ -178,6 +181,12 @@ public final class SpreadsheetReading implements Reading<Written> {
                     case UNLIKE -> "ABS(" + over + ")>" + slack;
                 },
                 Written.CONDITION);
+    }
+
+    /** Against a plain 0 the tolerance is 0, and the comparison is written as it is. */
+    private static boolean isNought(Formula formula) {
+        return formula instanceof Formula.Numeral numeral && numeral.value() == 0
+                || formula instanceof Formula.Quantity quantity && quantity.value() == 0;
     }
 
     @Override

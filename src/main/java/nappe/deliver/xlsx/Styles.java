@@ -11,11 +11,12 @@ import org.apache.poi.ss.usermodel.HorizontalAlignment;
 import org.apache.poi.ss.usermodel.IndexedColors;
 import org.apache.poi.ss.usermodel.VerticalAlignment;
 import org.apache.poi.xssf.usermodel.XSSFCellStyle;
+import org.apache.poi.xssf.usermodel.XSSFColor;
 import org.apache.poi.xssf.usermodel.XSSFFont;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /**
- * The cell styles of the package. What was typed by the engineer is slanted, stands in a box of thick dashes and is not locked; a
+ * The cell styles of the package. What was typed by the engineer is slanted, stands in a box of dashes and is not locked; a
  * cited number stands in a black box, all else in a grey one. Nothing rests on colour. No hatching: Gnumeric makes it black.
  */
 final class Styles {
@@ -33,6 +34,8 @@ final class Styles {
      */
     private static final String ROOM = "_)";
 
+    private static final byte[] HEAD_GREY = {(byte) 0xFF, (byte) 0xE6, (byte) 0xE6, (byte) 0xE6};
+
     /** What a cell is there for. */
     enum Role {
         SHEET_TITLE(14, true),
@@ -45,6 +48,7 @@ final class Styles {
         TEXT(POINTS, false),
         STRONG(POINTS, true),
         LINK(POINTS, false),
+        BACK(8, false),
         RESULT(POINTS, false),
         VERDICT(POINTS, true),
         ENTRY(POINTS, false),
@@ -99,7 +103,7 @@ final class Styles {
         XSSFCellStyle style = workbook.createCellStyle();
         XSSFFont font = font(workbook, role.points, role.bold);
         font.setItalic(role == Role.ENTRY);
-        if (role == Role.LINK) {
+        if (role == Role.LINK || role == Role.BACK) {
             font.setUnderline(Font.U_SINGLE);
         }
         style.setFont(font);
@@ -117,14 +121,14 @@ final class Styles {
             style.setDataFormat(workbook.createDataFormat().getFormat(look.format + ROOM));
         }
         switch (role) {
-            case SHEET_TITLE, FURNITURE, HEADING, NOTE, CAUTION, TABLE_TITLE -> {}
+            case SHEET_TITLE, FURNITURE, HEADING, NOTE, CAUTION, TABLE_TITLE, BACK -> {}
             case HEAD -> {
-                box(style, BorderStyle.THIN, IndexedColors.BLACK);
+                box(style, BorderStyle.THIN, IndexedColors.GREY_40_PERCENT);
                 style.setFillPattern(FillPatternType.SOLID_FOREGROUND);
-                style.setFillForegroundColor(IndexedColors.GREY_25_PERCENT.getIndex());
+                style.setFillForegroundColor(new XSSFColor(HEAD_GREY, null));
             }
             case ENTRY -> {
-                box(style, BorderStyle.MEDIUM_DASHED, IndexedColors.BLACK);
+                box(style, BorderStyle.DASHED, IndexedColors.BLACK);
                 style.setLocked(false);
             }
             case CONSTANT -> box(style, BorderStyle.THIN, IndexedColors.BLACK);

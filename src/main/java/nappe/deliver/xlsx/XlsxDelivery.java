@@ -81,7 +81,7 @@ public final class XlsxDelivery {
         for (Sheet sheet : results.sheets()) {
             SheetWriter writer = new SheetWriter(results, sheet, styles, texts).write();
             XSSFSheet frame = workbook.createSheet(sheet.name());
-            new SheetFrame(workbook, frame, writer).set(results.furniture(), results.sheets().size());
+            new SheetFrame(workbook, frame, writer, results::value).set(results.furniture(), results.sheets().size());
             parts.put(frame.getPackagePart().getPartName().getName(), writer.canvas().rows());
             written.addAll(writer.canvas().written());
         }
