@@ -82,9 +82,8 @@ public final class DrawnStation {
         return new Typed(value, Unit.parse(unit), "made up", "known", new Design.Origin("Made up", "A1"));
     }
 
-    /** Writes packages to a folder, to be looked at. */
-    public static void main(String[] arguments) throws IOException {
-        Path folder = Path.of(arguments[0]);
+    /** Devices of all kinds, small and large, free and not. */
+    public static Map<String, Results> all() {
         Map<String, Results> all = new LinkedHashMap<>();
         all.put("inch", flume(WorkingSystem.US, "1 in", 0.1, 99.9));
         all.put("six", flume(WorkingSystem.SI, "6 in", 0.05, 100.1));
@@ -96,7 +95,13 @@ public final class DrawnStation {
         all.put("weir", weir(2.0, 2.0, 0.3, 0.4, 99.8));
         all.put("smallweir", weir(0.2, 1.2, 0.6, 0.01, 99.0));
         all.put("wetweir", weir(0.6, 1.2, 0.6, 0.1, 100.1));
-        for (Map.Entry<String, Results> one : all.entrySet()) {
+        return all;
+    }
+
+    /** Writes packages to a folder, to be looked at. */
+    public static void main(String[] arguments) throws IOException {
+        Path folder = Path.of(arguments[0]);
+        for (Map.Entry<String, Results> one : all().entrySet()) {
             Files.write(folder.resolve(one.getKey() + ".pdf"), PdfDelivery.render(one.getValue()).bytes());
         }
     }

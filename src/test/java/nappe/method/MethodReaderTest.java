@@ -103,7 +103,8 @@ class MethodReaderTest {
     void aTableByAWordIsARowAndALookUpPerColumn() {
         assertThat(formula("i_T1")).isEqualTo("match(size, pretend-sizes.size)");
         assertThat(formula("C")).isEqualTo("index(pretend-sizes.C, i_T1)");
-        assertThat(formula("d_T")).isEqualTo("index(pretend-sizes.d, i_T1)*1 mm");
+        assertThat(formula("d_T")).isEqualTo(
+                "if(is_number(index(pretend-sizes.d, i_T1)), index(pretend-sizes.d, i_T1)*1 mm, none(\"not given\"))");
         assertThat(line("C").source()).isEqualTo("INV p. 5 (from memory)");
         assertThat(line("d_T").mayBeBlank()).isTrue();
         assertThat(line("C").mayBeBlank()).isFalse();

@@ -178,10 +178,22 @@ final class Sketch {
         return piece.shift() == Piece.Shift.NONE ? 1 : SUB;
     }
 
-    Picture finish(double height, String words) {
+    /** @param least height in mm; it becomes higher where a mark reaches lower */
+    Picture finish(double least, String words) {
         List<Ink> inks = new ArrayList<>(strokes);
         texts.forEach(text -> inks.add(new Ink.Fill(1, text.corners())));
         inks.addAll(texts);
-        return new Picture(width, height, words, List.copyOf(inks));
+        double height = inks.stream()
+                .flatMap(ink -> points(ink).stream())
+                .mapToDouble(point -> point.y() + 0.3)
+                .max()
+                .orElse(0);
+        return new Picture(width, Math.max(least, height), words, List.copyOf(inks));
+    }
+
+    private static List<At> points(Ink ink) {
+        return ink instanceof Ink.Stroke stroke
+                ? stroke.points()
+                : ink instanceof Ink.Fill fill ? fill.points() : ((Ink.Lettering) ink).corners();
     }
 }
