@@ -38,7 +38,7 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
 
     private static int refused(PrintWriter err, List<Fault> faults) {
         faults.forEach(fault -> err.println(fault));
-        err.println(faults.size() == 1 ? "1 fault; nothing was written." : faults.size() + " faults; nothing was written.");
+        err.println(faults.size() == 1 ? "1 fault; no package was written." : faults.size() + " faults; no package was written.");
         return ExitStatus.INPUT_REFUSED;
     }
 

@@ -19,13 +19,16 @@ final class InspectCommand implements Callable<Integer> {
     @Parameters(paramLabel = "IN.xlsx", description = "the input workbook")
     private Path input;
 
+    @CommandLine.Mixin
+    private MarkedOption marked = new MarkedOption();
+
     @CommandLine.Spec
     private CommandLine.Model.CommandSpec spec;
 
     @Override
     public Integer call() {
         Desk desk = new Desk();
-        Design design = desk.read(input);
+        Design design = marked.read(desk, input);
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
         Job.Done done = desk.compute(input, design);
         PrintWriter out = spec.commandLine().getOut();

@@ -41,13 +41,16 @@ final class IssueCommand implements Callable<Integer> {
     @Option(names = "-o", paramLabel = "FOLDER", defaultValue = "output", description = "where the package goes (default: output)")
     private Path folder;
 
+    @CommandLine.Mixin
+    private MarkedOption marked = new MarkedOption();
+
     @CommandLine.Spec
     private CommandLine.Model.CommandSpec spec;
 
     @Override
     public Integer call() throws IOException {
         Desk desk = new Desk();
-        Design design = desk.read(input);
+        Design design = marked.read(desk, input);
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
         PackageFolder target = PackageFolder.of(folder, design.project().number(), design.project().revision());
         target.refuseIfIssued();

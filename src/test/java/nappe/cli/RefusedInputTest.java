@@ -134,7 +134,7 @@ class RefusedInputTest {
         assertThat(said.status()).as(said.err()).isEqualTo(ExitStatus.INPUT_REFUSED);
         assertThat(said.out()).isEmpty();
         assertThat(said.err())
-                .contains(input.getFileName().toString(), "(fault: ", "nothing was written")
+                .contains(input.getFileName().toString(), "(fault: ", "no package was written")
                 .doesNotContain("\tat ", "Exception", "nappe.", "org.apache");
         assertThat(out).doesNotExist();
         Said inspected = NappeTest.nappe("inspect", input);
@@ -163,7 +163,7 @@ class RefusedInputTest {
         Said said = refused(filler.save(folder.resolve("station.xlsx")));
         assertThat(said.err())
                 .contains("cell " + at("z_f", "C"), "cell " + at("size", "C"), "cell " + flow(2, "D"), "cell " + flow(3, "A"),
-                        "cell " + demand("A"), "5 faults; nothing was written.");
+                        "cell " + demand("A"), "5 faults; no package was written.");
     }
 
     @Test
