@@ -130,6 +130,7 @@ public final class PackageLayout {
         }
         SheetDraft assumptionSheet = draft("Assumptions", "Assumptions", "each with basis and owner, open or closed");
         SheetDraft glossarySheet = draft("Glossary", "Glossary and dependence", "every symbol, what it rests on, what rests on it");
+        SheetDraft registerSheet = draft("Register", "Register of results", "every result with its case, sheet, line and cell (workbook)");
         SheetDraft checkerSheet = draft("Checker", "Checker's record", "every formula with its cell, room for tick, initials and comment");
         SheetDraft referenceSheet = draft("References", "References", "publications and tables cited");
         SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
@@ -190,6 +191,9 @@ public final class PackageLayout {
         SummarySheet.Sorted sorted = new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
         CheckerSheets.glossary(glossarySheet, linesOf);
         CheckerSheets.formulas(checkerSheet, linesOf);
+        Map<String, Integer> numbers = new LinkedHashMap<>();
+        elementSheets.forEach((tag, sheet) -> numbers.put(tag, drafts.indexOf(sheet) + 1));
+        RegisterSheet.lay(registerSheet, cells, linesOf, numbers, caseNames);
         limitSheet.figure("Margins of the limits", LIMITS_FIGURE);
         back.assumptions(assumptionSheet);
         back.references(referenceSheet, distinct);
