@@ -82,7 +82,7 @@ class NappeTest {
                 .entry("F1", "z_f", 100, "ft", "invented", "known")
                 .save(file);
         Said inspected = nappe("inspect", file);
-        assertThat(inspected.err()).isEmpty();
+        assertThat(inspected.err()).isEqualTo("remark: revision A is not among the revisions on sheet Revisions\n");
         assertThat(inspected.status()).isZero();
         assertThat(inspected.out()).contains("no faults", "flow is free: submergence");
         assertThat(files(folder)).hasSize(1);
