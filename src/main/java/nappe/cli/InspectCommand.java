@@ -13,7 +13,8 @@ import picocli.CommandLine.Parameters;
 @Command(
         name = "inspect",
         mixinStandardHelpOptions = true,
-        description = "Read an input workbook, report every fault at its cell or the verdicts on its limits, and write nothing.",
+        description =
+                "Read an input workbook, report every fault at its cell or the verdicts on its limits, and write nothing.",
         footer = {"", "Example:", "  nappe inspect headworks.xlsx"})
 final class InspectCommand implements Callable<Integer> {
     @Parameters(paramLabel = "IN.xlsx", description = "the input workbook")

@@ -16,7 +16,8 @@ final class MarkedOption {
     @Option(
             names = "--marked",
             paramLabel = "COPY.xlsx",
-            description = "where the input is refused, write a copy with a note on each faulty cell; it must not be there yet")
+            description =
+                    "where the input is refused, write a copy with a note on each faulty cell; it must not be there yet")
     private @Nullable Path copy;
 
     @CommandLine.Spec(CommandLine.Spec.Target.MIXEE)
@@ -42,9 +43,13 @@ final class MarkedOption {
         }
         try {
             int cells = MarkedCopy.write(input, target, refused.faults());
-            spec.commandLine().getErr().println(
-                    cells == 0 ? "nappe: no fault stands in a cell; no marked copy was written" : "Wrote " + target + ", " + cells
-                            + (cells == 1 ? " cell marked" : " cells marked"));
+            spec.commandLine()
+                    .getErr()
+                    .println(
+                            cells == 0
+                                    ? "nappe: no fault stands in a cell; no marked copy was written"
+                                    : "Wrote " + target + ", " + cells
+                                            + (cells == 1 ? " cell marked" : " cells marked"));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }

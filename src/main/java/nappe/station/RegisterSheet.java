@@ -40,7 +40,9 @@ final class RegisterSheet {
             List<Block.Line> results = lines.stream()
                     .filter(line -> line.forAll() != null || !line.perCase().isEmpty())
                     .toList();
-            int rows = results.stream().mapToInt(line -> Math.max(1, line.perCase().size())).sum();
+            int rows = results.stream()
+                    .mapToInt(line -> Math.max(1, line.perCase().size()))
+                    .sum();
             TableDraft table = sheet.workbookTable("Register of " + tag, COLUMNS, rows);
             String number = Integer.toString(numbers.getOrDefault(tag, 0));
             for (Block.Line line : results) {
@@ -48,7 +50,13 @@ final class RegisterSheet {
                     row(table, cells, number, line, "all cases", line.forAll());
                 }
                 for (int c = 0; c < line.perCase().size(); c++) {
-                    row(table, cells, number, line, caseNames.get(c), line.perCase().get(c));
+                    row(
+                            table,
+                            cells,
+                            number,
+                            line,
+                            caseNames.get(c),
+                            line.perCase().get(c));
                 }
             }
         });

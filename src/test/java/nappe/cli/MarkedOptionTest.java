@@ -30,11 +30,22 @@ class MarkedOptionTest {
     @Test
     void aRefusedWorkbookComesBackWithANoteOnTheFaultyCell() throws IOException {
         Path copy = folder.resolve("copy.xlsx");
-        assertThat(run("issue", faulty().toString(), "-o", folder.resolve("out").toString(), "--marked", copy.toString()))
+        assertThat(run(
+                        "issue",
+                        faulty().toString(),
+                        "-o",
+                        folder.resolve("out").toString(),
+                        "--marked",
+                        copy.toString()))
                 .startsWith("3\n")
                 .contains("1 cell marked", "1 fault; no package was written.");
         try (XSSFWorkbook marked = new XSSFWorkbook(new ByteArrayInputStream(Files.readAllBytes(copy)))) {
-            assertThat(marked.getSheet("Flows").getRow(12).getCell(3).getCellComment().getString().getString())
+            assertThat(marked.getSheet("Flows")
+                            .getRow(12)
+                            .getCell(3)
+                            .getCellComment()
+                            .getString()
+                            .getString())
                     .contains("write 12.5");
         }
         assertThat(folder.resolve("out")).doesNotExist();
@@ -43,7 +54,8 @@ class MarkedOptionTest {
     @Test
     void aFileThatIsThereIsNotWrittenOver() throws IOException {
         Path copy = Files.writeString(folder.resolve("copy.xlsx"), "mine");
-        assertThat(run("inspect", faulty().toString(), "--marked", copy.toString())).contains("is there already");
+        assertThat(run("inspect", faulty().toString(), "--marked", copy.toString()))
+                .contains("is there already");
         assertThat(copy).hasContent("mine");
     }
 
@@ -51,7 +63,8 @@ class MarkedOptionTest {
     void aSoundWorkbookLeavesNoCopy() throws IOException {
         Path copy = folder.resolve("copy.xlsx");
         Path sound = SampleStations.headworks().save(folder.resolve("sound.xlsx"));
-        assertThat(run("inspect", sound.toString(), "--marked", copy.toString())).startsWith("0\n");
+        assertThat(run("inspect", sound.toString(), "--marked", copy.toString()))
+                .startsWith("0\n");
         assertThat(copy).doesNotExist();
     }
 }

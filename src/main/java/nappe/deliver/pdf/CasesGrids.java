@@ -50,7 +50,12 @@ final class CasesGrids {
             int from = i * cases / tables;
             int to = (i + 1) * cases / tables;
             String part = tables == 1 ? "" : ", part " + (i + 1) + " of " + tables;
-            grids.add(grid(from, to, "Every case" + part + "; a value stands in the workbook in the row of its line and the column of its case", width));
+            grids.add(grid(
+                    from,
+                    to,
+                    "Every case" + part
+                            + "; a value stands in the workbook in the row of its line and the column of its case",
+                    width));
         }
         return grids;
     }
@@ -113,8 +118,10 @@ final class CasesGrids {
             head.add(View.GridCell.of("", View.Text.plain("", name)));
         }
         for (int i = from; i < to; i++) {
-            head.add(new View.GridCell("right", 1, List.of(
-                    View.Text.plain("", lines.caseNames().get(i)), View.Text.plain("small", column(i)))));
+            head.add(new View.GridCell(
+                    "right",
+                    1,
+                    List.of(View.Text.plain("", lines.caseNames().get(i)), View.Text.plain("small", column(i)))));
         }
         List<View.GridRow> body = new ArrayList<>();
         Between between = new Between(width);
