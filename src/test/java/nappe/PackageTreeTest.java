@@ -33,8 +33,12 @@ class PackageTreeTest {
             List<String> allowed = new ArrayList<>(List.of("java..", "org.jspecify..", "nappe." + name));
             words(ours).forEach(ours -> allowed.add("nappe." + ours));
             words(libraries).forEach(allowed::add);
-            return classes().that().resideInAPackage("nappe." + name)
-                    .should().onlyDependOnClassesThat().resideInAnyPackage(allowed.toArray(String[]::new));
+            return classes()
+                    .that()
+                    .resideInAPackage("nappe." + name)
+                    .should()
+                    .onlyDependOnClassesThat()
+                    .resideInAnyPackage(allowed.toArray(String[]::new));
         }
 
         private static Stream<String> words(String text) {
@@ -56,10 +60,17 @@ class PackageTreeTest {
                 new Row("job", "figure station solve results calculation method source formula unit", CSV),
                 new Row("input", "station method source formula unit", "org.apache.poi.. " + XML),
                 new Row("deliver.csv", "results calculation formula source unit", ""),
-                new Row("deliver.xlsx", "results calculation formula source unit", "org.apache.poi.. org.openxmlformats.. " + XML),
-                new Row("deliver.pdf", "results calculation formula source unit",
+                new Row(
+                        "deliver.xlsx",
+                        "results calculation formula source unit",
+                        "org.apache.poi.. org.openxmlformats.. " + XML),
+                new Row(
+                        "deliver.pdf",
+                        "results calculation formula source unit",
                         "org.thymeleaf.. org.xhtmlrenderer.. com.lowagie.. org.attoparser.. " + XML),
-                new Row("cli", "job input deliver.csv deliver.xlsx deliver.pdf station solve results calculation method source formula unit",
+                new Row(
+                        "cli",
+                        "job input deliver.csv deliver.xlsx deliver.pdf station solve results calculation method source formula unit",
                         "picocli.. org.apache.poi.util.. org.apache.poi.openxml4j.util.."));
     }
 
@@ -77,7 +88,11 @@ class PackageTreeTest {
 
     @Test
     void noTwoPackagesUseEachOther() {
-        SlicesRuleDefinition.slices().matching("nappe.(**)").should().beFreeOfCycles().check(NAPPE);
+        SlicesRuleDefinition.slices()
+                .matching("nappe.(**)")
+                .should()
+                .beFreeOfCycles()
+                .check(NAPPE);
     }
 
     @Test
@@ -86,7 +101,10 @@ class PackageTreeTest {
                 .isInstanceOf(AssertionError.class)
                 .hasMessageContaining("nappe.method.StatementReader")
                 .hasMessageContaining("nappe.formula.FormulaParser");
-        assertThatThrownBy(() -> new Row("job", "figure station solve results calculation method source formula unit", "").rule().check(NAPPE))
+        assertThatThrownBy(
+                        () -> new Row("job", "figure station solve results calculation method source formula unit", "")
+                                .rule()
+                                .check(NAPPE))
                 .isInstanceOf(AssertionError.class)
                 .hasMessageContaining("org.apache.commons.csv");
     }

@@ -42,7 +42,8 @@ public final class Tools {
     /** Runs a prepared program to its end. */
     public static void run(ProcessBuilder builder) throws IOException {
         Path log = Files.createTempFile("nappe-tool", ".log");
-        Process process = builder.redirectErrorStream(true).redirectOutput(log.toFile()).start();
+        Process process =
+                builder.redirectErrorStream(true).redirectOutput(log.toFile()).start();
         try {
             if (!process.waitFor(PATIENCE_SECONDS, TimeUnit.SECONDS)) {
                 throw new IOException(builder.command() + " did not end: " + Files.readString(log));

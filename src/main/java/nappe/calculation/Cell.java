@@ -68,7 +68,15 @@ public final class Cell implements Reference {
     /** A typed cell that may stay blank, and then holds words; a number may be typed into it later. */
     public static Cell optional(Place place, String symbol, Unit unit, Value value) {
         return new Cell(
-                Kind.ENTRY, place, symbol, unit, value, null, Map.of(), Sureness.MAY_BE_WORDS, new Allowed.Numbers(Sign.ANY));
+                Kind.ENTRY,
+                place,
+                symbol,
+                unit,
+                value,
+                null,
+                Map.of(),
+                Sureness.MAY_BE_WORDS,
+                new Allowed.Numbers(Sign.ANY));
     }
 
     /** The same typed cell, into which only such a thing may be typed later. */
@@ -78,7 +86,12 @@ public final class Cell implements Reference {
 
     /** A live cell; every symbol of its formula must be among the references. */
     public static Cell live(
-            Place place, String symbol, Unit unit, Formula formula, Map<String, Reference> references, Sureness sureness) {
+            Place place,
+            String symbol,
+            Unit unit,
+            Formula formula,
+            Map<String, Reference> references,
+            Sureness sureness) {
         return new Cell(Kind.FORMULA, place, symbol, unit, null, formula, references, sureness, null);
     }
 

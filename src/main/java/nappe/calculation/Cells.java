@@ -105,7 +105,9 @@ public final class Cells {
 
     /** Nought is nought in every unit: it is written in the working unit, and needs no factor. */
     private Formula.Quantity withPlainZero(Formula.Quantity quantity) {
-        return quantity.value() == 0 ? new Formula.Quantity(0, "0", unit(quantity.unit().dimension())) : quantity;
+        return quantity.value() == 0
+                ? new Formula.Quantity(0, "0", unit(quantity.unit().dimension()))
+                : quantity;
     }
 
     private Cell keep(Cell cell, Sign sign) {

@@ -25,7 +25,8 @@ public final class ElementSheet {
     public static final int FIRST_CASE = 7;
 
     /** A limit with its verdicts: one for all cases, or one per case. */
-    public record LimitResult(String tag, String label, String source, List<@Nullable Cell> margins, List<Cell> verdicts) {
+    public record LimitResult(
+            String tag, String label, String source, List<@Nullable Cell> margins, List<Cell> verdicts) {
         public boolean forAll() {
             return verdicts.size() == 1;
         }
@@ -110,12 +111,20 @@ public final class ElementSheet {
         String symbol = item.outputs().get(0);
         boolean perCase = method.perCase(symbol);
         String label = item instanceof Item.Given g ? g.label() : ((Item.Constant) item).label();
-        String source = item instanceof Item.Constant c && c.citation() != null ? c.citation().shown() : "";
+        String source = item instanceof Item.Constant c && c.citation() != null
+                ? c.citation().shown()
+                : "";
         rows(perCase, (at, strip) -> {
             Cell origin = at.cell(symbol);
             Cell cell = items.cells().factors().toWorking(strip.next(), symbol, origin);
             at.put(symbol, cell);
-            strip.add(new Strip.Laid(symbol, label, "from sheet " + origin.place().sheet() + ", " + origin.place().address(), source, cell));
+            strip.add(new Strip.Laid(
+                    symbol,
+                    label,
+                    "from sheet " + origin.place().sheet() + ", "
+                            + origin.place().address(),
+                    source,
+                    cell));
         });
     }
 
@@ -156,7 +165,8 @@ public final class ElementSheet {
 
     private void add(boolean perCase, List<List<Strip.Laid>> laid, int i, boolean isLimit) {
         Strip.Laid first = laid.get(0).get(i);
-        List<Cell> perCaseCells = perCase ? laid.stream().map(l -> l.get(i).cell()).toList() : List.of();
+        List<Cell> perCaseCells =
+                perCase ? laid.stream().map(l -> l.get(i).cell()).toList() : List.of();
         int size = laid.get(0).size();
         Block.LineKind kind = !isLimit || i < size - 2
                 ? Block.LineKind.QUANTITY
@@ -201,19 +211,25 @@ public final class ElementSheet {
         }
         boolean perCase = symbols.stream().anyMatch(method::perCase);
         List<LimitRows.Judged> judged = new ArrayList<>();
-        rows(perCase, (at, strip) -> {
-            Scope inner = at.inner();
-            brought.forEach(inner::put);
-            judged.add(limitRows.lay(limit, inner, strip));
-        }, true);
+        rows(
+                perCase,
+                (at, strip) -> {
+                    Scope inner = at.inner();
+                    brought.forEach(inner::put);
+                    judged.add(limitRows.lay(limit, inner, strip));
+                },
+                true);
         keep(limit.label(), limit.source(), judged);
     }
 
     private void closings(LimitRows limitRows) {
-        List<TrialRows.Solved> mine = trialRows.solved().stream().filter(s -> s.tag().equals(tag)).toList();
-        List<Item.Root> roots = mine.stream().map(TrialRows.Solved::root).distinct().toList();
+        List<TrialRows.Solved> mine =
+                trialRows.solved().stream().filter(s -> s.tag().equals(tag)).toList();
+        List<Item.Root> roots =
+                mine.stream().map(TrialRows.Solved::root).distinct().toList();
         for (Item.Root root : roots) {
-            List<TrialRows.Solved> ofRoot = mine.stream().filter(s -> s.root() == root).toList();
+            List<TrialRows.Solved> ofRoot =
+                    mine.stream().filter(s -> s.root() == root).toList();
             closings(limitRows, root, ofRoot, false);
             closings(limitRows, root, ofRoot, true);
         }
@@ -221,15 +237,21 @@ public final class ElementSheet {
 
     /** One limit for each time a root was laid: once for most, more often where at binds what it rests on. */
     private void closings(LimitRows limitRows, Item.Root root, List<TrialRows.Solved> ofRoot, boolean perCase) {
-        List<List<TrialRows.Solved>> columns = (perCase ? caseNames : List.of("")).stream()
-                .map(name -> ofRoot.stream().filter(s -> s.caseName().equals(name)).toList())
-                .toList();
+        List<List<TrialRows.Solved>> columns = (perCase ? caseNames : List.of(""))
+                .stream()
+                        .map(name -> ofRoot.stream()
+                                .filter(s -> s.caseName().equals(name))
+                                .toList())
+                        .toList();
         for (int k = 0; k < columns.get(0).size(); k++) {
             int place = k;
             int[] next = {0};
             List<LimitRows.Judged> judged = new ArrayList<>();
-            rows(perCase, (at, strip) ->
-                    judged.add(limitRows.closing(columns.get(next[0]++).get(place), at, strip)), true);
+            rows(
+                    perCase,
+                    (at, strip) ->
+                            judged.add(limitRows.closing(columns.get(next[0]++).get(place), at, strip)),
+                    true);
             keep("the trials for " + root.symbol() + " have closed" + (k == 0 ? "" : " (" + (k + 1) + ")"), "", judged);
         }
     }
@@ -238,6 +260,10 @@ public final class ElementSheet {
         List<@Nullable Cell> margins = new ArrayList<>();
         judged.forEach(j -> margins.add(j.margin()));
         limits.add(new LimitResult(
-                tag, label, source, margins, judged.stream().map(LimitRows.Judged::verdict).toList()));
+                tag,
+                label,
+                source,
+                margins,
+                judged.stream().map(LimitRows.Judged::verdict).toList()));
     }
 }

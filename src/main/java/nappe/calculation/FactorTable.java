@@ -58,7 +58,8 @@ public final class FactorTable {
     }
 
     /** The cell with the zero of a scale such as degC in working units; null where it is 0. */
-    @Nullable Cell zero(Unit unit) {
+    @Nullable
+    Cell zero(Unit unit) {
         double zero = unit.zeroIn(system);
         if (zero == 0) {
             return null;
@@ -69,8 +70,8 @@ public final class FactorTable {
         }
         TableDraft open = table();
         Unit working = system.coherentUnit(unit.dimension());
-        Cell cell = cells.typed(
-                Cell.Kind.CONSTANT, open.place(1), "0 " + unit.text(), working, Value.of(zero), Sign.ANY);
+        Cell cell =
+                cells.typed(Cell.Kind.CONSTANT, open.place(1), "0 " + unit.text(), working, Value.of(zero), Sign.ANY);
         open.add(List.of(
                 new Block.Text("0 " + unit.text()),
                 new Block.Content(cell),
@@ -130,5 +131,4 @@ public final class FactorTable {
                         Operator.OVER, new Formula.Symbol(symbol), new Formula.Quantity(1, "1", report));
         return cells.raw(place, symbol, report, formula, scope, null, false);
     }
-
 }

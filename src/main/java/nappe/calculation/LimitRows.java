@@ -55,9 +55,8 @@ final class LimitRows {
     }
 
     private Formula side(Formula side, String name, String label, Scope inner, Strip strip) {
-        boolean simple = side instanceof Formula.Symbol
-                || side instanceof Formula.Quantity
-                || side instanceof Formula.Numeral;
+        boolean simple =
+                side instanceof Formula.Symbol || side instanceof Formula.Quantity || side instanceof Formula.Numeral;
         if (simple) {
             return side;
         }

@@ -34,10 +34,12 @@ public final class RatingGrid {
     public TableDraft lay(Rating rating, Scope scope, SheetDraft sheet, String title) {
         Item.Free free = (Item.Free) java.util.Objects.requireNonNull(method.item(rating.free()));
         Cells cells = items.cells();
-        TableDraft ends = sheet.table("Ends of the table", List.of(
-                new Block.Column("End", 10, Block.Align.LEFT),
-                new Block.Column(head(free.symbol(), free.unit()), 14, Block.Align.RIGHT),
-                new Block.Column("Equation", 18, Block.Align.LEFT)));
+        TableDraft ends = sheet.table(
+                "Ends of the table",
+                List.of(
+                        new Block.Column("End", 10, Block.Align.LEFT),
+                        new Block.Column(head(free.symbol(), free.unit()), 14, Block.Align.RIGHT),
+                        new Block.Column("Equation", 18, Block.Align.LEFT)));
         Scope inner = scope.inner();
         inner.put("h_from", end(cells, ends, "from", rating.from(), free, scope));
         inner.put("h_to", end(cells, ends, "to", rating.to(), free, scope));
@@ -63,7 +65,8 @@ public final class RatingGrid {
     private Strip row(Rating rating, Item.Free free, Scope ends, TableDraft table, int i) {
         Cells cells = items.cells();
         List<Block.Item> shown = new ArrayList<>(List.of(new Block.Text(Integer.toString(i))));
-        Formula share = over(times(minus(symbol("h_to"), symbol("h_from")), number(Integer.toString(i))),
+        Formula share = over(
+                times(minus(symbol("h_to"), symbol("h_from")), number(Integer.toString(i))),
                 number(Integer.toString(rating.steps())));
         Formula step = i == 0 ? symbol("h_from") : i == rating.steps() ? symbol("h_to") : plus(symbol("h_from"), share);
         Cell x = cells.live(table.place(1), free.symbol(), free.unit(), step, ends, free.sign(), false);

@@ -22,7 +22,8 @@ public record Run(List<Cell> cells) implements Reference {
     public String fixedFrom(String otherSheet) {
         Place first = cells.get(0).place();
         Place last = cells.get(cells.size() - 1).place();
-        String sheet = first.sheet().equals(otherSheet) ? "" : "'" + first.sheet().replace("'", "''") + "'!";
+        String sheet =
+                first.sheet().equals(otherSheet) ? "" : "'" + first.sheet().replace("'", "''") + "'!";
         return sheet + dollars(first) + ":" + dollars(last);
     }
 

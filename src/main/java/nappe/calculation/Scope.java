@@ -59,7 +59,8 @@ public final class Scope {
      * The scope in which the members of a root stand, if the root was laid in this very scope: what a case adds to a root
      * that serves all cases is laid once per case.
      */
-    @Nullable Scope ownAtRoot(String root) {
+    @Nullable
+    Scope ownAtRoot(String root) {
         return atRoots.get(root);
     }
 }

@@ -55,7 +55,9 @@ public final class Strip {
     List<String> heads() {
         return laid.stream()
                 .map(line -> (line.symbol().isEmpty() ? line.label() : line.symbol())
-                        + (line.cell().unit().text().equals("1") ? "" : " [" + line.cell().unit() + "]"))
+                        + (line.cell().unit().text().equals("1")
+                                ? ""
+                                : " [" + line.cell().unit() + "]"))
                 .toList();
     }
 

@@ -13,7 +13,8 @@ public final class TableDraft {
 
     TableDraft(SheetDraft sheet, int row, String title, List<Block.Column> columns, boolean workbookOnly) {
         this.sheet = sheet;
-        Block.Table table = new Block.Table(row, title, Collections.unmodifiableList(columns), Collections.unmodifiableList(rows));
+        Block.Table table =
+                new Block.Table(row, title, Collections.unmodifiableList(columns), Collections.unmodifiableList(rows));
         this.block = workbookOnly ? new Block.WorkbookOnly(table) : table;
         this.firstRow = row + (title.isEmpty() ? 0 : 1) + 1;
     }

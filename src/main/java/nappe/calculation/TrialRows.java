@@ -60,8 +60,8 @@ public final class TrialRows {
 
     Cell lay(Item.Root root, Scope scope, Strip strip) {
         ItemLayout items = java.util.Objects.requireNonNull(layout);
-        String title = tag + " " + root.symbol() + (caseName.isEmpty() ? "" : ", " + caseName) + ": " + root.label() + ", where "
-                + PlainReading.of(root.left()) + " = " + PlainReading.of(root.right());
+        String title = tag + " " + root.symbol() + (caseName.isEmpty() ? "" : ", " + caseName) + ": " + root.label()
+                + ", where " + PlainReading.of(root.left()) + " = " + PlainReading.of(root.right());
         List<Trial> trials = new ArrayList<>();
         List<Block.Column> columns = new ArrayList<>();
         TableDraft table = sheet.workbookTable(title, columns, root.trials());
@@ -84,7 +84,12 @@ public final class TrialRows {
         strip.add(new Strip.Laid(root.symbol(), root.label(), equation, root.source(), result));
         if (depth == 0) {
             solved.add(new Solved(
-                    root, tag, caseName, status, last.difference, trials.stream().map(t -> t.difference).toList()));
+                    root,
+                    tag,
+                    caseName,
+                    status,
+                    last.difference,
+                    trials.stream().map(t -> t.difference).toList()));
         }
         return result;
     }
@@ -103,8 +108,10 @@ public final class TrialRows {
         if (root.below() == null && root.above() == null) {
             return word("no root in the bracket");
         }
-        Formula nearLower = compare(Comparator.BELOW, call(Function.ABS, symbol("d_1")), call(Function.ABS, symbol("d_2")));
-        return iff(nearLower,
+        Formula nearLower =
+                compare(Comparator.BELOW, call(Function.ABS, symbol("d_1")), call(Function.ABS, symbol("d_2")));
+        return iff(
+                nearLower,
                 word(root.below() == null ? "no root in the bracket" : "below the bracket"),
                 word(root.above() == null ? "no root in the bracket" : "above the bracket"));
     }
@@ -120,9 +127,19 @@ public final class TrialRows {
         return iff(compare(Comparator.EQUAL, symbol("closing"), word("closed")), symbol("x_n"), result);
     }
 
-    private record Trial(Cell x, Cell difference, @Nullable Cell other, @Nullable Cell weighted) {}
+    private record Trial(
+            Cell x,
+            Cell difference,
+            @Nullable Cell other,
+            @Nullable Cell weighted) {}
 
-    private Trial row(Item.Root root, Scope scope, ItemLayout items, TableDraft table, List<Block.Column> columns, List<Trial> before) {
+    private Trial row(
+            Item.Root root,
+            Scope scope,
+            ItemLayout items,
+            TableDraft table,
+            List<Block.Column> columns,
+            List<Trial> before) {
         int k = before.size();
         Scope rows = scope.inner();
         List<Block.Item> shown = new ArrayList<>();
@@ -140,8 +157,8 @@ public final class TrialRows {
             rows.put("d_o", java.util.Objects.requireNonNull(one.weighted));
         }
         Formula formula = k == 0 ? root.from() : k == 1 ? root.to() : next();
-        Cell x = cells.live(table.place(1), root.free(), root.unit(), formula, k < 2 ? scope : rows,
-                root.freeSign(), false);
+        Cell x = cells.live(
+                table.place(1), root.free(), root.unit(), formula, k < 2 ? scope : rows, root.freeSign(), false);
         shown.add(new Block.Content(x));
 
         Scope trial = scope.inner();
@@ -181,7 +198,8 @@ public final class TrialRows {
 
     /** {@code if(d_1*d_2 > 0, x_1, if(same(d_p, d_o), x_p, x_p - d_p*(x_p - x_o)/(d_p - d_o)))}. */
     private static Formula next() {
-        Formula step = over(times(symbol("d_p"), minus(symbol("x_p"), symbol("x_o"))), minus(symbol("d_p"), symbol("d_o")));
+        Formula step =
+                over(times(symbol("d_p"), minus(symbol("x_p"), symbol("x_o"))), minus(symbol("d_p"), symbol("d_o")));
         Formula noBracket = compare(Comparator.ABOVE, times(symbol("d_1"), symbol("d_2")), ZERO);
         Formula level = new Formula.Call(Function.SAME, List.of(symbol("d_p"), symbol("d_o")));
         return iff(noBracket, symbol("x_1"), iff(level, symbol("x_p"), minus(symbol("x_p"), step)));

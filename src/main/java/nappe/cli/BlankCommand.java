@@ -31,10 +31,17 @@ import picocli.CommandLine.Parameters;
             "The methods are listed by:  nappe blank --methods"
         })
 final class BlankCommand implements Callable<Integer> {
-    @Parameters(arity = "0..*", paramLabel = "TAG=METHOD", description = "an element: its tag and the name of its method")
+    @Parameters(
+            arity = "0..*",
+            paramLabel = "TAG=METHOD",
+            description = "an element: its tag and the name of its method")
     private List<String> elements = new ArrayList<>();
 
-    @Option(names = "--units", paramLabel = "SI|US", defaultValue = "US", description = "working units: SI or US (default: US)")
+    @Option(
+            names = "--units",
+            paramLabel = "SI|US",
+            defaultValue = "US",
+            description = "working units: SI or US (default: US)")
     private String units = "US";
 
     @Option(names = "-o", paramLabel = "FILE", description = "the file to write; it must not be there yet")
@@ -51,7 +58,9 @@ final class BlankCommand implements Callable<Integer> {
         Desk desk = new Desk();
         if (list) {
             for (String name : desk.methods().names()) {
-                spec.commandLine().getOut().printf("%-24s %s%n", name, desk.methods().title(name));
+                spec.commandLine()
+                        .getOut()
+                        .printf("%-24s %s%n", name, desk.methods().title(name));
             }
             return ExitStatus.DONE;
         }
@@ -61,7 +70,8 @@ final class BlankCommand implements Callable<Integer> {
             throw usage("name the file to write: -o station.xlsx");
         }
         if (Files.exists(target)) {
-            throw new Refusal(ExitStatus.WRONG_USAGE, target + " is there already; it is not written over. Name another file.");
+            throw new Refusal(
+                    ExitStatus.WRONG_USAGE, target + " is there already; it is not written over. Name another file.");
         }
         BlankWriter.write(target, system(), chosen, desk.methods());
         spec.commandLine().getOut().println("Wrote " + target + ". Fill it in, then: nappe inspect " + target);

@@ -38,13 +38,17 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
 
     private static int refused(PrintWriter err, List<Fault> faults) {
         faults.forEach(fault -> err.println(fault));
-        err.println(faults.size() == 1 ? "1 fault; nothing was written." : faults.size() + " faults; nothing was written.");
+        err.println(
+                faults.size() == 1
+                        ? "1 fault; no package was written."
+                        : faults.size() + " faults; no package was written.");
         return ExitStatus.INPUT_REFUSED;
     }
 
     /** The faults of a design at their cells of the input workbook. */
     static InputRefused at(String file, StationException e) {
-        return new InputRefused(e.faults().stream().map(fault -> at(file, fault)).toList());
+        return new InputRefused(
+                e.faults().stream().map(fault -> at(file, fault)).toList());
     }
 
     private static Fault at(String file, DesignFault fault) {
@@ -69,7 +73,8 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
         try {
             Path report = Files.createTempFile("nappe-fault-", ".txt");
             Files.writeString(report, trace.toString());
-            err.println("nappe: a fault of the program itself: " + failure + "; details in " + report + " (fault: internal)");
+            err.println("nappe: a fault of the program itself: " + failure + "; details in " + report
+                    + " (fault: internal)");
         } catch (java.io.IOException e) {
             err.println("nappe: a fault of the program itself: " + failure + " (fault: internal)");
         }

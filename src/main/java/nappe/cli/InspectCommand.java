@@ -13,11 +13,15 @@ import picocli.CommandLine.Parameters;
 @Command(
         name = "inspect",
         mixinStandardHelpOptions = true,
-        description = "Read an input workbook, report every fault at its cell or the verdicts on its limits, and write nothing.",
+        description =
+                "Read an input workbook, report every fault at its cell or the verdicts on its limits, and write nothing.",
         footer = {"", "Example:", "  nappe inspect headworks.xlsx"})
 final class InspectCommand implements Callable<Integer> {
     @Parameters(paramLabel = "IN.xlsx", description = "the input workbook")
     private Path input;
+
+    @CommandLine.Mixin
+    private MarkedOption marked = new MarkedOption();
 
     @CommandLine.Spec
     private CommandLine.Model.CommandSpec spec;
@@ -25,7 +29,7 @@ final class InspectCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         Desk desk = new Desk();
-        Design design = desk.read(input);
+        Design design = marked.read(desk, input);
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
         Job.Done done = desk.compute(input, design);
         PrintWriter out = spec.commandLine().getOut();

@@ -25,7 +25,8 @@ import picocli.CommandLine.Parameters;
 @Command(
         name = "issue",
         mixinStandardHelpOptions = true,
-        description = "Make the calculation package: a PDF, a workbook with live formulas, and the rating tables as CSV.",
+        description =
+                "Make the calculation package: a PDF, a workbook with live formulas, and the rating tables as CSV.",
         footer = {
             "",
             "Example:",
@@ -38,8 +39,15 @@ final class IssueCommand implements Callable<Integer> {
     @Parameters(paramLabel = "IN.xlsx", description = "the input workbook")
     private Path input;
 
-    @Option(names = "-o", paramLabel = "FOLDER", defaultValue = "output", description = "where the package goes (default: output)")
+    @Option(
+            names = "-o",
+            paramLabel = "FOLDER",
+            defaultValue = "output",
+            description = "where the package goes (default: output)")
     private Path folder;
+
+    @CommandLine.Mixin
+    private MarkedOption marked = new MarkedOption();
 
     @CommandLine.Spec
     private CommandLine.Model.CommandSpec spec;
@@ -47,9 +55,10 @@ final class IssueCommand implements Callable<Integer> {
     @Override
     public Integer call() throws IOException {
         Desk desk = new Desk();
-        Design design = desk.read(input);
+        Design design = marked.read(desk, input);
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
-        PackageFolder target = PackageFolder.of(folder, design.project().number(), design.project().revision());
+        PackageFolder target = PackageFolder.of(
+                folder, design.project().number(), design.project().revision());
         target.refuseIfIssued();
         Job.Done done = desk.compute(input, design);
         target.write(files(target.name(), done), done.results().furniture());

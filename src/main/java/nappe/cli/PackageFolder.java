@@ -59,7 +59,9 @@ final class PackageFolder {
                     path + " is there already and was not written by nappe; move it away or name another folder with -o"
                             + " (fault: would-overwrite)");
         }
-        if (Files.readString(contents).lines().anyMatch(line -> line.equals("status: issued") || line.equals("status: superseded"))) {
+        if (Files.readString(contents)
+                .lines()
+                .anyMatch(line -> line.equals("status: issued") || line.equals("status: superseded"))) {
             throw new Refusal(
                     ExitStatus.WOULD_OVERWRITE,
                     path + " holds an issued revision; it is never written over. Give the change a revision of its own"
@@ -89,8 +91,7 @@ final class PackageFolder {
     /** A temporary folder is for its owner only; the package is for whoever may read its parent. */
     private static void open(Path fresh) throws IOException {
         if (Files.getFileStore(fresh).supportsFileAttributeView("posix")) {
-            Files.setPosixFilePermissions(
-                    fresh, java.nio.file.attribute.PosixFilePermissions.fromString("rwxr-xr-x"));
+            Files.setPosixFilePermissions(fresh, java.nio.file.attribute.PosixFilePermissions.fromString("rwxr-xr-x"));
         }
     }
 
@@ -123,8 +124,12 @@ final class PackageFolder {
         text.append("status: ").append(furniture.status()).append('\n');
         text.append("fingerprint: ").append(furniture.fingerprint()).append('\n');
         text.append("made by: nappe ").append(furniture.version()).append('\n');
-        new TreeMap<>(files).forEach((file, bytes) ->
-                text.append("sha256 ").append(hash(bytes)).append("  ").append(file).append('\n'));
+        new TreeMap<>(files)
+                .forEach((file, bytes) -> text.append("sha256 ")
+                        .append(hash(bytes))
+                        .append("  ")
+                        .append(file)
+                        .append('\n'));
         return text.toString();
     }
 

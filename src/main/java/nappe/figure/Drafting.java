@@ -129,7 +129,8 @@ public final class Drafting {
             return new Drawing.Water(
                     first, last, water.symbol().isEmpty() ? null : quantity(water.symbol(), water.words()));
         } else if (part instanceof FigureSheet.Dimension dimension) {
-            return new Drawing.Dimension(dimension.side(), dimension.rank(), first, last, quantity(dimension.symbol(), ""));
+            return new Drawing.Dimension(
+                    dimension.side(), dimension.rank(), first, last, quantity(dimension.symbol(), ""));
         } else if (part instanceof FigureSheet.Level level) {
             return new Drawing.Level(first, quantity(level.symbol(), level.words()));
         } else if (part instanceof FigureSheet.Gauge gauge) {
@@ -211,8 +212,10 @@ public final class Drafting {
             notes.add(one.words() + ": " + words(of(one.symbol())) + ".");
         }
         Map<String, List<String>> byWords = new LinkedHashMap<>();
-        missed.forEach((symbol, words) -> byWords.computeIfAbsent(words, w -> new ArrayList<>()).add(symbol));
-        byWords.forEach((words, symbols) -> notes.add("Not drawn, since there is " + why(words) + ": " + named(symbols) + "."));
+        missed.forEach((symbol, words) ->
+                byWords.computeIfAbsent(words, w -> new ArrayList<>()).add(symbol));
+        byWords.forEach(
+                (words, symbols) -> notes.add("Not drawn, since there is " + why(words) + ": " + named(symbols) + "."));
         notes.addAll(said);
         notes.addAll(figure.notes());
         return notes;
@@ -225,7 +228,8 @@ public final class Drafting {
     /** A few symbols with what they stand for, many by themselves. */
     private String named(List<String> symbols) {
         boolean few = symbols.size() <= 3;
-        return String.join(", ", symbols.stream().map(s -> few ? label(s) + " " + s : s).toList());
+        return String.join(
+                ", ", symbols.stream().map(s -> few ? label(s) + " " + s : s).toList());
     }
 
     private String label(String symbol) {

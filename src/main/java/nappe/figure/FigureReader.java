@@ -63,7 +63,8 @@ final class FigureReader {
         String file = "figures/" + method.name() + ".txt";
         List<Statement> statements = Statement.of(file, text);
         if (statements.isEmpty()) {
-            throw new MethodException(List.of(new MethodFault(file, 1, 1, "there is no statement", "figure-empty", "")));
+            throw new MethodException(
+                    List.of(new MethodFault(file, 1, 1, "there is no statement", "figure-empty", "")));
         }
         FigureReader reader = new FigureReader(method, statements.get(0));
         List<MethodFault> faults = new ArrayList<>();
@@ -93,7 +94,9 @@ final class FigureReader {
             case "hidden" -> add(new FigureSheet.Path(Pen.HIDDEN, false, points(0, own())));
             case "axis" -> add(new FigureSheet.Path(Pen.AXIS, false, points(0, own())));
             case "floor" -> add(new FigureSheet.Path(Pen.FLOOR, false, points(0, own())));
-            case "water" -> add(new FigureSheet.Water(points(0, 2), own() < 3 || text(2).isEmpty() ? "" : length(2), own() < 4 ? "" : text(3)));
+            case "water" ->
+                add(new FigureSheet.Water(
+                        points(0, 2), own() < 3 || text(2).isEmpty() ? "" : length(2), own() < 4 ? "" : text(3)));
             case "dimension" -> dimension();
             case "level" -> add(new FigureSheet.Level(points(0, 1), length(1), text(2)));
             case "gauge" -> add(new FigureSheet.Gauge(points(0, 1), text(1)));
@@ -101,8 +104,12 @@ final class FigureReader {
             case "flow" -> add(new FigureSheet.Flow(points(0, 2)));
             case "words" -> words();
             case "note" -> notes.add(statement.rest());
-            default -> throw new FormulaException(
-                    "\"" + statement.word() + "\" is not a statement word of a figure", 0, statement.word().length(), "statement-unknown");
+            default ->
+                throw new FormulaException(
+                        "\"" + statement.word() + "\" is not a statement word of a figure",
+                        0,
+                        statement.word().length(),
+                        "statement-unknown");
         }
     }
 
@@ -224,8 +231,11 @@ final class FigureReader {
         if (!dimension.equals(Dimension.LENGTH)) {
             int at = parser.offsets().getOrDefault(formula, 0);
             throw new FormulaException(
-                    "a length is needed here, and this is " + dimension + (dimension.isNone() ? "; nought is written 0 m" : ""),
-                    at, 1, "not-a-length");
+                    "a length is needed here, and this is " + dimension
+                            + (dimension.isNone() ? "; nought is written 0 m" : ""),
+                    at,
+                    1,
+                    "not-a-length");
         }
     }
 
@@ -242,7 +252,9 @@ final class FigureReader {
         if (item == null) {
             throw new FormulaException(
                     symbol + " is neither a symbol of " + method.name() + ".txt nor defined above",
-                    0, symbol.length(), "symbol-unknown");
+                    0,
+                    symbol.length(),
+                    "symbol-unknown");
         }
         if (method.isTemplate(symbol) || item instanceof Item.Free) {
             throw new FormulaException(symbol + " has no value by itself", 0, symbol.length(), "symbol-free");
@@ -258,11 +270,14 @@ final class FigureReader {
         if (item instanceof Item.Given given && given.from() == Item.From.CHOICE) {
             return new DimensionReading.Words();
         }
-        @Nullable Unit unit = item instanceof Item.Given given
+        @Nullable
+        Unit unit = item instanceof Item.Given given
                 ? given.unit()
                 : item instanceof Item.Constant constant
                         ? constant.unit()
-                        : item instanceof Item.Root root ? root.unit() : item instanceof Item.Line line ? line.unit() : null;
+                        : item instanceof Item.Root root
+                                ? root.unit()
+                                : item instanceof Item.Line line ? line.unit() : null;
         return unit == null ? new DimensionReading.Words() : new DimensionReading.Quantity(unit.dimension());
     }
 

@@ -26,7 +26,8 @@ public final class MarginBars {
     public static Bars of(Sheet summary, List<LimitResult> limits, Map<Cell, Value> values, String title) {
         List<Bars.Bar> bars = new ArrayList<>();
         for (Block block : summary.blocks()) {
-            if (block instanceof Block.Table table && table.columns().stream().anyMatch(c -> c.head().equals(MARGIN))) {
+            if (block instanceof Block.Table table
+                    && table.columns().stream().anyMatch(c -> c.head().equals(MARGIN))) {
                 table.rows().forEach(row -> bars.add(bar(table, row, limits, values)));
             }
         }
@@ -38,14 +39,21 @@ public final class MarginBars {
         Cell tag = cell(table, row, "Element");
         Cell label = cell(table, row, "Limit");
         Unit unit = limits.stream()
-                .filter(limit -> Value.word(limit.tag()).equals(values.get(tag)) && Value.word(limit.label()).equals(values.get(label)))
+                .filter(limit -> Value.word(limit.tag()).equals(values.get(tag))
+                        && Value.word(limit.label()).equals(values.get(label)))
                 .flatMap(limit -> limit.margins().stream())
                 .filter(java.util.Objects::nonNull)
                 .map(margin -> unit(java.util.Objects.requireNonNull(margin)))
                 .findFirst()
                 .orElse(Unit.one());
         return new Bars.Bar(
-                number, tag, label, cell(table, row, "Worst verdict"), cell(table, row, MARGIN), unit, cell(table, row, "in case"));
+                number,
+                tag,
+                label,
+                cell(table, row, "Worst verdict"),
+                cell(table, row, MARGIN),
+                unit,
+                cell(table, row, "in case"));
     }
 
     /** The unit by one of which a margin is measured; that of a pure number where its scale is something else. */

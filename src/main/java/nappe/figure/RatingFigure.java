@@ -55,7 +55,8 @@ public final class RatingFigure {
     private Optional<Curve> curve(Block.Table table, List<String> caseNames, List<Scope> cases) {
         Rating rating = method.ratings().get(0);
         String flow = flow();
-        String flowOfTable = rating.results().stream().filter(this::isFlow).findFirst().orElse(null);
+        String flowOfTable =
+                rating.results().stream().filter(this::isFlow).findFirst().orElse(null);
         if (flow == null || flowOfTable == null) {
             return Optional.empty();
         }
@@ -71,13 +72,23 @@ public final class RatingFigure {
         List<Curve.Case> marks = new ArrayList<>();
         List<String> missing = new ArrayList<>();
         for (int c = 0; c < cases.size(); c++) {
-            mark(caseNames.get(c), cases.get(c).cell(flow), head == null ? null : cases.get(c).cell(head), marks, missing);
+            mark(
+                    caseNames.get(c),
+                    cases.get(c).cell(flow),
+                    head == null ? null : cases.get(c).cell(head),
+                    marks,
+                    missing);
         }
         return points.size() < 2
                 ? Optional.empty()
                 : Optional.of(new Curve(
                         "Rating curve with flow cases and ends of the ranges",
-                        flow, rating.free(), points, marks, ends(flow, head, points, cases), missing));
+                        flow,
+                        rating.free(),
+                        points,
+                        marks,
+                        ends(flow, head, points, cases),
+                        missing));
     }
 
     private void mark(String name, Cell flow, @Nullable Cell head, List<Curve.Case> marks, List<String> missing) {
@@ -87,30 +98,51 @@ public final class RatingFigure {
             marks.add(new Curve.Case(name, flow, head));
         } else {
             missing.add("Case " + name + " is not marked: "
-                    + (head == null ? "the method names no head at the gauge" : "head at the gauge: " + words(isNumber(flow) ? head : flow)) + ".");
+                    + (head == null
+                            ? "the method names no head at the gauge"
+                            : "head at the gauge: " + words(isNumber(flow) ? head : flow))
+                    + ".");
         }
     }
 
     private List<End> ends(String flow, @Nullable String head, List<Curve.Point> points, List<Scope> cases) {
         List<End> ends = new ArrayList<>();
         for (Limit limit : method.limits()) {
-            boolean ofHead = limit.value() instanceof Formula.Symbol symbol && symbol.name().equals(head);
-            boolean ofFlow = limit.value() instanceof Formula.Symbol symbol && symbol.name().equals(flow);
+            boolean ofHead = limit.value() instanceof Formula.Symbol symbol
+                    && symbol.name().equals(head);
+            boolean ofFlow = limit.value() instanceof Formula.Symbol symbol
+                    && symbol.name().equals(flow);
             if ((ofHead || ofFlow) && !cases.isEmpty()) {
                 Double bound = bound(limit.bound(), cases.get(0));
                 if (bound != null) {
-                    add(ends, new End(ofHead, (limit.valueIsLesser() ? "greatest " : "least ") + (ofHead ? "head" : "flow"), bound));
+                    add(
+                            ends,
+                            new End(
+                                    ofHead,
+                                    (limit.valueIsLesser() ? "greatest " : "least ") + (ofHead ? "head" : "flow"),
+                                    bound));
                 }
             }
         }
-        add(ends, new End(true, "head where the table begins", number(points.get(0).head())));
-        add(ends, new End(true, "head where the table ends", number(points.get(points.size() - 1).head())));
+        add(
+                ends,
+                new End(
+                        true,
+                        "head where the table begins",
+                        number(points.get(0).head())));
+        add(
+                ends,
+                new End(
+                        true,
+                        "head where the table ends",
+                        number(points.get(points.size() - 1).head())));
         return ends;
     }
 
     private static void add(List<End> ends, End end) {
         boolean known = ends.stream()
-                .anyMatch(e -> e.ofHead() == end.ofHead() && Math.abs(e.value() - end.value()) <= SAME * Math.abs(e.value()));
+                .anyMatch(e ->
+                        e.ofHead() == end.ofHead() && Math.abs(e.value() - end.value()) <= SAME * Math.abs(e.value()));
         if (!known) {
             ends.add(end);
         }
@@ -164,6 +196,8 @@ public final class RatingFigure {
 
     private String words(Cell cell) {
         Value value = values.get(cell);
-        return value instanceof Value.Word word ? word.text() : value instanceof Value.None none ? none.why() : "no number";
+        return value instanceof Value.Word word
+                ? word.text()
+                : value instanceof Value.None none ? none.why() : "no number";
     }
 }

@@ -95,7 +95,8 @@ public final class DimensionReading implements Reading<DimensionReading.Outcome>
         try {
             return symbols.apply(name);
         } catch (FormulaException e) {
-            throw new FormulaException(String.valueOf(e.getMessage()), offsets.getOrDefault(node, 0), name.length(), e.code());
+            throw new FormulaException(
+                    String.valueOf(e.getMessage()), offsets.getOrDefault(node, 0), name.length(), e.code());
         }
     }
 
@@ -121,7 +122,8 @@ public final class DimensionReading implements Reading<DimensionReading.Outcome>
 
     private Outcome power(Formula.Operation operation, Dimension base, Dimension exponent) {
         if (!exponent.isNone()) {
-            throw fault(operation, "the exponent is " + exponent + "; an exponent is a pure number", "exponent-dimension");
+            throw fault(
+                    operation, "the exponent is " + exponent + "; an exponent is a pure number", "exponent-dimension");
         }
         if (base.isNone()) {
             return PURE;
@@ -170,7 +172,8 @@ public final class DimensionReading implements Reading<DimensionReading.Outcome>
             return a;
         }
         if (!a.equals(b)) {
-            throw fault(whole, shown(a) + " " + verb + " " + shown(b) + "; both sides must be alike", "unlike-dimensions");
+            throw fault(
+                    whole, shown(a) + " " + verb + " " + shown(b) + "; both sides must be alike", "unlike-dimensions");
         }
         return a;
     }

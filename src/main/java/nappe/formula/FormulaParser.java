@@ -81,7 +81,9 @@ public final class FormulaParser {
     /** A whole number that must come next. */
     public int count() {
         Token token = tokens.get(at);
-        if (token.kind() != Token.Kind.NUMERAL || token.unit() != null || !token.text().matches("\\d{1,4}")) {
+        if (token.kind() != Token.Kind.NUMERAL
+                || token.unit() != null
+                || !token.text().matches("\\d{1,4}")) {
             throw unexpected("a whole number");
         }
         at++;
@@ -248,7 +250,10 @@ public final class FormulaParser {
     private Formula function(Token name) {
         Function function = Function.forAuthors(name.text())
                 .orElseThrow(() -> new FormulaException(
-                        name.text() + " is not a function", name.offset(), name.text().length(), "function-unknown"));
+                        name.text() + " is not a function",
+                        name.offset(),
+                        name.text().length(),
+                        "function-unknown"));
         List<Formula> arguments = new ArrayList<>(List.of(condition()));
         while (passes(",")) {
             arguments.add(condition());

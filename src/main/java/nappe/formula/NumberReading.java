@@ -61,7 +61,8 @@ public final class NumberReading implements Reading<Value> {
         List<Value> column = values.column(summary.name());
         return switch (summary.kind()) {
             case "last" -> column.get(column.size() - 1);
-            case "highest" -> Value.of(column.stream().mapToDouble(this::number).max().orElse(Double.NaN));
+            case "highest" ->
+                Value.of(column.stream().mapToDouble(this::number).max().orElse(Double.NaN));
             default -> Value.of(column.stream().mapToDouble(this::number).min().orElse(Double.NaN));
         };
     }
@@ -109,16 +110,20 @@ public final class NumberReading implements Reading<Value> {
             case MATCH_BELOW -> matchBelow(arguments);
             case INDEX -> index(arguments);
             case SMALL -> small(arguments);
-            case LOWEST_OF -> Value.of(numbers(arguments.get(0)).stream()
-                    .mapToDouble(Double::doubleValue)
-                    .min()
-                    .orElse(Double.NaN));
-            case TALLY -> Value.of(column(arguments.get(0)).stream()
-                    .filter(value -> alike(value, arguments.get(1).read(this)))
-                    .count());
+            case LOWEST_OF ->
+                Value.of(numbers(arguments.get(0)).stream()
+                        .mapToDouble(Double::doubleValue)
+                        .min()
+                        .orElse(Double.NaN));
+            case TALLY ->
+                Value.of(column(arguments.get(0)).stream()
+                        .filter(value -> alike(value, arguments.get(1).read(this)))
+                        .count());
             case IS_NUMBER, SAME -> throw new IllegalStateException("a condition has no number");
-            default -> Value.of(arithmetic(
-                    call.function(), arguments.stream().mapToDouble(this::number).toArray()));
+            default ->
+                Value.of(arithmetic(
+                        call.function(),
+                        arguments.stream().mapToDouble(this::number).toArray()));
         };
     }
 
@@ -233,9 +238,7 @@ public final class NumberReading implements Reading<Value> {
     private Value index(List<Formula> arguments) {
         List<Value> column = column(arguments.get(0));
         double place = number(arguments.get(1));
-        return place >= 1 && place < column.size() + 1
-                ? column.get((int) place - 1)
-                : new Value.None(Value.NO_RESULT);
+        return place >= 1 && place < column.size() + 1 ? column.get((int) place - 1) : new Value.None(Value.NO_RESULT);
     }
 
     private Value small(List<Formula> arguments) {

@@ -115,7 +115,8 @@ public final class PlainReading implements Reading<Written> {
 
     @Override
     public Written noResult(Formula.NoResult noResult) {
-        return Written.whole(noResult.why().equals(Value.NO_RESULT) ? "none()" : "none(" + quoted(noResult.why()) + ")");
+        return Written.whole(
+                noResult.why().equals(Value.NO_RESULT) ? "none()" : "none(" + quoted(noResult.why()) + ")");
     }
 
     private static String quoted(String text) {

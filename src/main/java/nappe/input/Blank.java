@@ -7,12 +7,11 @@ import java.util.Arrays;
 import java.util.Collections;
 import java.util.List;
 import java.util.stream.Stream;
+import nappe.formula.Sign;
 import nappe.input.BlankWriter.Chosen;
 import nappe.method.Declared;
 import nappe.method.MethodCatalogue;
-import nappe.formula.Sign;
 import nappe.unit.Dimension;
-import nappe.unit.Unit;
 import nappe.unit.WorkingSystem;
 import org.apache.poi.xssf.usermodel.XSSFCellStyle;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
@@ -47,16 +46,41 @@ final class Blank {
         flows.write(sheet(Layout.FLOWS, "Flow cases", flows.widths()), styles, offers);
         elements.forEach(this::element);
         demands();
-        list(Layout.ASSUMPTIONS, 30, Layout.ASSUMPTION_HEADS, List.of(REQUIRED, OPTIONAL, OPTIONAL, REQUIRED),
+        list(
+                Layout.ASSUMPTIONS,
+                30,
+                Layout.ASSUMPTION_HEADS,
+                List.of(REQUIRED, OPTIONAL, OPTIONAL, REQUIRED),
                 "One assumption a row, with its basis and who is to confirm it; open until it is confirmed.",
-                60, 50, 20, 12);
-        list(Layout.REFERENCES, 30, Layout.REFERENCE_HEADS, List.of(REQUIRED),
-                "One reference a row: drawings, surveys, reports and publications, each with its date or edition.", 130);
-        list(Layout.REQUIREMENTS, 24, Layout.REQUIREMENT_HEADS, List.of(REQUIRED, OPTIONAL, OPTIONAL),
+                60,
+                50,
+                20,
+                12);
+        list(
+                Layout.REFERENCES,
+                30,
+                Layout.REFERENCE_HEADS,
+                List.of(REQUIRED),
+                "One reference a row: drawings, surveys, reports and publications, each with its date or edition.",
+                130);
+        list(
+                Layout.REQUIREMENTS,
+                24,
+                Layout.REQUIREMENT_HEADS,
+                List.of(REQUIRED, OPTIONAL, OPTIONAL),
                 "One requirement a row that the calculation has to answer, with its citation and the place of the answer.",
-                60, 40, 40);
-        list(Layout.REVISIONS, 16, Layout.REVISION_HEADS, List.of(REQUIRED, REQUIRED, OPTIONAL),
-                "One revision a row, the first at the top; the date as year-month-day.", 12, 14, 100);
+                60,
+                40,
+                40);
+        list(
+                Layout.REVISIONS,
+                16,
+                Layout.REVISION_HEADS,
+                List.of(REQUIRED, REQUIRED, OPTIONAL),
+                "One revision a row, the first at the top; the date as year-month-day.",
+                12,
+                14,
+                100);
         lists();
         sheets.forEach(sheet -> sheet.finish(system == WorkingSystem.US));
     }
@@ -115,12 +139,15 @@ final class Blank {
     }
 
     private void element(Chosen element) {
-        BlankSheet sheet = sheet(element.tag(), element.tag() + ": " + methods.title(element.method()), 12, 46, 16, 14,
-                44, 12, 12);
+        BlankSheet sheet = sheet(
+                element.tag(), element.tag() + ": " + methods.title(element.method()), 12, 46, 16, 14, 44, 12, 12);
         sheet.lines(List.of(
                 FRAMES + "Method: " + element.method() + ".",
                 "Say of every value where it comes from, and whether it is known or assumed."));
-        sheet.head(Stream.concat(Layout.ENTRY_HEADS.stream(), Stream.of("To fill in")).toList(), true);
+        sheet.head(
+                Stream.concat(Layout.ENTRY_HEADS.stream(), Stream.of("To fill in"))
+                        .toList(),
+                true);
         for (Declared declared : methods.declared(element.method())) {
             if (declared.kind() == Declared.Kind.CASE) {
                 continue;
@@ -162,7 +189,12 @@ final class Blank {
         cellStyles.set(3, styles.numberEntry);
         int first = sheet.rows(ROWS, Collections.nCopies(7, ""), cellStyles);
         int last = first + ROWS - 1;
-        sheet.offer(first, last, 0, lists.range("Tags", elements.stream().map(Chosen::tag).toList()), true);
+        sheet.offer(
+                first,
+                last,
+                0,
+                lists.range("Tags", elements.stream().map(Chosen::tag).toList()),
+                true);
         sheet.offer(first, last, 2, lists.range("At most or at least", Layout.SIDES), true);
         sheet.number(first, last, 3, Sign.ANY, "Value", "The value demanded.");
         sheet.offer(first, last, 4, lists.range("Units", UnitOffer.all()), false);
@@ -176,8 +208,12 @@ final class Blank {
         List<XSSFCellStyle> cellStyles = Collections.nCopies(heads.size(), styles.textEntry);
         int first = sheet.rows(rows, Collections.nCopies(heads.size(), ""), cellStyles);
         if (heads.contains("Open or closed")) {
-            sheet.offer(first, first + rows - 1, heads.indexOf("Open or closed"),
-                    lists.range("Open or closed", Layout.OPEN), true);
+            sheet.offer(
+                    first,
+                    first + rows - 1,
+                    heads.indexOf("Open or closed"),
+                    lists.range("Open or closed", Layout.OPEN),
+                    true);
         }
     }
 
@@ -193,7 +229,9 @@ final class Blank {
         for (int i = 0; i < longest; i++) {
             int at = i;
             sheet.line(
-                    columns.stream().map(c -> at < c.words().size() ? c.words().get(at) : "").toList(),
+                    columns.stream()
+                            .map(c -> at < c.words().size() ? c.words().get(at) : "")
+                            .toList(),
                     Collections.nCopies(columns.size(), styles.line));
         }
     }

@@ -21,8 +21,9 @@ import org.jspecify.annotations.Nullable;
 
 /** One sheet of a blank as it is written from the top down. */
 final class BlankSheet {
-    static final String CAUTION = "The engineer remains responsible for every entry and for what is made of the results; "
-            + "local codes and the authority in charge govern.";
+    static final String CAUTION =
+            "The engineer remains responsible for every entry and for what is made of the results; "
+                    + "local codes and the authority in charge govern.";
     private static final double POINTS_PER_LINE = 13.5;
     private static final int LONGEST_PROMPT = 255;
     private static final int LONGEST_PROMPT_TITLE = 32;
@@ -104,13 +105,15 @@ final class BlankSheet {
 
     /** Offers the words of a range; others are refused, or only remarked on. */
     void offer(int firstRow, int lastRow, int column, String range, boolean strict) {
-        XSSFDataValidation validation = validation(
-                helper().createFormulaListConstraint(range), firstRow, lastRow, column);
+        XSSFDataValidation validation =
+                validation(helper().createFormulaListConstraint(range), firstRow, lastRow, column);
         validation.setSuppressDropDownArrow(true);
         validation.setErrorStyle(strict ? ErrorStyle.STOP : ErrorStyle.WARNING);
-        validation.createErrorBox("Not in the list", strict
-                ? "Choose one of the words offered."
-                : "This is not one of the words offered; it is checked when the workbook is read.");
+        validation.createErrorBox(
+                "Not in the list",
+                strict
+                        ? "Choose one of the words offered."
+                        : "This is not one of the words offered; it is checked when the workbook is read.");
         validation.setShowErrorBox(true);
         sheet.addValidationData(validation);
     }
@@ -124,7 +127,8 @@ final class BlankSheet {
         };
         XSSFDataValidation validation = validation(constraint, firstRow, lastRow, column);
         validation.setErrorStyle(ErrorStyle.STOP);
-        validation.createErrorBox("Not a number that fits", "Write a plain number, " + sign.words() + ", without its unit.");
+        validation.createErrorBox(
+                "Not a number that fits", "Write a plain number, " + sign.words() + ", without its unit.");
         validation.setShowErrorBox(true);
         validation.createPromptBox(cut(what, LONGEST_PROMPT_TITLE), cut(prompt, LONGEST_PROMPT));
         validation.setShowPromptBox(true);
@@ -156,8 +160,8 @@ final class BlankSheet {
     }
 
     private XSSFDataValidation validation(DataValidationConstraint constraint, int firstRow, int lastRow, int column) {
-        return (XSSFDataValidation) helper()
-                .createValidation(constraint, new CellRangeAddressList(firstRow, lastRow, column, column));
+        return (XSSFDataValidation)
+                helper().createValidation(constraint, new CellRangeAddressList(firstRow, lastRow, column, column));
     }
 
     private XSSFDataValidationHelper helper() {

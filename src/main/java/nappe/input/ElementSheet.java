@@ -51,8 +51,7 @@ final class ElementSheet {
 
     private Typed typed(Declared declared, Table.Row row) {
         Field value = row.field("Value");
-        Backing backing =
-                typedReader.backing(row.field("Source or basis"), row.field("Standing"), !value.isBlank());
+        Backing backing = typedReader.backing(row.field("Source or basis"), row.field("Standing"), !value.isBlank());
         return typedReader.typed(declared, value, row.field("Unit"), backing);
     }
 
@@ -74,24 +73,32 @@ final class ElementSheet {
     private void refuseStranger(
             String symbol, Table.Row row, String method, List<Declared> declared, List<Declared> missing) {
         Field field = row.field("Symbol");
-        boolean perCase =
-                declared.stream().anyMatch(d -> d.kind() == Declared.Kind.CASE && d.symbol().equals(symbol));
+        boolean perCase = declared.stream()
+                .anyMatch(d -> d.kind() == Declared.Kind.CASE && d.symbol().equals(symbol));
         if (perCase) {
             entries.fault(field, "symbol-per-case", symbol + " is typed for each case on the sheet Flows, not here");
             return;
         }
-        String near = Near.question(symbol, missing.stream().map(Declared::symbol).toList());
+        String near =
+                Near.question(symbol, missing.stream().map(Declared::symbol).toList());
         List<String> all = declared.stream()
                 .filter(d -> d.kind() != Declared.Kind.CASE)
                 .map(Declared::symbol)
                 .toList();
-        entries.fault(field, "symbol-unknown", Shown.quoted(symbol) + " is not asked for by the method " + method
-                + (near.isEmpty() ? "; it asks for " + String.join(", ", all) : near));
+        entries.fault(
+                field,
+                "symbol-unknown",
+                Shown.quoted(symbol) + " is not asked for by the method " + method
+                        + (near.isEmpty() ? "; it asks for " + String.join(", ", all) : near));
     }
 
     private void refuseMissing(Declared declared) {
-        faults.add(sheet.name(), null, "row-missing", "there is no row for " + declared.symbol() + " ("
-                + declared.label() + "); write that symbol in the column Symbol"
-                + (declared.optional() ? " and leave its value blank" : ", and its value"));
+        faults.add(
+                sheet.name(),
+                null,
+                "row-missing",
+                "there is no row for " + declared.symbol() + " ("
+                        + declared.label() + "); write that symbol in the column Symbol"
+                        + (declared.optional() ? " and leave its value blank" : ", and its value"));
     }
 }

@@ -66,15 +66,20 @@ final class Entries {
         boolean name = longest <= LONGEST_TITLE;
         for (int c : cell.text().codePoints().toArray()) {
             if (!isAllowed(c, name)) {
-                fault(field, "odd-character", what + " holds a character that can't be seen or printed: "
-                        + Shown.quoted(cell.text()) + "; type it again without " + String.format("U+%04X", c));
+                fault(
+                        field,
+                        "odd-character",
+                        what + " holds a character that can't be seen or printed: " + Shown.quoted(cell.text())
+                                + "; type it again without " + String.format("U+%04X", c));
                 return "";
             }
         }
         String text = cell.text().replaceAll("[\\p{Z}\\s]+", " ").strip();
         if (text.length() > longest) {
-            fault(field, "text-too-long", what + " has " + text.length() + " characters; at most " + longest
-                    + " can be printed, shorten it");
+            fault(
+                    field,
+                    "text-too-long",
+                    what + " has " + text.length() + " characters; at most " + longest + " can be printed, shorten it");
             return "";
         }
         return text;
@@ -94,8 +99,11 @@ final class Entries {
         }
         if (!typed.isEmpty()) {
             String near = Near.to(typed, words);
-            fault(field, "word-unknown", Shown.quoted(typed) + " is not a choice for " + what + "; "
-                    + (near == null ? "choose " + listed(words) : "did you mean " + near + "?"));
+            fault(
+                    field,
+                    "word-unknown",
+                    Shown.quoted(typed) + " is not a choice for " + what + "; "
+                            + (near == null ? "choose " + listed(words) : "did you mean " + near + "?"));
         }
         return words.get(0);
     }
@@ -113,22 +121,25 @@ final class Entries {
             }
             if (cell.kind() == Kind.TEXT) {
                 String text = cell.text().strip();
-                return checked(LocalDate.parse(cell.format() == Format.DATE && text.length() > 10
-                        ? text.substring(0, 10)
-                        : text));
+                return checked(LocalDate.parse(
+                        cell.format() == Format.DATE && text.length() > 10 ? text.substring(0, 10) : text));
             }
         } catch (DateTimeException e) {
             // falls through to the fault
         }
-        fault(field, "date-expected", cell.shown()
-                + " is not a date for " + what + "; write year-month-day as 2030-01-31");
+        fault(
+                field,
+                "date-expected",
+                cell.shown() + " is not a date for " + what + "; write year-month-day as 2030-01-31");
         return NO_DATE;
     }
 
     /** Days counted from the eve of 1900, with the leap day of that year that never was; or from the first day of 1904. */
     private LocalDate day(double count) {
         long days = (long) Math.min(Math.max(Math.floor(count), -1e6), 1e7);
-        return from1904 ? LocalDate.of(1904, 1, 1).plusDays(days) : LocalDate.of(1899, 12, 30).plusDays(days);
+        return from1904
+                ? LocalDate.of(1904, 1, 1).plusDays(days)
+                : LocalDate.of(1899, 12, 30).plusDays(days);
     }
 
     private static LocalDate checked(LocalDate date) {
@@ -141,11 +152,17 @@ final class Entries {
     /** Whether the cell holds a value at all; an error and a formula without one are faults. */
     boolean isReadable(Field field, RawCell cell, String what) {
         if (cell.kind() == Kind.ERROR) {
-            fault(field, "cell-error", (cell.formula() ? "the formula here" : "the cell") + " gives the error "
-                    + Shown.quoted(cell.text()) + " where " + what + " belongs; mend or replace it");
+            fault(
+                    field,
+                    "cell-error",
+                    (cell.formula() ? "the formula here" : "the cell") + " gives the error " + Shown.quoted(cell.text())
+                            + " where " + what + " belongs; mend or replace it");
         } else if (cell.kind() == Kind.NO_VALUE) {
-            fault(field, "formula-without-value", "the formula here was saved without its value, so " + what
-                    + " is not known; open the workbook in a spreadsheet program and save it, or write the value");
+            fault(
+                    field,
+                    "formula-without-value",
+                    "the formula here was saved without its value, so " + what
+                            + " is not known; open the workbook in a spreadsheet program and save it, or write the value");
         } else {
             return true;
         }
@@ -165,7 +182,9 @@ final class Entries {
         int shown = Math.min(words.size(), 12);
         String start = String.join(", ", words.subList(0, shown - 1));
         String more = words.size() > shown ? " ... (" + words.size() + " in all, see the sheet Lists)" : "";
-        return words.size() == 1 ? words.get(0) : start + (more.isEmpty() ? " or " : ", ") + words.get(shown - 1) + more;
+        return words.size() == 1
+                ? words.get(0)
+                : start + (more.isEmpty() ? " or " : ", ") + words.get(shown - 1) + more;
     }
 
     static String key(String name) {

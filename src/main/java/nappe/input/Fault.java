@@ -13,7 +13,8 @@ import org.jspecify.annotations.Nullable;
  * @param message what was read, what was expected, and the remedy
  * @param code stable and searchable: {@code number-expected}
  */
-public record Fault(String file, @Nullable String sheet, @Nullable String cell, String message, String code) {
+public record Fault(
+        String file, @Nullable String sheet, @Nullable String cell, String message, String code) {
     @Override
     public String toString() {
         return file

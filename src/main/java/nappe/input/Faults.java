@@ -43,7 +43,8 @@ final class Faults {
 
     /** Sheet by sheet as they were read, in each from the top down and from left to right. */
     private List<Fault> inOrder() {
-        List<String> sheets = found.stream().map(f -> String.valueOf(f.sheet())).distinct().toList();
+        List<String> sheets =
+                found.stream().map(f -> String.valueOf(f.sheet())).distinct().toList();
         List<Fault> ordered = new ArrayList<>(found);
         ordered.sort(Comparator.comparingInt((Fault f) -> sheets.indexOf(String.valueOf(f.sheet())))
                 .thenComparingInt(f -> row(f.cell()))

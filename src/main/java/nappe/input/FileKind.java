@@ -38,8 +38,10 @@ final class FileKind {
                 throw faults.refuse("file-empty", "the file is empty" + REMEDY);
             }
             if (size > MOST_BYTES) {
-                throw faults.refuse("file-too-large", "the file has " + size / 1_000_000 + " MB, more than the "
-                        + MOST_BYTES / 1_000_000 + " MB that an input workbook may have");
+                throw faults.refuse(
+                        "file-too-large",
+                        "the file has " + size / 1_000_000 + " MB, more than the " + MOST_BYTES / 1_000_000
+                                + " MB that an input workbook may have");
             }
             requireZip(in.readNBytes(65_536));
         } catch (IOException e) {

@@ -16,8 +16,9 @@ final class FixedZip {
     /** Not 1980-01-01: Java takes that for a time before 1980 and adds a field that depends on the time zone. */
     private static final LocalDateTime TIME = LocalDateTime.of(2000, 1, 1, 0, 0);
 
-    private static final Comparator<String> CONTENT_TYPES_FIRST =
-            Comparator.comparing((String name) -> !name.equals("[Content_Types].xml")).thenComparing(name -> name);
+    private static final Comparator<String> CONTENT_TYPES_FIRST = Comparator.comparing(
+                    (String name) -> !name.equals("[Content_Types].xml"))
+            .thenComparing(name -> name);
 
     private FixedZip() {}
 

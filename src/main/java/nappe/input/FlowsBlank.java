@@ -84,7 +84,12 @@ final class FlowsBlank {
         sheet.number(first, last, flow, Sign.POSITIVE, "Flow", "Flow of the case, greater than zero.");
         sheet.offer(first, last, flow + 1, offers.units(system.coherentUnit(Dimension.FLOW)), false);
         int water = Layout.FLOW_HEADS.indexOf("Water level downstream");
-        sheet.number(first, last, water, Sign.ANY, "Water level downstream",
+        sheet.number(
+                first,
+                last,
+                water,
+                Sign.ANY,
+                "Water level downstream",
                 "Level of the receiving water; blank where there is none.");
         sheet.offer(first, last, water + 1, offers.units(level), false);
         offers.standing(sheet, first, last, Layout.FLOW_HEADS.indexOf("Standing"));

@@ -5,11 +5,11 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Stream;
+import nappe.formula.Sign;
 import nappe.input.ProjectSheet.Named;
 import nappe.input.TypedReader.Backing;
 import nappe.method.Declared;
 import nappe.method.MethodCatalogue;
-import nappe.formula.Sign;
 import nappe.station.Design.FlowCase;
 import nappe.station.Design.Typed;
 import nappe.unit.Dimension;
@@ -61,13 +61,19 @@ final class FlowsSheet {
             String cell = row.field("Case").address();
             String before = flowCase.name().isEmpty() ? null : names.putIfAbsent(key, cell);
             if (before != null) {
-                entries.fault(row.field("Case"), "case-twice", Shown.quoted(flowCase.name())
-                        + " is the name of the case in " + before + " too; give each case its own");
+                entries.fault(
+                        row.field("Case"),
+                        "case-twice",
+                        Shown.quoted(flowCase.name()) + " is the name of the case in " + before
+                                + " too; give each case its own");
             }
             cases.add(flowCase);
         }
         if (cases.isEmpty()) {
-            faults.add(sheet.name(), null, "cases-missing",
+            faults.add(
+                    sheet.name(),
+                    null,
+                    "cases-missing",
                     "there is no flow case; write name, flow and unit of at least one below the head row");
         }
         return cases;
@@ -90,9 +96,13 @@ final class FlowsSheet {
             String tag = text.substring(0, Math.max(0, point));
             boolean ours = elements.stream().anyMatch(e -> e.tag().equals(tag));
             if (ours && perCase.keySet().stream().noneMatch(k -> text.equals(k) || text.equals(k + Layout.UNIT_OF))) {
-                faults.add(sheet.name(), cell.address(), "symbol-unknown", Shown.quoted(text)
-                        + " is not asked for in each case; remove the column"
-                        + Near.question(text, perCase.keySet()));
+                faults.add(
+                        sheet.name(),
+                        cell.address(),
+                        "symbol-unknown",
+                        Shown.quoted(text)
+                                + " is not asked for in each case; remove the column"
+                                + Near.question(text, perCase.keySet()));
             }
         }
     }
@@ -100,7 +110,8 @@ final class FlowsSheet {
     private FlowCase flowCase(Table.Row row) {
         Backing backing = typedReader.backing(row.field("Source or basis"), row.field("Standing"), true);
         Map<String, Typed> typed = new LinkedHashMap<>();
-        perCase.forEach((key, declared) -> typed.put(key,
+        perCase.forEach((key, declared) -> typed.put(
+                key,
                 typedReader.typed(named(key, declared), row.field(key), row.field(key + Layout.UNIT_OF), backing)));
         return new FlowCase(
                 entries.requiredText(row.field("Case"), "the name of the case", LONGEST_CASE),
@@ -121,7 +132,13 @@ final class FlowsSheet {
     }
 
     private static Declared named(String key, Declared declared) {
-        return new Declared(declared.kind(), key, declared.unit(), declared.label(), declared.sign(),
-                declared.optional(), declared.words());
+        return new Declared(
+                declared.kind(),
+                key,
+                declared.unit(),
+                declared.label(),
+                declared.sign(),
+                declared.optional(),
+                declared.words());
     }
 }

@@ -63,8 +63,7 @@ public final class InputReader {
         if (project == null) {
             throw new IllegalStateException("no project and no fault");
         }
-        return new Design(project, elements, cases, demands, assumptions, references,
-                requirements, revisions);
+        return new Design(project, elements, cases, demands, assumptions, references, requirements, revisions);
     }
 
     private List<FlowCase> cases(List<Named> named, WorkingSystem system) {
@@ -86,8 +85,12 @@ public final class InputReader {
     private @Nullable RawSheet sheet(String name) {
         RawSheet sheet = workbook.sheet(name);
         if (sheet == null) {
-            faults.add(name, null, "sheet-missing", "there is no sheet of this name; it was removed or renamed, name it "
-                    + name + " again or start from a new blank");
+            faults.add(
+                    name,
+                    null,
+                    "sheet-missing",
+                    "there is no sheet of this name; it was removed or renamed, name it " + name
+                            + " again or start from a new blank");
         } else if (sheet.isHidden()) {
             faults.add(sheet.name(), null, "sheet-hidden", "the sheet is hidden; show it and check what stands there");
         }
@@ -98,16 +101,36 @@ public final class InputReader {
     private void refuseStraySheets(List<Named> named) {
         for (RawSheet sheet : workbook.sheets()) {
             boolean element = named.stream().anyMatch(n -> n.tag().equalsIgnoreCase(sheet.name()));
-            if (!element && Table.looksLike(sheet, Layout.ENTRY_HEADS) && !sheet.name().equals(Layout.DEMANDS)) {
-                faults.add(sheet.name(), null, "sheet-stray", "the sheet has entries, but no element has this tag; name "
-                        + "it in the list of elements on the sheet Project, or remove the sheet");
+            if (!element
+                    && Table.looksLike(sheet, Layout.ENTRY_HEADS)
+                    && !sheet.name().equals(Layout.DEMANDS)) {
+                faults.add(
+                        sheet.name(),
+                        null,
+                        "sheet-stray",
+                        "the sheet has entries, but no element has this tag; name "
+                                + "it in the list of elements on the sheet Project, or remove the sheet");
             }
         }
     }
 
     private static Project withWorkedCase(Project p, String workedCase) {
-        return new Project(p.project(), p.firm(), p.client(), p.number(), p.subject(), p.revision(), p.date(),
-                p.status(), p.system(), p.letterPaper(), p.flowUnit(), p.headUnit(), p.datum(), workedCase,
-                p.release(), p.sealSpace());
+        return new Project(
+                p.project(),
+                p.firm(),
+                p.client(),
+                p.number(),
+                p.subject(),
+                p.revision(),
+                p.date(),
+                p.status(),
+                p.system(),
+                p.letterPaper(),
+                p.flowUnit(),
+                p.headUnit(),
+                p.datum(),
+                workedCase,
+                p.release(),
+                p.sealSpace());
     }
 }

@@ -81,8 +81,8 @@ final class Layout {
             "Return period of the level",
             "Source or basis",
             "Standing");
-    static final List<String> DEMAND_HEADS = List.of(
-            "Element", "Symbol", "At most or at least", "Value", "Unit", "What is demanded", "Citation");
+    static final List<String> DEMAND_HEADS =
+            List.of("Element", "Symbol", "At most or at least", "Value", "Unit", "What is demanded", "Citation");
     static final List<String> ASSUMPTION_HEADS = List.of("Assumption", "Basis", "Owner", "Open or closed");
     static final List<String> REFERENCE_HEADS = List.of("Reference");
     static final List<String> REQUIREMENT_HEADS = List.of("Requirement", "Citation", "Answered where");
@@ -101,10 +101,49 @@ final class Layout {
     static final String UNIT_OF = " unit";
 
     private static final Set<String> RESERVED = Set.of(
-            "PROJECT", "FLOWS", "DEMANDS", "LISTS", "REVISION", "HISTORY", "COVER", "INDEX", "SUMMARY", "GEOMETRY",
-            "SKETCH", "METHOD", "METHODS", "LIMITS", "WORKED", "CASES", "PROFILE", "PROFILES", "RATING", "RATINGS",
-            "SCREEN", "SIZES", "CARD", "ASBUILT", "SOFTWARE", "CHECKER", "CHECK", "CHECKS", "TRIAL", "TRIALS", "TABLE",
-            "TABLES", "CONSTANT", "UNITS", "LEVELS", "STATION", "ENTRIES", "REGISTER", "STANDING", "GLOSSARY", "FAULTS", "TRUE", "FALSE");
+            "PROJECT",
+            "FLOWS",
+            "DEMANDS",
+            "LISTS",
+            "REVISION",
+            "HISTORY",
+            "COVER",
+            "INDEX",
+            "SUMMARY",
+            "GEOMETRY",
+            "SKETCH",
+            "METHOD",
+            "METHODS",
+            "LIMITS",
+            "WORKED",
+            "CASES",
+            "PROFILE",
+            "PROFILES",
+            "RATING",
+            "RATINGS",
+            "SCREEN",
+            "SIZES",
+            "CARD",
+            "ASBUILT",
+            "SOFTWARE",
+            "CHECKER",
+            "CHECK",
+            "CHECKS",
+            "TRIAL",
+            "TRIALS",
+            "TABLE",
+            "TABLES",
+            "CONSTANT",
+            "UNITS",
+            "LEVELS",
+            "STATION",
+            "ENTRIES",
+            "REGISTER",
+            "STANDING",
+            "GLOSSARY",
+            "FAULTS",
+            "TRUE",
+            "FALSE");
 
     private Layout() {}
 

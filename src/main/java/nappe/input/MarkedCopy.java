@@ -43,7 +43,8 @@ public final class MarkedCopy {
         if (texts.isEmpty()) {
             return 0;
         }
-        try (InputStream in = Files.newInputStream(input); XSSFWorkbook workbook = new XSSFWorkbook(in)) {
+        try (InputStream in = Files.newInputStream(input);
+                XSSFWorkbook workbook = new XSSFWorkbook(in)) {
             int marked = 0;
             for (Map.Entry<Fault, String> entry : texts.entrySet()) {
                 XSSFSheet sheet = workbook.getSheet(entry.getKey().sheet());
@@ -65,7 +66,8 @@ public final class MarkedCopy {
 
     private static void mark(XSSFSheet sheet, CellAddress at, String text) {
         XSSFRow row = sheet.getRow(at.getRow()) == null ? sheet.createRow(at.getRow()) : sheet.getRow(at.getRow());
-        XSSFCell cell = row.getCell(at.getColumn()) == null ? row.createCell(at.getColumn()) : row.getCell(at.getColumn());
+        XSSFCell cell =
+                row.getCell(at.getColumn()) == null ? row.createCell(at.getColumn()) : row.getCell(at.getColumn());
         XSSFComment note = cell.getCellComment();
         if (note != null) {
             String before = note.getString() == null ? "" : note.getString().getString();
@@ -73,8 +75,8 @@ public final class MarkedCopy {
             return;
         }
         int lines = 2 + text.length() / CHARACTERS_PER_LINE;
-        XSSFClientAnchor anchor = new XSSFClientAnchor(0, 0, 0, 0, at.getColumn() + 1, at.getRow(),
-                at.getColumn() + 1 + COLUMNS, at.getRow() + lines);
+        XSSFClientAnchor anchor = new XSSFClientAnchor(
+                0, 0, 0, 0, at.getColumn() + 1, at.getRow(), at.getColumn() + 1 + COLUMNS, at.getRow() + lines);
         note = sheet.createDrawingPatriarch().createCellComment(anchor);
         note.setAuthor(AUTHOR);
         note.setString(text);

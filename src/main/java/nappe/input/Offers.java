@@ -1,6 +1,5 @@
 package nappe.input;
 
-import java.util.List;
 import nappe.method.Declared;
 import nappe.unit.Unit;
 
@@ -15,7 +14,8 @@ final class Offers {
     /** The range with the units that will do in place of one. */
     String units(Unit unit) {
         String measured = UnitOffer.measured(unit);
-        return lists.range("Units of " + measured,
+        return lists.range(
+                "Units of " + measured,
                 UnitOffer.offered(unit).stream().map(Unit::text).sorted().toList());
     }
 
@@ -26,8 +26,9 @@ final class Offers {
     /** Takes only what can be typed for a declared entry. */
     void entry(BlankSheet sheet, int firstRow, int lastRow, int column, Declared declared) {
         if (declared.words().isEmpty()) {
-            String prompt = declared.label() + ". " + (declared.optional() ? "May stay blank. " : "")
-                    + "Write " + UnitOffer.measured(declared.unit()) + ", " + declared.sign().words() + ".";
+            String prompt = declared.label() + ". " + (declared.optional() ? "May stay blank. " : "") + "Write "
+                    + UnitOffer.measured(declared.unit()) + ", "
+                    + declared.sign().words() + ".";
             sheet.number(firstRow, lastRow, column, declared.sign(), declared.symbol(), prompt);
         } else {
             sheet.offer(firstRow, lastRow, column, lists.range(declared.symbol(), declared.words()), true);

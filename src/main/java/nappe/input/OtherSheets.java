@@ -3,8 +3,8 @@ package nappe.input;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Function;
-import nappe.input.ProjectSheet.Named;
 import nappe.formula.Sign;
+import nappe.input.ProjectSheet.Named;
 import nappe.station.Design.Assumption;
 import nappe.station.Design.Demand;
 import nappe.station.Design.Requirement;
@@ -39,11 +39,14 @@ final class OtherSheets {
     private Demand demand(Table.Row row, List<String> tags) {
         String tag = entries.requiredText(row.field("Element"), "the tag of the element", Entries.LONGEST_NAME);
         if (!tag.isEmpty() && !tags.isEmpty() && !tags.contains(tag)) {
-            entries.fault(row.field("Element"), "tag-unknown", Shown.quoted(tag) + " is the tag of no element; write "
-                    + Entries.listed(tags));
+            entries.fault(
+                    row.field("Element"),
+                    "tag-unknown",
+                    Shown.quoted(tag) + " is the tag of no element; write " + Entries.listed(tags));
         }
         String symbol = entries.requiredText(row.field("Symbol"), "the symbol", Entries.LONGEST_NAME);
-        boolean atMost = entries.word(row.field("At most or at least"), "the side", Layout.SIDES).equals("at most");
+        boolean atMost = entries.word(row.field("At most or at least"), "the side", Layout.SIDES)
+                .equals("at most");
         Field value = row.field("Value");
         if (value.isBlank()) {
             entries.missing(value, "the value demanded", "write a number");
@@ -57,7 +60,14 @@ final class OtherSheets {
                 value.origin());
         String what = entries.text(row.field("What is demanded"), "what is demanded", Entries.LONGEST_TEXT);
         return new Demand(
-                tag, symbol, atMost, typed, what, citation, row.field("Symbol").origin(), row.field("Unit").origin());
+                tag,
+                symbol,
+                atMost,
+                typed,
+                what,
+                citation,
+                row.field("Symbol").origin(),
+                row.field("Unit").origin());
     }
 
     /** A unit of any kind: what a demanded result measures is known only where it is calculated. */
@@ -67,37 +77,56 @@ final class OtherSheets {
             return text.isEmpty() ? Unit.one() : Unit.parse(text);
         } catch (UnitException | ArithmeticException | NumberFormatException e) {
             String question = UnitOffer.question(text, Unit.one());
-            entries.fault(field, "unit-unknown", Shown.quoted(text) + " is not a known unit"
-                    + (question.isEmpty() ? "; write one of the sheet Lists" : question));
+            entries.fault(
+                    field,
+                    "unit-unknown",
+                    Shown.quoted(text) + " is not a known unit"
+                            + (question.isEmpty() ? "; write one of the sheet Lists" : question));
             return Unit.one();
         }
     }
 
     List<Assumption> assumptions(@Nullable RawSheet sheet) {
-        return list(sheet, Layout.ASSUMPTION_HEADS, List.of(), row -> new Assumption(
-                entries.requiredText(row.field("Assumption"), "the assumption", Entries.LONGEST_TEXT),
-                entries.text(row.field("Basis"), "the basis", Entries.LONGEST_TEXT),
-                entries.text(row.field("Owner"), "the owner", Entries.LONGEST_NAME),
-                entries.word(row.field("Open or closed"), "the state", Layout.OPEN).equals("open")));
+        return list(
+                sheet,
+                Layout.ASSUMPTION_HEADS,
+                List.of(),
+                row -> new Assumption(
+                        entries.requiredText(row.field("Assumption"), "the assumption", Entries.LONGEST_TEXT),
+                        entries.text(row.field("Basis"), "the basis", Entries.LONGEST_TEXT),
+                        entries.text(row.field("Owner"), "the owner", Entries.LONGEST_NAME),
+                        entries.word(row.field("Open or closed"), "the state", Layout.OPEN)
+                                .equals("open")));
     }
 
     List<String> references(@Nullable RawSheet sheet) {
-        return list(sheet, Layout.REFERENCE_HEADS, List.of(), row ->
-                entries.requiredText(row.field("Reference"), "the reference", Entries.LONGEST_TEXT));
+        return list(
+                sheet,
+                Layout.REFERENCE_HEADS,
+                List.of(),
+                row -> entries.requiredText(row.field("Reference"), "the reference", Entries.LONGEST_TEXT));
     }
 
     List<Requirement> requirements(@Nullable RawSheet sheet) {
-        return list(sheet, Layout.REQUIREMENT_HEADS, List.of(), row -> new Requirement(
-                entries.requiredText(row.field("Requirement"), "the requirement", Entries.LONGEST_TEXT),
-                entries.text(row.field("Citation"), "the citation", Entries.LONGEST_TEXT),
-                entries.text(row.field("Answered where"), "the answer", Entries.LONGEST_TEXT)));
+        return list(
+                sheet,
+                Layout.REQUIREMENT_HEADS,
+                List.of(),
+                row -> new Requirement(
+                        entries.requiredText(row.field("Requirement"), "the requirement", Entries.LONGEST_TEXT),
+                        entries.text(row.field("Citation"), "the citation", Entries.LONGEST_TEXT),
+                        entries.text(row.field("Answered where"), "the answer", Entries.LONGEST_TEXT)));
     }
 
     List<RevisionNote> revisions(@Nullable RawSheet sheet) {
-        return list(sheet, Layout.REVISION_HEADS, List.of(), row -> new RevisionNote(
-                entries.requiredText(row.field("Revision"), "the revision", 10),
-                entries.date(row.field("Date"), "the date").toString(),
-                entries.text(row.field("What changed"), "what changed", Entries.LONGEST_TEXT)));
+        return list(
+                sheet,
+                Layout.REVISION_HEADS,
+                List.of(),
+                row -> new RevisionNote(
+                        entries.requiredText(row.field("Revision"), "the revision", 10),
+                        entries.date(row.field("Date"), "the date").toString(),
+                        entries.text(row.field("What changed"), "what changed", Entries.LONGEST_TEXT)));
     }
 
     private <T> List<T> list(

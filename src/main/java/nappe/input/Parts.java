@@ -69,7 +69,8 @@ final class Parts implements AutoCloseable {
     }
 
     /** The first characters of a small part, or null. */
-    @Nullable String start(String name) throws IOException {
+    @Nullable
+    String start(String name) throws IOException {
         if (!has(name)) {
             return null;
         }
@@ -85,18 +86,24 @@ final class Parts implements AutoCloseable {
     private void index() {
         List<? extends ZipEntry> all = Collections.list(zip.entries());
         if (all.size() > MOST_PARTS) {
-            throw faults.refuse("too-many-parts", "the file has " + all.size() + " parts inside, more than the "
-                    + MOST_PARTS + " that an input workbook may have");
+            throw faults.refuse(
+                    "too-many-parts",
+                    "the file has " + all.size() + " parts inside, more than the " + MOST_PARTS
+                            + " that an input workbook may have");
         }
         for (ZipEntry entry : all) {
             String name = entry.getName();
-            if (!name.matches("[^\\\\/:\\p{Cntrl}]+(/[^\\\\/:\\p{Cntrl}]+)*/?") || name.matches("(.*/)?\\.\\.?(/.*)?")) {
-                throw faults.refuse("odd-part", "the file has a part with the odd name " + Shown.quoted(name)
-                        + "; it was not made by a spreadsheet program");
+            if (!name.matches("[^\\\\/:\\p{Cntrl}]+(/[^\\\\/:\\p{Cntrl}]+)*/?")
+                    || name.matches("(.*/)?\\.\\.?(/.*)?")) {
+                throw faults.refuse(
+                        "odd-part",
+                        "the file has a part with the odd name " + Shown.quoted(name)
+                                + "; it was not made by a spreadsheet program");
             }
             if (!entry.isDirectory() && entries.put(key(name), entry) != null) {
-                throw faults.refuse("part-twice", "the file has two parts named " + name
-                        + "; it was not made by a spreadsheet program");
+                throw faults.refuse(
+                        "part-twice",
+                        "the file has two parts named " + name + "; it was not made by a spreadsheet program");
             }
         }
     }
@@ -112,17 +119,21 @@ final class Parts implements AutoCloseable {
                     sum.update(buffer, 0, n);
                     total += n;
                     if (total > MOST_BYTES) {
-                        throw faults.refuse("too-large", "the file unpacks to more than " + MOST_BYTES / 1_000_000
-                                + " MB, the most that an input workbook may have");
+                        throw faults.refuse(
+                                "too-large",
+                                "the file unpacks to more than " + MOST_BYTES / 1_000_000
+                                        + " MB, the most that an input workbook may have");
                     }
                 }
             } catch (IOException e) {
-                throw faults.refuse("damaged", "the file is damaged: its part " + entry.getName() + " can't be unpacked");
+                throw faults.refuse(
+                        "damaged", "the file is damaged: its part " + entry.getName() + " can't be unpacked");
             }
             sizes.put(key(entry.getName()), total - before);
             if (sum.getValue() != entry.getCrc()) {
-                throw faults.refuse("damaged", "the file is damaged: the checksum of its part " + entry.getName()
-                        + " does not agree");
+                throw faults.refuse(
+                        "damaged",
+                        "the file is damaged: the checksum of its part " + entry.getName() + " does not agree");
             }
         }
     }

@@ -36,7 +36,8 @@ final class ProjectSheet {
     }
 
     /** What the labels say, or null where one of them is missing. */
-    @Nullable Project project() {
+    @Nullable
+    Project project() {
         Table table = Table.find(sheet, Layout.PROJECT_HEADS, faults);
         if (table == null || !readLabels(table.above(Table.find(sheet, Layout.STATION_HEADS, new Faults(""))))) {
             return null;
@@ -45,8 +46,11 @@ final class ProjectSheet {
         WorkingSystem system = us ? WorkingSystem.US : WorkingSystem.SI;
         String revision = text(Label.REVISION);
         if (!revision.isEmpty() && !revision.matches("[A-Za-z0-9][A-Za-z0-9.-]*")) {
-            entries.fault(field(Label.REVISION), "revision-odd", Shown.quoted(revision)
-                    + " can't be a revision; write letters, digits, points and hyphens: 0, A, P1");
+            entries.fault(
+                    field(Label.REVISION),
+                    "revision-odd",
+                    Shown.quoted(revision)
+                            + " can't be a revision; write letters, digits, points and hyphens: 0, A, P1");
         }
         return new Project(
                 text(Label.PROJECT),
@@ -76,8 +80,11 @@ final class ProjectSheet {
         }
         if (!typed.isEmpty()) {
             String near = Near.question(typed, cases);
-            entries.fault(field(Label.WORKED_CASE), "case-unknown", Shown.quoted(typed)
-                    + " is not a case of the sheet Flows" + (near.isEmpty() ? "; leave it blank for the first" : near));
+            entries.fault(
+                    field(Label.WORKED_CASE),
+                    "case-unknown",
+                    Shown.quoted(typed) + " is not a case of the sheet Flows"
+                            + (near.isEmpty() ? "; leave it blank for the first" : near));
         }
         return "";
     }
@@ -93,8 +100,12 @@ final class ProjectSheet {
         }
         for (Label label : Label.values()) {
             if (!fields.containsKey(label)) {
-                faults.add(sheet.name(), null, "label-missing", "there is no row labelled \"" + label.text()
-                        + "\"; write that label and its value above the list of elements");
+                faults.add(
+                        sheet.name(),
+                        null,
+                        "label-missing",
+                        "there is no row labelled \"" + label.text()
+                                + "\"; write that label and its value above the list of elements");
             }
         }
         return fields.size() == Label.values().length;
@@ -109,7 +120,10 @@ final class ProjectSheet {
         }
         List<Table.Row> rows = table.rows(List.of(), faults);
         if (rows.isEmpty()) {
-            faults.add(sheet.name(), null, "elements-missing",
+            faults.add(
+                    sheet.name(),
+                    null,
+                    "elements-missing",
                     "there is no element; write tag and method of at least one below the head row Tag | Method | Title");
         }
         Set<String> tags = new HashSet<>();
@@ -136,7 +150,8 @@ final class ProjectSheet {
             return "";
         }
         if (!tags.add(tag)) {
-            entries.fault(field, "tag-twice", "the tag " + tag + " stands here a second time; give each element its own");
+            entries.fault(
+                    field, "tag-twice", "the tag " + tag + " stands here a second time; give each element its own");
             return "";
         }
         return tag;
@@ -151,8 +166,11 @@ final class ProjectSheet {
         for (String name : methods.names()) {
             near = methods.title(name).equalsIgnoreCase(method) ? name : near;
         }
-        entries.fault(field, "method-unknown", Shown.quoted(method) + " is not a known method; "
-                + (near == null ? "choose " + Entries.listed(methods.names()) : "did you mean " + near + "?"));
+        entries.fault(
+                field,
+                "method-unknown",
+                Shown.quoted(method) + " is not a known method; "
+                        + (near == null ? "choose " + Entries.listed(methods.names()) : "did you mean " + near + "?"));
         return "";
     }
 

@@ -29,20 +29,33 @@ final class Quantities {
         }
         String shown = cell.kind() == Kind.BOOLEAN ? cell.text() : cell.shown();
         if (cell.format() == Format.DATE) {
-            entries.fault(field, "date-in-number", "a date or time stands where " + what + " belongs; set the format of the "
-                    + "cell to a plain number and write the number again");
+            entries.fault(
+                    field,
+                    "date-in-number",
+                    "a date or time stands where " + what + " belongs; set the format of the "
+                            + "cell to a plain number and write the number again");
         } else if (cell.kind() != Kind.NUMBER) {
             String remedy = cell.kind() == Kind.TEXT ? NumberTexts.remedy(cell.text()) : "write a number such as 12.5";
-            entries.fault(field, "number-expected", (cell.formula() ? "the formula here gives " + shown + ", which" : shown)
-                    + " is not a number; " + (cell.formula() ? "let it give a number" : remedy));
+            entries.fault(
+                    field,
+                    "number-expected",
+                    (cell.formula() ? "the formula here gives " + shown + ", which" : shown) + " is not a number; "
+                            + (cell.formula() ? "let it give a number" : remedy));
         } else if (cell.format() == Format.PERCENT) {
             double held = cell.number();
-            entries.fault(field, "percent-format", "the cell shows " + Plain.number(round(held * 100)) + " % and holds "
-                    + Plain.number(held) + "; set its format to a plain number, then write "
-                    + Plain.number(round(held * 100)) + " with the unit % or " + Plain.number(held) + " with the unit 1");
+            entries.fault(
+                    field,
+                    "percent-format",
+                    "the cell shows " + Plain.number(round(held * 100)) + " % and holds "
+                            + Plain.number(held) + "; set its format to a plain number, then write "
+                            + Plain.number(round(held * 100)) + " with the unit % or " + Plain.number(held)
+                            + " with the unit 1");
         } else if (cell.format() == Format.WORDS) {
-            entries.fault(field, "format-with-words", "the format of the cell shows words or a scale beside the number "
-                    + shown + "; set it to a plain number and give the unit in the unit column");
+            entries.fault(
+                    field,
+                    "format-with-words",
+                    "the format of the cell shows words or a scale beside the number " + shown
+                            + "; set it to a plain number and give the unit in the unit column");
         } else {
             return sized(field, what, sign, cell.number());
         }
@@ -51,10 +64,16 @@ final class Quantities {
 
     private Value sized(Field field, String what, Sign sign, double number) {
         if (!sign.allows(number)) {
-            entries.fault(field, "sign-impossible", Plain.number(number) + " can't be " + what + "; it must be " + sign.words());
+            entries.fault(
+                    field,
+                    "sign-impossible",
+                    Plain.number(number) + " can't be " + what + "; it must be " + sign.words());
         } else if (Math.abs(number) > LARGEST || number != 0 && Math.abs(number) < SMALLEST) {
-            entries.fault(field, "number-out-of-reach", Plain.number(number) + " can't be " + what + "; a number must lie between "
-                    + "1e-12 and 1e12 in size");
+            entries.fault(
+                    field,
+                    "number-out-of-reach",
+                    Plain.number(number) + " can't be " + what + "; a number must lie between "
+                            + "1e-12 and 1e12 in size");
         }
         return Value.of(number);
     }
@@ -70,14 +89,20 @@ final class Quantities {
             unit = Unit.parse(typed);
         } catch (UnitException | ArithmeticException | NumberFormatException e) {
             String question = UnitOffer.question(typed, declared);
-            entries.fault(field, "unit-unknown", Shown.quoted(typed) + " is not a known unit"
-                    + (question.isEmpty() ? "; write one such as " + UnitOffer.examples(declared) : question));
+            entries.fault(
+                    field,
+                    "unit-unknown",
+                    Shown.quoted(typed) + " is not a known unit"
+                            + (question.isEmpty() ? "; write one such as " + UnitOffer.examples(declared) : question));
             return declared;
         }
         if (!UnitOffer.fits(unit, declared)) {
-            entries.fault(field, "unit-dimension", Shown.quoted(typed) + " stands for " + UnitOffer.measured(unit) + ", but "
-                    + what + " asks for " + UnitOffer.measured(declared) + "; write one such as "
-                    + UnitOffer.examples(declared));
+            entries.fault(
+                    field,
+                    "unit-dimension",
+                    Shown.quoted(typed) + " stands for " + UnitOffer.measured(unit) + ", but "
+                            + what + " asks for " + UnitOffer.measured(declared) + "; write one such as "
+                            + UnitOffer.examples(declared));
             return declared;
         }
         return unit;

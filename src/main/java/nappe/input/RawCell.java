@@ -51,6 +51,7 @@ record RawCell(int row, int column, Kind kind, String text, boolean formula, For
 
     /** Whether nothing can be seen in it. */
     boolean isBlank() {
-        return kind == Kind.TEXT && text.codePoints().allMatch(c -> Character.isWhitespace(c) || Character.isSpaceChar(c));
+        return kind == Kind.TEXT
+                && text.codePoints().allMatch(c -> Character.isWhitespace(c) || Character.isSpaceChar(c));
     }
 }

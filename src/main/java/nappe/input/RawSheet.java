@@ -50,13 +50,15 @@ final class RawSheet {
         return rows.computeIfAbsent(cell.row(), r -> new TreeMap<>()).putIfAbsent(cell.column(), cell) == null;
     }
 
-    @Nullable RawCell cell(int row, int column) {
+    @Nullable
+    RawCell cell(int row, int column) {
         NavigableMap<Integer, RawCell> cells = rows.get(row);
         return cells == null ? null : cells.get(column);
     }
 
     /** The merged range under which the cell can't be seen, or null. */
-    @Nullable Merge over(int row, int column) {
+    @Nullable
+    Merge over(int row, int column) {
         return merges.stream().filter(m -> m.hides(row, column)).findFirst().orElse(null);
     }
 }

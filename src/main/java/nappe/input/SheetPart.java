@@ -70,8 +70,11 @@ final class SheetPart {
         row = typed == null ? row + 1 : index(typed, ROWS + 1);
         column = -1;
         if (row < 0 || row >= ROWS) {
-            faults.add(sheet.name(), null, "wild-address", "the file is damaged: it has a row numbered "
-                    + Shown.quoted(String.valueOf(typed)));
+            faults.add(
+                    sheet.name(),
+                    null,
+                    "wild-address",
+                    "the file is damaged: it has a row numbered " + Shown.quoted(String.valueOf(typed)));
             row = -1;
         } else if (xml.isTrue("hidden")) {
             sheet.hiddenRows.set(row);
@@ -125,8 +128,12 @@ final class SheetPart {
             Matcher matcher = ADDRESS.matcher(address);
             int there = matcher.matches() ? columnOf(matcher.group(1)) : COLUMNS;
             if (there >= COLUMNS || Integer.parseInt(matcher.group(2)) != row + 1) {
-                faults.add(sheet.name(), null, "wild-address", "the file is damaged: row " + (row + 1)
-                        + " has a cell with the address " + Shown.quoted(address));
+                faults.add(
+                        sheet.name(),
+                        null,
+                        "wild-address",
+                        "the file is damaged: row " + (row + 1) + " has a cell with the address "
+                                + Shown.quoted(address));
                 return false;
             }
             column = there;
@@ -151,7 +158,9 @@ final class SheetPart {
             if (formula) {
                 keep(Kind.NO_VALUE, "", true, format);
             }
-        } else if (bare.length() > LONGEST_NUMBER || !NUMBER.matcher(bare).matches() || !Double.isFinite(Double.parseDouble(bare))) {
+        } else if (bare.length() > LONGEST_NUMBER
+                || !NUMBER.matcher(bare).matches()
+                || !Double.isFinite(Double.parseDouble(bare))) {
             damaged("damaged-number", "a number cell holding " + Shown.quoted(bare) + "; type the number again");
         } else {
             keep(Kind.NUMBER, bare, formula, format);
@@ -169,11 +178,16 @@ final class SheetPart {
 
     private void keep(Kind kind, String text, boolean formula, Format format) {
         if (++filled > MOST_CELLS) {
-            throw faults.refuse("too-many-cells", "the workbook has more than " + MOST_CELLS
-                    + " filled cells, the most that an input workbook may have");
+            throw faults.refuse(
+                    "too-many-cells",
+                    "the workbook has more than " + MOST_CELLS
+                            + " filled cells, the most that an input workbook may have");
         }
         if (!sheet.add(new RawCell(row, column, kind, text, formula, format))) {
-            faults.add(sheet.name(), RawCell.address(row, column), "cell-twice",
+            faults.add(
+                    sheet.name(),
+                    RawCell.address(row, column),
+                    "cell-twice",
                     "the file is damaged: this cell appears twice");
         }
     }
@@ -185,8 +199,9 @@ final class SheetPart {
     private void merge(String range) {
         Matcher matcher = RANGE.matcher(range);
         if (!matcher.matches() || sheet.merges.size() >= MOST_MERGES) {
-            throw faults.refuse("damaged", "the file is damaged: sheet " + sheet.name() + " merges the cells "
-                    + Shown.quoted(range));
+            throw faults.refuse(
+                    "damaged",
+                    "the file is damaged: sheet " + sheet.name() + " merges the cells " + Shown.quoted(range));
         }
         if (matcher.group(3) != null) {
             sheet.merges.add(new RawSheet.Merge(

@@ -28,8 +28,13 @@ final class Shown {
     /** Whether a reader sees the character as what it is; the blank is plain, other blanks are not. */
     static boolean isPlain(int c) {
         return switch (Character.getType(c)) {
-            case Character.CONTROL, Character.FORMAT, Character.SURROGATE, Character.UNASSIGNED, Character.PRIVATE_USE,
-                    Character.LINE_SEPARATOR, Character.PARAGRAPH_SEPARATOR -> false;
+            case Character.CONTROL,
+                    Character.FORMAT,
+                    Character.SURROGATE,
+                    Character.UNASSIGNED,
+                    Character.PRIVATE_USE,
+                    Character.LINE_SEPARATOR,
+                    Character.PARAGRAPH_SEPARATOR -> false;
             case Character.SPACE_SEPARATOR -> c == ' ';
             default -> c != '\u2212';
         };

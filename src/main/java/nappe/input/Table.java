@@ -56,7 +56,8 @@ final class Table {
     static @Nullable Table find(RawSheet sheet, List<String> heads, Faults faults) {
         int best = 0;
         int headRow = -1;
-        for (Map.Entry<Integer, NavigableMap<Integer, RawCell>> row : sheet.rows().entrySet()) {
+        for (Map.Entry<Integer, NavigableMap<Integer, RawCell>> row :
+                sheet.rows().entrySet()) {
             int matches = matches(row.getValue(), heads);
             if (matches > best) {
                 best = matches;
@@ -64,8 +65,12 @@ final class Table {
             }
         }
         if (best < Math.min(2, heads.size())) {
-            faults.add(sheet.name(), null, "head-row-missing", "there is no head row; write a row with the words "
-                    + String.join(" | ", heads) + " above the entries");
+            faults.add(
+                    sheet.name(),
+                    null,
+                    "head-row-missing",
+                    "there is no head row; write a row with the words " + String.join(" | ", heads)
+                            + " above the entries");
             return null;
         }
         return at(sheet, headRow, heads, faults);
@@ -79,12 +84,19 @@ final class Table {
                     .filter(c -> word(c).equals(key(head)))
                     .toList();
             if (cells.isEmpty()) {
-                faults.add(sheet.name(), null, "head-word-missing", "the head row " + (headRow + 1)
-                        + " has no column \"" + head + "\"; write that word above its column");
+                faults.add(
+                        sheet.name(),
+                        null,
+                        "head-word-missing",
+                        "the head row " + (headRow + 1) + " has no column \"" + head
+                                + "\"; write that word above its column");
                 whole = false;
             } else if (cells.size() > 1) {
-                faults.add(sheet.name(), cells.get(1).address(), "head-word-twice", "the head row has two columns \""
-                        + head + "\"; remove one");
+                faults.add(
+                        sheet.name(),
+                        cells.get(1).address(),
+                        "head-word-twice",
+                        "the head row has two columns \"" + head + "\"; remove one");
                 whole = false;
             } else {
                 columns.put(head, cells.get(0).column());
@@ -126,7 +138,8 @@ final class Table {
     List<Row> rows(List<String> prefilled, Faults faults) {
         List<Row> rows = new ArrayList<>();
         BitSet told = new BitSet();
-        for (NavigableMap<Integer, RawCell> cells : sheet.rows().subMap(headRow, false, end, false).values()) {
+        for (NavigableMap<Integer, RawCell> cells :
+                sheet.rows().subMap(headRow, false, end, false).values()) {
             List<RawCell> filled = columns.values().stream()
                     .map(cells::get)
                     .filter(c -> c != null && !c.isBlank())
@@ -171,12 +184,17 @@ final class Table {
 
     private boolean isLabel(int column) {
         boolean entries = columns.containsKey("Description") || columns.containsKey("Label");
-        return entries && (Objects.equals(columns.get("Symbol"), column) || Objects.equals(columns.get("Label"), column)
-                || Objects.equals(columns.get("Note"), column));
+        return entries
+                && (Objects.equals(columns.get("Symbol"), column)
+                        || Objects.equals(columns.get("Label"), column)
+                        || Objects.equals(columns.get("Note"), column));
     }
 
     private void refuseUnseen(RawCell cell, String what, Faults faults) {
-        faults.add(sheet.name(), cell.address(), "entry-unseen",
+        faults.add(
+                sheet.name(),
+                cell.address(),
+                "entry-unseen",
                 cell.shown() + " can't be seen: " + what + " and check what stands there");
     }
 

@@ -10,7 +10,8 @@ public final class Tags {
     /** What is wrong with the text as a tag, with the remedy; null for a good one. */
     public static @Nullable String complaint(String text) {
         if (!text.matches("[A-Z][A-Z0-9]{0,7}")) {
-            String better = text.toUpperCase(Locale.ROOT).replaceAll("[^A-Z0-9]", "").replaceAll("^[0-9]+", "");
+            String better =
+                    text.toUpperCase(Locale.ROOT).replaceAll("[^A-Z0-9]", "").replaceAll("^[0-9]+", "");
             better = better.substring(0, Math.min(8, better.length()));
             return Shown.quoted(text) + " is not a tag; write one capital letter and up to seven capitals or digits"
                     + (better.isEmpty() ? ": F1" : ": " + better);

@@ -1,9 +1,9 @@
 package nappe.input;
 
 import java.util.List;
+import nappe.formula.Sign;
 import nappe.formula.Value;
 import nappe.method.Declared;
-import nappe.formula.Sign;
 import nappe.station.Design.Typed;
 import nappe.unit.Unit;
 
@@ -50,9 +50,12 @@ final class TypedReader {
         if (!blank) {
             number = quantities.number(value, what, sign);
         } else if (!optional) {
-            entries.missing(value, what, "write a number"
-                    + (sign == Sign.ANY ? "" : ", " + sign.words() + ",")
-                    + (declared.dimension().isNone() ? "" : " of " + UnitOffer.examples(declared)));
+            entries.missing(
+                    value,
+                    what,
+                    "write a number"
+                            + (sign == Sign.ANY ? "" : ", " + sign.words() + ",")
+                            + (declared.dimension().isNone() ? "" : " of " + UnitOffer.examples(declared)));
         }
         Unit unit = blank && unitField.isBlank() ? declared : quantities.unit(unitField, what, declared);
         return new Typed(number, unit, backing.source(), backing.standing(), value.origin());

@@ -16,26 +16,85 @@ import nappe.unit.WorkingSystem;
 final class UnitOffer {
     /** Compound units that the trade uses, beside the named ones of the catalogue. */
     private static final List<String> COMPOUND = List.of(
-            "m3/s", "L/s", "m3/h", "m3/d", "ML/d", "ft3/s", "m/s", "ft/s", "m2", "mm2", "cm2", "ft2", "in2", "m3", "ft3",
-            "in3", "m/s2", "ft/s2", "kg/m3", "lb/ft3", "slug/ft3", "m2/s", "ft2/s", "lbf.s/ft2", "Pa.s", "lbf/ft2");
+            "m3/s",
+            "L/s",
+            "m3/h",
+            "m3/d",
+            "ML/d",
+            "ft3/s",
+            "m/s",
+            "ft/s",
+            "m2",
+            "mm2",
+            "cm2",
+            "ft2",
+            "in2",
+            "m3",
+            "ft3",
+            "in3",
+            "m/s2",
+            "ft/s2",
+            "kg/m3",
+            "lb/ft3",
+            "slug/ft3",
+            "m2/s",
+            "ft2/s",
+            "lbf.s/ft2",
+            "Pa.s",
+            "lbf/ft2");
 
     /** The US customary unit offered first where a method asks in the SI unit. */
     private static final Map<String, String> US = Map.ofEntries(
-            Map.entry("m", "ft"), Map.entry("mm", "in"), Map.entry("cm", "in"), Map.entry("km", "mi"),
-            Map.entry("m2", "ft2"), Map.entry("m3", "ft3"), Map.entry("m3/s", "ft3/s"), Map.entry("L/s", "gpm"),
-            Map.entry("m/s", "ft/s"), Map.entry("m/s2", "ft/s2"), Map.entry("kg/m3", "slug/ft3"),
-            Map.entry("m2/s", "ft2/s"), Map.entry("Pa.s", "lbf.s/ft2"), Map.entry("Pa", "psi"),
-            Map.entry("kPa", "psi"), Map.entry("degC", "degF"));
+            Map.entry("m", "ft"),
+            Map.entry("mm", "in"),
+            Map.entry("cm", "in"),
+            Map.entry("km", "mi"),
+            Map.entry("m2", "ft2"),
+            Map.entry("m3", "ft3"),
+            Map.entry("m3/s", "ft3/s"),
+            Map.entry("L/s", "gpm"),
+            Map.entry("m/s", "ft/s"),
+            Map.entry("m/s2", "ft/s2"),
+            Map.entry("kg/m3", "slug/ft3"),
+            Map.entry("m2/s", "ft2/s"),
+            Map.entry("Pa.s", "lbf.s/ft2"),
+            Map.entry("Pa", "psi"),
+            Map.entry("kPa", "psi"),
+            Map.entry("degC", "degF"));
 
     private static final Map<String, String> ALIASES = Map.ofEntries(
-            Map.entry("feet", "ft"), Map.entry("foot", "ft"), Map.entry("'", "ft"), Map.entry("inch", "in"),
-            Map.entry("inches", "in"), Map.entry("\"", "in"), Map.entry("metre", "m"), Map.entry("meter", "m"),
-            Map.entry("metres", "m"), Map.entry("meters", "m"), Map.entry("sec", "s"), Map.entry("hr", "h"),
-            Map.entry("cms", "m3/s"), Map.entry("cumec", "m3/s"), Map.entry("cumecs", "m3/s"), Map.entry("lps", "L/s"),
-            Map.entry("cusec", "ft3/s"), Map.entry("fps", "ft/s"), Map.entry("gal/m", "gpm"), Map.entry("usgpm", "gpm"),
-            Map.entry("cmh", "m3/h"), Map.entry("cmd", "m3/d"), Map.entry("acre", "ac"), Map.entry("litre", "L"),
-            Map.entry("liter", "L"), Map.entry("percent", "%"), Map.entry("degrees", "deg"), Map.entry("°", "deg"),
-            Map.entry("°c", "degC"), Map.entry("°f", "degF"), Map.entry("-", "1"), Map.entry("none", "1"));
+            Map.entry("feet", "ft"),
+            Map.entry("foot", "ft"),
+            Map.entry("'", "ft"),
+            Map.entry("inch", "in"),
+            Map.entry("inches", "in"),
+            Map.entry("\"", "in"),
+            Map.entry("metre", "m"),
+            Map.entry("meter", "m"),
+            Map.entry("metres", "m"),
+            Map.entry("meters", "m"),
+            Map.entry("sec", "s"),
+            Map.entry("hr", "h"),
+            Map.entry("cms", "m3/s"),
+            Map.entry("cumec", "m3/s"),
+            Map.entry("cumecs", "m3/s"),
+            Map.entry("lps", "L/s"),
+            Map.entry("cusec", "ft3/s"),
+            Map.entry("fps", "ft/s"),
+            Map.entry("gal/m", "gpm"),
+            Map.entry("usgpm", "gpm"),
+            Map.entry("cmh", "m3/h"),
+            Map.entry("cmd", "m3/d"),
+            Map.entry("acre", "ac"),
+            Map.entry("litre", "L"),
+            Map.entry("liter", "L"),
+            Map.entry("percent", "%"),
+            Map.entry("degrees", "deg"),
+            Map.entry("°", "deg"),
+            Map.entry("°c", "degC"),
+            Map.entry("°f", "degF"),
+            Map.entry("-", "1"),
+            Map.entry("none", "1"));
 
     private static final Map<Dimension, String> WORDS = words();
 
@@ -57,7 +116,9 @@ final class UnitOffer {
         }
         Map<String, Unit> offered = new LinkedHashMap<>();
         Stream.of(
-                        Stream.of(unit, WorkingSystem.SI.coherentUnit(unit.dimension()),
+                        Stream.of(
+                                unit,
+                                WorkingSystem.SI.coherentUnit(unit.dimension()),
                                 WorkingSystem.US.coherentUnit(unit.dimension())),
                         COMPOUND.stream().map(Unit::parse),
                         UnitCatalogue.standard().of(unit.dimension()).stream())
@@ -73,7 +134,8 @@ final class UnitOffer {
                         Stream.of("1"),
                         COMPOUND.stream(),
                         Stream.of("m", "s", "kg", "K"),
-                        UnitCatalogue.standard().entries().stream().map(e -> e.unit().text()))
+                        UnitCatalogue.standard().entries().stream()
+                                .map(e -> e.unit().text()))
                 .flatMap(s -> s)
                 .distinct()
                 .toList();
@@ -86,7 +148,9 @@ final class UnitOffer {
 
     /** What a unit measures: "a flow", "an angle". */
     static String measured(Unit unit) {
-        return isAngle(unit) ? "an angle" : WORDS.getOrDefault(unit.dimension(), unit.dimension().toString());
+        return isAngle(unit)
+                ? "an angle"
+                : WORDS.getOrDefault(unit.dimension(), unit.dimension().toString());
     }
 
     /** The first few units that will do: {@code ft, m, in or mm}. */
@@ -94,13 +158,18 @@ final class UnitOffer {
         List<String> some = offered(unit).stream().map(Unit::text).limit(6).toList();
         return some.size() == 1
                 ? some.get(0)
-                : some.stream().limit(some.size() - 1).collect(Collectors.joining(", ")) + " or " + some.get(some.size() - 1);
+                : some.stream().limit(some.size() - 1).collect(Collectors.joining(", ")) + " or "
+                        + some.get(some.size() - 1);
     }
 
     /** The known unit that an unknown text most likely means: {@code ; did you mean ft3/s?}, or nothing. */
     static String question(String typed, Unit declared) {
-        String plain = typed.replace("\u00B3", "3").replace("\u00B2", "2").replace('\u00B7', '.').replaceAll("\\s", "")
-                .replace("**", "^").replaceAll("\\.$", "");
+        String plain = typed.replace("\u00B3", "3")
+                .replace("\u00B2", "2")
+                .replace('\u00B7', '.')
+                .replaceAll("\\s", "")
+                .replace("**", "^")
+                .replaceAll("\\.$", "");
         String alias = ALIASES.get(plain.toLowerCase(java.util.Locale.ROOT));
         if (alias != null) {
             return "; did you mean " + alias + "?";

@@ -26,7 +26,8 @@ final class WorkbookReader {
         }
     }
 
-    private record SheetEntry(String name, boolean hidden, @Nullable String relation) {}
+    private record SheetEntry(
+            String name, boolean hidden, @Nullable String relation) {}
 
     private final Parts parts;
     private final Faults faults;
@@ -51,8 +52,10 @@ final class WorkbookReader {
         Map<String, Relation> relations = relations(main);
         for (Relation relation : relations.values()) {
             if (relation.isOf("externalLink")) {
-                throw faults.refuse("external-links", "the workbook has links to other workbooks; replace them by "
-                        + "their values and save it again");
+                throw faults.refuse(
+                        "external-links",
+                        "the workbook has links to other workbooks; replace them by "
+                                + "their values and save it again");
             }
             if (relation.isOf("vbaProject") || relation.isOf("xlMacrosheet")) {
                 throw macros();
@@ -65,7 +68,8 @@ final class WorkbookReader {
                 throw strictVariant();
             }
             if (!xml.starts("workbook") || !xml.namespace().equals(Xml.MAIN)) {
-                throw faults.refuse("not-a-workbook", "its main part is no workbook; give the input workbook saved as .xlsx");
+                throw faults.refuse(
+                        "not-a-workbook", "its main part is no workbook; give the input workbook saved as .xlsx");
             }
             while (xml.next()) {
                 if (xml.starts("workbookPr")) {
@@ -81,8 +85,10 @@ final class WorkbookReader {
 
     private List<RawSheet> sheets(List<SheetEntry> entries, Map<String, Relation> relations) {
         if (entries.size() > MOST_SHEETS) {
-            throw faults.refuse("too-many-sheets", "the workbook has " + entries.size() + " sheets, more than the "
-                    + MOST_SHEETS + " that an input workbook may have");
+            throw faults.refuse(
+                    "too-many-sheets",
+                    "the workbook has " + entries.size() + " sheets, more than the " + MOST_SHEETS
+                            + " that an input workbook may have");
         }
         NumberFormats formats = new NumberFormats();
         List<String> texts = List.of();
@@ -99,7 +105,10 @@ final class WorkbookReader {
         for (SheetEntry entry : entries) {
             Relation relation = entry.relation() == null ? null : relations.get(entry.relation());
             if (relation == null || !parts.has(relation.target())) {
-                faults.add(entry.name(), null, "sheet-part-missing",
+                faults.add(
+                        entry.name(),
+                        null,
+                        "sheet-part-missing",
                         "the file is damaged: the part with this sheet's cells is missing");
                 continue;
             }
@@ -110,8 +119,8 @@ final class WorkbookReader {
                 RawSheet sheet = new RawSheet(entry.name(), entry.hidden());
                 try (Xml xml = Xml.open(parts, relation.target())) {
                     if (!xml.starts("worksheet") || !xml.namespace().equals(Xml.MAIN)) {
-                        throw faults.refuse("damaged", "the file is damaged: its part " + relation.target()
-                                + " is no sheet");
+                        throw faults.refuse(
+                                "damaged", "the file is damaged: its part " + relation.target() + " is no sheet");
                     }
                     filled = new SheetPart(xml, sheet, texts, formats, faults).read(filled);
                 }
@@ -138,8 +147,10 @@ final class WorkbookReader {
                     length += text.length() + 20;
                 }
                 if (length > MOST_TEXT) {
-                    throw faults.refuse("too-large", "the workbook holds more than " + MOST_TEXT
-                            + " characters of text, the most that an input workbook may have");
+                    throw faults.refuse(
+                            "too-large",
+                            "the workbook holds more than " + MOST_TEXT
+                                    + " characters of text, the most that an input workbook may have");
                 }
             }
         }
@@ -166,8 +177,9 @@ final class WorkbookReader {
             throw macros();
         }
         if (!type.contains("spreadsheetml.sheet.main")) {
-            throw faults.refuse("not-a-workbook", "this is an office file of another kind, no workbook; give the input "
-                    + "workbook saved as .xlsx");
+            throw faults.refuse(
+                    "not-a-workbook",
+                    "this is an office file of another kind, no workbook; give the input " + "workbook saved as .xlsx");
         }
         return main.target();
     }
@@ -197,7 +209,8 @@ final class WorkbookReader {
         }
         try (Xml xml = Xml.openShort(parts, part)) {
             do {
-                if (xml.starts("Relationship") && !xml.attribute("TargetMode", "").equals("External")) {
+                if (xml.starts("Relationship")
+                        && !xml.attribute("TargetMode", "").equals("External")) {
                     relations.put(
                             xml.attribute("Id", ""),
                             new Relation(
@@ -213,7 +226,10 @@ final class WorkbookReader {
         if (target.startsWith("/")) {
             return target.substring(1);
         }
-        String path = Path.of("/" + folder).resolve(target.replace("\0", "")).normalize().toString();
+        String path = Path.of("/" + folder)
+                .resolve(target.replace("\0", ""))
+                .normalize()
+                .toString();
         return path.replace('\\', '/').replaceFirst("^/", "");
     }
 
@@ -234,7 +250,8 @@ final class WorkbookReader {
     }
 
     private InputRefused strictVariant() {
-        return faults.refuse("strict-variant", "the workbook is saved in the strict variant of .xlsx; save it as a plain "
-                + ".xlsx workbook");
+        return faults.refuse(
+                "strict-variant",
+                "the workbook is saved in the strict variant of .xlsx; save it as a plain " + ".xlsx workbook");
     }
 }

@@ -40,8 +40,11 @@ final class Xml implements AutoCloseable {
     /** Opens a part that can't be long in a sound workbook, and stands on its root element. */
     static Xml openShort(Parts parts, String part) {
         if (parts.size(part) > LONGEST_SHORT_PART) {
-            throw parts.faults().refuse("too-large", "the part " + part + " has more than "
-                    + LONGEST_SHORT_PART / 1_000_000 + " MB, the most that it may have in an input workbook");
+            throw parts.faults()
+                    .refuse(
+                            "too-large",
+                            "the part " + part + " has more than " + LONGEST_SHORT_PART / 1_000_000
+                                    + " MB, the most that it may have in an input workbook");
         }
         return open(parts, part);
     }
@@ -69,8 +72,10 @@ final class Xml implements AutoCloseable {
             }
             int event = reader.next();
             if (event == XMLStreamConstants.DTD || event == XMLStreamConstants.ENTITY_REFERENCE) {
-                throw faults.refuse("doctype", "the part " + part + " has a document type declaration, which no "
-                        + "spreadsheet program writes; the file is not read");
+                throw faults.refuse(
+                        "doctype",
+                        "the part " + part + " has a document type declaration, which no "
+                                + "spreadsheet program writes; the file is not read");
             }
             depth += event == XMLStreamConstants.START_ELEMENT ? 1 : event == XMLStreamConstants.END_ELEMENT ? -1 : 0;
             if (depth > DEEPEST) {
@@ -94,7 +99,8 @@ final class Xml implements AutoCloseable {
     }
 
     boolean ends(String name) {
-        return reader.getEventType() == XMLStreamConstants.END_ELEMENT && reader.getLocalName().equals(name);
+        return reader.getEventType() == XMLStreamConstants.END_ELEMENT
+                && reader.getLocalName().equals(name);
     }
 
     /** The name of the element that the reader stands on. */
@@ -107,7 +113,8 @@ final class Xml implements AutoCloseable {
     }
 
     /** The attribute of no namespace, or null. */
-    @Nullable String attribute(String name) {
+    @Nullable
+    String attribute(String name) {
         return reader.getAttributeValue(null, name);
     }
 
@@ -122,7 +129,8 @@ final class Xml implements AutoCloseable {
     }
 
     /** The id that points to another part, or null. */
-    @Nullable String relation() {
+    @Nullable
+    String relation() {
         for (int i = 0; i < reader.getAttributeCount(); i++) {
             String space = reader.getAttributeNamespace(i);
             if (reader.getAttributeLocalName(i).equals("id") && space != null && space.endsWith("/relationships")) {
@@ -150,8 +158,8 @@ final class Xml implements AutoCloseable {
                 text.append(reader.getText());
             }
             if (text.length() > LONGEST_TEXT) {
-                throw faults.refuse("too-large", "the part " + part + " holds a text of more than " + LONGEST_TEXT
-                        + " characters");
+                throw faults.refuse(
+                        "too-large", "the part " + part + " holds a text of more than " + LONGEST_TEXT + " characters");
             }
         }
     }
@@ -161,7 +169,8 @@ final class Xml implements AutoCloseable {
             return faults.refuse("too-large", "the part " + part + " holds a run of text without end");
         }
         String where = e instanceof XMLStreamException x && x.getLocation() != null
-                ? " (line " + x.getLocation().getLineNumber() + ", column " + x.getLocation().getColumnNumber() + ")"
+                ? " (line " + x.getLocation().getLineNumber() + ", column "
+                        + x.getLocation().getColumnNumber() + ")"
                 : "";
         return faults.refuse("damaged", "the file is damaged: its part " + part + " is not well-formed XML" + where);
     }

@@ -51,7 +51,8 @@ public record CheckOutcome(CheckRow row, double computed, String words) {
     public static List<List<String>> counts(List<CheckOutcome> outcomes) {
         Map<String, int[]> counts = new TreeMap<>();
         for (CheckOutcome outcome : outcomes) {
-            int[] count = counts.computeIfAbsent(outcome.row().method() + "\t" + outcome.row().kind(), k -> new int[2]);
+            int[] count = counts.computeIfAbsent(
+                    outcome.row().method() + "\t" + outcome.row().kind(), k -> new int[2]);
             count[0]++;
             count[1] += outcome.met() ? 1 : 0;
         }

@@ -68,7 +68,8 @@ public record CheckRow(
         if (text == null) {
             return List.of();
         }
-        CSVFormat format = CSVFormat.DEFAULT.builder()
+        CSVFormat format = CSVFormat.DEFAULT
+                .builder()
                 .setCommentMarker('#')
                 .setHeader()
                 .setSkipHeaderRecord(true)
@@ -76,7 +77,8 @@ public record CheckRow(
                 .get();
         try (CSVParser parser = format.parse(new StringReader(text))) {
             return parser.stream()
-                    .filter(row -> row.get("method").equals(method) && row.get("why").contains("known to be off"))
+                    .filter(row ->
+                            row.get("method").equals(method) && row.get("why").contains("known to be off"))
                     .map(row -> List.of(row.get("id"), row.get("why")))
                     .toList();
         } catch (IOException e) {
@@ -90,7 +92,8 @@ public record CheckRow(
      * @throws CheckException with file and line of the first fault
      */
     public static List<CheckRow> read(String file, String text) {
-        CSVFormat format = CSVFormat.DEFAULT.builder()
+        CSVFormat format = CSVFormat.DEFAULT
+                .builder()
                 .setCommentMarker('#')
                 .setHeader()
                 .setSkipHeaderRecord(true)
@@ -98,14 +101,19 @@ public record CheckRow(
                 .get();
         List<CheckRow> rows = new ArrayList<>();
         try (CSVParser parser = format.parse(new StringReader(text))) {
-            List<String> lacking = HEAD.stream().filter(name -> !parser.getHeaderNames().contains(name)).toList();
+            List<String> lacking = HEAD.stream()
+                    .filter(name -> !parser.getHeaderNames().contains(name))
+                    .toList();
             if (!lacking.isEmpty()) {
                 long line = parser.getCurrentLineNumber();
                 throw new CheckException(file + ":" + line + ": the head lacks " + String.join(", ", lacking)
                         + " (fault: head-unclear)");
             }
             for (CSVRecord record : parser) {
-                rows.add(row(file + ":" + parser.getCurrentLineNumber() + ": ", record, parser.getHeaderNames().size()));
+                rows.add(row(
+                        file + ":" + parser.getCurrentLineNumber() + ": ",
+                        record,
+                        parser.getHeaderNames().size()));
             }
         } catch (IOException | IllegalArgumentException | UncheckedIOException e) {
             throw new CheckException(file + ": " + e.getMessage() + " (fault: table-unreadable)");
@@ -115,7 +123,8 @@ public record CheckRow(
 
     private static CheckRow row(String place, CSVRecord record, int columns) {
         if (record.size() != columns) {
-            throw new CheckException(place + record.size() + " columns where the head has " + columns + " (fault: row-length)");
+            throw new CheckException(
+                    place + record.size() + " columns where the head has " + columns + " (fault: row-length)");
         }
         String tolerance = record.get("tolerance");
         if (!tolerance.matches("\\d+(\\.\\d+)?([eE][+-]?\\d+)? (%|abs)")) {
@@ -123,8 +132,8 @@ public record CheckRow(
                     + "\" is neither like 0.1 % nor like 0.005 abs (fault: tolerance-unclear)");
         }
         if (!KINDS.contains(record.get("kind"))) {
-            throw new CheckException(place + "kind \"" + record.get("kind") + "\" is none of " + String.join(", ", KINDS)
-                    + " (fault: kind-unknown)");
+            throw new CheckException(place + "kind \"" + record.get("kind") + "\" is none of "
+                    + String.join(", ", KINDS) + " (fault: kind-unknown)");
         }
         if (record.get("source").isEmpty()) {
             throw new CheckException(place + "a check value names its source (fault: source-missing)");

@@ -35,7 +35,12 @@ public final class Fingerprint {
     }
 
     private void add(String key, String value) {
-        text.append(key).append('=').append(value.length()).append(':').append(value).append('\n');
+        text.append(key)
+                .append('=')
+                .append(value.length())
+                .append(':')
+                .append(value)
+                .append('\n');
     }
 
     private void add(Design design) {
@@ -43,7 +48,14 @@ public final class Fingerprint {
         add("project", joined(p.project(), p.firm(), p.client(), p.number(), p.subject(), p.revision()));
         add("date", p.date().toString());
         add("status", p.status());
-        add("system", joined(p.system().name(), p.letterPaper() + "", p.flowUnit().text(), p.headUnit().text(), p.sealSpace() + ""));
+        add(
+                "system",
+                joined(
+                        p.system().name(),
+                        p.letterPaper() + "",
+                        p.flowUnit().text(),
+                        p.headUnit().text(),
+                        p.sealSpace() + ""));
         add("datum", p.datum());
         add("worked", p.workedCase());
         add("release", p.release());
@@ -57,8 +69,16 @@ public final class Fingerprint {
             add("tailwater", shown(one.tailwater()));
             add(one.typed());
         }
-        design.demands().forEach(d -> add("demand", joined(
-                d.tag(), d.symbol(), Boolean.toString(d.atMost()), shown(d.value()), d.description(), d.citation())));
+        design.demands()
+                .forEach(d -> add(
+                        "demand",
+                        joined(
+                                d.tag(),
+                                d.symbol(),
+                                Boolean.toString(d.atMost()),
+                                shown(d.value()),
+                                d.description(),
+                                d.citation())));
         design.assumptions().forEach(a -> add("assumption", a.toString()));
         design.references().forEach(r -> add("reference", r));
         design.requirements().forEach(r -> add("requirement", r.toString()));
@@ -88,7 +108,8 @@ public final class Fingerprint {
 
     private String shown() {
         String hash = hash(text.toString());
-        return hash.substring(0, 4) + " " + hash.substring(4, 8) + " " + hash.substring(8, 12) + " " + hash.substring(12, 16);
+        return hash.substring(0, 4) + " " + hash.substring(4, 8) + " " + hash.substring(8, 12) + " "
+                + hash.substring(12, 16);
     }
 
     private static String hash(String text) {

@@ -68,7 +68,11 @@ public final class Job {
         Map<Cell, Value> values = Evaluation.of(layout.cells());
         return new Done(
                 new Results(
-                        furniture(design, used), layout.sheets(), layout.cells(), values, figures(design, layout, values)),
+                        furniture(design, used),
+                        layout.sheets(),
+                        layout.cells(),
+                        values,
+                        figures(design, layout, values)),
                 layout.ratings());
     }
 
@@ -78,15 +82,25 @@ public final class Job {
         List<String> names = design.cases().stream().map(Design.FlowCase::name).toList();
         layout.sheets().stream()
                 .filter(sheet -> sheet.blocks().stream()
-                        .anyMatch(block -> block instanceof Block.Figure f && f.key().equals(PackageLayout.LIMITS_FIGURE)))
+                        .anyMatch(block ->
+                                block instanceof Block.Figure f && f.key().equals(PackageLayout.LIMITS_FIGURE)))
                 .forEach(sheet -> figures.put(
-                        PackageLayout.LIMITS_FIGURE, MarginBars.of(sheet, layout.limits(), values, "Margins of the limits, each in its tightest case")));
+                        PackageLayout.LIMITS_FIGURE,
+                        MarginBars.of(
+                                sheet, layout.limits(), values, "Margins of the limits, each in its tightest case")));
         for (Design.Element element : design.elements()) {
             MethodSheet method = methods.sheet(element.method());
             List<Scope> cases = java.util.Objects.requireNonNull(layout.cases().get(element.tag()));
-            drawings.of(method).ifPresent(sheet -> figures.put(
-                    element.tag() + PackageLayout.GEOMETRY_FIGURE,
-                    Drafting.draw(sheet, method, cases.get(layout.workedCase()), values, system, names.get(layout.workedCase()))));
+            drawings.of(method)
+                    .ifPresent(sheet -> figures.put(
+                            element.tag() + PackageLayout.GEOMETRY_FIGURE,
+                            Drafting.draw(
+                                    sheet,
+                                    method,
+                                    cases.get(layout.workedCase()),
+                                    values,
+                                    system,
+                                    names.get(layout.workedCase()))));
             Block.Table rating = layout.ratings().get(element.tag());
             if (rating != null) {
                 RatingFigure.of(method, rating, names, cases, values, system)

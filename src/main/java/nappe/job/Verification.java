@@ -66,7 +66,8 @@ public final class Verification {
             return new CheckOutcome(row, Double.NaN, value instanceof Value.None none ? none.why() : "words");
         }
         if (!target.unit().dimension().equals(row.unit().dimension())) {
-            return new CheckOutcome(row, Double.NaN, "the target is " + target.unit().dimension());
+            return new CheckOutcome(
+                    row, Double.NaN, "the target is " + target.unit().dimension());
         }
         return new CheckOutcome(row, number.value() / row.unit().sizeIn(system), "");
     }
@@ -85,14 +86,24 @@ public final class Verification {
             this.items = new ItemLayout(cells, new TrialRows(cells, new SheetDraft("Trials", "")));
         }
 
-        @Nullable Cell lay(CheckRow row) {
+        @Nullable
+        Cell lay(CheckRow row) {
             method.tables().values().forEach(this::table);
             for (Item item : method.items()) {
                 if (item instanceof Item.Given given) {
-                    given(given.symbol(), given.unit(), given.sign(), row.entries().get(given.symbol()));
+                    given(
+                            given.symbol(),
+                            given.unit(),
+                            given.sign(),
+                            row.entries().get(given.symbol()));
                 } else if (item instanceof Item.Constant constant) {
-                    Cell typed = cells.typed(Cell.Kind.CONSTANT, place(), constant.symbol(), constant.unit(),
-                            Value.of(constant.value()), constant.value() > 0 ? Sign.POSITIVE : Sign.ANY);
+                    Cell typed = cells.typed(
+                            Cell.Kind.CONSTANT,
+                            place(),
+                            constant.symbol(),
+                            constant.unit(),
+                            Value.of(constant.value()),
+                            constant.value() > 0 ? Sign.POSITIVE : Sign.ANY);
                     scope.put(constant.symbol(), cells.factors().toWorking(place(), constant.symbol(), typed));
                 } else if (item instanceof Item.Free free) {
                     Formula value = row.entries().get(free.symbol());
@@ -110,7 +121,9 @@ public final class Verification {
         private boolean isBound(Item item, CheckRow row) {
             for (String output : item.outputs()) {
                 Set<String> reach = method.reach().getOrDefault(output, Set.of());
-                if (reach.stream().anyMatch(s -> method.item(s) instanceof Item.Free && !row.entries().containsKey(s))) {
+                if (reach.stream()
+                        .anyMatch(s -> method.item(s) instanceof Item.Free
+                                && !row.entries().containsKey(s))) {
                     return false;
                 }
             }

@@ -24,7 +24,9 @@ final class Closure {
         for (int i = items.size() - 1; i >= 0; i--) {
             Item item = items.get(i);
             boolean wanted = item.outputs().stream()
-                    .anyMatch(s -> needed.contains(s) && !s.equals(varied) && reach.getOrDefault(s, Set.of()).contains(varied));
+                    .anyMatch(s -> needed.contains(s)
+                            && !s.equals(varied)
+                            && reach.getOrDefault(s, Set.of()).contains(varied));
             if (wanted) {
                 closure.add(item);
                 needed.addAll(restsOn(item));

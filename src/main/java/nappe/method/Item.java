@@ -58,8 +58,13 @@ public sealed interface Item {
     }
 
     /** A cited number. */
-    record Constant(String symbol, double value, String digits, Unit unit, String label, @Nullable Citation citation)
-            implements Item {
+    record Constant(
+            String symbol,
+            double value,
+            String digits,
+            Unit unit,
+            String label,
+            @Nullable Citation citation) implements Item {
         @Override
         public List<String> outputs() {
             return List.of(symbol);

@@ -37,7 +37,11 @@ public final class MethodLibrary implements MethodCatalogue {
     private boolean startsWithMethod(String file) {
         String text = library.text("methods/" + file);
         return text != null
-                && text.lines().filter(l -> !l.isBlank() && !l.startsWith("#")).findFirst().orElse("").startsWith("method ");
+                && text.lines()
+                        .filter(l -> !l.isBlank() && !l.startsWith("#"))
+                        .findFirst()
+                        .orElse("")
+                        .startsWith("method ");
     }
 
     @Override
@@ -61,7 +65,13 @@ public final class MethodLibrary implements MethodCatalogue {
                     default -> Declared.Kind.ENTRY;
                 };
                 declared.add(new Declared(
-                        kind, given.symbol(), given.unit(), given.label(), given.sign(), given.optional(), given.words()));
+                        kind,
+                        given.symbol(),
+                        given.unit(),
+                        given.label(),
+                        given.sign(),
+                        given.optional(),
+                        given.words()));
             }
         }
         return declared;

@@ -8,8 +8,8 @@ import nappe.unit.UnitException;
 import org.jspecify.annotations.Nullable;
 
 /**
- * Reads the text form of method sheets. The statements are listed in DEVELOPERS.md; {@link StatementReader} has a method
- * for each. All faults are collected, none that only follows from another.
+ * Reads the text form of method sheets. The statements are listed in DEVELOPERS.md; {@link StatementReader} says
+ * which method reads each. All faults are collected, none that only follows from another.
  */
 public final class MethodReader {
     private final TextLibrary library;
@@ -45,20 +45,21 @@ public final class MethodReader {
     void readInto(SheetDraft draft, String name, String text, @Nullable String subscript, Set<String> open) {
         draft.text.append(text).append('\n');
         for (Statement statement : Statement.of(name + ".txt", text)) {
-            StatementReader reader = new StatementReader(draft, statement, subscript, this, library, open);
+            StatementParts parts = new StatementParts(draft, statement, subscript);
             try {
-                reader.read();
+                new StatementReader(parts, this, library, open).read();
             } catch (FormulaException e) {
-                reader.spoil();
+                parts.spoil();
                 if (!e.code().equals(SheetDraft.FOLLOWS)) {
-                    draft.faults.add(statement.fault(reader.base() + e.offset(), String.valueOf(e.getMessage()), e.code()));
+                    draft.faults.add(
+                            statement.fault(parts.base() + e.offset(), String.valueOf(e.getMessage()), e.code()));
                 }
             } catch (UnitException e) {
-                reader.spoil();
-                draft.faults.add(statement.fault(reader.base(), String.valueOf(e.getMessage()), "unit-unknown"));
+                parts.spoil();
+                draft.faults.add(statement.fault(parts.base(), String.valueOf(e.getMessage()), "unit-unknown"));
             } catch (TableException e) {
-                reader.spoil();
-                draft.faults.add(statement.fault(reader.base(), e.fault(), e.code()));
+                parts.spoil();
+                draft.faults.add(statement.fault(parts.base(), e.fault(), e.code()));
             }
         }
     }

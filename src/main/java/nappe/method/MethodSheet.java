@@ -41,8 +41,9 @@ public record MethodSheet(
 
     /** What a symbol rests on that is typed once per case or comes from a neighbour. */
     public boolean perCase(String symbol) {
-        return reach.getOrDefault(symbol, Set.of()).stream().anyMatch(s -> item(s) instanceof Item.Given given
-                && (given.from() == Item.From.CASE || given.from() == Item.From.NEIGHBOUR));
+        return reach.getOrDefault(symbol, Set.of()).stream()
+                .anyMatch(s -> item(s) instanceof Item.Given given
+                        && (given.from() == Item.From.CASE || given.from() == Item.From.NEIGHBOUR));
     }
 
     /** Whether a symbol rests on a free one and so has no value by itself. */

@@ -27,9 +27,16 @@ final class SheetDraft {
     final Map<String, Set<String>> reach = new LinkedHashMap<>();
     final StringBuilder text = new StringBuilder();
     String title = "";
-    @Nullable CitedTable openTable;
-    @Nullable String openRow;
-    @Nullable String openShare;
+
+    @Nullable
+    CitedTable openTable;
+
+    @Nullable
+    String openRow;
+
+    @Nullable
+    String openShare;
+
     boolean openTableIsBroken;
 
     private final Map<String, DimensionReading.Outcome> outcomes = new LinkedHashMap<>();
@@ -57,13 +64,16 @@ final class SheetDraft {
 
     /** Whether a symbol is typed once per case or comes from a neighbour. */
     boolean isTypedPerCase(String symbol) {
-        return items.stream().anyMatch(item -> item instanceof Item.Given given
-                && given.symbol().equals(symbol)
-                && (given.from() == Item.From.CASE || given.from() == Item.From.NEIGHBOUR));
+        return items.stream()
+                .anyMatch(item -> item instanceof Item.Given given
+                        && given.symbol().equals(symbol)
+                        && (given.from() == Item.From.CASE || given.from() == Item.From.NEIGHBOUR));
     }
 
     boolean isFree(String symbol) {
-        return items.stream().anyMatch(item -> item instanceof Item.Free free && free.symbol().equals(symbol));
+        return items.stream()
+                .anyMatch(
+                        item -> item instanceof Item.Free free && free.symbol().equals(symbol));
     }
 
     boolean isBrokenTable(String name) {

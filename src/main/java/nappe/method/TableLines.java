@@ -39,18 +39,24 @@ final class TableLines {
         CitedTable.Column first = table.columns().get(0);
         if (first.isWords() == between) {
             throw new FormulaException(
-                    between ? "the first column of " + table.name() + " holds words: write \"by\""
+                    between
+                            ? "the first column of " + table.name() + " holds words: write \"by\""
                             : "the first column of " + table.name() + " holds numbers: write \"between\"",
-                    0, 1, "table-unclear");
+                    0,
+                    1,
+                    "table-unclear");
         }
-        DimensionReading.Outcome wanted = between
-                ? new DimensionReading.Quantity(unitOf(first).dimension())
-                : new DimensionReading.Words();
+        DimensionReading.Outcome wanted =
+                between ? new DimensionReading.Quantity(unitOf(first).dimension()) : new DimensionReading.Words();
         if (!keyOutcome.equals(wanted)) {
             throw new FormulaException(
-                    between ? key + " is not " + unitOf(first).dimension() + ", as the first column of " + table.name() + " is"
+                    between
+                            ? key + " is not " + unitOf(first).dimension() + ", as the first column of " + table.name()
+                                    + " is"
                             : key + " does not hold words, as the first column of " + table.name() + " does",
-                    0, 1, "unlike-dimensions");
+                    0,
+                    1,
+                    "unlike-dimensions");
         }
         if (between) {
             checkRises(first);
@@ -72,12 +78,16 @@ final class TableLines {
         for (Value value : first.values()) {
             if (!(value instanceof Value.Number number) || number.value() <= last) {
                 throw new FormulaException(
-                        "the first column of " + table.name() + " must rise from row to row, without blanks", 0, 1, "table-not-rising");
+                        "the first column of " + table.name() + " must rise from row to row, without blanks",
+                        0,
+                        1,
+                        "table-not-rising");
             }
             last = number.value();
         }
         if (first.values().size() < 2) {
-            throw new FormulaException("the table " + table.name() + " has one row; two are needed", 0, 1, "table-not-rising");
+            throw new FormulaException(
+                    "the table " + table.name() + " has one row; two are needed", 0, 1, "table-not-rising");
         }
     }
 
@@ -89,28 +99,51 @@ final class TableLines {
         Formula last = call(Function.INDEX, column, number(table.rows()));
         Formula start = call(Function.INDEX, column, number(1));
         String inside = "x_" + suffix();
-        line(inside, call(Function.MIN, call(Function.MAX, keyNumber, start), last),
-                keyLabel() + " as looked up, not beyond the ends of the table: " + table.title(), first.sign());
-        line(row(), call(Function.MIN, call(Function.MATCH_BELOW, symbol(inside), column), number(table.rows() - 1)),
-                "row below it in the table: " + table.title(), Sign.POSITIVE);
+        line(
+                inside,
+                call(Function.MIN, call(Function.MAX, keyNumber, start), last),
+                keyLabel() + " as looked up, not beyond the ends of the table: " + table.title(),
+                first.sign());
+        line(
+                row(),
+                call(Function.MIN, call(Function.MATCH_BELOW, symbol(inside), column), number(table.rows() - 1)),
+                "row below it in the table: " + table.title(),
+                Sign.POSITIVE);
         Formula below = call(Function.INDEX, column, symbol(row()));
         Formula next = call(Function.INDEX, column, plus(symbol(row()), number(1)));
         String step = "d_" + suffix();
         line(step, minus(next, below), "step of the table from this row to the next", Sign.POSITIVE);
-        line(share(), new Formula.Operation(Operator.OVER, minus(symbol(inside), below), symbol(step)),
-                "share of the way to the next row", Sign.ANY);
+        line(
+                share(),
+                new Formula.Operation(Operator.OVER, minus(symbol(inside), below), symbol(step)),
+                "share of the way to the next row",
+                Sign.ANY);
         Formula span = span(first);
-        draft.limits.add(new Limit(start, keyNumber, false, span, null,
-                keyLabel() + " is within the table, lower end: " + table.title(), source));
-        draft.limits.add(new Limit(keyNumber, last, true, span, null,
-                keyLabel() + " is within the table, upper end: " + table.title(), source));
+        draft.limits.add(new Limit(
+                start,
+                keyNumber,
+                false,
+                span,
+                null,
+                keyLabel() + " is within the table, lower end: " + table.title(),
+                source));
+        draft.limits.add(new Limit(
+                keyNumber,
+                last,
+                true,
+                span,
+                null,
+                keyLabel() + " is within the table, upper end: " + table.title(),
+                source));
     }
 
     /** What the margin to an end of the table is measured by: from its first row to its last. */
     private static Formula span(CitedTable.Column first) {
         double from = ((Value.Number) first.values().get(0)).value();
         double to = ((Value.Number) first.values().get(first.values().size() - 1)).value();
-        String text = java.math.BigDecimal.valueOf(to).subtract(java.math.BigDecimal.valueOf(from)).toPlainString();
+        String text = java.math.BigDecimal.valueOf(to)
+                .subtract(java.math.BigDecimal.valueOf(from))
+                .toPlainString();
         return new Formula.Numeral(Double.parseDouble(text), text);
     }
 
@@ -129,18 +162,24 @@ final class TableLines {
         if (column == null) {
             throw new FormulaException(
                     table.name() + ".csv has no column " + columnName + "; it has " + table.columnNames(),
-                    0, columnName.length(), "column-unknown");
+                    0,
+                    columnName.length(),
+                    "column-unknown");
         }
         if (unit == null != column.isWords()) {
             throw new FormulaException(
                     "column " + columnName + (column.isWords() ? " holds words" : " holds numbers"),
-                    0, columnName.length(), "unlike-dimensions");
+                    0,
+                    columnName.length(),
+                    "unlike-dimensions");
         }
         if (unit != null && !unitOf(column).dimension().equals(unit.dimension())) {
             throw new FormulaException(
                     "column " + columnName + " is " + unitOf(column).dimension() + ", but " + unit + " is "
                             + unit.dimension(),
-                    0, columnName.length(), "unlike-dimensions");
+                    0,
+                    columnName.length(),
+                    "unlike-dimensions");
         }
         Formula run = new Formula.Symbol(name(table, column));
         Formula found = call(Function.INDEX, run, symbol(row));
@@ -183,7 +222,9 @@ final class TableLines {
     private String keyLabel() {
         return draft.items.stream()
                 .filter(item -> item.outputs().contains(key))
-                .map(item -> item instanceof Item.Line line ? line.label() : item instanceof Item.Given given ? given.label() : key)
+                .map(item -> item instanceof Item.Line line
+                        ? line.label()
+                        : item instanceof Item.Given given ? given.label() : key)
                 .findFirst()
                 .orElse(key);
     }

@@ -33,7 +33,10 @@ public record Drawing(String title, nappe.unit.Unit unit, String schematic, List
     public record Path(Pen pen, boolean closed, List<Point> points) implements Part {}
 
     /** A water surface with its sign, and its level where it has one. */
-    public record Water(Point from, Point to, @org.jspecify.annotations.Nullable Quantity level) implements Part {}
+    public record Water(
+            Point from,
+            Point to,
+            @org.jspecify.annotations.Nullable Quantity level) implements Part {}
 
     /** A dimension between two points; a rank further out where there is no room. */
     public record Dimension(Side side, int rank, Point from, Point to, Quantity value) implements Part {}

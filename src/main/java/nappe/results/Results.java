@@ -13,7 +13,11 @@ import nappe.formula.Value;
  * @param figures by the key of their block
  */
 public record Results(
-        Furniture furniture, List<Sheet> sheets, List<Cell> cells, Map<Cell, Value> values, Map<String, Figure> figures) {
+        Furniture furniture,
+        List<Sheet> sheets,
+        List<Cell> cells,
+        Map<Cell, Value> values,
+        Map<String, Figure> figures) {
     /** Results without figures. */
     public Results(Furniture furniture, List<Sheet> sheets, List<Cell> cells, Map<Cell, Value> values) {
         this(furniture, sheets, cells, values, Map.of());

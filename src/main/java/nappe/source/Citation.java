@@ -9,7 +9,8 @@ package nappe.source;
 public record Citation(Publication publication, String place, boolean memory) {
     /** As printed beside a line: {@code WMM ch. 8 (from memory)}. */
     public String shown() {
-        return publication.key() + (place.isEmpty() ? "" : " " + place)
+        return publication.key()
+                + (place.isEmpty() ? "" : " " + place)
                 + (memory || publication.memory() ? " (from memory)" : "");
     }
 }

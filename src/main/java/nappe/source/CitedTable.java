@@ -93,7 +93,10 @@ public final class CitedTable {
 
     /** The column with the symbol, or null. */
     public @Nullable Column column(String symbol) {
-        return columns.stream().filter(c -> c.symbol().equals(symbol)).findFirst().orElse(null);
+        return columns.stream()
+                .filter(c -> c.symbol().equals(symbol))
+                .findFirst()
+                .orElse(null);
     }
 
     /** The names of its columns, for messages. */
@@ -122,13 +125,15 @@ public final class CitedTable {
             }
         }
         if (title.isEmpty() || source.isEmpty()) {
-            throw new TableException(file + ":1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
+            throw new TableException(
+                    file + ":1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
         }
         return new CitedTable(name, title, source, List.copyOf(remarks), readColumns(file, text));
     }
 
     private static List<Column> readColumns(String file, String text) {
-        CSVFormat format = CSVFormat.DEFAULT.builder()
+        CSVFormat format = CSVFormat.DEFAULT
+                .builder()
                 .setCommentMarker('#')
                 .setTrim(true)
                 .setIgnoreSurroundingSpaces(true)
@@ -145,8 +150,8 @@ public final class CitedTable {
             for (int i = 0; i < rows.get(0).fields().size(); i++) {
                 Column column = readColumn(file, rows, i);
                 if (columns.stream().anyMatch(c -> c.symbol().equals(column.symbol()))) {
-                    throw new TableException(file + ":" + rows.get(0).line() + ": there are two columns " + column.symbol()
-                            + " (fault: head-twice)");
+                    throw new TableException(file + ":" + rows.get(0).line() + ": there are two columns "
+                            + column.symbol() + " (fault: head-twice)");
                 }
                 columns.add(column);
             }
@@ -163,15 +168,17 @@ public final class CitedTable {
         Row first = rows.get(0);
         Matcher head = HEAD.matcher(first.fields().get(i));
         if (!head.matches()) {
-            throw new TableException(file + ":" + first.line() + ": column head \"" + first.fields().get(i)
+            throw new TableException(file + ":" + first.line() + ": column head \""
+                    + first.fields().get(i)
                     + "\" is not a symbol with its unit in brackets, such as h [m] (fault: head-unclear)");
         }
         Unit unit = unit(file, first.line(), head.group(2));
         List<Value> values = new ArrayList<>();
         for (Row row : rows.subList(1, rows.size())) {
             if (row.fields().size() != first.fields().size()) {
-                throw new TableException(file + ":" + row.line() + ": " + row.fields().size() + " columns where the head has "
-                        + first.fields().size() + " (fault: row-length)");
+                throw new TableException(
+                        file + ":" + row.line() + ": " + row.fields().size() + " columns where the head has "
+                                + first.fields().size() + " (fault: row-length)");
             }
             String field = row.fields().get(i);
             values.add(unit == null ? Value.word(field) : number(file, row.line(), field));
@@ -192,8 +199,7 @@ public final class CitedTable {
             return new Value.None(Value.NOT_GIVEN);
         }
         if (!text.matches("-?\\d+(\\.\\d+)?([eE][+-]?\\d+)?") || !Double.isFinite(Double.parseDouble(text))) {
-            throw new TableException(
-                    file + ":" + line + ": \"" + text + "\" is not a number (fault: number-expected)");
+            throw new TableException(file + ":" + line + ": \"" + text + "\" is not a number (fault: number-expected)");
         }
         return Value.of(Double.parseDouble(text));
     }

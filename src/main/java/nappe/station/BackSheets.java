@@ -44,12 +44,14 @@ final class BackSheets {
             sheet.note("none");
             return;
         }
-        TableDraft table = sheet.table("", List.of(
-                new Block.Column("No.", 6, Block.Align.RIGHT),
-                new Block.Column("Assumption", 50, Block.Align.LEFT),
-                new Block.Column("Basis", 40, Block.Align.LEFT),
-                new Block.Column("Owner", 22, Block.Align.LEFT),
-                new Block.Column("Open or closed", 12, Block.Align.LEFT)));
+        TableDraft table = sheet.table(
+                "",
+                List.of(
+                        new Block.Column("No.", 6, Block.Align.RIGHT),
+                        new Block.Column("Assumption", 50, Block.Align.LEFT),
+                        new Block.Column("Basis", 40, Block.Align.LEFT),
+                        new Block.Column("Owner", 22, Block.Align.LEFT),
+                        new Block.Column("Open or closed", 12, Block.Align.LEFT)));
         int number = 1;
         for (Design.Assumption one : design.assumptions()) {
             table.add(List.of(
@@ -65,31 +67,40 @@ final class BackSheets {
         for (Design.Element element : design.elements()) {
             element.typed().forEach((symbol, typed) -> {
                 if (typed.standing().equals("assumed")) {
-                    assumed.add(List.of(new Block.Text(element.tag()), new Block.Symbol(symbol), new Block.Text(typed.source())));
+                    assumed.add(List.of(
+                            new Block.Text(element.tag()), new Block.Symbol(symbol), new Block.Text(typed.source())));
                 }
             });
         }
         for (Design.FlowCase one : design.cases()) {
-            if (one.flow().standing().equals("assumed") || one.tailwater().standing().equals("assumed")) {
-                assumed.add(List.of(new Block.Text("case"), new Block.Text(one.name()), new Block.Text(one.flow().source())));
+            if (one.flow().standing().equals("assumed")
+                    || one.tailwater().standing().equals("assumed")) {
+                assumed.add(List.of(
+                        new Block.Text("case"),
+                        new Block.Text(one.name()),
+                        new Block.Text(one.flow().source())));
             }
         }
         if (assumed.isEmpty()) {
             sheet.note("none");
             return;
         }
-        TableDraft entries = sheet.table("", List.of(
-                new Block.Column("Where", 6, Block.Align.LEFT),
-                new Block.Column("Symbol or case", 50, Block.Align.LEFT),
-                new Block.Column("Source or basis", 40, Block.Align.LEFT)));
+        TableDraft entries = sheet.table(
+                "",
+                List.of(
+                        new Block.Column("Where", 6, Block.Align.LEFT),
+                        new Block.Column("Symbol or case", 50, Block.Align.LEFT),
+                        new Block.Column("Source or basis", 40, Block.Align.LEFT)));
         assumed.forEach(entries::add);
     }
 
     void references(SheetDraft sheet, Collection<MethodSheet> methods) {
-        TableDraft table = sheet.table("Publications cited by the methods", List.of(
-                new Block.Column("Key", 10, Block.Align.LEFT),
-                new Block.Column("Publication", 90, Block.Align.LEFT),
-                new Block.Column("Standing", 26, Block.Align.LEFT)));
+        TableDraft table = sheet.table(
+                "Publications cited by the methods",
+                List.of(
+                        new Block.Column("Key", 10, Block.Align.LEFT),
+                        new Block.Column("Publication", 90, Block.Align.LEFT),
+                        new Block.Column("Standing", 26, Block.Align.LEFT)));
         Map<String, Publication> known = new LinkedHashMap<>();
         methods.forEach(m -> m.sources().forEach(p -> known.putIfAbsent(p.key() + p.text(), p)));
         for (Publication publication : known.values()) {
@@ -99,14 +110,17 @@ final class BackSheets {
                     new Block.Text(publication.memory() ? "from memory, not confirmed" : "as cited")));
         }
         sheet.gap();
-        TableDraft tables = sheet.table("Cited tables", List.of(
-                new Block.Column("Table", 10, Block.Align.LEFT),
-                new Block.Column("Source", 90, Block.Align.LEFT),
-                new Block.Column("Standing", 26, Block.Align.LEFT)));
+        TableDraft tables = sheet.table(
+                "Cited tables",
+                List.of(
+                        new Block.Column("Table", 10, Block.Align.LEFT),
+                        new Block.Column("Source", 90, Block.Align.LEFT),
+                        new Block.Column("Standing", 26, Block.Align.LEFT)));
         Map<String, CitedTable> cited = new LinkedHashMap<>();
         methods.forEach(m -> cited.putAll(m.tables()));
-        cited.values().forEach(t -> tables.add(List.of(
-                new Block.Text(t.title()), new Block.Text(t.source()), new Block.Text("see sheet Tables"))));
+        cited.values()
+                .forEach(t -> tables.add(List.of(
+                        new Block.Text(t.title()), new Block.Text(t.source()), new Block.Text("see sheet Tables"))));
         sheet.gap();
         sheet.heading("References of the engineer");
         if (design.references().isEmpty()) {
@@ -116,20 +130,43 @@ final class BackSheets {
     }
 
     void software(SheetDraft sheet, SoftwareStatement statement) {
-        sheet.note("Made by Nappe " + statement.version() + ". Each formula is written once, as text in a method sheet; the number, the live"
+        sheet.note("Made by Nappe " + statement.version()
+                + ". Each formula is written once, as text in a method sheet; the number, the live"
                 + " formula in the workbook and the printed equation are readings of that text.");
         texts(sheet, "Method sheets used", List.of("Method", "Hash of its text"), List.of(40, 30), statement.methods());
-        texts(sheet, "Check values run for these methods when this package was made",
-                List.of("Method", "Kind", "Rows", "Met"), List.of(40, 30, 12, 12), statement.counts());
-        texts(sheet, "Check values at hand that are known to disagree, and are not run",
-                List.of("Check value", "Why"), List.of(40, 60), statement.off());
-        sheet.note("Kinds: published, a number printed by somebody else; library, a general-purpose library that was run; derived, a second"
-                + " evaluation of the same theory, which guards the coding and not the theory; memory, not confirmed.");
+        texts(
+                sheet,
+                "Check values run for these methods when this package was made",
+                List.of("Method", "Kind", "Rows", "Met"),
+                List.of(40, 30, 12, 12),
+                statement.counts());
+        texts(
+                sheet,
+                "Check values at hand that are known to disagree, and are not run",
+                List.of("Check value", "Why"),
+                List.of(40, 60),
+                statement.off());
+        sheet.note(
+                "Kinds: published, a number printed by somebody else; library, a general-purpose library that was run; derived, a second"
+                        + " evaluation of the same theory, which guards the coding and not the theory; memory, not confirmed.");
         if (!statement.rows().isEmpty()) {
-            TableDraft table = sheet.workbookTable("Each check value", columns(
-                    List.of("Method and entries", "Source", "Symbol", "Computed", "Expected", "Tolerance", "Verdict"),
-                    List.of(40, 44, 10, 16, 16, 12, 10)), statement.rows().size());
-            statement.rows().forEach(row -> table.add(row.stream().<Block.Item>map(Block.Text::new).toList()));
+            TableDraft table = sheet.workbookTable(
+                    "Each check value",
+                    columns(
+                            List.of(
+                                    "Method and entries",
+                                    "Source",
+                                    "Symbol",
+                                    "Computed",
+                                    "Expected",
+                                    "Tolerance",
+                                    "Verdict"),
+                            List.of(40, 44, 10, 16, 16, 12, 10)),
+                    statement.rows().size());
+            statement
+                    .rows()
+                    .forEach(row -> table.add(
+                            row.stream().<Block.Item>map(Block.Text::new).toList()));
         }
     }
 
@@ -141,13 +178,15 @@ final class BackSheets {
         return columns;
     }
 
-    private static void texts(SheetDraft sheet, String title, List<String> heads, List<Integer> widths, List<List<String>> rows) {
+    private static void texts(
+            SheetDraft sheet, String title, List<String> heads, List<Integer> widths, List<List<String>> rows) {
         if (rows.isEmpty()) {
             sheet.heading(title);
             sheet.note("none");
         } else {
             TableDraft table = sheet.table(title, columns(heads, widths));
-            rows.forEach(row -> table.add(row.stream().<Block.Item>map(Block.Text::new).toList()));
+            rows.forEach(row ->
+                    table.add(row.stream().<Block.Item>map(Block.Text::new).toList()));
         }
         sheet.gap();
     }
@@ -160,13 +199,16 @@ final class BackSheets {
             sheet.gap();
             return;
         }
-        TableDraft table = sheet.table("Roots found in trial rows", List.of(
-                new Block.Column("Element", 9, Block.Align.LEFT),
-                new Block.Column("Root", 40, Block.Align.LEFT),
-                new Block.Column("Case", 26, Block.Align.LEFT),
-                new Block.Column("Trials", 24, Block.Align.LEFT),
-                new Block.Column("Trials used", 15, Block.Align.RIGHT),
-                new Block.Column("Difference left (0: within 1e-12 of the right side)", 20, Block.Align.RIGHT)));
+        TableDraft table = sheet.table(
+                "Roots found in trial rows",
+                List.of(
+                        new Block.Column("Element", 9, Block.Align.LEFT),
+                        new Block.Column("Root", 40, Block.Align.LEFT),
+                        new Block.Column("Case", 26, Block.Align.LEFT),
+                        new Block.Column("Trials", 24, Block.Align.LEFT),
+                        new Block.Column("Trials used", 15, Block.Align.RIGHT),
+                        new Block.Column(
+                                "Difference left (0: within 1e-12 of the right side)", 20, Block.Align.RIGHT)));
         for (TrialRows.Solved root : roots) {
             Scope scope = Scope.ofElement();
             scope.put("closing", root.status());

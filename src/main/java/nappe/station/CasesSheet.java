@@ -48,32 +48,38 @@ final class CasesSheet {
     }
 
     void lay(Unit flowReport, String datum) {
-        sheet.note("Elevations refer to " + datum + ". Flows and water levels are as supplied; the governing combination is for"
+        sheet.note("Elevations refer to " + datum
+                + ". Flows and water levels are as supplied; the governing combination is for"
                 + " the engineer to confirm.");
-        TableDraft flowTable = sheet.table("Flows", List.of(
-                new Block.Column("Case", 26, Block.Align.LEFT),
-                new Block.Column("Averaging period", 16, Block.Align.LEFT),
-                new Block.Column("Design year", 10, Block.Align.LEFT),
-                new Block.Column("Flow as typed", 12, Block.Align.RIGHT),
-                new Block.Column("Unit", 8, Block.Align.LEFT),
-                new Block.Column("Q [" + working(flowReport) + "]", 12, Block.Align.RIGHT),
-                new Block.Column("Q [" + flowReport + "]", 12, Block.Align.RIGHT),
-                new Block.Column("Source or basis", 34, Block.Align.LEFT),
-                new Block.Column("Standing", 10, Block.Align.LEFT)));
+        TableDraft flowTable = sheet.table(
+                "Flows",
+                List.of(
+                        new Block.Column("Case", 26, Block.Align.LEFT),
+                        new Block.Column("Averaging period", 16, Block.Align.LEFT),
+                        new Block.Column("Design year", 10, Block.Align.LEFT),
+                        new Block.Column("Flow as typed", 12, Block.Align.RIGHT),
+                        new Block.Column("Unit", 8, Block.Align.LEFT),
+                        new Block.Column("Q [" + working(flowReport) + "]", 12, Block.Align.RIGHT),
+                        new Block.Column("Q [" + flowReport + "]", 12, Block.Align.RIGHT),
+                        new Block.Column("Source or basis", 34, Block.Align.LEFT),
+                        new Block.Column("Standing", 10, Block.Align.LEFT)));
         for (Design.FlowCase one : cases) {
             flow(flowTable, one, flowReport);
         }
         sheet.gap();
-        TableDraft levelTable = sheet.table("Water levels downstream", List.of(
-                new Block.Column("Case", 26, Block.Align.LEFT),
-                new Block.Column("Return period", 16, Block.Align.LEFT),
-                new Block.Column("", 10, Block.Align.LEFT),
-                new Block.Column("Level as typed", 12, Block.Align.RIGHT),
-                new Block.Column("Unit", 8, Block.Align.LEFT),
-                new Block.Column("Level [" + cells.unit(nappe.unit.Dimension.LENGTH) + "]", 12, Block.Align.RIGHT),
-                new Block.Column("", 12, Block.Align.RIGHT),
-                new Block.Column("Source or basis", 34, Block.Align.LEFT),
-                new Block.Column("Standing", 10, Block.Align.LEFT)));
+        TableDraft levelTable = sheet.table(
+                "Water levels downstream",
+                List.of(
+                        new Block.Column("Case", 26, Block.Align.LEFT),
+                        new Block.Column("Return period", 16, Block.Align.LEFT),
+                        new Block.Column("", 10, Block.Align.LEFT),
+                        new Block.Column("Level as typed", 12, Block.Align.RIGHT),
+                        new Block.Column("Unit", 8, Block.Align.LEFT),
+                        new Block.Column(
+                                "Level [" + cells.unit(nappe.unit.Dimension.LENGTH) + "]", 12, Block.Align.RIGHT),
+                        new Block.Column("", 12, Block.Align.RIGHT),
+                        new Block.Column("Source or basis", 34, Block.Align.LEFT),
+                        new Block.Column("Standing", 10, Block.Align.LEFT)));
         for (Design.FlowCase one : cases) {
             level(levelTable, one);
         }
@@ -126,13 +132,15 @@ final class CasesSheet {
         Map<String, List<Cell>> known = new LinkedHashMap<>();
         for (Item.Given given : asked) {
             Unit working = working(given.unit());
-            TableDraft table = sheet.table(tag + "  " + given.symbol() + ": " + given.label(), List.of(
-                    new Block.Column("Case", 26, Block.Align.LEFT),
-                    new Block.Column("", 16, Block.Align.LEFT),
-                    new Block.Column("", 10, Block.Align.LEFT),
-                    new Block.Column("As typed", 12, Block.Align.RIGHT),
-                    new Block.Column("Unit", 8, Block.Align.LEFT),
-                    new Block.Column(given.symbol() + " [" + working + "]", 12, Block.Align.RIGHT)));
+            TableDraft table = sheet.table(
+                    tag + "  " + given.symbol() + ": " + given.label(),
+                    List.of(
+                            new Block.Column("Case", 26, Block.Align.LEFT),
+                            new Block.Column("", 16, Block.Align.LEFT),
+                            new Block.Column("", 10, Block.Align.LEFT),
+                            new Block.Column("As typed", 12, Block.Align.RIGHT),
+                            new Block.Column("Unit", 8, Block.Align.LEFT),
+                            new Block.Column(given.symbol() + " [" + working + "]", 12, Block.Align.RIGHT)));
             List<Cell> perCase = new ArrayList<>();
             for (Design.FlowCase one : cases) {
                 perCase.add(own(table, tag, given, one));

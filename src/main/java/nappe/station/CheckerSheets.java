@@ -24,16 +24,19 @@ final class CheckerSheets {
 
     /** Every line of the elements with its formula and its cell, to be ticked off by hand. */
     static void formulas(SheetDraft sheet, Map<String, List<Block.Line>> linesOf) {
-        sheet.note("To be filled in by the checker, by hand. Each line is given once, by its cell for all cases or for the first case.");
+        sheet.note(
+                "To be filled in by the checker, by hand. Each line is given once, by its cell for all cases or for the first case.");
         linesOf.forEach((tag, lines) -> {
-            TableDraft table = sheet.table("Formulas of " + tag, List.of(
-                    new Block.Column("Line", 9, Block.Align.LEFT),
-                    new Block.Column("Quantity", 34, Block.Align.LEFT),
-                    new Block.Column("Formula", 46, Block.Align.LEFT),
-                    new Block.Column("Cell", 12, Block.Align.LEFT),
-                    new Block.Column("Tick", 6, Block.Align.LEFT),
-                    new Block.Column("Initials", 8, Block.Align.LEFT),
-                    new Block.Column("Comment", 30, Block.Align.LEFT)));
+            TableDraft table = sheet.table(
+                    "Formulas of " + tag,
+                    List.of(
+                            new Block.Column("Line", 9, Block.Align.LEFT),
+                            new Block.Column("Quantity", 34, Block.Align.LEFT),
+                            new Block.Column("Formula", 46, Block.Align.LEFT),
+                            new Block.Column("Cell", 12, Block.Align.LEFT),
+                            new Block.Column("Tick", 6, Block.Align.LEFT),
+                            new Block.Column("Initials", 8, Block.Align.LEFT),
+                            new Block.Column("Comment", 30, Block.Align.LEFT)));
             for (Block.Line line : lines) {
                 Cell cell = first(line);
                 if (cell != null) {
@@ -71,20 +74,24 @@ final class CheckerSheets {
             for (Block.Line line : known.values()) {
                 Set<String> direct = direct(line, known);
                 restsOn.put(line.symbol(), direct);
-                direct.forEach(s -> carries.computeIfAbsent(s, k -> new LinkedHashSet<>()).add(line.symbol()));
+                direct.forEach(s ->
+                        carries.computeIfAbsent(s, k -> new LinkedHashSet<>()).add(line.symbol()));
             }
-            TableDraft table = sheet.table("Symbols of " + tag, List.of(
-                    new Block.Column("Symbol", 12, Block.Align.LEFT),
-                    new Block.Column("Meaning", 46, Block.Align.LEFT),
-                    new Block.Column("Unit", 10, Block.Align.LEFT),
-                    new Block.Column("Rests on", 36, Block.Align.LEFT),
-                    new Block.Column("What rests on it", 36, Block.Align.LEFT)));
-            known.values().forEach(line -> table.add(List.of(
-                    new Block.Symbol(line.symbol()),
-                    new Block.Text(line.description()),
-                    new Block.Text(line.unit()),
-                    new Block.Text(listed(restsOn.getOrDefault(line.symbol(), Set.of()), "what is given")),
-                    new Block.Text(listed(carries.getOrDefault(line.symbol(), Set.of()), "a result")))));
+            TableDraft table = sheet.table(
+                    "Symbols of " + tag,
+                    List.of(
+                            new Block.Column("Symbol", 12, Block.Align.LEFT),
+                            new Block.Column("Meaning", 46, Block.Align.LEFT),
+                            new Block.Column("Unit", 10, Block.Align.LEFT),
+                            new Block.Column("Rests on", 36, Block.Align.LEFT),
+                            new Block.Column("What rests on it", 36, Block.Align.LEFT)));
+            known.values()
+                    .forEach(line -> table.add(List.of(
+                            new Block.Symbol(line.symbol()),
+                            new Block.Text(line.description()),
+                            new Block.Text(line.unit()),
+                            new Block.Text(listed(restsOn.getOrDefault(line.symbol(), Set.of()), "what is given")),
+                            new Block.Text(listed(carries.getOrDefault(line.symbol(), Set.of()), "a result")))));
             sheet.gap();
         });
     }
@@ -122,6 +129,8 @@ final class CheckerSheets {
     }
 
     private static @org.jspecify.annotations.Nullable Cell first(Block.Line line) {
-        return line.forAll() != null ? line.forAll() : line.perCase().isEmpty() ? null : line.perCase().get(0);
+        return line.forAll() != null
+                ? line.forAll()
+                : line.perCase().isEmpty() ? null : line.perCase().get(0);
     }
 }

@@ -24,13 +24,16 @@ final class DemandCheck {
             if (unit == null) {
                 faults.add(new DesignFault(
                         demand.symbolAt(),
-                        "\"" + demand.symbol() + "\" is not a result of " + demand.tag() + "; it has " + results(method),
+                        "\"" + demand.symbol() + "\" is not a result of " + demand.tag() + "; it has "
+                                + results(method),
                         "symbol-unknown"));
             } else if (!unit.dimension().equals(demand.value().unit().dimension())) {
                 faults.add(new DesignFault(
                         demand.unitAt(),
-                        demand.symbol() + " is measured in " + unit + ", and " + demand.value().unit()
-                                + " does not measure the same (" + demand.value().unit().dimension() + " against "
+                        demand.symbol() + " is measured in " + unit + ", and "
+                                + demand.value().unit()
+                                + " does not measure the same ("
+                                + demand.value().unit().dimension() + " against "
                                 + unit.dimension() + "); write a unit such as " + unit,
                         "unit-dimension"));
             }
@@ -71,7 +74,8 @@ final class DemandCheck {
             return root.unit();
         }
         if (item instanceof Item.At at) {
-            Item member = method.item(java.util.Objects.requireNonNull(at.results().get(symbol)));
+            Item member =
+                    method.item(java.util.Objects.requireNonNull(at.results().get(symbol)));
             return member instanceof Item.Line line ? line.unit() : null;
         }
         return item instanceof Item.Given given && given.from() != Item.From.CHOICE ? given.unit() : null;

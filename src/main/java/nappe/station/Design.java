@@ -106,6 +106,9 @@ public record Design(
 
     /** The element with the tag, or null. */
     public @Nullable Element element(String tag) {
-        return elements.stream().filter(e -> e.tag().equalsIgnoreCase(tag)).findFirst().orElse(null);
+        return elements.stream()
+                .filter(e -> e.tag().equalsIgnoreCase(tag))
+                .findFirst()
+                .orElse(null);
     }
 }

@@ -22,12 +22,14 @@ final class DrawnSheet {
     /** @param symbols shown in the drawing */
     void lay(String tag, List<String> symbols, Scope worked) {
         sheet.figure("Geometry and levels of " + tag, tag + PackageLayout.GEOMETRY_FIGURE);
-        TableDraft table = sheet.table("Values shown in the drawing", List.of(
-                new Block.Column("Symbol", 10, Block.Align.LEFT),
-                new Block.Column("Description", 50, Block.Align.LEFT),
-                new Block.Column("Value", 16, Block.Align.RIGHT),
-                new Block.Column("Unit", 8, Block.Align.LEFT),
-                new Block.Column("Source", 30, Block.Align.LEFT)));
+        TableDraft table = sheet.table(
+                "Values shown in the drawing",
+                List.of(
+                        new Block.Column("Symbol", 10, Block.Align.LEFT),
+                        new Block.Column("Description", 50, Block.Align.LEFT),
+                        new Block.Column("Value", 16, Block.Align.RIGHT),
+                        new Block.Column("Unit", 8, Block.Align.LEFT),
+                        new Block.Column("Source", 30, Block.Align.LEFT)));
         for (String symbol : symbols) {
             Cell cell = worked.cell(symbol);
             table.add(List.of(
@@ -47,7 +49,9 @@ final class DrawnSheet {
         }
         return item instanceof Item.Given given
                 ? given.label()
-                : item instanceof Item.Constant constant ? constant.label() : item instanceof Item.Root root ? root.label() : "";
+                : item instanceof Item.Constant constant
+                        ? constant.label()
+                        : item instanceof Item.Root root ? root.label() : "";
     }
 
     private String source(String symbol) {

@@ -48,8 +48,11 @@ final class FrontSheets {
 
     void cover(SheetDraft sheet, SummarySheet.Sorted limits) {
         Design.Project project = design.project();
-        TableDraft head = sheet.table("", List.of(
-                new Block.Column("Calculation", 26, Block.Align.LEFT), new Block.Column("", 60, Block.Align.LEFT)));
+        TableDraft head = sheet.table(
+                "",
+                List.of(
+                        new Block.Column("Calculation", 26, Block.Align.LEFT),
+                        new Block.Column("", 60, Block.Align.LEFT)));
         row(head, "Project", project.project());
         row(head, "Client", project.client());
         row(head, "Firm", project.firm());
@@ -57,12 +60,18 @@ final class FrontSheets {
         row(head, "Subject", project.subject());
         row(head, "Revision", project.revision() + ", " + project.date());
         row(head, "Status", project.status());
-        row(head, "Elements", String.join("; ", design.elements().stream()
-                .map(e -> e.tag() + (e.title().isEmpty() ? "" : " " + e.title()))
-                .toList()));
+        row(
+                head,
+                "Elements",
+                String.join(
+                        "; ",
+                        design.elements().stream()
+                                .map(e -> e.tag() + (e.title().isEmpty() ? "" : " " + e.title()))
+                                .toList()));
         row(head, "Elevations refer to", project.datum());
         row(head, "Working units", project.system().title());
-        long open = design.assumptions().stream().filter(Design.Assumption::open).count();
+        long open =
+                design.assumptions().stream().filter(Design.Assumption::open).count();
         row(head, "Open assumptions", open == 0 ? "none" : "YES: " + open + " to be confirmed, see sheet Assumptions");
         long assumed = design.elements().stream()
                         .flatMap(e -> e.typed().values().stream())
@@ -93,23 +102,34 @@ final class FrontSheets {
     }
 
     private void verdicts(SheetDraft sheet, Run verdicts) {
-        TableDraft table = sheet.table("Limits, each counted by its worst verdict over the cases", List.of(
-                new Block.Column("Verdict", 26, Block.Align.LEFT), new Block.Column("Limits", 60, Block.Align.LEFT)));
+        TableDraft table = sheet.table(
+                "Limits, each counted by its worst verdict over the cases",
+                List.of(
+                        new Block.Column("Verdict", 26, Block.Align.LEFT),
+                        new Block.Column("Limits", 60, Block.Align.LEFT)));
         Scope scope = Scope.ofElement();
         scope.put("verdicts", verdicts);
         for (String verdict : VERDICTS) {
             Cell count = cells.raw(
-                    table.place(1), "", Unit.one(), call(Function.TALLY, symbol("verdicts"), word(verdict)), scope, null, false);
+                    table.place(1),
+                    "",
+                    Unit.one(),
+                    call(Function.TALLY, symbol("verdicts"), word(verdict)),
+                    scope,
+                    null,
+                    false);
             table.add(List.of(new Block.Text(verdict), new Block.Content(count)));
         }
         sheet.gap();
     }
 
     private void worst(SheetDraft sheet, SummarySheet.Sorted limits) {
-        TableDraft table = sheet.table("The three worst limits", List.of(
-                new Block.Column("Verdict", 26, Block.Align.LEFT),
-                new Block.Column("Limit", 60, Block.Align.LEFT),
-                new Block.Column("Tightest in case", 30, Block.Align.LEFT)));
+        TableDraft table = sheet.table(
+                "The three worst limits",
+                List.of(
+                        new Block.Column("Verdict", 26, Block.Align.LEFT),
+                        new Block.Column("Limit", 60, Block.Align.LEFT),
+                        new Block.Column("Tightest in case", 30, Block.Align.LEFT)));
         for (int i = 0; i < Math.min(3, limits.verdicts().cells().size()); i++) {
             List<Block.Item> row = new ArrayList<>();
             int column = 0;
@@ -125,9 +145,11 @@ final class FrontSheets {
     }
 
     private static void approvals(SheetDraft sheet) {
-        TableDraft table = sheet.table("Approvals, to be filled in by hand", List.of(
-                new Block.Column("", 26, Block.Align.LEFT),
-                new Block.Column("Name, initials and date", 60, Block.Align.LEFT)));
+        TableDraft table = sheet.table(
+                "Approvals, to be filled in by hand",
+                List.of(
+                        new Block.Column("", 26, Block.Align.LEFT),
+                        new Block.Column("Name, initials and date", 60, Block.Align.LEFT)));
         for (String role : List.of("By", "Checked", "Approved")) {
             table.add(List.of(new Block.Text(role), new Block.Text("")));
         }
@@ -135,10 +157,12 @@ final class FrontSheets {
     }
 
     void index(SheetDraft sheet, List<SheetDraft> all, List<String> contents) {
-        TableDraft table = sheet.table("Sheets", List.of(
-                new Block.Column("Sheet", 50, Block.Align.LEFT),
-                new Block.Column("What it holds", 80, Block.Align.LEFT),
-                new Block.Column("Workbook tab", 16, Block.Align.LEFT)));
+        TableDraft table = sheet.table(
+                "Sheets",
+                List.of(
+                        new Block.Column("Sheet", 50, Block.Align.LEFT),
+                        new Block.Column("What it holds", 80, Block.Align.LEFT),
+                        new Block.Column("Workbook tab", 16, Block.Align.LEFT)));
         for (int i = 0; i < all.size(); i++) {
             SheetDraft one = all.get(i);
             table.add(List.of(
@@ -158,18 +182,23 @@ final class FrontSheets {
         if (design.revisions().isEmpty()) {
             sheet.note("none");
         } else {
-            TableDraft revisions = sheet.table("", List.of(
-                    new Block.Column("Revision and date", 50, Block.Align.LEFT),
-                    new Block.Column("What changed", 80, Block.Align.LEFT)));
-            design.revisions().forEach(r -> revisions.add(
-                    List.of(new Block.Text(r.revision() + ", " + r.date()), new Block.Text(r.what()))));
+            TableDraft revisions = sheet.table(
+                    "",
+                    List.of(
+                            new Block.Column("Revision and date", 50, Block.Align.LEFT),
+                            new Block.Column("What changed", 80, Block.Align.LEFT)));
+            design.revisions()
+                    .forEach(r -> revisions.add(
+                            List.of(new Block.Text(r.revision() + ", " + r.date()), new Block.Text(r.what()))));
         }
     }
 
     private void requirements(SheetDraft sheet, List<SheetDraft> all) {
-        TableDraft table = sheet.table("", List.of(
-                new Block.Column("Answered on", 50, Block.Align.LEFT),
-                new Block.Column("Requirement and its citation", 80, Block.Align.LEFT)));
+        TableDraft table = sheet.table(
+                "",
+                List.of(
+                        new Block.Column("Answered on", 50, Block.Align.LEFT),
+                        new Block.Column("Requirement and its citation", 80, Block.Align.LEFT)));
         for (Design.Requirement requirement : design.requirements()) {
             List<Block.Item> row = new ArrayList<>();
             row.add(answer(requirement.answer(), all));

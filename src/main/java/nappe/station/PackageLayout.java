@@ -99,14 +99,22 @@ public final class PackageLayout {
 
     private Layout lay(SoftwareStatement software) {
         SheetDraft cover = draft("Cover", "Cover", "what this calculation is for, status, approvals, cautions");
-        SheetDraft index = draft("Index", "Index, requirements and revisions", "this list; requirements and where they are answered");
-        SheetDraft limitSheet = draft("Limits", "Summary of limits", "every limit in its worst case, and in every case");
-        SheetDraft caseSheet = draft("Cases", "Design flows and water levels", "flow cases as typed and in working units");
-        SheetDraft entrySheet = draft("Entries", "Entries and demands, with sources", "what was typed, in its unit and in working units");
-        SheetDraft constantSheet = draft("Constants", "Constants and conversion factors", "cited numbers and factors in use");
+        SheetDraft index = draft(
+                "Index", "Index, requirements and revisions", "this list; requirements and where they are answered");
+        SheetDraft limitSheet =
+                draft("Limits", "Summary of limits", "every limit in its worst case, and in every case");
+        SheetDraft caseSheet =
+                draft("Cases", "Design flows and water levels", "flow cases as typed and in working units");
+        SheetDraft entrySheet = draft(
+                "Entries", "Entries and demands, with sources", "what was typed, in its unit and in working units");
+        SheetDraft constantSheet =
+                draft("Constants", "Constants and conversion factors", "cited numbers and factors in use");
         SheetDraft tableSheet = draft("Tables", "Cited tables", "published coefficients that the lines look up");
         SheetDraft standingSheet = hasRemarks()
-                ? draft("Standing", "Standing of the tabled numbers", "row by row: what was read where, what is from memory")
+                ? draft(
+                        "Standing",
+                        "Standing of the tabled numbers",
+                        "row by row: what was read where, what is from memory")
                 : tableSheet;
         Map<String, SheetDraft> elementSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> figureSheets = new LinkedHashMap<>();
@@ -114,23 +122,38 @@ public final class PackageLayout {
         for (Design.Element element : design.elements()) {
             String title = element.tag() + "  " + EntriesSheet.title(element, method(element));
             SheetDraft methodSheet = draft(
-                    element.tag() + " method", element.tag() + "  Method and limits of use", "what the method says, and where it holds");
+                    element.tag() + " method",
+                    element.tag() + "  Method and limits of use",
+                    "what the method says, and where it holds");
             method(element).about().forEach(methodSheet::note);
             methodSheet.heading("Cautions");
             method(element).cautions().forEach(methodSheet::caution);
             if (!drawn.apply(method(element)).isEmpty()) {
-                figureSheets.put(element.tag(), draft(
-                        element.tag() + " figure", element.tag() + "  Geometry and levels", "the device drawn, with its dimensions and levels"));
+                figureSheets.put(
+                        element.tag(),
+                        draft(
+                                element.tag() + " figure",
+                                element.tag() + "  Geometry and levels",
+                                "the device drawn, with its dimensions and levels"));
             }
-            elementSheets.put(element.tag(), draft(element.tag(), title, "one case worked in full, every case, limits"));
+            elementSheets.put(
+                    element.tag(), draft(element.tag(), title, "one case worked in full, every case, limits"));
             if (!method(element).ratings().isEmpty()) {
-                ratingSheets.put(element.tag(), draft(
-                        element.tag() + " rating", element.tag() + "  Rating table", "flow for equal steps of head, over the usable range"));
+                ratingSheets.put(
+                        element.tag(),
+                        draft(
+                                element.tag() + " rating",
+                                element.tag() + "  Rating table",
+                                "flow for equal steps of head, over the usable range"));
             }
         }
         SheetDraft assumptionSheet = draft("Assumptions", "Assumptions", "each with basis and owner, open or closed");
-        SheetDraft glossarySheet = draft("Glossary", "Glossary and dependence", "every symbol, what it rests on, what rests on it");
-        SheetDraft checkerSheet = draft("Checker", "Checker's record", "every formula with its cell, room for tick, initials and comment");
+        SheetDraft glossarySheet =
+                draft("Glossary", "Glossary and dependence", "every symbol, what it rests on, what rests on it");
+        SheetDraft registerSheet =
+                draft("Register", "Register of results", "every result with its case, sheet, line and cell (workbook)");
+        SheetDraft checkerSheet = draft(
+                "Checker", "Checker's record", "every formula with its cell, room for tick, initials and comment");
         SheetDraft referenceSheet = draft("References", "References", "publications and tables cited");
         SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
@@ -172,7 +195,8 @@ public final class PackageLayout {
             casesOf.put(element.tag(), caseScopes);
             SheetDraft figureSheet = figureSheets.get(element.tag());
             if (figureSheet != null) {
-                new DrawnSheet(method, figureSheet).lay(element.tag(), drawn.apply(method), caseScopes.get(workedCase()));
+                new DrawnSheet(method, figureSheet)
+                        .lay(element.tag(), drawn.apply(method), caseScopes.get(workedCase()));
             }
             SheetDraft ratingSheet = ratingSheets.get(element.tag());
             if (ratingSheet != null) {
@@ -187,9 +211,13 @@ public final class PackageLayout {
 
         BackSheets back = new BackSheets(cells, design);
         back.roots(trialSheet, trialRows.solved());
-        SummarySheet.Sorted sorted = new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
+        SummarySheet.Sorted sorted =
+                new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
         CheckerSheets.glossary(glossarySheet, linesOf);
         CheckerSheets.formulas(checkerSheet, linesOf);
+        Map<String, Integer> numbers = new LinkedHashMap<>();
+        elementSheets.forEach((tag, sheet) -> numbers.put(tag, drafts.indexOf(sheet) + 1));
+        RegisterSheet.lay(registerSheet, cells, linesOf, numbers, caseNames);
         limitSheet.figure("Margins of the limits", LIMITS_FIGURE);
         back.assumptions(assumptionSheet);
         back.references(referenceSheet, distinct);
@@ -202,7 +230,8 @@ public final class PackageLayout {
         for (int i = 0; i < drafts.size(); i++) {
             sheets.add(drafts.get(i).finish(i + 1));
         }
-        return new Layout(List.copyOf(sheets), List.copyOf(cells.all()), ratings, casesOf, List.copyOf(limits), workedCase());
+        return new Layout(
+                List.copyOf(sheets), List.copyOf(cells.all()), ratings, casesOf, List.copyOf(limits), workedCase());
     }
 
     private boolean hasRemarks() {
@@ -230,7 +259,9 @@ public final class PackageLayout {
             List<Scope> downstream) {
         List<Item.Given> asked = new ArrayList<>();
         for (Item item : method.items()) {
-            if (item instanceof Item.Given given && given.from() == Item.From.CASE && given.role().isEmpty()) {
+            if (item instanceof Item.Given given
+                    && given.from() == Item.From.CASE
+                    && given.role().isEmpty()) {
                 asked.add(given);
             }
         }
@@ -270,7 +301,8 @@ public final class PackageLayout {
         }
         throw new StationException(List.of(new DesignFault(
                 new Design.Origin("Project", ""),
-                "nothing downstream gives a " + role + " to this element; put an element below it that does, or take it away",
+                "nothing downstream gives a " + role
+                        + " to this element; put an element below it that does, or take it away",
                 "link-missing")));
     }
 
@@ -314,7 +346,8 @@ public final class PackageLayout {
                 reports.put(unit.dimension(), unit);
             }
         }
-        sheet.note("Only for free flow as the method defines it. Outside this range, or where a limit of the device is not met, no result is claimed.");
+        sheet.note(
+                "Only for free flow as the method defines it. Outside this range, or where a limit of the device is not met, no result is claimed.");
         method.cautions().forEach(sheet::caution);
         sheet.gap();
         sheet.figure("Rating curve of " + element.tag(), element.tag() + RATING_FIGURE);

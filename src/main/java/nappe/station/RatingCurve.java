@@ -93,7 +93,8 @@ final class RatingCurve {
         List<Cell> column = new ArrayList<>();
         for (Block.Row row : table.rows()) {
             column.add(row.items().stream()
-                    .filter(item -> item instanceof Block.Content content && content.cell().symbol().equals(symbol))
+                    .filter(item -> item instanceof Block.Content content
+                            && content.cell().symbol().equals(symbol))
                     .map(item -> ((Block.Content) item).cell())
                     .findFirst()
                     .orElseThrow());
@@ -104,13 +105,16 @@ final class RatingCurve {
     private Block.Series points(String flow, String head, List<String> caseNames, List<Scope> cases) {
         Unit across = cases.get(0).cell(flow).unit();
         Unit up = cases.get(0).cell(head).unit();
-        TableDraft table = sheet.workbookTable("Flow cases as marked; one without a head is marked at the origin", List.of(
-                new Block.Column("No.", 6, Block.Align.RIGHT),
-                new Block.Column(flow + " [" + across + "]", 14, Block.Align.RIGHT),
-                new Block.Column(head + " [" + up + "]", 14, Block.Align.RIGHT),
-                new Block.Column("marked at " + flow, 14, Block.Align.RIGHT),
-                new Block.Column("marked at " + head, 14, Block.Align.RIGHT),
-                new Block.Column("Case", 26, Block.Align.LEFT)), cases.size());
+        TableDraft table = sheet.workbookTable(
+                "Flow cases as marked; one without a head is marked at the origin",
+                List.of(
+                        new Block.Column("No.", 6, Block.Align.RIGHT),
+                        new Block.Column(flow + " [" + across + "]", 14, Block.Align.RIGHT),
+                        new Block.Column(head + " [" + up + "]", 14, Block.Align.RIGHT),
+                        new Block.Column("marked at " + flow, 14, Block.Align.RIGHT),
+                        new Block.Column("marked at " + head, 14, Block.Align.RIGHT),
+                        new Block.Column("Case", 26, Block.Align.LEFT)),
+                cases.size());
         List<Cell> flows = new ArrayList<>();
         List<Cell> heads = new ArrayList<>();
         for (int c = 0; c < cases.size(); c++) {

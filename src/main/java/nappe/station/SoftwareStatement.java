@@ -11,4 +11,9 @@ import java.util.List;
  *     source, verdict
  * @param off check values at hand that disagree and are not run: id and why
  */
-public record SoftwareStatement(String version, List<List<String>> methods, List<List<String>> counts, List<List<String>> rows, List<List<String>> off) {}
+public record SoftwareStatement(
+        String version,
+        List<List<String>> methods,
+        List<List<String>> counts,
+        List<List<String>> rows,
+        List<List<String>> off) {}

@@ -60,7 +60,11 @@ final class Sources {
         }
         if (table.isEmpty()) {
             table.add(List.of(
-                    new Block.Text("none"), new Block.Text(""), new Block.Text(""), new Block.Text(""), new Block.Text("")));
+                    new Block.Text("none"),
+                    new Block.Text(""),
+                    new Block.Text(""),
+                    new Block.Text(""),
+                    new Block.Text("")));
         }
         constants.gap();
         return typed;
@@ -69,7 +73,12 @@ final class Sources {
     private Cell constant(TableDraft table, Item.Constant constant, MethodSheet method) {
         Sign sign = constant.value() > 0 ? Sign.POSITIVE : Sign.ANY;
         Cell cell = cells.typed(
-                Cell.Kind.CONSTANT, table.place(1), constant.symbol(), constant.unit(), Value.of(constant.value()), sign);
+                Cell.Kind.CONSTANT,
+                table.place(1),
+                constant.symbol(),
+                constant.unit(),
+                Value.of(constant.value()),
+                sign);
         String source = constant.citation() == null ? "" : constant.citation().shown();
         table.add(List.of(
                 new Block.Symbol(constant.symbol()),
@@ -95,8 +104,10 @@ final class Sources {
         tables.heading(table.title());
         tables.note("Source: " + table.source());
         table.remarks().forEach(tables::note);
-        List<CitedTable.Column> narrow = table.columns().stream().filter(c -> !isRemark(c)).toList();
-        List<CitedTable.Column> remarks = table.columns().stream().filter(Sources::isRemark).toList();
+        List<CitedTable.Column> narrow =
+                table.columns().stream().filter(c -> !isRemark(c)).toList();
+        List<CitedTable.Column> remarks =
+                table.columns().stream().filter(Sources::isRemark).toList();
         Map<String, Run> known = new LinkedHashMap<>();
         lay(table, narrow, tables, "", known);
         if (!remarks.isEmpty()) {
@@ -112,7 +123,8 @@ final class Sources {
         return column.isWords() && longest(column) > LONG_WORDS;
     }
 
-    private void lay(CitedTable table, List<CitedTable.Column> columns, SheetDraft sheet, String title, Map<String, Run> known) {
+    private void lay(
+            CitedTable table, List<CitedTable.Column> columns, SheetDraft sheet, String title, Map<String, Run> known) {
         CitedTable.Column key = table.columns().get(0);
         boolean repeatsKey = !columns.contains(key);
         List<Block.Column> heads = new ArrayList<>();
@@ -159,7 +171,8 @@ final class Sources {
 
     private static int longest(CitedTable.Column column) {
         return column.values().stream()
-                .mapToInt(value -> value instanceof Value.Word word ? word.text().length() : 8)
+                .mapToInt(
+                        value -> value instanceof Value.Word word ? word.text().length() : 8)
                 .max()
                 .orElse(8);
     }

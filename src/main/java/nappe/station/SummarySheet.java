@@ -67,8 +67,9 @@ final class SummarySheet {
     /** Lays the work table at the back and the two tables of the summary. */
     Sorted lay(List<LimitResult> limits) {
         work.heading("Order of the limits in the summary");
-        work.note("The order of a limit is the rank of its worst verdict (0 not met, 1 no result, 2 not given, 3 met, 4 does not apply) times"
-                + " three, plus its tightest margin m as m/(1 + |m|), plus a millionth for each limit before it.");
+        work.note(
+                "The order of a limit is the rank of its worst verdict (0 not met, 1 no result, 2 not given, 3 met, 4 does not apply) times"
+                        + " three, plus its tightest margin m as m/(1 + |m|), plus a millionth for each limit before it.");
         TableDraft table = work.workbookTable("", workColumns(), limits.size());
         for (LimitResult limit : limits) {
             work(table, limit);
@@ -121,17 +122,21 @@ final class SummarySheet {
         Formula order = times(number("3"), call(Function.LOWEST_OF, symbol("ranks")));
         if (held.isEmpty()) {
             keep("margin", typed(table, 6, "-"));
-            keep("case", limit.forAll()
-                    ? typed(table, 7, "all cases")
-                    : live(table, 7, call(Function.INDEX, symbol("names"), worst), scope, false));
+            keep(
+                    "case",
+                    limit.forAll()
+                            ? typed(table, 7, "all cases")
+                            : live(table, 7, call(Function.INDEX, symbol("names"), worst), scope, false));
         } else {
             scope.put("held", new Run(held));
             scope.put("margins", new Run(margins));
             Formula tightest = call(Function.MATCH, call(Function.LOWEST_OF, symbol("held")), symbol("held"));
             keep("margin", live(table, 6, call(Function.INDEX, symbol("margins"), tightest), scope, true));
-            keep("case", limit.forAll()
-                    ? typed(table, 7, "all cases")
-                    : live(table, 7, call(Function.INDEX, symbol("names"), tightest), scope, false));
+            keep(
+                    "case",
+                    limit.forAll()
+                            ? typed(table, 7, "all cases")
+                            : live(table, 7, call(Function.INDEX, symbol("names"), tightest), scope, false));
             order = plus(order, call(Function.LOWEST_OF, symbol("held")));
         }
         String tie = String.format(Locale.ROOT, "%.6f", (keys.size() + 1) * 1e-6);
@@ -179,7 +184,9 @@ final class SummarySheet {
         Formula rank = number("4");
         for (int i = RANKED.size() - 1; i >= 0; i--) {
             rank = iff(
-                    compare(symbol("verdict"), Comparator.EQUAL, word(RANKED.get(i))), number(Integer.toString(i)), rank);
+                    compare(symbol("verdict"), Comparator.EQUAL, word(RANKED.get(i))),
+                    number(Integer.toString(i)),
+                    rank);
         }
         return live(table, column, rank, scope, false);
     }
@@ -193,19 +200,22 @@ final class SummarySheet {
     }
 
     private Sorted sorted(int count) {
-        summary.note("Verdicts rest on full precision, with a tolerance of 1e-9 relative to the bound; print is rounded. The verdict of a limit is"
-                + " its worst over the cases. Margin: what is left to the limit over the size of the bound, unless the limit names another"
-                + " scale; for lengths and levels demanded by others, what is left in the working unit.");
-        TableDraft table = summary.table("Limits, the worst first", List.of(
-                new Block.Column("Rank", 6, Block.Align.RIGHT),
-                new Block.Column("Element", 9, Block.Align.LEFT),
-                new Block.Column("Limit", 44, Block.Align.LEFT),
-                new Block.Column("Worst verdict", 15, Block.Align.LEFT),
-                new Block.Column("Cases not met", 12, Block.Align.RIGHT),
-                new Block.Column("Cases without result", 14, Block.Align.RIGHT),
-                new Block.Column("Tightest margin", 14, Block.Align.RIGHT),
-                new Block.Column("in case", 26, Block.Align.LEFT),
-                new Block.Column("Source", 28, Block.Align.LEFT)));
+        summary.note(
+                "Verdicts rest on full precision, with a tolerance of 1e-9 relative to the bound; print is rounded. The verdict of a limit is"
+                        + " its worst over the cases. Margin: what is left to the limit over the size of the bound, unless the limit names another"
+                        + " scale; for lengths and levels demanded by others, what is left in the working unit.");
+        TableDraft table = summary.table(
+                "Limits, the worst first",
+                List.of(
+                        new Block.Column("Rank", 6, Block.Align.RIGHT),
+                        new Block.Column("Element", 9, Block.Align.LEFT),
+                        new Block.Column("Limit", 44, Block.Align.LEFT),
+                        new Block.Column("Worst verdict", 15, Block.Align.LEFT),
+                        new Block.Column("Cases not met", 12, Block.Align.RIGHT),
+                        new Block.Column("Cases without result", 14, Block.Align.RIGHT),
+                        new Block.Column("Tightest margin", 14, Block.Align.RIGHT),
+                        new Block.Column("in case", 26, Block.Align.LEFT),
+                        new Block.Column("Source", 28, Block.Align.LEFT)));
         Scope scope = Scope.ofElement();
         scope.put("keys", new Run(keys));
         parts.forEach((part, cellsOf) -> scope.put(part, new Run(cellsOf)));
@@ -217,8 +227,8 @@ final class SummarySheet {
             List<Block.Item> row = new ArrayList<>(List.of(new Block.Text(Integer.toString(k))));
             int column = 1;
             for (String part : columns) {
-                Cell cell = live(
-                        table, column++, call(Function.INDEX, symbol(part), place), scope, part.equals("margin"));
+                Cell cell =
+                        live(table, column++, call(Function.INDEX, symbol(part), place), scope, part.equals("margin"));
                 laid.computeIfAbsent(part, p -> new ArrayList<>()).add(cell);
                 row.add(new Block.Content(cell));
             }

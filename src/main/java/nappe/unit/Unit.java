@@ -1,9 +1,9 @@
 package nappe.unit;
 
 import java.util.Objects;
-import tech.units.indriya.function.RationalNumber;
-import tech.units.indriya.function.Calculus;
 import org.jspecify.annotations.Nullable;
+import tech.units.indriya.function.Calculus;
+import tech.units.indriya.function.RationalNumber;
 
 /**
  * A unit as the trade writes it ({@code ft3/s}, {@code MGD}, {@code m^(1/3)/s}), with its dimension and its exact size.
@@ -43,7 +43,8 @@ public final class Unit {
     }
 
     /** How many coherent SI units one of this unit is, as an exact fraction; null where it holds pi or a root. */
-    @Nullable RationalNumber exact() {
+    @Nullable
+    RationalNumber exact() {
         return exact;
     }
 

@@ -90,13 +90,15 @@ public final class UnitCatalogue {
         }
     }
 
-    @Nullable Unit named(String name) {
+    @Nullable
+    Unit named(String name) {
         Entry entry = entries.get(name);
         return entry == null ? null : entry.unit();
     }
 
     /** The longest name of the catalogue that the text starts with. */
-    @Nullable String nameAtStart(String text) {
+    @Nullable
+    String nameAtStart(String text) {
         return longestFirst.stream().filter(text::startsWith).findFirst().orElse(null);
     }
 
@@ -104,7 +106,11 @@ public final class UnitCatalogue {
         if (!unit.getSystemUnit().equals(unit)) {
             throw new IllegalStateException(name + " is not a base unit");
         }
-        add(new Entry(new Unit(name, dimension, RationalNumber.ONE, 1, RationalNumber.ZERO), description, "base unit of SI", "SI Brochure, 9th ed."));
+        add(new Entry(
+                new Unit(name, dimension, RationalNumber.ONE, 1, RationalNumber.ZERO),
+                description,
+                "base unit of SI",
+                "SI Brochure, 9th ed."));
     }
 
     private void add(Entry entry) {
@@ -119,7 +125,8 @@ public final class UnitCatalogue {
             if (in == null) {
                 throw new IllegalStateException("tables/units.csv is missing");
             }
-            CSVFormat format = CSVFormat.DEFAULT.builder()
+            CSVFormat format = CSVFormat.DEFAULT
+                    .builder()
                     .setCommentMarker('#')
                     .setHeader()
                     .setSkipHeaderRecord(true)
@@ -141,14 +148,16 @@ public final class UnitCatalogue {
         String definition = factor + " " + of + (zero.isEmpty() ? "" : ", from " + zero + " " + of);
         Unit unit;
         if (factor.equals("pi/180")) {
-            unit = new Unit(row.get("name"), base.dimension(), null, base.sizeInSi() * Math.PI / 180, RationalNumber.ZERO);
+            unit = new Unit(
+                    row.get("name"), base.dimension(), null, base.sizeInSi() * Math.PI / 180, RationalNumber.ZERO);
         } else {
             RationalNumber baseSize = base.exact();
             if (baseSize == null) {
                 throw new IllegalStateException("units.csv: " + of + " has no exact size");
             }
             RationalNumber size = fraction(factor).multiply(baseSize);
-            RationalNumber zeroInSi = zero.isEmpty() ? RationalNumber.ZERO : fraction(zero).multiply(baseSize);
+            RationalNumber zeroInSi =
+                    zero.isEmpty() ? RationalNumber.ZERO : fraction(zero).multiply(baseSize);
             unit = new Unit(row.get("name"), base.dimension(), size, throughLibrary(size), zeroInSi);
         }
         return new Entry(unit, row.get("description"), definition, row.get("source"));
@@ -156,8 +165,8 @@ public final class UnitCatalogue {
 
     /** The size as the JSR-385 library converts it. */
     private static double throughLibrary(RationalNumber size) {
-        javax.measure.Unit<Length> scaled = Units.METRE.transform(
-                tech.units.indriya.function.MultiplyConverter.of(size));
+        javax.measure.Unit<Length> scaled =
+                Units.METRE.transform(tech.units.indriya.function.MultiplyConverter.of(size));
         Number number = ((AbstractUnit<Length>) scaled).getSystemConverter().convert((Number) RationalNumber.ONE);
         return number instanceof RationalNumber rational ? Unit.toDouble(rational) : number.doubleValue();
     }

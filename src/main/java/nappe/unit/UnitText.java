@@ -10,7 +10,8 @@ import tech.units.indriya.function.RationalNumber;
 /** Reads one unit text: {@code term { (. | /) term }}, where a term is a name with an exponent, or {@code 1}. */
 final class UnitText {
     /** At most two figures and never zero, so that a slip of typing is a fault and not a vast power. */
-    private static final Pattern EXPONENT = Pattern.compile("^(?:\\^\\((-?[1-9]\\d?)/([1-9]\\d?)\\)|\\^?(-?[1-9]\\d?))");
+    private static final Pattern EXPONENT =
+            Pattern.compile("^(?:\\^\\((-?[1-9]\\d?)/([1-9]\\d?)\\)|\\^?(-?[1-9]\\d?))");
 
     private static final Pattern LETTERS = Pattern.compile("[A-Za-z]+");
 
@@ -35,7 +36,8 @@ final class UnitText {
         while (true) {
             term(over);
             if (at == text.length()) {
-                return new Unit(text, dimension, exact, exact == null ? size : Unit.toDouble(exact), RationalNumber.ZERO);
+                return new Unit(
+                        text, dimension, exact, exact == null ? size : Unit.toDouble(exact), RationalNumber.ZERO);
             }
             char sign = text.charAt(at++);
             if (sign != '.' && sign != '/') {
@@ -109,11 +111,15 @@ final class UnitText {
     }
 
     private String respelt() {
-        String plain = text.replace(" ", "").replace('\u00b2', '2').replace('\u00b3', '3').replace('\u00b7', '.');
-        return LETTERS.matcher(plain).replaceAll(run -> catalogue.entries().stream()
-                .map(entry -> entry.unit().text())
-                .filter(name -> catalogue.named(run.group()) == null && name.equalsIgnoreCase(run.group()))
-                .findFirst()
-                .orElse(run.group()));
+        String plain = text.replace(" ", "")
+                .replace('\u00b2', '2')
+                .replace('\u00b3', '3')
+                .replace('\u00b7', '.');
+        return LETTERS.matcher(plain)
+                .replaceAll(run -> catalogue.entries().stream()
+                        .map(entry -> entry.unit().text())
+                        .filter(name -> catalogue.named(run.group()) == null && name.equalsIgnoreCase(run.group()))
+                        .findFirst()
+                        .orElse(run.group()));
     }
 }

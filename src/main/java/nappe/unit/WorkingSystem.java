@@ -8,11 +8,15 @@ import tech.units.indriya.function.RationalNumber;
 /** The coherent system a package works in, so that its formulas hide no factors. */
 public enum WorkingSystem {
     /** Metre, kilogram, second, kelvin. */
-    SI("SI", List.of("m", "kg", "s", "K"), Map.of(
-            Dimension.PRESSURE, "Pa", Dimension.VISCOSITY, "Pa.s", Dimension.FORCE, "N")),
+    SI(
+            "SI",
+            List.of("m", "kg", "s", "K"),
+            Map.of(Dimension.PRESSURE, "Pa", Dimension.VISCOSITY, "Pa.s", Dimension.FORCE, "N")),
     /** Foot, slug, second, degree Rankine. */
-    US("US customary", List.of("ft", "slug", "s", "degR"), Map.of(
-            Dimension.PRESSURE, "lbf/ft2", Dimension.VISCOSITY, "lbf.s/ft2", Dimension.FORCE, "lbf"));
+    US(
+            "US customary",
+            List.of("ft", "slug", "s", "degR"),
+            Map.of(Dimension.PRESSURE, "lbf/ft2", Dimension.VISCOSITY, "lbf.s/ft2", Dimension.FORCE, "lbf"));
 
     private final String title;
     private final List<String> bases;

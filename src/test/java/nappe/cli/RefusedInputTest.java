@@ -48,25 +48,74 @@ class RefusedInputTest {
     }
 
     static {
-        fault("missing sheet", f -> f.change(w -> w.removeSheetAt(w.getSheetIndex("Flows"))), "sheet Flows", "sheet-missing");
-        fault("missing entry", f -> f.cell("F1", at("z_f", "C")).setBlank(), "sheet F1, cell " + at("z_f", "C"), "entry-missing");
+        fault(
+                "missing sheet",
+                f -> f.change(w -> w.removeSheetAt(w.getSheetIndex("Flows"))),
+                "sheet Flows",
+                "sheet-missing");
+        fault(
+                "missing entry",
+                f -> f.cell("F1", at("z_f", "C")).setBlank(),
+                "sheet F1, cell " + at("z_f", "C"),
+                "entry-missing");
         fault("decimal comma", f -> f.set("F1", at("z_f", "C"), "412,5"), "cell " + at("z_f", "C"), "write 412.5");
-        fault("decimal comma in a flow", f -> f.set("Flows", flow(2, "D"), "12,5"), "sheet Flows, cell " + flow(2, "D"), "write 12.5");
-        fault("unit in the value", f -> f.set("F1", at("z_f", "C"), "18 in"), "cell " + at("z_f", "C"), "write 18 here");
-        fault("number stored as text", f -> f.set("F1", at("z_f", "C"), "412.5"), "cell " + at("z_f", "C"), "stored as text");
+        fault(
+                "decimal comma in a flow",
+                f -> f.set("Flows", flow(2, "D"), "12,5"),
+                "sheet Flows, cell " + flow(2, "D"),
+                "write 12.5");
+        fault(
+                "unit in the value",
+                f -> f.set("F1", at("z_f", "C"), "18 in"),
+                "cell " + at("z_f", "C"),
+                "write 18 here");
+        fault(
+                "number stored as text",
+                f -> f.set("F1", at("z_f", "C"), "412.5"),
+                "cell " + at("z_f", "C"),
+                "stored as text");
         fault("unknown unit", f -> f.set("F1", at("z_f", "D"), "feet"), "cell " + at("z_f", "D"), "unit-unknown");
         fault("wrong dimension", f -> f.set("F1", at("z_f", "D"), "MGD"), "cell " + at("z_f", "D"), "unit-dimension");
-        fault("choice out of range", f -> f.set("F1", at("size", "C"), "11 ft"), "cell " + at("size", "C"), "word-unknown");
+        fault(
+                "choice out of range",
+                f -> f.set("F1", at("size", "C"), "11 ft"),
+                "cell " + at("size", "C"),
+                "word-unknown");
         fault("duplicate case", f -> f.set("Flows", flow(3, "A"), "Start-up, average day"), "cell " + flow(3, "A"));
         fault("duplicate tag", f -> secondElement(f, "F1"), "sheet Project", "F1");
         fault("impossible sign", f -> f.set("Flows", flow(2, "D"), -12.5), "sheet Flows, cell " + flow(2, "D"));
         fault("formula without a stored number", f -> uncached(f.cell("F1", at("z_f", "C"))), "cell " + at("z_f", "C"));
-        fault("error value", f -> f.cell("F1", at("z_f", "C")).setCellErrorValue(FormulaError.REF.getCode()), "cell " + at("z_f", "C"), "#REF!");
-        fault("date typed as a number", f -> f.set("F1", at("z_f", "C"), 45000).format("F1", at("z_f", "C"), "d/m/yy"), "cell " + at("z_f", "C"), "date");
-        fault("demand of an unknown symbol", f -> f.set("Demands", demand("B"), "z_q"), "sheet Demands, cell", "z_q", "z_u");
-        fault("demand of another dimension", f -> f.set("Demands", demand("E"), "MGD"), "sheet Demands, cell", "unit-dimension");
-        fault("demand of a number that is words", f -> f.set("Demands", demand("B"), "state"), "sheet Demands, cell", "state");
-        fault("demand of no element", f -> f.set("Demands", demand("A"), "F9"), "sheet Demands, cell " + demand("A"), "tag-unknown");
+        fault(
+                "error value",
+                f -> f.cell("F1", at("z_f", "C")).setCellErrorValue(FormulaError.REF.getCode()),
+                "cell " + at("z_f", "C"),
+                "#REF!");
+        fault(
+                "date typed as a number",
+                f -> f.set("F1", at("z_f", "C"), 45000).format("F1", at("z_f", "C"), "d/m/yy"),
+                "cell " + at("z_f", "C"),
+                "date");
+        fault(
+                "demand of an unknown symbol",
+                f -> f.set("Demands", demand("B"), "z_q"),
+                "sheet Demands, cell",
+                "z_q",
+                "z_u");
+        fault(
+                "demand of another dimension",
+                f -> f.set("Demands", demand("E"), "MGD"),
+                "sheet Demands, cell",
+                "unit-dimension");
+        fault(
+                "demand of a number that is words",
+                f -> f.set("Demands", demand("B"), "state"),
+                "sheet Demands, cell",
+                "state");
+        fault(
+                "demand of no element",
+                f -> f.set("Demands", demand("A"), "F9"),
+                "sheet Demands, cell " + demand("A"),
+                "tag-unknown");
     }
 
     static Stream<String> faults() {
@@ -134,7 +183,7 @@ class RefusedInputTest {
         assertThat(said.status()).as(said.err()).isEqualTo(ExitStatus.INPUT_REFUSED);
         assertThat(said.out()).isEmpty();
         assertThat(said.err())
-                .contains(input.getFileName().toString(), "(fault: ", "nothing was written")
+                .contains(input.getFileName().toString(), "(fault: ", "no package was written")
                 .doesNotContain("\tat ", "Exception", "nappe.", "org.apache");
         assertThat(out).doesNotExist();
         Said inspected = NappeTest.nappe("inspect", input);
@@ -151,19 +200,27 @@ class RefusedInputTest {
         fault.change().to(filler);
         Said said = refused(filler.save(folder.resolve("station.xlsx")));
         assertThat(said.err()).contains(fault.where());
-        assertThat(said.err().lines().filter(line -> line.startsWith("station.xlsx"))).hasSize(1);
+        assertThat(said.err().lines().filter(line -> line.startsWith("station.xlsx")))
+                .hasSize(1);
     }
 
     @Test
     void severalFaultsAreToldAtOnce() throws IOException {
         Filler filler = sample();
-        for (String name : new String[] {"missing entry", "decimal comma in a flow", "choice out of range", "demand of no element", "duplicate case"}) {
+        for (String name : new String[] {
+            "missing entry", "decimal comma in a flow", "choice out of range", "demand of no element", "duplicate case"
+        }) {
             FAULTS.get(name).change().to(filler);
         }
         Said said = refused(filler.save(folder.resolve("station.xlsx")));
         assertThat(said.err())
-                .contains("cell " + at("z_f", "C"), "cell " + at("size", "C"), "cell " + flow(2, "D"), "cell " + flow(3, "A"),
-                        "cell " + demand("A"), "5 faults; nothing was written.");
+                .contains(
+                        "cell " + at("z_f", "C"),
+                        "cell " + at("size", "C"),
+                        "cell " + flow(2, "D"),
+                        "cell " + flow(3, "A"),
+                        "cell " + demand("A"),
+                        "5 faults; no package was written.");
     }
 
     @Test
@@ -212,7 +269,9 @@ class RefusedInputTest {
     @Test
     void issuedWorkbookAsInputIsRefused() throws IOException {
         Path out = folder.resolve("first");
-        assertThat(NappeTest.nappe("issue", sample().save(folder.resolve("in.xlsx")), "-o", out).status()).isZero();
+        assertThat(NappeTest.nappe("issue", sample().save(folder.resolve("in.xlsx")), "-o", out)
+                        .status())
+                .isZero();
         Said said = refused(out.resolve("QW-H-017_rev-A/QW-H-017_rev-A.xlsx"));
         assertThat(said.err()).contains("Project");
     }

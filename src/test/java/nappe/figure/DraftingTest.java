@@ -25,7 +25,9 @@ class DraftingTest {
     }
 
     private static List<Drawing.Part> parts(Results results) {
-        return drawing(results).views().stream().flatMap(view -> view.parts().stream()).toList();
+        return drawing(results).views().stream()
+                .flatMap(view -> view.parts().stream())
+                .toList();
     }
 
     private static List<String> points(Drawing.Path path) {
@@ -72,7 +74,8 @@ class DraftingTest {
                 .filter(Drawing.Gauge.class::isInstance)
                 .findFirst()
                 .orElseThrow();
-        assertThat(Math.hypot(gauge.at().x(), gauge.at().y() - 0.5)).isCloseTo(3, org.assertj.core.data.Offset.offset(1e-12));
+        assertThat(Math.hypot(gauge.at().x(), gauge.at().y() - 0.5))
+                .isCloseTo(3, org.assertj.core.data.Offset.offset(1e-12));
         assertThat(gauge.at().y()).isBetween(0.5, 1.3854);
     }
 
@@ -91,25 +94,29 @@ class DraftingTest {
                 ? Stream.of(dimension.value())
                 : part instanceof Drawing.Level level
                         ? Stream.of(level.value())
-                        : part instanceof Drawing.Water water && water.level() != null ? Stream.of(water.level()) : Stream.of();
+                        : part instanceof Drawing.Water water && water.level() != null
+                                ? Stream.of(water.level())
+                                : Stream.of();
     }
 
     @Test
     void aDrownedFlumeHasNoLevelAtItsGaugeAndSaysSo() {
         Results drowned = DrawnStation.flume(WorkingSystem.US, "1 ft", 4, 101.3);
         assertThat(dimensioned(drowned)).doesNotContain("h_a").contains("L_B", "W");
-        assertThat(drawing(drowned).notes()).startsWith(
-                "State of flow: drowned.",
-                "Not drawn, since there is no result: water level at the gauge z_u, head at the gauge h_a.");
+        assertThat(drawing(drowned).notes())
+                .startsWith(
+                        "State of flow: drowned.",
+                        "Not drawn, since there is no result: water level at the gauge z_u, head at the gauge h_a.");
         assertThat(curve(drowned).missing()).contains("Case drawn is not marked: head at the gauge: no result.");
     }
 
     @Test
     void aLevelThatWasNotTypedIsNotGiven() {
         Results none = DrawnStation.flume(WorkingSystem.US, "2 ft", 10, Double.NaN);
-        assertThat(drawing(none).notes()).anySatisfy(note -> assertThat(note)
-                .startsWith("Not drawn, since there is no value given: ")
-                .contains("water level downstream z_t"));
+        assertThat(drawing(none).notes())
+                .anySatisfy(note -> assertThat(note)
+                        .startsWith("Not drawn, since there is no value given: ")
+                        .contains("water level downstream z_t"));
     }
 
     @Test
@@ -117,15 +124,16 @@ class DraftingTest {
         Results metric = DrawnStation.flume(WorkingSystem.SI, "0.6 m", 0.3, 99.9);
         assertThat(drawing(metric).schematic()).isEqualTo("the dimensions of this size are not given");
         assertThat(dimensioned(metric)).containsExactly("W", "h_a");
-        assertThat(drawing(metric).notes()).contains(
-                "Not drawn, since there is no value given: a, L_A, L_D, L_C, L_B, L_F, L_G, L_E, L_K, L_N.");
+        assertThat(drawing(metric).notes())
+                .contains("Not drawn, since there is no value given: a, L_A, L_D, L_C, L_B, L_F, L_G, L_E, L_K, L_N.");
         assertThat(drawing(FOOT).schematic()).isEmpty();
     }
 
     @Test
     void aTailwaterFarBelowIsSaidAndNotDrawn() {
         Results deep = DrawnStation.flume(WorkingSystem.US, "1 ft", 4, 60);
-        assertThat(drawing(deep).notes()).contains("The water level downstream is not drawn: it is far above or below the flume.");
+        assertThat(drawing(deep).notes())
+                .contains("The water level downstream is not drawn: it is far above or below the flume.");
     }
 
     @Test
@@ -133,8 +141,9 @@ class DraftingTest {
         Curve curve = curve(FOOT);
         assertThat(curve.points()).hasSize(21);
         assertThat(curve.cases()).extracting(Curve.Case::name).containsExactly("drawn", "half of it");
-        assertThat(curve.ends()).extracting(end -> end.words() + " " + end.value()).containsExactly(
-                "least head 0.1", "greatest head 2.5", "least flow 0.11", "greatest flow 16.1");
+        assertThat(curve.ends())
+                .extracting(end -> end.words() + " " + end.value())
+                .containsExactly("least head 0.1", "greatest head 2.5", "least flow 0.11", "greatest flow 16.1");
     }
 
     @Test

@@ -52,14 +52,32 @@ public final class DrawnStation {
         String length = us ? "ft" : "m";
         String volume = us ? "ft3/s" : "m3/s";
         Design.Project project = new Design.Project(
-                "Pretend works", "Made-up Engineers", "Nowhere District", "NW-9", "Drawn device", "A",
-                LocalDate.of(2026, 3, 1), "preliminary", system, us, Unit.parse(us ? "MGD" : "L/s"),
-                Unit.parse(us ? "in" : "mm"), "invented datum", "", "For review only.", true);
+                "Pretend works",
+                "Made-up Engineers",
+                "Nowhere District",
+                "NW-9",
+                "Drawn device",
+                "A",
+                LocalDate.of(2026, 3, 1),
+                "preliminary",
+                system,
+                us,
+                Unit.parse(us ? "MGD" : "L/s"),
+                Unit.parse(us ? "in" : "mm"),
+                "invented datum",
+                "",
+                "For review only.",
+                true);
         List<Design.FlowCase> cases = new ArrayList<>();
         for (String name : List.of("drawn", "half of it")) {
             double q = name.equals("drawn") ? flow : flow / 2;
-            cases.add(new Design.FlowCase(name, "peak hour", "2040", typed(Value.of(q), volume),
-                    typed(Double.isNaN(level) ? notGiven() : Value.of(level), length), "10 years",
+            cases.add(new Design.FlowCase(
+                    name,
+                    "peak hour",
+                    "2040",
+                    typed(Value.of(q), volume),
+                    typed(Double.isNaN(level) ? notGiven() : Value.of(level), length),
+                    "10 years",
                     Map.of("X1.h_g", typed(notGiven(), length))));
         }
         Design design = new Design(
@@ -71,7 +89,9 @@ public final class DrawnStation {
                 List.of(),
                 List.of(),
                 List.of());
-        return new Job(new MethodLibrary(new BuiltInLibrary()), "0.0.0").run(design, List.of()).results();
+        return new Job(new MethodLibrary(new BuiltInLibrary()), "0.0.0")
+                .run(design, List.of())
+                .results();
     }
 
     private static Value notGiven() {
@@ -102,7 +122,9 @@ public final class DrawnStation {
     public static void main(String[] arguments) throws IOException {
         Path folder = Path.of(arguments[0]);
         for (Map.Entry<String, Results> one : all().entrySet()) {
-            Files.write(folder.resolve(one.getKey() + ".pdf"), PdfDelivery.render(one.getValue()).bytes());
+            Files.write(
+                    folder.resolve(one.getKey() + ".pdf"),
+                    PdfDelivery.render(one.getValue()).bytes());
         }
     }
 }

@@ -15,8 +15,7 @@ class FigureReaderTest {
     private static final MethodSheet FLUME = new MethodLibrary(LIBRARY).sheet("parshall-flume");
 
     private static List<String> faults(String text) {
-        MethodException thrown =
-                catchThrowableOfType(MethodException.class, () -> FigureReader.read(FLUME, text));
+        MethodException thrown = catchThrowableOfType(MethodException.class, () -> FigureReader.read(FLUME, text));
         return thrown.faults().stream()
                 .map(f -> f.line() + ":" + f.column() + " " + f.message() + " (" + f.code() + ")")
                 .toList();
@@ -48,16 +47,17 @@ class FigureReaderTest {
                 level     0 m, 0 m ; y_q ; crest
                 circle    0 m, 0 m
                 flow      0 m, 0 m
-                """)).containsExactly(
-                "2:25 a length is needed here, and this is length^3 time^-1 (not-a-length)",
-                "3:16 a length is needed here, and this is a pure number; nought is written 0 m (not-a-length)",
-                "4:16 nothing is neither a symbol of parshall-flume.txt nor defined above (symbol-unknown)",
-                "5:16 h has no value by itself (symbol-free)",
-                "6:11 a dimension stands above, below, left, right, along or here (side-unknown)",
-                "7:18 n is not a length (not-a-length)",
-                "8:22 y_q is not a symbol of parshall-flume.txt (symbol-unknown)",
-                "9:1 \"circle\" is not a statement word of a figure (statement-unknown)",
-                "10:18 found the end where a number, a symbol or \"(\" was expected (syntax)");
+                """))
+                .containsExactly(
+                        "2:25 a length is needed here, and this is length^3 time^-1 (not-a-length)",
+                        "3:16 a length is needed here, and this is a pure number; nought is written 0 m (not-a-length)",
+                        "4:16 nothing is neither a symbol of parshall-flume.txt nor defined above (symbol-unknown)",
+                        "5:16 h has no value by itself (symbol-free)",
+                        "6:11 a dimension stands above, below, left, right, along or here (side-unknown)",
+                        "7:18 n is not a length (not-a-length)",
+                        "8:22 y_q is not a symbol of parshall-flume.txt (symbol-unknown)",
+                        "9:1 \"circle\" is not a statement word of a figure (statement-unknown)",
+                        "10:18 found the end where a number, a symbol or \"(\" was expected (syntax)");
     }
 
     @Test
@@ -67,16 +67,17 @@ class FigureReaderTest {
 
     @Test
     void aLengthOfTheDrawingsOwnHasAFreshName() {
-        assertThat(faults("let W = 2*L_B\nlet x = L_B\nlet x = W\nlet y = Q\n")).containsExactly(
-                "1:5 W is defined already (symbol-again)",
-                "3:5 x is defined already (symbol-again)",
-                "4:9 a length is needed here, and this is length^3 time^-1 (not-a-length)");
+        assertThat(faults("let W = 2*L_B\nlet x = L_B\nlet x = W\nlet y = Q\n"))
+                .containsExactly(
+                        "1:5 W is defined already (symbol-again)",
+                        "3:5 x is defined already (symbol-again)",
+                        "4:9 a length is needed here, and this is length^3 time^-1 (not-a-length)");
     }
 
     @Test
     void aConditionMustBeOne() {
-        assertThat(faults("view Plan\nwall 0 m, W ; W, W ; when W")).containsExactly(
-                "2:27 a condition is needed here, such as h < 2 ft (not-a-condition)");
+        assertThat(faults("view Plan\nwall 0 m, W ; W, W ; when W"))
+                .containsExactly("2:27 a condition is needed here, such as h < 2 ft (not-a-condition)");
     }
 
     /** A library with nothing in it. */

@@ -52,8 +52,8 @@ class FormulaParserTest {
 
     @Test
     void aUnitMayStartWithOneOver() {
-        assertThat(FormulaParser.parse("k*2.5 1/s")).isEqualTo(
-                times(new Formula.Symbol("k"), new Formula.Quantity(2.5, "2.5", Unit.parse("1/s"))));
+        assertThat(FormulaParser.parse("k*2.5 1/s"))
+                .isEqualTo(times(new Formula.Symbol("k"), new Formula.Quantity(2.5, "2.5", Unit.parse("1/s"))));
     }
 
     @Test
@@ -91,10 +91,24 @@ class FormulaParserTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {
-        "sqrt(x)", "exp(x)", "ln(x)", "log10(x)", "sin(x)", "cos(x)", "tan(x)", "asin(x)", "acos(x)", "atan(x)", "tanh(x)",
-        "abs(x)", "min(x, y)", "max(x, y, z)", "if(x < y, x, y)"
-    })
+    @ValueSource(
+            strings = {
+                "sqrt(x)",
+                "exp(x)",
+                "ln(x)",
+                "log10(x)",
+                "sin(x)",
+                "cos(x)",
+                "tan(x)",
+                "asin(x)",
+                "acos(x)",
+                "atan(x)",
+                "tanh(x)",
+                "abs(x)",
+                "min(x, y)",
+                "max(x, y, z)",
+                "if(x < y, x, y)"
+            })
     void functionsForAuthorsAreRead(String text) {
         assertThat(FormulaParser.parse(text)).isInstanceOf(Formula.Call.class);
     }

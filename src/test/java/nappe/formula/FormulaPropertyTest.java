@@ -60,10 +60,12 @@ class FormulaPropertyTest {
     private static Arbitrary<Sample> samples(int depth) {
         Arbitrary<Sample> leaves = Arbitraries.oneOf(
                 Arbitraries.of(VALUES.keySet()).map(name -> new Sample(new Formula.Symbol(name), VALUES.get(name))),
-                Arbitraries.integers().between(0, 400).map(i -> i / 16.0).map(x ->
-                        new Sample(new Formula.Numeral(x, Double.toString(x)), x)),
-                Arbitraries.of("ft", "m3/s", "m^(1/3)/s", "ft.lbf/s", "1/s").map(unit ->
-                        new Sample(new Formula.Quantity(2.5, "2.5", Unit.parse(unit)), 2.5 * 3)));
+                Arbitraries.integers()
+                        .between(0, 400)
+                        .map(i -> i / 16.0)
+                        .map(x -> new Sample(new Formula.Numeral(x, Double.toString(x)), x)),
+                Arbitraries.of("ft", "m3/s", "m^(1/3)/s", "ft.lbf/s", "1/s")
+                        .map(unit -> new Sample(new Formula.Quantity(2.5, "2.5", Unit.parse(unit)), 2.5 * 3)));
         if (depth == 0) {
             return leaves;
         }
@@ -71,13 +73,20 @@ class FormulaPropertyTest {
         return Arbitraries.oneOf(
                 leaves,
                 inner.map(x -> new Sample(new Formula.Negation(x.formula()), -x.number())),
-                Combinators.combine(Arbitraries.of(Operator.class), inner, inner).as(FormulaPropertyTest::join),
-                Combinators.combine(inner, inner, inner).as((x, y, z) -> new Sample(
-                        call(Function.IF, new Formula.Comparison(Comparator.BELOW, x.formula(), y.formula()), y.formula(), z.formula()),
-                        x.number() - y.number() < -1e-9 * Math.abs(y.number()) ? y.number() : z.number())),
+                Combinators.combine(Arbitraries.of(Operator.class), inner, inner)
+                        .as(FormulaPropertyTest::join),
+                Combinators.combine(inner, inner, inner)
+                        .as((x, y, z) -> new Sample(
+                                call(
+                                        Function.IF,
+                                        new Formula.Comparison(Comparator.BELOW, x.formula(), y.formula()),
+                                        y.formula(),
+                                        z.formula()),
+                                x.number() - y.number() < -1e-9 * Math.abs(y.number()) ? y.number() : z.number())),
                 inner.map(x -> new Sample(call(Function.SQRT, x.formula()), Math.sqrt(x.number()))),
-                Combinators.combine(inner, inner).as((x, y) ->
-                        new Sample(call(Function.MAX, x.formula(), y.formula()), Math.max(x.number(), y.number()))));
+                Combinators.combine(inner, inner)
+                        .as((x, y) -> new Sample(
+                                call(Function.MAX, x.formula(), y.formula()), Math.max(x.number(), y.number()))));
     }
 
     private static Sample join(Operator operator, Sample x, Sample y) {
@@ -90,7 +99,9 @@ class FormulaPropertyTest {
             case OVER -> a / b;
             case POWER -> a == 0 && b == 0 ? Double.NaN : Math.pow(a, b);
         };
-        return new Sample(new Formula.Operation(operator, x.formula(), y.formula()), Double.isFinite(number) ? number : Double.NaN);
+        return new Sample(
+                new Formula.Operation(operator, x.formula(), y.formula()),
+                Double.isFinite(number) ? number : Double.NaN);
     }
 
     private static Arbitrary<Condition> conditions(int depth) {
@@ -105,8 +116,8 @@ class FormulaPropertyTest {
                 comparisons,
                 Arbitraries.of("a", "h_1").map(s -> new Condition(call(Function.IS_NUMBER, new Formula.Symbol(s)))),
                 inner.map(c -> new Condition(new Formula.Logic("not", List.of(c.formula())))),
-                Combinators.combine(Arbitraries.of("and", "or"), inner, inner).as((kind, a, b) ->
-                        new Condition(new Formula.Logic(kind, List.of(a.formula(), b.formula())))));
+                Combinators.combine(Arbitraries.of("and", "or"), inner, inner)
+                        .as((kind, a, b) -> new Condition(new Formula.Logic(kind, List.of(a.formula(), b.formula())))));
     }
 
     private static Formula call(Function function, Formula... arguments) {

@@ -34,10 +34,14 @@ class GuardTest {
 
     @Test
     void keysOfWordsAndColumnsAreNoNumbers() {
-        assertThat(Guard.guarded(new Formula.Call(Function.MATCH, List.of(X, COLUMN)))).isEmpty();
-        assertThat(Guard.guarded(new Formula.Call(Function.INDEX, List.of(COLUMN, X)))).containsExactly("x");
-        assertThat(Guard.guarded(new Formula.Call(Function.MATCH_BELOW, List.of(X, COLUMN)))).containsExactly("x");
-        assertThat(Guard.guarded(new Formula.Call(Function.LOWEST_OF, List.of(COLUMN)))).isEmpty();
+        assertThat(Guard.guarded(new Formula.Call(Function.MATCH, List.of(X, COLUMN))))
+                .isEmpty();
+        assertThat(Guard.guarded(new Formula.Call(Function.INDEX, List.of(COLUMN, X))))
+                .containsExactly("x");
+        assertThat(Guard.guarded(new Formula.Call(Function.MATCH_BELOW, List.of(X, COLUMN))))
+                .containsExactly("x");
+        assertThat(Guard.guarded(new Formula.Call(Function.LOWEST_OF, List.of(COLUMN))))
+                .isEmpty();
     }
 
     @Test

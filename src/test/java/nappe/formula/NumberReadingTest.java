@@ -66,10 +66,27 @@ class NumberReadingTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {
-        "1/zero", "zero/zero", "zero^zero", "zero^-1", "(-8)^0.5", "sqrt(-1)", "ln(zero)", "log10(-x)", "asin(1.5)", "acos(-1.5)",
-        "exp(1000)", "1e300*1e300", "none()", "if(x > 4, 1, none())", "blank + 1", "-state", "max(x, blank)", "sqrt(none())"
-    })
+    @ValueSource(
+            strings = {
+                "1/zero",
+                "zero/zero",
+                "zero^zero",
+                "zero^-1",
+                "(-8)^0.5",
+                "sqrt(-1)",
+                "ln(zero)",
+                "log10(-x)",
+                "asin(1.5)",
+                "acos(-1.5)",
+                "exp(1000)",
+                "1e300*1e300",
+                "none()",
+                "if(x > 4, 1, none())",
+                "blank + 1",
+                "-state",
+                "max(x, blank)",
+                "sqrt(none())"
+            })
     void outsideTheRangeOfDefinitionThereIsNoResult(String text) {
         assertThat(value(text)).isEqualTo(NO_RESULT);
     }
@@ -113,7 +130,14 @@ class NumberReadingTest {
     }
 
     @ParameterizedTest
-    @CsvSource({"1e-300 <= 0, false", "0 <= 0, true", "-1e-300 < 0, true", "0 < 0, false", "0 >= 0, true", "0 > 0, false"})
+    @CsvSource({
+        "1e-300 <= 0, false",
+        "0 <= 0, true",
+        "-1e-300 < 0, true",
+        "0 < 0, false",
+        "0 >= 0, true",
+        "0 > 0, false"
+    })
     void besideNoughtThereIsNoTolerance(String condition, boolean holds) {
         assertThat(holds(condition)).isEqualTo(holds);
     }
@@ -129,8 +153,10 @@ class NumberReadingTest {
 
     @ParameterizedTest
     @CsvSource({
-        "x < 4 and x > 2, true", "x < 4 and x > 3, false", "x < 2 or x > 2, true", "x < 2 or x > 4, false", "not x < 2, true",
-        "not (x < 4 and x > 2), false", "given(x), true", "given(blank), false", "given(state), false", "not given(blank), true"
+        "x < 4 and x > 2, true", "x < 4 and x > 3, false", "x < 2 or x > 2, true", "x < 2 or x > 4, false",
+                "not x < 2, true",
+        "not (x < 4 and x > 2), false", "given(x), true", "given(blank), false", "given(state), false",
+                "not given(blank), true"
     })
     void conditionsAreJoined(String condition, boolean holds) {
         assertThat(holds(condition)).isEqualTo(holds);

@@ -59,19 +59,56 @@ class SignReadingTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {
-        "1/p", "z/p", "sqrt(z)", "ln(p)", "log10(p)", "a^2", "a^3", "z^p", "z^1.5", "p^a", "p^-1", "sin(a)", "tanh(a)", "atan(a)",
-        "a*a - p", "sqrt(abs(a))", "1/(p + z)", "1/max(a, p)", "if(a < p, 1/p, 2)"
-    })
+    @ValueSource(
+            strings = {
+                "1/p",
+                "z/p",
+                "sqrt(z)",
+                "ln(p)",
+                "log10(p)",
+                "a^2",
+                "a^3",
+                "z^p",
+                "z^1.5",
+                "p^a",
+                "p^-1",
+                "sin(a)",
+                "tanh(a)",
+                "atan(a)",
+                "a*a - p",
+                "sqrt(abs(a))",
+                "1/(p + z)",
+                "1/max(a, p)",
+                "if(a < p, 1/p, 2)"
+            })
     void isDefinedWhateverItsSymbolsMayBe(String text) {
         assertThat(finding(text).safe()).isTrue();
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {
-        "1/z", "1/a", "p/(p - z)", "sqrt(a)", "sqrt(p - z)", "ln(z)", "log10(a)", "asin(z)", "acos(p)", "a^0.5", "a^p", "z^a", "z^0",
-        "z^-1", "a^-2", "exp(a)", "if(a < p, 1/z, 2)", "if(1/z < p, 1, 2)", "max(1/z, 1)", "if(not 1/a < p, 1, 2)"
-    })
+    @ValueSource(
+            strings = {
+                "1/z",
+                "1/a",
+                "p/(p - z)",
+                "sqrt(a)",
+                "sqrt(p - z)",
+                "ln(z)",
+                "log10(a)",
+                "asin(z)",
+                "acos(p)",
+                "a^0.5",
+                "a^p",
+                "z^a",
+                "z^0",
+                "z^-1",
+                "a^-2",
+                "exp(a)",
+                "if(a < p, 1/z, 2)",
+                "if(1/z < p, 1, 2)",
+                "max(1/z, 1)",
+                "if(not 1/a < p, 1, 2)"
+            })
     void cannotBeShownToBeDefined(String text) {
         assertThat(finding(text).safe()).isFalse();
     }
@@ -87,7 +124,9 @@ class SignReadingTest {
     }
 
     private static Sign of(Function function, String... symbols) {
-        List<Formula> arguments = java.util.Arrays.stream(symbols).map(s -> (Formula) new Formula.Symbol(s)).toList();
+        List<Formula> arguments = java.util.Arrays.stream(symbols)
+                .map(s -> (Formula) new Formula.Symbol(s))
+                .toList();
         return SignReading.of(new Formula.Call(function, arguments), SIGNS::get).sign();
     }
 

@@ -7,7 +7,8 @@ import org.junit.jupiter.api.Test;
 class SymbolsReadingTest {
     @Test
     void symbolsAreNamedOnceInTheOrderOfFirstAppearance() {
-        assertThat(SymbolsReading.of(FormulaParser.parse("b*h_a^n + sqrt(b - 2 ft)/h_a"))).containsExactly("b", "h_a", "n");
+        assertThat(SymbolsReading.of(FormulaParser.parse("b*h_a^n + sqrt(b - 2 ft)/h_a")))
+                .containsExactly("b", "h_a", "n");
     }
 
     @Test
@@ -18,6 +19,7 @@ class SymbolsReadingTest {
 
     @Test
     void numbersUnitsAndWordsAreNoSymbols() {
-        assertThat(SymbolsReading.of(FormulaParser.parse("if(1 ft < 2 m, \"h\", \"b\")"))).isEmpty();
+        assertThat(SymbolsReading.of(FormulaParser.parse("if(1 ft < 2 m, \"h\", \"b\")")))
+                .isEmpty();
     }
 }

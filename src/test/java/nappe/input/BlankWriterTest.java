@@ -30,13 +30,28 @@ class BlankWriterTest {
     @Test
     void sheetsStandInTheirOrderAndNoneIsHidden() throws IOException {
         try (XSSFWorkbook workbook = open(Samples.blank())) {
-            assertThat(workbook).extracting(org.apache.poi.ss.usermodel.Sheet::getSheetName)
-                    .containsExactly("Project", "Flows", "F1", "R1", "Demands", "Assumptions", "References",
-                            "Requirements", "Revisions", "Lists");
+            assertThat(workbook)
+                    .extracting(org.apache.poi.ss.usermodel.Sheet::getSheetName)
+                    .containsExactly(
+                            "Project",
+                            "Flows",
+                            "F1",
+                            "R1",
+                            "Demands",
+                            "Assumptions",
+                            "References",
+                            "Requirements",
+                            "Revisions",
+                            "Lists");
             for (int i = 0; i < workbook.getNumberOfSheets(); i++) {
-                assertThat(workbook.getSheetVisibility(i)).isEqualTo(org.apache.poi.ss.usermodel.SheetVisibility.VISIBLE);
+                assertThat(workbook.getSheetVisibility(i))
+                        .isEqualTo(org.apache.poi.ss.usermodel.SheetVisibility.VISIBLE);
                 assertThat(workbook.getSheetAt(i).getProtect()).isTrue();
-                assertThat(workbook.getSheetAt(i).getCTWorksheet().getSheetProtection().isSetPassword()).isFalse();
+                assertThat(workbook.getSheetAt(i)
+                                .getCTWorksheet()
+                                .getSheetProtection()
+                                .isSetPassword())
+                        .isFalse();
             }
         }
     }
@@ -60,12 +75,17 @@ class BlankWriterTest {
     void everyEntryOffersItsUnitsOrTakesOnlyNumbersOfItsSign() throws IOException {
         try (XSSFWorkbook workbook = open(Samples.blank())) {
             assertThat(offered(workbook, "F1", 6, 2)).containsExactly("1", "2", "3 ft");
-            assertThat(offered(workbook, "F1", 8, 3)).contains("ft", "m", "in", "mm").doesNotContain("psi");
+            assertThat(offered(workbook, "F1", 8, 3))
+                    .contains("ft", "m", "in", "mm")
+                    .doesNotContain("psi");
             assertThat(offered(workbook, "F1", 10, 3)).containsExactly("%", "1");
             assertThat(offered(workbook, "F1", 11, 3)).containsExactly("deg", "rad");
             assertThat(offered(workbook, "Flows", 8, 4)).contains("MGD", "gpm", "ft3/s", "m3/s", "L/s");
             assertThat(offered(workbook, "F1", 8, 5)).containsExactly("known", "assumed");
-            assertThat(validation(workbook.getSheet("F1"), 8, 2).getValidationConstraint().getFormula1()).isEqualTo("0");
+            assertThat(validation(workbook.getSheet("F1"), 8, 2)
+                            .getValidationConstraint()
+                            .getFormula1())
+                    .isEqualTo("0");
         }
     }
 
@@ -73,8 +93,10 @@ class BlankWriterTest {
     void unitsComeInTheWorkingSystem() throws IOException {
         try (XSSFWorkbook us = open(Samples.blank());
                 XSSFWorkbook si = open(BlankWriter.bytes(WorkingSystem.SI, Samples.ELEMENTS, Samples.METHODS))) {
-            assertThat(us.getSheet("F1").getRow(8).getCell(3).getStringCellValue()).isEqualTo("ft");
-            assertThat(si.getSheet("F1").getRow(8).getCell(3).getStringCellValue()).isEqualTo("m");
+            assertThat(us.getSheet("F1").getRow(8).getCell(3).getStringCellValue())
+                    .isEqualTo("ft");
+            assertThat(si.getSheet("F1").getRow(8).getCell(3).getStringCellValue())
+                    .isEqualTo("m");
         }
     }
 
@@ -86,7 +108,9 @@ class BlankWriterTest {
             assertThat(sheet.getRow(8).getCell(2).getCellStyle().getLocked()).isFalse();
             assertThat(sheet.getRow(8).getCell(2).getCellStyle().getBorderLeft())
                     .isEqualTo(org.apache.poi.ss.usermodel.BorderStyle.MEDIUM);
-            assertThat(sheet.getRow(6).getCell(3).getCellStyle().getLocked()).as("unit of a choice").isTrue();
+            assertThat(sheet.getRow(6).getCell(3).getCellStyle().getLocked())
+                    .as("unit of a choice")
+                    .isTrue();
         }
     }
 
@@ -98,7 +122,9 @@ class BlankWriterTest {
                 for (var row : sheet) {
                     there |= row.getCell(0) != null && row.getCell(0).toString().equals(BlankSheet.CAUTION);
                 }
-                assertThat(there || sheet.getSheetName().equals("Lists")).as(sheet.getSheetName()).isTrue();
+                assertThat(there || sheet.getSheetName().equals("Lists"))
+                        .as(sheet.getSheetName())
+                        .isTrue();
             }
         }
     }
@@ -114,7 +140,8 @@ class BlankWriterTest {
     @Test
     void oddTagsAndUnknownMethodsAreRefused() {
         assertThatThrownBy(() -> write(new Chosen("flume1", "trough")))
-                .hasMessage("\"flume1\" is not a tag; write one capital letter and up to seven capitals or digits: FLUME1");
+                .hasMessage(
+                        "\"flume1\" is not a tag; write one capital letter and up to seven capitals or digits: FLUME1");
         assertThatThrownBy(() -> write(new Chosen("F1", "trugh")))
                 .hasMessage("\"trugh\" is not a known method; did you mean trough?");
         assertThatThrownBy(() -> write(new Chosen("F1", "trough"), new Chosen("F1", "reach")))
@@ -136,10 +163,15 @@ class BlankWriterTest {
     }
 
     private static List<String> offered(XSSFWorkbook workbook, String sheet, int row, int column) {
-        String range = validation(workbook.getSheet(sheet), row, column).getValidationConstraint().getFormula1();
+        String range = validation(workbook.getSheet(sheet), row, column)
+                .getValidationConstraint()
+                .getFormula1();
         var area = new org.apache.poi.ss.util.AreaReference(range, workbook.getSpreadsheetVersion());
         return java.util.Arrays.stream(area.getAllReferencedCells())
-                .map(c -> workbook.getSheet("Lists").getRow(c.getRow()).getCell(c.getCol()).getStringCellValue())
+                .map(c -> workbook.getSheet("Lists")
+                        .getRow(c.getRow())
+                        .getCell(c.getCol())
+                        .getStringCellValue())
                 .toList();
     }
 }

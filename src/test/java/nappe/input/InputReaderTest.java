@@ -28,15 +28,29 @@ class InputReaderTest {
 
         assertThat(design.project())
                 .isEqualTo(new Design.Project(
-                        "Invented works at Nowhere", "Any Firm", "Any Town", "C-001", "Trough and reach", "A",
-                        LocalDate.of(2030, 1, 31), "preliminary", WorkingSystem.US, true, Unit.parse("MGD"),
-                        Unit.parse("in"), "invented datum", "Peak hour", "For trying out only.", true));
+                        "Invented works at Nowhere",
+                        "Any Firm",
+                        "Any Town",
+                        "C-001",
+                        "Trough and reach",
+                        "A",
+                        LocalDate.of(2030, 1, 31),
+                        "preliminary",
+                        WorkingSystem.US,
+                        true,
+                        Unit.parse("MGD"),
+                        Unit.parse("in"),
+                        "invented datum",
+                        "Peak hour",
+                        "For trying out only.",
+                        true));
         assertThat(design.elements()).extracting(Design.Element::tag).containsExactly("F1", "R1");
         assertThat(design.elements().get(0).title()).isEqualTo("Trough");
         assertThat(design.elements().get(0).typed().keySet()).containsExactly("size", "z_f", "D", "d", "u_r", "theta");
         assertThat(design.elements().get(0).typed().get("size").value()).isEqualTo(Value.word("3 ft"));
         assertThat(design.elements().get(0).typed().get("D"))
-                .isEqualTo(new Typed(Value.of(48), Unit.parse("in"), "invented drawing 1", "assumed", new Origin("F1", "C9")));
+                .isEqualTo(new Typed(
+                        Value.of(48), Unit.parse("in"), "invented drawing 1", "assumed", new Origin("F1", "C9")));
         assertThat(design.elements().get(0).typed().get("d").value()).isEqualTo(new Value.None(Value.NOT_GIVEN));
         assertThat(design.cases())
                 .extracting(Design.FlowCase::name)
@@ -51,7 +65,6 @@ class InputReaderTest {
         assertThat(design.references()).containsExactly("Invented drawing 1, edition of 2029");
         assertThat(design.requirements())
                 .containsExactly(new Design.Requirement("Show the least flow.", "invented rule 2", "All cases"));
-        assertThat(design.revisions())
-                .containsExactly(new Design.RevisionNote("A", "2030-01-31", "First issue."));
+        assertThat(design.revisions()).containsExactly(new Design.RevisionNote("A", "2030-01-31", "First issue."));
     }
 }

@@ -17,7 +17,10 @@ class MarkedCopyTest {
 
     @Test
     void eachFaultyCellCarriesANoteAndTheInputIsUntouched() throws IOException {
-        Path file = Samples.filled().set("F1", "C9", "4 ft").set("F1", "D9", "psi").set("Flows", "D9", "12,5")
+        Path file = Samples.filled()
+                .set("F1", "C9", "4 ft")
+                .set("F1", "D9", "psi")
+                .set("Flows", "D9", "12,5")
                 .save(folder.resolve("headworks.xlsx"));
         byte[] before = Files.readAllBytes(file);
         Path copy = folder.resolve("headworks-marked.xlsx");
@@ -27,19 +30,26 @@ class MarkedCopyTest {
 
         assertThat(Files.readAllBytes(file)).isEqualTo(before);
         try (XSSFWorkbook workbook = new XSSFWorkbook(Files.newInputStream(copy))) {
-            assertThat(workbook.getSheet("Flows").getRow(8).getCell(3).getCellComment().getString().getString())
+            assertThat(workbook.getSheet("Flows")
+                            .getRow(8)
+                            .getCell(3)
+                            .getCellComment()
+                            .getString()
+                            .getString())
                     .isEqualTo("\"12,5\" is not a number; write 12.5 (fault: number-expected)");
             assertThat(workbook.getSheet("F1").getCellComments()).hasSize(2);
         }
         InputRefused again = catchThrowableOfType(InputRefused.class, () -> InputReader.read(copy, Samples.METHODS));
-        assertThat(again.faults()).extracting(Fault::message).isEqualTo(
-                refused.faults().stream().map(Fault::message).toList());
+        assertThat(again.faults())
+                .extracting(Fault::message)
+                .isEqualTo(refused.faults().stream().map(Fault::message).toList());
     }
 
     @Test
     void faultOfTheWholeFileMakesNoCopy() throws IOException {
         Path copy = folder.resolve("copy.xlsx");
-        assertThat(MarkedCopy.write(folder.resolve("none.xlsx"), copy, List.of(new Fault("none.xlsx", null, null, "x", "y"))))
+        assertThat(MarkedCopy.write(
+                        folder.resolve("none.xlsx"), copy, List.of(new Fault("none.xlsx", null, null, "x", "y"))))
                 .isZero();
         assertThat(copy).doesNotExist();
     }

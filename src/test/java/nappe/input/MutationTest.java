@@ -20,14 +20,23 @@ class MutationTest {
     @Test
     void changedPartIsReadOrRefused() throws IOException {
         byte[] sound = Samples.filled().bytes();
-        List<String> parts = List.of("[Content_Types].xml", "_rels/.rels", "xl/workbook.xml", "xl/_rels/workbook.xml.rels",
-                "xl/styles.xml", "xl/sharedStrings.xml", "xl/worksheets/sheet1.xml", "xl/worksheets/sheet2.xml",
-                "xl/worksheets/sheet3.xml", "xl/worksheets/sheet5.xml");
+        List<String> parts = List.of(
+                "[Content_Types].xml",
+                "_rels/.rels",
+                "xl/workbook.xml",
+                "xl/_rels/workbook.xml.rels",
+                "xl/styles.xml",
+                "xl/sharedStrings.xml",
+                "xl/worksheets/sheet1.xml",
+                "xl/worksheets/sheet2.xml",
+                "xl/worksheets/sheet3.xml",
+                "xl/worksheets/sheet5.xml");
         Random random = new Random(20);
         int refused = 0;
         for (int i = 0; i < TIMES; i++) {
             String part = parts.get(random.nextInt(parts.size()));
-            Path file = Zips.of(sound).change(part, text -> changed(text, random)).save(folder.resolve("in.xlsx"));
+            Path file =
+                    Zips.of(sound).change(part, text -> changed(text, random)).save(folder.resolve("in.xlsx"));
             try {
                 InputReader.read(file, Samples.METHODS);
             } catch (InputRefused e) {

@@ -23,8 +23,15 @@ class ResavedTest {
     @Test
     void savedByLibreOfficeReadsTheSame() throws IOException, InterruptedException {
         Path out = Files.createDirectory(folder.resolve("out"));
-        run("soffice", "-env:UserInstallation=file://" + folder.resolve("profile"), "--headless", "--convert-to", "xlsx",
-                "--outdir", out.toString(), original().toString());
+        run(
+                "soffice",
+                "-env:UserInstallation=file://" + folder.resolve("profile"),
+                "--headless",
+                "--convert-to",
+                "xlsx",
+                "--outdir",
+                out.toString(),
+                original().toString());
         assertReadsTheSame(out.resolve("station.xlsx"));
     }
 

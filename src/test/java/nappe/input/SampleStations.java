@@ -23,12 +23,16 @@ public final class SampleStations {
     /** The samples by file name. */
     public static Map<String, Supplier<byte[]>> all() {
         return Map.of(
-                "headworks.xlsx", () -> bytes(SampleStations::headworks), "return-weir.xlsx", () -> bytes(SampleStations::weir));
+                "headworks.xlsx",
+                () -> bytes(SampleStations::headworks),
+                "return-weir.xlsx",
+                () -> bytes(SampleStations::weir));
     }
 
     public static void main(String[] args) throws IOException {
         for (Map.Entry<String, Supplier<byte[]>> sample : all().entrySet()) {
-            Files.write(Path.of("sample-inputs", sample.getKey()), sample.getValue().get());
+            Files.write(
+                    Path.of("sample-inputs", sample.getKey()), sample.getValue().get());
         }
     }
 
@@ -65,30 +69,96 @@ public final class SampleStations {
                 .project("Head reported in", "in")
                 .project("Elevations refer to", "invented plant datum, benchmark BM-2 at 420.00 ft")
                 .project("Case worked in full", "Design, peak hour")
-                .project("Purpose of release", "Released for review of the sample only; not for bidding, construction or permit.")
+                .project(
+                        "Purpose of release",
+                        "Released for review of the sample only; not for bidding, construction or permit.")
                 .project("Space for a seal on the cover", "yes")
                 .row("Flows", "Start-up, minimum hour", "1 h", "2031", 0.5, "MGD", 412.2, "ft", "", brief, "assumed")
-                .row("Flows", "Start-up, average day", "1 d", "2031", 2.4, "MGD", 412.4, "ft", "", brief, "known", 5.6, "in")
+                .row(
+                        "Flows",
+                        "Start-up, average day",
+                        "1 d",
+                        "2031",
+                        2.4,
+                        "MGD",
+                        412.4,
+                        "ft",
+                        "",
+                        brief,
+                        "known",
+                        5.6,
+                        "in")
                 .row("Flows", "Design, average day", "1 d", "2040", 5, "MGD", 412.6, "ft", "", brief, "known")
                 .row("Flows", "Design, maximum month", "30 d", "2040", 6.8, "MGD", 412.7, "ft", "", brief, "known")
                 .row("Flows", "Design, peak hour", "1 h", "2040", 12.5, "MGD", 413.1, "ft", "", brief, "known")
-                .row("Flows", "Design, peak hour, high river", "1 h", "2040", 12.5, "MGD", 414.05, "ft", "25 years", river, "known")
-                .row("Flows", "Build-out, peak instantaneous", "5 min", "2055", 21, "MGD", 413.7, "ft", "", brief, "assumed")
+                .row(
+                        "Flows",
+                        "Design, peak hour, high river",
+                        "1 h",
+                        "2040",
+                        12.5,
+                        "MGD",
+                        414.05,
+                        "ft",
+                        "25 years",
+                        river,
+                        "known")
+                .row(
+                        "Flows",
+                        "Build-out, peak instantaneous",
+                        "5 min",
+                        "2055",
+                        21,
+                        "MGD",
+                        413.7,
+                        "ft",
+                        "",
+                        brief,
+                        "assumed")
                 .entry("F1", "size", "3 ft", null, "Invented drawing C-12, rev. 1", "known")
                 .entry("F1", "z_f", 412.5, "ft", "Invented drawing C-12, rev. 1", "known")
-                .row("Demands", "F1", "z_u", "at most", 414.6, "ft", "water at the gauge stays under the crown of the incoming sewer",
+                .row(
+                        "Demands",
+                        "F1",
+                        "z_u",
+                        "at most",
+                        414.6,
+                        "ft",
+                        "water at the gauge stays under the crown of the incoming sewer",
                         "Invented design brief DB-3, clause 4.2")
-                .row("Demands", "F1", "h_a", "at least", 2, "in", "least head that the level instrument resolves",
+                .row(
+                        "Demands",
+                        "F1",
+                        "h_a",
+                        "at least",
+                        2,
+                        "in",
+                        "least head that the level instrument resolves",
                         "Invented instrument sheet IS-9")
-                .row("Assumptions", "The downstream levels hold with both screens in service.", "Invented river study RS-1",
-                        "project engineer", "open")
-                .row("Assumptions", "The flume is built to the published dimensions of its size.", "specification to follow",
-                        "project engineer", "closed")
+                .row(
+                        "Assumptions",
+                        "The downstream levels hold with both screens in service.",
+                        "Invented river study RS-1",
+                        "project engineer",
+                        "open")
+                .row(
+                        "Assumptions",
+                        "The flume is built to the published dimensions of its size.",
+                        "specification to follow",
+                        "project engineer",
+                        "closed")
                 .row("References", "Invented design brief DB-3, edition of 2029")
                 .row("References", "Invented river study RS-1, edition of 2028")
-                .row("Requirements", "Show that the flume measures from the start-up minimum hour to the build-out peak.",
-                        "Invented design brief DB-3, clause 4.1", "Limits")
-                .row("Requirements", "State the origin of each design flow.", "Invented design brief DB-3, clause 2.3", "Cases")
+                .row(
+                        "Requirements",
+                        "Show that the flume measures from the start-up minimum hour to the build-out peak.",
+                        "Invented design brief DB-3, clause 4.1",
+                        "Limits")
+                .row(
+                        "Requirements",
+                        "State the origin of each design flow.",
+                        "Invented design brief DB-3, clause 2.3",
+                        "Cases")
                 .row("Revisions", "A", "2030-03-14", "First issue, preliminary.");
     }
 
@@ -120,9 +190,18 @@ public final class SampleStations {
                 .entry("W1", "B", 1.1, "m", "Invented drawing S-3", "known")
                 .entry("W1", "p", 0.45, "m", "Invented drawing S-3", "known")
                 .entry("W1", "z_c", 18.25, "m", "Invented drawing S-3", "known")
-                .row("Assumptions", "The approach channel is straight over ten widths.", "site visit to follow", "project engineer", "open")
+                .row(
+                        "Assumptions",
+                        "The approach channel is straight over ten widths.",
+                        "site visit to follow",
+                        "project engineer",
+                        "open")
                 .row("References", "Invented drawing S-3, rev. B")
-                .row("Requirements", "Show that the nappe is free at every pump setting.", "Invented operating permit, item 7", "Limits")
+                .row(
+                        "Requirements",
+                        "Show that the nappe is free at every pump setting.",
+                        "Invented operating permit, item 7",
+                        "Limits")
                 .row("Revisions", "0", "2030-05-02", "First issue for checking.");
     }
 }

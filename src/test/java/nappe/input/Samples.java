@@ -36,9 +36,32 @@ final class Samples {
                     .project("Case worked in full", "peak HOUR")
                     .project("Purpose of release", "For trying out only.")
                     .row("Flows", "Least hour", "1 h", 2030, 1.5, "MGD", 100.25, "ft", "", "invented", "known")
-                    .row("Flows", "Peak hour", "1 h", "2050", 12.5, "MGD", 101.5, "ft", "100 years", "invented", "assumed",
-                            1.25, "ft")
-                    .row("Flows", "Peak hour, river low", "1 h", "2050", 12.5, "MGD", null, null, "", "invented", "assumed")
+                    .row(
+                            "Flows",
+                            "Peak hour",
+                            "1 h",
+                            "2050",
+                            12.5,
+                            "MGD",
+                            101.5,
+                            "ft",
+                            "100 years",
+                            "invented",
+                            "assumed",
+                            1.25,
+                            "ft")
+                    .row(
+                            "Flows",
+                            "Peak hour, river low",
+                            "1 h",
+                            "2050",
+                            12.5,
+                            "MGD",
+                            null,
+                            null,
+                            "",
+                            "invented",
+                            "assumed")
                     .entry("F1", "size", "3 FT", null, "invented", "known")
                     .entry("F1", "z_f", 99.5, "ft", "invented drawing 1", "known")
                     .entry("F1", "D", 48, "in", "invented drawing 1", "assumed")

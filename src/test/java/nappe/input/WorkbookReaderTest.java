@@ -29,8 +29,7 @@ class WorkbookReaderTest {
 
     private String refusal(Path file) {
         Instant start = Instant.now();
-        InputRefused refused = catchThrowableOfType(
-                InputRefused.class, () -> InputReader.read(file, Samples.METHODS));
+        InputRefused refused = catchThrowableOfType(InputRefused.class, () -> InputReader.read(file, Samples.METHODS));
         assertThat(Duration.between(start, Instant.now())).isLessThan(LONGEST);
         assertThat(refused).as("refused").isNotNull();
         return refused.getMessage();
@@ -69,8 +68,9 @@ class WorkbookReaderTest {
     @Test
     void plainTextIsRefused() throws IOException {
         assertThat(refusal("Case,Flow\nPeak,12.5\n"))
-                .isEqualTo("in.xlsx: this is no .xlsx workbook (it looks like plain text); give the input workbook saved "
-                        + "as .xlsx (fault: not-a-workbook)");
+                .isEqualTo(
+                        "in.xlsx: this is no .xlsx workbook (it looks like plain text); give the input workbook saved "
+                                + "as .xlsx (fault: not-a-workbook)");
     }
 
     @Test
@@ -117,7 +117,8 @@ class WorkbookReaderTest {
     @Test
     void openDocumentIsRefused() throws IOException {
         assertThat(refusal(new Zips().with("mimetype", "application/vnd.oasis.opendocument.spreadsheet")))
-                .isEqualTo("in.xlsx: this is an OpenDocument file; open it and save it as .xlsx (fault: open-document)");
+                .isEqualTo(
+                        "in.xlsx: this is an OpenDocument file; open it and save it as .xlsx (fault: open-document)");
     }
 
     @Test
@@ -163,23 +164,29 @@ class WorkbookReaderTest {
     void workbookThatCanHoldMacrosIsRefused() throws IOException {
         String said = "in.xlsx: the workbook can hold macros; save it as a plain .xlsx workbook (fault: macros)";
         assertThat(refusal(Zips.sound()
-                        .change("[Content_Types].xml", s -> s.replace(
-                                "application/vnd.openxmlformats-officedocument.spreadsheetml.sheet.main+xml",
-                                "application/vnd.ms-excel.sheet.macroEnabled.main+xml"))))
+                        .change(
+                                "[Content_Types].xml",
+                                s -> s.replace(
+                                        "application/vnd.openxmlformats-officedocument.spreadsheetml.sheet.main+xml",
+                                        "application/vnd.ms-excel.sheet.macroEnabled.main+xml"))))
                 .isEqualTo(said);
         assertThat(refusal(Zips.sound().with("xl/vbaProject.bin", "x"))).isEqualTo(said);
     }
 
     @Test
     void templateIsRefused() throws IOException {
-        assertThat(refusal(Zips.sound().change("[Content_Types].xml", s -> s.replace("sheet.main+xml", "template.main+xml"))))
-                .isEqualTo("in.xlsx: this is a template; open it and save it as a plain .xlsx workbook (fault: template)");
+        assertThat(refusal(Zips.sound()
+                        .change("[Content_Types].xml", s -> s.replace("sheet.main+xml", "template.main+xml"))))
+                .isEqualTo(
+                        "in.xlsx: this is a template; open it and save it as a plain .xlsx workbook (fault: template)");
     }
 
     @Test
     void strictVariantIsRefused() throws IOException {
-        assertThat(refusal(Zips.sound().change("xl/workbook.xml", s -> s.replace(
-                        Xml.MAIN, "http://purl.oclc.org/ooxml/spreadsheetml/main"))))
+        assertThat(refusal(Zips.sound()
+                        .change(
+                                "xl/workbook.xml",
+                                s -> s.replace(Xml.MAIN, "http://purl.oclc.org/ooxml/spreadsheetml/main"))))
                 .isEqualTo("in.xlsx: the workbook is saved in the strict variant of .xlsx; save it as a plain .xlsx "
                         + "workbook (fault: strict-variant)");
     }
@@ -207,8 +214,7 @@ class WorkbookReaderTest {
                 + "<c r=\"G61\"><v>1</v></c><c r=\"H60\" t=\"zz\"><v>1</v></c><c r=\"I60\"><v>NaN</v></c>"
                 + "<c r=\"J60\"><v>0x1p3</v></c><c r=\"K60\"><v>1e999</v></c></row></sheetData>";
         assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("</sheetData>", row))))
-                .isEqualTo(
-                        """
+                .isEqualTo("""
                         in.xlsx, sheet Flows: the file is damaged: row 60 has a cell with the address "ZZZZ60" (fault: wild-address)
                         in.xlsx, sheet Flows: the file is damaged: row 60 has a cell with the address "G61" (fault: wild-address)
                         in.xlsx, sheet Flows, cell D60: the file is damaged: it has a number cell holding "abc"; type the number again (fault: damaged-number)
@@ -228,27 +234,36 @@ class WorkbookReaderTest {
                         + "spreadsheet program (fault: odd-part)");
         assertThat(refusal(Zips.sound().with("xl/a\\b.xml", "x"))).contains("(fault: odd-part)");
         assertThat(refusal(Zips.sound().with("XL/Workbook.xml", "x")))
-                .contains("two parts named").contains("(fault: part-twice)");
+                .contains("two parts named")
+                .contains("(fault: part-twice)");
     }
 
     @Test
     void documentTypeDeclarationIsRefused() throws IOException {
         String bomb = "<!DOCTYPE sst [<!ENTITY a \"aaaaaaaaaa\"><!ENTITY b \"&a;&a;&a;&a;&a;&a;&a;&a;&a;&a;\">]><sst";
         assertThat(refusal(Zips.sound().change("xl/sharedStrings.xml", s -> s.replaceFirst("<sst", bomb))))
-                .isEqualTo("in.xlsx: the part xl/sharedStrings.xml has a document type declaration, which no spreadsheet "
-                        + "program writes; the file is not read (fault: doctype)");
-        assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replaceFirst(
-                        "<worksheet", "<!DOCTYPE x SYSTEM \"file:///etc/passwd\"><worksheet"))))
+                .isEqualTo(
+                        "in.xlsx: the part xl/sharedStrings.xml has a document type declaration, which no spreadsheet "
+                                + "program writes; the file is not read (fault: doctype)");
+        assertThat(refusal(Zips.sound()
+                        .change(
+                                FLOWS,
+                                s -> s.replaceFirst(
+                                        "<worksheet", "<!DOCTYPE x SYSTEM \"file:///etc/passwd\"><worksheet"))))
                 .contains("(fault: doctype)");
-        assertThat(refusal(Zips.sound().change("_rels/.rels", s -> s.replaceFirst(
-                        "<Relationships", "<!DOCTYPE x SYSTEM \"http://localhost/x\"><Relationships"))))
+        assertThat(refusal(Zips.sound()
+                        .change(
+                                "_rels/.rels",
+                                s -> s.replaceFirst(
+                                        "<Relationships", "<!DOCTYPE x SYSTEM \"http://localhost/x\"><Relationships"))))
                 .contains("(fault: doctype)");
     }
 
     @Test
     void brokenXmlIsRefused() throws IOException {
         assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("</sheetData>", "</sheet>"))))
-                .startsWith("in.xlsx: the file is damaged: its part xl/worksheets/sheet2.xml is not well-formed XML (line ")
+                .startsWith(
+                        "in.xlsx: the file is damaged: its part xl/worksheets/sheet2.xml is not well-formed XML (line ")
                 .endsWith("(fault: damaged)");
     }
 
@@ -270,7 +285,8 @@ class WorkbookReaderTest {
     @Test
     void endlessTextIsRefused() throws IOException {
         String run = "x".repeat(5_000_000);
-        assertThat(refusal(Zips.sound().change("xl/sharedStrings.xml", s -> s.replace("</sst>", "<si><t>" + run + "</t></si></sst>"))))
+        assertThat(refusal(Zips.sound()
+                        .change("xl/sharedStrings.xml", s -> s.replace("</sst>", "<si><t>" + run + "</t></si></sst>"))))
                 .contains("(fault: too-large)");
         assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("<sheetData>", "<sheetData a=\"" + run + "\">"))))
                 .contains("(fault: too-large)");
@@ -278,14 +294,20 @@ class WorkbookReaderTest {
 
     @Test
     void whatWouldPileUpInMemoryIsRefused() throws IOException {
-        assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("<sheetData>", "<!--" + "<".repeat(2_000_000) + "-->"))))
-                .isEqualTo("in.xlsx: the part xl/worksheets/sheet2.xml holds a run of text without end (fault: too-large)");
-        assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("<sheetData>", "<sheetData>" + "<a>".repeat(1000)))))
-                .isEqualTo("in.xlsx: the part xl/worksheets/sheet2.xml is nested more than 100 deep (fault: too-large)");
-        String texts = "<row r=\"99\"><c t=\"inlineStr\"><is>" + "<t>xxxxxxxxx</t>".repeat(50_000) + "</is></c></row></sheetData>";
+        assertThat(refusal(Zips.sound()
+                        .change(FLOWS, s -> s.replace("<sheetData>", "<!--" + "<".repeat(2_000_000) + "-->"))))
+                .isEqualTo(
+                        "in.xlsx: the part xl/worksheets/sheet2.xml holds a run of text without end (fault: too-large)");
+        assertThat(refusal(Zips.sound()
+                        .change(FLOWS, s -> s.replace("<sheetData>", "<sheetData>" + "<a>".repeat(1000)))))
+                .isEqualTo(
+                        "in.xlsx: the part xl/worksheets/sheet2.xml is nested more than 100 deep (fault: too-large)");
+        String texts = "<row r=\"99\"><c t=\"inlineStr\"><is>" + "<t>xxxxxxxxx</t>".repeat(50_000)
+                + "</is></c></row></sheetData>";
         assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("</sheetData>", texts))))
                 .contains("holds a text of more than 300000 characters (fault: too-large)");
-        assertThat(refusal(Zips.sound().change("xl/styles.xml", s -> s.replace("<cellXfs", "<x/>".repeat(2_000_000) + "<cellXfs"))))
+        assertThat(refusal(Zips.sound()
+                        .change("xl/styles.xml", s -> s.replace("<cellXfs", "<x/>".repeat(2_000_000) + "<cellXfs"))))
                 .isEqualTo("in.xlsx: the part xl/styles.xml has more than 5 MB, the most that it may have in an input "
                         + "workbook (fault: too-large)");
     }
@@ -293,10 +315,15 @@ class WorkbookReaderTest {
     @Test
     void commentsAndCharacterSectionsAreRead() throws IOException {
         Path file = Zips.sound()
-                .change(FLOWS, s -> s.replace("<sheetData>", "<!-- a > b --><sheetData>"
-                        + "<row r=\"900\"><c r=\"Z900\" t=\"inlineStr\"><is><t><![CDATA[a<b]]></t></is></c></row>"))
+                .change(
+                        FLOWS,
+                        s -> s.replace(
+                                "<sheetData>",
+                                "<!-- a > b --><sheetData>"
+                                        + "<row r=\"900\"><c r=\"Z900\" t=\"inlineStr\"><is><t><![CDATA[a<b]]></t></is></c></row>"))
                 .save(folder.resolve("in.xlsx"));
-        RawSheet sheet = WorkbookReader.read(file, new Faults("in.xlsx")).sheets().get(1);
+        RawSheet sheet =
+                WorkbookReader.read(file, new Faults("in.xlsx")).sheets().get(1);
         assertThat(sheet.cell(899, 25)).extracting(RawCell::text).isEqualTo("a<b");
     }
 
@@ -306,7 +333,8 @@ class WorkbookReaderTest {
         for (int i = 0; i < 1000; i++) {
             parts.with("xl/media/" + i, "x");
         }
-        assertThat(refusal(parts)).contains("more than the 1000 that an input workbook may have (fault: too-many-parts)");
+        assertThat(refusal(parts))
+                .contains("more than the 1000 that an input workbook may have (fault: too-many-parts)");
         StringBuilder rows = new StringBuilder();
         for (int i = 1000; i < 201_000; i++) {
             rows.append("<row r=\"").append(i).append("\"><c><v>1</v></c></row>");
@@ -322,7 +350,8 @@ class WorkbookReaderTest {
         for (int i = 1000; i <= 1_048_576; i++) {
             rows.append("<row r=\"").append(i).append("\"><c s=\"1\"/></row>");
         }
-        Path file = Zips.sound().change(FLOWS, s -> s.replace("</sheetData>", rows + "</sheetData>"))
+        Path file = Zips.sound()
+                .change(FLOWS, s -> s.replace("</sheetData>", rows + "</sheetData>"))
                 .save(folder.resolve("in.xlsx"));
         assertThat(InputReader.read(file, Samples.METHODS).cases()).hasSize(3);
     }
@@ -330,19 +359,30 @@ class WorkbookReaderTest {
     @Test
     void rowsAndCellsWithoutAddressesAndRichInlineTextsAreRead() throws IOException {
         Path file = new Zips()
-                .with("[Content_Types].xml", "<Types xmlns=\"x\"><Override PartName=\"/b/w.xml\" ContentType=\""
-                        + "application/vnd.openxmlformats-officedocument.spreadsheetml.sheet.main+xml\"/></Types>")
-                .with("_rels/.rels", "<Relationships><Relationship Id=\"r\" Type=\"http://x/officeDocument\" "
-                        + "Target=\"/b/w.xml\"/></Relationships>")
-                .with("b/_rels/w.xml.rels", "<Relationships><Relationship Id=\"r\" Type=\"http://x/worksheet\" "
-                        + "Target=\"../c/s.xml\"/></Relationships>")
-                .with("b/w.xml", "<workbook xmlns=\"" + Xml.MAIN + "\" xmlns:r=\"http://x/relationships\"><sheets>"
-                        + "<sheet name=\"A\" state=\"hidden\" r:id=\"r\"/></sheets></workbook>")
-                .with("c/s.xml", "<worksheet xmlns=\"" + Xml.MAIN + "\"><sheetData><row/><row><c/><c t=\"inlineStr\"><is>"
-                        + "<r><t>one </t></r><r><t>t_x0077_o</t></r><rPh><t>no</t></rPh></is></c><c t=\"b\"><v>1</v></c>"
-                        + "<c><f>1+1</f></c></row></sheetData></worksheet>")
+                .with(
+                        "[Content_Types].xml",
+                        "<Types xmlns=\"x\"><Override PartName=\"/b/w.xml\" ContentType=\""
+                                + "application/vnd.openxmlformats-officedocument.spreadsheetml.sheet.main+xml\"/></Types>")
+                .with(
+                        "_rels/.rels",
+                        "<Relationships><Relationship Id=\"r\" Type=\"http://x/officeDocument\" "
+                                + "Target=\"/b/w.xml\"/></Relationships>")
+                .with(
+                        "b/_rels/w.xml.rels",
+                        "<Relationships><Relationship Id=\"r\" Type=\"http://x/worksheet\" "
+                                + "Target=\"../c/s.xml\"/></Relationships>")
+                .with(
+                        "b/w.xml",
+                        "<workbook xmlns=\"" + Xml.MAIN + "\" xmlns:r=\"http://x/relationships\"><sheets>"
+                                + "<sheet name=\"A\" state=\"hidden\" r:id=\"r\"/></sheets></workbook>")
+                .with(
+                        "c/s.xml",
+                        "<worksheet xmlns=\"" + Xml.MAIN + "\"><sheetData><row/><row><c/><c t=\"inlineStr\"><is>"
+                                + "<r><t>one </t></r><r><t>t_x0077_o</t></r><rPh><t>no</t></rPh></is></c><c t=\"b\"><v>1</v></c>"
+                                + "<c><f>1+1</f></c></row></sheetData></worksheet>")
                 .save(folder.resolve("in.xlsx"));
-        RawSheet sheet = WorkbookReader.read(file, new Faults("in.xlsx")).sheets().get(0);
+        RawSheet sheet =
+                WorkbookReader.read(file, new Faults("in.xlsx")).sheets().get(0);
         assertThat(sheet.isHidden()).isTrue();
         assertThat(sheet.rows().get(1).values())
                 .containsExactly(

@@ -13,15 +13,18 @@ import org.junit.jupiter.params.provider.CsvSource;
 
 class CheckRowTest {
     private static final String HEAD = "id,method,entries,target,expected,unit,tolerance,source,kind,note\n";
-    private static final String ROW = "T1,trough,\"size = \"\"2 ft\"\"; h = 0.5 ft\",Q,1.25,ft3/s,0.1 %,invented,derived,a note\n";
+    private static final String ROW =
+            "T1,trough,\"size = \"\"2 ft\"\"; h = 0.5 ft\",Q,1.25,ft3/s,0.1 %,invented,derived,a note\n";
 
     @Test
     void aRowIsRead() {
         CheckRow row = CheckRow.read("t.csv", "# a remark\n" + HEAD + ROW).get(0);
         assertThat(row.id()).isEqualTo("T1");
         assertThat(row.method()).isEqualTo("trough");
-        assertThat(row.entries()).containsExactly(
-                java.util.Map.entry("size", FormulaParser.parse("\"2 ft\"")), java.util.Map.entry("h", FormulaParser.parse("0.5 ft")));
+        assertThat(row.entries())
+                .containsExactly(
+                        java.util.Map.entry("size", FormulaParser.parse("\"2 ft\"")),
+                        java.util.Map.entry("h", FormulaParser.parse("0.5 ft")));
         assertThat(row.target()).isEqualTo("Q");
         assertThat(row.expected()).isEqualTo(1.25);
         assertThat(row.unit()).isEqualTo(Unit.parse("ft3/s"));
@@ -45,7 +48,9 @@ class CheckRowTest {
             """)
     void aFaultSaysFileAndLine(String written, String instead, String message) {
         String text = "# a remark\n" + HEAD + ROW + ROW.replace(written, instead);
-        assertThatThrownBy(() -> CheckRow.read("t.csv", text)).isInstanceOf(CheckException.class).hasMessage(message);
+        assertThatThrownBy(() -> CheckRow.read("t.csv", text))
+                .isInstanceOf(CheckException.class)
+                .hasMessage(message);
     }
 
     @Test

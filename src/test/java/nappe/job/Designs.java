@@ -13,9 +13,22 @@ import nappe.unit.WorkingSystem;
 /** Designs of stations that never were. */
 final class Designs {
     static final Design.Project PROJECT = new Design.Project(
-            "Pretend works", "Any Firm (fictional)", "Nowhere District (fictional)", "PW-1", "Pretend station", "A",
-            LocalDate.of(2030, 1, 2), "preliminary", WorkingSystem.SI, false, Unit.parse("L/s"), Unit.parse("mm"),
-            "invented datum", "", "for a test only", true);
+            "Pretend works",
+            "Any Firm (fictional)",
+            "Nowhere District (fictional)",
+            "PW-1",
+            "Pretend station",
+            "A",
+            LocalDate.of(2030, 1, 2),
+            "preliminary",
+            WorkingSystem.SI,
+            false,
+            Unit.parse("L/s"),
+            Unit.parse("mm"),
+            "invented datum",
+            "",
+            "for a test only",
+            true);
 
     private Designs() {}
 
@@ -30,7 +43,8 @@ final class Designs {
         flume.put("size", typed(Value.word("1 ft"), "1"));
         flume.put("z_f", number(floor, "m"));
         return design(
-                List.of(new Design.Element("W1", "", "rectangular-weir", weir),
+                List.of(
+                        new Design.Element("W1", "", "rectangular-weir", weir),
                         new Design.Element("F1", "", "parshall-flume", flume)),
                 List.of(cases));
     }
@@ -56,66 +70,226 @@ final class Designs {
         Map<String, Design> changed = new LinkedHashMap<>();
         Design.Project p = d.project();
         List<Design.Project> projects = List.of(
-                project(p, 0), project(p, 1), project(p, 2), project(p, 3), project(p, 4), project(p, 5), project(p, 6),
-                project(p, 7), project(p, 8), project(p, 9), project(p, 10), project(p, 11), project(p, 12), project(p, 13),
-                project(p, 14), project(p, 15));
+                project(p, 0),
+                project(p, 1),
+                project(p, 2),
+                project(p, 3),
+                project(p, 4),
+                project(p, 5),
+                project(p, 6),
+                project(p, 7),
+                project(p, 8),
+                project(p, 9),
+                project(p, 10),
+                project(p, 11),
+                project(p, 12),
+                project(p, 13),
+                project(p, 14),
+                project(p, 15));
         for (int i = 0; i < projects.size(); i++) {
-            changed.put("project " + i, new Design(projects.get(i), d.elements(), d.cases(), d.demands(), d.assumptions(),
-                    d.references(), d.requirements(), d.revisions()));
+            changed.put(
+                    "project " + i,
+                    new Design(
+                            projects.get(i),
+                            d.elements(),
+                            d.cases(),
+                            d.demands(),
+                            d.assumptions(),
+                            d.references(),
+                            d.requirements(),
+                            d.revisions()));
         }
         for (int e = 0; e < d.elements().size(); e++) {
             Design.Element element = d.elements().get(e);
-            changed.put("tag " + e, withElement(d, e, new Design.Element("X9", element.title(), element.method(), element.typed())));
-            changed.put("title " + e, withElement(d, e, new Design.Element(element.tag(), "other", element.method(), element.typed())));
+            changed.put(
+                    "tag " + e,
+                    withElement(d, e, new Design.Element("X9", element.title(), element.method(), element.typed())));
+            changed.put(
+                    "title " + e,
+                    withElement(d, e, new Design.Element(element.tag(), "other", element.method(), element.typed())));
             for (String symbol : element.typed().keySet()) {
                 for (Design.Typed other : others(element.typed().get(symbol))) {
                     Map<String, Design.Typed> typed = new LinkedHashMap<>(element.typed());
                     typed.put(symbol, other);
-                    changed.put(element.tag() + "." + symbol + " " + other,
-                            withElement(d, e, new Design.Element(element.tag(), element.title(), element.method(), typed)));
+                    changed.put(
+                            element.tag() + "." + symbol + " " + other,
+                            withElement(
+                                    d, e, new Design.Element(element.tag(), element.title(), element.method(), typed)));
                 }
             }
         }
         for (int c = 0; c < d.cases().size(); c++) {
             Design.FlowCase one = d.cases().get(c);
-            changed.put("name " + c, withCase(d, c, new Design.FlowCase(
-                    "other", one.period(), one.year(), one.flow(), one.tailwater(), one.tailwaterReturn(), one.typed())));
-            changed.put("period " + c, withCase(d, c, new Design.FlowCase(
-                    one.name(), "1 d", one.year(), one.flow(), one.tailwater(), one.tailwaterReturn(), one.typed())));
-            changed.put("year " + c, withCase(d, c, new Design.FlowCase(
-                    one.name(), one.period(), "2099", one.flow(), one.tailwater(), one.tailwaterReturn(), one.typed())));
-            changed.put("return " + c, withCase(d, c, new Design.FlowCase(
-                    one.name(), one.period(), one.year(), one.flow(), one.tailwater(), "25 years", one.typed())));
+            changed.put(
+                    "name " + c,
+                    withCase(
+                            d,
+                            c,
+                            new Design.FlowCase(
+                                    "other",
+                                    one.period(),
+                                    one.year(),
+                                    one.flow(),
+                                    one.tailwater(),
+                                    one.tailwaterReturn(),
+                                    one.typed())));
+            changed.put(
+                    "period " + c,
+                    withCase(
+                            d,
+                            c,
+                            new Design.FlowCase(
+                                    one.name(),
+                                    "1 d",
+                                    one.year(),
+                                    one.flow(),
+                                    one.tailwater(),
+                                    one.tailwaterReturn(),
+                                    one.typed())));
+            changed.put(
+                    "year " + c,
+                    withCase(
+                            d,
+                            c,
+                            new Design.FlowCase(
+                                    one.name(),
+                                    one.period(),
+                                    "2099",
+                                    one.flow(),
+                                    one.tailwater(),
+                                    one.tailwaterReturn(),
+                                    one.typed())));
+            changed.put(
+                    "return " + c,
+                    withCase(
+                            d,
+                            c,
+                            new Design.FlowCase(
+                                    one.name(),
+                                    one.period(),
+                                    one.year(),
+                                    one.flow(),
+                                    one.tailwater(),
+                                    "25 years",
+                                    one.typed())));
             for (Design.Typed other : others(one.flow())) {
-                changed.put("flow " + c + other, withCase(d, c, new Design.FlowCase(
-                        one.name(), one.period(), one.year(), other, one.tailwater(), one.tailwaterReturn(), one.typed())));
+                changed.put(
+                        "flow " + c + other,
+                        withCase(
+                                d,
+                                c,
+                                new Design.FlowCase(
+                                        one.name(),
+                                        one.period(),
+                                        one.year(),
+                                        other,
+                                        one.tailwater(),
+                                        one.tailwaterReturn(),
+                                        one.typed())));
             }
             for (Design.Typed other : others(one.tailwater())) {
-                changed.put("tailwater " + c + other, withCase(d, c, new Design.FlowCase(
-                        one.name(), one.period(), one.year(), one.flow(), other, one.tailwaterReturn(), one.typed())));
+                changed.put(
+                        "tailwater " + c + other,
+                        withCase(
+                                d,
+                                c,
+                                new Design.FlowCase(
+                                        one.name(),
+                                        one.period(),
+                                        one.year(),
+                                        one.flow(),
+                                        other,
+                                        one.tailwaterReturn(),
+                                        one.typed())));
             }
-            changed.put("head read " + c, withCase(d, c, new Design.FlowCase(one.name(), one.period(), one.year(), one.flow(),
-                    one.tailwater(), one.tailwaterReturn(), Map.of("F1.h_g", number(0.2, "m")))));
+            changed.put(
+                    "head read " + c,
+                    withCase(
+                            d,
+                            c,
+                            new Design.FlowCase(
+                                    one.name(),
+                                    one.period(),
+                                    one.year(),
+                                    one.flow(),
+                                    one.tailwater(),
+                                    one.tailwaterReturn(),
+                                    Map.of("F1.h_g", number(0.2, "m")))));
         }
-        changed.put("demand", new Design(p, d.elements(), d.cases(), List.of(new Design.Demand(
-                "F1", "z_u", true, number(9, "m"), "pretend", "invented")), d.assumptions(), d.references(), d.requirements(), d.revisions()));
-        changed.put("assumption", new Design(p, d.elements(), d.cases(), d.demands(), List.of(new Design.Assumption(
-                "pretend", "invented", "nobody", true)), d.references(), d.requirements(), d.revisions()));
-        changed.put("assumption closed", new Design(p, d.elements(), d.cases(), d.demands(), List.of(new Design.Assumption(
-                "pretend", "invented", "nobody", false)), d.references(), d.requirements(), d.revisions()));
-        changed.put("reference", new Design(p, d.elements(), d.cases(), d.demands(), d.assumptions(), List.of("An invented book"),
-                d.requirements(), d.revisions()));
-        changed.put("requirement", new Design(p, d.elements(), d.cases(), d.demands(), d.assumptions(), d.references(),
-                List.of(new Design.Requirement("pretend", "invented", "Limits")), d.revisions()));
-        changed.put("revision", new Design(p, d.elements(), d.cases(), d.demands(), d.assumptions(), d.references(),
-                d.requirements(), List.of(new Design.RevisionNote("A", "2030-01-02", "first"))));
+        changed.put(
+                "demand",
+                new Design(
+                        p,
+                        d.elements(),
+                        d.cases(),
+                        List.of(new Design.Demand("F1", "z_u", true, number(9, "m"), "pretend", "invented")),
+                        d.assumptions(),
+                        d.references(),
+                        d.requirements(),
+                        d.revisions()));
+        changed.put(
+                "assumption",
+                new Design(
+                        p,
+                        d.elements(),
+                        d.cases(),
+                        d.demands(),
+                        List.of(new Design.Assumption("pretend", "invented", "nobody", true)),
+                        d.references(),
+                        d.requirements(),
+                        d.revisions()));
+        changed.put(
+                "assumption closed",
+                new Design(
+                        p,
+                        d.elements(),
+                        d.cases(),
+                        d.demands(),
+                        List.of(new Design.Assumption("pretend", "invented", "nobody", false)),
+                        d.references(),
+                        d.requirements(),
+                        d.revisions()));
+        changed.put(
+                "reference",
+                new Design(
+                        p,
+                        d.elements(),
+                        d.cases(),
+                        d.demands(),
+                        d.assumptions(),
+                        List.of("An invented book"),
+                        d.requirements(),
+                        d.revisions()));
+        changed.put(
+                "requirement",
+                new Design(
+                        p,
+                        d.elements(),
+                        d.cases(),
+                        d.demands(),
+                        d.assumptions(),
+                        d.references(),
+                        List.of(new Design.Requirement("pretend", "invented", "Limits")),
+                        d.revisions()));
+        changed.put(
+                "revision",
+                new Design(
+                        p,
+                        d.elements(),
+                        d.cases(),
+                        d.demands(),
+                        d.assumptions(),
+                        d.references(),
+                        d.requirements(),
+                        List.of(new Design.RevisionNote("A", "2030-01-02", "first"))));
         return changed;
     }
 
     private static List<Design.Typed> others(Design.Typed t) {
         List<Design.Typed> others = new ArrayList<>();
         if (t.value() instanceof Value.Number number) {
-            others.add(new Design.Typed(Value.of(Math.nextUp(number.value())), t.unit(), t.source(), t.standing(), t.origin()));
+            others.add(new Design.Typed(
+                    Value.of(Math.nextUp(number.value())), t.unit(), t.source(), t.standing(), t.origin()));
             others.add(new Design.Typed(t.value(), Unit.parse("ft"), t.source(), t.standing(), t.origin()));
             others.add(new Design.Typed(new Value.None("not given"), t.unit(), t.source(), t.standing(), t.origin()));
         } else {
@@ -129,29 +303,63 @@ final class Designs {
     private static Design withElement(Design d, int at, Design.Element element) {
         List<Design.Element> elements = new ArrayList<>(d.elements());
         elements.set(at, element);
-        return new Design(d.project(), elements, d.cases(), d.demands(), d.assumptions(), d.references(), d.requirements(), d.revisions());
+        return new Design(
+                d.project(),
+                elements,
+                d.cases(),
+                d.demands(),
+                d.assumptions(),
+                d.references(),
+                d.requirements(),
+                d.revisions());
     }
 
     private static Design withCase(Design d, int at, Design.FlowCase flowCase) {
         List<Design.FlowCase> cases = new ArrayList<>(d.cases());
         cases.set(at, flowCase);
-        return new Design(d.project(), d.elements(), cases, d.demands(), d.assumptions(), d.references(), d.requirements(), d.revisions());
+        return new Design(
+                d.project(),
+                d.elements(),
+                cases,
+                d.demands(),
+                d.assumptions(),
+                d.references(),
+                d.requirements(),
+                d.revisions());
     }
 
     private static Design.Project project(Design.Project p, int changed) {
-        String[] text = {p.project(), p.firm(), p.client(), p.number(), p.subject(), p.revision(), p.status(), p.datum(),
-            p.workedCase(), p.release()};
+        String[] text = {
+            p.project(),
+            p.firm(),
+            p.client(),
+            p.number(),
+            p.subject(),
+            p.revision(),
+            p.status(),
+            p.datum(),
+            p.workedCase(),
+            p.release()
+        };
         if (changed < text.length) {
             text[changed] = "other";
         }
-        return new Design.Project(text[0], text[1], text[2], text[3], text[4], text[5],
+        return new Design.Project(
+                text[0],
+                text[1],
+                text[2],
+                text[3],
+                text[4],
+                text[5],
                 changed == 10 ? p.date().plusDays(1) : p.date(),
                 text[6],
                 changed == 11 ? WorkingSystem.US : p.system(),
                 changed == 12 || p.letterPaper(),
                 changed == 13 ? Unit.parse("MGD") : p.flowUnit(),
                 changed == 14 ? Unit.parse("in") : p.headUnit(),
-                text[7], text[8], text[9],
+                text[7],
+                text[8],
+                text[9],
                 changed != 15 && p.sealSpace());
     }
 }

@@ -18,7 +18,8 @@ class FingerprintTest {
     private static final MethodLibrary METHODS = new MethodLibrary(new BuiltInLibrary());
     private static final List<MethodSheet> USED =
             List.of(METHODS.sheet("rectangular-weir"), METHODS.sheet("parshall-flume"));
-    private static final Design DESIGN = Designs.weirBelowFlume(1.6, Designs.flowCase("Low", 0.01, 0.5), Designs.flowCase("High", 0.1, 0.6));
+    private static final Design DESIGN =
+            Designs.weirBelowFlume(1.6, Designs.flowCase("Low", 0.01, 0.5), Designs.flowCase("High", 0.1, 0.6));
     private static final String MARK = Fingerprint.of(DESIGN, USED, "0.1.0");
 
     @Test
@@ -29,7 +30,8 @@ class FingerprintTest {
 
     @Test
     void theSameDesignHasTheSameMark() {
-        Design again = Designs.weirBelowFlume(1.6, Designs.flowCase("Low", 0.01, 0.5), Designs.flowCase("High", 0.1, 0.6));
+        Design again =
+                Designs.weirBelowFlume(1.6, Designs.flowCase("Low", 0.01, 0.5), Designs.flowCase("High", 0.1, 0.6));
         assertThat(Fingerprint.of(again, USED, "0.1.0")).isEqualTo(MARK);
     }
 
@@ -51,14 +53,17 @@ class FingerprintTest {
 
     @Test
     void theOrderInWhichSymbolsWereTypedDoesNotChangeIt() {
-        List<Design.Element> turned = DESIGN.elements().stream().map(e -> {
-            Map<String, Design.Typed> typed = new LinkedHashMap<>();
-            List<String> symbols = new ArrayList<>(e.typed().keySet());
-            java.util.Collections.reverse(symbols);
-            symbols.forEach(symbol -> typed.put(symbol, e.typed().get(symbol)));
-            return new Design.Element(e.tag(), e.title(), e.method(), typed);
-        }).toList();
-        assertThat(Fingerprint.of(Designs.design(turned, DESIGN.cases()), USED, "0.1.0")).isEqualTo(MARK);
+        List<Design.Element> turned = DESIGN.elements().stream()
+                .map(e -> {
+                    Map<String, Design.Typed> typed = new LinkedHashMap<>();
+                    List<String> symbols = new ArrayList<>(e.typed().keySet());
+                    java.util.Collections.reverse(symbols);
+                    symbols.forEach(symbol -> typed.put(symbol, e.typed().get(symbol)));
+                    return new Design.Element(e.tag(), e.title(), e.method(), typed);
+                })
+                .toList();
+        assertThat(Fingerprint.of(Designs.design(turned, DESIGN.cases()), USED, "0.1.0"))
+                .isEqualTo(MARK);
     }
 
     @Test
@@ -70,7 +75,8 @@ class FingerprintTest {
     void aMethodTextItsTableAndTheVersionChangeIt() {
         String text = "method Pretend\nentry r ; 1 ; key\ntable curve between r\ncolumn c ; 1 ; curve\n";
         String plain = mark(text, "r [1],c [1]\n1,2\n2,3\n");
-        assertThat(mark(text.replace("; curve", "; the curve"), "r [1],c [1]\n1,2\n2,3\n")).isNotEqualTo(plain);
+        assertThat(mark(text.replace("; curve", "; the curve"), "r [1],c [1]\n1,2\n2,3\n"))
+                .isNotEqualTo(plain);
         assertThat(mark(text, "r [1],c [1]\n1,2\n2,3.1\n")).isNotEqualTo(plain);
         assertThat(Fingerprint.of(DESIGN, USED, "0.1.1")).isNotEqualTo(MARK);
     }
@@ -86,15 +92,34 @@ class FingerprintTest {
 
     private static Design named(String project, String firm) {
         Design.Project p = Designs.PROJECT;
-        Design.Project other = new Design.Project(project, firm, p.client(), p.number(), p.subject(), p.revision(), p.date(), p.status(),
-                p.system(), p.letterPaper(), p.flowUnit(), p.headUnit(), p.datum(), p.workedCase(), p.release(), p.sealSpace());
-        return new Design(other, DESIGN.elements(), DESIGN.cases(), List.of(), List.of(), List.of(), List.of(), List.of());
+        Design.Project other = new Design.Project(
+                project,
+                firm,
+                p.client(),
+                p.number(),
+                p.subject(),
+                p.revision(),
+                p.date(),
+                p.status(),
+                p.system(),
+                p.letterPaper(),
+                p.flowUnit(),
+                p.headUnit(),
+                p.datum(),
+                p.workedCase(),
+                p.release(),
+                p.sealSpace());
+        return new Design(
+                other, DESIGN.elements(), DESIGN.cases(), List.of(), List.of(), List.of(), List.of(), List.of());
     }
 
     private static Design.Element moved(Design.Element element) {
         Map<String, Design.Typed> typed = new LinkedHashMap<>();
-        element.typed().forEach((symbol, t) -> typed.put(symbol,
-                new Design.Typed(t.value(), t.unit(), t.source(), t.standing(), new Design.Origin("Moved", "Z99"))));
+        element.typed()
+                .forEach((symbol, t) -> typed.put(
+                        symbol,
+                        new Design.Typed(
+                                t.value(), t.unit(), t.source(), t.standing(), new Design.Origin("Moved", "Z99"))));
         return new Design.Element(element.tag(), element.title(), element.method(), typed);
     }
 }

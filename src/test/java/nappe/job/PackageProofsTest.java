@@ -35,8 +35,10 @@ class PackageProofsTest {
     void twoSpreadsheetProgramsComputeEveryCellAlike(WorkingSystem system) throws IOException {
         Results results = PretendStation.AS_ISSUED.results(system);
         Path spoilt = Files.write(folder.resolve("spoilt.xlsx"), Spoiler.spoil(XlsxDelivery.render(results)));
-        assertThat(Recalculated.disagreements(Recalculated.byGnumeric(spoilt), results)).isEmpty();
-        assertThat(Recalculated.disagreements(Recalculated.byLibreOffice(spoilt), results)).isEmpty();
+        assertThat(Recalculated.disagreements(Recalculated.byGnumeric(spoilt), results))
+                .isEmpty();
+        assertThat(Recalculated.disagreements(Recalculated.byLibreOffice(spoilt), results))
+                .isEmpty();
     }
 
     static List<PretendStation> changes() {
@@ -55,7 +57,8 @@ class PackageProofsTest {
         byte[] issued = XlsxDelivery.render(PretendStation.AS_ISSUED.results(WorkingSystem.US));
         Results anew = changed.results(WorkingSystem.US);
         Path retyped = Files.write(folder.resolve("retyped.xlsx"), Retyper.type(issued, numbersTyped(anew)));
-        assertThat(Recalculated.disagreements(Recalculated.byGnumeric(retyped), anew)).isEmpty();
+        assertThat(Recalculated.disagreements(Recalculated.byGnumeric(retyped), anew))
+                .isEmpty();
     }
 
     @Test
@@ -66,7 +69,8 @@ class PackageProofsTest {
         try {
             Locale.setDefault(Locale.forLanguageTag("ar-EG"));
             TimeZone.setDefault(TimeZone.getTimeZone("Pacific/Auckland"));
-            assertThat(XlsxDelivery.render(PretendStation.AS_ISSUED.results(WorkingSystem.SI))).isEqualTo(here);
+            assertThat(XlsxDelivery.render(PretendStation.AS_ISSUED.results(WorkingSystem.SI)))
+                    .isEqualTo(here);
         } finally {
             Locale.setDefault(locale);
             TimeZone.setDefault(zone);

@@ -35,9 +35,22 @@ record PretendStation(double floor, List<Double> flows, List<Double> levels, dou
     private Design design(WorkingSystem system) {
         boolean us = system == WorkingSystem.US;
         Design.Project project = new Design.Project(
-                "Pretend works", "Made-up Engineers", "Nowhere District", "NW-7", "Station M1", "A",
-                LocalDate.of(2026, 3, 1), "for checking", system, us, Unit.parse(us ? "MGD" : "L/s"),
-                Unit.parse(us ? "in" : "mm"), "invented datum", "", "For review only.", true);
+                "Pretend works",
+                "Made-up Engineers",
+                "Nowhere District",
+                "NW-7",
+                "Station M1",
+                "A",
+                LocalDate.of(2026, 3, 1),
+                "for checking",
+                system,
+                us,
+                Unit.parse(us ? "MGD" : "L/s"),
+                Unit.parse(us ? "in" : "mm"),
+                "invented datum",
+                "",
+                "For review only.",
+                true);
         Map<String, Typed> flume = new LinkedHashMap<>();
         flume.put("size", typed(Value.word("1 ft"), "1"));
         flume.put("z_f", typed(Value.of(floor), "ft"));
@@ -52,15 +65,23 @@ record PretendStation(double floor, List<Double> flows, List<Double> levels, dou
             heads.put("F1.h_g", typed(i == 2 ? Value.of(headRead) : notGiven(), "in"));
             heads.put("W1.h_g", typed(notGiven(), "in"));
             Value level = levels.get(i).isNaN() ? notGiven() : Value.of(levels.get(i));
-            cases.add(new Design.FlowCase("Case " + (i + 1), "peak hour", "2040", typed(Value.of(flows.get(i)), "MGD"),
-                    typed(level, "ft"), "10 years", heads));
+            cases.add(new Design.FlowCase(
+                    "Case " + (i + 1),
+                    "peak hour",
+                    "2040",
+                    typed(Value.of(flows.get(i)), "MGD"),
+                    typed(level, "ft"),
+                    "10 years",
+                    heads));
         }
         return new Design(
                 project,
-                List.of(new Design.Element("F1", "Pretend flume", "parshall-flume", flume),
+                List.of(
+                        new Design.Element("F1", "Pretend flume", "parshall-flume", flume),
                         new Design.Element("W1", "Pretend weir", "rectangular-weir", weir)),
                 cases,
-                List.of(new Design.Demand("F1", "h_a", true, typed(Value.of(2), "ft"), "head no higher", "Pretend permit, p. 3")),
+                List.of(new Design.Demand(
+                        "F1", "h_a", true, typed(Value.of(2), "ft"), "head no higher", "Pretend permit, p. 3")),
                 List.of(new Design.Assumption("Water levels are invented", "none", "nobody", true)),
                 List.of("An invented reference"),
                 List.of(new Design.Requirement("Show the limits", "Pretend permit", "Summary of limits")),

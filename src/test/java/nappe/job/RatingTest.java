@@ -40,19 +40,22 @@ class RatingTest {
     @ParameterizedTest
     @CsvSource({"0.3, 0.9, 0.2", "0.5, 0.5, 0.5", "0.6, 1.1, 0.45", "1.2, 3, 1", "2, 40, 0.15", "4.9, 6.2, 2.5"})
     void everyRowOfAWeirIsARerunAtThatHead(String b, String channel, String p) {
-        rowsAreReruns("rectangular-weir", WorkingSystem.SI,
+        rowsAreReruns(
+                "rectangular-weir",
+                WorkingSystem.SI,
                 typed("b", b + " m", "B", channel + " m", "p", p + " m", "z_c", "2 m"));
     }
 
     @Test
     void soItIsInUsCustomaryUnits() {
         rowsAreReruns("parshall-flume", WorkingSystem.US, typed("size", "\"3 ft\"", "z_f", "1 ft"));
-        rowsAreReruns("rectangular-weir", WorkingSystem.US,
-                typed("b", "2 ft", "B", "4.5 ft", "p", "1.25 ft", "z_c", "2 ft"));
+        rowsAreReruns(
+                "rectangular-weir", WorkingSystem.US, typed("b", "2 ft", "B", "4.5 ft", "p", "1.25 ft", "z_c", "2 ft"));
     }
 
     private static void rowsAreReruns(String method, WorkingSystem system, Map<String, String> entries) {
-        Bench bench = new Bench(METHODS.sheet(method), system, entries, List.of(typed("Q", "0.1 m3/s", "z_t", "0.1 m")));
+        Bench bench =
+                new Bench(METHODS.sheet(method), system, entries, List.of(typed("Q", "0.1 m3/s", "z_t", "0.1 m")));
         Block.Table table = bench.ratings().get(0);
         assertThat(table.rows()).hasSize(21);
         for (Block.Row row : table.rows()) {
@@ -75,12 +78,29 @@ class RatingTest {
             Bench bench, WorkingSystem system, String method, Map<String, String> entries, double head, Cell cell) {
         Map<String, Formula> all = new LinkedHashMap<>();
         entries.forEach((symbol, text) -> all.put(symbol, FormulaParser.parse(text)));
-        all.put("h", new Formula.Quantity(head, Double.toString(head), system.coherentUnit(Unit.parse("m").dimension())));
-        CheckRow row = new CheckRow("T", method, entries + " at " + head, all, cell.symbol(), 0, cell.unit(), "0 abs",
-                "this test", "derived", "");
+        all.put(
+                "h",
+                new Formula.Quantity(
+                        head,
+                        Double.toString(head),
+                        system.coherentUnit(Unit.parse("m").dimension())));
+        CheckRow row = new CheckRow(
+                "T",
+                method,
+                entries + " at " + head,
+                all,
+                cell.symbol(),
+                0,
+                cell.unit(),
+                "0 abs",
+                "this test",
+                "derived",
+                "");
         CheckOutcome outcome = VERIFICATION.run(row, system);
         if (bench.value(cell) instanceof Value.Number number) {
-            assertThat(outcome.computed()).as(cell.symbol() + " of " + row.entriesText()).isEqualTo(number.value());
+            assertThat(outcome.computed())
+                    .as(cell.symbol() + " of " + row.entriesText())
+                    .isEqualTo(number.value());
         } else {
             assertThat(outcome.words()).isEqualTo("no result");
             assertThat(bench.value(cell)).isEqualTo(new Value.None("no result"));
@@ -90,12 +110,16 @@ class RatingTest {
     @ParameterizedTest
     @MethodSource("sizes")
     void aRatingRisesWithTheHead(String size) {
-        Bench bench = new Bench(METHODS.sheet("parshall-flume"), WorkingSystem.SI,
-                typed("size", "\"" + size + "\"", "z_f", "1 m"), List.of(typed("Q", "0.1 m3/s", "z_t", "0.1 m")));
+        Bench bench = new Bench(
+                METHODS.sheet("parshall-flume"),
+                WorkingSystem.SI,
+                typed("size", "\"" + size + "\"", "z_f", "1 m"),
+                List.of(typed("Q", "0.1 m3/s", "z_t", "0.1 m")));
         List<Double> flows = new ArrayList<>();
         for (Block.Row row : bench.ratings().get(0).rows()) {
             for (Block.Item item : row.items()) {
-                if (item instanceof Block.Content content && content.cell().symbol().equals("Q_h")) {
+                if (item instanceof Block.Content content
+                        && content.cell().symbol().equals("Q_h")) {
                     flows.add(((Value.Number) bench.value(content.cell())).value());
                 }
             }

@@ -53,18 +53,23 @@ class VerificationTest {
 
     @Test
     void aRowThatIsNotMetSaysSoWithItsNumbers() {
-        CheckRow row = builtIn().stream().filter(r -> r.id().equals("KC23")).findFirst().orElseThrow();
+        CheckRow row = builtIn().stream()
+                .filter(r -> r.id().equals("KC23"))
+                .findFirst()
+                .orElseThrow();
         CheckOutcome outcome = VERIFICATION.run(off(row, 0.0351));
-        assertThat(shown(outcome)).isEqualTo(
-                "KC23 Q_h: computed 0.0341785, expected 0.0351, difference -2.6253 %, tolerance 0.05 %, "
-                        + "a, a_1 and k_b of the cited tables, interpolated linearly; value from a separate evaluation");
+        assertThat(shown(outcome))
+                .isEqualTo(
+                        "KC23 Q_h: computed 0.0341785, expected 0.0351, difference -2.6253 %, tolerance 0.05 %, "
+                                + "a, a_1 and k_b of the cited tables, interpolated linearly; value from a separate evaluation");
         assertThat(outcome.printed()).contains("NOT MET");
     }
 
     @Test
     void idsAreUniqueAndNoneThatIsLeftOutIsRun() {
         List<String> ids = builtIn().stream().map(CheckRow::id).toList();
-        List<String> leftOut = LIBRARY.text("checks/left-out.csv").lines()
+        List<String> leftOut = LIBRARY.text("checks/left-out.csv")
+                .lines()
                 .filter(line -> !line.startsWith("#") && !line.startsWith("id,"))
                 .map(line -> line.split(",")[0])
                 .toList();
@@ -76,8 +81,10 @@ class VerificationTest {
     @Test
     void everyBuiltInMethodHasCheckValuesThatSomebodyElsePrintedOrComputed() {
         for (String method : new MethodLibrary(LIBRARY).names()) {
-            assertThat(builtIn()).as(method).anyMatch(row ->
-                    row.method().equals(method) && List.of("published", "library").contains(row.kind()));
+            assertThat(builtIn())
+                    .as(method)
+                    .anyMatch(row -> row.method().equals(method)
+                            && List.of("published", "library").contains(row.kind()));
         }
     }
 
@@ -102,7 +109,10 @@ class VerificationTest {
     @Test
     void countsAreByMethodAndKind() {
         List<CheckOutcome> outcomes = new ArrayList<>();
-        CheckRow row = builtIn().stream().filter(r -> r.id().equals("KC23")).findFirst().orElseThrow();
+        CheckRow row = builtIn().stream()
+                .filter(r -> r.id().equals("KC23"))
+                .findFirst()
+                .orElseThrow();
         outcomes.add(VERIFICATION.run(row));
         outcomes.add(VERIFICATION.run(off(row, 9)));
         assertThat(CheckOutcome.counts(outcomes)).containsExactly(List.of("rectangular-weir", "derived", "2", "1"));
@@ -125,9 +135,16 @@ class VerificationTest {
     }
 
     private static String shown(CheckOutcome outcome) {
-        return String.format(Locale.ROOT, "%s %s: computed %s, expected %s, difference %s, tolerance %s, %s",
-                outcome.row().id(), outcome.row().target(), outcome.shown(), outcome.row().expected(), outcome.difference(),
-                outcome.row().tolerance(), outcome.row().source());
+        return String.format(
+                Locale.ROOT,
+                "%s %s: computed %s, expected %s, difference %s, tolerance %s, %s",
+                outcome.row().id(),
+                outcome.row().target(),
+                outcome.shown(),
+                outcome.row().expected(),
+                outcome.difference(),
+                outcome.row().tolerance(),
+                outcome.row().source());
     }
 
     private static CheckRow off(CheckRow row, double expected) {
@@ -135,7 +152,17 @@ class VerificationTest {
     }
 
     private static CheckRow with(CheckRow row, String tolerance, double expected) {
-        return new CheckRow(row.id(), row.method(), row.entriesText(), row.entries(), row.target(), expected, row.unit(),
-                tolerance, row.source(), row.kind(), row.note());
+        return new CheckRow(
+                row.id(),
+                row.method(),
+                row.entriesText(),
+                row.entries(),
+                row.target(),
+                expected,
+                row.unit(),
+                tolerance,
+                row.source(),
+                row.kind(),
+                row.note());
     }
 }

@@ -66,7 +66,9 @@ class WaterLevelLinkTest {
     @Test
     void noCellThatIsSureHoldsWordsInPlaceOfANumber() {
         Results results = run(Designs.weirBelowFlume(1.6, flowCase("Dry", 0, 0.5), flowCase("Flood", 0.02, 1.19)));
-        assertThat(results.cells()).filteredOn(cell -> cell.sureness() == Sureness.SURE && cell.place().sheet().matches("[WF]1.*"))
+        assertThat(results.cells())
+                .filteredOn(cell ->
+                        cell.sureness() == Sureness.SURE && cell.place().sheet().matches("[WF]1.*"))
                 .allSatisfy(cell -> assertThat(results.value(cell)).isNotInstanceOf(Value.None.class));
     }
 

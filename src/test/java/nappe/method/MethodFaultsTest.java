@@ -9,8 +9,7 @@ import org.junit.jupiter.api.Test;
 class MethodFaultsTest {
     @Test
     void aSheetStartsWithItsTitle() {
-        Texts texts = new Texts()
-                .method("pretend", """
+        Texts texts = new Texts().method("pretend", """
                         line x = 1 ; 1 ; label""");
         assertThat(faults(texts)).isEqualTo("""
                 pretend.txt:1:1: the first statement is "method" with a title (fault: title-missing)
@@ -20,8 +19,7 @@ class MethodFaultsTest {
 
     @Test
     void aWordThatIsNoStatementIsAFaultAndNothingFollowsFromIt() {
-        Texts texts = new Texts()
-                .method("pretend", """
+        Texts texts = new Texts().method("pretend", """
                         method Pretend
                         lien x = 1 ; 1 ; label
                         line y = x ; 1 ; label""");
@@ -33,8 +31,7 @@ class MethodFaultsTest {
 
     @Test
     void faultsOfALine() {
-        Texts texts = new Texts()
-                .method("pretend", """
+        Texts texts = new Texts().method("pretend", """
                         method Pretend
                           and on
                         line
@@ -96,8 +93,7 @@ class MethodFaultsTest {
 
     @Test
     void faultsOfASourceOrAMark() {
-        Texts texts = new Texts()
-                .method("pretend", """
+        Texts texts = new Texts().method("pretend", """
                         method Pretend
                         source
                         source A
@@ -123,8 +119,7 @@ class MethodFaultsTest {
 
     @Test
     void faultsOfWhatIsGiven() {
-        Texts texts = new Texts()
-                .method("pretend", """
+        Texts texts = new Texts().method("pretend", """
                         method Pretend
                         entry
                         entry b
@@ -208,8 +203,7 @@ class MethodFaultsTest {
 
     @Test
     void faultsOfAColumn() {
-        Texts texts = new Texts()
-                .method("pretend", """
+        Texts texts = new Texts().method("pretend", """
                         method Pretend
                         source A ; book
                         entry r ; 1 ; l
@@ -247,8 +241,7 @@ class MethodFaultsTest {
 
     @Test
     void faultsOfAConstant() {
-        Texts texts = new Texts()
-                .method("pretend", """
+        Texts texts = new Texts().method("pretend", """
                         method Pretend
                         source A ; book
                         constant a = 1 ; 1 ; l
@@ -280,8 +273,7 @@ class MethodFaultsTest {
 
     @Test
     void faultsOfRootsAtsLimitsRatingsAndGives() {
-        Texts texts = new Texts()
-                .method("pretend", """
+        Texts texts = new Texts().method("pretend", """
                         method Pretend
                         source A ; book
                         entry b ; m ; l
@@ -500,15 +492,13 @@ class MethodFaultsTest {
 
     @Test
     void faultsOfAnIncludeWithSubscript() {
-        Texts texts = new Texts()
-                .method("pretend", """
+        Texts texts = new Texts().method("pretend", """
                         method Pretend
                         entry b_1 ; m ; l
                         entry b_2 ; s ; l
                         include part subscript 1
                         include part subscript 2
-                        line S = A_1 + A_2 + A_x1 ; m2 ; l""")
-                .method("part", """
+                        line S = A_1 + A_2 + A_x1 ; m2 ; l""").method("part", """
                         requires b ; m ; l
                         line A = b^2 ; m2 ; l
                         line A_x = b + y ; m2 ; l""");
@@ -529,8 +519,7 @@ class MethodFaultsTest {
 
     @Test
     void aFaultInAContinuationLineIsShownThere() {
-        Texts texts = new Texts()
-                .method("pretend", """
+        Texts texts = new Texts().method("pretend", """
                         method Pretend
                            # remark
                         entry a ; m
@@ -549,8 +538,9 @@ class MethodFaultsTest {
     void aSheetThatIsNotThereIsAFault() {
         MethodException faults =
                 catchThrowableOfType(MethodException.class, () -> new MethodReader(new Texts()).read("nothing"));
-        assertThat(faults.faults()).containsExactly(
-                new MethodFault("nothing.txt", 1, 1, "there is no such method sheet", "method-missing", ""));
+        assertThat(faults.faults())
+                .containsExactly(
+                        new MethodFault("nothing.txt", 1, 1, "there is no such method sheet", "method-missing", ""));
     }
 
     private static String faults(Texts texts) {

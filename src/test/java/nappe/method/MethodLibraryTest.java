@@ -31,7 +31,8 @@ class MethodLibraryTest {
     @Test
     void whatHasARoleOrComesFromANeighbourIsNotAskedOfTheEngineer() {
         assertThat(LIBRARY.declared("trough")).extracting(Declared::symbol).containsExactly("size", "b", "h_g");
-        assertThat(LIBRARY.declared("trough")).extracting(Declared::kind)
+        assertThat(LIBRARY.declared("trough"))
+                .extracting(Declared::kind)
                 .containsExactly(Declared.Kind.CHOICE, Declared.Kind.ENTRY, Declared.Kind.CASE);
         assertThat(LIBRARY.declared("trough")).extracting(Declared::optional).containsExactly(false, false, true);
         assertThat(LIBRARY.declared("trough").get(0).words()).containsExactly("small", "large");

@@ -65,29 +65,49 @@ class MethodReaderTest {
         assertThat(TROUGH.about()).containsExactly("One paragraph; with a semicolon, over two lines.", "Another.");
         assertThat(TROUGH.cautions()).containsExactly("Never build it.");
         assertThat(TROUGH.sources())
-                .containsExactly(new Publication("INV", "An invented book", false), new Publication("RUM", "A rumour", true));
+                .containsExactly(
+                        new Publication("INV", "An invented book", false), new Publication("RUM", "A rumour", true));
     }
 
     @Test
     void aChoiceHasTheWordsOfTheFirstColumn() {
-        assertThat(TROUGH.item("size")).isEqualTo(new Item.Given(Item.From.CHOICE, "size", Unit.one(), "nominal size",
-                Sign.POSITIVE, false, "", List.of("small", "large"), "pretend-sizes"));
+        assertThat(TROUGH.item("size"))
+                .isEqualTo(new Item.Given(
+                        Item.From.CHOICE,
+                        "size",
+                        Unit.one(),
+                        "nominal size",
+                        Sign.POSITIVE,
+                        false,
+                        "",
+                        List.of("small", "large"),
+                        "pretend-sizes"));
     }
 
     @Test
     void whatIsGivenHasItsSignAndMayBeOptional() {
         assertThat(TROUGH.item("b")).isEqualTo(given(Item.From.ENTRY, "b", "m", "width", Sign.POSITIVE, false, ""));
-        assertThat(TROUGH.item("z_f")).isEqualTo(given(Item.From.ENTRY, "z_f", "m", "level of the floor", Sign.ANY, false, ""));
+        assertThat(TROUGH.item("z_f"))
+                .isEqualTo(given(Item.From.ENTRY, "z_f", "m", "level of the floor", Sign.ANY, false, ""));
         assertThat(TROUGH.item("d_p"))
                 .isEqualTo(given(Item.From.ENTRY, "d_p", "mm", "a pretend depth", Sign.NOT_NEGATIVE, true, ""));
-        assertThat(TROUGH.item("h_g")).isEqualTo(given(Item.From.CASE, "h_g", "m", "head read", Sign.POSITIVE, true, ""));
+        assertThat(TROUGH.item("h_g"))
+                .isEqualTo(given(Item.From.CASE, "h_g", "m", "head read", Sign.POSITIVE, true, ""));
     }
 
     @Test
     void aRoleSaysWhatASymbolIsToTheStation() {
-        assertThat(TROUGH.item("Q")).isEqualTo(given(Item.From.CASE, "Q", "m3/s", "flow", Sign.NOT_NEGATIVE, false, "flow"));
-        assertThat(TROUGH.item("z_t")).isEqualTo(
-                given(Item.From.NEIGHBOUR, "z_t", "m", "water level downstream", Sign.POSITIVE, false, "water level"));
+        assertThat(TROUGH.item("Q"))
+                .isEqualTo(given(Item.From.CASE, "Q", "m3/s", "flow", Sign.NOT_NEGATIVE, false, "flow"));
+        assertThat(TROUGH.item("z_t"))
+                .isEqualTo(given(
+                        Item.From.NEIGHBOUR,
+                        "z_t",
+                        "m",
+                        "water level downstream",
+                        Sign.POSITIVE,
+                        false,
+                        "water level"));
         assertThat(TROUGH.gives()).isEqualTo(Map.of("water level", "z_u"));
     }
 
@@ -103,8 +123,9 @@ class MethodReaderTest {
     void aTableByAWordIsARowAndALookUpPerColumn() {
         assertThat(formula("i_T1")).isEqualTo("match(size, pretend-sizes.size)");
         assertThat(formula("C")).isEqualTo("index(pretend-sizes.C, i_T1)");
-        assertThat(formula("d_T")).isEqualTo(
-                "if(is_number(index(pretend-sizes.d, i_T1)), index(pretend-sizes.d, i_T1)*1 mm, none(\"not given\"))");
+        assertThat(formula("d_T"))
+                .isEqualTo(
+                        "if(is_number(index(pretend-sizes.d, i_T1)), index(pretend-sizes.d, i_T1)*1 mm, none(\"not given\"))");
         assertThat(line("C").source()).isEqualTo("INV p. 5 (from memory)");
         assertThat(line("d_T").mayBeBlank()).isTrue();
         assertThat(line("C").mayBeBlank()).isFalse();
@@ -117,14 +138,18 @@ class MethodReaderTest {
         assertThat(formula("i_T2")).isEqualTo("min(match_below(x_T2, pretend-curve.r), 2)");
         assertThat(formula("d_T2")).isEqualTo("index(pretend-curve.r, i_T2 + 1) - index(pretend-curve.r, i_T2)");
         assertThat(formula("t_T2")).isEqualTo("(x_T2 - index(pretend-curve.r, i_T2))/d_T2");
-        assertThat(formula("c")).isEqualTo(
-                "index(pretend-curve.c, i_T2) + t_T2*(index(pretend-curve.c, i_T2 + 1) - index(pretend-curve.c, i_T2))");
+        assertThat(formula("c"))
+                .isEqualTo(
+                        "index(pretend-curve.c, i_T2) + t_T2*(index(pretend-curve.c, i_T2 + 1) - index(pretend-curve.c, i_T2))");
     }
 
     @Test
     void aTableBetweenNumbersBringsTheLimitsOfItsEnds() {
-        assertThat(TROUGH.limits().subList(0, 2)).extracting(Limit::label).containsExactly(
-                "width is within the table, lower end: Pretend table", "width is within the table, upper end: Pretend table");
+        assertThat(TROUGH.limits().subList(0, 2))
+                .extracting(Limit::label)
+                .containsExactly(
+                        "width is within the table, lower end: Pretend table",
+                        "width is within the table, upper end: Pretend table");
     }
 
     @Test
@@ -172,8 +197,14 @@ class MethodReaderTest {
     @Test
     void aRatingGoesInStepsOverAFreeSymbol() {
         Rating rating = TROUGH.ratings().get(0);
-        assertThat(rating).isEqualTo(new Rating("h", FormulaParser.parse("0.02 m"), FormulaParser.parse("5*b"), 4,
-                List.of("q"), List.of(TROUGH.item("q"))));
+        assertThat(rating)
+                .isEqualTo(new Rating(
+                        "h",
+                        FormulaParser.parse("0.02 m"),
+                        FormulaParser.parse("5*b"),
+                        4,
+                        List.of("q"),
+                        List.of(TROUGH.item("q"))));
     }
 
     @Test
@@ -190,7 +221,9 @@ class MethodReaderTest {
 
     @Test
     void aSymbolReachesAllItRestsOnLessWhatIsBound() {
-        assertThat(TROUGH.reach().get("z_u")).contains("z_f", "h_1", "Q", "C", "size", "b", "g").doesNotContain("h", "q");
+        assertThat(TROUGH.reach().get("z_u"))
+                .contains("z_f", "h_1", "Q", "C", "size", "b", "g")
+                .doesNotContain("h", "q");
         assertThat(TROUGH.reach().get("q")).contains("h", "b");
     }
 
@@ -202,14 +235,17 @@ class MethodReaderTest {
     @Test
     void semicolonsAndHashesInQuotesBelongToTheWords() {
         MethodSheet sheet = read("line s = if(1 < 2, \"a; b # c\", \"d\") ; words ; with words\n");
-        assertThat(PlainReading.of(((Item.Line) sheet.item("s")).formula())).isEqualTo("if(1 < 2, \"a; b # c\", \"d\")");
+        assertThat(PlainReading.of(((Item.Line) sheet.item("s")).formula()))
+                .isEqualTo("if(1 < 2, \"a; b # c\", \"d\")");
     }
 
     @Test
     void aTextIsIncludedWithWhatItRequires() {
         MethodSheet sheet = new MethodReader(new Texts()
                         .method("part", "requires D ; m ; diameter\nline A_0 = D^2 ; m2 ; area\n")
-                        .method("pretend", "method Pretend\nentry D ; m ; diameter\ninclude part\nline B = 2*A_0 ; m2 ; twice\n"))
+                        .method(
+                                "pretend",
+                                "method Pretend\nentry D ; m ; diameter\ninclude part\nline B = 2*A_0 ; m2 ; twice\n"))
                 .read("pretend");
         assertThat(sheet.items()).extracting(item -> item.outputs().get(0)).containsExactly("D", "A_0", "B");
         assertThat(sheet.text()).contains("requires D");

@@ -33,7 +33,8 @@ class AgreementTest {
     @ValueSource(strings = {"headworks.xlsx", "return-weir.xlsx"})
     void everyStoredValueIsWhatJavaComputed(String name) throws IOException {
         Package sample = Package.ofSample(name);
-        assertThat(Recalculated.disagreements(issued(sample), sample.results(), 0)).isEmpty();
+        assertThat(Recalculated.disagreements(issued(sample), sample.results(), 0))
+                .isEmpty();
     }
 
     @ParameterizedTest
@@ -54,7 +55,9 @@ class AgreementTest {
         Package sample = Package.ofSample("return-weir.xlsx");
         Comparison comparison = Comparison.of(
                 Recalculated.asStored(file(Spoiler.spoil(sample.workbook()))), issued(sample), sample.results());
-        long live = sample.results().cells().stream().filter(c -> c.kind() == Cell.Kind.FORMULA).count();
+        long live = sample.results().cells().stream()
+                .filter(c -> c.kind() == Cell.Kind.FORMULA)
+                .count();
         assertThat(comparison.faults()).hasSizeGreaterThanOrEqualTo((int) live);
     }
 
@@ -63,9 +66,11 @@ class AgreementTest {
         Package sample = Package.ofSample("headworks.xlsx");
         double published = number(sample, lineOf(sample, "C"));
         Cell cited = inTables(sample, "3 ft", published);
-        Path changed = file(new Edited(sample.workbook()).type(cited.place(), published * (1 + 1e-6)).bytes());
-        List<String> faults =
-                Comparison.of(Recalculated.byLibreOffice(changed), issued(sample), sample.results()).faults();
+        Path changed = file(new Edited(sample.workbook())
+                .type(cited.place(), published * (1 + 1e-6))
+                .bytes());
+        List<String> faults = Comparison.of(Recalculated.byLibreOffice(changed), issued(sample), sample.results())
+                .faults();
         assertThat(faults).hasSizeGreaterThan(20).anyMatch(fault -> fault.startsWith("F1 rating!"));
     }
 

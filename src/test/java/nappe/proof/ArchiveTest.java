@@ -82,11 +82,13 @@ class ArchiveTest {
     @MethodSource("both")
     void theAttachmentIsTheIssuedWorkbook(Issued issued) throws IOException {
         try (PdfReader reader = new PdfReader(Files.readAllBytes(issued.pdf()))) {
-            PdfDictionary file = reader.getCatalog().getAsArray(new PdfName("AF")).getAsDict(0);
+            PdfDictionary file =
+                    reader.getCatalog().getAsArray(new PdfName("AF")).getAsDict(0);
             assertThat(file.getAsString(PdfName.UF).toUnicodeString())
                     .isEqualTo(issued.workbook().getFileName().toString());
             assertThat(file.getAsName(new PdfName("AFRelationship"))).hasToString("/Data");
-            PRStream stream = (PRStream) Objects.requireNonNull(file.getAsDict(PdfName.EF)).getAsStream(PdfName.F);
+            PRStream stream = (PRStream)
+                    Objects.requireNonNull(file.getAsDict(PdfName.EF)).getAsStream(PdfName.F);
             assertThat(PdfReader.getStreamBytes(stream)).isEqualTo(Files.readAllBytes(issued.workbook()));
             assertThat(stream.getAsDict(PdfName.PARAMS).getAsString(PdfName.MODDATE))
                     .hasToString(reader.getInfo().get("ModDate"));

@@ -16,14 +16,23 @@ class ChartPrintTest {
     Path folder;
 
     private Path book() throws IOException {
-        return Files.write(folder.resolve("book.xlsx"), Package.ofSample("return-weir.xlsx").workbook());
+        return Files.write(
+                folder.resolve("book.xlsx"),
+                Package.ofSample("return-weir.xlsx").workbook());
     }
 
     @Test
     void libreOfficePrintsTheChart() throws IOException {
         Tools.require("soffice", "LibreOffice");
-        Tools.run("soffice", "-env:UserInstallation=" + folder.resolve("profile").toUri(), "--headless",
-                "--convert-to", "pdf", "--outdir", folder.toString(), book().toString());
+        Tools.run(
+                "soffice",
+                "-env:UserInstallation=" + folder.resolve("profile").toUri(),
+                "--headless",
+                "--convert-to",
+                "pdf",
+                "--outdir",
+                folder.toString(),
+                book().toString());
         printed(pages(folder.resolve("book.pdf")));
     }
 
@@ -37,7 +46,9 @@ class ChartPrintTest {
 
     /** The axes' titles and the words of the legend stand on one page. */
     private static void printed(List<String> pages) {
-        assertThat(pages).filteredOn(page -> page.contains("flow [m3/s]") && page.contains("flow cases")).hasSize(1);
+        assertThat(pages)
+                .filteredOn(page -> page.contains("flow [m3/s]") && page.contains("flow cases"))
+                .hasSize(1);
     }
 
     private List<String> pages(Path pdf) throws IOException {

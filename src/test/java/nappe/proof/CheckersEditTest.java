@@ -61,8 +61,15 @@ class CheckersEditTest {
         flume("head read taken out, in words", new Head(1, "F1", "not given"));
         flume("head read beyond the rating", new Head(1, "F1", 40));
         flume("demand no longer met", new Demand(0, 413.0));
-        flume("many at once", new Entry("F1", "size", "2.4 m"), new Entry("F1", "z_f", 413.3), new Flow(3, 17), new Level(6, 416),
-                new Head(0, "F1", 0.2), new Head(1, "F1", 9), new Demand(1, 5));
+        flume(
+                "many at once",
+                new Entry("F1", "size", "2.4 m"),
+                new Entry("F1", "z_f", 413.3),
+                new Flow(3, 17),
+                new Level(6, 416),
+                new Head(0, "F1", 0.2),
+                new Head(1, "F1", 9),
+                new Demand(1, 5));
 
         weir("notch wider", new Entry("W1", "b", 850));
         weir("notch as wide as the channel", new Entry("W1", "b", 1100));
@@ -85,8 +92,15 @@ class CheckersEditTest {
         weir("tailwater just where the nappe is no longer free", new Level(2, 18.19));
         weir("head read where none was given", new Head(0, "W1", 0.05));
         weir("head read taken out, in words", new Head(2, "W1", "not given"));
-        weir("many at once", new Entry("W1", "b", 400), new Entry("W1", "B", 0.7), new Entry("W1", "p", 0.3), new Entry("W1", "z_c", 18.3),
-                new Flow(4, 300), new Level(1, 18.29), new Head(3, "W1", 0.33));
+        weir(
+                "many at once",
+                new Entry("W1", "b", 400),
+                new Entry("W1", "B", 0.7),
+                new Entry("W1", "p", 0.3),
+                new Entry("W1", "z_c", 18.3),
+                new Flow(4, 300),
+                new Level(1, 18.29),
+                new Head(3, "W1", 0.33));
     }
 
     private Path file(byte[] workbook) throws IOException {
@@ -109,7 +123,9 @@ class CheckersEditTest {
 
     private static List<Typing> inJava(List<Typing> typings) {
         return typings.stream()
-                .map(t -> t instanceof Head head && "not given".equals(head.content()) ? new Head(head.of(), head.tag(), null) : t)
+                .map(t -> t instanceof Head head && "not given".equals(head.content())
+                        ? new Head(head.of(), head.tag(), null)
+                        : t)
                 .toList();
     }
 
@@ -158,8 +174,12 @@ class CheckersEditTest {
         Map<String, Object> expected = new LinkedHashMap<>(Recalculated.asStored(file(anew.workbook())));
         assertThat(expected.remove(emptied)).isEqualTo("not given");
         Path file = typed(issued, List.of(deleted));
-        assertThat(Comparison.of(Recalculated.byLibreOffice(file), expected, anew.results()).faults()).isEmpty();
-        assertThat(Comparison.of(Recalculated.byGnumeric(file), expected, anew.results()).faults()).isEmpty();
+        assertThat(Comparison.of(Recalculated.byLibreOffice(file), expected, anew.results())
+                        .faults())
+                .isEmpty();
+        assertThat(Comparison.of(Recalculated.byGnumeric(file), expected, anew.results())
+                        .faults())
+                .isEmpty();
     }
 
     /** What may be typed over in the issued workbook is what these edits type over: numbers and choices. */
@@ -178,7 +198,8 @@ class CheckersEditTest {
         Map<String, Object> values =
                 Recalculated.byLibreOffice(typed(issued, List.of(new Entry("F1", "size", "11 ft"))));
         assertThat(issued.results().cells().stream()
-                        .filter(c -> c.kind() == Cell.Kind.FORMULA && List.of("h_f", "h_a", "z_u", "Q_h", "Q_min").contains(c.symbol())
+                        .filter(c -> c.kind() == Cell.Kind.FORMULA
+                                && List.of("h_f", "h_a", "z_u", "Q_h", "Q_min").contains(c.symbol())
                                 && !c.place().sheet().equals("Entries"))
                         .map(c -> values.get(c.place().sheet() + "!" + c.place().address())))
                 .hasSizeGreaterThan(20)

@@ -26,9 +26,14 @@ final class Edited {
             for (ZipEntry entry = in.getNextEntry(); entry != null; entry = in.getNextEntry()) {
                 parts.put(entry.getName(), in.readAllBytes());
             }
-            book.sheetIterator().forEachRemaining(sheet -> partOfSheet.put(
-                    sheet.getSheetName(),
-                    book.getSheet(sheet.getSheetName()).getPackagePart().getPartName().getName().substring(1)));
+            book.sheetIterator()
+                    .forEachRemaining(sheet -> partOfSheet.put(
+                            sheet.getSheetName(),
+                            book.getSheet(sheet.getSheetName())
+                                    .getPackagePart()
+                                    .getPartName()
+                                    .getName()
+                                    .substring(1)));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
@@ -45,7 +50,9 @@ final class Edited {
         }
         String content = value == null
                 ? "/>"
-                : value instanceof Number ? "><v>" + value + "</v></c>" : " t=\"inlineStr\"><is><t>" + value + "</t></is></c>";
+                : value instanceof Number
+                        ? "><v>" + value + "</v></c>"
+                        : " t=\"inlineStr\"><is><t>" + value + "</t></is></c>";
         String changed = part.substring(0, cell.start()) + "<c r=\"" + place.address() + "\"" + cell.group(1) + content
                 + part.substring(cell.end());
         parts.put(name, changed.getBytes(StandardCharsets.UTF_8));

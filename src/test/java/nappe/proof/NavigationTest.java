@@ -84,7 +84,8 @@ class NavigationTest {
                 String title = bookmark.get("Title").toString().replaceFirst("^\\d+ ", "");
                 assertThat(solid(pages.get(page(bookmark) - 1))).contains(solid(title));
                 assertThat(Double.parseDouble(bookmark.get("Page").toString().split(" ")[3]))
-                        .isBetween(0.0, (double) reader.getPageSize(page(bookmark)).getHeight());
+                        .isBetween(
+                                0.0, (double) reader.getPageSize(page(bookmark)).getHeight());
             }
         }
     }

@@ -37,7 +37,9 @@ class OpenXmlSchemaTest {
         List<String> said = validated(Package.ofSample(name).workbook());
         assertThat(said).filteredOn(line -> line.startsWith("fault")).isEmpty();
         assertThat(said).contains("checked xl/charts/chart1.xml", "checked xl/workbook.xml", "checked xl/styles.xml");
-        assertThat(said).filteredOn(line -> line.startsWith("checked xl/worksheets/")).hasSizeGreaterThan(12);
+        assertThat(said)
+                .filteredOn(line -> line.startsWith("checked xl/worksheets/"))
+                .hasSizeGreaterThan(12);
     }
 
     @Test
@@ -45,7 +47,8 @@ class OpenXmlSchemaTest {
         byte[] workbook = Package.ofSample("return-weir.xlsx").workbook();
         assertThat(validated(changed(workbook, "xl/worksheets/sheet3.xml", "</f><v>", "</f>><v>")))
                 .anyMatch(line -> line.startsWith("fault in xl/worksheets/sheet3.xml"));
-        assertThat(validated(changed(workbook, "xl/charts/chart1.xml", "<c:legendPos val=\"b\"/>", "<c:legendPos val=\"foot\"/>")))
+        assertThat(validated(changed(
+                        workbook, "xl/charts/chart1.xml", "<c:legendPos val=\"b\"/>", "<c:legendPos val=\"foot\"/>")))
                 .anyMatch(line -> line.startsWith("fault in xl/charts/chart1.xml"));
     }
 
@@ -62,7 +65,8 @@ class OpenXmlSchemaTest {
                         "-XX:+UseSerialGC",
                         "-cp",
                         jars,
-                        Path.of("src", "test", "validators", "ValidateOpenXml.java").toString(),
+                        Path.of("src", "test", "validators", "ValidateOpenXml.java")
+                                .toString(),
                         book.toString())
                 .redirectErrorStream(true)
                 .redirectOutput(said.toFile())

@@ -98,8 +98,10 @@ class PackageTest {
         Package sample = Package.ofSample(name);
         Set<String> typed = new LinkedHashSet<>();
         Set<String> live = new LinkedHashSet<>();
-        sample.results().cells().forEach(cell -> (cell.kind() == Cell.Kind.FORMULA ? live : typed)
-                .add(cell.place().sheet() + "!" + cell.place().address()));
+        sample.results()
+                .cells()
+                .forEach(cell -> (cell.kind() == Cell.Kind.FORMULA ? live : typed)
+                        .add(cell.place().sheet() + "!" + cell.place().address()));
         try (XSSFWorkbook book = open(sample)) {
             assertThat(formulas(book).keySet()).containsAll(live);
             book.forEach(sheet -> sheet.forEach(row -> row.forEach(cell -> {
@@ -120,14 +122,17 @@ class PackageTest {
             for (int i = 0; i < book.getNumberOfSheets(); i++) {
                 XSSFSheet sheet = book.getSheetAt(i);
                 assertThat(book.getSheetVisibility(i)).isEqualTo(SheetVisibility.VISIBLE);
-                sheet.forEach(row -> assertThat(row.getZeroHeight() || row.getHeightInPoints() < 3).isFalse());
+                sheet.forEach(row -> assertThat(row.getZeroHeight() || row.getHeightInPoints() < 3)
+                        .isFalse());
                 for (int column = 0; column < 60; column++) {
-                    assertThat(sheet.isColumnHidden(column) || sheet.getColumnWidth(column) < 256).isFalse();
+                    assertThat(sheet.isColumnHidden(column) || sheet.getColumnWidth(column) < 256)
+                            .isFalse();
                 }
             }
             assertThat(book.getAllNames()).noneMatch(one -> one.isHidden() || one.isFunctionName());
         }
-        assertThat(parts(sample.workbook()).values()).noneMatch(part -> part.contains("hidden=\"1\"") || part.contains("eryHidden"));
+        assertThat(parts(sample.workbook()).values())
+                .noneMatch(part -> part.contains("hidden=\"1\"") || part.contains("eryHidden"));
     }
 
     @ParameterizedTest
@@ -136,15 +141,18 @@ class PackageTest {
         Package sample = Package.ofSample(name);
         Map<String, String> parts = parts(sample.workbook());
         assertThat(parts.keySet())
-                .noneMatch(part -> part.matches("(?i).*(vba|macro|externalLink|activeX|embedding|connections|queryTable).*"));
+                .noneMatch(part ->
+                        part.matches("(?i).*(vba|macro|externalLink|activeX|embedding|connections|queryTable).*"));
         assertThat(parts.get("[Content_Types].xml")).doesNotContainIgnoringCase("macro");
         assertThat(parts.values()).noneMatch(part -> part.contains("TargetMode=\"External\""));
         try (XSSFWorkbook book = open(sample)) {
             assertThat(book.isMacroEnabled()).isFalse();
-            assertThat(formulas(book).values()).isNotEmpty().allSatisfy(formula -> assertThat(
-                            TEXT.matcher(formula).replaceAll(""))
-                    .doesNotContainPattern("\\b(NOW|TODAY|RAND|RANDBETWEEN|OFFSET|INDIRECT|CELL|INFO|EVALUATE|CALL|HYPERLINK|WEBSERVICE)\\(")
-                    .doesNotContain("[", "{", "_xl"));
+            assertThat(formulas(book).values())
+                    .isNotEmpty()
+                    .allSatisfy(formula -> assertThat(TEXT.matcher(formula).replaceAll(""))
+                            .doesNotContainPattern(
+                                    "\\b(NOW|TODAY|RAND|RANDBETWEEN|OFFSET|INDIRECT|CELL|INFO|EVALUATE|CALL|HYPERLINK|WEBSERVICE)\\(")
+                            .doesNotContain("[", "{", "_xl"));
             assertThat(parts.get("xl/workbook.xml")).contains("iterate=\"false\"");
         }
     }
@@ -159,21 +167,29 @@ class PackageTest {
             Map<String, List<String>> neededBy = new HashMap<>();
             formulas.forEach((cell, formula) -> {
                 List<String> referred = referred(cell, formula);
-                needs.put(cell, referred.stream().filter(formulas::containsKey).distinct().toList());
+                needs.put(
+                        cell,
+                        referred.stream()
+                                .filter(formulas::containsKey)
+                                .distinct()
+                                .toList());
                 for (String one : referred) {
                     String sheet = one.substring(0, one.indexOf('!'));
                     var at = new org.apache.poi.ss.util.CellReference(one.substring(one.indexOf('!') + 1));
                     var row = book.getSheet(sheet).getRow(at.getRow());
-                    assertThat(row == null || row.getCell(at.getCol()) == null
+                    assertThat(row == null
+                                    || row.getCell(at.getCol()) == null
                                     || row.getCell(at.getCol()).getCellType() == CellType.BLANK)
                             .as(cell + " =" + formula + " refers to the empty " + one)
                             .isFalse();
                 }
             });
-            needs.forEach((cell, all) -> all.forEach(one -> neededBy.computeIfAbsent(one, key -> new ArrayList<>()).add(cell)));
+            needs.forEach((cell, all) -> all.forEach(one ->
+                    neededBy.computeIfAbsent(one, key -> new ArrayList<>()).add(cell)));
             Map<String, Integer> open = new HashMap<>();
             needs.forEach((cell, all) -> open.put(cell, all.size()));
-            Deque<String> ready = new ArrayDeque<>(open.keySet().stream().filter(c -> open.get(c) == 0).toList());
+            Deque<String> ready = new ArrayDeque<>(
+                    open.keySet().stream().filter(c -> open.get(c) == 0).toList());
             int done = 0;
             while (!ready.isEmpty()) {
                 done++;
@@ -183,7 +199,9 @@ class PackageTest {
                     }
                 }
             }
-            assertThat(done).as("formulas that can be computed one after another").isEqualTo(formulas.size());
+            assertThat(done)
+                    .as("formulas that can be computed one after another")
+                    .isEqualTo(formulas.size());
         }
     }
 
@@ -200,12 +218,18 @@ class PackageTest {
                     for (Block.Line line : all.lines()) {
                         Cell cell = line.forAll() != null
                                 ? line.forAll()
-                                : line.perCase().isEmpty() ? null : line.perCase().get(all.workedCase());
+                                : line.perCase().isEmpty()
+                                        ? null
+                                        : line.perCase().get(all.workedCase());
                         if (cell != null) {
                             lines++;
                             String text = PdfPages.ofLine(printed, line.code());
                             require(missing, text, line.code(), print(sample, cell));
-                            require(missing, text, line.code(), "cell " + cell.place().address());
+                            require(
+                                    missing,
+                                    text,
+                                    line.code(),
+                                    "cell " + cell.place().address());
                         }
                     }
                 }
@@ -229,11 +253,13 @@ class PackageTest {
                         line.perCase().forEach(cell -> require(missing, text, line.code(), print(sample, cell)));
                     }
                 } else if (block instanceof Block.Table table) {
-                    table.rows().forEach(row -> row.items().forEach(item -> {
-                        if (item instanceof Block.Content content && sample.results().value(content.cell()) instanceof Value.Number) {
-                            require(missing, printed, content.cell().toString(), print(sample, content.cell()));
-                        }
-                    }));
+                    table.rows()
+                            .forEach(row -> row.items().forEach(item -> {
+                                if (item instanceof Block.Content content
+                                        && sample.results().value(content.cell()) instanceof Value.Number) {
+                                    require(missing, printed, content.cell().toString(), print(sample, content.cell()));
+                                }
+                            }));
                 }
             }
         }
@@ -252,7 +278,11 @@ class PackageTest {
 
     /** Long words run on to the next line beside other columns, so only the first of them is one piece. */
     private static void require(List<String> missing, String text, String what, String printed) {
-        if (!PdfPages.holds(text, printed.length() < 20 || printed.indexOf(' ') < 0 ? printed : printed.substring(0, printed.indexOf(' ')))) {
+        if (!PdfPages.holds(
+                text,
+                printed.length() < 20 || printed.indexOf(' ') < 0
+                        ? printed
+                        : printed.substring(0, printed.indexOf(' ')))) {
             missing.add(what + ": " + printed);
         }
     }
@@ -272,13 +302,20 @@ class PackageTest {
                 String head = there.getRow(0).getCell(0).getStringCellValue();
                 assertThat(head).isEqualTo("Sheet " + sheet.number() + " of " + count + "   " + sheet.title());
                 assertThat(there.getRow(1).getCell(0).getStringCellValue())
-                        .contains("Calculation " + sample, "Revision " + sample.results().furniture().revision());
+                        .contains(
+                                "Calculation " + sample,
+                                "Revision " + sample.results().furniture().revision());
                 assertThat(there.getRow(2).getCell(0).getStringCellValue()).contains(fingerprint);
-                assertThat(there.getFooter().getLeft() + there.getFooter().getCenter() + there.getFooter().getRight())
+                assertThat(there.getFooter().getLeft()
+                                + there.getFooter().getCenter()
+                                + there.getFooter().getRight())
                         .contains(fingerprint);
                 String printed = pages.ofSheet(sheet.number());
-                assertThat(PdfPages.holds(printed, "Sheet " + sheet.number() + " of " + count)).as(head).isTrue();
-                assertThat(printed.replaceAll("\\s+", " ")).contains(sheet.title().replaceAll("\\s+", " "));
+                assertThat(PdfPages.holds(printed, "Sheet " + sheet.number() + " of " + count))
+                        .as(head)
+                        .isTrue();
+                assertThat(printed.replaceAll("\\s+", " "))
+                        .contains(sheet.title().replaceAll("\\s+", " "));
             }
         }
     }
@@ -293,12 +330,18 @@ class PackageTest {
         for (String text : pages) {
             page++;
             String flat = text.replaceAll("\\s+", " ");
-            assertThat(flat).contains("page " + page + " of " + pages.size(), sample.toString(),
-                    sample.results().furniture().status(), sample.results().furniture().fingerprint());
+            assertThat(flat)
+                    .contains(
+                            "page " + page + " of " + pages.size(),
+                            sample.toString(),
+                            sample.results().furniture().status(),
+                            sample.results().furniture().fingerprint());
             assertThat(PdfPages.sheetOf(text)).endsWith(" of " + count);
             // a caution that runs on stands in the left of two columns, so only its beginning is one piece
-            sample.results().furniture().cautions().forEach(caution ->
-                    assertThat(flat).as("page " + flat).contains(caution.substring(0, 60)));
+            sample.results()
+                    .furniture()
+                    .cautions()
+                    .forEach(caution -> assertThat(flat).as("page " + flat).contains(caution.substring(0, 60)));
         }
     }
 
@@ -316,7 +359,11 @@ class PackageTest {
         texts.addAll(pdf(sample).all());
         sample.ratings().values().forEach(table -> texts.add(RatingCsv.write(sample.results(), table)));
         for (String text : texts) {
-            assertThat(wrong.matcher(text).results().map(m -> around(text, m.start())).toList()).isEmpty();
+            assertThat(wrong.matcher(text)
+                            .results()
+                            .map(m -> around(text, m.start()))
+                            .toList())
+                    .isEmpty();
         }
     }
 

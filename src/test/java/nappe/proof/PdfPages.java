@@ -26,7 +26,10 @@ final class PdfPages {
         Path file = Files.write(Files.createTempFile(folder, "package", ".pdf"), pdf);
         Path text = folder.resolve("package.txt");
         Tools.run("pdftotext", "-layout", "-enc", "UTF-8", file.toString(), text.toString());
-        String all = Files.readString(text).replace('\u2212', '-').replace('\u00a0', ' ').replace('\u2009', ' ');
+        String all = Files.readString(text)
+                .replace('\u2212', '-')
+                .replace('\u00a0', ' ')
+                .replace('\u2009', ' ');
         List<String> pages = new ArrayList<>(Arrays.asList(all.split("\f")));
         return new PdfPages(pages);
     }
@@ -43,7 +46,11 @@ final class PdfPages {
 
     /** The pages of one sheet, one after another. */
     String ofSheet(int number) {
-        return String.join("\n", pages.stream().filter(page -> sheetOf(page).startsWith(number + " of ")).toList());
+        return String.join(
+                "\n",
+                pages.stream()
+                        .filter(page -> sheetOf(page).startsWith(number + " of "))
+                        .toList());
     }
 
     /** All that stands between a line's code and the next code, wherever the line is printed on its sheet. */

@@ -50,22 +50,39 @@ class PrintedWorkbookTest {
     }
 
     private static Sheet sheet(Package sample, String name) {
-        return sample.results().sheets().stream().filter(s -> s.name().equals(name)).findFirst().orElseThrow();
+        return sample.results().sheets().stream()
+                .filter(s -> s.name().equals(name))
+                .findFirst()
+                .orElseThrow();
     }
 
     @ParameterizedTest
-    @CsvSource({"headworks.xlsx, F1 rating, flow [ft3/s], head [ft]", "return-weir.xlsx, W1 rating, flow [m3/s], head [m]"})
-    void chartRefersToTheCellsAndShowsWhatWasComputed(String name, String sheet, String across, String up) throws IOException {
+    @CsvSource({
+        "headworks.xlsx, F1 rating, flow [ft3/s], head [ft]",
+        "return-weir.xlsx, W1 rating, flow [m3/s], head [m]"
+    })
+    void chartRefersToTheCellsAndShowsWhatWasComputed(String name, String sheet, String across, String up)
+            throws IOException {
         Package sample = Package.ofSample(name);
         Block.Chart laid = laid(sample, sheet);
         assertThat(List.of(laid.across(), laid.up())).containsExactly(across, up);
         try (XSSFWorkbook book = open(sample)) {
             XSSFChart chart = chart(book, sheet);
-            List<CTScatterSer> drawn = chart.getCTChart().getPlotArea().getScatterChartList().get(0).getSerList();
+            List<CTScatterSer> drawn = chart.getCTChart()
+                    .getPlotArea()
+                    .getScatterChartList()
+                    .get(0)
+                    .getSerList();
             assertThat(drawn).hasSize(2).hasSameSizeAs(laid.series());
             for (int i = 0; i < drawn.size(); i++) {
-                holds(sample, drawn.get(i).getXVal().getNumRef(), laid.series().get(i).across());
-                holds(sample, drawn.get(i).getYVal().getNumRef(), laid.series().get(i).up());
+                holds(
+                        sample,
+                        drawn.get(i).getXVal().getNumRef(),
+                        laid.series().get(i).across());
+                holds(
+                        sample,
+                        drawn.get(i).getYVal().getNumRef(),
+                        laid.series().get(i).up());
             }
             String xml = chart.getCTChart().xmlText();
             assertThat(xml).contains(across, up, "sourceLinked=\"false\"").doesNotContain("#N/A");
@@ -74,7 +91,10 @@ class PrintedWorkbookTest {
 
     private static void holds(Package sample, CTNumRef drawn, Run run) {
         assertThat(drawn.getF()).isEqualTo(run.fixedFrom(""));
-        List<Double> stored = drawn.getNumCache().getPtList().stream().map(CTNumVal::getV).map(Double::valueOf).toList();
+        List<Double> stored = drawn.getNumCache().getPtList().stream()
+                .map(CTNumVal::getV)
+                .map(Double::valueOf)
+                .toList();
         List<Double> computed = run.cells().stream()
                 .map(cell -> ((Value.Number) sample.results().value(cell)).value())
                 .toList();
@@ -128,14 +148,21 @@ class PrintedWorkbookTest {
             assertThat(check.getSuppressDropDownArrow()).isTrue();
             String range = check.getValidationConstraint().getFormula1();
             List<String> words = sample.results().cells().stream()
-                    .filter(cell -> cell.kind() == Cell.Kind.TABLE && cell.place().sheet().equals("Tables")
-                            && cell.place().column() == 0 && cell.typed() instanceof Value.Word)
+                    .filter(cell -> cell.kind() == Cell.Kind.TABLE
+                            && cell.place().sheet().equals("Tables")
+                            && cell.place().column() == 0
+                            && cell.typed() instanceof Value.Word)
                     .filter(cell -> within(range, cell.place()))
                     .map(cell -> ((Value.Word) cell.typed()).text())
                     .toList();
-            assertThat(words).hasSizeGreaterThan(30).contains("1 in", "3 ft", "50 ft", "0.9 m").doesNotHaveDuplicates();
-            assertThat(range).startsWith("'Tables'!$A$").isEqualTo("'Tables'!$A$" + range.replaceAll(".*\\$A\\$(\\d+):.*", "$1")
-                    + ":$A$" + (Integer.parseInt(range.replaceAll(".*\\$A\\$(\\d+):.*", "$1")) + words.size() - 1));
+            assertThat(words)
+                    .hasSizeGreaterThan(30)
+                    .contains("1 in", "3 ft", "50 ft", "0.9 m")
+                    .doesNotHaveDuplicates();
+            assertThat(range)
+                    .startsWith("'Tables'!$A$")
+                    .isEqualTo("'Tables'!$A$" + range.replaceAll(".*\\$A\\$(\\d+):.*", "$1") + ":$A$"
+                            + (Integer.parseInt(range.replaceAll(".*\\$A\\$(\\d+):.*", "$1")) + words.size() - 1));
         }
     }
 
@@ -146,8 +173,13 @@ class PrintedWorkbookTest {
     }
 
     @ParameterizedTest
-    @CsvSource({"headworks.xlsx, z_f, BETWEEN", "return-weir.xlsx, b, GREATER_THAN", "return-weir.xlsx, z_c, BETWEEN",
-        "return-weir.xlsx, Q, GREATER_OR_EQUAL", "return-weir.xlsx, z, BETWEEN"})
+    @CsvSource({
+        "headworks.xlsx, z_f, BETWEEN",
+        "return-weir.xlsx, b, GREATER_THAN",
+        "return-weir.xlsx, z_c, BETWEEN",
+        "return-weir.xlsx, Q, GREATER_OR_EQUAL",
+        "return-weir.xlsx, z, BETWEEN"
+    })
     void aNumberIsTypedWithItsSign(String name, String symbol, String operator) throws Exception {
         Package sample = Package.ofSample(name);
         try (XSSFWorkbook book = open(sample)) {
@@ -198,14 +230,19 @@ class PrintedWorkbookTest {
                 XSSFSheet sheet = book.getSheetAt(i);
                 assertThat(fromIndex).contains("'" + sheet.getSheetName() + "'!A1");
                 if (!sheet.getSheetName().equals("Index")) {
-                    assertThat(sheet.getHyperlink(new CellAddress("A1")).getLocation()).isEqualTo("'Index'!A1");
+                    assertThat(sheet.getHyperlink(new CellAddress("A1")).getLocation())
+                            .isEqualTo("'Index'!A1");
                 }
                 for (String target : targets(sheet)) {
-                    assertThat(book.getSheet(target.replaceAll("^'(.*)'!.*$", "$1"))).as(target).isNotNull();
+                    assertThat(book.getSheet(target.replaceAll("^'(.*)'!.*$", "$1")))
+                            .as(target)
+                            .isNotNull();
                 }
             }
             String element = sample.design().elements().get(0).tag();
-            assertThat(targets(book.getSheet("Limits"))).filteredOn(to -> to.startsWith("'" + element + "'!")).hasSizeGreaterThan(5);
+            assertThat(targets(book.getSheet("Limits")))
+                    .filteredOn(to -> to.startsWith("'" + element + "'!"))
+                    .hasSizeGreaterThan(5);
             assertThat(targets(book.getSheet(element))).anyMatch(to -> to.startsWith("'Entries'!"));
             if (name.equals("return-weir.xlsx")) {
                 assertThat(targets(book.getSheet(element))).anyMatch(to -> to.startsWith("'Trials'!"));

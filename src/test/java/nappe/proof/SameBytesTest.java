@@ -28,14 +28,17 @@ class SameBytesTest {
     /** Issues in a Java of its own, and gives the bytes of the files by name. */
     private Map<String, byte[]> issued(String to, Path input, String... flags) throws IOException {
         Path output = folder.resolve(to);
-        List<String> command = new ArrayList<>(List.of(Path.of(System.getProperty("java.home"), "bin", "java").toString()));
+        List<String> command = new ArrayList<>(
+                List.of(Path.of(System.getProperty("java.home"), "bin", "java").toString()));
         command.addAll(Arrays.asList(flags));
-        command.addAll(List.of("-cp", classPath(), "nappe.cli.Nappe", "issue", input.toString(), "-o", output.toString()));
+        command.addAll(
+                List.of("-cp", classPath(), "nappe.cli.Nappe", "issue", input.toString(), "-o", output.toString()));
         Tools.run(command.toArray(String[]::new));
         Map<String, byte[]> files = new TreeMap<>();
         try (Stream<Path> all = Files.walk(output)) {
             for (Path file : all.filter(Files::isRegularFile).toList()) {
-                files.put(output.relativize(file).toString().replace(File.separatorChar, '/'), Files.readAllBytes(file));
+                files.put(
+                        output.relativize(file).toString().replace(File.separatorChar, '/'), Files.readAllBytes(file));
             }
         }
         return files;
@@ -49,9 +52,15 @@ class SameBytesTest {
     @ValueSource(strings = {"headworks.xlsx", "return-weir.xlsx"})
     void anotherLocaleZoneAndEncodingGiveTheSameBytes(String name) throws IOException {
         Path input = Package.INPUTS.resolve(name);
-        Map<String, byte[]> here = issued("here", input, "-Duser.language=en", "-Duser.country=US", "-Duser.timezone=UTC");
-        Map<String, byte[]> there = issued("there", input, "-Duser.language=tr", "-Duser.country=TR",
-                "-Duser.timezone=Asia/Tokyo", "-Dfile.encoding=ISO-8859-9");
+        Map<String, byte[]> here =
+                issued("here", input, "-Duser.language=en", "-Duser.country=US", "-Duser.timezone=UTC");
+        Map<String, byte[]> there = issued(
+                "there",
+                input,
+                "-Duser.language=tr",
+                "-Duser.country=TR",
+                "-Duser.timezone=Asia/Tokyo",
+                "-Dfile.encoding=ISO-8859-9");
         assertThat(here.keySet()).hasSize(4).isEqualTo(there.keySet());
         here.forEach((file, bytes) -> assertThat(there.get(file)).as(file).isEqualTo(bytes));
     }
@@ -59,7 +68,8 @@ class SameBytesTest {
     @Test
     void changedEntryChangesTheBytesOfEveryFile() throws IOException {
         Map<String, byte[]> before = issued("before", Package.INPUTS.resolve("return-weir.xlsx"));
-        Path changed = SampleStations.weir().entry("W1", "p", 0.46, null, null, null).save(folder.resolve("return-weir.xlsx"));
+        Path changed =
+                SampleStations.weir().entry("W1", "p", 0.46, null, null, null).save(folder.resolve("return-weir.xlsx"));
         Map<String, byte[]> after = issued("after", changed);
         assertThat(after.keySet()).isEqualTo(before.keySet());
         before.forEach((file, bytes) -> assertThat(after.get(file)).as(file).isNotEqualTo(bytes));

@@ -40,8 +40,17 @@ sealed interface Typing {
 
         @Override
         public Design in(Design design, Package issued) {
-            return inCase(design, of, one -> new FlowCase(one.name(), one.period(), one.year(), retyped(one.flow(), number),
-                    one.tailwater(), one.tailwaterReturn(), one.typed()));
+            return inCase(
+                    design,
+                    of,
+                    one -> new FlowCase(
+                            one.name(),
+                            one.period(),
+                            one.year(),
+                            retyped(one.flow(), number),
+                            one.tailwater(),
+                            one.tailwaterReturn(),
+                            one.typed()));
         }
     }
 
@@ -59,8 +68,17 @@ sealed interface Typing {
 
         @Override
         public Design in(Design design, Package issued) {
-            return inCase(design, of, one -> new FlowCase(one.name(), one.period(), one.year(), one.flow(),
-                    retyped(one.tailwater(), number), one.tailwaterReturn(), one.typed()));
+            return inCase(
+                    design,
+                    of,
+                    one -> new FlowCase(
+                            one.name(),
+                            one.period(),
+                            one.year(),
+                            one.flow(),
+                            retyped(one.tailwater(), number),
+                            one.tailwaterReturn(),
+                            one.typed()));
         }
     }
 
@@ -79,9 +97,17 @@ sealed interface Typing {
                 Cell cell = entry(issued, "Cases", "h_g", of);
                 Typed before = typed.getOrDefault(
                         key,
-                        new Typed(new Value.None(Value.NOT_GIVEN), cell.unit(), "", "known", new Origin("Flows", "A1")));
+                        new Typed(
+                                new Value.None(Value.NOT_GIVEN), cell.unit(), "", "known", new Origin("Flows", "A1")));
                 typed.put(key, retyped(before, content));
-                return new FlowCase(one.name(), one.period(), one.year(), one.flow(), one.tailwater(), one.tailwaterReturn(), typed);
+                return new FlowCase(
+                        one.name(),
+                        one.period(),
+                        one.year(),
+                        one.flow(),
+                        one.tailwater(),
+                        one.tailwaterReturn(),
+                        typed);
             });
         }
     }
@@ -98,8 +124,15 @@ sealed interface Typing {
             List<Element> elements = design.elements().stream()
                     .map(e -> e.tag().equals(tag) ? new Element(e.tag(), e.title(), e.method(), with(e.typed())) : e)
                     .toList();
-            return new Design(design.project(), elements, design.cases(), design.demands(), design.assumptions(),
-                    design.references(), design.requirements(), design.revisions());
+            return new Design(
+                    design.project(),
+                    elements,
+                    design.cases(),
+                    design.demands(),
+                    design.assumptions(),
+                    design.references(),
+                    design.requirements(),
+                    design.revisions());
         }
 
         private Map<String, Typed> with(Map<String, Typed> before) {
@@ -126,15 +159,32 @@ sealed interface Typing {
         public Design in(Design design, Package issued) {
             List<Design.Demand> demands = new ArrayList<>(design.demands());
             Design.Demand d = demands.get(of);
-            demands.set(of, new Design.Demand(d.tag(), d.symbol(), d.atMost(), retyped(d.value(), number), d.description(), d.citation()));
-            return new Design(design.project(), design.elements(), design.cases(), demands, design.assumptions(),
-                    design.references(), design.requirements(), design.revisions());
+            demands.set(
+                    of,
+                    new Design.Demand(
+                            d.tag(),
+                            d.symbol(),
+                            d.atMost(),
+                            retyped(d.value(), number),
+                            d.description(),
+                            d.citation()));
+            return new Design(
+                    design.project(),
+                    design.elements(),
+                    design.cases(),
+                    demands,
+                    design.assumptions(),
+                    design.references(),
+                    design.requirements(),
+                    design.revisions());
         }
     }
 
     private static Cell entry(Package issued, String sheet, String symbol, int number) {
         return issued.results().cells().stream()
-                .filter(c -> c.kind() == Cell.Kind.ENTRY && c.place().sheet().equals(sheet) && c.symbol().equals(symbol))
+                .filter(c -> c.kind() == Cell.Kind.ENTRY
+                        && c.place().sheet().equals(sheet)
+                        && c.symbol().equals(symbol))
                 .skip(number)
                 .findFirst()
                 .orElseThrow();
@@ -150,7 +200,14 @@ sealed interface Typing {
     private static Design inCase(Design design, int number, UnaryOperator<FlowCase> change) {
         List<FlowCase> cases = new ArrayList<>(design.cases());
         cases.set(number, change.apply(cases.get(number)));
-        return new Design(design.project(), design.elements(), cases, design.demands(), design.assumptions(),
-                design.references(), design.requirements(), design.revisions());
+        return new Design(
+                design.project(),
+                design.elements(),
+                cases,
+                design.demands(),
+                design.assumptions(),
+                design.references(),
+                design.requirements(),
+                design.revisions());
     }
 }

@@ -44,7 +44,10 @@ public final class Bench {
      * @param typedPerCase one map for each case
      */
     public Bench(
-            MethodSheet method, WorkingSystem system, Map<String, String> entries, List<Map<String, String>> typedPerCase) {
+            MethodSheet method,
+            WorkingSystem system,
+            Map<String, String> entries,
+            List<Map<String, String>> typedPerCase) {
         this.method = method;
         this.cells = new Cells(system, new SheetDraft("Constants", "Constants"));
         this.trialRows = new TrialRows(cells, trials);
@@ -56,14 +59,24 @@ public final class Bench {
                 boolean perCase = method.perCase(given.symbol());
                 if (perCase) {
                     for (int c = 0; c < cases.size(); c++) {
-                        cases.get(c).put(given.symbol(), typed(given, typedPerCase.get(c).get(given.symbol())));
+                        cases.get(c)
+                                .put(
+                                        given.symbol(),
+                                        typed(given, typedPerCase.get(c).get(given.symbol())));
                     }
                 } else {
                     scope.put(given.symbol(), typed(given, entries.get(given.symbol())));
                 }
             } else if (item instanceof Item.Constant constant) {
-                scope.put(constant.symbol(), cells.typed(Cell.Kind.CONSTANT, place(), constant.symbol(), constant.unit(),
-                        Value.of(constant.value()), Sign.POSITIVE));
+                scope.put(
+                        constant.symbol(),
+                        cells.typed(
+                                Cell.Kind.CONSTANT,
+                                place(),
+                                constant.symbol(),
+                                constant.unit(),
+                                Value.of(constant.value()),
+                                Sign.POSITIVE));
             }
         }
         List<String> names = new ArrayList<>();
@@ -72,8 +85,10 @@ public final class Bench {
         }
         this.limits = new ElementSheet("E1", method, items, trialRows, sheet, scope, names, cases).lay(0, List.of());
         SheetDraft ratingSheet = new SheetDraft("E1 rating", "Rating");
-        method.ratings().forEach(rating -> ratings.add(
-                new RatingGrid(items, method, Map.of()).lay(rating, scope, ratingSheet, "Rating").table()));
+        method.ratings()
+                .forEach(rating -> ratings.add(new RatingGrid(items, method, Map.of())
+                        .lay(rating, scope, ratingSheet, "Rating")
+                        .table()));
         this.values = Evaluation.of(cells.all());
     }
 

@@ -53,13 +53,16 @@ class LayoutTest {
             give   water level = z_u
             """;
 
-    private static final MethodSheet METHOD =
-            new MethodReader(new Texts().method("trough", TROUGH)).read("trough");
+    private static final MethodSheet METHOD = new MethodReader(new Texts().method("trough", TROUGH)).read("trough");
 
-    private static final Bench BENCH = new Bench(METHOD, WorkingSystem.SI, typed("b", "0.5 m"), List.of(
-            typed("Q", "0.4 m3/s", "z_t", "0.2 m"),
-            typed("Q", "1.2 m3/s", "z_t", "0.9 m", "h_g", "0.7 m"),
-            typed("Q", "0 m3/s", "z_t", "-1 m")));
+    private static final Bench BENCH = new Bench(
+            METHOD,
+            WorkingSystem.SI,
+            typed("b", "0.5 m"),
+            List.of(
+                    typed("Q", "0.4 m3/s", "z_t", "0.2 m"),
+                    typed("Q", "1.2 m3/s", "z_t", "0.9 m", "h_g", "0.7 m"),
+                    typed("Q", "0 m3/s", "z_t", "-1 m")));
 
     @Test
     void whatRestsOnEntriesStandsOnceAndWhatRestsOnACaseOncePerCase() {
@@ -158,21 +161,27 @@ class LayoutTest {
 
     @Test
     void aCellThatIsSureHoldsANumberOrAPlainWord() {
-        assertThat(BENCH.cells()).filteredOn(cell -> cell.sureness() == Sureness.SURE)
+        assertThat(BENCH.cells())
+                .filteredOn(cell -> cell.sureness() == Sureness.SURE)
                 .allSatisfy(cell -> assertThat(BENCH.value(cell)).isNotInstanceOf(Value.None.class));
     }
 
     @Test
     void bothWorkingSystemsGiveTheSame() {
-        Bench feet = new Bench(METHOD, WorkingSystem.US, typed("b", "0.5 m"),
-                List.of(typed("Q", "0.4 m3/s", "z_t", "0.2 m")));
+        Bench feet = new Bench(
+                METHOD, WorkingSystem.US, typed("b", "0.5 m"), List.of(typed("Q", "0.4 m3/s", "z_t", "0.2 m")));
         assertThat(feet.number("h_1", 0) * 0.3048).isCloseTo(BENCH.number("h_1", 0), within(1e-12));
         assertThat(feet.number("z_u", 0) * 0.3048).isCloseTo(BENCH.number("z_u", 0), within(1e-12));
     }
 
     private static Bench bench(String... entries) {
-        return new Bench(METHOD, WorkingSystem.SI, typed(entries), List.of(
-                typed("Q", "0.4 m3/s", "z_t", "0.2 m"), typed("Q", "1.2 m3/s", "z_t", "0.9 m", "h_g", "0.7 m")));
+        return new Bench(
+                METHOD,
+                WorkingSystem.SI,
+                typed(entries),
+                List.of(
+                        typed("Q", "0.4 m3/s", "z_t", "0.2 m"),
+                        typed("Q", "1.2 m3/s", "z_t", "0.9 m", "h_g", "0.7 m")));
     }
 
     private static List<String> described(Bench bench) {
@@ -185,8 +194,8 @@ class LayoutTest {
 
     private static Map<String, String> places(Map<String, Reference> references) {
         Map<String, String> places = new java.util.TreeMap<>();
-        references.forEach((name, to) ->
-                places.put(name, to instanceof Run run ? run.from("") : ((Cell) to).place().full()));
+        references.forEach((name, to) -> places.put(
+                name, to instanceof Run run ? run.from("") : ((Cell) to).place().full()));
         return places;
     }
 }

@@ -32,13 +32,15 @@ class NestedRootTest {
         assertThat(bench.number("s_1", 0)).isCloseTo(1 + (Math.sqrt(1 + 0.4 * 8) - 1) / 0.2, within(1e-11));
         assertThat(bench.value("s_2", 0)).isEqualTo(new Value.None("no result"));
         assertThat(bench.number("s_2", 1)).isCloseTo(3, within(1e-11));
-        assertThat(bench.verdicts("the trials for x_r have closed")).containsExactlyInAnyOrder(
-                List.of(Value.word("met")), List.of(Value.word("not met"), Value.word("met")));
+        assertThat(bench.verdicts("the trials for x_r have closed"))
+                .containsExactlyInAnyOrder(
+                        List.of(Value.word("met")), List.of(Value.word("not met"), Value.word("met")));
     }
 
     @Test
     void aRootInARootCloses() {
-        Bench bench = bench(HEAD + "root y_r = y where s = c + 2 between 0.001 and 20 ; 1 ; where x is c + 1\n", "1", "2");
+        Bench bench =
+                bench(HEAD + "root y_r = y where s = c + 2 between 0.001 and 20 ; 1 ; where x is c + 1\n", "1", "2");
         assertThat(bench.number("y_r", 0)).isCloseTo(2.4, within(1e-11));
         assertThat(bench.number("y_r", 1)).isCloseTo(3.9, within(1e-11));
         assertThat(bench.verdicts("the trials for x_r have closed")).hasSize(1);
@@ -54,7 +56,8 @@ class NestedRootTest {
 
     @Test
     void aRootInARootKeepsTheColumnsOfItsTrials() {
-        Bench bench = bench(HEAD + "root y_r = y where s = c + 2 between 0.001 and 20 ; 1 ; where x is c + 1\n", "1", "2");
+        Bench bench =
+                bench(HEAD + "root y_r = y where s = c + 2 between 0.001 and 20 ; 1 ; where x is c + 1\n", "1", "2");
         for (nappe.calculation.Block.Table table : bench.trialTables()) {
             assertThat(table.rows()).allSatisfy(row -> assertThat(row.items()).hasSameSizeAs(table.columns()));
         }
@@ -63,7 +66,10 @@ class NestedRootTest {
 
     private static Bench bench(String text, String... values) {
         MethodSheet method = new MethodReader(new Texts().method("pretend", text)).read("pretend");
-        return new Bench(method, WorkingSystem.SI, typed("a", "1"),
+        return new Bench(
+                method,
+                WorkingSystem.SI,
+                typed("a", "1"),
                 java.util.Arrays.stream(values).map(c -> typed("c", c)).toList());
     }
 }

@@ -127,24 +127,30 @@ class TrialRowsTest {
         double width = Math.pow(10, logWidth);
         double channel = width * Math.pow(10, logChannel);
         double crest = Math.pow(10, logCrest);
-        Bench bench = weir(width, channel, crest, new Weir(width, channel, crest).flow(crest * Math.pow(10, logHeadToCrest)));
+        Bench bench =
+                weir(width, channel, crest, new Weir(width, channel, crest).flow(crest * Math.pow(10, logHeadToCrest)));
         if (bench.value("b_e") instanceof Value.Number) {
             assertThat(bench.verdict("the trials for h_c have closed", 0)).isEqualTo(Value.word("met"));
         }
         if (bench.value("h_c", 0) instanceof Value.Number head && head.value() > 0) {
             List<Cell> trials = bench.trialRows().solved().get(0).trials();
-            assertThat(trials).filteredOn(trial -> !bench.value(trial).equals(Value.of(0))).hasSizeLessThanOrEqualTo(13);
+            assertThat(trials)
+                    .filteredOn(trial -> !bench.value(trial).equals(Value.of(0)))
+                    .hasSizeLessThanOrEqualTo(13);
         }
     }
 
     private static Bench weir(double width, double channel, double crest, double flow) {
-        return new Bench(WEIR, WorkingSystem.SI,
+        return new Bench(
+                WEIR,
+                WorkingSystem.SI,
                 typed("b", width + " m", "B", channel + " m", "p", crest + " m", "z_c", "10 m"),
                 List.of(typed("Q", flow + " m3/s", "z_t", "1 m")));
     }
 
     private static Bench root(String left, String bracket, String right) {
-        MethodSheet method = new MethodReader(new Texts().method("pretend", """
+        MethodSheet method =
+                new MethodReader(new Texts().method("pretend", """
                 method Pretend
                 case c ; 1 ; right side ; optional
                 free x ; 1 ; unknown ; any sign
@@ -163,7 +169,9 @@ class TrialRowsTest {
     private record Weir(double b, double channel, double p) {
         private static final double[] R = {0, .1, .2, .3, .4, .5, .6, .7, .8, .9, 1};
         private static final double[] A = {.587, .588, .589, .590, .591, .592, .593, .595, .597, .599, .602};
-        private static final double[] A_1 = {-.0023, -.0021, -.0018, .0020, .0058, .0110, .0180, .0300, .0450, .0640, .0750};
+        private static final double[] A_1 = {
+            -.0023, -.0021, -.0018, .0020, .0058, .0110, .0180, .0300, .0450, .0640, .0750
+        };
         private static final double[] R_K = {0, .2, .4, .6, .8, 1};
         private static final double[] K = {2.4, 2.4, 2.7, 3.6, 4.2, -.9};
 

@@ -21,7 +21,9 @@ class BuiltInLibraryTest {
     }
 
     static java.util.List<String> citedTables() {
-        return LIBRARY.names("tables").stream().filter(name -> !name.equals("units.csv")).toList();
+        return LIBRARY.names("tables").stream()
+                .filter(name -> !name.equals("units.csv"))
+                .toList();
     }
 
     @ParameterizedTest

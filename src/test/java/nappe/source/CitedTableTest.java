@@ -63,9 +63,11 @@ class CitedTableTest {
 
     @Test
     void aTableWithoutSourceIsRefused() {
-        refused("# title: Pretend sizes\nC [1]\n1\n",
+        refused(
+                "# title: Pretend sizes\nC [1]\n1\n",
                 "pretend.csv:1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
-        refused("# title: Pretend sizes\n# source:\nC [1]\n1\n",
+        refused(
+                "# title: Pretend sizes\n# source:\nC [1]\n1\n",
                 "pretend.csv:1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
         refused("", "pretend.csv:1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
     }
@@ -77,9 +79,11 @@ class CitedTableTest {
 
     @Test
     void aHeadThatIsNoSymbolWithItsUnitIsRefused() {
-        refused(HEAD + "size,C (1)\na,1\n",
+        refused(
+                HEAD + "size,C (1)\na,1\n",
                 "pretend.csv:3: column head \"C (1)\" is not a symbol with its unit in brackets, such as h [m] (fault: head-unclear)");
-        refused(HEAD + "2nd,C [1]\na,1\n",
+        refused(
+                HEAD + "2nd,C [1]\na,1\n",
                 "pretend.csv:3: column head \"2nd\" is not a symbol with its unit in brackets, such as h [m] (fault: head-unclear)");
     }
 

@@ -45,7 +45,8 @@ class LibraryConversionTest {
             Unit ours = Unit.parse(known.getKey());
             javax.measure.Unit<?> theirs = known.getValue();
             for (double value : new double[] {0, 1, 12.5, -3}) {
-                double expected = theirs.getConverterToAny(theirs.getSystemUnit()).convert(value);
+                double expected =
+                        theirs.getConverterToAny(theirs.getSystemUnit()).convert(value);
                 assertThat(value * ours.sizeInSi() + ours.zeroInSi())
                         .as(value + " " + ours)
                         .isCloseTo(expected, within(1e-15 * Math.max(1e-9, Math.abs(expected))));
@@ -55,7 +56,8 @@ class LibraryConversionTest {
 
     @Test
     void ourDimensionIsTheLibrarys() {
-        KNOWN.forEach((text, theirs) -> assertThat(rebuilt(Unit.parse(text).dimension()).getDimension())
+        KNOWN.forEach((text, theirs) -> assertThat(
+                        rebuilt(Unit.parse(text).dimension()).getDimension())
                 .as(text)
                 .isEqualTo(theirs.getDimension()));
     }

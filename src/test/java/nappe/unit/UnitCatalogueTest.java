@@ -45,7 +45,8 @@ class UnitCatalogueTest {
     void factorsThatAreNoShortDecimalAreExactFractions() {
         RationalNumber slug = decimal("4.4482216152605").divide(decimal("0.3048"));
         RationalNumber psi = decimal("4.4482216152605").divide(decimal("0.0254").pow(2));
-        RationalNumber mgd = decimal("0.003785411784").multiply(decimal("1000000")).divide(decimal("86400"));
+        RationalNumber mgd =
+                decimal("0.003785411784").multiply(decimal("1000000")).divide(decimal("86400"));
         assertThat(Unit.parse("slug").exact()).isEqualTo(slug);
         assertThat(Unit.parse("psi").exact()).isEqualTo(psi);
         assertThat(Unit.parse("MGD").exact()).isEqualTo(mgd);
@@ -155,6 +156,8 @@ class UnitCatalogueTest {
 
     /** The nearest double to a quotient of decimals. */
     static double quotient(String above, String below) {
-        return new BigDecimal(above).divide(new BigDecimal(below), new MathContext(60)).doubleValue();
+        return new BigDecimal(above)
+                .divide(new BigDecimal(below), new MathContext(60))
+                .doubleValue();
     }
 }

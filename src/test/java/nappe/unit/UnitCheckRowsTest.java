@@ -26,20 +26,24 @@ class UnitCheckRowsTest {
             double computed = Double.parseDouble(entry[0]) * given.sizeInSi() / asked.sizeInSi();
             double expected = Double.parseDouble(row.get("expected"));
             String[] tolerance = row.get("tolerance").split(" ");
-            double allowed = Double.parseDouble(tolerance[0]) * (tolerance[1].equals("%") ? Math.abs(expected) / 100 : 1);
+            double allowed =
+                    Double.parseDouble(tolerance[0]) * (tolerance[1].equals("%") ? Math.abs(expected) / 100 : 1);
             assertThat(given.dimension()).isEqualTo(asked.dimension());
             assertThat(computed).as(row.get("id") + ", " + row.get("source")).isCloseTo(expected, within(allowed));
         }
     }
 
     private static List<CSVRecord> rows() throws IOException {
-        CSVFormat format = CSVFormat.DEFAULT.builder()
+        CSVFormat format = CSVFormat.DEFAULT
+                .builder()
                 .setCommentMarker('#')
                 .setHeader()
                 .setSkipHeaderRecord(true)
                 .get();
-        try (InputStream in = Objects.requireNonNull(UnitCheckRowsTest.class.getResourceAsStream("/checks/units.csv"))) {
-            return format.parse(new InputStreamReader(in, StandardCharsets.UTF_8)).getRecords();
+        try (InputStream in =
+                Objects.requireNonNull(UnitCheckRowsTest.class.getResourceAsStream("/checks/units.csv"))) {
+            return format.parse(new InputStreamReader(in, StandardCharsets.UTF_8))
+                    .getRecords();
         }
     }
 }

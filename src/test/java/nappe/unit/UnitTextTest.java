@@ -34,7 +34,8 @@ class UnitTextTest {
 
     @Test
     void everySlashDividesOnlyWhatFollowsIt() {
-        assertThat(Unit.parse("kg/m.s").dimension()).isEqualTo(Unit.parse("kg.s/m").dimension());
+        assertThat(Unit.parse("kg/m.s").dimension())
+                .isEqualTo(Unit.parse("kg.s/m").dimension());
         assertThat(Unit.parse("kg/m/s").dimension()).isEqualTo(Dimension.VISCOSITY);
     }
 
@@ -48,7 +49,8 @@ class UnitTextTest {
 
     @Test
     void negativeExponentsAreExact() {
-        assertThat(Unit.parse("in-2").exact()).isEqualTo(UnitCatalogueTest.decimal("0.0254").pow(2).reciprocal());
+        assertThat(Unit.parse("in-2").exact())
+                .isEqualTo(UnitCatalogueTest.decimal("0.0254").pow(2).reciprocal());
         assertThat(Unit.parse("1/in2").exact()).isEqualTo(Unit.parse("in-2").exact());
     }
 
@@ -78,8 +80,33 @@ class UnitTextTest {
     @ParameterizedTest
     @ValueSource(
             strings = {
-                "furlong", "m3 / s", " m", "m ", "m/", "/s", "m.", ".m", "m//s", "m**3", "m^", "m^()", "m^(1/0)", "m^(1/2",
-                "m^1.5", "m0", "m^(0/2)", "m123", "m99999999999", "2m", "m/2", "11", "1.5", "m3s", "m\u00b3/s", "inH2O", "-"
+                "furlong",
+                "m3 / s",
+                " m",
+                "m ",
+                "m/",
+                "/s",
+                "m.",
+                ".m",
+                "m//s",
+                "m**3",
+                "m^",
+                "m^()",
+                "m^(1/0)",
+                "m^(1/2",
+                "m^1.5",
+                "m0",
+                "m^(0/2)",
+                "m123",
+                "m99999999999",
+                "2m",
+                "m/2",
+                "11",
+                "1.5",
+                "m3s",
+                "m\u00b3/s",
+                "inH2O",
+                "-"
             })
     void aTextThatIsNoUnitIsRefused(String text) {
         assertThatThrownBy(() -> Unit.parse(text))
@@ -99,8 +126,17 @@ class UnitTextTest {
     @CsvSource(
             delimiter = ';',
             value = {
-                "mgd; MGD", "GPM; gpm", "CFS; cfs", "degc; degC", "FT; ft", "AC-FT; ac-ft", "l/s; L/s", "M3/S; m3/s",
-                "m\u00b3/s; m3/s", "ft3 / s; ft3/s", "inH2O; inH2O(4degC), inH2O(60degF)"
+                "mgd; MGD",
+                "GPM; gpm",
+                "CFS; cfs",
+                "degc; degC",
+                "FT; ft",
+                "AC-FT; ac-ft",
+                "l/s; L/s",
+                "M3/S; m3/s",
+                "m\u00b3/s; m3/s",
+                "ft3 / s; ft3/s",
+                "inH2O; inH2O(4degC), inH2O(60degF)"
             })
     void wrongLettersNameTheUnitThatIsMeant(String text, String meant) {
         assertThatThrownBy(() -> Unit.parse(text))

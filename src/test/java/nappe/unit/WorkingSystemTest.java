@@ -37,8 +37,20 @@ class WorkingSystemTest {
     @ParameterizedTest
     @ValueSource(
             strings = {
-                "ft", "ft3/s", "cfs", "slug", "lbf", "psf", "lbf.s/ft2", "slug/ft3", "degR", "degF", "s", "1",
-                "ft^(1/3)/s", "ft^(5/2)/s"
+                "ft",
+                "ft3/s",
+                "cfs",
+                "slug",
+                "lbf",
+                "psf",
+                "lbf.s/ft2",
+                "slug/ft3",
+                "degR",
+                "degF",
+                "s",
+                "1",
+                "ft^(1/3)/s",
+                "ft^(5/2)/s"
             })
     void unitsOfTheSystemItselfAreExactlyOneInUs(String text) {
         assertThat(Unit.parse(text).sizeIn(WorkingSystem.US)).isEqualTo(1.0);
@@ -52,8 +64,13 @@ class WorkingSystemTest {
 
     @ParameterizedTest
     @CsvSource({
-        "yd, 3", "mi, 5280", "psi, 144", "ac, 43560", "ac-ft, 43560",
-        "in, 0.08333333333333333", "gal/s, 0.13368055555555555"
+        "yd, 3",
+        "mi, 5280",
+        "psi, 144",
+        "ac, 43560",
+        "ac-ft, 43560",
+        "in, 0.08333333333333333",
+        "gal/s, 0.13368055555555555"
     })
     void multiplesAreExactInUs(String text, double size) {
         assertThat(Unit.parse(text).sizeIn(WorkingSystem.US)).isEqualTo(size);
@@ -62,13 +79,13 @@ class WorkingSystemTest {
     /** One foot over standard gravity: 0.3048/9.80665. */
     @Test
     void aPoundIsThisPartOfASlug() {
-        assertThat(Unit.parse("lb").sizeIn(WorkingSystem.US)).isEqualTo(UnitCatalogueTest.quotient("0.3048", "9.80665"));
+        assertThat(Unit.parse("lb").sizeIn(WorkingSystem.US))
+                .isEqualTo(UnitCatalogueTest.quotient("0.3048", "9.80665"));
     }
 
     @Test
     void rootsConvertBetweenTheSystems() {
-        assertThat(Unit.parse("m^(1/3)/s").sizeIn(WorkingSystem.US))
-                .isCloseTo(1 / Math.cbrt(0.3048), within(1e-15));
+        assertThat(Unit.parse("m^(1/3)/s").sizeIn(WorkingSystem.US)).isCloseTo(1 / Math.cbrt(0.3048), within(1e-15));
         assertThat(Unit.parse("ft^(1/2)/s").sizeIn(WorkingSystem.SI)).isCloseTo(Math.sqrt(0.3048), within(1e-15));
     }
 

@@ -67,10 +67,14 @@ final class BarsPicture {
 
     private void row(Bars.Bar bar, double top) {
         double middle = top + ROW / 2;
-        List<String> lines = lines(bar.number() + "\u2002" + words(bar.tag()) + "  " + words(bar.label()), width * 0.4 - 4);
+        List<String> lines =
+                lines(bar.number() + "\u2002" + words(bar.tag()) + "  " + words(bar.label()), width * 0.4 - 4);
         for (int i = 0; i < lines.size(); i++) {
             double x = i == 0 ? 0 : 4;
-            sketch.text(new At(x, middle + 1 + (i - (lines.size() - 1) / 2.0) * 3.5), SIZE, List.of(Piece.plain(lines.get(i))));
+            sketch.text(
+                    new At(x, middle + 1 + (i - (lines.size() - 1) / 2.0) * 3.5),
+                    SIZE,
+                    List.of(Piece.plain(lines.get(i))));
         }
         Value margin = results.value(bar.margin());
         String verdict = words(bar.verdict());
@@ -78,14 +82,19 @@ final class BarsPicture {
         List<Piece> said = new ArrayList<>(List.of(Verdicts.weigh(verdict)));
         if (margin instanceof Value.Number number && !bar.unit().text().equals("1")) {
             said.add(Piece.plain(", " + (number.value() < 0 ? "missing " : "left ")));
-            said.addAll(UnitPrint.after(Digits.print(bar.unit(), Math.abs(number.value())), bar.unit().text()));
+            said.addAll(UnitPrint.after(
+                    Digits.print(bar.unit(), Math.abs(number.value())),
+                    bar.unit().text()));
         } else if (margin instanceof Value.Number number) {
             said.add(Piece.plain(", " + percent(number.value())));
             bar(number.value(), middle);
         }
         sketch.text(new At(right, middle - 0.7), SIZE, said);
         List<String> worst = lines(words(bar.where()), WORDS - 4);
-        sketch.text(new At(right, middle + 2.7), SMALL, List.of(Piece.plain(worst.get(0) + (worst.size() > 1 ? "\u2026" : ""))));
+        sketch.text(
+                new At(right, middle + 2.7),
+                SMALL,
+                List.of(Piece.plain(worst.get(0) + (worst.size() > 1 ? "\u2026" : ""))));
     }
 
     private static String percent(double margin) {

@@ -5,12 +5,14 @@ import java.util.Collections;
 import java.util.List;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
+import nappe.calculation.Place;
 import nappe.results.Results;
 
 /** Every case: one row per line, one column per case, in as many tables side by side as the paper asks for. */
 final class CasesGrids {
     private static final double SIZE = 8.5;
-    private static final List<String> HEADS = List.of("Line", "Symbol", "Description", "Unit");
+    private static final List<String> HEADS = List.of("Line", "Row", "Symbol", "Description", "Unit");
+    private static final int DESCRIPTION = 3;
     private static final int MOST = 6;
 
     /** Widths of a case's column, in mm. */
@@ -48,7 +50,12 @@ final class CasesGrids {
             int from = i * cases / tables;
             int to = (i + 1) * cases / tables;
             String part = tables == 1 ? "" : ", part " + (i + 1) + " of " + tables;
-            grids.add(grid(from, to, "Every case" + part, width));
+            grids.add(grid(
+                    from,
+                    to,
+                    "Every case" + part
+                            + "; a value stands in the workbook in the row of its line and the column of its case",
+                    width));
         }
         return grids;
     }
@@ -66,11 +73,12 @@ final class CasesGrids {
         for (int i = 0; i < HEADS.size(); i++) {
             widths.whole(i, HEADS.get(i) + "  ");
         }
-        widths.whole(2, "Description of some words.");
+        widths.whole(DESCRIPTION, "Description of some words.");
         for (Block.Line line : perCase(lines)) {
             widths.whole(0, line.code());
-            widths.whole(1, symbol(line).characters());
-            widths.whole(3, View.Text.of("", unit(line)).characters());
+            widths.whole(1, workbookRow(line));
+            widths.whole(2, symbol(line).characters());
+            widths.whole(4, View.Text.of("", unit(line)).characters());
         }
         return widths;
     }
@@ -94,7 +102,7 @@ final class CasesGrids {
     private List<Double> widths(int cases, double width) {
         List<Double> widths = new ArrayList<>(fixed.fit(fixed.least(), 0));
         double each = Math.min(LARGEST_CASE, Math.max(caseWidth, (width - fixed.least() - 25) / perTable(width)));
-        widths.set(2, widths.get(2) + Math.max(0, width - fixed.least() - each * perTable(width)));
+        widths.set(DESCRIPTION, widths.get(DESCRIPTION) + Math.max(0, width - fixed.least() - each * perTable(width)));
         widths.addAll(Collections.nCopies(cases, each));
         return widths;
     }
@@ -110,8 +118,10 @@ final class CasesGrids {
             head.add(View.GridCell.of("", View.Text.plain("", name)));
         }
         for (int i = from; i < to; i++) {
-            head.add(View.GridCell.of(
-                    "right", View.Text.plain("", lines.caseNames().get(i))));
+            head.add(new View.GridCell(
+                    "right",
+                    1,
+                    List.of(View.Text.plain("", lines.caseNames().get(i)), View.Text.plain("small", column(i)))));
         }
         List<View.GridRow> body = new ArrayList<>();
         Between between = new Between(width);
@@ -133,6 +143,7 @@ final class CasesGrids {
     private View.GridRow row(Block.Line line, int from, int to) {
         List<View.GridCell> cells = new ArrayList<>();
         cells.add(View.GridCell.of("", View.Text.plain("", line.code())));
+        cells.add(View.GridCell.of("", View.Text.plain("small", workbookRow(line))));
         cells.add(View.GridCell.of("", symbol(line)));
         cells.add(View.GridCell.of("", View.Text.of("", SymbolPrint.inText(line.description()))));
         cells.add(View.GridCell.of("", View.Text.of("", unit(line))));
@@ -140,6 +151,16 @@ final class CasesGrids {
             cells.add(View.GridCell.of("right", value(line, i)));
         }
         return new View.GridRow("", cells);
+    }
+
+    private static String workbookRow(Block.Line line) {
+        return Integer.toString(line.perCase().get(0).place().row() + 1);
+    }
+
+    /** The workbook column of a case. */
+    private String column(int index) {
+        Cell cell = perCase(lines).get(0).perCase().get(index);
+        return "column " + Place.letters(cell.place().column());
     }
 
     private static View.Text symbol(Block.Line line) {

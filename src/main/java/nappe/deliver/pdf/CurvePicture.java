@@ -85,10 +85,21 @@ final class CurvePicture {
             List<Piece> text = List.of(Piece.plain(tick.text()));
             sketch.text(new At(LEFT - 1.2 - Sketch.width(text, SIZE), y + 1), SIZE, text);
         }
-        sketch.stroke(Sketch.MEDIUM, Sketch.WHOLE, true, List.of(
-                new At(LEFT, TOP), new At(width - RIGHT, TOP), new At(width - RIGHT, foot), new At(LEFT, foot)));
+        sketch.stroke(
+                Sketch.MEDIUM,
+                Sketch.WHOLE,
+                true,
+                List.of(
+                        new At(LEFT, TOP),
+                        new At(width - RIGHT, TOP),
+                        new At(width - RIGHT, foot),
+                        new At(LEFT, foot)));
         Curve.Point first = curve.points().get(0);
-        sketch.centred(new At((LEFT + width - RIGHT) / 2, height - 2.6), SIZE + 0.5, 0, axis("flow ", curve.flow(), first.flow()));
+        sketch.centred(
+                new At((LEFT + width - RIGHT) / 2, height - 2.6),
+                SIZE + 0.5,
+                0,
+                axis("flow ", curve.flow(), first.flow()));
         sketch.centred(new At(3.6, (TOP + foot) / 2), SIZE + 0.5, 90, axis("head ", curve.head(), first.head()));
     }
 
@@ -106,7 +117,8 @@ final class CurvePicture {
         for (Curve.End end : curve.ends()) {
             Cell like = end.ofHead() ? first.head() : first.flow();
             List<Piece> pieces = new ArrayList<>(List.of(Piece.plain(end.words() + " ")));
-            pieces.addAll(UnitPrint.after(Digits.print(like.unit(), end.value()), like.unit().text()));
+            pieces.addAll(UnitPrint.after(
+                    Digits.print(like.unit(), end.value()), like.unit().text()));
             if (end.ofHead()) {
                 double y = up.place(end.value());
                 sketch.stroke(Sketch.MEDIUM, Sketch.DASHED, new At(LEFT, y), new At(width - RIGHT, y));
@@ -125,8 +137,9 @@ final class CurvePicture {
 
     /** Sets a text at the best of the places within the frame; at the first place where none is. */
     private void choose(List<Piece> pieces, List<At> places, double turned) {
-        List<Ink.Lettering> all =
-                places.stream().map(at -> new Ink.Lettering(at, SIZE, turned, pieces)).toList();
+        List<Ink.Lettering> all = places.stream()
+                .map(at -> new Ink.Lettering(at, SIZE, turned, pieces))
+                .toList();
         List<Ink.Lettering> inside = all.stream().filter(this::isInside).toList();
         sketch.choose(inside.isEmpty() ? all : inside);
     }

@@ -36,13 +36,16 @@ final class DrawingPicture {
     private Picture make(double width, double height) {
         Map<Side, Double> margins = new EnumMap<>(Side.class);
         for (Side side : Side.values()) {
-            margins.put(side, views.stream().mapToDouble(view -> view.margin(side)).max().orElse(0));
+            margins.put(
+                    side,
+                    views.stream().mapToDouble(view -> view.margin(side)).max().orElse(0));
         }
         double left = margins.getOrDefault(Side.LEFT, 0.0);
         double across = width - left - margins.getOrDefault(Side.RIGHT, 0.0);
         double fixed = views.stream().mapToDouble(ViewSketch::above).sum()
                 + views.stream().mapToDouble(ViewSketch::below).sum()
-                + views.size() * TITLE + (views.size() - 1) * GAP;
+                + views.size() * TITLE
+                + (views.size() - 1) * GAP;
         double widest = views.stream().mapToDouble(ViewSketch::width).max().orElse(1);
         double tallest = views.stream().mapToDouble(ViewSketch::height).sum();
         double largest = Math.min(across / widest, (height - fixed) / tallest);

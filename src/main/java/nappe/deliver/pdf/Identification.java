@@ -10,8 +10,7 @@ import java.nio.charset.StandardCharsets;
  * to the information dictionary, as ISO 19005-3, 6.6.3 wants.
  */
 final class Identification {
-    private static final String FORM =
-            """
+    private static final String FORM = """
             <?xpacket begin="\uFEFF" id="W5M0MpCehiHzreSzNTczkc9d"?>
             <x:xmpmeta xmlns:x="adobe:ns:meta/">
             <rdf:RDF xmlns:rdf="http://www.w3.org/1999/02/22-rdf-syntax-ns#">

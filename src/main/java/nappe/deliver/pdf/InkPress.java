@@ -82,7 +82,10 @@ final class InkPress {
             double rise = rise(piece) * text.size() / POINTS;
             double width = Sketch.width(List.of(piece), text.size());
             page.setTextMatrix(
-                    cos, sin, -sin, cos,
+                    cos,
+                    sin,
+                    -sin,
+                    cos,
                     x(text.at().x() + along * cos - rise * sin),
                     y(text.at().y() - along * sin - rise * cos));
             show(piece, size);
@@ -96,7 +99,9 @@ final class InkPress {
         BaseFont asked = face(piece);
         StringBuilder stretch = new StringBuilder();
         BaseFont face = asked;
-        for (int at = 0; at < piece.text().length(); at += Character.charCount(piece.text().codePointAt(at))) {
+        for (int at = 0;
+                at < piece.text().length();
+                at += Character.charCount(piece.text().codePointAt(at))) {
             int character = piece.text().codePointAt(at);
             int shown = Typefaces.isMissing(character, asked) ? Typefaces.BOX : character;
             BaseFont own = Typefaces.faceFor(shown, asked);

@@ -20,8 +20,10 @@ record LogAxis(double least, double greatest, double from, double to) {
 
     /** An axis on which all the positive values lie, with a little air at both ends. */
     static LogAxis of(List<Double> values, double from, double to) {
-        double least = values.stream().filter(v -> v > 0).mapToDouble(v -> v).min().orElse(1);
-        double greatest = values.stream().filter(v -> v > 0).mapToDouble(v -> v).max().orElse(10);
+        double least =
+                values.stream().filter(v -> v > 0).mapToDouble(v -> v).min().orElse(1);
+        double greatest =
+                values.stream().filter(v -> v > 0).mapToDouble(v -> v).max().orElse(10);
         double air = Math.pow(Math.max(1.2, greatest / least), 0.04);
         return new LogAxis(least / air, greatest * air, from, to);
     }
@@ -40,7 +42,8 @@ record LogAxis(double least, double greatest, double from, double to) {
             for (int digit = 1; digit <= 9; digit++) {
                 double value = power < 0 ? digit / Math.pow(10, -power) : digit * Math.pow(10, power);
                 if (value >= least && value <= greatest) {
-                    boolean major = digit == 1 || (digit == 2 || digit == 5) && decade * 0.3 > ROOM
+                    boolean major = digit == 1
+                            || (digit == 2 || digit == 5) && decade * 0.3 > ROOM
                             || decade * Math.log10((digit + 1.0) / digit) > 2 * ROOM;
                     ticks.add(new Tick(value, major ? Digits.asTyped(value) : ""));
                 }

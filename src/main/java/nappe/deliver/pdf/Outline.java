@@ -68,8 +68,7 @@ final class Outline {
             if (place == null) {
                 throw new IllegalStateException("no place for the bookmark " + entry.words());
             }
-            PdfDestination top =
-                    new PdfDestination(PdfDestination.XYZ, 0, place.getY() + place.getHeight(), 0);
+            PdfDestination top = new PdfDestination(PdfDestination.XYZ, 0, place.getY() + place.getHeight(), 0);
             top.addPage(writer.getPageReference(place.getPageNo() + 1));
             open[0] = writer.getRootOutline();
             int rank = entry.rank();

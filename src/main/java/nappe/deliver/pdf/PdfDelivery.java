@@ -39,8 +39,7 @@ public record PdfDelivery(byte[] bytes, List<String> warnings) {
                 new Leaves(results, page, drawings, pictures).leaves(),
                 "index",
                 Links.toIndex(results.sheets())));
-        PdfDelivery written =
-                PdfWriting.write(xhtml, results.furniture(), drawings, pictures.made(), attachments);
+        PdfDelivery written = PdfWriting.write(xhtml, results.furniture(), drawings, pictures.made(), attachments);
         List<String> warnings = new ArrayList<>(furnishing.warnings(results.furniture()));
         warnings.addAll(written.warnings());
         return new PdfDelivery(written.bytes(), List.copyOf(warnings));

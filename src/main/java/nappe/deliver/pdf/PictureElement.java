@@ -26,7 +26,8 @@ final class PictureElement implements ITextReplacedElement {
         Rectangle place = box.getContentAreaEdge(box.getAbsX(), box.getAbsY(), context);
         Point2D corner = device.getTransform().transform(new Point2D.Double(place.x, place.y), null);
         PdfContentByte page = device.getCurrentPage();
-        double height = java.util.Objects.requireNonNull(context.getPage()).getHeight(context) / device.getDotsPerPoint();
+        double height =
+                java.util.Objects.requireNonNull(context.getPage()).getHeight(context) / device.getDotsPerPoint();
         new InkPress(page, corner.getX(), height - corner.getY()).print(picture);
     }
 

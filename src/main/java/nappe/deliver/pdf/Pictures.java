@@ -38,13 +38,16 @@ final class Pictures {
         Figure figure = results.figures().get(block.key());
         double height = wide ? WIDE_HEIGHT : UPRIGHT_HEIGHT;
         List<View.Part> parts = new ArrayList<>();
-        parts.add(new View.Paragraph("tabletitle", View.Text.plain("", "Figure: " + (figure == null ? block.title() : figure.title()))));
+        parts.add(new View.Paragraph(
+                "tabletitle", View.Text.plain("", "Figure: " + (figure == null ? block.title() : figure.title()))));
         if (figure instanceof Drawing drawing) {
             parts.add(picture(DrawingPicture.of(results, drawing, width, height)));
             drawing.notes().forEach(note -> parts.add(note(note)));
         } else if (figure instanceof Curve curve) {
             parts.add(picture(CurvePicture.of(results, curve, width, Math.min(CURVE_HEIGHT, height))));
-            parts.add(note("Both scales are logarithmic. Circles: the flow cases. Dashed: the ends of the ranges of head and flow."));
+            parts.add(
+                    note(
+                            "Both scales are logarithmic. Circles: the flow cases. Dashed: the ends of the ranges of head and flow."));
             curve.missing().forEach(note -> parts.add(note(note)));
         } else if (figure instanceof Bars bars) {
             return bars(bars, parts, width, height);
@@ -60,11 +63,13 @@ final class Pictures {
         for (int from = 0; from < bars.bars().size(); from += most) {
             int to = Math.min(bars.bars().size(), from + most);
             List<View.Part> together = new ArrayList<>(from == 0 ? title : List.of());
-            together.add(picture(BarsPicture.of(results, bars.title(), bars.bars().subList(from, to), width)));
+            together.add(
+                    picture(BarsPicture.of(results, bars.title(), bars.bars().subList(from, to), width)));
             if (to == bars.bars().size()) {
-                together.add(note("Grey: what is left to the limit, as a share of its scale. Hatched: what is missing. An arrow: the bar"
-                        + " is longer than the figure. No bar: there is no margin,"
-                        + " or it is a length."));
+                together.add(note(
+                        "Grey: what is left to the limit, as a share of its scale. Hatched: what is missing. An arrow: the bar"
+                                + " is longer than the figure. No bar: there is no margin,"
+                                + " or it is a length."));
             }
             parts.add(new View.Together(together));
         }

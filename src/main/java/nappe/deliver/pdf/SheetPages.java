@@ -39,8 +39,8 @@ final class SheetPages {
     /** All labels, for the reader's page box. */
     PdfPageLabels labels() {
         PdfPageLabels labels = new PdfPageLabels();
-        firsts.forEach((page, sheet) ->
-                labels.addPageLabel(page, PdfPageLabels.DECIMAL_ARABIC_NUMERALS, sheet + "-", 1));
+        firsts.forEach(
+                (page, sheet) -> labels.addPageLabel(page, PdfPageLabels.DECIMAL_ARABIC_NUMERALS, sheet + "-", 1));
         return labels;
     }
 }

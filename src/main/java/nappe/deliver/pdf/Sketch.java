@@ -69,7 +69,11 @@ final class Sketch {
         double dy = (to.y() - from.y()) / length;
         double half = ARROW * 0.17;
         At back = new At(to.x() - ARROW * dx, to.y() - ARROW * dy);
-        fill(0, to, new At(back.x() - half * dy, back.y() + half * dx), new At(back.x() + half * dy, back.y() - half * dx));
+        fill(
+                0,
+                to,
+                new At(back.x() - half * dy, back.y() + half * dx),
+                new At(back.x() + half * dy, back.y() - half * dx));
     }
 
     /** A text that starts at a place. */
@@ -162,7 +166,10 @@ final class Sketch {
     }
 
     private static double[] shadow(List<At> corners, double ux, double uy) {
-        double[] along = corners.stream().mapToDouble(c -> c.x() * ux + c.y() * uy).sorted().toArray();
+        double[] along = corners.stream()
+                .mapToDouble(c -> c.x() * ux + c.y() * uy)
+                .sorted()
+                .toArray();
         return new double[] {along[0], along[along.length - 1]};
     }
 

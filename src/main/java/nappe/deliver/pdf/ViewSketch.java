@@ -31,7 +31,8 @@ final class ViewSketch {
         this.results = results;
         this.view = view;
         this.sketch = sketch;
-        List<Drawing.Point> points = view.parts().stream().flatMap(ViewSketch::points).toList();
+        List<Drawing.Point> points =
+                view.parts().stream().flatMap(ViewSketch::points).toList();
         leftmost = points.stream().mapToDouble(Drawing.Point::x).min().orElse(0);
         rightmost = points.stream().mapToDouble(Drawing.Point::x).max().orElse(1);
         lowest = points.stream().mapToDouble(Drawing.Point::y).min().orElse(0);
@@ -149,7 +150,8 @@ final class ViewSketch {
         At sign = sign(water);
         double x = sign.x();
         double y = sign.y();
-        sketch.stroke(Sketch.THIN, Sketch.WHOLE, true, List.of(new At(x, y), new At(x - 1.2, y - 2), new At(x + 1.2, y - 2)));
+        sketch.stroke(
+                Sketch.THIN, Sketch.WHOLE, true, List.of(new At(x, y), new At(x - 1.2, y - 2), new At(x + 1.2, y - 2)));
         for (int i = 1; i <= 3; i++) {
             double half = 1.5 - 0.4 * i;
             sketch.stroke(Sketch.THIN, Sketch.WHOLE, new At(x - half, y + 0.6 * i), new At(x + half, y + 0.6 * i));
@@ -187,7 +189,9 @@ final class ViewSketch {
         double along = Math.hypot(to.x() - from.x(), to.y() - from.y());
         At end = along < 1e-9
                 ? to
-                : new At(from.x() + (to.x() - from.x()) * length / along, from.y() + (to.y() - from.y()) * length / along);
+                : new At(
+                        from.x() + (to.x() - from.x()) * length / along,
+                        from.y() + (to.y() - from.y()) * length / along);
         sketch.stroke(Sketch.MEDIUM, Sketch.WHOLE, from, end);
         sketch.head(from, end);
         sketch.centred(new At((from.x() + end.x()) / 2, from.y() - 1.2), SIZE, 0, List.of(Piece.plain("flow")));
@@ -207,8 +211,13 @@ final class ViewSketch {
         Ink.Lettering text = sketch.choose(places);
         sketch.circle(at, 0.5, false);
         boolean isRight = text.at().x() >= at.x();
-        sketch.stroke(Sketch.THIN, Sketch.WHOLE, at,
-                new At(isRight ? text.at().x() - 0.8 : text.at().x() + width + 0.8, text.at().y() - 0.9));
+        sketch.stroke(
+                Sketch.THIN,
+                Sketch.WHOLE,
+                at,
+                new At(
+                        isRight ? text.at().x() - 0.8 : text.at().x() + width + 0.8,
+                        text.at().y() - 0.9));
     }
 
     private void mark(At at) {
@@ -352,6 +361,10 @@ final class ViewSketch {
         }
         double ux = (to.x() - from.x()) / length;
         double uy = (to.y() - from.y()) / length;
-        sketch.stroke(Sketch.THIN, Sketch.WHOLE, new At(from.x() + ux, from.y() + uy), new At(to.x() + 1.2 * ux, to.y() + 1.2 * uy));
+        sketch.stroke(
+                Sketch.THIN,
+                Sketch.WHOLE,
+                new At(from.x() + ux, from.y() + uy),
+                new At(to.x() + 1.2 * ux, to.y() + 1.2 * uy));
     }
 }

@@ -5,7 +5,9 @@ import java.util.List;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.formula.Formula;
+import nappe.formula.Function;
 import nappe.formula.PlainReading;
+import nappe.formula.Value;
 import nappe.results.Results;
 import org.jspecify.annotations.Nullable;
 
@@ -121,15 +123,30 @@ final class WorkedGrid {
             }
             return texts;
         }
-        Formula inNumbers = numbers.of(cell, formula);
-        EquationSetting setting = new EquationSetting(line.symbol(), SIZE, room).symbols(formula);
-        if (!inNumbers.equals(formula) && line.kind() == Block.LineKind.LIMIT_VERDICT) {
+        Formula shown = line.kind() == Block.LineKind.LIMIT_VERDICT ? condition(formula) : formula;
+        Formula inNumbers = numbers.of(cell, shown);
+        EquationSetting setting = new EquationSetting(line.symbol(), SIZE, room).symbols(shown);
+        if (results.value(cell).equals(new Value.None(Value.NOT_GIVEN))) {
+            // there are no numbers to show
+            texts.add(drawn("equation", setting));
+            return texts;
+        }
+        if (!inNumbers.equals(shown) && line.kind() == Block.LineKind.LIMIT_VERDICT) {
             setting.numbersAlone(inNumbers);
-        } else if (!inNumbers.equals(formula)) {
+        } else if (!inNumbers.equals(shown)) {
             setting.numbers(inNumbers);
         }
         texts.add(drawn("equation", setting));
         return texts;
+    }
+
+    /** What a verdict of "met" or "not met" asks; the words need no brace of their own. */
+    private static Formula condition(Formula verdict) {
+        boolean plain = verdict instanceof Formula.Call choice
+                && choice.function() == Function.IF
+                && choice.arguments().get(1).equals(new Formula.Word("met"))
+                && choice.arguments().get(2).equals(new Formula.Word("not met"));
+        return plain ? ((Formula.Call) verdict).arguments().get(0) : verdict;
     }
 
     private View.Text drawn(String style, EquationSetting setting) {

@@ -59,8 +59,14 @@ final class Canvas {
             return;
         }
         switch (cell.kind()) {
-            case FORMULA -> put(place.row(), place.column(), role, align, cell,
-                    new Filling.Live(SpreadsheetReading.of(cell), value));
+            case FORMULA ->
+                put(
+                        place.row(),
+                        place.column(),
+                        role,
+                        align,
+                        cell,
+                        new Filling.Live(SpreadsheetReading.of(cell), value));
             case ENTRY -> put(place.row(), place.column(), Role.ENTRY, align, cell, typed(value));
             case CONSTANT, TABLE -> put(place.row(), place.column(), Role.CONSTANT, align, cell, typed(value));
         }

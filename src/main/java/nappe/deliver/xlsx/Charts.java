@@ -62,8 +62,7 @@ final class Charts {
         chart.getGraphicFrame().setName(block.title());
         chart.setAutoTitleDeleted(true);
         chart.getOrAddLegend().setPosition(LegendPosition.BOTTOM);
-        XDDFValueAxis across = axis(
-                chart, AxisPosition.BOTTOM, block.across(), greatest(block, Block.Series::across));
+        XDDFValueAxis across = axis(chart, AxisPosition.BOTTOM, block.across(), greatest(block, Block.Series::across));
         XDDFValueAxis up = axis(chart, AxisPosition.LEFT, block.up(), greatest(block, Block.Series::up));
         XDDFScatterChartData data = (XDDFScatterChartData) chart.createData(ChartTypes.SCATTER, across, up);
         data.setStyle(ScatterStyle.LINE_MARKER);
@@ -73,7 +72,10 @@ final class Charts {
         }
         chart.plot(data);
         // else the axes take the many decimals of the cells
-        chart.getCTChart().getPlotArea().getValAxList().forEach(axis -> axis.getNumFmt().setSourceLinked(false));
+        chart.getCTChart()
+                .getPlotArea()
+                .getValAxList()
+                .forEach(axis -> axis.getNumFmt().setSourceLinked(false));
     }
 
     private static XDDFValueAxis axis(XSSFChart chart, AxisPosition position, String title, double greatest) {
@@ -105,7 +107,12 @@ final class Charts {
         } else {
             drawn.setMarkerStyle(MarkerStyle.DIAMOND);
             drawn.setLineProperties(new XDDFLineProperties(new XDDFNoFillProperties()));
-            drawn.getCTScatterSer().getMarker().addNewSpPr().addNewSolidFill().addNewSrgbClr().setVal(BLACK);
+            drawn.getCTScatterSer()
+                    .getMarker()
+                    .addNewSpPr()
+                    .addNewSolidFill()
+                    .addNewSrgbClr()
+                    .setVal(BLACK);
         }
     }
 

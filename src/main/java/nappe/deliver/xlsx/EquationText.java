@@ -20,7 +20,8 @@ final class EquationText {
     /** Whether the layout says something in place of the formula. */
     static boolean isWords(Block.Line line) {
         Formula formula = formula(line);
-        return !line.equation().isEmpty() && (formula == null || !line.equation().equals(PlainReading.of(formula)));
+        return !line.equation().isEmpty()
+                && (formula == null || !line.equation().equals(PlainReading.of(formula)));
     }
 
     private static @Nullable Formula formula(Block.Line line) {

@@ -27,13 +27,13 @@ final class Margins {
     }
 
     String headRight() {
-        return SMALL + "Revision " + field(furniture.revision()) + ", " + furniture.status() + "\nSheet " + sheet.number()
-                + " of " + sheets + ", page &P of &N";
+        return SMALL + "Revision " + field(furniture.revision()) + ", " + furniture.status() + "\nSheet "
+                + sheet.number() + " of " + sheets + ", page &P of &N";
     }
 
     String footLeft() {
-        StringBuilder text = new StringBuilder(
-                SMALL + "Input fingerprint " + field(furniture.fingerprint()) + ", Nappe " + field(furniture.version()));
+        StringBuilder text = new StringBuilder(SMALL + "Input fingerprint " + field(furniture.fingerprint())
+                + ", Nappe " + field(furniture.version()));
         for (String caution : furniture.cautions()) {
             String line = "\n" + doubled(caution);
             if (text.length() + line.length() < LONGEST) {

@@ -88,7 +88,8 @@ final class SheetFrame {
         sheet.getHeader().setRight(margins.headRight());
         sheet.getFooter().setLeft(margins.footLeft());
         int index = workbook.getSheetIndex(sheet);
-        workbook.setPrintArea(index, 0, canvas.rows().lastColumn(), 0, canvas.rows().lastRow());
+        workbook.setPrintArea(
+                index, 0, canvas.rows().lastColumn(), 0, canvas.rows().lastRow());
     }
 
     private void protect() {

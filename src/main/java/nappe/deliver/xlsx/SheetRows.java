@@ -23,8 +23,8 @@ final class SheetRows {
     void put(int row, int column, int style, Filling content) {
         Filled before = rows.computeIfAbsent(row, key -> new TreeMap<>()).put(column, new Filled(style, content));
         if (before != null) {
-            throw new IllegalStateException(
-                    "two contents for " + new Place(sheet, row, column).full() + ": " + before.content + ", " + content);
+            throw new IllegalStateException("two contents for " + new Place(sheet, row, column).full() + ": "
+                    + before.content + ", " + content);
         }
     }
 

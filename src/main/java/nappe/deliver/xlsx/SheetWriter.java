@@ -2,9 +2,7 @@ package nappe.deliver.xlsx;
 
 import java.util.ArrayList;
 import java.util.Comparator;
-import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Set;
 import java.util.stream.Stream;
 import nappe.calculation.Block;
 import nappe.calculation.Block.Align;
@@ -12,10 +10,6 @@ import nappe.calculation.Cell;
 import nappe.calculation.Place;
 import nappe.calculation.Sheet;
 import nappe.deliver.xlsx.Styles.Role;
-import nappe.formula.Formula;
-import nappe.formula.PlainReading;
-import nappe.formula.Value;
-import nappe.results.Digits;
 import nappe.results.Furniture;
 import nappe.results.Results;
 import org.jspecify.annotations.Nullable;
@@ -85,26 +79,41 @@ final class SheetWriter {
             return chart.row() + chart.rows() - 1;
         }
         if (block instanceof Block.Table table) {
-            int last = table.row() + (table.title().isEmpty() ? 0 : 1) + table.rows().size();
+            int last = table.row()
+                    + (table.title().isEmpty() ? 0 : 1)
+                    + table.rows().size();
             return Math.min(table.row() + (table.rows().size() <= SMALL_TABLE ? SMALL_TABLE + 1 : 3), last);
         }
         if (block instanceof Block.WorkbookOnly only) {
             return lastKept(only.table());
         }
-        return block instanceof Block.Lines lines ? lines.row() + Math.min(2, lines.lines().size()) : block.row();
+        return block instanceof Block.Lines lines
+                ? lines.row() + Math.min(2, lines.lines().size())
+                : block.row();
     }
 
     private void header() {
         Furniture furniture = results.furniture();
-        canvas.wide(0, Role.SHEET_TITLE, "Sheet " + sheet.number() + " of " + results.sheets().size() + "   " + sheet.title());
-        canvas.wide(1, Role.FURNITURE, furniture.project() + "   Calculation " + furniture.number() + "   Revision "
-                + furniture.revision() + ", " + furniture.date() + "   Status: " + furniture.status());
-        canvas.wide(2, Role.FURNITURE, String.join(" ", Stream.concat(
-                        Stream.of("Input fingerprint " + furniture.fingerprint(), furniture.release()),
-                        furniture.cautions().stream())
-                .filter(text -> !text.isEmpty())
-                .map(text -> text.endsWith(".") ? text : text + ".")
-                .toList()));
+        canvas.wide(
+                0,
+                Role.SHEET_TITLE,
+                "Sheet " + sheet.number() + " of " + results.sheets().size() + "   " + sheet.title());
+        canvas.wide(
+                1,
+                Role.FURNITURE,
+                furniture.project() + "   Calculation " + furniture.number() + "   Revision " + furniture.revision()
+                        + ", " + furniture.date() + "   Status: " + furniture.status());
+        canvas.wide(
+                2,
+                Role.FURNITURE,
+                String.join(
+                        " ",
+                        Stream.concat(
+                                        Stream.of("Input fingerprint " + furniture.fingerprint(), furniture.release()),
+                                        furniture.cautions().stream())
+                                .filter(text -> !text.isEmpty())
+                                .map(text -> text.endsWith(".") ? text : text + ".")
+                                .toList()));
         String index = results.sheets().stream()
                 .map(Sheet::name)
                 .filter(name -> name.equals(INDEX) && !name.equals(sheet.name()))
@@ -155,11 +164,17 @@ final class SheetWriter {
         } else if (item instanceof Block.Equation equation) {
             canvas.text(row, column, Role.TEXT, align, EquationText.of(equation.cell()));
         } else if (item instanceof Block.Address address) {
-            canvas.link(row, column, align, address.cell().place().from(sheet.name()), address.cell().place().full());
+            canvas.link(
+                    row,
+                    column,
+                    align,
+                    address.cell().place().from(sheet.name()),
+                    address.cell().place().full());
         } else if (item instanceof Block.Jump jump) {
             canvas.link(row, column, align, jump.text(), jump.to().place().full());
         } else if (item instanceof Block.SheetLink link) {
-            canvas.link(row, column, align, link.number() + "  " + link.title(), new Place(link.sheetName(), 0, 0).full());
+            canvas.link(
+                    row, column, align, link.number() + "  " + link.title(), new Place(link.sheetName(), 0, 0).full());
         }
     }
 
@@ -210,16 +225,21 @@ final class SheetWriter {
      * a constant, the trial rows of a root. Of several cases that of the first.
      */
     private @Nullable Place origin(Block.Line line) {
-        Cell cell = line.forAll() != null ? line.forAll() : line.perCase().isEmpty() ? null : line.perCase().get(0);
+        Cell cell = line.forAll() != null
+                ? line.forAll()
+                : line.perCase().isEmpty() ? null : line.perCase().get(0);
         if (cell == null || line.symbol().isEmpty() || !EquationText.isWords(line)) {
             return null;
         }
         return cell.references().values().stream()
                 .filter(reference -> reference instanceof Cell other && !canvas.isHere(other))
                 .map(reference -> ((Cell) reference).place())
-                .filter(place -> !place.sheet().equals("Constants") || line.equation().contains("Constants"))
+                .filter(place ->
+                        !place.sheet().equals("Constants") || line.equation().contains("Constants"))
                 // references have no order that is the same in every run
-                .min(Comparator.comparing(Place::sheet).thenComparing(Place::row).thenComparing(Place::column))
+                .min(Comparator.comparing(Place::sheet)
+                        .thenComparing(Place::row)
+                        .thenComparing(Place::column))
                 .orElse(null);
     }
 

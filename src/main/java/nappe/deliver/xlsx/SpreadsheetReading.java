@@ -44,7 +44,9 @@ public final class SpreadsheetReading implements Reading<Written> {
         }
         SpreadsheetReading reading = new SpreadsheetReading(cell);
         boolean handsOn = formula instanceof Formula.Symbol && cell.sureness() != Sureness.SURE;
-        String text = handsOn ? reading.handedOn((Formula.Symbol) formula) : formula.read(reading).text();
+        String text = handsOn
+                ? reading.handedOn((Formula.Symbol) formula)
+                : formula.read(reading).text();
         if (cell.sureness() == Sureness.MAY_FAIL) {
             text = "IFERROR(" + text + "," + quoted(Value.NO_RESULT) + ")";
         }
@@ -67,7 +69,9 @@ public final class SpreadsheetReading implements Reading<Written> {
     }
 
     private String handedOn(Formula.Symbol symbol) {
-        return reference(symbol.name()) instanceof Cell other ? orNotGiven(other) : read(symbol).text();
+        return reference(symbol.name()) instanceof Cell other
+                ? orNotGiven(other)
+                : read(symbol).text();
     }
 
     /** A cell that may hold words, and is not given where it is typed and somebody has emptied it: it would count as 0. */
@@ -212,9 +216,11 @@ public final class SpreadsheetReading implements Reading<Written> {
             case LOWEST_OF -> function("MIN", arguments, "");
             case TALLY -> function("COUNTIF", arguments, "");
             case IS_NUMBER -> function("ISNUMBER", arguments, "");
-            case SAME -> new Written(
-                    read(arguments.get(0)).within(ARITHMETIC) + "=" + read(arguments.get(1)).within(ARITHMETIC),
-                    Written.CONDITION);
+            case SAME ->
+                new Written(
+                        read(arguments.get(0)).within(ARITHMETIC) + "="
+                                + read(arguments.get(1)).within(ARITHMETIC),
+                        Written.CONDITION);
             case INDEX -> index(arguments);
             case IF, SQRT, EXP, LN, LOG10, SIN, COS, TAN, ASIN, ACOS, ATAN, TANH, ABS, MIN, MAX, SMALL ->
                 function(function.name(), arguments, "");
@@ -225,8 +231,7 @@ public final class SpreadsheetReading implements Reading<Written> {
     private Written matchBelow(List<Formula> arguments) {
         Written key = read(arguments.get(0));
         String column = read(arguments.get(1)).text();
-        return Written.whole(
-                "MATCH(" + key.within(ARITHMETIC) + "+1E-9*ABS(" + key.text() + ")," + column + ",1)");
+        return Written.whole("MATCH(" + key.within(ARITHMETIC) + "+1E-9*ABS(" + key.text() + ")," + column + ",1)");
     }
 
     /** Gnumeric neither guesses that a single place in a run along a row means the column, nor looks into one cell. */
@@ -238,8 +243,8 @@ public final class SpreadsheetReading implements Reading<Written> {
         }
         Cell first = run.cells().get(0);
         if (run.cells().size() == 1) {
-            return Written.whole("IF(" + place.within(ARITHMETIC) + "=1," + addressOf(first) + ","
-                    + quoted(Value.NO_RESULT) + ")");
+            return Written.whole(
+                    "IF(" + place.within(ARITHMETIC) + "=1," + addressOf(first) + "," + quoted(Value.NO_RESULT) + ")");
         }
         boolean alongARow = first.place().row() == run.cells().get(1).place().row();
         return Written.whole("INDEX(" + column + (alongARow ? ",1," : ",") + place.text() + ")");

@@ -22,8 +22,7 @@ record SymbolText(String letter, String subscript, boolean slanted) {
             return new SymbolText(symbol, "", false);
         }
         String letter = letter(parts[0]);
-        String subscript =
-                Arrays.stream(parts).skip(1).map(SymbolText::letter).collect(Collectors.joining(","));
+        String subscript = Arrays.stream(parts).skip(1).map(SymbolText::letter).collect(Collectors.joining(","));
         char first = letter.charAt(0);
         return new SymbolText(letter, subscript, Character.isLetter(first) && !(first >= 0x391 && first <= 0x3A9));
     }

@@ -26,11 +26,18 @@ final class TypedChecks {
     void set(Map<Allowed, List<Place>> places) {
         places.forEach((allowed, where) -> {
             if (allowed instanceof Allowed.Numbers numbers) {
-                check(where, number(numbers.sign()), "A number is expected",
-                        "Type a number in the unit that stands beside it: " + numbers.sign().words() + ".");
+                check(
+                        where,
+                        number(numbers.sign()),
+                        "A number is expected",
+                        "Type a number in the unit that stands beside it: "
+                                + numbers.sign().words() + ".");
             } else if (allowed instanceof Allowed.Words words) {
                 String range = words.run().fixedFrom(sheet.getSheetName());
-                check(where, helper.createFormulaListConstraint(range), "Not in the cited table",
+                check(
+                        where,
+                        helper.createFormulaListConstraint(range),
+                        "Not in the cited table",
                         "Choose one of the words in " + range + ".");
             }
         });
@@ -38,16 +45,19 @@ final class TypedChecks {
 
     private DataValidationConstraint number(Sign sign) {
         return switch (sign) {
-            case POSITIVE -> helper.createNumericConstraint(ValidationType.DECIMAL, OperatorType.GREATER_THAN, "0", null);
+            case POSITIVE ->
+                helper.createNumericConstraint(ValidationType.DECIMAL, OperatorType.GREATER_THAN, "0", null);
             case NOT_NEGATIVE ->
                 helper.createNumericConstraint(ValidationType.DECIMAL, OperatorType.GREATER_OR_EQUAL, "0", null);
-            case ANY -> helper.createNumericConstraint(ValidationType.DECIMAL, OperatorType.BETWEEN, "-1E+300", "1E+300");
+            case ANY ->
+                helper.createNumericConstraint(ValidationType.DECIMAL, OperatorType.BETWEEN, "-1E+300", "1E+300");
         };
     }
 
     private void check(List<Place> places, DataValidationConstraint constraint, String title, String text) {
         CellRangeAddressList addresses = new CellRangeAddressList();
-        places.forEach(place -> addresses.addCellRangeAddress(place.row(), place.column(), place.row(), place.column()));
+        places.forEach(
+                place -> addresses.addCellRangeAddress(place.row(), place.column(), place.row(), place.column()));
         DataValidation validation = helper.createValidation(constraint, addresses);
         validation.setErrorStyle(DataValidation.ErrorStyle.STOP);
         validation.setShowErrorBox(true);

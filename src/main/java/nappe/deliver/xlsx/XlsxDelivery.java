@@ -81,8 +81,11 @@ public final class XlsxDelivery {
         for (Sheet sheet : results.sheets()) {
             SheetWriter writer = new SheetWriter(results, sheet, styles, texts).write();
             XSSFSheet frame = workbook.createSheet(sheet.name());
-            new SheetFrame(workbook, frame, writer, results::value).set(results.furniture(), results.sheets().size());
-            parts.put(frame.getPackagePart().getPartName().getName(), writer.canvas().rows());
+            new SheetFrame(workbook, frame, writer, results::value)
+                    .set(results.furniture(), results.sheets().size());
+            parts.put(
+                    frame.getPackagePart().getPartName().getName(),
+                    writer.canvas().rows());
             written.addAll(writer.canvas().written());
         }
         workbook.setActiveSheet(0);
@@ -111,8 +114,8 @@ public final class XlsxDelivery {
         Furniture furniture = results.furniture();
         POIXMLProperties properties = workbook.getProperties();
         POIXMLProperties.CoreProperties core = properties.getCoreProperties();
-        Optional<Date> date =
-                Optional.of(Date.from(furniture.date().atStartOfDay(ZoneOffset.UTC).toInstant()));
+        Optional<Date> date = Optional.of(
+                Date.from(furniture.date().atStartOfDay(ZoneOffset.UTC).toInstant()));
         core.setTitle(furniture.project() + ", calculation " + furniture.number());
         core.setSubjectProperty(furniture.subject());
         core.setCreator(furniture.firm());

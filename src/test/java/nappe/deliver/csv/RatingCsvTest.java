@@ -21,14 +21,29 @@ class RatingCsvTest {
 
     @Test
     void isWrittenSo() {
-        Block.Table table = new Block.Table(4, "Rating of M1", List.of(head("Head (ft)"), head("Flow (ft3/s)"), head("Remark")), List.of(
-                row(Value.of(0.1 + 0.2), Value.of(1.138), "say \"when\""),
-                row(Value.of(1e-7), new Value.None("no result"), "=1+1"),
-                row(Value.of(-2), Value.of(1200), " -x"),
-                row(Value.of(3), Value.word("free"), "two\nlines, one text")));
-        Furniture furniture = new Furniture("Weaver, pretend works;=1+1", "Made-up Engineers", "Nowhere District", "NW-007", "M1", "B",
-                LocalDate.of(2026, 3, 14), "preliminary", "1f3a 99c0", "0.1.0", true,
-                List.of("Check before use."), "");
+        Block.Table table = new Block.Table(
+                4,
+                "Rating of M1",
+                List.of(head("Head (ft)"), head("Flow (ft3/s)"), head("Remark")),
+                List.of(
+                        row(Value.of(0.1 + 0.2), Value.of(1.138), "say \"when\""),
+                        row(Value.of(1e-7), new Value.None("no result"), "=1+1"),
+                        row(Value.of(-2), Value.of(1200), " -x"),
+                        row(Value.of(3), Value.word("free"), "two\nlines, one text")));
+        Furniture furniture = new Furniture(
+                "Weaver, pretend works;=1+1",
+                "Made-up Engineers",
+                "Nowhere District",
+                "NW-007",
+                "M1",
+                "B",
+                LocalDate.of(2026, 3, 14),
+                "preliminary",
+                "1f3a 99c0",
+                "0.1.0",
+                true,
+                List.of("Check before use."),
+                "");
         Results results = new Results(furniture, List.of(), List.copyOf(values.keySet()), values);
         assertThat(RatingCsv.write(results, table)).isEqualTo("""
                 # Table: Rating of M1

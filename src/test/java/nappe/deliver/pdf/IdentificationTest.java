@@ -62,8 +62,9 @@ class IdentificationTest {
     void anotherWorkbookMakesAnotherFile() {
         byte[] one = pdf(new Attachment("a.xlsx", "one".getBytes(StandardCharsets.UTF_8)));
         byte[] two = pdf(new Attachment("a.xlsx", "two".getBytes(StandardCharsets.UTF_8)));
-        assertThat(identity(one)).isNotEqualTo(identity(two)).isEqualTo(identity(
-                pdf(new Attachment("a.xlsx", "one".getBytes(StandardCharsets.UTF_8)))));
+        assertThat(identity(one))
+                .isNotEqualTo(identity(two))
+                .isEqualTo(identity(pdf(new Attachment("a.xlsx", "one".getBytes(StandardCharsets.UTF_8)))));
     }
 
     private static String identity(byte[] pdf) {

@@ -62,7 +62,8 @@ class PictureTest {
             for (int i = 0; i < texts.size(); i++) {
                 for (int j = i + 1; j < texts.size(); j++) {
                     if (Sketch.overlap(texts.get(i), texts.get(j))) {
-                        overlaps.add(texts.get(i).characters() + " on " + texts.get(j).characters());
+                        overlaps.add(texts.get(i).characters() + " on "
+                                + texts.get(j).characters());
                     }
                 }
             }
@@ -74,10 +75,12 @@ class PictureTest {
     void valuesInTheDrawingAreTextAndThoseOfTheRegister() throws IOException {
         Results results = java.util.Objects.requireNonNull(DrawnStation.all().get("foot"));
         String page = page(PdfDelivery.render(results).bytes(), "Section along the axis");
-        Drawing drawing = (Drawing) java.util.Objects.requireNonNull(results.figures().get("X1 geometry"));
+        Drawing drawing =
+                (Drawing) java.util.Objects.requireNonNull(results.figures().get("X1 geometry"));
         for (Drawing.View view : drawing.views()) {
             for (Drawing.Dimension dimension : DrawingPicture.parts(view, Drawing.Dimension.class)) {
-                assertThat(page).contains(Printed.value(results, dimension.value().cell()) + " ft");
+                assertThat(page)
+                        .contains(Printed.value(results, dimension.value().cell()) + " ft");
             }
         }
         assertThat(page).contains("4.406 ft", "1.000 ft", "scale 1:20", "100.300 ft", "State of flow: free.");

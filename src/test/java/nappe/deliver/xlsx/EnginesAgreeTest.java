@@ -11,14 +11,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Stream;
-import net.jqwik.api.Arbitraries;
-import net.jqwik.api.Arbitrary;
-import net.jqwik.api.Combinators;
-import net.jqwik.api.EdgeCasesMode;
-import net.jqwik.api.ForAll;
-import net.jqwik.api.Property;
-import net.jqwik.api.Provide;
-import net.jqwik.api.ShrinkingMode;
 import nappe.calculation.Block;
 import nappe.calculation.Block.Align;
 import nappe.calculation.Cell;
@@ -35,6 +27,14 @@ import nappe.formula.Operator;
 import nappe.formula.Value;
 import nappe.results.Results;
 import nappe.unit.Unit;
+import net.jqwik.api.Arbitraries;
+import net.jqwik.api.Arbitrary;
+import net.jqwik.api.Combinators;
+import net.jqwik.api.EdgeCasesMode;
+import net.jqwik.api.ForAll;
+import net.jqwik.api.Property;
+import net.jqwik.api.Provide;
+import net.jqwik.api.ShrinkingMode;
 
 /** Java, LibreOffice and Gnumeric give one number for one formula, leading minus signs and powers included. */
 class EnginesAgreeTest {
@@ -51,13 +51,33 @@ class EnginesAgreeTest {
 
     /** What spreadsheet programs read each in their own way when it is written as in mathematics. */
     private static final List<String> AWKWARD = List.of(
-            "-x3^2", "(-x3)^2", "-x3^-2", "(-x3)^-3", "x3^x4^x3", "(x3^x4)^x3", "x4^-x3^2", "-x3^x4^0.5", "x0-x3^2",
-            "x0*-x3^2", "-x3*-x4", "-(-x3)", "-(-x3)^2", "x3-(-x4)", "x0/x3/x4", "x0/(x3/x4)", "x0-(x3-x4)",
-            "-(x3 - x4)^2", "(x3 - x4)^2", "2^-x0", "-x3^0.5/x4", "1 - x0*-2^2");
+            "-x3^2",
+            "(-x3)^2",
+            "-x3^-2",
+            "(-x3)^-3",
+            "x3^x4^x3",
+            "(x3^x4)^x3",
+            "x4^-x3^2",
+            "-x3^x4^0.5",
+            "x0-x3^2",
+            "x0*-x3^2",
+            "-x3*-x4",
+            "-(-x3)",
+            "-(-x3)^2",
+            "x3-(-x4)",
+            "x0/x3/x4",
+            "x0/(x3/x4)",
+            "x0-(x3-x4)",
+            "-(x3 - x4)^2",
+            "(x3 - x4)^2",
+            "2^-x0",
+            "-x3^0.5/x4",
+            "1 - x0*-2^2");
 
     @Property(tries = 1, seed = "20260314", shrinking = ShrinkingMode.OFF, edgeCases = EdgeCasesMode.NONE)
     void oneNumberForOneFormula(@ForAll("many") Batch formulas) throws IOException {
-        List<Formula> all = new ArrayList<>(AWKWARD.stream().map(FormulaParser::parse).toList());
+        List<Formula> all =
+                new ArrayList<>(AWKWARD.stream().map(FormulaParser::parse).toList());
         all.addAll(formulas.all());
         Results results = results(all);
         Tame tame = new Tame(TYPED);
@@ -73,8 +93,10 @@ class EnginesAgreeTest {
         Path file = Files.createTempFile("nappe-engines", ".xlsx");
         try {
             Files.write(file, Spoiler.spoil(XlsxDelivery.render(results)));
-            assertThat(Recalculated.disagreements(Recalculated.byGnumeric(file), results, 0)).isEmpty();
-            assertThat(Recalculated.disagreements(Recalculated.byLibreOffice(file), results, 0)).isEmpty();
+            assertThat(Recalculated.disagreements(Recalculated.byGnumeric(file), results, 0))
+                    .isEmpty();
+            assertThat(Recalculated.disagreements(Recalculated.byLibreOffice(file), results, 0))
+                    .isEmpty();
         } finally {
             Files.delete(file);
         }
@@ -97,23 +119,29 @@ class EnginesAgreeTest {
 
     private static Arbitrary<Formula> leaf() {
         Arbitrary<Formula> symbols = Arbitraries.of(TYPED.keySet()).map(Formulas::symbol);
-        Arbitrary<Formula> numerals = Arbitraries.of("2", "3", "0.5", "1.522", "10", "0.07", "1e-2").map(Formulas::number);
+        Arbitrary<Formula> numerals =
+                Arbitraries.of("2", "3", "0.5", "1.522", "10", "0.07", "1e-2").map(Formulas::number);
         return Arbitraries.oneOf(symbols, numerals);
     }
 
     private static Arbitrary<Formula> larger(Arbitrary<Formula> inner) {
         Arbitrary<Formula> whole = Arbitraries.of("2", "3", "1").map(Formulas::number);
         Arbitrary<Formula> exponent = Arbitraries.oneOf(leaf(), whole, whole.map(Formula.Negation::new), inner);
-        Arbitrary<Formula> powers = Combinators.combine(inner, exponent).as((a, b) -> new Formula.Operation(Operator.POWER, a, b));
+        Arbitrary<Formula> powers =
+                Combinators.combine(inner, exponent).as((a, b) -> new Formula.Operation(Operator.POWER, a, b));
         Arbitrary<Formula> operations = Combinators.combine(Arbitraries.of(Operator.values()), inner, inner)
                 .as(Formula.Operation::new);
         Arbitrary<Formula> negations = inner.map(Formula.Negation::new);
         Arbitrary<Formula> calls = Combinators.combine(
-                        Arbitraries.of(Stream.of(Function.values()).filter(f -> f.least() == 1 && f.compareTo(Function.MATCH) < 0).toList()), inner)
+                        Arbitraries.of(Stream.of(Function.values())
+                                .filter(f -> f.least() == 1 && f.compareTo(Function.MATCH) < 0)
+                                .toList()),
+                        inner)
                 .as((function, x) -> Formulas.call(function, x));
         Arbitrary<Formula> extremes = Combinators.combine(Arbitraries.of(Function.MIN, Function.MAX), inner, inner)
                 .as((function, a, b) -> Formulas.call(function, a, b));
-        Arbitrary<Formula> choices = Combinators.combine(Arbitraries.of(Comparator.values()), inner, inner, leaf(), inner)
+        Arbitrary<Formula> choices = Combinators.combine(
+                        Arbitraries.of(Comparator.values()), inner, inner, leaf(), inner)
                 .as((comparator, a, b, yes, no) -> Formulas.iff(Formulas.compare(a, comparator, b), yes, no));
         return Arbitraries.oneOf(powers, operations, operations, negations, calls, extremes, choices);
     }
@@ -123,7 +151,8 @@ class EnginesAgreeTest {
         List<Block.Row> rows = new ArrayList<>();
         Map<String, Reference> known = new LinkedHashMap<>();
         TYPED.forEach((name, value) -> {
-            Cell cell = Cell.typed(Cell.Kind.ENTRY, new Place(SHEET, 5 + rows.size(), 1), name, Unit.one(), Value.of(value));
+            Cell cell = Cell.typed(
+                    Cell.Kind.ENTRY, new Place(SHEET, 5 + rows.size(), 1), name, Unit.one(), Value.of(value));
             known.put(name, cell);
             add(cell, cells, rows);
         });

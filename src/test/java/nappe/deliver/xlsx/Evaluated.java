@@ -47,14 +47,15 @@ final class Evaluated {
 
             @Override
             public List<Value> column(String symbol) {
-                Run run = (Run) java.util.Objects.requireNonNull(cell.references().get(symbol), symbol);
+                Run run =
+                        (Run) java.util.Objects.requireNonNull(cell.references().get(symbol), symbol);
                 return run.cells().stream().map(values::get).toList();
             }
 
             @Override
             public double size(Unit unit) {
                 return cell.references().get("1 " + unit.text()) instanceof Cell size
-                        && values.get(size) instanceof Value.Number number
+                                && values.get(size) instanceof Value.Number number
                         ? number.value()
                         : 1;
             }

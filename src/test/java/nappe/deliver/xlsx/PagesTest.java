@@ -42,7 +42,8 @@ class PagesTest {
         Pages pages = pages(90, 80);
         assertThat(pages.ends(HEAD, List.of())).isEmpty();
         assertThat(pages.ends(HEAD, List.of(new Pages.Kept(30, 55)))).containsExactly(29);
-        assertThat(pages.ends(HEAD, List.of(new Pages.Kept(28, 33), new Pages.Kept(30, 55)))).containsExactly(29);
+        assertThat(pages.ends(HEAD, List.of(new Pages.Kept(28, 33), new Pages.Kept(30, 55))))
+                .containsExactly(29);
     }
 
     @Test

@@ -46,10 +46,16 @@ public final class Recalculated {
                     </oor:items>
                     """);
             List<String> command = new ArrayList<>(List.of(
-                    "soffice", "-env:UserInstallation=" + folder.resolve("profile").toUri(), "--headless",
-                    "--convert-to", "xlsx", "--outdir", folder.resolve("out").toString()));
+                    "soffice",
+                    "-env:UserInstallation=" + folder.resolve("profile").toUri(),
+                    "--headless",
+                    "--convert-to",
+                    "xlsx",
+                    "--outdir",
+                    folder.resolve("out").toString()));
             for (int i = 0; i < workbooks.size(); i++) {
-                command.add(Files.copy(workbooks.get(i), folder.resolve("book" + i + ".xlsx")).toString());
+                command.add(Files.copy(workbooks.get(i), folder.resolve("book" + i + ".xlsx"))
+                        .toString());
             }
             Tools.run(command.toArray(String[]::new));
             List<Map<String, Object>> values = new ArrayList<>();
@@ -116,9 +122,8 @@ public final class Recalculated {
         try (InputStream in = Files.newInputStream(workbook);
                 XSSFWorkbook book = new XSSFWorkbook(in)) {
             book.forEach(sheet -> sheet.forEach(row -> row.forEach(cell -> {
-                CellType type = cell.getCellType() == CellType.FORMULA
-                        ? cell.getCachedFormulaResultType()
-                        : cell.getCellType();
+                CellType type =
+                        cell.getCellType() == CellType.FORMULA ? cell.getCachedFormulaResultType() : cell.getCellType();
                 Object value = switch (type) {
                     case NUMERIC -> (Object) cell.getNumericCellValue();
                     case BOOLEAN -> cell.getBooleanCellValue() ? "TRUE" : "FALSE";
@@ -144,7 +149,8 @@ public final class Recalculated {
                 return work.in(folder);
             } finally {
                 try (Stream<Path> all = Files.walk(folder)) {
-                    all.sorted(Comparator.reverseOrder()).forEach(path -> path.toFile().delete());
+                    all.sorted(Comparator.reverseOrder())
+                            .forEach(path -> path.toFile().delete());
                 }
             }
         } catch (IOException e) {

@@ -45,7 +45,8 @@ public final class Spoiler {
                 if (entry.getName().startsWith("xl/worksheets/sheet")) {
                     String text = new String(part, StandardCharsets.UTF_8);
                     Matcher numbers = NUMBER.matcher(text);
-                    found += (int) numbers.results().count() + (int) WORD.matcher(text).results().count();
+                    found += (int) numbers.results().count()
+                            + (int) WORD.matcher(text).results().count();
                     text = WORD.matcher(numbers.replaceAll(number)).replaceAll(word);
                     part = text.getBytes(StandardCharsets.UTF_8);
                 }

@@ -127,13 +127,11 @@ class SpreadsheetReadingTest {
                 .isEqualTo("INDEX('Tables'!$B$4:$B$38,B1)");
         assertThat(text(Formulas.call(Function.SMALL, run, a), Sureness.SURE))
                 .isEqualTo("SMALL('Tables'!$B$4:$B$38,B1)");
-        assertThat(text(Formulas.call(Function.LOWEST_OF, run), Sureness.SURE))
-                .isEqualTo("MIN('Tables'!$B$4:$B$38)");
+        assertThat(text(Formulas.call(Function.LOWEST_OF, run), Sureness.SURE)).isEqualTo("MIN('Tables'!$B$4:$B$38)");
         assertThat(text(Formulas.call(Function.TALLY, run, Formulas.word("met")), Sureness.SURE))
                 .isEqualTo("COUNTIF('Tables'!$B$4:$B$38,\"met\")");
         assertThat(text(new Formula.Summary("last", "run"), Sureness.SURE)).isEqualTo("'Tables'!B38");
-        assertThat(text(new Formula.Summary("highest", "run"), Sureness.SURE))
-                .isEqualTo("MAX('Tables'!$B$4:$B$38)");
+        assertThat(text(new Formula.Summary("highest", "run"), Sureness.SURE)).isEqualTo("MAX('Tables'!$B$4:$B$38)");
     }
 
     @Test
@@ -158,7 +156,8 @@ class SpreadsheetReadingTest {
     @Test
     void wordsArePassedOnInTheOrderOfTheSymbols() {
         assertThat(text(FormulaParser.parse("v*a + u/v"), Sureness.MAY_BE_WORDS))
-                .isEqualTo("IF(ISNUMBER(B8),IF(ISNUMBER(B7),B8*B1+B7/B8,IF(B7=\"\",\"not given\",B7)),IF(B8=\"\",\"not given\",B8))");
+                .isEqualTo(
+                        "IF(ISNUMBER(B8),IF(ISNUMBER(B7),B8*B1+B7/B8,IF(B7=\"\",\"not given\",B7)),IF(B8=\"\",\"not given\",B8))");
     }
 
     @Test
@@ -172,12 +171,13 @@ class SpreadsheetReadingTest {
     @Test
     void whatTheFormulaTestsItselfIsNotGuarded() {
         Formula isNumber = Formulas.call(Function.IS_NUMBER, Formulas.symbol("u"));
-        assertThat(text(Formulas.iff(isNumber, FormulaParser.parse("u + v"), Formulas.number("0")), Sureness.MAY_BE_WORDS))
+        assertThat(text(
+                        Formulas.iff(isNumber, FormulaParser.parse("u + v"), Formulas.number("0")),
+                        Sureness.MAY_BE_WORDS))
                 .isEqualTo("IF(ISNUMBER(B8),IF(ISNUMBER(B7),B7+B8,0),IF(B8=\"\",\"not given\",B8))");
         assertThat(text(FormulaParser.parse("if(u = \"free\", a, b)"), Sureness.SURE))
                 .isEqualTo("IF(B7=\"free\",B1,B2)");
-        assertThat(text(FormulaParser.parse("u"), Sureness.MAY_BE_WORDS))
-                .isEqualTo("IF(B7=\"\",\"not given\",B7)");
+        assertThat(text(FormulaParser.parse("u"), Sureness.MAY_BE_WORDS)).isEqualTo("IF(B7=\"\",\"not given\",B7)");
     }
 
     @Test
@@ -200,7 +200,6 @@ class SpreadsheetReadingTest {
     }
 
     private static Cell unsure(int row) {
-        return Cell.typed(
-                Cell.Kind.ENTRY, new Place("S", row, 1), "", Unit.one(), new Value.None(Value.NOT_GIVEN));
+        return Cell.typed(Cell.Kind.ENTRY, new Place("S", row, 1), "", Unit.one(), new Value.None(Value.NOT_GIVEN));
     }
 }

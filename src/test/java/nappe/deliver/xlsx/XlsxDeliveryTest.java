@@ -36,7 +36,8 @@ class XlsxDeliveryTest {
 
     @Test
     void storedValuesAreThoseThatWereComputed() throws IOException {
-        assertThat(Recalculated.disagreements(Recalculated.asStored(file(WORKBOOK)), SAMPLE)).isEmpty();
+        assertThat(Recalculated.disagreements(Recalculated.asStored(file(WORKBOOK)), SAMPLE))
+                .isEmpty();
     }
 
     @Test
@@ -59,7 +60,8 @@ class XlsxDeliveryTest {
 
     @Test
     void spoilingSpoilsEveryLiveCell() throws IOException {
-        long live = SAMPLE.cells().stream().filter(cell -> cell.formula() != null).count();
+        long live =
+                SAMPLE.cells().stream().filter(cell -> cell.formula() != null).count();
         assertThat(Recalculated.disagreements(Recalculated.asStored(file(Spoiler.spoil(WORKBOOK))), SAMPLE))
                 .hasSize((int) live);
     }
@@ -131,7 +133,8 @@ class XlsxDeliveryTest {
                 for (int column = 0; column < 40; column++) {
                     var cell = sheet.getRow(region.getFirstRow()).getCell(column);
                     CellType expected = column == 0 ? CellType.STRING : CellType.BLANK;
-                    assertThat(cell == null ? CellType.BLANK : cell.getCellType()).isEqualTo(expected);
+                    assertThat(cell == null ? CellType.BLANK : cell.getCellType())
+                            .isEqualTo(expected);
                 }
             }));
         }
@@ -154,7 +157,8 @@ class XlsxDeliveryTest {
             var symbol = at(book, new Place("F1 Flume", 10, 2)).getRichStringCellValue();
             assertThat(symbol.getString()).isEqualTo("ha");
             assertThat(symbol.numFormattingRuns()).isEqualTo(2);
-            assertThat(at(book, new Place("F1 Flume", 17, 2)).getStringCellValue()).isEqualTo("\u03b4z");
+            assertThat(at(book, new Place("F1 Flume", 17, 2)).getStringCellValue())
+                    .isEqualTo("\u03b4z");
         }
     }
 
@@ -173,7 +177,10 @@ class XlsxDeliveryTest {
             assertThat(properties.getCoreProperties().getCreated()).isEqualTo("2026-03-14T00:00:00Z");
             assertThat(properties.getCoreProperties().getModified()).isEqualTo("2026-03-14T00:00:00Z");
             assertThat(properties.getCoreProperties().getCreator()).isEqualTo("Made-up Engineers");
-            assertThat(properties.getCustomProperties().getProperty("Input fingerprint").getLpwstr())
+            assertThat(properties
+                            .getCustomProperties()
+                            .getProperty("Input fingerprint")
+                            .getLpwstr())
                     .isEqualTo("1f3a 99c0 5e77 0b12");
         }
     }
@@ -185,7 +192,10 @@ class XlsxDeliveryTest {
             assertThat(head).isEqualTo("&8Project Weaver && Fox pretend works\nCalculation NW-007");
             assertThat(book.getSheetAt(1).getHeader().getRight())
                     .isEqualTo("&8Revision B, for checking\nSheet 2 of 3, page &P of &N");
-            book.forEach(sheet -> assertThat(((XSSFSheet) sheet).getCTWorksheet().getHeaderFooter().getOddFooter())
+            book.forEach(sheet -> assertThat(((XSSFSheet) sheet)
+                            .getCTWorksheet()
+                            .getHeaderFooter()
+                            .getOddFooter())
                     .hasSizeLessThan(256)
                     .contains("1f3a 99c0 5e77 0b12"));
         }
@@ -204,7 +214,8 @@ class XlsxDeliveryTest {
     @Test
     void aCellThatStandsNowhereIsAFault() {
         Cell lost = Cell.typed(Cell.Kind.ENTRY, new Place("Empty", 9, 9), "x", Unit.one(), Value.of(1));
-        Results results = new Results(Sample.FURNITURE, withNote("note").sheets(), List.of(lost), Map.of(lost, Value.of(1)));
+        Results results =
+                new Results(Sample.FURNITURE, withNote("note").sheets(), List.of(lost), Map.of(lost, Value.of(1)));
         assertThatThrownBy(() -> XlsxDelivery.render(results)).hasMessage("on no sheet: ['Empty'!J10 (x)]");
     }
 
