@@ -33,7 +33,7 @@ final class Layout {
         HEAD_UNIT("Head reported in", true, 20, "Unit of head beside the working one."),
         DATUM("Elevations refer to", true, 120, "Datum of every level and elevation."),
         WORKED_CASE("Case worked in full", false, 40, "Name of a case on the sheet Flows; the first where blank."),
-        RELEASE("Purpose of release", false, 2000, "Printed on the cover of anything not issued."),
+        RELEASE("Purpose of release", false, 400, "Printed on the cover of anything not issued."),
         SEAL("Space for a seal on the cover", true, 3, "yes or no.");
 
         private final String text;

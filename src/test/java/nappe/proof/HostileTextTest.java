@@ -53,7 +53,8 @@ class HostileTextTest {
     private static final int NAME = 60;
     private static final int LINE = 120;
     private static final int TEXT = 2000;
-    private static final Pattern FAULT = Pattern.compile("(?m)^\\S+, sheet (\\w+), cell ([A-Z]+[0-9]+): .*\\(fault: [a-z-]+\\)$");
+    private static final Pattern FAULT =
+            Pattern.compile("(?m)^\\S+, sheet (\\w+), cell ([A-Z]+[0-9]+): .*\\(fault: [a-z-]+\\)$");
     private static final Pattern QUOTED = Pattern.compile("\"(?:[^\"]|\"\")*\"");
 
     @TempDir
@@ -69,9 +70,23 @@ class HostileTextTest {
     void findSpots() throws IOException {
         List<Spot> all = new ArrayList<>();
         SampleStations.headworks().change(book -> {
-            Map<String, Integer> labels = new LinkedHashMap<>(Map.of("Project", LINE, "Firm", NAME, "Client", NAME,
-                    "Calculation number", NAME, "Subject", LINE, "Elevations refer to", LINE, "Purpose of release", TEXT));
-            labels.forEach((label, longest) -> all.add(new Spot("Project", "B" + (row(book.getSheet("Project"), label) + 1), longest)));
+            Map<String, Integer> labels = new LinkedHashMap<>(Map.of(
+                    "Project",
+                    LINE,
+                    "Firm",
+                    NAME,
+                    "Client",
+                    NAME,
+                    "Calculation number",
+                    NAME,
+                    "Subject",
+                    LINE,
+                    "Elevations refer to",
+                    LINE,
+                    "Purpose of release",
+                    400));
+            labels.forEach((label, longest) ->
+                    all.add(new Spot("Project", "B" + (row(book.getSheet("Project"), label) + 1), longest)));
             project = "B" + (row(book.getSheet("Project"), "Project") + 1);
             subject = "B" + (row(book.getSheet("Project"), "Subject") + 1);
             release = "B" + (row(book.getSheet("Project"), "Purpose of release") + 1);
@@ -100,7 +115,9 @@ class HostileTextTest {
         XSSFSheet sheet = book.getSheet(name);
         int first = name.equals("Project") ? row(sheet, "Tag") : 0;
         for (int row = first; row <= sheet.getLastRowNum(); row++) {
-            for (int column = 0; sheet.getRow(row) != null && column < sheet.getRow(row).getLastCellNum(); column++) {
+            for (int column = 0;
+                    sheet.getRow(row) != null && column < sheet.getRow(row).getLastCellNum();
+                    column++) {
                 if (text(sheet, row, column).equals(head)) {
                     for (int i = 1; i <= rows; i++) {
                         all.add(new Spot(name, CellReference.convertNumToColString(column) + (row + 1 + i), longest));
@@ -127,18 +144,18 @@ class HostileTextTest {
     }
 
     private static final List<String> HOSTILE = List.of(
-                "<script>&amp;</b>",
-                "${7*7} [[${7*7}]] *{x} @{x}",
-                "[(${7*7})] #{x} ~{x} th:text",
-                "=1+1",
-                "@SUM(1) +1+1",
-                "]]> <![CDATA[ <!--",
-                "<!DOCTYPE a [<!ENTITY b \"c\">]>",
-                "&P &L &&P &\"Arial\"&D",
-                "\"double\" 'single' \u201ctwo\u201d \\",
-                "{\\b} %s %n {0} $1 \\1 \\u0041",
-                "_x005F_ & _x00e4_",
-                "\u03a9\u03bc\u03ad\u03b3\u03b1 \u0416\u0443\u043a \u0141\u00f3d\u017a");
+            "<script>&amp;</b>",
+            "${7*7} [[${7*7}]] *{x} @{x}",
+            "[(${7*7})] #{x} ~{x} th:text",
+            "=1+1",
+            "@SUM(1) +1+1",
+            "]]> <![CDATA[ <!--",
+            "<!DOCTYPE a [<!ENTITY b \"c\">]>",
+            "&P &L &&P &\"Arial\"&D",
+            "\"double\" 'single' \u201ctwo\u201d \\",
+            "{\\b} %s %n {0} $1 \\1 \\u0041",
+            "_x005F_ & _x00e4_",
+            "\u03a9\u03bc\u03ad\u03b3\u03b1 \u0416\u0443\u043a \u0141\u00f3d\u017a");
     private static final int RUNS = 3;
 
     private static String mark(int spot) {
@@ -157,7 +174,9 @@ class HostileTextTest {
         StringWriter err = new StringWriter();
         try {
             int status = Nappe.run(
-                    new String[] {"issue", input.toString(), "-o", out.toString()}, new PrintWriter(said, true), new PrintWriter(err, true));
+                    new String[] {"issue", input.toString(), "-o", out.toString()},
+                    new PrintWriter(said, true),
+                    new PrintWriter(err, true));
             return new Said(status, said.toString(), err.toString());
         } finally {
             Locale.setDefault(locale);
@@ -203,8 +222,14 @@ class HostileTextTest {
     private void refused(Said said, List<Spot> where) {
         assertThat(said.status()).as(said.err()).isEqualTo(3);
         assertThat(said.out()).isEmpty();
-        List<String> told = FAULT.matcher(said.err()).results().map(found -> found.group(1) + "!" + found.group(2)).toList();
-        assertThat(told).as(said.err()).containsExactlyInAnyOrderElementsOf(where.stream().map(Spot::cell).toList());
+        List<String> told = FAULT.matcher(said.err())
+                .results()
+                .map(found -> found.group(1) + "!" + found.group(2))
+                .toList();
+        assertThat(told)
+                .as(said.err())
+                .containsExactlyInAnyOrderElementsOf(
+                        where.stream().map(Spot::cell).toList());
         assertThat(said.err()).doesNotContain("\tat ", "Exception", "nappe.");
         assertThat(said.err().lines()).allMatch(line -> line.length() < 400);
     }
@@ -216,7 +241,8 @@ class HostileTextTest {
             int first = (i + run * HOSTILE.size() / RUNS) % HOSTILE.size();
             List<String> turned = new ArrayList<>(HOSTILE.subList(first, HOSTILE.size()));
             turned.addAll(HOSTILE.subList(0, first));
-            boolean isShort = spots.get(i).longest() < TEXT || spots.get(i).address().equals(release);
+            boolean isShort =
+                    spots.get(i).longest() < TEXT || spots.get(i).address().equals(release);
             words.put(spots.get(i), words(isShort ? turned.get(0) : String.join(" ", turned), i));
         }
         return words;
@@ -233,13 +259,17 @@ class HostileTextTest {
         inWorkbook(words, one(out, ".xlsx"));
         inPdf(words, one(out, ".pdf"));
         String csv = Files.readString(one(out, ".csv"));
-        assertThat(csv.lines()).noneMatch(line -> line.matches("\"?\\s*[=+@].*") || line.matches(".*[,;]\"?\\s*[=+@].*"));
+        assertThat(csv.lines())
+                .noneMatch(line -> line.matches("\"?\\s*[=+@].*") || line.matches(".*[,;]\"?\\s*[=+@].*"));
         assertThat(Files.readString(one(out, "contents.txt"))).contains(words.get(spot("Project", project)));
         workbooks.put("run " + run, one(out, ".xlsx"));
     }
 
     private Spot spot(String sheet, String address) {
-        return spots.stream().filter(s -> s.sheet().equals(sheet) && s.address().equals(address)).findFirst().orElseThrow();
+        return spots.stream()
+                .filter(s -> s.sheet().equals(sheet) && s.address().equals(address))
+                .findFirst()
+                .orElseThrow();
     }
 
     private void inWorkbook(Map<Spot, String> words, Path file) throws IOException {
@@ -257,8 +287,9 @@ class HostileTextTest {
                 assertThat(book.getSheetName(i)).doesNotContain(mark(0).substring(0, 2));
             }
         }
-        assertThat(formulas).isNotEmpty().noneMatch(formula ->
-                QUOTED.matcher(formula).replaceAll("").matches(".*(q1\\d\\dq|7\\*7|1\\+1).*"));
+        assertThat(formulas)
+                .isNotEmpty()
+                .noneMatch(formula -> QUOTED.matcher(formula).replaceAll("").matches(".*(q1\\d\\dq|7\\*7|1\\+1).*"));
         String all = String.join("\n", texts);
         List<String> missing = new ArrayList<>();
         words.forEach((spot, said) -> {
@@ -283,10 +314,14 @@ class HostileTextTest {
         try (PdfReader reader = new PdfReader(Files.readAllBytes(file))) {
             String said = words.get(spot("Project", subject));
             assertThat(reader.getInfo().get("Title")).contains(said);
-            String title = DocumentBuilderFactory.newInstance().newDocumentBuilder()
-                    .parse(new ByteArrayInputStream(reader.getMetadata())).getDocumentElement().getTextContent();
+            String title = DocumentBuilderFactory.newInstance()
+                    .newDocumentBuilder()
+                    .parse(new ByteArrayInputStream(reader.getMetadata()))
+                    .getDocumentElement()
+                    .getTextContent();
             assertThat(title).contains(said);
-            assertThat(new String(Files.readAllBytes(file), StandardCharsets.ISO_8859_1)).doesNotContain("/JavaScript", "/URI", "/Launch");
+            assertThat(new String(Files.readAllBytes(file), StandardCharsets.ISO_8859_1))
+                    .doesNotContain("/JavaScript", "/URI", "/Launch");
         } catch (javax.xml.parsers.ParserConfigurationException | org.xml.sax.SAXException e) {
             throw new AssertionError(e);
         }
@@ -298,7 +333,8 @@ class HostileTextTest {
         Matcher marks = Pattern.compile("q1(\\d\\d)q").matcher(solid);
         while (marks.find()) {
             String typed = solid(words.get(spots.get(Integer.parseInt(marks.group(1)))));
-            assertThat(solid.substring(Math.max(0, marks.end() - typed.length()), marks.end())).isEqualTo(typed);
+            assertThat(solid.substring(Math.max(0, marks.end() - typed.length()), marks.end()))
+                    .isEqualTo(typed);
         }
         assertThat(solid).doesNotContain("[[49]]", "[(49)]", "49*{x}");
     }
@@ -314,7 +350,9 @@ class HostileTextTest {
         Path out = Files.createTempDirectory(folder, "out");
         Said said = issue(filled(words), out);
         assertThat(said.status()).as(said.err()).isZero();
-        assertThat(said.err()).contains("U+6C34", "U+05DE", "U+0621", "U+1F4A7", "shows a box").doesNotContain("Exception");
+        assertThat(said.err())
+                .contains("U+6C34", "U+05DE", "U+0621", "U+1F4A7", "shows a box")
+                .doesNotContain("Exception");
         inWorkbook(words, one(out, ".xlsx"));
         String pdf = solid(pdfText(one(out, ".pdf")));
         for (int i = 0; i < spots.size(); i++) {
@@ -325,7 +363,8 @@ class HostileTextTest {
 
     @Test
     void charactersThatCannotBeSeenAreRefusedAtTheirCell() throws IOException {
-        for (String odd : List.of("\u0007", "\u0000", "\u001b[2J", "\u007f", "\u0085", "\ud800", "\udc00\ud800", "\uffff")) {
+        for (String odd :
+                List.of("\u0007", "\u0000", "\u001b[2J", "\u007f", "\u0085", "\ud800", "\udc00\ud800", "\uffff")) {
             Map<Spot, String> words = new LinkedHashMap<>();
             spots.forEach(spot -> words.put(spot, "a" + odd + "b"));
             Said said = issue(raw(words), folder.resolve("none"));
@@ -340,7 +379,9 @@ class HostileTextTest {
         Filler filler = SampleStations.headworks().project("Case worked in full", "");
         words.forEach((spot, text) -> {
             StringBuilder escaped = new StringBuilder();
-            text.chars().forEach(c -> escaped.append(c >= ' ' && c < 127 ? String.valueOf((char) c) : String.format("_x%04X_", c)));
+            text.chars()
+                    .forEach(c -> escaped.append(
+                            c >= ' ' && c < 127 ? String.valueOf((char) c) : String.format("_x%04X_", c)));
             filler.set(spot.sheet(), spot.address(), escaped.toString());
         });
         return filler;
@@ -357,7 +398,9 @@ class HostileTextTest {
     void nineteenHundredCharactersAreRefusedWhereTheyHaveNoRoom() throws IOException {
         Map<Spot, String> words = new LinkedHashMap<>();
         spots.forEach(spot -> words.put(spot, "w".repeat(1900)));
-        refused(issue(filled(words), folder.resolve("none")), spots.stream().filter(spot -> spot.longest() < 1900).toList());
+        refused(
+                issue(filled(words), folder.resolve("none")),
+                spots.stream().filter(spot -> spot.longest() < 1900).toList());
     }
 
     /** Each as long as it may be, without a blank, of a letter of its own; what stands on every page is a line long. */
@@ -367,7 +410,12 @@ class HostileTextTest {
         for (int i = 0; i < spots.size(); i++) {
             Spot spot = spots.get(i);
             int longest = spot.address().equals(release) && spot.sheet().equals("Project") ? LINE : spot.longest();
-            boolean isLong = longest > LINE && (i == 0 || !spots.get(i - 1).address().substring(0, 1).equals(spot.address().substring(0, 1)));
+            boolean isLong = longest > LINE
+                    && (i == 0
+                            || !spots.get(i - 1)
+                                    .address()
+                                    .substring(0, 1)
+                                    .equals(spot.address().substring(0, 1)));
             words.put(spot, String.valueOf((char) (0x410 + i)).repeat(isLong ? 1900 : Math.min(longest, LINE)));
         }
         Path out = Files.createTempDirectory(folder, "out");
@@ -388,7 +436,8 @@ class HostileTextTest {
             if (!book.contains(text)) {
                 missing.add(spot.cell() + " in the workbook");
             }
-            // a text that runs on over pages has their furniture between; the furniture and the figures cut what is too long for them
+            // a text that runs on over pages has their furniture between; the furniture and the figures cut what is too
+            // long for them
             long letters = pdf.chars().filter(c -> c == text.charAt(0)).count();
             if (letters < text.length() || !inFurnitureOrFigure(spot) && letters % text.length() != 0) {
                 missing.add(spot.cell() + " in the PDF: " + letters + " of " + text.length());
@@ -406,18 +455,27 @@ class HostileTextTest {
     @AfterAll
     void anotherProgramOpensEveryWorkbook() throws IOException {
         Path books = Files.createDirectory(folder.resolve("books"));
-        List<String> command = new ArrayList<>(List.of("soffice", "-env:UserInstallation=" + folder.resolve("profile").toUri(),
-                "--headless", "--convert-to", "pdf", "--outdir", folder.resolve("printed").toString()));
+        List<String> command = new ArrayList<>(List.of(
+                "soffice",
+                "-env:UserInstallation=" + folder.resolve("profile").toUri(),
+                "--headless",
+                "--convert-to",
+                "pdf",
+                "--outdir",
+                folder.resolve("printed").toString()));
         List<String> texts = List.copyOf(workbooks.keySet());
         for (int i = 0; i < texts.size(); i++) {
-            command.add(Files.copy(workbooks.get(texts.get(i)), books.resolve("book" + i + ".xlsx")).toString());
+            command.add(Files.copy(workbooks.get(texts.get(i)), books.resolve("book" + i + ".xlsx"))
+                    .toString());
         }
         Tools.require("soffice", "LibreOffice");
         Tools.run(command.toArray(String[]::new));
         for (int i = 0; i < texts.size(); i++) {
             String printed = solid(pdfText(folder.resolve("printed/book" + i + ".pdf")));
             if (texts.get(i).startsWith("run")) {
-                assertThat(HOSTILE.stream().filter(text -> !printed.contains(solid(text)))).as(texts.get(i)).isEmpty();
+                assertThat(HOSTILE.stream().filter(text -> !printed.contains(solid(text))))
+                        .as(texts.get(i))
+                        .isEmpty();
             }
             assertThat(printed).doesNotContain("[[49]]", "Err:5", "#NAME?");
         }

@@ -21,16 +21,19 @@ record PdfBoxes(List<Page> pages) {
 
         @Override
         public String toString() {
-            return String.format(java.util.Locale.ROOT, "\"%s\" at %.0f..%.0f, %.0f..%.0f", text, left, right, top, bottom);
+            return String.format(
+                    java.util.Locale.ROOT, "\"%s\" at %.0f..%.0f, %.0f..%.0f", text, left, right, top, bottom);
         }
     }
 
     /** A page with its size. */
     record Page(int number, double width, double height, List<Word> words) {}
 
-    private static final Pattern PAGE = Pattern.compile("<page width=\"([0-9.]+)\" height=\"([0-9.]+)\">(.*?)</page>", Pattern.DOTALL);
+    private static final Pattern PAGE =
+            Pattern.compile("<page width=\"([0-9.]+)\" height=\"([0-9.]+)\">(.*?)</page>", Pattern.DOTALL);
     private static final Pattern WORD = Pattern.compile(
-            "<word xMin=\"([-0-9.]+)\" yMin=\"([-0-9.]+)\" xMax=\"([-0-9.]+)\" yMax=\"([-0-9.]+)\">(.*?)</word>", Pattern.DOTALL);
+            "<word xMin=\"([-0-9.]+)\" yMin=\"([-0-9.]+)\" xMax=\"([-0-9.]+)\" yMax=\"([-0-9.]+)\">(.*?)</word>",
+            Pattern.DOTALL);
     private static final double MM = 72 / 25.4;
     private static final double SLACK = 0.6;
     private static final Pattern LABEL = Pattern.compile("\\d+-\\d+");
@@ -46,7 +49,11 @@ record PdfBoxes(List<Page> pages) {
             List<Word> words = new ArrayList<>();
             Matcher word = WORD.matcher(page.group(3));
             while (word.find()) {
-                String text = word.group(5).replace("&lt;", "<").replace("&gt;", ">").replace("&quot;", "\"").replace("&amp;", "&");
+                String text = word.group(5)
+                        .replace("&lt;", "<")
+                        .replace("&gt;", ">")
+                        .replace("&quot;", "\"")
+                        .replace("&amp;", "&");
                 words.add(new Word(number(word, 1), number(word, 2), number(word, 3), number(word, 4), text));
             }
             pages.add(new Page(pages.size() + 1, number(page, 1), number(page, 2), words));

@@ -30,7 +30,9 @@ class StrangerTest {
     Path folder;
 
     private static String flat(String text) {
-        return text.replace('\u2212', '-').replaceAll("[\\s\\p{Z}\\u200b]+", " ").strip();
+        return text.replace('\u2212', '-')
+                .replaceAll("[\\s\\p{Z}\\u200b]+", " ")
+                .strip();
     }
 
     /** The text of each page in the order of drawing: head and foot, the content, the label of the page. */
@@ -68,7 +70,8 @@ class StrangerTest {
             }
             due.forEach((word, times) -> {
                 if (there.getOrDefault(word, 0) < times) {
-                    missing.add(sheet.name() + ": " + word + " " + there.getOrDefault(word, 0) + " times, due " + times);
+                    missing.add(
+                            sheet.name() + ": " + word + " " + there.getOrDefault(word, 0) + " times, due " + times);
                 }
             });
         }
@@ -86,11 +89,12 @@ class StrangerTest {
                 }
             });
         } else if (block instanceof Block.Table table) {
-            table.rows().forEach(row -> row.items().forEach(item -> {
-                if (item instanceof Block.Content content) {
-                    cells.add(content.cell());
-                }
-            }));
+            table.rows()
+                    .forEach(row -> row.items().forEach(item -> {
+                        if (item instanceof Block.Content content) {
+                            cells.add(content.cell());
+                        }
+                    }));
         }
         return cells;
     }
@@ -113,13 +117,26 @@ class StrangerTest {
         int sheets = sample.results().sheets().size();
         int before = 0;
         // the command line issues under its own version, which is part of the fingerprint
-        String fingerprint = Files.readString(Issued.of(name).pdf().resolveSibling("contents.txt")).lines()
-                .filter(line -> line.startsWith("fingerprint: ")).findFirst().orElseThrow().substring("fingerprint: ".length());
+        String fingerprint = Files.readString(Issued.of(name).pdf().resolveSibling("contents.txt"))
+                .lines()
+                .filter(line -> line.startsWith("fingerprint: "))
+                .findFirst()
+                .orElseThrow()
+                .substring("fingerprint: ".length());
         for (String page : pages(name)) {
             String flat = flat(page);
-            assertThat(flat).contains(furniture.cautions().stream().map(StrangerTest::flat).toList());
-            assertThat(flat).contains(flat(furniture.release()), "Fingerprint " + fingerprint, "Revision " + furniture.revision() + " ",
-                    furniture.date().toString(), flat(furniture.project()), flat(furniture.subject()));
+            assertThat(flat)
+                    .contains(furniture.cautions().stream()
+                            .map(StrangerTest::flat)
+                            .toList());
+            assertThat(flat)
+                    .contains(
+                            flat(furniture.release()),
+                            "Fingerprint " + fingerprint,
+                            "Revision " + furniture.revision() + " ",
+                            furniture.date().toString(),
+                            flat(furniture.project()),
+                            flat(furniture.subject()));
             int sheet = Integer.parseInt(PdfPages.sheetOf(page).split(" ")[0]);
             assertThat(sheet).isBetween(Math.max(1, before), before + 1);
             before = sheet;
@@ -132,7 +149,9 @@ class StrangerTest {
     @ValueSource(strings = {"headworks.xlsx", "return-weir.xlsx"})
     void noWordStandsInAMarginOrOnAnother(String name) throws IOException {
         PdfBoxes boxes = PdfBoxes.of(Issued.of(name).pdf(), folder);
-        assertThat(boxes.pages()).hasSameSizeAs(pages(name)).allMatch(page -> page.words().size() > 50);
+        assertThat(boxes.pages())
+                .hasSameSizeAs(pages(name))
+                .allMatch(page -> page.words().size() > 50);
         boxes.assertWithinMargins();
         boxes.assertNoneOverlap();
     }
@@ -148,9 +167,12 @@ class StrangerTest {
                     headings.add(flat(heading.text()));
                 } else if (block instanceof Block.Table table) {
                     headings.add(flat(table.title()));
-                    headings.add(flat(String.join(" ", table.columns().stream().map(Block.Column::head).toList())));
+                    headings.add(flat(String.join(
+                            " ",
+                            table.columns().stream().map(Block.Column::head).toList())));
                 } else if (block instanceof Block.Lines lines) {
-                    lines.lines().stream().filter(line -> line.kind() == Block.LineKind.HEADING)
+                    lines.lines().stream()
+                            .filter(line -> line.kind() == Block.LineKind.HEADING)
                             .forEach(line -> headings.add(flat(line.description())));
                 }
             }
@@ -158,7 +180,10 @@ class StrangerTest {
         assertThat(headings).hasSizeGreaterThan(25);
         int seen = 0;
         for (String page : pages(name)) {
-            List<String> lines = page.lines().map(StrangerTest::flat).filter(line -> !line.isEmpty()).toList();
+            List<String> lines = page.lines()
+                    .map(StrangerTest::flat)
+                    .filter(line -> !line.isEmpty())
+                    .toList();
             assertThat(lines.get(lines.size() - 1)).as("the label of the page").matches("\\d+-\\d+");
             assertThat(headings).as(lines.get(lines.size() - 1)).doesNotContain(lines.get(lines.size() - 2));
             seen += (int) lines.stream().filter(headings::contains).count();
