@@ -127,23 +127,39 @@ final class BarsPicture {
         return Printed.value(results, cell);
     }
 
-    /** Words on lines no wider than the room, at most two. */
+    /** Words on lines no wider than the room, at most two; a word that is wider is cut to it. */
     private static List<String> lines(String text, double room) {
         List<String> lines = new ArrayList<>();
         String line = "";
         for (String word : text.split(" ")) {
-            String longer = line.isEmpty() ? word : line + " " + word;
-            if (!line.isEmpty() && Typefaces.width(longer, Typefaces.REGULAR, SIZE) > room) {
+            String fitting = cut(word, room);
+            String longer = line.isEmpty() ? fitting : line + " " + fitting;
+            if (!line.isEmpty() && width(longer) > room) {
                 lines.add(line);
-                line = word;
+                line = fitting;
             } else {
                 line = longer;
             }
         }
         lines.add(line);
         if (lines.size() > 2) {
-            return List.of(lines.get(0), lines.get(1) + "\u2026");
+            return List.of(lines.get(0), cut(lines.get(1) + "\u2026", room));
         }
         return lines;
+    }
+
+    private static String cut(String word, double room) {
+        if (width(word) <= room) {
+            return word;
+        }
+        int end = word.length();
+        while (end > 1 && width(word.substring(0, end) + "\u2026") > room) {
+            end = word.offsetByCodePoints(end, -1);
+        }
+        return word.substring(0, end) + "\u2026";
+    }
+
+    private static double width(String text) {
+        return Typefaces.width(text, Typefaces.REGULAR, SIZE);
     }
 }
