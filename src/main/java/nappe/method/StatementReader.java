@@ -17,7 +17,8 @@ import nappe.unit.Unit;
 /** Reads one statement into the draft; says which method reads each statement word. */
 final class StatementReader {
     /** What a symbol may be to the station. */
-    private static final List<String> ROLES = List.of("flow", "water level", "energy level", "head at the gauge");
+    private static final List<String> ROLES =
+            List.of("flow", "water level", "energy level", "rapid depth", "head at the gauge");
 
     private final StatementParts parts;
     private final SheetDraft draft;

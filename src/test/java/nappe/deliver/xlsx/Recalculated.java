@@ -23,6 +23,11 @@ import org.apache.poi.xssf.usermodel.XSSFWorkbook;
  * numbers as Double, all else as String. LibreOffice hands on 15 digits, Gnumeric all of them.
  */
 public final class Recalculated {
+    static {
+        // Gnumeric repeats one style so often that its styles look like a zip bomb to POI
+        org.apache.poi.openxml4j.util.ZipSecureFile.setMinInflateRatio(0.001);
+    }
+
     /** As loose as the comparison of one value needs: LibreOffice rounds to 15 digits and snaps sums near zero. */
     public static final double RELATIVE = 1e-9;
 
