@@ -8,10 +8,14 @@ import static nappe.calculation.Formulas.over;
 import static nappe.calculation.Formulas.symbol;
 import static nappe.calculation.Formulas.word;
 
+import java.util.Map;
 import nappe.formula.Comparator;
+import nappe.formula.DimensionReading;
 import nappe.formula.Formula;
 import nappe.formula.Function;
 import nappe.method.Limit;
+import nappe.unit.Dimension;
+import nappe.unit.Unit;
 import org.jspecify.annotations.Nullable;
 
 /** Lays the cells of one limit: the sides where they are more than a symbol, the margin, the verdict in words. */
@@ -38,14 +42,14 @@ final class LimitRows {
         Formula bound = limit.valueIsLesser() ? greater : lesser;
         Formula scale = limit.scale() == null ? call(Function.ABS, bound) : limit.scale();
         Formula left = minus(greater, lesser);
-        nappe.unit.Unit unit = unitOf(limit.greater(), inner);
+        Unit unit = unitOf(limit.greater(), inner);
         if (!unit.dimension().isNone()) {
             Cell leftCell = cells.raw(strip.next(), "left", unit, left, inner, null, false);
             inner.put("left", leftCell);
             strip.add(new Strip.Laid("", limit.label() + ": left to the limit", "", "", leftCell));
             left = symbol("left");
         }
-        Cell margin = cells.live(strip.next(), "", nappe.unit.Unit.one(), over(left, scale), inner);
+        Cell margin = cells.live(strip.next(), "", Unit.one(), over(left, scale), inner);
         strip.add(new Strip.Laid("", limit.label() + ": margin", "", limit.source(), margin));
         Formula comparison = iff(compare(lesser, Comparator.AT_MOST, greater), word(MET), word(NOT_MET));
         Formula verdict = limit.when() == null ? comparison : iff(limit.when(), comparison, word(DOES_NOT_APPLY));
@@ -67,17 +71,14 @@ final class LimitRows {
     }
 
     /** The working unit of a side, from the cells it refers to. */
-    private nappe.unit.Unit unitOf(Formula side, Scope inner) {
-        return cells.unit(new nappe.formula.DimensionReading(
-                        name -> new nappe.formula.DimensionReading.Quantity(dimension(inner, name)), java.util.Map.of())
+    private Unit unitOf(Formula side, Scope inner) {
+        return cells.unit(new DimensionReading(name -> new DimensionReading.Quantity(dimension(inner, name)), Map.of())
                 .dimension(side));
     }
 
-    private static nappe.unit.Dimension dimension(Scope scope, String name) {
-        Reference reference = scope.find(name);
-        return reference instanceof Cell cell
-                ? cell.unit().dimension()
-                : reference instanceof Run ? nappe.unit.Dimension.NONE : nappe.unit.Dimension.NONE;
+    /** The numbers of a run of table cells are pure: their unit stands in the formula that looks them up. */
+    private static Dimension dimension(Scope scope, String name) {
+        return scope.find(name) instanceof Cell cell ? cell.unit().dimension() : Dimension.NONE;
     }
 
     /** The verdict on a root: whether its trials have closed. */

@@ -41,6 +41,14 @@ public record CheckRow(
     private static final List<String> HEAD =
             List.of("id", "method", "entries", "target", "expected", "unit", "tolerance", "source", "kind", "note");
 
+    private static final CSVFormat FORMAT = CSVFormat.DEFAULT
+            .builder()
+            .setCommentMarker('#')
+            .setHeader()
+            .setSkipHeaderRecord(true)
+            .setTrim(true)
+            .get();
+
     private static final List<String> KINDS = List.of("published", "library", "derived", "memory");
 
     /** How far the computed value may be off, in the unit of the row. */
@@ -68,14 +76,7 @@ public record CheckRow(
         if (text == null) {
             return List.of();
         }
-        CSVFormat format = CSVFormat.DEFAULT
-                .builder()
-                .setCommentMarker('#')
-                .setHeader()
-                .setSkipHeaderRecord(true)
-                .setTrim(true)
-                .get();
-        try (CSVParser parser = format.parse(new StringReader(text))) {
+        try (CSVParser parser = FORMAT.parse(new StringReader(text))) {
             return parser.stream()
                     .filter(row ->
                             row.get("method").equals(method) && row.get("why").contains("known to be off"))
@@ -92,15 +93,8 @@ public record CheckRow(
      * @throws CheckException with file and line of the first fault
      */
     public static List<CheckRow> read(String file, String text) {
-        CSVFormat format = CSVFormat.DEFAULT
-                .builder()
-                .setCommentMarker('#')
-                .setHeader()
-                .setSkipHeaderRecord(true)
-                .setTrim(true)
-                .get();
         List<CheckRow> rows = new ArrayList<>();
-        try (CSVParser parser = format.parse(new StringReader(text))) {
+        try (CSVParser parser = FORMAT.parse(new StringReader(text))) {
             List<String> lacking = HEAD.stream()
                     .filter(name -> !parser.getHeaderNames().contains(name))
                     .toList();

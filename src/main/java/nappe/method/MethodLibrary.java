@@ -5,11 +5,13 @@ import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
 import nappe.source.TextLibrary;
+import org.jspecify.annotations.Nullable;
 
-/** The method sheets of a library, read when they are first asked for. */
+/** The method sheets of a library; names and sheets are read once, when they are first asked for. */
 public final class MethodLibrary implements MethodCatalogue {
     private final TextLibrary library;
     private final Map<String, MethodSheet> sheets = new ConcurrentHashMap<>();
+    private @Nullable List<String> names;
 
     public MethodLibrary(TextLibrary library) {
         this.library = library;
@@ -28,10 +30,15 @@ public final class MethodLibrary implements MethodCatalogue {
     /** Names of the texts that start with "method"; others are parts to be included. */
     @Override
     public List<String> names() {
-        return library.names("methods").stream()
-                .filter(name -> name.endsWith(".txt") && startsWithMethod(name))
-                .map(name -> name.substring(0, name.length() - 4))
-                .toList();
+        List<String> known = names;
+        if (known == null) {
+            known = library.names("methods").stream()
+                    .filter(name -> name.endsWith(".txt") && startsWithMethod(name))
+                    .map(name -> name.substring(0, name.length() - 4))
+                    .toList();
+            names = known;
+        }
+        return known;
     }
 
     private boolean startsWithMethod(String file) {

@@ -2,7 +2,6 @@ package nappe.unit;
 
 import java.util.Objects;
 import org.jspecify.annotations.Nullable;
-import tech.units.indriya.function.Calculus;
 import tech.units.indriya.function.RationalNumber;
 
 /**
@@ -93,9 +92,5 @@ public final class Unit {
     /** A whole power, negative ones too: the library's own {@code pow} fails on those. */
     static RationalNumber power(RationalNumber number, int exponent) {
         return exponent < 0 ? number.reciprocal().pow(-exponent) : number.pow(exponent);
-    }
-
-    static Number narrow(Number number) {
-        return Calculus.currentNumberSystem().narrow(number);
     }
 }
