@@ -164,7 +164,7 @@ public final class RatingFigure {
 
     private @Nullable String flow() {
         return method.items().stream()
-                .filter(item -> item instanceof Item.Given given && given.role().equals("flow"))
+                .filter(item -> item instanceof Item.Given given && given.isFlow())
                 .map(item -> ((Item.Given) item).symbol())
                 .findFirst()
                 .orElse(null);

@@ -47,6 +47,11 @@ public sealed interface Item {
         public List<String> outputs() {
             return List.of(symbol);
         }
+
+        /** Whether it is the flow through the element: all of the case, or one part of several in service. */
+        public boolean isFlow() {
+            return role.equals("flow") || role.equals("flow through one");
+        }
     }
 
     /** A symbol that has no value by itself: a depth, a head. */

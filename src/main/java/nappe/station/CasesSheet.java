@@ -37,6 +37,17 @@ final class CasesSheet {
         return flows.get(i);
     }
 
+    /** The flow through one of the units in service in a case. */
+    Cell flowThroughOne(int i) {
+        return flows.get(i);
+    }
+
+    /** How many units are in service in a case. */
+    Cell unitsInService(int i) {
+        throw new StationException(
+                List.of(new DesignFault(new Design.Origin("Flows", ""), "units in service are not typed", "units")));
+    }
+
     /** The water level downstream of the station in the working unit. */
     Cell level(int i) {
         return levels.get(i);

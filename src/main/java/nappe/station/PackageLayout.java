@@ -289,8 +289,15 @@ public final class PackageLayout {
             int c,
             @org.jspecify.annotations.Nullable MethodSheet below,
             List<Scope> downstream) {
-        if (role.equals("flow")) {
-            return cases.flow(c);
+        switch (role) {
+            case "flow":
+                return cases.flow(c);
+            case "flow through one":
+                return cases.flowThroughOne(c);
+            case "units in service":
+                return cases.unitsInService(c);
+            default:
+                break;
         }
         String offered = below == null ? null : below.gives().get(role);
         if (offered != null) {

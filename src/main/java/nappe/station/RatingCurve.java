@@ -73,7 +73,7 @@ final class RatingCurve {
 
     private Item.@Nullable Given flow() {
         return method.items().stream()
-                .filter(item -> item instanceof Item.Given given && given.role().equals("flow"))
+                .filter(item -> item instanceof Item.Given given && given.isFlow())
                 .map(Item.Given.class::cast)
                 .findFirst()
                 .orElse(null);
