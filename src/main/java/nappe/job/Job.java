@@ -64,7 +64,8 @@ public final class Job {
                 design,
                 methods::sheet,
                 method -> drawings.of(method).map(FigureSheet::printed).orElse(List.of()),
-                software);
+                software,
+                new SizeReruns(design, methods::sheet).run());
         Map<Cell, Value> values = Evaluation.of(layout.cells());
         return new Done(
                 new Results(

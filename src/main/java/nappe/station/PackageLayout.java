@@ -11,9 +11,12 @@ import nappe.calculation.Cells;
 import nappe.calculation.ElementSheet;
 import nappe.calculation.RatingGrid;
 import nappe.calculation.Scope;
+import nappe.calculation.ScreenGrid;
 import nappe.calculation.Sheet;
 import nappe.calculation.SheetDraft;
+import nappe.method.Item;
 import nappe.method.MethodSheet;
+import nappe.method.Screen;
 import nappe.unit.Dimension;
 import nappe.unit.Unit;
 
@@ -50,34 +53,33 @@ public final class PackageLayout {
     private final List<String> contents = new ArrayList<>();
     private final Function<String, MethodSheet> methodOf;
     private final Function<MethodSheet, List<String>> drawn;
+    private final Map<String, List<SizeRerun>> sizeReruns;
 
     private PackageLayout(
-            Design design, Function<String, MethodSheet> methodOf, Function<MethodSheet, List<String>> drawn) {
+            Design design,
+            Function<String, MethodSheet> methodOf,
+            Function<MethodSheet, List<String>> drawn,
+            Map<String, List<SizeRerun>> sizeReruns) {
         this.design = design;
         this.methodOf = methodOf;
         this.drawn = drawn;
+        this.sizeReruns = sizeReruns;
         design.elements().forEach(e -> methods.put(e.tag(), methodOf.apply(e.method())));
     }
 
     /**
      * @param methodOf the method sheet of a name
-     * @throws StationException where entries do not fit the methods
-     */
-    public static Layout of(Design design, Function<String, MethodSheet> methodOf, SoftwareStatement software) {
-        return of(design, methodOf, method -> List.of(), software);
-    }
-
-    /**
-     * @param methodOf the method sheet of a name
      * @param drawn the symbols whose values the drawing of a method shows; empty for a method without drawing
+     * @param sizeReruns for the tag of each element whose method has a screen statement, one rerun for each word
      * @throws StationException where entries do not fit the methods
      */
     public static Layout of(
             Design design,
             Function<String, MethodSheet> methodOf,
             Function<MethodSheet, List<String>> drawn,
-            SoftwareStatement software) {
-        return new PackageLayout(design, methodOf, drawn).lay(software);
+            SoftwareStatement software,
+            Map<String, List<SizeRerun>> sizeReruns) {
+        return new PackageLayout(design, methodOf, drawn, sizeReruns).lay(software);
     }
 
     private SheetDraft draft(String name, String title, String content) {
@@ -109,6 +111,8 @@ public final class PackageLayout {
         Map<String, SheetDraft> elementSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> figureSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> ratingSheets = new LinkedHashMap<>();
+        Map<String, SheetDraft> sizeSheets = new LinkedHashMap<>();
+        Map<String, SheetDraft> sizeGrids = new LinkedHashMap<>();
         for (Design.Element element : design.elements()) {
             String title = element.tag() + "  " + EntriesSheet.title(element, method(element));
             SheetDraft methodSheet = draft(
@@ -136,6 +140,14 @@ public final class PackageLayout {
                                 element.tag() + "  Rating table",
                                 "flow for equal steps of head, over the usable range"));
             }
+            if (method(element).screen() != null) {
+                sizeSheets.put(
+                        element.tag(),
+                        draft(
+                                element.tag() + " sizes",
+                                element.tag() + "  Standard sizes compared",
+                                "every standard size through all cases, and what fails with it"));
+            }
         }
         SheetDraft assumptionSheet = draft("Assumptions", "Assumptions", "each with basis and owner, open or closed");
         SheetDraft glossarySheet =
@@ -146,6 +158,14 @@ public final class PackageLayout {
                 "Checker", "Checker's record", "every formula with its cell, room for tick, initials and comment");
         SheetDraft referenceSheet = draft("References", "References", "publications and tables cited");
         SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
+        sizeSheets
+                .keySet()
+                .forEach(tag -> sizeGrids.put(
+                        tag,
+                        draft(
+                                tag + " size grid",
+                                tag + "  Standard sizes line by line",
+                                "the lines behind the comparison of sizes (workbook)")));
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
 
         StationLayout station = new StationLayout(
@@ -182,6 +202,10 @@ public final class PackageLayout {
                 ratings.put(element.tag(), table);
                 new RatingCurve(cells, method, ratingSheet)
                         .lay(table, method.ratings().get(0), "Rating curve of " + element.tag(), caseNames, caseScopes);
+            }
+            SheetDraft sizeSheet = sizeSheets.get(element.tag());
+            if (sizeSheet != null) {
+                sizes(element, station, sizeSheet, java.util.Objects.requireNonNull(sizeGrids.get(element.tag())));
             }
         }
 
@@ -225,6 +249,30 @@ public final class PackageLayout {
 
     private MethodSheet method(Design.Element element) {
         return java.util.Objects.requireNonNull(methods.get(element.tag()));
+    }
+
+    /** Lays every word of the screened choice for the judged cases: the grid behind, and the comparison. */
+    private void sizes(Design.Element element, StationLayout station, SheetDraft sheet, SheetDraft gridSheet) {
+        MethodSheet method = method(element);
+        Screen screen = java.util.Objects.requireNonNull(method.screen());
+        Item.Given choice = (Item.Given) java.util.Objects.requireNonNull(method.item(screen.choice()));
+        Scope scope = station.scope(element.tag());
+        List<String> names = station.columns().judgedNames();
+        List<ScreenGrid.Variant> variants = new ScreenGrid(station.items(), method, screen)
+                .lay(
+                        Sources.keys(scope, choice.table()),
+                        scope,
+                        station.cases(element.tag()).subList(0, names.size()),
+                        names,
+                        gridSheet);
+        Design.Typed typed = element.typed().get(screen.choice());
+        new SizesSheet(station.items(), method, screen, sheet, gridSheet, names)
+                .lay(
+                        element.tag(),
+                        scope.cell(screen.choice()),
+                        typed == null ? "" : typed.source(),
+                        variants,
+                        java.util.Objects.requireNonNull(sizeReruns.get(element.tag())));
     }
 
     private Block.Table rating(Design.Element element, MethodSheet method, StationLayout station, SheetDraft sheet) {
