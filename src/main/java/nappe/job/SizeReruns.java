@@ -60,19 +60,19 @@ final class SizeReruns {
             return new SizeRerun(word, List.of(), false, why);
         }
         Map<Cell, Value> values = Evaluation.of(station.allCells());
-        List<String> names = station.columns().judgedNames();
+        int judgedCases = station.columns().judged();
         List<SizeRerun.Failure> notMet = new ArrayList<>();
         List<SizeRerun.Failure> noResult = new ArrayList<>();
         boolean lacks = false;
         for (ElementSheet.LimitResult limit : station.limits()) {
-            ElementSheet.LimitResult judged = limit.first(names.size());
+            ElementSheet.LimitResult judged = limit.first(judgedCases);
             List<String> verdicts = judged.verdicts().stream()
                     .map(cell -> words(Objects.requireNonNull(values.get(cell))))
                     .toList();
             if (verdicts.contains(NOT_MET)) {
-                notMet.add(failure(limit, verdicts, NOT_MET, names));
+                notMet.add(failure(limit, verdicts, NOT_MET));
             } else if (verdicts.contains(Value.NO_RESULT)) {
-                noResult.add(failure(limit, verdicts, Value.NO_RESULT, names));
+                noResult.add(failure(limit, verdicts, Value.NO_RESULT));
             }
             lacks |= verdicts.contains(Value.NOT_GIVEN);
         }
@@ -80,12 +80,11 @@ final class SizeReruns {
         return new SizeRerun(word, notMet, lacks, "");
     }
 
-    private static SizeRerun.Failure failure(
-            ElementSheet.LimitResult limit, List<String> verdicts, String verdict, List<String> names) {
-        List<String> cases = new ArrayList<>();
+    private static SizeRerun.Failure failure(ElementSheet.LimitResult limit, List<String> verdicts, String verdict) {
+        List<Integer> cases = new ArrayList<>();
         for (int c = 0; c < verdicts.size() && !limit.forAll(); c++) {
             if (verdicts.get(c).equals(verdict)) {
-                cases.add(names.get(c));
+                cases.add(c + 1);
             }
         }
         return new SizeRerun.Failure(limit.tag(), limit.label(), verdict.equals(NOT_MET), List.copyOf(cases));

@@ -13,9 +13,9 @@ public record SizeRerun(String word, List<Failure> failures, boolean lacks, Stri
     /**
      * A limit that is not met in some case; or that is met where it has a result, and has none in some case.
      *
-     * @param cases names of the judged cases in which it is so; empty for a limit that serves all cases
+     * @param cases the judged cases in which it is so, counted from 1; empty for a limit that serves all cases
      */
-    public record Failure(String tag, String limit, boolean notMet, List<String> cases) {}
+    public record Failure(String tag, String limit, boolean notMet, List<Integer> cases) {}
 
     public SizeRerun {
         failures = List.copyOf(failures);

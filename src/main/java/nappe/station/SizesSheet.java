@@ -73,28 +73,35 @@ final class SizesSheet {
      */
     void lay(String tag, Cell choice, String reason, List<ScreenGrid.Variant> variants, List<SizeRerun> reruns) {
         Cell entry = entry(choice);
-        sheet.note("Every " + screen.choice() + " of the cited table, in its order, in the "
-                + (caseNames.size() == 1 ? "case" : caseNames.size() + " cases")
-                + " of this calculation. Lowest and highest are over these cases. " + legend());
-        sheet.note("Which one is chosen follows cell " + entry.place().address() + " of sheet "
-                + entry.place().sheet()
-                + ". \"Fits\" says whether every limit of the whole station is met: it was found"
-                + " by reruns for the entries as issued and does not follow a changed entry.");
-        compared(tag, choice, variants, reruns);
+        String entryCell =
+                "cell " + entry.place().address() + " of sheet " + entry.place().sheet();
+        sheet.note("Every " + screen.choice() + " of the cited table, in its order; \"chosen\" follows " + entryCell
+                + ". Lowest and highest are over the cases that are judged. " + legend());
+        Cell place = place(choice, variants);
+        compared(tag, place, variants);
         sheet.note("Reason given for the choice: " + (reason.isBlank() ? "none given" : reason));
         sheet.gap();
-        sheet.note("Found by reruns of the whole station, one for each " + screen.choice() + ", all other entries as"
-                + " issued. To reproduce a row, type its " + screen.choice() + " into cell "
-                + entry.place().address() + " of sheet " + entry.place().sheet()
-                + " and read sheet Limits. A limit that is not met in some case is counted once, as not met; one that is"
-                + " met wherever it has a result, once as without result. A limit may be without result only because"
-                + " another is not met.");
-        failing(tag, variants, reruns);
+        sheet.note("What follows was found by reruns of the whole station, one for each " + screen.choice()
+                + ", all other entries as issued, and does not follow a changed entry. To reproduce a row, type its "
+                + screen.choice() + " into " + entryCell + " and read sheet Limits. It fits where every limit is met or"
+                + " does not apply. A limit that is not met in some case counts as not met; one that is met wherever it"
+                + " has a result counts as without result, often only because another is not met.");
+        sheet.note("Cases by number: " + numbered() + ".");
+        failing(tag, place, variants, reruns);
+    }
+
+    private String numbered() {
+        List<String> numbered = new ArrayList<>();
+        for (int c = 0; c < caseNames.size(); c++) {
+            numbered.add((c + 1) + " " + caseNames.get(c));
+        }
+        return String.join("; ", numbered);
     }
 
     /** What each symbol means. */
     private String legend() {
         return screen.targets().stream()
+                        .filter(target -> !isWords(target))
                         .map(target -> target + ": " + label(method.item(target), target))
                         .collect(Collectors.joining("; "))
                 + ".";
@@ -108,12 +115,11 @@ final class SizesSheet {
         return member == null ? "" : label(method.item(member), member);
     }
 
-    private void compared(String tag, Cell choice, List<ScreenGrid.Variant> variants, List<SizeRerun> reruns) {
+    private void compared(String tag, Cell place, List<ScreenGrid.Variant> variants) {
         List<Block.Column> columns = new ArrayList<>(List.of(
                 new Block.Column(screen.choice(), 9, Block.Align.LEFT),
                 new Block.Column("Chosen", 8, Block.Align.LEFT)));
-        Cell place = place(choice, variants);
-        TableDraft table = sheet.table("Standard values of " + screen.choice() + " for " + tag, columns);
+        TableDraft table = sheet.table("Each " + screen.choice() + " of " + tag + " over the cases", columns);
         for (int i = 0; i < variants.size(); i++) {
             ScreenGrid.Variant variant = variants.get(i);
             boolean first = i == 0;
@@ -148,30 +154,30 @@ final class SizesSheet {
                     }
                 }
             }
-            if (first) {
-                columns.add(new Block.Column("Fits, as issued", 9, Block.Align.LEFT));
-            }
-            row.add(rerun(table.place(row.size()), Value.word(fits(reruns.get(i)))));
             table.add(row);
         }
     }
 
-    private void failing(String tag, List<ScreenGrid.Variant> variants, List<SizeRerun> reruns) {
+    private void failing(String tag, Cell place, List<ScreenGrid.Variant> variants, List<SizeRerun> reruns) {
         TableDraft table = sheet.table(
-                "Limits of the whole station that fail with each " + screen.choice() + " of " + tag + ", as issued",
+                "What fails in the whole station with each " + screen.choice() + " of " + tag + ", as issued",
                 List.of(
                         new Block.Column(screen.choice(), 9, Block.Align.LEFT),
-                        new Block.Column("Limits not met", 8, Block.Align.RIGHT),
-                        new Block.Column("Limits without result", 12, Block.Align.RIGHT),
+                        new Block.Column("Chosen", 8, Block.Align.LEFT),
+                        new Block.Column("Fits", 9, Block.Align.LEFT),
+                        new Block.Column("Limits not met", 9, Block.Align.RIGHT),
+                        new Block.Column("without result", 9, Block.Align.RIGHT),
                         new Block.Column("Which limits, in which cases", 60, Block.Align.LEFT)));
         for (int i = 0; i < variants.size(); i++) {
             SizeRerun rerun = reruns.get(i);
             boolean ran = rerun.refused().isEmpty();
             table.add(List.of(
                     new Block.Content(variants.get(i).word()),
-                    rerun(table.place(1), ran ? Value.of(rerun.notMet()) : new Value.None(Value.NO_RESULT)),
-                    rerun(table.place(2), ran ? Value.of(rerun.withoutResult()) : new Value.None(Value.NO_RESULT)),
-                    rerun(table.place(3), Value.word(FailingWords.of(rerun, caseNames.size())))));
+                    new Block.Content(mark(table.place(1), place, i + 1)),
+                    rerun(table.place(2), Value.word(fits(rerun))),
+                    rerun(table.place(3), ran ? Value.of(rerun.notMet()) : new Value.None(Value.NO_RESULT)),
+                    rerun(table.place(4), ran ? Value.of(rerun.withoutResult()) : new Value.None(Value.NO_RESULT)),
+                    rerun(table.place(5), Value.word(FailingWords.of(rerun)))));
         }
         sheet.gap();
     }
