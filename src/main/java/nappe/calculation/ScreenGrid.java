@@ -61,7 +61,7 @@ public final class ScreenGrid {
 
     private void perCase(List<Variant> variants, List<String> caseNames, SheetDraft sheet) {
         List<Block.Column> columns = new ArrayList<>(
-                List.of(column(screen.choice(), Block.Align.LEFT), new Block.Column("Case", 26, Block.Align.LEFT)));
+                List.of(column(screen.choice(), Block.Align.LEFT), new Block.Column("Case", 30, Block.Align.LEFT)));
         TableDraft table = sheet.workbookTable(
                 "What rests on a case, once for each " + screen.choice() + " and case",
                 columns,

@@ -83,10 +83,29 @@ public final class PackageLayout {
     }
 
     private SheetDraft draft(String name, String title, String content) {
-        SheetDraft draft = new SheetDraft(name, title);
+        return add(new SheetDraft(name, title), content);
+    }
+
+    private SheetDraft add(SheetDraft draft, String content) {
         drafts.add(draft);
         contents.add(content);
         return draft;
+    }
+
+    /** The sheets of a screen statement; the grid behind takes its place at the back later. */
+    private record SizeDrafts(SheetDraft compared, SheetDraft reruns, SheetDraft grid) {}
+
+    private SizeDrafts sizeDrafts(String tag) {
+        return new SizeDrafts(
+                draft(
+                        tag + " sizes",
+                        tag + "  Standard sizes compared",
+                        "every standard size through all cases; the chosen one and why"),
+                draft(
+                        tag + " size reruns",
+                        tag + "  What fails with each standard size",
+                        "limits of the whole station with each size, as issued"),
+                new SheetDraft(tag + " size grid", tag + "  Standard sizes line by line"));
     }
 
     private Layout lay(SoftwareStatement software) {
@@ -111,8 +130,7 @@ public final class PackageLayout {
         Map<String, SheetDraft> elementSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> figureSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> ratingSheets = new LinkedHashMap<>();
-        Map<String, SheetDraft> sizeSheets = new LinkedHashMap<>();
-        Map<String, SheetDraft> sizeGrids = new LinkedHashMap<>();
+        Map<String, SizeDrafts> sizeSheets = new LinkedHashMap<>();
         for (Design.Element element : design.elements()) {
             String title = element.tag() + "  " + EntriesSheet.title(element, method(element));
             SheetDraft methodSheet = draft(
@@ -141,12 +159,7 @@ public final class PackageLayout {
                                 "flow for equal steps of head, over the usable range"));
             }
             if (method(element).screen() != null) {
-                sizeSheets.put(
-                        element.tag(),
-                        draft(
-                                element.tag() + " sizes",
-                                element.tag() + "  Standard sizes compared",
-                                "every standard size through all cases, and what fails with it"));
+                sizeSheets.put(element.tag(), sizeDrafts(element.tag()));
             }
         }
         SheetDraft assumptionSheet = draft("Assumptions", "Assumptions", "each with basis and owner, open or closed");
@@ -158,14 +171,7 @@ public final class PackageLayout {
                 "Checker", "Checker's record", "every formula with its cell, room for tick, initials and comment");
         SheetDraft referenceSheet = draft("References", "References", "publications and tables cited");
         SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
-        sizeSheets
-                .keySet()
-                .forEach(tag -> sizeGrids.put(
-                        tag,
-                        draft(
-                                tag + " size grid",
-                                tag + "  Standard sizes line by line",
-                                "the lines behind the comparison of sizes (workbook)")));
+        sizeSheets.values().forEach(sizes -> add(sizes.grid(), "the lines behind the sizes compared (workbook)"));
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
 
         StationLayout station = new StationLayout(
@@ -203,9 +209,9 @@ public final class PackageLayout {
                 new RatingCurve(cells, method, ratingSheet)
                         .lay(table, method.ratings().get(0), "Rating curve of " + element.tag(), caseNames, caseScopes);
             }
-            SheetDraft sizeSheet = sizeSheets.get(element.tag());
-            if (sizeSheet != null) {
-                sizes(element, station, sizeSheet, java.util.Objects.requireNonNull(sizeGrids.get(element.tag())));
+            SizeDrafts sizes = sizeSheets.get(element.tag());
+            if (sizes != null) {
+                sizes(element, station, sizes);
             }
         }
 
@@ -251,8 +257,8 @@ public final class PackageLayout {
         return java.util.Objects.requireNonNull(methods.get(element.tag()));
     }
 
-    /** Lays every word of the screened choice for the judged cases: the grid behind, and the comparison. */
-    private void sizes(Design.Element element, StationLayout station, SheetDraft sheet, SheetDraft gridSheet) {
+    /** Lays every word of the screened choice for the judged cases: the grid behind, the comparison, what reruns found. */
+    private void sizes(Design.Element element, StationLayout station, SizeDrafts drafts) {
         MethodSheet method = method(element);
         Screen screen = java.util.Objects.requireNonNull(method.screen());
         Item.Given choice = (Item.Given) java.util.Objects.requireNonNull(method.item(screen.choice()));
@@ -264,15 +270,14 @@ public final class PackageLayout {
                         scope,
                         station.cases(element.tag()).subList(0, names.size()),
                         names,
-                        gridSheet);
+                        drafts.grid());
         Design.Typed typed = element.typed().get(screen.choice());
-        new SizesSheet(station.items(), method, screen, sheet, gridSheet, names)
-                .lay(
-                        element.tag(),
-                        scope.cell(screen.choice()),
-                        typed == null ? "" : typed.source(),
-                        variants,
-                        java.util.Objects.requireNonNull(sizeReruns.get(element.tag())));
+        Cell chosen = scope.cell(screen.choice());
+        List<Cell> marks = new SizesSheet(station.items(), method, screen, drafts.grid())
+                .lay(drafts.compared(), chosen, typed == null ? "" : typed.source(), variants);
+        SizeRerunsSheet reruns = new SizeRerunsSheet(station.cells(), drafts.reruns(), screen.choice());
+        reruns.notes(SizesSheet.entry(chosen), names);
+        reruns.table(variants, marks, java.util.Objects.requireNonNull(sizeReruns.get(element.tag())));
     }
 
     private Block.Table rating(Design.Element element, MethodSheet method, StationLayout station, SheetDraft sheet) {

@@ -57,8 +57,20 @@ class PackageProofsTest {
         byte[] issued = XlsxDelivery.render(PretendStation.AS_ISSUED.results(WorkingSystem.US));
         Results anew = changed.results(WorkingSystem.US);
         Path retyped = Files.write(folder.resolve("retyped.xlsx"), Retyper.type(issued, numbersTyped(anew)));
-        assertThat(Recalculated.disagreements(Recalculated.byGnumeric(retyped), anew))
+        assertThat(Recalculated.disagreements(Recalculated.byGnumeric(retyped), live(anew)))
                 .isEmpty();
+    }
+
+    /** Without what reruns found as issued, which says that it does not follow a changed entry. */
+    private static Results live(Results all) {
+        return new Results(
+                all.furniture(),
+                all.sheets(),
+                all.cells().stream()
+                        .filter(cell -> cell.kind() != Cell.Kind.RERUN)
+                        .toList(),
+                all.values(),
+                all.figures());
     }
 
     @Test
