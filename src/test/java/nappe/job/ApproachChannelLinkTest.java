@@ -48,6 +48,15 @@ class ApproachChannelLinkTest {
     }
 
     @Test
+    void whatAnAuthorityDemandsIsJudgedOnTheResults() {
+        Results results = run(flowCase("Ordinary", 0.12, 0.6), flowCase("Flood", 0.1, 3));
+        assertThat(verdicts(results, "demand on f_b")).containsExactly(Value.word("met"), Value.word("not met"));
+        assertThat(verdicts(results, "demand on V_m")).containsExactly(Value.word("not met"), Value.word("not met"));
+        assertThat(verdicts(results, "demand on z_1")).containsExactly(Value.word("met"), Value.word("not met"));
+        assertThat(verdicts(results, "demand on E_1")).containsExactly(Value.word("met"), Value.word("not met"));
+    }
+
+    @Test
     void cellsAndFormulasAreTheSameWhateverTheNumbers() {
         assertThat(described(run(flowCase("One", 0, 0.5)))).isEqualTo(described(run(flowCase("One", 9, 4))));
     }
@@ -76,6 +85,25 @@ class ApproachChannelLinkTest {
         return values(results, tag, symbol).stream()
                 .map(value -> ((Value.Number) value).value())
                 .toList();
+    }
+
+    /** The verdicts on a limit of the upper channel, one per case. */
+    private static List<Value> verdicts(Results results, String label) {
+        List<Value> verdicts = new ArrayList<>();
+        for (Sheet sheet : results.sheets()) {
+            for (Block block : sheet.blocks()) {
+                if (sheet.name().equals("A2") && block instanceof Block.Lines lines) {
+                    for (Block.Line line : lines.lines()) {
+                        if (line.description().equals(label)
+                                && line.kind() == Block.LineKind.LIMIT_VERDICT
+                                && verdicts.isEmpty()) {
+                            line.perCase().forEach(cell -> verdicts.add(results.value(cell)));
+                        }
+                    }
+                }
+            }
+        }
+        return verdicts;
     }
 
     /** The values of a symbol on the sheet of an element, one per case. */

@@ -54,15 +54,27 @@ public final class PretendApproach {
         Map<String, Design.Typed> device = new LinkedHashMap<>();
         device.put("z_c", number(1, "m"));
         device.put("W", number(0.5, "m"));
-        return JOB.run(
-                        Designs.design(
-                                List.of(
-                                        new Design.Element("D1", "", "pretend-notch", device),
-                                        new Design.Element("A1", "", "approach-channel", channel(0.8, 0, 0.3, 0)),
-                                        new Design.Element("A2", "", "approach-channel", channel(0.81, 0.5, 0, 1.2))),
-                                List.of(cases)),
-                        List.of())
-                .results();
+        Design design = new Design(
+                Designs.PROJECT,
+                List.of(
+                        new Design.Element("D1", "", "pretend-notch", device),
+                        new Design.Element("A1", "", "approach-channel", channel(0.8, 0, 0.3, 0)),
+                        new Design.Element("A2", "", "approach-channel", channel(0.81, 0.5, 0, 1.2))),
+                List.of(cases),
+                List.of(
+                        demand("f_b", false, number(300, "mm")),
+                        demand("V_m", false, number(0.3, "m/s")),
+                        demand("z_1", true, number(1.9, "m")),
+                        demand("E_1", true, number(2, "m"))),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of());
+        return JOB.run(design, List.of()).results();
+    }
+
+    private static Design.Demand demand(String symbol, boolean atMost, Design.Typed value) {
+        return new Design.Demand("A2", symbol, atMost, value, "demand on " + symbol, "Invented permit, clause 3");
     }
 
     private static Map<String, Design.Typed> channel(double floor, double side, double transition, double screen) {
