@@ -64,9 +64,15 @@ public sealed interface Block {
      * numbers, then every case.
      *
      * @param caseNames heads of the case columns
+     * @param printed how many of them, from the left, are printed in the PDF; the others stand in the workbook only
      * @param workedCase index of the case worked in full
      */
-    record Lines(int row, List<String> caseNames, int workedCase, List<Line> lines) implements Block {}
+    record Lines(int row, List<String> caseNames, int printed, int workedCase, List<Line> lines) implements Block {
+        /** Lines whose cases are all printed. */
+        public Lines(int row, List<String> caseNames, int workedCase, List<Line> lines) {
+            this(row, caseNames, caseNames.size(), workedCase, lines);
+        }
+    }
 
     /**
      * One line of a calculation.

@@ -23,6 +23,8 @@ public final class Cell implements Reference {
         CONSTANT,
         /** A number or word of a cited table. */
         TABLE,
+        /** Found by reruns of the whole calculation with the entries as issued; it does not follow a changed entry. */
+        RERUN,
         /** A live formula. */
         FORMULA
     }
@@ -97,6 +99,11 @@ public final class Cell implements Reference {
 
     public Kind kind() {
         return kind;
+    }
+
+    /** Whether its number was computed, live or by reruns, and is rounded in print. */
+    public boolean isComputed() {
+        return kind == Kind.FORMULA || kind == Kind.RERUN;
     }
 
     public Place place() {

@@ -30,6 +30,12 @@ public final class ElementSheet {
         public boolean forAll() {
             return verdicts.size() == 1;
         }
+
+        /** The same for the first columns only. */
+        public LimitResult first(int columnCount) {
+            int count = Math.min(columnCount, verdicts.size());
+            return new LimitResult(tag, label, source, margins.subList(0, count), verdicts.subList(0, count));
+        }
     }
 
     /** A limit demanded by others, with the cells it brings along. */
@@ -41,7 +47,7 @@ public final class ElementSheet {
     private final TrialRows trialRows;
     private final SheetDraft sheet;
     private final Scope scope;
-    private final List<String> caseNames;
+    private final CaseColumns columns;
     private final List<Scope> cases;
     private final List<Block.Line> lines = new ArrayList<>();
     private final List<LimitResult> limits = new ArrayList<>();
@@ -59,7 +65,7 @@ public final class ElementSheet {
             TrialRows trialRows,
             SheetDraft sheet,
             Scope scope,
-            List<String> caseNames,
+            CaseColumns columns,
             List<Scope> cases) {
         this.tag = tag;
         this.method = method;
@@ -67,7 +73,7 @@ public final class ElementSheet {
         this.trialRows = trialRows;
         this.sheet = sheet;
         this.scope = scope;
-        this.caseNames = caseNames;
+        this.columns = columns;
         this.cases = cases;
     }
 
@@ -89,6 +95,10 @@ public final class ElementSheet {
         for (Item item : method.items()) {
             if (!(item instanceof Item.Given || item instanceof Item.Constant || item instanceof Item.Free)
                     && item.outputs().stream().noneMatch(method::isTemplate)) {
+                if (item instanceof Item.Line line && line.formula() instanceof Formula.Summary over) {
+                    overCases(line, over);
+                    continue;
+                }
                 boolean perCase = item.outputs().stream().anyMatch(method::perCase);
                 rows(perCase, (at, strip) -> items.lay(item, at, strip));
             }
@@ -103,8 +113,16 @@ public final class ElementSheet {
             heading("Limits demanded by others");
             demands.forEach(demand -> limit(limitRows, demand.limit(), demand.cells()));
         }
-        sheet.lines(caseNames, workedCase, lines);
+        sheet.lines(columns, workedCase, lines);
         return List.copyOf(limits);
+    }
+
+    /** A line over the cases stands once; it knows what it sums up as the run of the judged cases. */
+    private void overCases(Item.Line line, Formula.Summary over) {
+        Run run = new Run(cases.subList(0, columns.judged()).stream()
+                .map(one -> one.cell(over.name()))
+                .toList());
+        rows(false, (at, strip) -> items.layOverCases(line, over, run, at, strip));
     }
 
     private void given(Item item) {
@@ -146,7 +164,7 @@ public final class ElementSheet {
         List<List<Strip.Laid>> laid = new ArrayList<>();
         if (perCase) {
             for (int c = 0; c < cases.size(); c++) {
-                trialRows.nowFor(tag, caseNames.get(c));
+                trialRows.nowFor(tag, columns.names().get(c));
                 Strip strip = Strip.down(sheet.name(), row, FIRST_CASE + c);
                 laying.lay(cases.get(c), strip);
                 laid.add(strip.laid());
@@ -237,20 +255,20 @@ public final class ElementSheet {
 
     /** One limit for each time a root was laid: once for most, more often where at binds what it rests on. */
     private void closings(LimitRows limitRows, Item.Root root, List<TrialRows.Solved> ofRoot, boolean perCase) {
-        List<List<TrialRows.Solved>> columns = (perCase ? caseNames : List.of(""))
+        List<List<TrialRows.Solved>> byCase = (perCase ? columns.names() : List.of(""))
                 .stream()
                         .map(name -> ofRoot.stream()
                                 .filter(s -> s.caseName().equals(name))
                                 .toList())
                         .toList();
-        for (int k = 0; k < columns.get(0).size(); k++) {
+        for (int k = 0; k < byCase.get(0).size(); k++) {
             int place = k;
             int[] next = {0};
             List<LimitRows.Judged> judged = new ArrayList<>();
             rows(
                     perCase,
                     (at, strip) ->
-                            judged.add(limitRows.closing(columns.get(next[0]++).get(place), at, strip)),
+                            judged.add(limitRows.closing(byCase.get(next[0]++).get(place), at, strip)),
                     true);
             keep("the trials for " + root.symbol() + " have closed" + (k == 0 ? "" : " (" + (k + 1) + ")"), "", judged);
         }

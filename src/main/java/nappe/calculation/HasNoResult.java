@@ -1,6 +1,7 @@
 package nappe.calculation;
 
 import nappe.formula.Formula;
+import nappe.formula.Parts;
 
 /** Whether a formula may come out as {@code none()}. */
 final class HasNoResult {

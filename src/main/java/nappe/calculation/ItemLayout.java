@@ -1,8 +1,11 @@
 package nappe.calculation;
 
 import java.util.Map;
+import nappe.formula.Comparator;
 import nappe.formula.Formula;
+import nappe.formula.Function;
 import nappe.formula.PlainReading;
+import nappe.formula.Value;
 import nappe.method.Item;
 
 /**
@@ -32,6 +35,26 @@ public final class ItemLayout {
         } else if (item instanceof Item.Root root) {
             lay(root, scope, strip);
         }
+    }
+
+    /**
+     * Lays a line over the cases: the highest or lowest of a run, and no result where one of the cases has none.
+     *
+     * @param run what the summary names, one cell per case
+     */
+    public void layOverCases(Item.Line line, Formula.Summary over, Run run, Scope scope, Strip strip) {
+        Scope inner = scope.inner();
+        inner.put(over.name(), run);
+        boolean sure = run.cells().stream().allMatch(cell -> cell.sureness() == Sureness.SURE);
+        Formula all = Formulas.compare(
+                Formulas.call(Function.COUNT_OF, Formulas.symbol(over.name())),
+                Comparator.EQUAL,
+                Formulas.number(Integer.toString(run.cells().size())));
+        Formula formula = sure ? over : Formulas.iff(all, over, new Formula.NoResult(Value.NO_RESULT));
+        Cell cell = cells.live(strip.next(), line.symbol(), line.unit(), formula, inner);
+        scope.put(line.symbol(), cell);
+        strip.add(new Strip.Laid(
+                line.symbol(), line.label(), PlainReading.of(over) + " over the cases", line.source(), cell));
     }
 
     private void lay(Item.Line line, String shownAs, String where, Scope scope, Strip strip) {

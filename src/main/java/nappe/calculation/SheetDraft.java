@@ -69,8 +69,8 @@ public final class SheetDraft {
     }
 
     /** Lines of a calculation, whose rows were placed from {@link #nextRow()} + 1 on. */
-    public void lines(List<String> caseNames, int workedCase, List<Block.Line> lines) {
-        blocks.add(new Block.Lines(next, caseNames, workedCase, List.copyOf(lines)));
+    public void lines(CaseColumns columns, int workedCase, List<Block.Line> lines) {
+        blocks.add(new Block.Lines(next, columns.names(), columns.printed(), workedCase, List.copyOf(lines)));
         next += 1 + lines.size();
         gap();
     }

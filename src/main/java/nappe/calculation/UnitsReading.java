@@ -3,6 +3,7 @@ package nappe.calculation;
 import java.util.LinkedHashSet;
 import java.util.Set;
 import nappe.formula.Formula;
+import nappe.formula.Parts;
 import nappe.unit.Unit;
 
 /** The units that the quantities of a formula name, in the order of their first appearance. */

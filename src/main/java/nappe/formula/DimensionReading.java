@@ -228,7 +228,7 @@ public final class DimensionReading implements Reading<DimensionReading.Outcome>
                 yield PURE;
             }
             case INDEX, SMALL, LOWEST_OF -> arguments.get(0).read(this);
-            case TALLY -> PURE;
+            case TALLY, COUNT_OF -> PURE;
             default -> pure(call);
         };
     }

@@ -32,6 +32,8 @@ public enum Function {
     LOWEST_OF(1, 1, false),
     /** {@code tally(column, word)}: how many cells of a column hold the word. */
     TALLY(2, 2, false),
+    /** {@code count_of(column)}: how many cells of a column hold a number. */
+    COUNT_OF(1, 1, false),
     /** {@code is_number(x)}: true where x is a number, false where it is words. */
     IS_NUMBER(1, 1, false),
     /** {@code same(a, b)}: exactly equal; only in the layout's own trial rows. */

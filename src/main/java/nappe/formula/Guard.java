@@ -91,7 +91,7 @@ public final class Guard implements Reading<Boolean> {
             case TALLY -> test(arguments.get(1));
             case MATCH_BELOW -> arguments.get(0).read(this);
             case INDEX, SMALL -> arguments.get(1).read(this);
-            case LOWEST_OF -> {}
+            case LOWEST_OF, COUNT_OF -> {}
             default -> readAll(arguments);
         }
         return true;

@@ -119,6 +119,10 @@ public final class NumberReading implements Reading<Value> {
                 Value.of(column(arguments.get(0)).stream()
                         .filter(value -> alike(value, arguments.get(1).read(this)))
                         .count());
+            case COUNT_OF ->
+                Value.of(column(arguments.get(0)).stream()
+                        .filter(value -> value instanceof Value.Number)
+                        .count());
             case IS_NUMBER, SAME -> throw new IllegalStateException("a condition has no number");
             default ->
                 Value.of(arithmetic(

@@ -158,7 +158,7 @@ public final class SignReading implements Reading<Sign> {
             case MIN -> of.stream().reduce(Sign.POSITIVE, SignReading::weaker);
             case MAX -> of.stream().reduce(Sign.ANY, SignReading::stronger);
             case MATCH, MATCH_BELOW -> Sign.POSITIVE;
-            case TALLY -> Sign.NOT_NEGATIVE;
+            case TALLY, COUNT_OF -> Sign.NOT_NEGATIVE;
             default -> Sign.ANY;
         };
     }

@@ -111,7 +111,12 @@ public final class Verification {
                         given(free.symbol(), free.unit(), free.sign(), value);
                     }
                 } else if (isBound(item, row)) {
-                    items.lay(item, scope, Strip.down(SHEET, next, 1));
+                    Strip strip = Strip.down(SHEET, next, 1);
+                    if (item instanceof Item.Line line && line.formula() instanceof Formula.Summary over) {
+                        items.layOverCases(line, over, new Run(List.of(scope.cell(over.name()))), scope, strip);
+                    } else {
+                        items.lay(item, scope, strip);
+                    }
                     next += 100;
                 }
             }

@@ -39,8 +39,29 @@ final class FormulaStatements {
         DimensionReading.Outcome outcome = formula.read(dimensions(parser));
         @Nullable Unit unit = parts.unitOrWords(1);
         parts.sameDimension(unit, outcome);
+        overCases(formula);
         parts.defineOutcome(symbol, unit);
         draft.add(new Item.Line(symbol, formula, unit, parts.text(2), parts.source(3), null, false));
+    }
+
+    /** The highest or lowest over the cases is a line by itself, of something that each case has. */
+    private void overCases(Formula formula) {
+        if (formula instanceof Formula.Summary over) {
+            boolean perCase =
+                    draft.reach.getOrDefault(over.name(), Set.of()).stream().anyMatch(draft::isTypedPerCase);
+            if (!perCase || over.kind().equals("last")) {
+                throw parts.fault(
+                        over.kind() + "(" + over.name() + ") is over the cases: "
+                                + (perCase ? "write highest or lowest" : over.name() + " is the same in every case"),
+                        "not-per-case");
+            }
+            parts.hasValue(new Formula.Symbol(over.name()));
+        } else if (Summaries.in(formula)) {
+            throw parts.fault(
+                    "highest(...), lowest(...), before(...) and after(...) stand alone: give the highest over the cases a"
+                            + " line of its own",
+                    "not-alone");
+        }
     }
 
     void root() {

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import nappe.formula.DimensionReading;
+import nappe.formula.Formula;
 import nappe.formula.FormulaException;
 import nappe.source.CitedTable;
 import nappe.source.Publication;
@@ -70,6 +71,11 @@ final class SheetDraft {
                         && (given.from() == Item.From.CASE || given.from() == Item.From.NEIGHBOUR));
     }
 
+    /** Whether a symbol rests on what is typed once per case: what sums it up over the cases does not. */
+    private boolean isPerCase(String symbol) {
+        return reach.getOrDefault(symbol, Set.of(symbol)).stream().anyMatch(this::isTypedPerCase);
+    }
+
     boolean isFree(String symbol) {
         return items.stream()
                 .anyMatch(
@@ -111,6 +117,9 @@ final class SheetDraft {
         Set<String> all = new LinkedHashSet<>();
         for (String symbol : Closure.restsOn(item)) {
             all.addAll(reach.getOrDefault(symbol, Set.of(symbol)));
+        }
+        if (item instanceof Item.Line line && line.formula() instanceof Formula.Summary) {
+            all.removeIf(this::isPerCase);
         }
         String bound = bound(item);
         if (bound != null) {

@@ -17,17 +17,16 @@ import nappe.unit.Unit;
 /** Reads one statement into the draft; says which method reads each statement word. */
 final class StatementReader {
     /** What a symbol may be to the station. */
-    private static final List<String> ROLES =
-            List.of(
-                    "flow",
-                    "flow through one",
-                    "units in service",
-                    "water level",
-                    "energy level",
-                    "rapid depth",
-                    "head at the gauge",
-                    "state of flow",
-                    "control width");
+    private static final List<String> ROLES = List.of(
+            "flow",
+            "flow through one",
+            "units in service",
+            "water level",
+            "energy level",
+            "rapid depth",
+            "head at the gauge",
+            "state of flow",
+            "control width");
 
     private final StatementParts parts;
     private final SheetDraft draft;

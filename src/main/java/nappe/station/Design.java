@@ -21,7 +21,22 @@ public record Design(
         List<Assumption> assumptions,
         List<String> references,
         List<Requirement> requirements,
-        List<RevisionNote> revisions) {
+        List<RevisionNote> revisions,
+        List<Combination> combinations,
+        List<LevelPair> levels) {
+
+    /** A design without combinations and without a table of levels. */
+    public Design(
+            Project project,
+            List<Element> elements,
+            List<FlowCase> cases,
+            List<Demand> demands,
+            List<Assumption> assumptions,
+            List<String> references,
+            List<Requirement> requirements,
+            List<RevisionNote> revisions) {
+        this(project, elements, cases, demands, assumptions, references, requirements, revisions, List.of(), List.of());
+    }
 
     /** Where something was typed: sheet and cell of the input workbook. */
     public record Origin(String sheet, String cell) {}
@@ -69,6 +84,8 @@ public record Design(
     /**
      * One flow with one tailwater.
      *
+     * @param units how many like devices are in service side by side; one where it was left blank
+     * @param tailwater water level downstream; left blank it comes from the table of levels, where there is one
      * @param typed what an element asks for in each case, by tag and symbol ({@code F1.h_g})
      */
     public record FlowCase(
@@ -76,9 +93,44 @@ public record Design(
             String period,
             String year,
             Typed flow,
+            Typed units,
             Typed tailwater,
             String tailwaterReturn,
-            Map<String, Typed> typed) {}
+            Map<String, Typed> typed) {
+        /** A case with one unit in service. */
+        public FlowCase(
+                String name,
+                String period,
+                String year,
+                Typed flow,
+                Typed tailwater,
+                String tailwaterReturn,
+                Map<String, Typed> typed) {
+            this(
+                    name,
+                    period,
+                    year,
+                    flow,
+                    new Typed(new Value.None(Value.NOT_GIVEN), Unit.one(), "", "", flow.origin()),
+                    tailwater,
+                    tailwaterReturn,
+                    typed);
+        }
+    }
+
+    /**
+     * The flow of one case with the water level downstream of another, besides the cases as typed.
+     *
+     * @param flowOf name of the case whose flow it takes, with its units in service
+     * @param levelOf name of the case whose level it takes
+     * @param canCoincide whether the engineer holds that both can occur together; if not it is shown and not judged
+     * @param basis why it can or cannot
+     */
+    public record Combination(
+            String name, String flowOf, String levelOf, boolean canCoincide, String basis, Origin origin) {}
+
+    /** A pair of the table of levels downstream: at this flow of all the station the water stands so high. */
+    public record LevelPair(Typed flow, Typed level) {}
 
     /** A limit demanded by an authority or owner: a result of an element at most or at least a value, with citation and cells. */
     public record Demand(

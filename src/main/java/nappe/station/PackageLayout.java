@@ -9,15 +9,10 @@ import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
 import nappe.calculation.ElementSheet;
-import nappe.calculation.ItemLayout;
 import nappe.calculation.RatingGrid;
 import nappe.calculation.Scope;
 import nappe.calculation.Sheet;
 import nappe.calculation.SheetDraft;
-import nappe.calculation.TrialRows;
-import nappe.formula.Formula;
-import nappe.method.Item;
-import nappe.method.Limit;
 import nappe.method.MethodSheet;
 import nappe.unit.Dimension;
 import nappe.unit.Unit;
@@ -53,15 +48,15 @@ public final class PackageLayout {
     private final Map<String, MethodSheet> methods = new LinkedHashMap<>();
     private final List<SheetDraft> drafts = new ArrayList<>();
     private final List<String> contents = new ArrayList<>();
-    private final List<String> caseNames;
+    private final Function<String, MethodSheet> methodOf;
     private final Function<MethodSheet, List<String>> drawn;
 
     private PackageLayout(
             Design design, Function<String, MethodSheet> methodOf, Function<MethodSheet, List<String>> drawn) {
         this.design = design;
+        this.methodOf = methodOf;
         this.drawn = drawn;
         design.elements().forEach(e -> methods.put(e.tag(), methodOf.apply(e.method())));
-        this.caseNames = design.cases().stream().map(Design.FlowCase::name).toList();
     }
 
     /**
@@ -82,12 +77,7 @@ public final class PackageLayout {
             Function<String, MethodSheet> methodOf,
             Function<MethodSheet, List<String>> drawn,
             SoftwareStatement software) {
-        PackageLayout layout = new PackageLayout(design, methodOf, drawn);
-        List<DesignFault> faults = DemandCheck.faults(design, layout.methods);
-        if (!faults.isEmpty()) {
-            throw new StationException(faults);
-        }
-        return layout.lay(software);
+        return new PackageLayout(design, methodOf, drawn).lay(software);
     }
 
     private SheetDraft draft(String name, String title, String content) {
@@ -158,69 +148,61 @@ public final class PackageLayout {
         SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
 
-        Cells cells = new Cells(design.project().system(), constantSheet);
-        Sources sources = new Sources(cells, constantSheet, tableSheet, standingSheet);
-        List<MethodSheet> distinct = methods.values().stream().distinct().toList();
-        Map<String, Map<String, Cell>> constants = sources.layConstants(distinct);
-        CasesSheet cases = new CasesSheet(cells, caseSheet, design.cases());
-        cases.lay(design.project().flowUnit(), design.project().datum());
-        EntriesSheet entries = new EntriesSheet(cells, entrySheet);
-        Map<String, Scope> scopes = new LinkedHashMap<>();
-        for (Design.Element element : design.elements()) {
-            Scope scope = Scope.ofElement();
-            method(element).tables().values().forEach(table -> sources.layTable(table, scope));
-            entries.lay(element, method(element), scope);
-            constants.getOrDefault(element.method(), Map.of()).forEach(scope::put);
-            scopes.put(element.tag(), scope);
-        }
-        Map<Design.Demand, Cell> demands = entries.layDemands(design.demands());
-
-        TrialRows trialRows = new TrialRows(cells, trialSheet);
-        ItemLayout items = new ItemLayout(cells, trialRows);
-        List<ElementSheet.LimitResult> limits = new ArrayList<>();
+        StationLayout station = new StationLayout(
+                design,
+                methodOf,
+                new StationLayout.Sheets(
+                        caseSheet,
+                        entrySheet,
+                        constantSheet,
+                        tableSheet,
+                        standingSheet,
+                        trialSheet,
+                        tag -> java.util.Objects.requireNonNull(elementSheets.get(tag))));
+        Cells cells = station.cells();
+        int judged = station.columns().judged();
+        List<String> caseNames = station.columns().judgedNames();
+        List<ElementSheet.LimitResult> limits =
+                station.limits().stream().map(limit -> limit.first(judged)).toList();
         Map<String, Block.Table> ratings = new LinkedHashMap<>();
         Map<String, List<Scope>> casesOf = new LinkedHashMap<>();
-        Map<String, List<Block.Line>> linesOf = new LinkedHashMap<>();
-        List<Scope> downstream = List.of();
-        MethodSheet below = null;
+        Map<String, List<Block.Line>> linesOf = station.lines();
         for (Design.Element element : design.elements()) {
             MethodSheet method = method(element);
-            Scope scope = java.util.Objects.requireNonNull(scopes.get(element.tag()));
-            List<Scope> caseScopes = caseScopes(element, method, scope, cases, below, downstream);
-            SheetDraft sheet = java.util.Objects.requireNonNull(elementSheets.get(element.tag()));
-            ElementSheet laid =
-                    new ElementSheet(element.tag(), method, items, trialRows, sheet, scope, caseNames, caseScopes);
-            limits.addAll(laid.lay(workedCase(), demanded(element, demands)));
-            linesOf.put(element.tag(), laid.lines());
+            List<Scope> caseScopes = station.cases(element.tag()).subList(0, judged);
             casesOf.put(element.tag(), caseScopes);
             SheetDraft figureSheet = figureSheets.get(element.tag());
             if (figureSheet != null) {
                 new DrawnSheet(method, figureSheet)
-                        .lay(element.tag(), drawn.apply(method), caseScopes.get(workedCase()));
+                        .lay(element.tag(), drawn.apply(method), caseScopes.get(station.workedCase()));
             }
             SheetDraft ratingSheet = ratingSheets.get(element.tag());
             if (ratingSheet != null) {
-                Block.Table table = rating(element, method, items, scope, ratingSheet, trialRows);
+                Block.Table table = rating(element, method, station, ratingSheet);
                 ratings.put(element.tag(), table);
                 new RatingCurve(cells, method, ratingSheet)
                         .lay(table, method.ratings().get(0), "Rating curve of " + element.tag(), caseNames, caseScopes);
             }
-            downstream = caseScopes;
-            below = method;
         }
 
         BackSheets back = new BackSheets(cells, design);
-        back.roots(trialSheet, trialRows.solved());
-        SummarySheet.Sorted sorted =
-                new SummarySheet(cells, limitSheet, trialSheet, caseNames, cases.names()).lay(limits);
+        back.roots(trialSheet, station.trialRows().solved());
+        SummarySheet.Sorted sorted = new SummarySheet(
+                        cells,
+                        limitSheet,
+                        trialSheet,
+                        caseNames,
+                        station.cases().judgedNames())
+                .lay(limits);
         CheckerSheets.glossary(glossarySheet, linesOf);
         CheckerSheets.formulas(checkerSheet, linesOf);
         Map<String, Integer> numbers = new LinkedHashMap<>();
         elementSheets.forEach((tag, sheet) -> numbers.put(tag, drafts.indexOf(sheet) + 1));
-        RegisterSheet.lay(registerSheet, cells, linesOf, numbers, caseNames);
+        RegisterSheet.lay(
+                registerSheet, cells, linesOf, numbers, station.columns().names());
         limitSheet.figure("Margins of the limits", LIMITS_FIGURE);
         back.assumptions(assumptionSheet);
-        back.references(referenceSheet, distinct);
+        back.references(referenceSheet, station.distinctMethods());
         back.software(softwareSheet, software);
         FrontSheets front = new FrontSheets(cells, design);
         front.cover(cover, sorted);
@@ -231,7 +213,7 @@ public final class PackageLayout {
             sheets.add(drafts.get(i).finish(i + 1));
         }
         return new Layout(
-                List.copyOf(sheets), List.copyOf(cells.all()), ratings, casesOf, List.copyOf(limits), workedCase());
+                List.copyOf(sheets), List.copyOf(cells.all()), ratings, casesOf, limits, station.workedCase());
     }
 
     private boolean hasRemarks() {
@@ -245,111 +227,11 @@ public final class PackageLayout {
         return java.util.Objects.requireNonNull(methods.get(element.tag()));
     }
 
-    private int workedCase() {
-        int i = caseNames.indexOf(design.project().workedCase());
-        return Math.max(0, i);
-    }
-
-    private List<Scope> caseScopes(
-            Design.Element element,
-            MethodSheet method,
-            Scope scope,
-            CasesSheet cases,
-            @org.jspecify.annotations.Nullable MethodSheet below,
-            List<Scope> downstream) {
-        List<Item.Given> asked = new ArrayList<>();
-        for (Item item : method.items()) {
-            if (item instanceof Item.Given given
-                    && given.from() == Item.From.CASE
-                    && given.role().isEmpty()) {
-                asked.add(given);
-            }
-        }
-        Map<String, List<Cell>> own = cases.layOwn(element.tag(), asked);
-        List<Scope> scopes = new ArrayList<>();
-        for (int c = 0; c < caseNames.size(); c++) {
-            Scope inner = scope.inner();
-            for (Map.Entry<String, List<Cell>> typed : own.entrySet()) {
-                inner.put(typed.getKey(), typed.getValue().get(c));
-            }
-            for (Item item : method.items()) {
-                if (item instanceof Item.Given given && !given.role().isEmpty()) {
-                    inner.put(given.symbol(), linked(given.role(), cases, c, below, downstream));
-                }
-            }
-            scopes.add(inner);
-        }
-        return scopes;
-    }
-
-    /** What a role is in a case: the flow, or a level from the neighbour downstream, or from the case at the end. */
-    private Cell linked(
-            String role,
-            CasesSheet cases,
-            int c,
-            @org.jspecify.annotations.Nullable MethodSheet below,
-            List<Scope> downstream) {
-        switch (role) {
-            case "flow":
-                return cases.flow(c);
-            case "flow through one":
-                return cases.flowThroughOne(c);
-            case "units in service":
-                return cases.unitsInService(c);
-            default:
-                break;
-        }
-        String offered = below == null ? null : below.gives().get(role);
-        if (offered != null) {
-            return downstream.get(c).cell(offered);
-        }
-        if (below == null && (role.equals("water level") || role.equals("energy level"))) {
-            return cases.level(c);
-        }
-        throw new StationException(List.of(new DesignFault(
-                new Design.Origin("Project", ""),
-                "nothing downstream gives a " + role
-                        + " to this element; put an element below it that does, or take it away",
-                "link-missing")));
-    }
-
-    private List<ElementSheet.Demanded> demanded(Design.Element element, Map<Design.Demand, Cell> cells) {
-        List<ElementSheet.Demanded> demanded = new ArrayList<>();
-        for (Design.Demand demand : design.demands()) {
-            if (demand.tag().equalsIgnoreCase(element.tag())) {
-                String name = "bound";
-                Formula value = new Formula.Symbol(demand.symbol());
-                Formula bound = new Formula.Symbol(name);
-                Formula scale = scale(demand);
-                Limit limit = demand.atMost()
-                        ? new Limit(value, bound, true, scale, null, demand.description(), demand.citation())
-                        : new Limit(bound, value, false, scale, null, demand.description(), demand.citation());
-                demanded.add(new ElementSheet.Demanded(
-                        limit, Map.of(name, java.util.Objects.requireNonNull(cells.get(demand)))));
-            }
-        }
-        return demanded;
-    }
-
-    /** A fraction of an elevation means nothing: what is left to a demanded length or level is counted in feet or metres. */
-    private Formula scale(Design.Demand demand) {
-        Dimension dimension = demand.value().unit().dimension();
-        return dimension.equals(Dimension.LENGTH)
-                ? new Formula.Quantity(1, "1", design.project().system().coherentUnit(dimension))
-                : new Formula.Call(nappe.formula.Function.ABS, List.of(new Formula.Symbol("bound")));
-    }
-
-    private Block.Table rating(
-            Design.Element element,
-            MethodSheet method,
-            ItemLayout items,
-            Scope scope,
-            SheetDraft sheet,
-            TrialRows trialRows) {
-        trialRows.nowFor(element.tag(), "rating");
+    private Block.Table rating(Design.Element element, MethodSheet method, StationLayout station, SheetDraft sheet) {
+        station.trialRows().nowFor(element.tag(), "rating");
         Map<Dimension, Unit> reports = new LinkedHashMap<>();
         for (Unit unit : List.of(design.project().flowUnit(), design.project().headUnit())) {
-            if (!unit.equals(items.cells().unit(unit.dimension()))) {
+            if (!unit.equals(station.cells().unit(unit.dimension()))) {
                 reports.put(unit.dimension(), unit);
             }
         }
@@ -358,8 +240,8 @@ public final class PackageLayout {
         method.cautions().forEach(sheet::caution);
         sheet.gap();
         sheet.figure("Rating curve of " + element.tag(), element.tag() + RATING_FIGURE);
-        return new RatingGrid(items, method, reports)
-                .lay(method.ratings().get(0), scope, sheet, "Rating of " + element.tag())
+        return new RatingGrid(station.items(), method, reports)
+                .lay(method.ratings().get(0), station.scope(element.tag()), sheet, "Rating of " + element.tag())
                 .table();
     }
 }

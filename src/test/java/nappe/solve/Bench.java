@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import nappe.calculation.Block;
+import nappe.calculation.CaseColumns;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
 import nappe.calculation.ElementSheet;
@@ -83,7 +84,8 @@ public final class Bench {
         for (int c = 0; c < cases.size(); c++) {
             names.add("case " + (c + 1));
         }
-        this.limits = new ElementSheet("E1", method, items, trialRows, sheet, scope, names, cases).lay(0, List.of());
+        this.limits = new ElementSheet("E1", method, items, trialRows, sheet, scope, CaseColumns.of(names), cases)
+                .lay(0, List.of());
         SheetDraft ratingSheet = new SheetDraft("E1 rating", "Rating");
         method.ratings()
                 .forEach(rating -> ratings.add(new RatingGrid(items, method, Map.of())

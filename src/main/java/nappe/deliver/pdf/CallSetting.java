@@ -38,6 +38,8 @@ final class CallSetting {
             case INDEX -> words("entry", 1, "of", 0);
             case SMALL -> words("number", 1, "from the smallest of", 0);
             case LOWEST_OF -> after(reading.words("smallest of"), argument(0)).bound(BoxRow.SUM);
+            case COUNT_OF ->
+                after(reading.words("count of numbers in"), argument(0)).bound(BoxRow.SUM);
             case TALLY -> words("count of", 1, "in", 0);
             case IS_NUMBER -> after(argument(0), reading.words("is given")).bound(BoxRow.LOOSE);
             case SAME ->

@@ -40,7 +40,7 @@ final class CasesGrids {
 
     /** The tables; none where there is one case or none, since it is worked in full. */
     List<View.Grid> grids(double width) {
-        int cases = lines.caseNames().size();
+        int cases = lines.printed();
         if (cases < 2 || lines.lines().stream().allMatch(line -> line.perCase().isEmpty())) {
             return List.of();
         }
@@ -61,7 +61,7 @@ final class CasesGrids {
     }
 
     private int tables(double width) {
-        int cases = lines.caseNames().size();
+        int cases = lines.printed();
         double room = width - fixed.least();
         int perTable = (int) Math.max(1, Math.min(MOST, Math.floor(room / caseWidth)));
         return (cases + perTable - 1) / perTable;
@@ -85,10 +85,10 @@ final class CasesGrids {
 
     private double measureCases() {
         ColumnWidths names = new ColumnWidths(1, SIZE);
-        lines.caseNames().forEach(name -> names.text(0, name, true));
+        lines.caseNames().subList(0, lines.printed()).forEach(name -> names.text(0, name, true));
         ColumnWidths widths = new ColumnWidths(1, SIZE);
         for (Block.Line line : perCase(lines)) {
-            for (int i = 0; i < lines.caseNames().size(); i++) {
+            for (int i = 0; i < lines.printed(); i++) {
                 widths.text(0, value(line, i).characters(), true);
             }
         }
@@ -108,7 +108,7 @@ final class CasesGrids {
     }
 
     private int perTable(double width) {
-        int cases = lines.caseNames().size();
+        int cases = lines.printed();
         return (cases + tables(width) - 1) / tables(width);
     }
 

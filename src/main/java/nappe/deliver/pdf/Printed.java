@@ -14,9 +14,7 @@ final class Printed {
     static String value(Results results, Cell cell) {
         Value value = results.value(cell);
         if (value instanceof Value.Number number) {
-            return cell.kind() == Cell.Kind.FORMULA
-                    ? Digits.print(cell.unit(), number.value())
-                    : Digits.asTyped(number.value());
+            return cell.isComputed() ? Digits.print(cell.unit(), number.value()) : Digits.asTyped(number.value());
         }
         return value instanceof Value.Word word ? word.text() : ((Value.None) value).why();
     }

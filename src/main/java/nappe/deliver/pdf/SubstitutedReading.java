@@ -100,7 +100,7 @@ final class SubstitutedReading {
 
     private static String digits(Cell cell, double value) {
         boolean whole = value == Math.rint(value) && Math.abs(value) < LARGEST_WHOLE;
-        return cell.kind() == Cell.Kind.FORMULA && !whole
+        return cell.isComputed() && !whole
                 ? Digits.print(value, Math.min(12, Digits.decimals(cell.unit(), value) + EXTRA))
                 : Digits.asTyped(value);
     }

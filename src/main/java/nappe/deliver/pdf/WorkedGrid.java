@@ -219,6 +219,7 @@ final class WorkedGrid {
                 case ENTRY -> "entry, ";
                 case CONSTANT -> "constant, ";
                 case TABLE -> "from a table, ";
+                case RERUN -> "found by reruns, as issued, ";
                 case FORMULA -> "";
             };
             String all = line.forAll() != null && lines.caseNames().size() > 1 ? ", all cases" : "";

@@ -97,7 +97,7 @@ final class Canvas {
     private static String format(Cell cell, double value) {
         int decimals = Digits.decimals(cell.unit(), value);
         boolean whole = decimals == 0 && value == Math.rint(value);
-        return whole || cell.kind() != Cell.Kind.FORMULA ? Styles.AS_TYPED : Digits.format(decimals);
+        return whole || !cell.isComputed() ? Styles.AS_TYPED : Digits.format(decimals);
     }
 
     void text(int row, int column, Role role, Align align, String text) {

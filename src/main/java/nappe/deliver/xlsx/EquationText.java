@@ -40,6 +40,7 @@ final class EquationText {
                     case ENTRY -> "entry";
                     case CONSTANT -> "constant";
                     case TABLE -> "cited table";
+                    case RERUN -> "found by reruns, as issued";
                     case FORMULA -> "";
                 };
     }

@@ -214,6 +214,7 @@ public final class SpreadsheetReading implements Reading<Written> {
             case MATCH -> function("MATCH", arguments, ",0");
             case MATCH_BELOW -> matchBelow(arguments);
             case LOWEST_OF -> function("MIN", arguments, "");
+            case COUNT_OF -> function("COUNT", arguments, "");
             case TALLY -> function("COUNTIF", arguments, "");
             case IS_NUMBER -> function("ISNUMBER", arguments, "");
             case SAME ->

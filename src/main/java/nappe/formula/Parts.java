@@ -1,14 +1,13 @@
-package nappe.calculation;
+package nappe.formula;
 
 import java.util.List;
 import java.util.function.Consumer;
-import nappe.formula.Formula;
 
 /** Every node of a formula, from left to right. */
-final class Parts {
+public final class Parts {
     private Parts() {}
 
-    static void visit(Formula formula, Consumer<Formula> visitor) {
+    public static void visit(Formula formula, Consumer<Formula> visitor) {
         visitor.accept(formula);
         children(formula).forEach(child -> visit(child, visitor));
     }

@@ -1,0 +1,257 @@
+package nappe.station;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Objects;
+import java.util.function.Function;
+import nappe.calculation.Block;
+import nappe.calculation.CaseColumns;
+import nappe.calculation.Cell;
+import nappe.calculation.Cells;
+import nappe.calculation.ElementSheet;
+import nappe.calculation.ItemLayout;
+import nappe.calculation.Scope;
+import nappe.calculation.SheetDraft;
+import nappe.calculation.TrialRows;
+import nappe.formula.Formula;
+import nappe.method.Item;
+import nappe.method.Limit;
+import nappe.method.MethodSheet;
+import nappe.unit.Dimension;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * Lays the calculation itself: cases, entries, constants and every element from the downstream end up, each case taking
+ * the levels of its neighbour downstream in the same case. A package is built around it; a rerun needs nothing else.
+ */
+public final class StationLayout {
+    /** The sheets that the calculation is laid on. */
+    record Sheets(
+            SheetDraft cases,
+            SheetDraft entries,
+            SheetDraft constants,
+            SheetDraft tables,
+            SheetDraft standing,
+            SheetDraft trials,
+            Function<String, SheetDraft> element) {}
+
+    private final Design design;
+    private final Map<String, MethodSheet> methods = new LinkedHashMap<>();
+    private final Sheets sheets;
+    private final Cells cells;
+    private final ItemLayout items;
+    private final TrialRows trialRows;
+    private final CasesSheet cases;
+    private final CaseColumns columns;
+    private final Map<String, Scope> scopes = new LinkedHashMap<>();
+    private final Map<String, List<Scope>> casesOf = new LinkedHashMap<>();
+    private final Map<String, List<Block.Line>> linesOf = new LinkedHashMap<>();
+    private final List<ElementSheet.LimitResult> limits = new ArrayList<>();
+
+    /**
+     * @param methodOf the method sheet of a name
+     * @throws StationException where entries do not fit the methods
+     */
+    StationLayout(Design design, Function<String, MethodSheet> methodOf, Sheets sheets) {
+        this.design = design;
+        this.sheets = sheets;
+        design.elements().forEach(e -> methods.put(e.tag(), methodOf.apply(e.method())));
+        List<DesignFault> faults = DemandCheck.faults(design, methods);
+        if (!faults.isEmpty()) {
+            throw new StationException(faults);
+        }
+        this.cells = new Cells(design.project().system(), sheets.constants());
+        this.trialRows = new TrialRows(cells, sheets.trials());
+        this.items = new ItemLayout(cells, trialRows);
+        this.cases = new CasesSheet(cells, sheets.cases(), design);
+        this.columns = cases.columns();
+        lay();
+    }
+
+    /**
+     * The calculation alone, on sheets that go nowhere: for reruns with another flow, level or size.
+     *
+     * @param methodOf the method sheet of a name
+     * @throws StationException where entries do not fit the methods
+     */
+    public static StationLayout bare(Design design, Function<String, MethodSheet> methodOf) {
+        SheetDraft tables = new SheetDraft("Tables", "");
+        return new StationLayout(
+                design,
+                methodOf,
+                new Sheets(
+                        new SheetDraft("Cases", ""),
+                        new SheetDraft("Entries", ""),
+                        new SheetDraft("Constants", ""),
+                        tables,
+                        tables,
+                        new SheetDraft("Trials", ""),
+                        tag -> new SheetDraft(tag, "")));
+    }
+
+    private void lay() {
+        Sources sources = new Sources(cells, sheets.constants(), sheets.tables(), sheets.standing());
+        Map<String, Map<String, Cell>> constants = sources.layConstants(distinctMethods());
+        cases.lay();
+        EntriesSheet entries = new EntriesSheet(cells, sheets.entries());
+        for (Design.Element element : design.elements()) {
+            Scope scope = Scope.ofElement();
+            method(element.tag()).tables().values().forEach(table -> sources.layTable(table, scope));
+            entries.lay(element, method(element.tag()), scope);
+            constants.getOrDefault(element.method(), Map.of()).forEach(scope::put);
+            scopes.put(element.tag(), scope);
+        }
+        Map<Design.Demand, Cell> demands = entries.layDemands(design.demands());
+        @Nullable String below = null;
+        for (Design.Element element : design.elements()) {
+            String tag = element.tag();
+            List<Scope> caseScopes = caseScopes(tag, below);
+            casesOf.put(tag, caseScopes);
+            ElementSheet laid = new ElementSheet(
+                    tag, method(tag), items, trialRows, sheets.element().apply(tag), scope(tag), columns, caseScopes);
+            limits.addAll(laid.lay(workedCase(), demanded(element, demands)));
+            linesOf.put(tag, laid.lines());
+            below = tag;
+        }
+    }
+
+    Cells cells() {
+        return cells;
+    }
+
+    /** All cells, in the order of evaluation. */
+    public List<Cell> allCells() {
+        return List.copyOf(cells.all());
+    }
+
+    ItemLayout items() {
+        return items;
+    }
+
+    TrialRows trialRows() {
+        return trialRows;
+    }
+
+    CasesSheet cases() {
+        return cases;
+    }
+
+    /** The columns of every element's calculation. */
+    public CaseColumns columns() {
+        return columns;
+    }
+
+    /** The scope of what serves all cases of an element. */
+    public Scope scope(String tag) {
+        return Objects.requireNonNull(scopes.get(tag));
+    }
+
+    /** The scopes of an element's cases, one per column. */
+    public List<Scope> cases(String tag) {
+        return Objects.requireNonNull(casesOf.get(tag));
+    }
+
+    /** The lines of each element, by its tag. */
+    Map<String, List<Block.Line>> lines() {
+        return linesOf;
+    }
+
+    /** Every limit with its margin and verdict in every column. */
+    public List<ElementSheet.LimitResult> limits() {
+        return List.copyOf(limits);
+    }
+
+    public MethodSheet method(String tag) {
+        return Objects.requireNonNull(methods.get(tag));
+    }
+
+    List<MethodSheet> distinctMethods() {
+        return methods.values().stream().distinct().toList();
+    }
+
+    /** Index of the case worked in full. */
+    int workedCase() {
+        return Math.max(0, columns.names().indexOf(design.project().workedCase()));
+    }
+
+    private List<Scope> caseScopes(String tag, @Nullable String below) {
+        MethodSheet method = method(tag);
+        List<Item.Given> asked = new ArrayList<>();
+        for (Item item : method.items()) {
+            if (item instanceof Item.Given given
+                    && given.from() == Item.From.CASE
+                    && given.role().isEmpty()) {
+                asked.add(given);
+            }
+        }
+        Map<String, List<Cell>> own = cases.layOwn(tag, asked);
+        List<Scope> inners = new ArrayList<>();
+        for (int c = 0; c < columns.count(); c++) {
+            Scope inner = scope(tag).inner();
+            for (Map.Entry<String, List<Cell>> typed : own.entrySet()) {
+                inner.put(typed.getKey(), typed.getValue().get(c));
+            }
+            for (Item item : method.items()) {
+                if (item instanceof Item.Given given && !given.role().isEmpty()) {
+                    inner.put(given.symbol(), linked(given.role(), c, below));
+                }
+            }
+            inners.add(inner);
+        }
+        return inners;
+    }
+
+    /** What a role is in a case: the flow, or a level from the neighbour downstream, or from the case at the end. */
+    private Cell linked(String role, int c, @Nullable String below) {
+        switch (role) {
+            case "flow":
+                return cases.flow(c);
+            case "flow through one":
+                return cases.flowThroughOne(c);
+            case "units in service":
+                return cases.unitsInService(c);
+            default:
+                break;
+        }
+        String offered = below == null ? null : method(below).gives().get(role);
+        if (offered != null && below != null) {
+            return cases(below).get(c).cell(offered);
+        }
+        if (below == null && (role.equals("water level") || role.equals("energy level"))) {
+            return cases.level(c);
+        }
+        throw new StationException(List.of(new DesignFault(
+                new Design.Origin("Project", ""),
+                "nothing downstream gives a " + role
+                        + " to this element; put an element below it that does, or take it away",
+                "link-missing")));
+    }
+
+    private List<ElementSheet.Demanded> demanded(Design.Element element, Map<Design.Demand, Cell> bounds) {
+        List<ElementSheet.Demanded> demanded = new ArrayList<>();
+        for (Design.Demand demand : design.demands()) {
+            if (demand.tag().equalsIgnoreCase(element.tag())) {
+                String name = "bound";
+                Formula value = new Formula.Symbol(demand.symbol());
+                Formula bound = new Formula.Symbol(name);
+                Formula scale = scale(demand);
+                Limit limit = demand.atMost()
+                        ? new Limit(value, bound, true, scale, null, demand.description(), demand.citation())
+                        : new Limit(bound, value, false, scale, null, demand.description(), demand.citation());
+                demanded.add(
+                        new ElementSheet.Demanded(limit, Map.of(name, Objects.requireNonNull(bounds.get(demand)))));
+            }
+        }
+        return demanded;
+    }
+
+    /** A fraction of an elevation means nothing: what is left to a demanded length or level is counted in feet or metres. */
+    private Formula scale(Design.Demand demand) {
+        Dimension dimension = demand.value().unit().dimension();
+        return dimension.equals(Dimension.LENGTH)
+                ? new Formula.Quantity(1, "1", design.project().system().coherentUnit(dimension))
+                : new Formula.Call(nappe.formula.Function.ABS, List.of(new Formula.Symbol("bound")));
+    }
+}
