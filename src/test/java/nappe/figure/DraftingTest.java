@@ -107,7 +107,7 @@ class DraftingTest {
                 .startsWith(
                         "State of flow: drowned.",
                         "Water level at the gauge: bounding level, not a measurement.",
-                        "Not drawn, since there is no result: head at the gauge h_a.");
+                        "Not drawn, since there is no result: head at the gauge, where it measures h_a.");
         assertThat(curve(drowned).missing()).contains("Case drawn is not marked: head at the gauge: no result.");
     }
 
