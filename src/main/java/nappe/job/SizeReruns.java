@@ -21,7 +21,7 @@ import nappe.station.StationException;
 import nappe.station.StationLayout;
 import nappe.unit.Unit;
 
-/** Reruns the whole station once for each word of a choice that is screened, and keeps which limits fail. */
+/** Evaluates the whole station anew for each word of a choice that is screened, and keeps which limits fail. */
 final class SizeReruns {
     private static final String NOT_MET = "not met";
 
@@ -41,25 +41,32 @@ final class SizeReruns {
             Screen screen = method.screen();
             if (screen != null) {
                 Item.Given choice = (Item.Given) Objects.requireNonNull(method.item(screen.choice()));
-                found.put(
-                        element.tag(),
-                        choice.words().stream()
-                                .map(word -> rerun(element, choice.symbol(), word))
-                                .toList());
+                found.put(element.tag(), reruns(element, choice));
             }
         }
         return found;
     }
 
-    private SizeRerun rerun(Design.Element element, String choice, String word) {
+    /** The station is laid out once: its layout is the same for every word, and only what is typed differs. */
+    private List<SizeRerun> reruns(Design.Element element, Item.Given choice) {
         StationLayout station;
         try {
-            station = StationLayout.bare(with(design, element, choice, word), methodOf);
+            station = StationLayout.bare(
+                    with(design, element, choice.symbol(), choice.words().get(0)), methodOf);
         } catch (StationException e) {
             String why = e.faults().stream().map(DesignFault::message).collect(Collectors.joining("; "));
-            return new SizeRerun(word, List.of(), false, why);
+            return choice.words().stream()
+                    .map(word -> new SizeRerun(word, List.of(), false, why))
+                    .toList();
         }
-        Map<Cell, Value> values = Evaluation.of(station.allCells());
+        List<Cell> cells = station.allCells();
+        Cell entry = station.entry(element.tag(), choice.symbol());
+        return choice.words().stream()
+                .map(word -> found(word, station, Evaluation.of(cells, Map.of(entry, Value.word(word)))))
+                .toList();
+    }
+
+    private static SizeRerun found(String word, StationLayout station, Map<Cell, Value> values) {
         int judgedCases = station.columns().judged();
         List<SizeRerun.Failure> notMet = new ArrayList<>();
         List<SizeRerun.Failure> noResult = new ArrayList<>();

@@ -20,14 +20,27 @@ import nappe.unit.Unit;
 public final class Evaluation {
     private final Map<Cell, Value> values = new IdentityHashMap<>();
 
-    private Evaluation() {}
+    private final Map<Cell, Value> typedAnew;
+
+    private Evaluation(Map<Cell, Value> typedAnew) {
+        this.typedAnew = typedAnew;
+    }
 
     /**
      * @param cells each after all that it refers to
      * @return the value of each cell, by identity
      */
     public static Map<Cell, Value> of(List<Cell> cells) {
-        Evaluation evaluation = new Evaluation();
+        return of(cells, Map.of());
+    }
+
+    /**
+     * The same as if other values had been typed into some cells.
+     *
+     * @param typedAnew what stands in these typed cells instead; a number where a number was, a word where a word was
+     */
+    public static Map<Cell, Value> of(List<Cell> cells, Map<Cell, Value> typedAnew) {
+        Evaluation evaluation = new Evaluation(typedAnew);
         cells.forEach(cell -> evaluation.values.put(cell, evaluation.value(cell)));
         return evaluation.values;
     }
@@ -35,7 +48,8 @@ public final class Evaluation {
     private Value value(Cell cell) {
         Formula formula = cell.formula();
         if (formula == null) {
-            return java.util.Objects.requireNonNull(cell.typed());
+            Value anew = typedAnew.get(cell);
+            return anew != null ? anew : java.util.Objects.requireNonNull(cell.typed());
         }
         for (String symbol : Guard.guarded(formula)) {
             if (cell.references().get(symbol) instanceof Cell needed && needed.sureness() != Sureness.SURE) {

@@ -9,6 +9,7 @@ import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
 import nappe.calculation.ElementSheet;
+import nappe.calculation.Place;
 import nappe.calculation.RatingGrid;
 import nappe.calculation.Scope;
 import nappe.calculation.ScreenGrid;
@@ -272,11 +273,17 @@ public final class PackageLayout {
                         names,
                         drafts.grid());
         Design.Typed typed = element.typed().get(screen.choice());
-        Cell chosen = scope.cell(screen.choice());
+        Place at = station.entry(element.tag(), screen.choice()).place();
+        String entry = "cell " + at.address() + " of sheet " + at.sheet();
         List<Cell> marks = new SizesSheet(station.items(), method, screen, drafts.grid())
-                .lay(drafts.compared(), chosen, typed == null ? "" : typed.source(), variants);
+                .lay(
+                        drafts.compared(),
+                        scope.cell(screen.choice()),
+                        entry,
+                        typed == null ? "" : typed.source(),
+                        variants);
         SizeRerunsSheet reruns = new SizeRerunsSheet(station.cells(), drafts.reruns(), screen.choice());
-        reruns.notes(SizesSheet.entry(chosen), names);
+        reruns.notes(entry, names);
         reruns.table(variants, marks, java.util.Objects.requireNonNull(sizeReruns.get(element.tag())));
     }
 

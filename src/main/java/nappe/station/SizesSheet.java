@@ -52,27 +52,15 @@ final class SizesSheet {
      * Lays the comparison and returns the cells that mark the chosen one, in the order of the variants.
      *
      * @param choice the cell of the choice in the calculation of the element
+     * @param entry where it is typed, in words
      * @param reason source or basis typed beside it
      */
-    List<Cell> lay(SheetDraft sheet, Cell choice, String reason, List<ScreenGrid.Variant> variants) {
-        sheet.note("Every " + screen.choice() + " of the cited table, in its order; \"chosen\" follows " + entry(choice)
+    List<Cell> lay(SheetDraft sheet, Cell choice, String entry, String reason, List<ScreenGrid.Variant> variants) {
+        sheet.note("Every " + screen.choice() + " of the cited table, in its order; \"chosen\" follows " + entry
                 + ". Lowest and highest are over the cases that are judged. " + legend());
         List<Cell> marks = compared(sheet, place(choice, variants), variants);
         sheet.note("Reason given for the choice: " + (reason.isBlank() ? "none given" : reason));
         return marks;
-    }
-
-    /** Where a choice is typed in the issued workbook, in words: {@code cell C7 of sheet Entries}. */
-    static String entry(Cell choice) {
-        Cell at = choice;
-        while (at.formula() != null) {
-            at = at.references().values().stream()
-                    .filter(Cell.class::isInstance)
-                    .map(Cell.class::cast)
-                    .findFirst()
-                    .orElseThrow();
-        }
-        return "cell " + at.place().address() + " of sheet " + at.place().sheet();
     }
 
     /** What each symbol means. */
