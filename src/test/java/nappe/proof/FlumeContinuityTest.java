@@ -250,7 +250,7 @@ class FlumeContinuityTest {
                 Map.of(
                         "size", quoted(size),
                         "form", quoted(form),
-                        "submerged", quoted("not accepted"),
+                        "submerged", quoted("refused"),
                         "z_f", plain(CREST) + " m"),
                 cases);
     }
