@@ -52,7 +52,7 @@ final class CasesSheet {
                 .toList();
     }
 
-    /** The columns: the cases as typed, the combinations that can coincide, and those that cannot. */
+    /** The columns laid here: the cases as typed, the combinations that can coincide, and those that cannot. */
     CaseColumns columns() {
         List<String> all = Stream.concat(
                         cases.stream().map(Design.FlowCase::name),
@@ -81,6 +81,14 @@ final class CasesSheet {
     /** The water level downstream of the station in the working unit. */
     Cell level(int i) {
         return levels.get(i);
+    }
+
+    /** Adds a column after those of the cases and combinations. */
+    void add(Cell flow, Cell inService, Cell throughOne, Cell level) {
+        flows.add(flow);
+        units.add(inService);
+        flowsThroughOne.add(throughOne);
+        levels.add(level);
     }
 
     /** The names of the judged columns. */
@@ -158,7 +166,8 @@ final class CasesSheet {
         return cells.typed(Cell.Kind.ENTRY, place, "N", Unit.one(), count, Sign.POSITIVE);
     }
 
-    private Cell throughOne(Place place, Cell flow, Cell inService) {
+    /** The flow through one of the units in service. */
+    Cell throughOne(Place place, Cell flow, Cell inService) {
         Scope scope = Scope.ofElement();
         scope.put("Q", flow);
         scope.put("N", inService);
@@ -314,7 +323,8 @@ final class CasesSheet {
         throw new IllegalArgumentException("no case " + name);
     }
 
-    private Cell same(Place place, Cell other) {
+    /** A cell that repeats another. */
+    Cell same(Place place, Cell other) {
         Scope scope = Scope.ofElement();
         scope.put("x", other);
         return cells.raw(place, other.symbol(), other.unit(), Formulas.symbol("x"), scope, null, false);

@@ -64,20 +64,22 @@ public final class PackageLayout {
      * @throws StationException where entries do not fit the methods
      */
     public static Layout of(Design design, Function<String, MethodSheet> methodOf, SoftwareStatement software) {
-        return of(design, methodOf, method -> List.of(), software);
+        return of(design, methodOf, method -> List.of(), FoundFlows.NONE, software);
     }
 
     /**
      * @param methodOf the method sheet of a name
      * @param drawn the symbols whose values the drawing of a method shows; empty for a method without drawing
+     * @param found the flows at which limits are first reached
      * @throws StationException where entries do not fit the methods
      */
     public static Layout of(
             Design design,
             Function<String, MethodSheet> methodOf,
             Function<MethodSheet, List<String>> drawn,
+            FoundFlows found,
             SoftwareStatement software) {
-        return new PackageLayout(design, methodOf, drawn).lay(software);
+        return new PackageLayout(design, methodOf, drawn).lay(found, software);
     }
 
     private SheetDraft draft(String name, String title, String content) {
@@ -87,12 +89,16 @@ public final class PackageLayout {
         return draft;
     }
 
-    private Layout lay(SoftwareStatement software) {
+    private Layout lay(FoundFlows found, SoftwareStatement software) {
         SheetDraft cover = draft("Cover", "Cover", "what this calculation is for, status, approvals, cautions");
         SheetDraft index = draft(
                 "Index", "Index, requirements and revisions", "this list; requirements and where they are answered");
         SheetDraft limitSheet =
                 draft("Limits", "Summary of limits", "every limit in its worst case, and in every case");
+        SheetDraft foundDraft = draft(
+                "Found",
+                "Where each limit is first reached",
+                "flows at which a verdict turns, as issued, with live margins");
         SheetDraft caseSheet =
                 draft("Cases", "Design flows and water levels", "flow cases as typed and in working units");
         SheetDraft entrySheet = draft(
@@ -148,9 +154,12 @@ public final class PackageLayout {
         SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
 
+        FoundSheet foundSheet = new FoundSheet(foundDraft, found);
+        foundSheet.head();
         StationLayout station = new StationLayout(
                 design,
                 methodOf,
+                found.cases(),
                 new StationLayout.Sheets(
                         caseSheet,
                         entrySheet,
@@ -158,6 +167,7 @@ public final class PackageLayout {
                         tableSheet,
                         standingSheet,
                         trialSheet,
+                        foundDraft,
                         tag -> java.util.Objects.requireNonNull(elementSheets.get(tag))));
         Cells cells = station.cells();
         int judged = station.columns().judged();
@@ -186,7 +196,13 @@ public final class PackageLayout {
         }
 
         BackSheets back = new BackSheets(cells, design);
-        back.roots(trialSheet, station.trialRows().solved());
+        List<String> foundNames = station.foundColumns().names();
+        back.roots(
+                trialSheet,
+                station.trialRows().solved().stream()
+                        .filter(root -> !foundNames.contains(root.caseName()))
+                        .toList());
+        foundSheet.lay(design, station);
         SummarySheet.Sorted sorted = new SummarySheet(
                         cells,
                         limitSheet,
@@ -199,7 +215,13 @@ public final class PackageLayout {
         Map<String, Integer> numbers = new LinkedHashMap<>();
         elementSheets.forEach((tag, sheet) -> numbers.put(tag, drafts.indexOf(sheet) + 1));
         RegisterSheet.lay(
-                registerSheet, cells, linesOf, numbers, station.columns().names());
+                registerSheet,
+                cells,
+                linesOf,
+                numbers,
+                station.columns().names().stream()
+                        .map(name -> foundNames.contains(name) ? name + ", flow as issued" : name)
+                        .toList());
         limitSheet.figure("Margins of the limits", LIMITS_FIGURE);
         back.assumptions(assumptionSheet);
         back.references(referenceSheet, station.distinctMethods());

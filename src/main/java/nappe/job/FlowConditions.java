@@ -1,0 +1,108 @@
+package nappe.job;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.function.Function;
+import nappe.calculation.Cell;
+import nappe.formula.Value;
+import nappe.method.MethodSheet;
+import nappe.solve.Evaluation;
+import nappe.station.Design;
+import nappe.station.FoundCase.Condition;
+import nappe.station.StationLayout;
+
+/**
+ * What is held while the flow varies: each distinct water level and number of units in service of the typed cases, and
+ * the table of levels where there is one. Between cases no other level exists.
+ */
+final class FlowConditions {
+    private final List<Condition> conditions = new ArrayList<>();
+    private final List<List<String>> names = new ArrayList<>();
+    private final List<Double> flows = new ArrayList<>();
+    private boolean unitsDiffer;
+    private boolean hasTable;
+    private double mostUnits = 1;
+
+    private FlowConditions() {}
+
+    /** @throws nappe.station.StationException where entries do not fit the methods */
+    static FlowConditions of(Design design, Function<String, MethodSheet> methodOf) {
+        StationLayout station = StationLayout.bare(design, methodOf);
+        Map<Cell, Value> values = Evaluation.of(station.allCells());
+        FlowConditions all = new FlowConditions();
+        all.hasTable = !design.levels().isEmpty();
+        Map<List<Object>, Integer> known = new LinkedHashMap<>();
+        Map<Object, Integer> units = new LinkedHashMap<>();
+        List<StationLayout.TypedCase> cases = station.typedCases();
+        for (int c = 0; c < cases.size(); c++) {
+            Design.FlowCase typed = design.cases().get(c);
+            Value level = value(values, cases.get(c).level());
+            Value inService = value(values, cases.get(c).unitsInService());
+            boolean ofTable = all.hasTable && typed.tailwater().value() instanceof Value.None;
+            all.add(known, ofTable ? Condition.TABLE : c, c, ofTable ? "table" : level, inService, typed.name());
+            units.putIfAbsent(inService, c);
+            if (value(values, cases.get(c).flow()) instanceof Value.Number flow && flow.value() > 0) {
+                all.flows.add(flow.value());
+            }
+            if (inService instanceof Value.Number number) {
+                all.mostUnits = Math.max(all.mostUnits, number.value());
+            }
+        }
+        if (all.hasTable) {
+            units.forEach((inService, c) -> all.add(
+                    known, Condition.TABLE, c, "table", inService, design.cases().get(c).name()));
+        }
+        all.unitsDiffer = units.size() > 1;
+        return all;
+    }
+
+    private void add(
+            Map<List<Object>, Integer> known, int levelOf, int unitsOf, Object level, Object inService, String name) {
+        Integer at = known.putIfAbsent(List.of(level, inService), conditions.size());
+        if (at == null) {
+            conditions.add(new Condition(levelOf, unitsOf));
+            names.add(new ArrayList<>(List.of(name)));
+        } else if (!names.get(at).contains(name)) {
+            names.get(at).add(name);
+        }
+    }
+
+    private static Value value(Map<Cell, Value> values, Cell cell) {
+        return java.util.Objects.requireNonNull(values.get(cell));
+    }
+
+    List<Condition> all() {
+        return conditions;
+    }
+
+    /** The typed flows above nought, in the working unit. */
+    List<Double> flows() {
+        return flows;
+    }
+
+    double mostUnits() {
+        return mostUnits;
+    }
+
+    /** Some of the conditions in words, by the names of the cases that have them. */
+    String words(List<Integer> some) {
+        if (some.size() == conditions.size() && some.size() > 1) {
+            return unitsDiffer ? "every level and number of units in service" : "every level of the cases";
+        }
+        List<String> levels = new ArrayList<>();
+        List<String> table = new ArrayList<>();
+        for (int k : some) {
+            (conditions.get(k).levelOf() == Condition.TABLE ? table : levels).addAll(names.get(k));
+        }
+        List<String> words = new ArrayList<>();
+        if (!levels.isEmpty()) {
+            words.add((unitsDiffer ? "level and units of: " : "level of: ") + String.join("; ", levels));
+        }
+        if (!table.isEmpty()) {
+            words.add("table of levels" + (unitsDiffer ? " with the units of: " + String.join("; ", table) : ""));
+        }
+        return String.join("; ", words);
+    }
+}

@@ -1,0 +1,143 @@
+package nappe.station;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import nappe.calculation.Block;
+import nappe.calculation.CaseColumns;
+import nappe.calculation.Cell;
+import nappe.calculation.Cells;
+import nappe.calculation.Place;
+import nappe.calculation.SheetDraft;
+import nappe.calculation.TableDraft;
+import nappe.formula.Sign;
+import nappe.formula.Value;
+import nappe.method.Item;
+import nappe.unit.Dimension;
+import nappe.unit.Unit;
+
+/**
+ * Lays the flows found as columns after all others: each flow as found, its level and its units in service those of a
+ * typed case, live.
+ */
+final class FoundColumns {
+    private final Cells cells;
+    private final SheetDraft sheet;
+    private final Design design;
+    private final List<FoundCase> found;
+    private final List<String> names = new ArrayList<>();
+    private final List<Cell> flows = new ArrayList<>();
+    private final Map<String, Cell> blanks = new LinkedHashMap<>();
+
+    FoundColumns(Cells cells, SheetDraft sheet, Design design, List<FoundCase> found) {
+        this.cells = cells;
+        this.sheet = sheet;
+        this.design = design;
+        this.found = found;
+    }
+
+    /** The columns with those of the flows found at their right, printed and judged nowhere. */
+    CaseColumns after(CaseColumns typed) {
+        String word = "found ";
+        while (startsOne(typed.names(), word)) {
+            word = "flow " + word;
+        }
+        for (int i = 1; i <= found.size(); i++) {
+            names.add(word + i);
+        }
+        List<String> all = new ArrayList<>(typed.names());
+        all.addAll(names);
+        return new CaseColumns(all, typed.printed(), typed.judged());
+    }
+
+    private static boolean startsOne(List<String> names, String word) {
+        return names.stream().anyMatch(name -> name.toLowerCase(Locale.ROOT).startsWith(word));
+    }
+
+    /** The names of the columns of the flows found. */
+    List<String> names() {
+        return names;
+    }
+
+    /** The flows as found, in the working unit. */
+    List<Cell> flows() {
+        return flows;
+    }
+
+    /** Lays the flows; the sheet of cases then knows them after all others. */
+    void lay(CasesSheet cases) {
+        if (found.isEmpty()) {
+            return;
+        }
+        Unit flow = cells.unit(Dimension.FLOW);
+        Unit report = design.project().flowUnit();
+        Unit length = cells.unit(Dimension.LENGTH);
+        TableDraft table = sheet.table(
+                "Flows found, as issued",
+                List.of(
+                        new Block.Column("Case", 10, Block.Align.LEFT),
+                        new Block.Column("Element", 9, Block.Align.LEFT),
+                        new Block.Column("Limit", 40, Block.Align.LEFT),
+                        new Block.Column("Direction", 22, Block.Align.LEFT),
+                        new Block.Column("Q as issued [" + flow + "]", 12, Block.Align.RIGHT),
+                        new Block.Column("Q [" + report + "]", 12, Block.Align.RIGHT),
+                        new Block.Column("Q, one [" + flow + "]", 12, Block.Align.RIGHT),
+                        new Block.Column("Units in service", 9, Block.Align.RIGHT),
+                        new Block.Column("Level downstream [" + length + "]", 12, Block.Align.RIGHT),
+                        new Block.Column("Found for", 44, Block.Align.LEFT)));
+        for (int i = 0; i < found.size(); i++) {
+            FoundCase one = found.get(i);
+            Cell all =
+                    cells.typed(Cell.Kind.RERUN, table.place(4), "Q", flow, Value.of(one.flow()), Sign.NOT_NEGATIVE);
+            Cell reported = cells.factors().toReport(table.place(5), "Q", all, report);
+            Cell inService =
+                    cases.same(table.place(7), cases.unitsInService(one.condition().unitsOf()));
+            Cell through = cases.throughOne(table.place(6), all, inService);
+            Cell level = level(table.place(8), cases, one.condition(), all);
+            flows.add(all);
+            cases.add(all, inService, through, level);
+            table.add(List.of(
+                    new Block.Text(names.get(i)),
+                    new Block.Text(one.tag()),
+                    new Block.Text(one.label()),
+                    new Block.Text(one.direction()),
+                    new Block.Content(all),
+                    new Block.Content(reported),
+                    new Block.Content(through),
+                    new Block.Content(inService),
+                    new Block.Content(level),
+                    new Block.Text(one.conditions())));
+        }
+        sheet.gap();
+    }
+
+    private Cell level(Place place, CasesSheet cases, FoundCase.Condition condition, Cell flow) {
+        if (condition.levelOf() == FoundCase.Condition.TABLE) {
+            throw new IllegalStateException("levels by a table are not laid yet");
+        }
+        return cases.same(place, cases.level(condition.levelOf()));
+    }
+
+    /** The cell that stands for what an element asks for in each case: at a flow found it is not given. */
+    Cell notGiven(String tag, Item.Given given) {
+        return blanks.computeIfAbsent(tag + "." + given.symbol(), key -> {
+            Unit unit = cells.unit(given.unit().dimension());
+            TableDraft table = sheet.workbookTable(
+                    "Typed in each case, and not given at a flow found: " + tag + "  " + given.symbol(),
+                    List.of(new Block.Column(given.symbol(), 10, Block.Align.LEFT)),
+                    1);
+            Cell cell = cells.typed(
+                    Cell.Kind.RERUN,
+                    table.place(0),
+                    given.symbol(),
+                    unit,
+                    new Value.None(Value.NOT_GIVEN),
+                    given.sign());
+            table.add(List.of(new Block.Content(cell)));
+            sheet.gap();
+            return cell;
+        });
+    }
+}
