@@ -52,7 +52,12 @@ final class FlowConditions {
         }
         if (all.hasTable) {
             units.forEach((inService, c) -> all.add(
-                    known, Condition.TABLE, c, "table", inService, design.cases().get(c).name()));
+                    known,
+                    Condition.TABLE,
+                    c,
+                    "table",
+                    inService,
+                    design.cases().get(c).name()));
         }
         all.unitsDiffer = units.size() > 1;
         return all;

@@ -70,7 +70,8 @@ final class FlowSearch {
     static FoundFlows of(Design design, Function<String, MethodSheet> methodOf) {
         FlowConditions conditions = FlowConditions.of(design, methodOf);
         if (conditions.flows().isEmpty()) {
-            return new FoundFlows(List.of(), List.of(), List.of("No flow above nought was typed: nothing was searched."));
+            return new FoundFlows(
+                    List.of(), List.of(), List.of("No flow above nought was typed: nothing was searched."));
         }
         TrialFlows trials = new TrialFlows(design, methodOf, conditions.all());
         return new FlowSearch(design, conditions, trials).search();
@@ -125,7 +126,14 @@ final class FlowSearch {
             if (alike && before != null && here != null && after != null) {
                 double sign = verdict == Verdict.MET ? 1 : -1;
                 if (sign * here < sign * before && sign * here <= sign * after) {
-                    extreme(condition, limit, points.get(i - 1).flow(), points.get(i + 1).flow(), verdict, sign, all);
+                    extreme(
+                            condition,
+                            limit,
+                            points.get(i - 1).flow(),
+                            points.get(i + 1).flow(),
+                            verdict,
+                            sign,
+                            all);
                 }
             }
         }
@@ -196,7 +204,9 @@ final class FlowSearch {
                 Turn turn = gap
                         ? null
                         : Bracket.turn(
-                                before, point, flow -> trials.at(condition, flow).get(limit));
+                                before,
+                                point,
+                                flow -> trials.at(condition, flow).get(limit));
                 if (turn == null) {
                     notReached(limit, condition, acrossAGap(before, point));
                 } else {
@@ -236,7 +246,8 @@ final class FlowSearch {
         List<FoundCase> all = merged();
         List<String> notes = new ArrayList<>();
         notes.add("Flows searched: from " + inBoth(flows.get(0)) + " to " + inBoth(flows.get(flows.size() - 1)) + ", "
-                + flows.size() + " flows in nearly equal ratios for each water level and number of units in service of the"
+                + flows.size()
+                + " flows in nearly equal ratios for each water level and number of units in service of the"
                 + " cases, then narrowed.");
         List<FoundCase> kept = all;
         if (all.size() > MOST_CASES) {
@@ -250,10 +261,11 @@ final class FlowSearch {
                     + " within or nearest to the range of the typed flows are given.");
         }
         List<NotReached> lines = new ArrayList<>();
-        new TreeMap<>(notReached).forEach((limit, outcomes) -> outcomes.forEach((outcome, under) -> {
-            LimitResult one = trials.limit(limit);
-            lines.add(new NotReached(one.tag(), one.label(), conditions.words(under), outcome));
-        }));
+        new TreeMap<>(notReached)
+                .forEach((limit, outcomes) -> outcomes.forEach((outcome, under) -> {
+                    LimitResult one = trials.limit(limit);
+                    lines.add(new NotReached(one.tag(), one.label(), conditions.words(under), outcome));
+                }));
         return new FoundFlows(kept, lines, notes);
     }
 

@@ -89,11 +89,10 @@ final class FoundColumns {
                         new Block.Column("Found for", 44, Block.Align.LEFT)));
         for (int i = 0; i < found.size(); i++) {
             FoundCase one = found.get(i);
-            Cell all =
-                    cells.typed(Cell.Kind.RERUN, table.place(4), "Q", flow, Value.of(one.flow()), Sign.NOT_NEGATIVE);
+            Cell all = cells.typed(Cell.Kind.RERUN, table.place(4), "Q", flow, Value.of(one.flow()), Sign.NOT_NEGATIVE);
             Cell reported = cells.factors().toReport(table.place(5), "Q", all, report);
-            Cell inService =
-                    cases.same(table.place(7), cases.unitsInService(one.condition().unitsOf()));
+            Cell inService = cases.same(
+                    table.place(7), cases.unitsInService(one.condition().unitsOf()));
             Cell through = cases.throughOne(table.place(6), all, inService);
             Cell level = level(table.place(8), cases, one.condition(), all);
             flows.add(all);

@@ -33,10 +33,11 @@ final class FoundSheet {
         sheet.note("Each flow at which the verdict on a limit turns between met and not met, for a fixed water level"
                 + " downstream. With a fixed level a flume or weir can be drowned at low flow and free above it, so that"
                 + " the direction is stated.");
-        sheet.note("As issued: each flow was found by reruns of the whole calculation with the entries as issued, and does"
-                + " not follow a changed entry. The margin beside it is live: zero while the flow stands for the limit; any"
-                + " other margin, once an entry is changed, says that the flow no longer does. Where the margin jumps, as"
-                + " published ratings do where they join, it is not zero.");
+        sheet.note(
+                "As issued: each flow was found by reruns of the whole calculation with the entries as issued, and does"
+                        + " not follow a changed entry. The margin beside it is live: zero while the flow stands for the limit; any"
+                        + " other margin, once an entry is changed, says that the flow no longer does. Where the margin jumps, as"
+                        + " published ratings do where they join, it is not zero.");
         sheet.note("Every flow found is a case of its own at the right of each calculation sheet of the workbook; no"
                 + " summary counts it. Heads read are not given in these cases.");
         found.notes().forEach(sheet::note);

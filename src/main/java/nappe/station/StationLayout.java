@@ -58,8 +58,7 @@ public final class StationLayout {
      * @param foundCases flows found, each a column after all others
      * @throws StationException where entries do not fit the methods
      */
-    StationLayout(
-            Design design, Function<String, MethodSheet> methodOf, List<FoundCase> foundCases, Sheets sheets) {
+    StationLayout(Design design, Function<String, MethodSheet> methodOf, List<FoundCase> foundCases, Sheets sheets) {
         this.design = design;
         this.sheets = sheets;
         design.elements().forEach(e -> methods.put(e.tag(), methodOf.apply(e.method())));

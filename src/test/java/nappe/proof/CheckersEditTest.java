@@ -23,7 +23,10 @@ import nappe.station.Design;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
-/** What a checker types into the issued workbook gives, recalculated, what issuing anew with that entry gives. */
+/**
+ * What a checker types into the issued workbook gives, recalculated, what issuing anew with that entry gives. Flows found
+ * stay as issued: they are handed on to the new issue, and all that rests on them follows the entry.
+ */
 class CheckersEditTest {
     @TempDir
     Path folder;
@@ -118,7 +121,7 @@ class CheckersEditTest {
         for (Typing typing : typings) {
             design = typing.in(design, issued);
         }
-        return Package.of(design);
+        return Package.of(design, issued.found());
     }
 
     private static List<Typing> inJava(List<Typing> typings) {
