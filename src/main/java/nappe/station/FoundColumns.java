@@ -17,6 +17,7 @@ import nappe.formula.Value;
 import nappe.method.Item;
 import nappe.unit.Dimension;
 import nappe.unit.Unit;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Lays the flows found as columns after all others: each flow as found, its level and its units in service those of a
@@ -30,6 +31,7 @@ final class FoundColumns {
     private final List<String> names = new ArrayList<>();
     private final List<Cell> flows = new ArrayList<>();
     private final Map<String, Cell> blanks = new LinkedHashMap<>();
+    private @Nullable TableDraft blankTable;
 
     FoundColumns(Cells cells, SheetDraft sheet, Design design, List<FoundCase> found) {
         this.cells = cells;
@@ -122,21 +124,35 @@ final class FoundColumns {
     /** The cell that stands for what an element asks for in each case: at a flow found it is not given. */
     Cell notGiven(String tag, Item.Given given) {
         return blanks.computeIfAbsent(tag + "." + given.symbol(), key -> {
-            Unit unit = cells.unit(given.unit().dimension());
-            TableDraft table = sheet.workbookTable(
-                    "Typed in each case, and not given at a flow found: " + tag + "  " + given.symbol(),
-                    List.of(new Block.Column(given.symbol(), 10, Block.Align.LEFT)),
-                    1);
+            TableDraft table = blankTable();
             Cell cell = cells.typed(
                     Cell.Kind.RERUN,
-                    table.place(0),
+                    table.place(3),
                     given.symbol(),
-                    unit,
+                    cells.unit(given.unit().dimension()),
                     new Value.None(Value.NOT_GIVEN),
                     given.sign());
-            table.add(List.of(new Block.Content(cell)));
-            sheet.gap();
+            table.add(List.of(
+                    new Block.Symbol(given.symbol()),
+                    new Block.Text(tag),
+                    new Block.Text(given.label()),
+                    new Block.Content(cell)));
             return cell;
         });
+    }
+
+    private TableDraft blankTable() {
+        TableDraft open = blankTable;
+        if (open == null) {
+            open = sheet.table(
+                    "Typed in each case, and not at the flows found",
+                    List.of(
+                            new Block.Column("Symbol", 10, Block.Align.LEFT),
+                            new Block.Column("Element", 9, Block.Align.LEFT),
+                            new Block.Column("Description", 40, Block.Align.LEFT),
+                            new Block.Column("At the flows found", 22, Block.Align.LEFT)));
+            blankTable = open;
+        }
+        return open;
     }
 }

@@ -38,8 +38,9 @@ final class FoundSheet {
                         + " not follow a changed entry. The margin beside it is live: zero while the flow stands for the limit; any"
                         + " other margin, once an entry is changed, says that the flow no longer does. Where the margin jumps, as"
                         + " published ratings do where they join, it is not zero.");
-        sheet.note("Every flow found is a case of its own at the right of each calculation sheet of the workbook; no"
-                + " summary counts it. Heads read are not given in these cases.");
+        sheet.note(
+                "Every flow found is a case of its own at the right of each calculation sheet of the workbook; no"
+                        + " summary counts it. Where a flow was found for several levels it stands once, with the level of the first.");
         found.notes().forEach(sheet::note);
         sheet.gap();
     }
@@ -51,6 +52,7 @@ final class FoundSheet {
             sheet.note("none");
             sheet.gap();
         } else {
+            sheet.gap();
             results(design, station);
         }
         notReached();
