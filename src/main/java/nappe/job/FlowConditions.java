@@ -4,14 +4,10 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.function.Function;
-import nappe.calculation.Cell;
 import nappe.formula.Value;
-import nappe.method.MethodSheet;
-import nappe.solve.Evaluation;
 import nappe.station.Design;
 import nappe.station.FoundCase.Condition;
-import nappe.station.StationLayout;
+import nappe.unit.WorkingSystem;
 
 /**
  * What is held while the flow varies: each distinct water level and number of units in service of the typed cases, and
@@ -22,35 +18,32 @@ final class FlowConditions {
     private final List<List<String>> names = new ArrayList<>();
     private final List<Double> flows = new ArrayList<>();
     private boolean unitsDiffer;
-    private boolean hasTable;
     private double mostUnits = 1;
 
     private FlowConditions() {}
 
-    /** @throws nappe.station.StationException where entries do not fit the methods */
-    static FlowConditions of(Design design, Function<String, MethodSheet> methodOf) {
-        StationLayout station = StationLayout.bare(design, methodOf);
-        Map<Cell, Value> values = Evaluation.of(station.allCells());
+    static FlowConditions of(Design design) {
         FlowConditions all = new FlowConditions();
-        all.hasTable = !design.levels().isEmpty();
+        WorkingSystem system = design.project().system();
         Map<List<Object>, Integer> known = new LinkedHashMap<>();
         Map<Object, Integer> units = new LinkedHashMap<>();
-        List<StationLayout.TypedCase> cases = station.typedCases();
-        for (int c = 0; c < cases.size(); c++) {
+        for (int c = 0; c < design.cases().size(); c++) {
             Design.FlowCase typed = design.cases().get(c);
-            Value level = value(values, cases.get(c).level());
-            Value inService = value(values, cases.get(c).unitsInService());
-            boolean ofTable = all.hasTable && typed.tailwater().value() instanceof Value.None;
+            Object level = working(typed.tailwater(), system);
+            Object inService = typed.units().value() instanceof Value.None
+                    ? Value.of(1)
+                    : typed.units().value();
+            boolean ofTable = !design.levels().isEmpty() && level instanceof Value.None;
             all.add(known, ofTable ? Condition.TABLE : c, c, ofTable ? "table" : level, inService, typed.name());
             units.putIfAbsent(inService, c);
-            if (value(values, cases.get(c).flow()) instanceof Value.Number flow && flow.value() > 0) {
+            if (working(typed.flow(), system) instanceof Value.Number flow && flow.value() > 0) {
                 all.flows.add(flow.value());
             }
             if (inService instanceof Value.Number number) {
                 all.mostUnits = Math.max(all.mostUnits, number.value());
             }
         }
-        if (all.hasTable) {
+        if (!design.levels().isEmpty()) {
             units.forEach((inService, c) -> all.add(
                     known,
                     Condition.TABLE,
@@ -63,6 +56,14 @@ final class FlowConditions {
         return all;
     }
 
+    /** As the cells convert it: two levels typed in two units are one level where they come out alike. */
+    private static Value working(Design.Typed typed, WorkingSystem system) {
+        return typed.value() instanceof Value.Number number
+                ? Value.of(number.value() * typed.unit().sizeIn(system)
+                        + typed.unit().zeroIn(system))
+                : typed.value();
+    }
+
     private void add(
             Map<List<Object>, Integer> known, int levelOf, int unitsOf, Object level, Object inService, String name) {
         Integer at = known.putIfAbsent(List.of(level, inService), conditions.size());
@@ -72,10 +73,6 @@ final class FlowConditions {
         } else if (!names.get(at).contains(name)) {
             names.get(at).add(name);
         }
-    }
-
-    private static Value value(Map<Cell, Value> values, Cell cell) {
-        return java.util.Objects.requireNonNull(values.get(cell));
     }
 
     List<Condition> all() {

@@ -68,7 +68,7 @@ final class FlowSearch {
 
     /** @throws nappe.station.StationException where entries do not fit the methods */
     static FoundFlows of(Design design, Function<String, MethodSheet> methodOf) {
-        FlowConditions conditions = FlowConditions.of(design, methodOf);
+        FlowConditions conditions = FlowConditions.of(design);
         if (conditions.flows().isEmpty()) {
             return new FoundFlows(
                     List.of(), List.of(), List.of("No flow above nought was typed: nothing was searched."));

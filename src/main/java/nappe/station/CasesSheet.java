@@ -84,7 +84,8 @@ final class CasesSheet {
     }
 
     /** Adds a column after those of the cases and combinations. */
-    void add(Cell flow, Cell inService, Cell throughOne, Cell level) {
+    void add(Cell name, Cell flow, Cell inService, Cell throughOne, Cell level) {
+        names.add(name);
         flows.add(flow);
         units.add(inService);
         flowsThroughOne.add(throughOne);

@@ -162,18 +162,6 @@ public final class StationLayout {
         return found;
     }
 
-    /** What a typed case is about: its flow, its level downstream and its units in service, in the working unit. */
-    public record TypedCase(Cell flow, Cell level, Cell unitsInService) {}
-
-    /** The typed cases, in their order. */
-    public List<TypedCase> typedCases() {
-        List<TypedCase> typed = new ArrayList<>();
-        for (int c = 0; c < design.cases().size(); c++) {
-            typed.add(new TypedCase(cases.flow(c), cases.level(c), cases.unitsInService(c)));
-        }
-        return typed;
-    }
-
     /** The cells that hold the flows found, in the working unit, in the order of their columns. */
     public List<Cell> foundFlows() {
         return List.copyOf(found.flows());
