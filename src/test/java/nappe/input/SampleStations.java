@@ -86,6 +86,7 @@ public final class SampleStations {
                         "",
                         brief,
                         "known",
+                        null,
                         5.6,
                         "in")
                 .row("Flows", "Design, average day", "1 d", "2040", 5, "MGD", 412.6, "ft", "", brief, "known")
@@ -183,7 +184,7 @@ public final class SampleStations {
                 .project("Space for a seal on the cover", "no")
                 .row("Flows", "Leakage only", "1 h", "2030", 4, "L/s", 17.6, "m", "", log, "assumed")
                 .row("Flows", "One pump", "1 h", "2030", 30, "L/s", 17.7, "m", "", log, "known")
-                .row("Flows", "Two pumps", "1 h", "2030", 60, "L/s", 17.8, "m", "", log, "known", 142, "mm")
+                .row("Flows", "Two pumps", "1 h", "2030", 60, "L/s", 17.8, "m", "", log, "known", null, 142, "mm")
                 .row("Flows", "Four pumps", "1 h", "2030", 120, "L/s", 17.95, "m", "", log, "known")
                 .row("Flows", "Four pumps, pond full", "1 h", "2035", 432, "m3/h", 18.22, "m", "", log, "known")
                 .entry("W1", "b", 600, "mm", "Invented drawing S-3", "known")
