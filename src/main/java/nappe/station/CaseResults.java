@@ -14,6 +14,11 @@ final class CaseResults {
 
     /** A result with its role and its cells, one per column of the calculation. */
     record Row(String role, List<Cell> cells) {
+        /** What it is called beside levels downstream. */
+        String label() {
+            return role.equals("water level") ? "water level upstream" : role;
+        }
+
         Unit unit() {
             return cells.get(0).unit();
         }

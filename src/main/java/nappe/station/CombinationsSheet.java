@@ -130,6 +130,7 @@ final class CombinationsSheet {
                         new Block.Column("Level [" + cases.level(0).unit() + "]", 12, Block.Align.RIGHT),
                         new Block.Column("Limits not met", 12, Block.Align.RIGHT),
                         new Block.Column("The first of them", 40, Block.Align.LEFT),
+                        new Block.Column("Limits without result", 12, Block.Align.RIGHT),
                         new Block.Column("Verdicts", 12, Block.Align.LEFT)));
         for (int k = 0; k < combinations.size(); k++) {
             Design.Combination one = combinations.get(k);
@@ -138,6 +139,7 @@ final class CombinationsSheet {
             scope.put("verdicts", new Run(verdicts.get(k)));
             scope.put("labels", new Run(labels));
             Formula tally = call(Function.TALLY, symbol("verdicts"), word(NOT_MET));
+            Formula without = call(Function.TALLY, symbol("verdicts"), word(Value.NO_RESULT));
             Cell count = station.cells().raw(table.place(4), "", Unit.one(), tally, scope, null, false);
             scope.put("count", count);
             Formula first =
@@ -158,6 +160,8 @@ final class CombinationsSheet {
                     new Block.Content(cases.level(c)),
                     new Block.Content(count),
                     new Block.Content(name),
+                    new Block.Content(
+                            station.cells().raw(table.place(6), "", Unit.one(), without, scope, null, false)),
                     new Block.Text(one.canCoincide() ? "judged" : "not judged")));
         }
         sheet.gap();
@@ -173,7 +177,7 @@ final class CombinationsSheet {
             String unit = unitText(row.unit());
             boolean words = row.role().equals("state of flow");
             columns.add(new Block.Column(
-                    row.role() + (unit.isEmpty() || words ? "" : " [" + unit + "]"),
+                    row.label() + (unit.isEmpty() || words ? "" : " [" + unit + "]"),
                     22,
                     words ? Block.Align.LEFT : Block.Align.RIGHT));
         }

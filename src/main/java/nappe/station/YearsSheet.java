@@ -67,7 +67,7 @@ final class YearsSheet {
             row(table, "water level downstream", part, station.cases().levels());
             for (Design.Element element : design.elements()) {
                 for (CaseResults.Row result : CaseResults.of(station, element.tag())) {
-                    row(table, element.tag() + "  " + result.role(), part, result.cells());
+                    row(table, element.tag() + "  " + result.label(), part, result.cells());
                 }
             }
             sheet.gap();

@@ -115,7 +115,23 @@ public final class SampleStations {
                         "ft",
                         "",
                         brief,
-                        "assumed")
+                        "assumed",
+                        2)
+                .row(
+                        "Combinations",
+                        "Build-out peak, high river",
+                        "Build-out, peak instantaneous",
+                        "Design, peak hour, high river",
+                        "yes",
+                        "Invented river study RS-1, section 6: one long storm brings both.")
+                .row(
+                        "Combinations",
+                        "Least flow, high river",
+                        "Start-up, minimum hour",
+                        "Design, peak hour, high river",
+                        "no",
+                        "Invented river study RS-1, section 6: the river is high only after days of rain, when flow is above the"
+                                + " average.")
                 .entry("F1", "size", "3 ft", null, "Invented drawing C-12, rev. 1", "known")
                 .entry("F1", "z_f", 412.5, "ft", "Invented drawing C-12, rev. 1", "known")
                 .row(

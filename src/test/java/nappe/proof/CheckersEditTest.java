@@ -19,6 +19,7 @@ import nappe.proof.Typing.Entry;
 import nappe.proof.Typing.Flow;
 import nappe.proof.Typing.Head;
 import nappe.proof.Typing.Level;
+import nappe.proof.Typing.Units;
 import nappe.station.Design;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -61,6 +62,8 @@ class CheckersEditTest {
         flume("head read taken out, in words", new Head(1, "F1", "not given"));
         flume("head read beyond the rating", new Head(1, "F1", 40));
         flume("demand no longer met", new Demand(0, 413.0));
+        flume("units in service in a case", new Units(6, 3), new Units(0, 2));
+        flume("flow and level that combinations take", new Flow(6, 9), new Level(5, 412.45));
         flume(
                 "many at once",
                 new Entry("F1", "size", "2.4 m"),
