@@ -160,8 +160,7 @@ final class CombinationsSheet {
                     new Block.Content(cases.level(c)),
                     new Block.Content(count),
                     new Block.Content(name),
-                    new Block.Content(
-                            station.cells().raw(table.place(6), "", Unit.one(), without, scope, null, false)),
+                    new Block.Content(station.cells().raw(table.place(6), "", Unit.one(), without, scope, null, false)),
                     new Block.Text(one.canCoincide() ? "judged" : "not judged")));
         }
         sheet.gap();

@@ -248,7 +248,7 @@ sealed interface Typing {
                 design.references(),
                 design.requirements(),
                 design.revisions(),
-                    design.combinations(),
-                    design.levels());
+                design.combinations(),
+                design.levels());
     }
 }
