@@ -38,8 +38,15 @@ public final class ElementSheet {
         }
     }
 
-    /** A limit demanded by others, with the cells it brings along. */
-    public record Demanded(Limit limit, Map<String, Cell> cells) {}
+    /** The name of the case, for a limit that is judged in one case alone. */
+    public static final String CASE_NAME = "case";
+
+    /**
+     * A limit demanded by others, with the cells it brings along.
+     *
+     * @param caseNames the cells with the names of the columns, where its condition asks for the case; else empty
+     */
+    public record Demanded(Limit limit, Map<String, Cell> cells, List<Cell> caseNames) {}
 
     private final String tag;
     private final MethodSheet method;
@@ -106,12 +113,12 @@ public final class ElementSheet {
         heading("Limits");
         LimitRows limitRows = new LimitRows(items.cells());
         for (Limit limit : method.limits()) {
-            limit(limitRows, limit, Map.of());
+            limit(limitRows, limit, Map.of(), List.of());
         }
         closings(limitRows);
         if (!demands.isEmpty()) {
             heading("Limits demanded by others");
-            demands.forEach(demand -> limit(limitRows, demand.limit(), demand.cells()));
+            demands.forEach(demand -> limit(limitRows, demand.limit(), demand.cells(), demand.caseNames()));
         }
         sheet.lines(columns, workedCase, lines);
         return List.copyOf(limits);
@@ -228,7 +235,7 @@ public final class ElementSheet {
         return line.cell().unit().text().equals("1") ? "" : line.cell().unit().text();
     }
 
-    private void limit(LimitRows limitRows, Limit limit, Map<String, Cell> brought) {
+    private void limit(LimitRows limitRows, Limit limit, Map<String, Cell> brought, List<Cell> caseNames) {
         Set<String> symbols = new HashSet<>(SymbolsReading.of(limit.lesser()));
         symbols.addAll(SymbolsReading.of(limit.greater()));
         if (limit.scale() != null) {
@@ -237,13 +244,17 @@ public final class ElementSheet {
         if (limit.when() != null) {
             symbols.addAll(SymbolsReading.of(limit.when()));
         }
-        boolean perCase = symbols.stream().anyMatch(method::perCase);
+        boolean perCase = !caseNames.isEmpty() || symbols.stream().anyMatch(method::perCase);
+        int[] next = {0};
         List<LimitRows.Judged> judged = new ArrayList<>();
         rows(
                 perCase,
                 (at, strip) -> {
                     Scope inner = at.inner();
                     brought.forEach(inner::put);
+                    if (!caseNames.isEmpty()) {
+                        inner.put(CASE_NAME, caseNames.get(next[0]++));
+                    }
                     judged.add(limitRows.lay(limit, inner, strip));
                 },
                 true);

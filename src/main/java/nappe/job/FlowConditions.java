@@ -11,7 +11,7 @@ import nappe.unit.WorkingSystem;
 
 /**
  * What is held while the flow varies: each distinct water level and number of units in service of the typed cases, and
- * the table of levels where there is one. Between cases no other level exists.
+ * the tailwater curve where there is one. Between cases no other level exists.
  */
 final class FlowConditions {
     private final List<Condition> conditions = new ArrayList<>();
@@ -103,7 +103,7 @@ final class FlowConditions {
             words.add((unitsDiffer ? "level and units of: " : "level of: ") + String.join("; ", levels));
         }
         if (!table.isEmpty()) {
-            words.add("table of levels" + (unitsDiffer ? " with the units of: " + String.join("; ", table) : ""));
+            words.add("tailwater curve" + (unitsDiffer ? " with the units of: " + String.join("; ", table) : ""));
         }
         return String.join("; ", words);
     }

@@ -97,7 +97,7 @@ public final class Job {
     private Map<String, Figure> figures(Design design, PackageLayout.Layout layout, Map<Cell, Value> values) {
         Map<String, Figure> figures = new LinkedHashMap<>();
         WorkingSystem system = design.project().system();
-        List<String> names = design.cases().stream().map(Design.FlowCase::name).toList();
+        List<String> names = layout.caseNames();
         layout.sheets().stream()
                 .filter(sheet -> sheet.blocks().stream()
                         .anyMatch(block ->

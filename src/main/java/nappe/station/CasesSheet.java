@@ -37,9 +37,11 @@ final class CasesSheet {
     private final List<Cell> names = new ArrayList<>();
     private final List<Cell> judgedNames = new ArrayList<>();
     private final List<Cell> flows = new ArrayList<>();
+    private final List<Cell> reported = new ArrayList<>();
     private final List<Cell> units = new ArrayList<>();
     private final List<Cell> flowsThroughOne = new ArrayList<>();
     private final List<Cell> levels = new ArrayList<>();
+    private @Nullable LevelCurve curve;
 
     CasesSheet(Cells cells, SheetDraft sheet, Design design) {
         this.cells = cells;
@@ -92,17 +94,57 @@ final class CasesSheet {
         levels.add(level);
     }
 
+    /** The tailwater curve, where there is one. */
+    LevelCurve curve() {
+        return java.util.Objects.requireNonNull(curve);
+    }
+
+    /** The cells with the names of all columns. */
+    List<Cell> names() {
+        return List.copyOf(names);
+    }
+
+    /** The flows in the working unit, in the order of the columns. */
+    List<Cell> flows() {
+        return List.copyOf(flows);
+    }
+
+    /** The flows of the cases as typed in the reporting unit. */
+    List<Cell> reported() {
+        return List.copyOf(reported);
+    }
+
+    /** The units in service, in the order of the columns. */
+    List<Cell> units() {
+        return List.copyOf(units);
+    }
+
+    /** The flows through one unit, in the order of the columns. */
+    List<Cell> flowsThroughOne() {
+        return List.copyOf(flowsThroughOne);
+    }
+
+    /** The water levels downstream that rule, in the order of the columns. */
+    List<Cell> levels() {
+        return List.copyOf(levels);
+    }
+
     /** The names of the judged columns. */
     Run judgedNames() {
         return new Run(judgedNames.subList(0, columns().judged()));
     }
 
-    void lay() {
+    /** @param isShared whether an element of the station takes the flow through one of the units in service */
+    void lay(boolean isShared) {
         Unit flowReport = design.project().flowUnit();
         String datum = design.project().datum();
-        sheet.note("Elevations refer to " + datum
-                + ". Flows and water levels are as supplied; the governing combination is for"
-                + " the engineer to confirm.");
+        sheet.note(
+                "Elevations refer to " + datum
+                        + ". Flows and water levels are as supplied; the governing combination is for"
+                        + " the engineer to confirm."
+                        + (isShared
+                                ? ""
+                                : " No element here shares the flow among units: each takes the flow through all of the station."));
         TableDraft flowTable = sheet.table(
                 "Flows",
                 List.of(
@@ -137,6 +179,13 @@ final class CasesSheet {
             level(levelTable, one);
         }
         sheet.gap();
+        if (!design.levels().isEmpty()) {
+            LevelCurve laid = new LevelCurve(cells, sheet, design.levels());
+            curve = laid;
+            List<Cell> used = laid.lay(names, flows, levels);
+            levels.clear();
+            levels.addAll(used);
+        }
         if (!combinations.isEmpty()) {
             combinations();
         }
@@ -194,6 +243,7 @@ final class CasesSheet {
         Cell working = cells.factors().toWorking(table.place(5), "Q", flow);
         Cell report = cells.factors().toReport(table.place(6), "Q", working, flowReport);
         flows.add(working);
+        reported.add(report);
         Cell inService = inService(table.place(7), one.units());
         units.add(inService);
         flowsThroughOne.add(throughOne(table.place(8), working, inService));
@@ -213,7 +263,9 @@ final class CasesSheet {
 
     private void level(TableDraft table, Design.FlowCase one) {
         Design.Typed typed = one.tailwater();
-        Cell level = cells.typed(Cell.Kind.ENTRY, table.place(3), "z", typed.unit(), typed.value(), Sign.ANY);
+        Cell level = design.levels().isEmpty()
+                ? cells.typed(Cell.Kind.ENTRY, table.place(3), "z", typed.unit(), typed.value(), Sign.ANY)
+                : cells.optional(table.place(3), "z", typed.unit(), typed.value(), Sign.ANY);
         Cell working = cells.factors().toWorking(table.place(5), "z", level);
         levels.add(working);
         table.add(List.of(

@@ -9,7 +9,6 @@ import nappe.calculation.Block;
 import nappe.calculation.CaseColumns;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
-import nappe.calculation.Place;
 import nappe.calculation.SheetDraft;
 import nappe.calculation.TableDraft;
 import nappe.formula.Sign;
@@ -76,6 +75,7 @@ final class FoundColumns {
         Unit flow = cells.unit(Dimension.FLOW);
         Unit report = design.project().flowUnit();
         Unit length = cells.unit(Dimension.LENGTH);
+        TableDraft byCurve = byCurve(cases);
         TableDraft table = sheet.table(
                 "Flows found, as issued",
                 List.of(
@@ -91,16 +91,23 @@ final class FoundColumns {
                         new Block.Column("Found for", 44, Block.Align.LEFT)));
         for (int i = 0; i < found.size(); i++) {
             FoundCase one = found.get(i);
+            Cell name = cells.typed(
+                    Cell.Kind.TABLE, table.place(0), "", Unit.one(), Value.word(names.get(i)), Sign.POSITIVE);
             Cell all = cells.typed(Cell.Kind.RERUN, table.place(4), "Q", flow, Value.of(one.flow()), Sign.NOT_NEGATIVE);
             Cell reported = cells.factors().toReport(table.place(5), "Q", all, report);
             Cell inService = cases.same(
                     table.place(7), cases.unitsInService(one.condition().unitsOf()));
             Cell through = cases.throughOne(table.place(6), all, inService);
-            Cell level = level(table.place(8), cases, one.condition(), all);
+            int levelOf = one.condition().levelOf();
+            Cell level = cases.same(
+                    table.place(8),
+                    byCurve == null || levelOf >= 0
+                            ? cases.level(levelOf)
+                            : cases.curve().at(byCurve, name, all));
             flows.add(all);
-            cases.add(all, inService, through, level);
+            cases.add(name, all, inService, through, level);
             table.add(List.of(
-                    new Block.Text(names.get(i)),
+                    new Block.Content(name),
                     new Block.Text(one.tag()),
                     new Block.Text(one.label()),
                     new Block.Text(one.direction()),
@@ -114,11 +121,17 @@ final class FoundColumns {
         sheet.gap();
     }
 
-    private Cell level(Place place, CasesSheet cases, FoundCase.Condition condition, Cell flow) {
-        if (condition.levelOf() == FoundCase.Condition.TABLE) {
-            throw new IllegalStateException("levels by a table are not laid yet");
-        }
-        return cases.same(place, cases.level(condition.levelOf()));
+    /** The table of the levels that follow from the flows found by the tailwater curve; null where none does. */
+    private @Nullable TableDraft byCurve(CasesSheet cases) {
+        int count = (int) found.stream()
+                .filter(one -> one.condition().levelOf() == FoundCase.Condition.TABLE)
+                .count();
+        return count == 0
+                ? null
+                : sheet.workbookTable(
+                        "Levels by the tailwater curve at flows found",
+                        cases.curve().columns(),
+                        count);
     }
 
     /** The cell that stands for what an element asks for in each case: at a flow found it is not given. */

@@ -26,6 +26,7 @@ public final class PackageLayout {
      * The sheets in order, and the cells in the order of evaluation.
      *
      * @param ratings the rating table of an element, by its tag
+     * @param caseNames the names of the cases and combinations that are judged
      * @param cases the scopes of an element's cases, by its tag
      * @param limits every limit with its margins
      * @param workedCase index of the case worked in full
@@ -34,6 +35,7 @@ public final class PackageLayout {
             List<Sheet> sheets,
             List<Cell> cells,
             Map<String, Block.Table> ratings,
+            List<String> caseNames,
             Map<String, List<Scope>> cases,
             List<ElementSheet.LimitResult> limits,
             int workedCase) {}
@@ -101,6 +103,15 @@ public final class PackageLayout {
                 "flows at which a verdict turns, as issued, with live margins");
         SheetDraft caseSheet =
                 draft("Cases", "Design flows and water levels", "flow cases as typed and in working units");
+        SheetDraft combinationSheet = design.combinations().isEmpty()
+                ? null
+                : draft(
+                        "Combinations",
+                        "Combinations of flow and water level",
+                        "the flow of one case with the level of another: which can occur, and what comes of it");
+        SheetDraft yearSheet = YearsSheet.isNeeded(design)
+                ? draft("Years", "Design years side by side", "flow, units in service and heads in each design year")
+                : null;
         SheetDraft entrySheet = draft(
                 "Entries", "Entries and demands, with sources", "what was typed, in its unit and in working units");
         SheetDraft constantSheet =
@@ -210,6 +221,12 @@ public final class PackageLayout {
                         caseNames,
                         station.cases().judgedNames())
                 .lay(limits);
+        if (combinationSheet != null) {
+            new CombinationsSheet(design, station, combinationSheet).lay(trialSheet);
+        }
+        if (yearSheet != null) {
+            new YearsSheet(design, station, yearSheet).lay();
+        }
         CheckerSheets.glossary(glossarySheet, linesOf);
         CheckerSheets.formulas(checkerSheet, linesOf);
         Map<String, Integer> numbers = new LinkedHashMap<>();
@@ -235,7 +252,13 @@ public final class PackageLayout {
             sheets.add(drafts.get(i).finish(i + 1));
         }
         return new Layout(
-                List.copyOf(sheets), List.copyOf(cells.all()), ratings, casesOf, limits, station.workedCase());
+                List.copyOf(sheets),
+                List.copyOf(cells.all()),
+                ratings,
+                caseNames,
+                casesOf,
+                limits,
+                station.workedCase());
     }
 
     private boolean hasRemarks() {

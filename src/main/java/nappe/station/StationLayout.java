@@ -11,11 +11,13 @@ import nappe.calculation.CaseColumns;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
 import nappe.calculation.ElementSheet;
+import nappe.calculation.Formulas;
 import nappe.calculation.ItemLayout;
 import nappe.calculation.RatingGrid;
 import nappe.calculation.Scope;
 import nappe.calculation.SheetDraft;
 import nappe.calculation.TrialRows;
+import nappe.formula.Comparator;
 import nappe.formula.Formula;
 import nappe.method.Item;
 import nappe.method.Limit;
@@ -112,7 +114,7 @@ public final class StationLayout {
     private void lay() {
         Sources sources = new Sources(cells, sheets.constants(), sheets.tables(), sheets.standing());
         Map<String, Map<String, Cell>> constants = sources.layConstants(distinctMethods());
-        cases.lay();
+        cases.lay(isShared());
         found.lay(cases);
         EntriesSheet entries = new EntriesSheet(cells, sheets.entries());
         for (Design.Element element : design.elements()) {
@@ -134,6 +136,14 @@ public final class StationLayout {
             linesOf.put(tag, laid.lines());
             below = tag;
         }
+    }
+
+    private boolean isShared() {
+        return methods.values().stream()
+                .flatMap(method -> method.items().stream())
+                .anyMatch(item -> item instanceof Item.Given given
+                        && (given.role().equals("flow through one")
+                                || given.role().equals("units in service")));
     }
 
     Cells cells() {
@@ -292,11 +302,19 @@ public final class StationLayout {
                 Formula value = new Formula.Symbol(demand.symbol());
                 Formula bound = new Formula.Symbol(name);
                 Formula scale = scale(demand);
+                Formula when = demand.inCase().isEmpty()
+                        ? null
+                        : Formulas.compare(
+                                Formulas.symbol(ElementSheet.CASE_NAME),
+                                Comparator.EQUAL,
+                                Formulas.word(demand.inCase()));
                 Limit limit = demand.atMost()
-                        ? new Limit(value, bound, true, scale, null, demand.description(), demand.citation())
-                        : new Limit(bound, value, false, scale, null, demand.description(), demand.citation());
-                demanded.add(
-                        new ElementSheet.Demanded(limit, Map.of(name, Objects.requireNonNull(bounds.get(demand)))));
+                        ? new Limit(value, bound, true, scale, when, demand.label(), demand.citation())
+                        : new Limit(bound, value, false, scale, when, demand.label(), demand.citation());
+                demanded.add(new ElementSheet.Demanded(
+                        limit,
+                        Map.of(name, Objects.requireNonNull(bounds.get(demand))),
+                        when == null ? List.of() : cases.names()));
             }
         }
         return demanded;

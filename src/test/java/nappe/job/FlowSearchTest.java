@@ -190,6 +190,57 @@ class FlowSearchTest {
         assertThat(found.cases().get(0).flow()).isCloseTo(0.49, within(1e-8));
     }
 
+    /** The curve rises with the flow as Q, what the head lets it be only as the root of Q: drowned at high flow. */
+    @Test
+    void onATailwaterCurveFreeFlowIsLostAtHighFlowAndThePackageShowsIt() {
+        Design typed = design(flowCase("River", 0.3, 1.2), blank("Curve", 0.2));
+        Design design = new Design(
+                typed.project(),
+                typed.elements(),
+                typed.cases(),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(
+                        new Design.LevelPair(number(0, "m3/s"), number(1, "m")),
+                        new Design.LevelPair(number(1, "m3/s"), number(2, "m"))));
+        MethodLibrary methods = library(FREE);
+        Job.Done done = new Job(methods, "0.0.0").run(design, List.of());
+        assertThat(done.found().cases())
+                .extracting(FoundCase::conditions)
+                .containsExactly("level of: River", "tailwater curve");
+        FoundCase one = done.found().cases().get(1);
+        assertThat(one.flow()).isCloseTo(0.64, within(1e-8));
+        assertThat(one.metBelow()).isTrue();
+        assertThat(done.results().cells())
+                .filteredOn(
+                        cell -> cell.kind() == Cell.Kind.RERUN && cell.symbol().equals("Q"))
+                .hasSize(2)
+                .allMatch(cell -> cell.place().sheet().equals("Found"));
+        assertThat(done.results().cells())
+                .filteredOn(cell -> cell.place().sheet().equals("Found")
+                        && cell.place().column() == 4
+                        && cell.kind() == Cell.Kind.FORMULA
+                        && cell.place().row() > 14)
+                .hasSize(2)
+                .allMatch(cell ->
+                        done.results().value(cell) instanceof Value.Number margin && Math.abs(margin.value()) <= 1e-9);
+    }
+
+    private static Design.FlowCase blank(String name, double flow) {
+        return new Design.FlowCase(
+                name,
+                "1 h",
+                "2030",
+                number(flow, "m3/s"),
+                Designs.typed(new Value.None(Value.NOT_GIVEN), "m"),
+                "",
+                Map.of());
+    }
+
     @ParameterizedTest
     @ValueSource(strings = {"headworks.xlsx", "return-weir.xlsx"})
     void atEachFlowFoundTheMarginIsZeroAndBesideItTheVerdictTurns(String sample) {

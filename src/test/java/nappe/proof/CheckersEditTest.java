@@ -19,6 +19,7 @@ import nappe.proof.Typing.Entry;
 import nappe.proof.Typing.Flow;
 import nappe.proof.Typing.Head;
 import nappe.proof.Typing.Level;
+import nappe.proof.Typing.Units;
 import nappe.station.Design;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -59,7 +60,7 @@ class CheckersEditTest {
         flume("crest higher: all flow free", new Entry("F1", "z_f", 414.5));
         flume("crest below nought", new Entry("F1", "z_f", -2.5));
         flume("no flow in a case", new Flow(1, 0));
-        flume("flow beyond the rating", new Flow(6, 40));
+        flume("flow beyond the rating", new Flow(6, 80));
         flume("smallest flow", new Flow(0, 1e-6));
         flume("tailwater frees the flow", new Level(5, 413.2));
         flume("tailwater drowns the least flow", new Level(0, 412.9));
@@ -68,6 +69,8 @@ class CheckersEditTest {
         flume("head read taken out, in words", new Head(1, "F1", "not given"));
         flume("head read beyond the rating", new Head(1, "F1", 40));
         flume("demand no longer met", new Demand(0, 413.0));
+        flume("units in service in a case", new Units(6, 3), new Units(0, 2));
+        flume("flow and level that combinations take", new Flow(6, 9), new Level(5, 412.45));
         flume(
                 "many at once",
                 new Entry("F1", "size", "2.4 m"),
