@@ -30,6 +30,7 @@ public final class PackageLayout {
      * The sheets in order, and the cells in the order of evaluation.
      *
      * @param ratings the rating table of an element, by its tag
+     * @param caseNames the names of the cases and combinations that are judged
      * @param cases the scopes of an element's cases, by its tag
      * @param limits every limit with its margins
      * @param workedCase index of the case worked in full
@@ -38,6 +39,7 @@ public final class PackageLayout {
             List<Sheet> sheets,
             List<Cell> cells,
             Map<String, Block.Table> ratings,
+            List<String> caseNames,
             Map<String, List<Scope>> cases,
             List<ElementSheet.LimitResult> limits,
             int workedCase) {}
@@ -71,6 +73,7 @@ public final class PackageLayout {
     /**
      * @param methodOf the method sheet of a name
      * @param drawn the symbols whose values the drawing of a method shows; empty for a method without drawing
+     * @param found the flows at which limits are first reached
      * @param sizeReruns for the tag of each element whose method has a screen statement, one rerun for each word
      * @throws StationException where entries do not fit the methods
      */
@@ -78,9 +81,10 @@ public final class PackageLayout {
             Design design,
             Function<String, MethodSheet> methodOf,
             Function<MethodSheet, List<String>> drawn,
+            FoundFlows found,
             SoftwareStatement software,
             Map<String, List<SizeRerun>> sizeReruns) {
-        return new PackageLayout(design, methodOf, drawn, sizeReruns).lay(software);
+        return new PackageLayout(design, methodOf, drawn, sizeReruns).lay(found, software);
     }
 
     private SheetDraft draft(String name, String title, String content) {
@@ -109,14 +113,27 @@ public final class PackageLayout {
                 new SheetDraft(tag + " size grid", tag + "  Standard sizes line by line"));
     }
 
-    private Layout lay(SoftwareStatement software) {
+    private Layout lay(FoundFlows found, SoftwareStatement software) {
         SheetDraft cover = draft("Cover", "Cover", "what this calculation is for, status, approvals, cautions");
         SheetDraft index = draft(
                 "Index", "Index, requirements and revisions", "this list; requirements and where they are answered");
         SheetDraft limitSheet =
                 draft("Limits", "Summary of limits", "every limit in its worst case, and in every case");
+        SheetDraft foundDraft = draft(
+                "Found",
+                "Where each limit is first reached",
+                "flows at which a verdict turns, as issued, with live margins");
         SheetDraft caseSheet =
                 draft("Cases", "Design flows and water levels", "flow cases as typed and in working units");
+        SheetDraft combinationSheet = design.combinations().isEmpty()
+                ? null
+                : draft(
+                        "Combinations",
+                        "Combinations of flow and water level",
+                        "the flow of one case with the level of another: which can occur, and what comes of it");
+        SheetDraft yearSheet = YearsSheet.isNeeded(design)
+                ? draft("Years", "Design years side by side", "flow, units in service and heads in each design year")
+                : null;
         SheetDraft entrySheet = draft(
                 "Entries", "Entries and demands, with sources", "what was typed, in its unit and in working units");
         SheetDraft constantSheet =
@@ -175,9 +192,12 @@ public final class PackageLayout {
         sizeSheets.values().forEach(sizes -> add(sizes.grid(), "the lines behind the sizes compared (workbook)"));
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
 
+        FoundSheet foundSheet = new FoundSheet(foundDraft, found);
+        foundSheet.head();
         StationLayout station = new StationLayout(
                 design,
                 methodOf,
+                found.cases(),
                 new StationLayout.Sheets(
                         caseSheet,
                         entrySheet,
@@ -185,6 +205,7 @@ public final class PackageLayout {
                         tableSheet,
                         standingSheet,
                         trialSheet,
+                        foundDraft,
                         tag -> java.util.Objects.requireNonNull(elementSheets.get(tag))));
         Cells cells = station.cells();
         int judged = station.columns().judged();
@@ -217,7 +238,13 @@ public final class PackageLayout {
         }
 
         BackSheets back = new BackSheets(cells, design);
-        back.roots(trialSheet, station.trialRows().solved());
+        List<String> foundNames = station.foundColumns().names();
+        back.roots(
+                trialSheet,
+                station.trialRows().solved().stream()
+                        .filter(root -> !foundNames.contains(root.caseName()))
+                        .toList());
+        foundSheet.lay(design, station);
         SummarySheet.Sorted sorted = new SummarySheet(
                         cells,
                         limitSheet,
@@ -225,12 +252,24 @@ public final class PackageLayout {
                         caseNames,
                         station.cases().judgedNames())
                 .lay(limits);
+        if (combinationSheet != null) {
+            new CombinationsSheet(design, station, combinationSheet).lay(trialSheet);
+        }
+        if (yearSheet != null) {
+            new YearsSheet(design, station, yearSheet).lay();
+        }
         CheckerSheets.glossary(glossarySheet, linesOf);
         CheckerSheets.formulas(checkerSheet, linesOf);
         Map<String, Integer> numbers = new LinkedHashMap<>();
         elementSheets.forEach((tag, sheet) -> numbers.put(tag, drafts.indexOf(sheet) + 1));
         RegisterSheet.lay(
-                registerSheet, cells, linesOf, numbers, station.columns().names());
+                registerSheet,
+                cells,
+                linesOf,
+                numbers,
+                station.columns().names().stream()
+                        .map(name -> foundNames.contains(name) ? name + ", flow as issued" : name)
+                        .toList());
         limitSheet.figure("Margins of the limits", LIMITS_FIGURE);
         back.assumptions(assumptionSheet);
         back.references(referenceSheet, station.distinctMethods());
@@ -244,7 +283,13 @@ public final class PackageLayout {
             sheets.add(drafts.get(i).finish(i + 1));
         }
         return new Layout(
-                List.copyOf(sheets), List.copyOf(cells.all()), ratings, casesOf, limits, station.workedCase());
+                List.copyOf(sheets),
+                List.copyOf(cells.all()),
+                ratings,
+                caseNames,
+                casesOf,
+                limits,
+                station.workedCase());
     }
 
     private boolean hasRemarks() {

@@ -33,7 +33,7 @@ class PackageProofsTest {
     @ParameterizedTest
     @EnumSource(WorkingSystem.class)
     void twoSpreadsheetProgramsComputeEveryCellAlike(WorkingSystem system) throws IOException {
-        Results results = PretendStation.AS_ISSUED.results(system);
+        Results results = PretendStation.AS_ISSUED.done(system).results();
         Path spoilt = Files.write(folder.resolve("spoilt.xlsx"), Spoiler.spoil(XlsxDelivery.render(results)));
         assertThat(Recalculated.disagreements(Recalculated.byGnumeric(spoilt), results))
                 .isEmpty();
@@ -54,8 +54,9 @@ class PackageProofsTest {
     @ParameterizedTest
     @MethodSource("changes")
     void anEntryTypedIntoTheWorkbookGivesWhatANewIssueGives(PretendStation changed) throws IOException {
-        byte[] issued = XlsxDelivery.render(PretendStation.AS_ISSUED.results(WorkingSystem.US));
-        Results anew = changed.results(WorkingSystem.US);
+        Job.Done before = PretendStation.AS_ISSUED.done(WorkingSystem.US);
+        byte[] issued = XlsxDelivery.render(before.results());
+        Results anew = changed.results(WorkingSystem.US, before.found());
         Path retyped = Files.write(folder.resolve("retyped.xlsx"), Retyper.type(issued, numbersTyped(anew)));
         assertThat(Recalculated.disagreements(Recalculated.byGnumeric(retyped), live(anew)))
                 .isEmpty();
@@ -75,13 +76,15 @@ class PackageProofsTest {
 
     @Test
     void sameInputGivesTheSameWorkbookInAnyLocaleAndTimeZone() {
-        byte[] here = XlsxDelivery.render(PretendStation.AS_ISSUED.results(WorkingSystem.SI));
+        byte[] here = XlsxDelivery.render(
+                PretendStation.AS_ISSUED.done(WorkingSystem.SI).results());
         Locale locale = Locale.getDefault();
         TimeZone zone = TimeZone.getDefault();
         try {
             Locale.setDefault(Locale.forLanguageTag("ar-EG"));
             TimeZone.setDefault(TimeZone.getTimeZone("Pacific/Auckland"));
-            assertThat(XlsxDelivery.render(PretendStation.AS_ISSUED.results(WorkingSystem.SI)))
+            assertThat(XlsxDelivery.render(
+                            PretendStation.AS_ISSUED.done(WorkingSystem.SI).results()))
                     .isEqualTo(here);
         } finally {
             Locale.setDefault(locale);
