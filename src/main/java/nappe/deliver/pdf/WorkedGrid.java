@@ -5,7 +5,6 @@ import java.util.List;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.formula.Formula;
-import nappe.formula.Function;
 import nappe.formula.PlainReading;
 import nappe.formula.Value;
 import nappe.results.Results;
@@ -123,7 +122,10 @@ final class WorkedGrid {
             }
             return texts;
         }
-        Formula shown = line.kind() == Block.LineKind.LIMIT_VERDICT ? condition(formula) : formula;
+        Formula shown = line.kind() == Block.LineKind.LIMIT_VERDICT ? Asked.condition(formula) : formula;
+        if (line.kind() == Block.LineKind.LIMIT_VERDICT) {
+            Asked.when(formula).ifPresent(when -> texts.add(View.Text.plain("written", "asked for where " + when)));
+        }
         Formula inNumbers = numbers.of(cell, shown);
         EquationSetting setting = new EquationSetting(line.symbol(), SIZE, room).symbols(shown);
         if (results.value(cell).equals(new Value.None(Value.NOT_GIVEN))) {
@@ -138,15 +140,6 @@ final class WorkedGrid {
         }
         texts.add(drawn("equation", setting));
         return texts;
-    }
-
-    /** What a verdict of "met" or "not met" asks; the words need no brace of their own. */
-    private static Formula condition(Formula verdict) {
-        boolean plain = verdict instanceof Formula.Call choice
-                && choice.function() == Function.IF
-                && choice.arguments().get(1).equals(new Formula.Word("met"))
-                && choice.arguments().get(2).equals(new Formula.Word("not met"));
-        return plain ? ((Formula.Call) verdict).arguments().get(0) : verdict;
     }
 
     private View.Text drawn(String style, EquationSetting setting) {
