@@ -1,6 +1,7 @@
 package nappe.proof;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
 import java.math.BigDecimal;
 import java.util.ArrayList;
@@ -107,6 +108,35 @@ class FlumeContinuityTest {
         }
     }
 
+    /** A head read where the flume itself would stand gives the flow back, free and by either form. */
+    @ParameterizedTest(name = "{0}, {1}, {3} m")
+    @CsvSource({
+        "2 ft, 1967 form, 0.3, 99.9",
+        "2 ft, 1967 form, 0.3, 100.32",
+        "2 ft, subtraction, 0.3, 100.32",
+        "0.6 m, 1967 form, 0.3, 100.32",
+        "20 ft, 1967 form, 14, 100.86",
+    })
+    void aHeadReadGivesTheFlowBack(String size, String form, double flow, double level) {
+        Map<String, String> entries = Map.of(
+                "size",
+                quoted(size),
+                "form",
+                quoted(form),
+                "submerged",
+                quoted("accepted"),
+                "z_f",
+                plain(CREST) + " m");
+        String q = plain(flow) + " m3/s";
+        String z = plain(level) + " m";
+        Bench head = new Bench(FLUME, WorkingSystem.SI, entries, List.of(Bench.typed("Q", q, "z_t", z)));
+        assertThat(word(head, "state", 0)).isEqualTo(level < CREST ? "free" : "submerged");
+        assertThat(word(head, "measured", 0)).isEqualTo("measured");
+        String read = plain(head.number("h_a", 0)) + " m";
+        Bench back = new Bench(FLUME, WorkingSystem.SI, entries, List.of(Bench.typed("Q", q, "z_t", z, "h_g", read)));
+        assertThat(back.number("Q_r", 0)).isCloseTo(flow, within(1e-9 * flow));
+    }
+
     @Test
     void stillWaterStandsAtTheCrestOrAtTheTailwater() {
         for (String level : List.of("99 m", "100.4 m")) {
@@ -180,13 +210,13 @@ class FlumeContinuityTest {
                 && met(bench, "flow is in the rated range, upper end", c);
         if (free != met(bench, "flow is free: submergence", c)
                 || drowned == met(bench, "flume is not drowned: submergence", c)
-                || !free && word(bench, "measured", c).equals("yes, free")) {
+                || !word(bench, "why", c).equals(drowned || inside ? state : "outside the rated range")) {
             faults.add("state and verdicts differ" + at);
         }
         boolean measured = inside && !drowned;
         if (bench.value("h_a", c) instanceof Value.Number != measured
                 || word(bench, "level", c).equals("by the rating") != measured
-                || word(bench, "measured", c).startsWith("no") == measured) {
+                || word(bench, "measured", c).equals("measured") != (measured && free)) {
             faults.add("a measurement where there is none, or none where there is" + at);
         }
         if (state.equals("submerged") && Math.abs(bench.number("e_r", c)) > 1e-9) {
@@ -217,16 +247,16 @@ class FlumeContinuityTest {
         return new Bench(
                 method,
                 WorkingSystem.SI,
-                Bench.typed(
-                        "size",
-                        "\"" + size + "\"",
-                        "form",
-                        "\"" + form + "\"",
-                        "submerged",
-                        "\"not accepted\"",
-                        "z_f",
-                        plain(CREST) + " m"),
+                Map.of(
+                        "size", quoted(size),
+                        "form", quoted(form),
+                        "submerged", quoted("refused"),
+                        "z_f", plain(CREST) + " m"),
                 cases);
+    }
+
+    private static String quoted(String words) {
+        return "\"" + words + "\"";
     }
 
     private static String plain(double number) {
