@@ -208,17 +208,27 @@ public final class ElementSheet {
                 perCaseCells));
     }
 
-    /** The equation of a line; where each case has its own origin, the run of origins. */
+    /** The equation of a line; where each case has its own origin, the run of origins on the sheet of the first. */
     private static String equation(List<List<Strip.Laid>> laid, int i) {
         Strip.Laid first = laid.get(0).get(i);
-        Strip.Laid last = laid.get(laid.size() - 1).get(i);
         Formula formula = first.cell().formula();
         if (first.equation().isEmpty() && formula != null) {
             return PlainReading.of(formula);
         }
-        return first.equation().equals(last.equation())
+        String sheet = beforeComma(first.equation());
+        String last = first.equation();
+        for (List<Strip.Laid> one : laid) {
+            String text = one.get(i).equation();
+            last = beforeComma(text).equals(sheet) ? text : last;
+        }
+        return first.equation().equals(last)
                 ? first.equation()
-                : first.equation() + " to " + last.equation().replaceAll(".*, ", "") + ", one for each case";
+                : first.equation() + " to " + last.substring(sheet.length()) + ", one for each case";
+    }
+
+    private static String beforeComma(String text) {
+        int comma = text.lastIndexOf(", ");
+        return comma < 0 ? "" : text.substring(0, comma + 2);
     }
 
     private static String unitText(Strip.Laid line) {

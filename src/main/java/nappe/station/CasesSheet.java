@@ -41,6 +41,7 @@ final class CasesSheet {
     private final List<Cell> units = new ArrayList<>();
     private final List<Cell> flowsThroughOne = new ArrayList<>();
     private final List<Cell> levels = new ArrayList<>();
+    private @Nullable LevelCurve curve;
 
     CasesSheet(Cells cells, SheetDraft sheet, Design design) {
         this.cells = cells;
@@ -53,7 +54,7 @@ final class CasesSheet {
                 .toList();
     }
 
-    /** The columns: the cases as typed, the combinations that can coincide, and those that cannot. */
+    /** The columns laid here: the cases as typed, the combinations that can coincide, and those that cannot. */
     CaseColumns columns() {
         List<String> all = Stream.concat(
                         cases.stream().map(Design.FlowCase::name),
@@ -82,6 +83,20 @@ final class CasesSheet {
     /** The water level downstream of the station in the working unit. */
     Cell level(int i) {
         return levels.get(i);
+    }
+
+    /** Adds a column after those of the cases and combinations. */
+    void add(Cell name, Cell flow, Cell inService, Cell throughOne, Cell level) {
+        names.add(name);
+        flows.add(flow);
+        units.add(inService);
+        flowsThroughOne.add(throughOne);
+        levels.add(level);
+    }
+
+    /** The tailwater curve, where there is one. */
+    LevelCurve curve() {
+        return java.util.Objects.requireNonNull(curve);
     }
 
     /** The cells with the names of all columns. */
@@ -165,7 +180,9 @@ final class CasesSheet {
         }
         sheet.gap();
         if (!design.levels().isEmpty()) {
-            List<Cell> used = new LevelCurve(cells, sheet, design.levels()).lay(names, flows, levels);
+            LevelCurve laid = new LevelCurve(cells, sheet, design.levels());
+            curve = laid;
+            List<Cell> used = laid.lay(names, flows, levels);
             levels.clear();
             levels.addAll(used);
         }
@@ -199,7 +216,8 @@ final class CasesSheet {
         return cells.typed(Cell.Kind.ENTRY, place, "N", Unit.one(), count, Sign.POSITIVE);
     }
 
-    private Cell throughOne(Place place, Cell flow, Cell inService) {
+    /** The flow through one of the units in service. */
+    Cell throughOne(Place place, Cell flow, Cell inService) {
         Scope scope = Scope.ofElement();
         scope.put("Q", flow);
         scope.put("N", inService);
@@ -358,7 +376,8 @@ final class CasesSheet {
         throw new IllegalArgumentException("no case " + name);
     }
 
-    private Cell same(Place place, Cell other) {
+    /** A cell that repeats another. */
+    Cell same(Place place, Cell other) {
         Scope scope = Scope.ofElement();
         scope.put("x", other);
         return cells.raw(place, other.symbol(), other.unit(), Formulas.symbol("x"), scope, null, false);

@@ -17,6 +17,7 @@ import java.util.List;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
+import nappe.calculation.Place;
 import nappe.calculation.Run;
 import nappe.calculation.Scope;
 import nappe.calculation.SheetDraft;
@@ -65,23 +66,40 @@ final class LevelCurve {
                 "A level typed for a case rules. Where none is typed the tailwater curve gives it at the flow of the case through"
                         + " all of the station: straight between the row at or below that flow and the next; beyond the first and the last"
                         + " flow of the curve there is no result.");
-        TableDraft table = sheet.table(
-                "Water level of each case: typed, or from the tailwater curve",
-                List.of(
-                        new Block.Column("Case", 26, Block.Align.LEFT),
-                        new Block.Column("Level used is", 16, Block.Align.LEFT),
-                        new Block.Column("Row below, i", 10, Block.Align.RIGHT),
-                        new Block.Column("Q [" + flow + "]", 12, Block.Align.RIGHT),
-                        new Block.Column("Share of the way, t", 10, Block.Align.RIGHT),
-                        new Block.Column("From the curve [" + level + "]", 12, Block.Align.RIGHT),
-                        new Block.Column("Typed [" + level + "]", 12, Block.Align.RIGHT),
-                        new Block.Column("Level used [" + level + "]", 12, Block.Align.RIGHT)));
+        TableDraft table = sheet.table("Water level of each case: typed, or from the tailwater curve", columns());
         List<Cell> used = new ArrayList<>();
         for (int c = 0; c < names.size(); c++) {
             used.add(level(table, names.get(c), flowsOf.get(c), typed.get(c)));
         }
         sheet.gap();
         return used;
+    }
+
+    /** The columns of a table of levels by the curve. */
+    List<Block.Column> columns() {
+        Unit flow = cells.unit(Dimension.FLOW);
+        Unit level = cells.unit(Dimension.LENGTH);
+        return List.of(
+                new Block.Column("Case", 26, Block.Align.LEFT),
+                new Block.Column("Level used is", 16, Block.Align.LEFT),
+                new Block.Column("Row below, i", 10, Block.Align.RIGHT),
+                new Block.Column("Q [" + flow + "]", 12, Block.Align.RIGHT),
+                new Block.Column("Share of the way, t", 10, Block.Align.RIGHT),
+                new Block.Column("From the curve [" + level + "]", 12, Block.Align.RIGHT),
+                new Block.Column("Typed [" + level + "]", 12, Block.Align.RIGHT),
+                new Block.Column("Level used [" + level + "]", 12, Block.Align.RIGHT));
+    }
+
+    /** Adds the level of the curve at a flow found, for which none is typed. */
+    Cell at(TableDraft table, Cell name, Cell flow) {
+        Cell none = cells.typed(
+                Cell.Kind.RERUN,
+                table.place(6),
+                "z",
+                cells.unit(Dimension.LENGTH),
+                new Value.None(Value.NOT_GIVEN),
+                Sign.ANY);
+        return level(table, name, flow, none);
     }
 
     private void curve(Unit flow, Unit level) {
@@ -182,15 +200,25 @@ final class LevelCurve {
                 null,
                 false);
         table.add(List.of(
-                new Block.Content(name),
+                new Block.Content(here(table.place(0), name)),
                 new Block.Content(which),
                 new Block.Content(row),
-                new Block.Content(flow),
+                new Block.Content(here(table.place(3), flow)),
                 new Block.Content(way),
                 new Block.Content(curve),
-                new Block.Content(typed),
+                new Block.Content(here(table.place(6), typed)),
                 new Block.Content(used)));
         return used;
+    }
+
+    /** What stands elsewhere, repeated here. */
+    private Cell here(Place place, Cell cell) {
+        if (cell.place().equals(place)) {
+            return cell;
+        }
+        Scope scope = Scope.ofElement();
+        scope.put("x", cell);
+        return cells.raw(place, cell.symbol(), cell.unit(), symbol("x"), scope, null, false);
     }
 
     /** The row at or below the flow, at most the last but one; none outside the curve, or where the curve is no curve. */
