@@ -81,7 +81,8 @@ public final class Job {
                 methods::sheet,
                 method -> drawings.of(method).map(FigureSheet::printed).orElse(List.of()),
                 found,
-                software);
+                software,
+                new SizeReruns(design, methods::sheet).run());
         Map<Cell, Value> values = Evaluation.of(layout.cells());
         return new Done(
                 new Results(

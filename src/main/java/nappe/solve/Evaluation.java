@@ -37,6 +37,18 @@ public final class Evaluation {
     }
 
     /**
+     * The same as if other values had been typed into some cells.
+     *
+     * @param typedAnew what stands in these typed cells instead; a number where a number was, a word where a word was
+     */
+    public static Map<Cell, Value> of(List<Cell> cells, Map<Cell, Value> typedAnew) {
+        return again(
+                Map.of(),
+                typedAnew,
+                cells.stream().filter(cell -> !typedAnew.containsKey(cell)).toList());
+    }
+
+    /**
      * Evaluates cells once more, where some others hold other values than before.
      *
      * @param before the values of all cells that are neither changed nor evaluated

@@ -167,6 +167,21 @@ public record Design(
 
     public record RevisionNote(String revision, String date, String what) {}
 
+    /** The same with other elements in their places. */
+    public Design withElements(List<Element> others) {
+        return new Design(
+                project,
+                others,
+                cases,
+                demands,
+                assumptions,
+                references,
+                requirements,
+                revisions,
+                combinations,
+                levels);
+    }
+
     /** The element with the tag, or null. */
     public @Nullable Element element(String tag) {
         return elements.stream()

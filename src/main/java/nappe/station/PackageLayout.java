@@ -9,11 +9,15 @@ import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
 import nappe.calculation.ElementSheet;
+import nappe.calculation.Place;
 import nappe.calculation.RatingGrid;
 import nappe.calculation.Scope;
+import nappe.calculation.ScreenGrid;
 import nappe.calculation.Sheet;
 import nappe.calculation.SheetDraft;
+import nappe.method.Item;
 import nappe.method.MethodSheet;
+import nappe.method.Screen;
 import nappe.unit.Dimension;
 import nappe.unit.Unit;
 
@@ -52,27 +56,25 @@ public final class PackageLayout {
     private final List<String> contents = new ArrayList<>();
     private final Function<String, MethodSheet> methodOf;
     private final Function<MethodSheet, List<String>> drawn;
+    private final Map<String, List<SizeRerun>> sizeReruns;
 
     private PackageLayout(
-            Design design, Function<String, MethodSheet> methodOf, Function<MethodSheet, List<String>> drawn) {
+            Design design,
+            Function<String, MethodSheet> methodOf,
+            Function<MethodSheet, List<String>> drawn,
+            Map<String, List<SizeRerun>> sizeReruns) {
         this.design = design;
         this.methodOf = methodOf;
         this.drawn = drawn;
+        this.sizeReruns = sizeReruns;
         design.elements().forEach(e -> methods.put(e.tag(), methodOf.apply(e.method())));
-    }
-
-    /**
-     * @param methodOf the method sheet of a name
-     * @throws StationException where entries do not fit the methods
-     */
-    public static Layout of(Design design, Function<String, MethodSheet> methodOf, SoftwareStatement software) {
-        return of(design, methodOf, method -> List.of(), FoundFlows.NONE, software);
     }
 
     /**
      * @param methodOf the method sheet of a name
      * @param drawn the symbols whose values the drawing of a method shows; empty for a method without drawing
      * @param found the flows at which limits are first reached
+     * @param sizeReruns for the tag of each element whose method has a screen statement, one rerun for each word
      * @throws StationException where entries do not fit the methods
      */
     public static Layout of(
@@ -80,15 +82,35 @@ public final class PackageLayout {
             Function<String, MethodSheet> methodOf,
             Function<MethodSheet, List<String>> drawn,
             FoundFlows found,
-            SoftwareStatement software) {
-        return new PackageLayout(design, methodOf, drawn).lay(found, software);
+            SoftwareStatement software,
+            Map<String, List<SizeRerun>> sizeReruns) {
+        return new PackageLayout(design, methodOf, drawn, sizeReruns).lay(found, software);
     }
 
     private SheetDraft draft(String name, String title, String content) {
-        SheetDraft draft = new SheetDraft(name, title);
+        return add(new SheetDraft(name, title), content);
+    }
+
+    private SheetDraft add(SheetDraft draft, String content) {
         drafts.add(draft);
         contents.add(content);
         return draft;
+    }
+
+    /** The sheets of a screen statement; the grid behind takes its place at the back later. */
+    private record SizeDrafts(SheetDraft compared, SheetDraft reruns, SheetDraft grid) {}
+
+    private SizeDrafts sizeDrafts(String tag) {
+        return new SizeDrafts(
+                draft(
+                        tag + " sizes",
+                        tag + "  Standard sizes compared",
+                        "every standard size through all cases; the chosen one and why"),
+                draft(
+                        tag + " size reruns",
+                        tag + "  What fails with each standard size",
+                        "limits of the whole station with each size, as issued"),
+                new SheetDraft(tag + " size grid", tag + "  Standard sizes line by line"));
     }
 
     private Layout lay(FoundFlows found, SoftwareStatement software) {
@@ -126,6 +148,7 @@ public final class PackageLayout {
         Map<String, SheetDraft> elementSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> figureSheets = new LinkedHashMap<>();
         Map<String, SheetDraft> ratingSheets = new LinkedHashMap<>();
+        Map<String, SizeDrafts> sizeSheets = new LinkedHashMap<>();
         for (Design.Element element : design.elements()) {
             String title = element.tag() + "  " + EntriesSheet.title(element, method(element));
             SheetDraft methodSheet = draft(
@@ -153,6 +176,9 @@ public final class PackageLayout {
                                 element.tag() + "  Rating table",
                                 "flow for equal steps of head, over the usable range"));
             }
+            if (method(element).screen() != null) {
+                sizeSheets.put(element.tag(), sizeDrafts(element.tag()));
+            }
         }
         SheetDraft assumptionSheet = draft("Assumptions", "Assumptions", "each with basis and owner, open or closed");
         SheetDraft glossarySheet =
@@ -163,6 +189,7 @@ public final class PackageLayout {
                 "Checker", "Checker's record", "every formula with its cell, room for tick, initials and comment");
         SheetDraft referenceSheet = draft("References", "References", "publications and tables cited");
         SheetDraft softwareSheet = draft("Software", "Software statement", "version, method texts, check values");
+        sizeSheets.values().forEach(sizes -> add(sizes.grid(), "the lines behind the sizes compared (workbook)"));
         SheetDraft trialSheet = draft("Trials", "Trial rows", "roots step by step (workbook), and how each closed");
 
         FoundSheet foundSheet = new FoundSheet(foundDraft, found);
@@ -203,6 +230,10 @@ public final class PackageLayout {
                 ratings.put(element.tag(), table);
                 new RatingCurve(cells, method, ratingSheet)
                         .lay(table, method.ratings().get(0), "Rating curve of " + element.tag(), caseNames, caseScopes);
+            }
+            SizeDrafts sizes = sizeSheets.get(element.tag());
+            if (sizes != null) {
+                sizes(element, station, sizes);
             }
         }
 
@@ -270,6 +301,35 @@ public final class PackageLayout {
 
     private MethodSheet method(Design.Element element) {
         return java.util.Objects.requireNonNull(methods.get(element.tag()));
+    }
+
+    /** Lays every word of the screened choice for the judged cases: the grid behind, the comparison, what reruns found. */
+    private void sizes(Design.Element element, StationLayout station, SizeDrafts drafts) {
+        MethodSheet method = method(element);
+        Screen screen = java.util.Objects.requireNonNull(method.screen());
+        Item.Given choice = (Item.Given) java.util.Objects.requireNonNull(method.item(screen.choice()));
+        Scope scope = station.scope(element.tag());
+        List<String> names = station.columns().judgedNames();
+        List<ScreenGrid.Variant> variants = new ScreenGrid(station.items(), method, screen)
+                .lay(
+                        Sources.keys(scope, choice.table()),
+                        scope,
+                        station.cases(element.tag()).subList(0, names.size()),
+                        names,
+                        drafts.grid());
+        Design.Typed typed = element.typed().get(screen.choice());
+        Place at = station.entry(element.tag(), screen.choice()).place();
+        String entry = "cell " + at.address() + " of sheet " + at.sheet();
+        List<Cell> marks = new SizesSheet(station.items(), method, screen, drafts.grid())
+                .lay(
+                        drafts.compared(),
+                        scope.cell(screen.choice()),
+                        entry,
+                        typed == null ? "" : typed.source(),
+                        variants);
+        SizeRerunsSheet reruns = new SizeRerunsSheet(station.cells(), drafts.reruns(), screen.choice());
+        reruns.notes(entry, names);
+        reruns.table(variants, marks, java.util.Objects.requireNonNull(sizeReruns.get(element.tag())));
     }
 
     private Block.Table rating(Design.Element element, MethodSheet method, StationLayout station, SheetDraft sheet) {

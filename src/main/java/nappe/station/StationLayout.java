@@ -212,6 +212,19 @@ public final class StationLayout {
         return Objects.requireNonNull(scopes.get(tag));
     }
 
+    /** The cell into which a symbol of an element is typed, behind the cells that hand it on. */
+    public Cell entry(String tag, String symbol) {
+        Cell cell = scope(tag).cell(symbol);
+        while (cell.formula() != null) {
+            cell = cell.references().values().stream()
+                    .filter(Cell.class::isInstance)
+                    .map(Cell.class::cast)
+                    .findFirst()
+                    .orElseThrow();
+        }
+        return cell;
+    }
+
     /** The scopes of an element's cases, one per column. */
     public List<Scope> cases(String tag) {
         return Objects.requireNonNull(casesOf.get(tag));

@@ -58,8 +58,20 @@ class PackageProofsTest {
         byte[] issued = XlsxDelivery.render(before.results());
         Results anew = changed.results(WorkingSystem.US, before.found());
         Path retyped = Files.write(folder.resolve("retyped.xlsx"), Retyper.type(issued, numbersTyped(anew)));
-        assertThat(Recalculated.disagreements(Recalculated.byGnumeric(retyped), anew))
+        assertThat(Recalculated.disagreements(Recalculated.byGnumeric(retyped), live(anew)))
                 .isEmpty();
+    }
+
+    /** Without what reruns found as issued, which says that it does not follow a changed entry. */
+    private static Results live(Results all) {
+        return new Results(
+                all.furniture(),
+                all.sheets(),
+                all.cells().stream()
+                        .filter(cell -> cell.kind() != Cell.Kind.RERUN)
+                        .toList(),
+                all.values(),
+                all.figures());
     }
 
     @Test
