@@ -23,6 +23,7 @@ import nappe.method.MethodLibrary;
 import nappe.results.Results;
 import nappe.source.BuiltInLibrary;
 import nappe.station.Design;
+import nappe.station.FoundFlows;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -57,7 +58,7 @@ class CombinedCasesTest {
     }
 
     private static Results run(Design design) {
-        return JOB.run(design, List.of()).results();
+        return JOB.run(design, List.of(), FoundFlows.NONE).results();
     }
 
     /** The values of a symbol on the sheet of an element, one per column. */

@@ -13,6 +13,7 @@ import nappe.results.Results;
 import nappe.source.BuiltInLibrary;
 import nappe.source.TextLibrary;
 import nappe.station.Design;
+import nappe.station.FoundFlows;
 import org.jspecify.annotations.Nullable;
 
 /** An invented device D1 with two approach channels above it: A1 rectangular, A2 trapezoidal with a screen. */
@@ -70,7 +71,7 @@ public final class PretendApproach {
                 List.of(),
                 List.of(),
                 List.of());
-        return JOB.run(design, List.of()).results();
+        return JOB.run(design, List.of(), FoundFlows.NONE).results();
     }
 
     private static Design.Demand demand(String symbol, boolean atMost, Design.Typed value) {

@@ -116,6 +116,27 @@ class PackageTest {
 
     @ParameterizedTest
     @ValueSource(strings = {"headworks.xlsx", "return-weir.xlsx"})
+    void flowsFoundStandAsIssuedAndNobodyTypesIntoThem(String name) throws IOException {
+        Package sample = Package.ofSample(name);
+        List<Cell> found = sample.results().cells().stream()
+                .filter(cell -> cell.kind() == Cell.Kind.RERUN
+                        && cell.symbol().equals("Q")
+                        && cell.place().sheet().equals("Found"))
+                .toList();
+        assertThat(found).hasSameSizeAs(sample.found().cases()).isNotEmpty();
+        try (XSSFWorkbook book = open(sample)) {
+            for (Cell cell : found) {
+                var there = book.getSheet("Found")
+                        .getRow(cell.place().row())
+                        .getCell(cell.place().column());
+                assertThat(there.getCellType()).isEqualTo(CellType.NUMERIC);
+                assertThat(there.getCellStyle().getLocked()).isTrue();
+            }
+        }
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"headworks.xlsx", "return-weir.xlsx"})
     void nothingIsHidden(String name) throws IOException {
         Package sample = Package.ofSample(name);
         try (XSSFWorkbook book = open(sample)) {
