@@ -17,8 +17,14 @@ public sealed interface Block {
      * A table: one head row, then its rows. Column i of the table is column i of the workbook sheet.
      *
      * @param title printed above it, on the workbook row before the head; empty for none
+     * @param keys the PDF prints only the rows that begin with what one of these cells holds; all rows where there is none
      */
-    record Table(int row, String title, List<Column> columns, List<Row> rows) implements Block {}
+    record Table(int row, String title, List<Column> columns, List<Row> rows, List<Cell> keys) implements Block {
+        /** A table that is printed whole. */
+        public Table(int row, String title, List<Column> columns, List<Row> rows) {
+            this(row, title, columns, rows, List.of());
+        }
+    }
 
     /**
      * Where the trial rows of a workbook stand: laid out as a table in the workbook only; in the PDF one line says so.
@@ -98,6 +104,8 @@ public sealed interface Block {
     /** How a line is presented: a quantity, a heading between lines, or a part of a limit. */
     enum LineKind {
         QUANTITY,
+        /** Leads to a result elsewhere; it is worked in full for one case, and stands in the workbook for every case. */
+        STEP,
         HEADING,
         LIMIT_VERDICT,
         LIMIT_MARGIN

@@ -194,7 +194,7 @@ public final class ElementSheet {
                 perCase ? laid.stream().map(l -> l.get(i).cell()).toList() : List.of();
         int size = laid.get(0).size();
         Block.LineKind kind = !isLimit || i < size - 2
-                ? Block.LineKind.QUANTITY
+                ? first.onTheWay() ? Block.LineKind.STEP : Block.LineKind.QUANTITY
                 : i == size - 1 ? Block.LineKind.LIMIT_VERDICT : Block.LineKind.LIMIT_MARGIN;
         lines.add(new Block.Line(
                 kind,

@@ -65,10 +65,12 @@ public final class ItemLayout {
     }
 
     private void lay(Item.Line line, String shownAs, String where, Scope scope, Strip strip) {
+        boolean onTheWay = !where.isEmpty() && shownAs.equals(line.symbol());
         Cell cell = cells.live(
                 strip.next(), shownAs, line.unit(), line.formula(), scope, line.knownSign(), line.mayBeBlank());
         scope.put(line.symbol(), cell);
-        strip.add(new Strip.Laid(shownAs, line.label() + where, LookUp.inWords(line.formula()), line.source(), cell));
+        strip.add(new Strip.Laid(
+                shownAs, line.label() + where, LookUp.inWords(line.formula()), line.source(), cell, onTheWay));
     }
 
     private void lay(Item.At at, Scope scope, Strip strip) {

@@ -12,8 +12,13 @@ public final class Strip {
      * A line as laid.
      *
      * @param equation text in place of the cell's formula; empty for the formula itself
+     * @param onTheWay whether it only leads to a result elsewhere: a step at a bound value, a side of a limit
      */
-    public record Laid(String symbol, String label, String equation, String source, Cell cell) {}
+    public record Laid(String symbol, String label, String equation, String source, Cell cell, boolean onTheWay) {
+        public Laid(String symbol, String label, String equation, String source, Cell cell) {
+            this(symbol, label, equation, source, cell, false);
+        }
+    }
 
     private final String sheet;
     private final boolean down;

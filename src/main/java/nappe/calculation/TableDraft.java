@@ -8,13 +8,18 @@ import java.util.List;
 public final class TableDraft {
     private final SheetDraft sheet;
     private final List<Block.Row> rows = new ArrayList<>();
+    private final List<Cell> keys = new ArrayList<>();
     private final Block block;
     private final int firstRow;
 
     TableDraft(SheetDraft sheet, int row, String title, List<Block.Column> columns, boolean workbookOnly) {
         this.sheet = sheet;
-        Block.Table table =
-                new Block.Table(row, title, Collections.unmodifiableList(columns), Collections.unmodifiableList(rows));
+        Block.Table table = new Block.Table(
+                row,
+                title,
+                Collections.unmodifiableList(columns),
+                Collections.unmodifiableList(rows),
+                Collections.unmodifiableList(keys));
         this.block = workbookOnly ? new Block.WorkbookOnly(table) : table;
         this.firstRow = row + (title.isEmpty() ? 0 : 1) + 1;
     }
@@ -42,6 +47,11 @@ public final class TableDraft {
     public void add(List<Block.Item> items) {
         rows.add(new Block.Row(List.copyOf(items)));
         sheet.grown(this);
+    }
+
+    /** From now on the PDF prints only rows that begin with what such a cell holds. */
+    public void printRowsOf(Cell key) {
+        keys.add(key);
     }
 
     public boolean isEmpty() {

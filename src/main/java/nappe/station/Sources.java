@@ -29,6 +29,7 @@ final class Sources {
     private final SheetDraft constants;
     private final SheetDraft tables;
     private final SheetDraft standing;
+    private final Map<String, TableDraft> drafts = new LinkedHashMap<>();
     private final Map<String, Map<String, Run>> runs = new LinkedHashMap<>();
 
     Sources(Cells cells, SheetDraft constants, SheetDraft tables, SheetDraft standing) {
@@ -95,6 +96,14 @@ final class Sources {
         columns.forEach(scope::put);
     }
 
+    /** Of a table that is looked up by a word, the PDF prints the rows in use; the workbook holds them all. */
+    void printRow(String table, Cell key) {
+        TableDraft draft = drafts.get(table);
+        if (draft != null) {
+            draft.printRowsOf(key);
+        }
+    }
+
     /** The words of a table that was laid, from which an entry chooses. */
     static Run keys(Scope scope, String table) {
         return (Run) java.util.Objects.requireNonNull(scope.find(table + KEY));
@@ -154,6 +163,9 @@ final class Sources {
                 row.add(new Block.Content(cell));
             }
             draft.add(row);
+        }
+        if (!repeatsKey) {
+            drafts.put(table.name(), draft);
         }
         sheet.gap();
         for (int c = 0; c < columns.size(); c++) {

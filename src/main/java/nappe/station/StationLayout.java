@@ -123,6 +123,7 @@ public final class StationLayout {
             entries.lay(element, method(element.tag()), scope);
             constants.getOrDefault(element.method(), Map.of()).forEach(scope::put);
             scopes.put(element.tag(), scope);
+            printRowsInUse(sources, method(element.tag()), scope);
         }
         Map<Design.Demand, Cell> demands = entries.layDemands(design.demands());
         @Nullable String below = null;
@@ -135,6 +136,20 @@ public final class StationLayout {
             limits.addAll(laid.lay(workedCase(), demanded(element, demands)));
             linesOf.put(tag, laid.lines());
             below = tag;
+        }
+    }
+
+    /** A table that a choice looks up is printed by the rows in use. */
+    private static void printRowsInUse(Sources sources, MethodSheet method, Scope scope) {
+        for (Item item : method.items()) {
+            if (item instanceof Item.Line line
+                    && line.formula() instanceof Formula.Call match
+                    && match.function() == nappe.formula.Function.MATCH
+                    && match.arguments().get(0) instanceof Formula.Symbol key
+                    && match.arguments().get(1) instanceof Formula.Symbol column
+                    && scope.find(key.name()) instanceof Cell chosen) {
+                sources.printRow(column.name().substring(0, column.name().lastIndexOf('.')), chosen);
+            }
         }
     }
 

@@ -25,6 +25,8 @@ public final class SampleStations {
         return Map.of(
                 "headworks.xlsx",
                 () -> bytes(SampleStations::headworks),
+                "inlet-works.xlsx",
+                () -> bytes(SampleStations::inlet),
                 "return-weir.xlsx",
                 () -> bytes(SampleStations::weir));
     }
@@ -48,20 +50,21 @@ public final class SampleStations {
         }
     }
 
-    private static Filler filler(WorkingSystem system, String tag, String method) throws IOException {
-        return new Filler(BlankWriter.bytes(system, List.of(new Chosen(tag, method)), METHODS));
+    private static Filler filler(WorkingSystem system, Chosen... elements) throws IOException {
+        return new Filler(BlankWriter.bytes(system, List.of(elements), METHODS));
     }
 
     /** The headworks, open to changes. */
     public static Filler headworks() throws IOException {
         String brief = "Invented design brief DB-3, table 2";
         String river = "Invented river study RS-1, table 4";
-        return filler(WorkingSystem.US, "F1", "parshall-flume")
+        String drawing = "Invented drawing C-12, rev. 1";
+        return filler(WorkingSystem.US, new Chosen("F1", "parshall-flume"), new Chosen("A1", "approach-channel"))
                 .project("Project", "Quillwater Reclamation Works, headworks (fictional)")
                 .project("Firm", "Any Firm of Engineers (fictional)")
                 .project("Client", "Town of Nowhere Falls (fictional)")
                 .project("Calculation number", "QW-H-017")
-                .project("Subject", "Influent Parshall flume: range, free flow and levels")
+                .project("Subject", "Influent Parshall flume and its approach: range, free flow and levels")
                 .project("Revision", "A")
                 .project("Revision date", "2030-03-14")
                 .project("Status", "preliminary")
@@ -136,6 +139,46 @@ public final class SampleStations {
                 .entry("F1", "form", "1967 form", null, "Invented design brief DB-3, clause 4.3", "known")
                 .entry("F1", "submerged", "refused", null, "Invented design brief DB-3, clause 4.3", "known")
                 .entry("F1", "z_f", 412.5, "ft", "Invented drawing C-12, rev. 1", "known")
+                .entry("A1", "serves", "one unit", null, drawing, "known")
+                .entry("A1", "inflow", "tranquil", null, drawing, "known")
+                .entry("A1", "b", 62, "in", drawing, "known")
+                .entry("A1", "m", 0, "1", drawing, "known")
+                .entry("A1", "z_f", 412.3, "ft", drawing, "known")
+                .entry("A1", "L_c", 60, "ft", drawing, "known")
+                .entry("A1", "S_0", 0.0005, "1", drawing, "known")
+                .entry("A1", "n", 0.013, "1", "Invented design brief DB-3, table 5: concrete, some slime", "assumed")
+                .entry("A1", "C_t", 0.1, "1", "Invented design brief DB-3, table 5: walls rounded", "assumed")
+                .entry("A1", "K", 0.4, "1", "Invented screen sheet SC-1: bars half blinded", "assumed")
+                .entry("A1", "z_w", 416.5, "ft", drawing, "known")
+                .entry("A1", "L_s", 56, "ft", drawing, "known")
+                .row(
+                        "Demands",
+                        "A1",
+                        "f_b",
+                        "at least",
+                        1.5,
+                        "ft",
+                        "freeboard to the top of the channel walls",
+                        "Invented design brief DB-3, clause 4.4")
+                .row(
+                        "Demands",
+                        "A1",
+                        "z_1",
+                        "at most",
+                        414.4,
+                        "ft",
+                        "water at the head of the channel stays under the floor drain of the screen room",
+                        "Invented design brief DB-3, clause 4.5")
+                .row(
+                        "Demands",
+                        "A1",
+                        "V_m",
+                        "at least",
+                        2,
+                        "ft/s",
+                        "channel cleans itself at the daily peak of the design year",
+                        "Invented design brief DB-3, clause 4.6",
+                        "Design, peak hour")
                 .row(
                         "Demands",
                         "F1",
@@ -181,10 +224,160 @@ public final class SampleStations {
                 .row("Revisions", "A", "2030-03-14", "First issue, preliminary.");
     }
 
+    /** A flume of the ISO metric series below a tidal river, open to changes. */
+    public static Filler inlet() throws IOException {
+        String brief = "Invented design brief MG-1, table 3";
+        String tide = "Invented estuary note EN-2, figure 4";
+        String drawing = "Invented drawing MG-21, rev. 0";
+        return filler(WorkingSystem.SI, new Chosen("F1", "parshall-flume"), new Chosen("A1", "approach-channel"))
+                .project("Project", "Mossgate Point sewage works, inlet (fictional)")
+                .project("Firm", "Any Firm of Engineers (fictional)")
+                .project("Client", "Mossgate Point Drainage Board (fictional)")
+                .project("Calculation number", "MP-I-002")
+                .project("Subject", "Inlet flume and its approach: range, submerged flow at high tide, levels")
+                .project("Revision", "0")
+                .project("Revision date", "2031-09-08")
+                .project("Status", "for checking")
+                .project("Paper", "A4")
+                .project("Flow reported in", "L/s")
+                .project("Head reported in", "mm")
+                .project("Elevations refer to", "invented harbour datum, 0.000 m at the old tide board")
+                .project("Case worked in full", "Wet-weather peak, spring tide")
+                .project("Purpose of release", "Released for checking of the sample only.")
+                .project("Space for a seal on the cover", "no")
+                .row("Flows", "Night minimum", "1 h", "2032", 22, "L/s", null, "m", "", brief, "known")
+                .row("Flows", "Dry-weather average", "1 d", "2032", 85, "L/s", null, "m", "", brief, "known")
+                .row(
+                        "Flows",
+                        "Dry-weather peak",
+                        "1 h",
+                        "2032",
+                        170,
+                        "L/s",
+                        null,
+                        "m",
+                        "",
+                        brief,
+                        "known",
+                        null,
+                        255,
+                        "mm")
+                .row("Flows", "Wet-weather peak", "15 min", "2032", 420, "L/s", null, "m", "", brief, "known")
+                .row(
+                        "Flows",
+                        "Wet-weather peak, spring tide",
+                        "15 min",
+                        "2032",
+                        420,
+                        "L/s",
+                        22.2,
+                        "m",
+                        "1 year",
+                        tide,
+                        "known")
+                .row("Flows", "Wet-weather peak, 2050", "15 min", "2050", 640, "L/s", null, "m", "", brief, "assumed")
+                .row(
+                        "Flows",
+                        "Storm before the overflow spills",
+                        "5 min",
+                        "2050",
+                        1.05,
+                        "m3/s",
+                        null,
+                        "m",
+                        "",
+                        brief,
+                        "assumed")
+                .row("Flows", "Storm surge", "5 min", "2050", 640, "L/s", 22.62, "m", "100 years", tide, "known")
+                .row("Tailwater curve", 0, "L/s", 21.4, "m", "Invented outfall calculation OC-7, table 1", "known")
+                .row("Tailwater curve", 100, "L/s", 21.62, "m", "Invented outfall calculation OC-7, table 1", "known")
+                .row("Tailwater curve", 300, "L/s", 21.9, "m", "Invented outfall calculation OC-7, table 1", "known")
+                .row("Tailwater curve", 600, "L/s", 22.12, "m", "Invented outfall calculation OC-7, table 1", "known")
+                .row("Tailwater curve", 1200, "L/s", 22.38, "m", "Invented outfall calculation OC-7, table 1", "known")
+                .row(
+                        "Combinations",
+                        "Dry-weather peak at spring tide",
+                        "Dry-weather peak",
+                        "Wet-weather peak, spring tide",
+                        "yes",
+                        "Invented estuary note EN-2, section 3: the tide does not ask for rain.")
+                .row(
+                        "Combinations",
+                        "Night minimum at the surge",
+                        "Night minimum",
+                        "Storm surge",
+                        "no",
+                        "Invented estuary note EN-2, section 5: surges come with days of rain.")
+                .entry(
+                        "F1",
+                        "size",
+                        "0.6 m",
+                        null,
+                        "Invented option report MG-OR, section 2: fits the old chamber",
+                        "known")
+                .entry("F1", "form", "subtraction", null, brief, "known")
+                .entry("F1", "submerged", "accepted", null, "Invented permit draft MG-P, condition 6", "assumed")
+                .entry("F1", "z_f", 21.85, "m", drawing, "known")
+                .entry("A1", "serves", "one unit", null, drawing, "known")
+                .entry("A1", "inflow", "tranquil", null, drawing, "known")
+                .entry("A1", "b", 1.2, "m", drawing, "known")
+                .entry("A1", "m", 0, "1", drawing, "known")
+                .entry("A1", "z_f", 21.8, "m", drawing, "known")
+                .entry("A1", "L_c", 15, "m", drawing, "known")
+                .entry("A1", "S_0", 0.001, "1", drawing, "known")
+                .entry("A1", "n", 0.014, "1", "Invented design brief MG-1, table 6: rendered walls", "assumed")
+                .entry("A1", "C_t", 0.1, "1", "Invented design brief MG-1, table 6", "assumed")
+                .entry("A1", "K", 0, "1", "no screen in the channel", "known")
+                .entry("A1", "z_w", 22.95, "m", drawing, "known")
+                .entry("A1", "L_s", 13.5, "m", drawing, "known")
+                .row(
+                        "Demands",
+                        "A1",
+                        "f_b",
+                        "at least",
+                        300,
+                        "mm",
+                        "freeboard to the top of the channel walls",
+                        "Invented permit draft MG-P, condition 8")
+                .row(
+                        "Demands",
+                        "A1",
+                        "z_1",
+                        "at most",
+                        22.6,
+                        "m",
+                        "water at the head of the channel stays under the crown of the incoming sewer",
+                        "Invented permit draft MG-P, condition 9")
+                .row(
+                        "Demands",
+                        "A1",
+                        "V_m",
+                        "at least",
+                        0.45,
+                        "m/s",
+                        "channel cleans itself once a day",
+                        "Invented design brief MG-1, clause 5.2",
+                        "Dry-weather peak")
+                .row(
+                        "Assumptions",
+                        "The overflow upstream holds the flow to the inlet at the storm flow stated.",
+                        "Invented overflow note ON-1",
+                        "project engineer",
+                        "open")
+                .row("References", "Invented design brief MG-1, edition of 2030")
+                .row("References", "Invented estuary note EN-2, edition of 2029")
+                .row(
+                        "Requirements",
+                        "Show what is measured at spring tide, and how high the water stands.",
+                        "Invented permit draft MG-P, condition 7",
+                        "Limits")
+                .row("Revisions", "0", "2031-09-08", "First issue for checking.");
+    }
+
     /** The weir, open to changes. */
     public static Filler weir() throws IOException {
         String log = "Invented pump schedule PS-2";
-        return filler(WorkingSystem.SI, "W1", "rectangular-weir")
+        return filler(WorkingSystem.SI, new Chosen("W1", "rectangular-weir"))
                 .project("Project", "Lantern Fen treatment plant, return water (fictional)")
                 .project("Firm", "Any Firm of Engineers (fictional)")
                 .project("Client", "Lantern Fen Water Board (fictional)")

@@ -41,7 +41,7 @@ final class CasesGrids {
     /** The tables; none where there is one case or none, since it is worked in full. */
     List<View.Grid> grids(double width) {
         int cases = lines.printed();
-        if (cases < 2 || lines.lines().stream().allMatch(line -> line.perCase().isEmpty())) {
+        if (cases < 2 || perCase(lines).isEmpty()) {
             return List.of();
         }
         int tables = tables(width);
@@ -54,7 +54,8 @@ final class CasesGrids {
                     from,
                     to,
                     "Every case" + part
-                            + "; a value stands in the workbook in the row of its line and the column of its case",
+                            + "; a value stands in the workbook in the row of its line and the column of its case, as do steps on"
+                            + " the way; verdicts of every case are on the sheet of limits",
                     width));
         }
         return grids;
@@ -96,7 +97,14 @@ final class CasesGrids {
     }
 
     private static List<Block.Line> perCase(Block.Lines lines) {
-        return lines.lines().stream().filter(line -> !line.perCase().isEmpty()).toList();
+        return lines.lines().stream().filter(CasesGrids::isPrinted).toList();
+    }
+
+    /** Steps are worked for one case and stand in the workbook for the others; verdicts stand on the sheet of limits. */
+    private static boolean isPrinted(Block.Line line) {
+        return !line.perCase().isEmpty()
+                && line.kind() != Block.LineKind.STEP
+                && line.kind() != Block.LineKind.LIMIT_VERDICT;
     }
 
     private List<Double> widths(int cases, double width) {
@@ -128,7 +136,7 @@ final class CasesGrids {
         for (Block.Line line : lines.lines()) {
             if (line.kind() == Block.LineKind.HEADING) {
                 between.heading(line.description());
-            } else if (!line.perCase().isEmpty()) {
+            } else if (isPrinted(line)) {
                 body.add(between.above(row(line, from, to)));
             }
         }

@@ -7,6 +7,7 @@ import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.formula.Formula;
 import nappe.formula.PlainReading;
+import nappe.formula.Value;
 import nappe.results.Results;
 
 /** A table of a sheet as a grid: columns measured, numbers with their decimal points in line. */
@@ -35,7 +36,7 @@ final class TableGrid {
             decimals.add(new Decimals());
             measure(i, UnitPrint.head(table.columns().get(i).head()), true);
         }
-        for (Block.Row row : table.rows()) {
+        for (Block.Row row : printedRows()) {
             List<View.Text> printed = new ArrayList<>();
             for (int i = 0; i < row.items().size(); i++) {
                 Block.Column column = table.columns().get(i);
@@ -46,6 +47,25 @@ final class TableGrid {
             }
             texts.add(printed);
         }
+    }
+
+    /** The rows in use, where the table is looked up by a word; all of them where none of its keys stands in it. */
+    private List<Block.Row> printedRows() {
+        List<Value> keys = table.keys().stream().map(results::value).toList();
+        List<Block.Row> inUse = table.rows().stream()
+                .filter(row ->
+                        row.items().get(0) instanceof Block.Content first && keys.contains(results.value(first.cell())))
+                .toList();
+        return inUse.isEmpty() ? table.rows() : inUse;
+    }
+
+    /** The workbook row, from 1, of the first row of the table. */
+    private int firstRow() {
+        return table.row() + (table.title().isEmpty() ? 0 : 1) + 2;
+    }
+
+    private boolean isCut() {
+        return texts.size() < table.rows().size();
     }
 
     private void measure(int column, View.Text text, boolean head) {
@@ -75,6 +95,12 @@ final class TableGrid {
         List<View.Text> titles = new ArrayList<>(headings);
         if (!table.title().isEmpty()) {
             titles.add(View.Text.of("tabletitle", SymbolPrint.inText(table.title())));
+        }
+        if (isCut()) {
+            titles.add(View.Text.plain(
+                    "small",
+                    "the row in use; all " + table.rows().size() + " rows stand in the workbook, rows " + firstRow()
+                            + " to " + (firstRow() + table.rows().size() - 1)));
         }
         double over = titles.stream()
                 .mapToDouble(title -> Typefaces.width(title.characters(), Typefaces.BOLD, 11) + 4)

@@ -122,7 +122,7 @@ final class WorkedGrid {
             }
             return texts;
         }
-        Formula shown = line.kind() == Block.LineKind.LIMIT_VERDICT ? Asked.condition(formula) : formula;
+        Formula shown = Asked.condition(formula);
         if (line.kind() == Block.LineKind.LIMIT_VERDICT) {
             Asked.when(formula).ifPresent(when -> texts.add(View.Text.plain("written", "asked for where " + when)));
         }
