@@ -195,13 +195,13 @@ class HouseOptionTest {
     @Test
     void allFaultsOfTheMethodInUseAreToldAtOnceByLineAndColumn() throws IOException {
         Path input = station();
-        change(SHEET, "line      r_p = h_1/p", "line      r_p = h_1/q");
+        change(SHEET, "l_f = L_b - r", "l_f = L_b - q");
         change(SHEET, "limit     0.30 m <= b", "limit     0.30 s <= b");
         change(TABLE, "smooth,0.003", "smooth,0.003 mm");
         change(CHECKS, "0.05243389,m3/s", "0.05243389,bucket");
         Said issued = refused(nappe("issue", input, "--house", house, "-o", folder.resolve("out")));
         assertThat(issued.err())
-                .contains(house + "/" + SHEET + ":43:21: q is not defined above (fault: symbol-unknown)")
+                .contains(house + "/" + SHEET + ":28:23: q is not defined above (fault: symbol-unknown)")
                 .containsPattern("mill-race-weir.txt:50:\\d+: ")
                 .contains(house + "/" + TABLE + ":5:8: \"0.003 mm\" is not a number")
                 .contains(house + "/" + CHECKS + ":3:", "\"bucket\" is not a known unit")
@@ -273,7 +273,8 @@ class HouseOptionTest {
         assertThat(refused(nappe("verify", "--house", folder.resolve("nothing")))
                         .err())
                 .contains("there is no such folder");
-        assertThat(refused(nappe("verify", "--house", house.resolve(SHEET))).err()).contains("this is a file");
+        assertThat(refused(nappe("verify", "--house", house.resolve(SHEET))).err())
+                .contains("this is a file");
         assertThat(refused(nappe("verify", "--house", empty)).err()).contains("put each method sheet into methods");
         Path odd = Files.createDirectories(folder.resolve("ours\u0001/methods"));
         assertThat(refused(nappe("verify", "--house", odd.getParent())).err()).contains("the folder's name is printed");
@@ -327,6 +328,8 @@ class HouseOptionTest {
     @ParameterizedTest
     @ValueSource(strings = {"blank", "inspect", "issue", "verify"})
     void helpOfEveryCommandShowsTheOptionInAnExample(String command) {
-        assertThat(nappe(command, "--help").out()).contains("--house=FOLDER").containsPattern("nappe .*--house our-methods");
+        assertThat(nappe(command, "--help").out())
+                .contains("--house=FOLDER")
+                .containsPattern("nappe .*--house our-methods");
     }
 }

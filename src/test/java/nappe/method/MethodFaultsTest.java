@@ -228,8 +228,7 @@ class MethodFaultsTest {
                           ^
                 pretend-broken.csv:4:5: "x" is not a number; write it like 2.5 or -1e-3, without a unit (fault: number-expected)
                     0.4,x
-                        ^r ; A
-                          ^
+                        ^
                 pretend.txt:9:8: pretend-curve.csv has no column q; it has r, c, e (fault: column-unknown)
                     column q ; 1 ; l
                            ^
