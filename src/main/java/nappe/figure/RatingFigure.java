@@ -109,7 +109,8 @@ public final class RatingFigure {
         List<End> ends = new ArrayList<>();
         for (Limit limit : method.limits()) {
             boolean ofHead = limit.value() instanceof Formula.Symbol symbol
-                    && symbol.name().equals(head);
+                            && symbol.name().equals(head)
+                    || isEndOfRating(limit.bound());
             boolean ofFlow = limit.value() instanceof Formula.Symbol symbol
                     && symbol.name().equals(flow);
             if ((ofHead || ofFlow) && !cases.isEmpty()) {
@@ -137,6 +138,12 @@ public final class RatingFigure {
                         "head where the table ends",
                         number(points.get(points.size() - 1).head())));
         return ends;
+    }
+
+    /** A head that the rating runs from or to is an end of its range, whichever head the limit judges by it. */
+    private boolean isEndOfRating(Formula bound) {
+        Rating rating = method.ratings().get(0);
+        return bound instanceof Formula.Symbol && (bound.equals(rating.from()) || bound.equals(rating.to()));
     }
 
     private static void add(List<End> ends, End end) {

@@ -81,6 +81,8 @@ class NappeTest {
                 .project("Purpose of release", "For trying out only.")
                 .row("Flows", "Peak hour", "1 h", "2050", 2.5, "MGD", 100.1, "ft", "", "invented", "known")
                 .entry("F1", "size", "1 ft", null, "invented", "known")
+                .entry("F1", "form", "subtraction", null, "invented", "known")
+                .entry("F1", "submerged", "accepted", null, "invented", "known")
                 .entry("F1", "z_f", 100, "ft", "invented", "known")
                 .save(file);
         Said inspected = nappe("inspect", file);

@@ -100,13 +100,14 @@ class DraftingTest {
     }
 
     @Test
-    void aDrownedFlumeHasNoLevelAtItsGaugeAndSaysSo() {
+    void aDrownedFlumeHasABoundingLevelAndNoHeadAtItsGaugeAndSaysSo() {
         Results drowned = DrawnStation.flume(WorkingSystem.US, "1 ft", 4, 101.3);
         assertThat(dimensioned(drowned)).doesNotContain("h_a").contains("L_B", "W");
         assertThat(drawing(drowned).notes())
                 .startsWith(
                         "State of flow: drowned.",
-                        "Not drawn, since there is no result: water level at the gauge z_u, head at the gauge h_a.");
+                        "Water level at the gauge: bounding level, not a measurement.",
+                        "Not drawn, since there is no result: head at the gauge, where it measures h_a.");
         assertThat(curve(drowned).missing()).contains("Case drawn is not marked: head at the gauge: no result.");
     }
 

@@ -32,6 +32,8 @@ public final class DrawnStation {
         String length = system == WorkingSystem.US ? "ft" : "m";
         Map<String, Typed> typed = new LinkedHashMap<>();
         typed.put("size", typed(Value.word(size), "1"));
+        typed.put("form", typed(Value.word("1967 form"), "1"));
+        typed.put("submerged", typed(Value.word("accepted"), "1"));
         typed.put("z_f", typed(Value.of(100), length));
         return results(system, "parshall-flume", typed, flow, level);
     }

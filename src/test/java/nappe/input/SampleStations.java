@@ -116,6 +116,8 @@ public final class SampleStations {
                         brief,
                         "assumed")
                 .entry("F1", "size", "3 ft", null, "Invented drawing C-12, rev. 1", "known")
+                .entry("F1", "form", "1967 form", null, "Invented design brief DB-3, clause 4.3", "known")
+                .entry("F1", "submerged", "refused", null, "Invented design brief DB-3, clause 4.3", "known")
                 .entry("F1", "z_f", 412.5, "ft", "Invented drawing C-12, rev. 1", "known")
                 .row(
                         "Demands",

@@ -41,6 +41,8 @@ final class Designs {
         weir.put("z_c", number(1.2, "m"));
         Map<String, Design.Typed> flume = new LinkedHashMap<>();
         flume.put("size", typed(Value.word("1 ft"), "1"));
+        flume.put("form", typed(Value.word("1967 form"), "1"));
+        flume.put("submerged", typed(Value.word("refused"), "1"));
         flume.put("z_f", number(floor, "m"));
         return design(
                 List.of(

@@ -53,6 +53,8 @@ record PretendStation(double floor, List<Double> flows, List<Double> levels, dou
                 true);
         Map<String, Typed> flume = new LinkedHashMap<>();
         flume.put("size", typed(Value.word("1 ft"), "1"));
+        flume.put("form", typed(Value.word("subtraction"), "1"));
+        flume.put("submerged", typed(Value.word("refused"), "1"));
         flume.put("z_f", typed(Value.of(floor), "ft"));
         Map<String, Typed> weir = new LinkedHashMap<>();
         weir.put("b", typed(Value.of(notch), "in"));

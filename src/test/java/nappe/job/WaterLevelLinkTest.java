@@ -53,7 +53,10 @@ class WaterLevelLinkTest {
         Results results = run(Designs.weirBelowFlume(1.05, flowCase("High", 0.1, 0.6)));
         assertThat(values(results, "W1", "z_u").get(0)).isInstanceOf(Value.Number.class);
         assertThat(values(results, "F1", "state")).containsExactly(Value.word("drowned"));
-        assertThat(values(results, "F1", "z_u")).containsExactly(new Value.None("no result"));
+        assertThat(values(results, "F1", "h_a")).containsExactly(new Value.None("no result"));
+        assertThat(values(results, "F1", "level")).containsExactly(Value.word("bounding level, not a measurement"));
+        assertThat(((Value.Number) values(results, "F1", "z_u").get(0)).value())
+                .isGreaterThan(((Value.Number) values(results, "F1", "z_t").get(0)).value());
     }
 
     @Test

@@ -48,6 +48,10 @@ class CheckersEditTest {
         flume("ISO metric size", new Entry("F1", "size", "0.9 m"));
         flume("ISO metric size without a general formula", new Entry("F1", "size", "0.152 m"));
         flume("size in other letters", new Entry("F1", "size", "3 FT"));
+        flume("other submerged form", new Entry("F1", "form", "subtraction"));
+        flume("submerged readings accepted", new Entry("F1", "submerged", "accepted"), new Level(3, 413.45));
+        flume("width at the gauge typed", new Entry("F1", "W_g", 1.7));
+        flume("head read in submerged flow", new Level(1, 412.85));
         flume("crest lower: most cases drown", new Entry("F1", "z_f", 411.1));
         flume("crest higher: all flow free", new Entry("F1", "z_f", 414.5));
         flume("crest below nought", new Entry("F1", "z_f", -2.5));
@@ -188,7 +192,7 @@ class CheckersEditTest {
         for (String sample : List.of("headworks.xlsx", "return-weir.xlsx")) {
             assertThat(Package.ofSample(sample).results().cells())
                     .filteredOn(c -> c.kind() == Cell.Kind.ENTRY && c.typed() instanceof Value.Word)
-                    .allMatch(c -> c.symbol().equals("size"));
+                    .allMatch(c -> List.of("size", "form", "submerged").contains(c.symbol()));
         }
     }
 

@@ -24,7 +24,7 @@ class EquationTextTest {
     @Test
     void theEquationsOfTheFlumeAreInTheText(@TempDir Path folder) throws IOException {
         assertThat(text("headworks.xlsx", folder))
-                .contains("h_f = h_0*(Q/(Q_0*C))^(1/n)", "h_a = if(S_f <= S_x, h_f, none())")
+                .contains("h_f = h_0*(Q/(Q_0*C))^(1/n)", "h_u = max(h_v, h_b + (1 - S_end)*h_v)")
                 .containsPattern("= 1 ft \\* \\([\\d.]+ ft3/s / \\(1 ft3/s \\* 12\\)\\)\\^\\(1/[\\d.]+\\)");
     }
 

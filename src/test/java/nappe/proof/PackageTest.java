@@ -40,7 +40,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 class PackageTest {
     private static final Pattern TEXT = Pattern.compile("\"[^\"]*\"");
     private static final Pattern REFERENCE =
-            Pattern.compile("(?:'([^']+)'!)?\\$?([A-Z]{1,3})\\$?(\\d+)(?::\\$?([A-Z]{1,3})\\$?(\\d+))?");
+            Pattern.compile("(?:'([^']+)'!)?\\$?([A-Z]{1,3})\\$?(\\d+)(?![\\d(])(?::\\$?([A-Z]{1,3})\\$?(\\d+))?");
     private static final Map<String, PdfPages> PDFS = new HashMap<>();
 
     @TempDir
