@@ -1,5 +1,6 @@
 package nappe.job;
 
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -9,6 +10,7 @@ import java.util.stream.Collectors;
 import nappe.figure.FigureLibrary;
 import nappe.method.MethodException;
 import nappe.method.MethodLibrary;
+import nappe.method.MethodSheet;
 import nappe.source.CitedTable;
 import nappe.source.HouseLibrary;
 import nappe.source.TextException;
@@ -33,12 +35,25 @@ public final class HouseReview {
     public Set<TextFault> of(String method) {
         Set<TextFault> faults = new LinkedHashSet<>();
         if (!house.house("methods/" + method + ".txt").isEmpty()) {
-            gather(faults, () -> figures.of(methods.sheet(method)));
+            gather(faults, () -> {
+                requireLimit(faults, methods.sheet(method));
+                figures.of(methods.sheet(method));
+            });
         }
         if (!house.house("checks/" + method + ".csv").isEmpty()) {
             gather(faults, () -> CheckRow.of(house, method + ".csv"));
         }
         return faults;
+    }
+
+    /** A package says where its results hold; a method without any limit would claim them everywhere. */
+    private void requireLimit(Set<TextFault> faults, MethodSheet sheet) {
+        if (sheet.limits().isEmpty()) {
+            faults.add(TextFault.ofFile(
+                    house.shown("methods/" + sheet.name() + ".txt"),
+                    "a method states at least one limit of its use, such as: limit 0.06 m <= h_1 ; least head ; KEY",
+                    "limit-missing"));
+        }
     }
 
     /** The faults of all that the house has, used or not. */
@@ -106,19 +121,30 @@ public final class HouseReview {
                 .toList();
     }
 
-    /** For methods that are not used: how many faults they have, in words; nothing of those without faults. */
+    /** Of what is not used: how many faults it has, in words; nothing of what has none. */
     public List<String> remarks(Collection<String> used) {
-        return java.util.stream.Stream.concat(
-                        house.strays().stream().map(TextFault::toString),
-                        ownMethods().stream()
-                                .filter(method ->
-                                        !used.contains(method) && !of(method).isEmpty())
-                                .map(method -> "house method " + method + ", not used here, has "
-                                        + (of(method).size() == 1
-                                                ? "1 fault"
-                                                : of(method).size() + " faults")
-                                        + "; verify --house tells them"))
-                .toList();
+        List<String> remarks = new ArrayList<>();
+        house.strays().forEach(stray -> remarks.add(stray.toString()));
+        for (String method : ownMethods()) {
+            if (!used.contains(method)) {
+                remark(remarks, "house method " + method + ", not used here, has ", of(method));
+            }
+        }
+        for (String file : house.ownNames("checks")) {
+            if (!ownMethods().contains(withoutEnding(file))) {
+                Set<TextFault> faults = new LinkedHashSet<>();
+                gather(faults, () -> CheckRow.of(house, file));
+                remark(remarks, "no check value of " + house.shown("checks/" + file) + " is run: it has ", faults);
+            }
+        }
+        return remarks;
+    }
+
+    private static void remark(List<String> remarks, String what, Set<TextFault> faults) {
+        if (!faults.isEmpty()) {
+            remarks.add(what + (faults.size() == 1 ? "1 fault" : faults.size() + " faults")
+                    + "; verify --house tells them");
+        }
     }
 
     /** The check values of the house that can be read. */
