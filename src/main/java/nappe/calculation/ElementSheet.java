@@ -38,8 +38,15 @@ public final class ElementSheet {
         }
     }
 
-    /** A limit demanded by others, with the cells it brings along. */
-    public record Demanded(Limit limit, Map<String, Cell> cells) {}
+    /** The name of the case, for a limit that is judged in one case alone. */
+    public static final String CASE_NAME = "case";
+
+    /**
+     * A limit demanded by others, with the cells it brings along.
+     *
+     * @param caseNames the cells with the names of the columns, where its condition asks for the case; else empty
+     */
+    public record Demanded(Limit limit, Map<String, Cell> cells, List<Cell> caseNames) {}
 
     private final String tag;
     private final MethodSheet method;
@@ -106,12 +113,12 @@ public final class ElementSheet {
         heading("Limits");
         LimitRows limitRows = new LimitRows(items.cells());
         for (Limit limit : method.limits()) {
-            limit(limitRows, limit, Map.of());
+            limit(limitRows, limit, Map.of(), List.of());
         }
         closings(limitRows);
         if (!demands.isEmpty()) {
             heading("Limits demanded by others");
-            demands.forEach(demand -> limit(limitRows, demand.limit(), demand.cells()));
+            demands.forEach(demand -> limit(limitRows, demand.limit(), demand.cells(), demand.caseNames()));
         }
         sheet.lines(columns, workedCase, lines);
         return List.copyOf(limits);
@@ -201,24 +208,34 @@ public final class ElementSheet {
                 perCaseCells));
     }
 
-    /** The equation of a line; where each case has its own origin, the run of origins. */
+    /** The equation of a line; where each case has its own origin, the run of origins on the sheet of the first. */
     private static String equation(List<List<Strip.Laid>> laid, int i) {
         Strip.Laid first = laid.get(0).get(i);
-        Strip.Laid last = laid.get(laid.size() - 1).get(i);
         Formula formula = first.cell().formula();
         if (first.equation().isEmpty() && formula != null) {
             return PlainReading.of(formula);
         }
-        return first.equation().equals(last.equation())
+        String sheet = beforeComma(first.equation());
+        String last = first.equation();
+        for (List<Strip.Laid> one : laid) {
+            String text = one.get(i).equation();
+            last = beforeComma(text).equals(sheet) ? text : last;
+        }
+        return first.equation().equals(last)
                 ? first.equation()
-                : first.equation() + " to " + last.equation().replaceAll(".*, ", "") + ", one for each case";
+                : first.equation() + " to " + last.substring(sheet.length()) + ", one for each case";
+    }
+
+    private static String beforeComma(String text) {
+        int comma = text.lastIndexOf(", ");
+        return comma < 0 ? "" : text.substring(0, comma + 2);
     }
 
     private static String unitText(Strip.Laid line) {
         return line.cell().unit().text().equals("1") ? "" : line.cell().unit().text();
     }
 
-    private void limit(LimitRows limitRows, Limit limit, Map<String, Cell> brought) {
+    private void limit(LimitRows limitRows, Limit limit, Map<String, Cell> brought, List<Cell> caseNames) {
         Set<String> symbols = new HashSet<>(SymbolsReading.of(limit.lesser()));
         symbols.addAll(SymbolsReading.of(limit.greater()));
         if (limit.scale() != null) {
@@ -227,13 +244,17 @@ public final class ElementSheet {
         if (limit.when() != null) {
             symbols.addAll(SymbolsReading.of(limit.when()));
         }
-        boolean perCase = symbols.stream().anyMatch(method::perCase);
+        boolean perCase = !caseNames.isEmpty() || symbols.stream().anyMatch(method::perCase);
+        int[] next = {0};
         List<LimitRows.Judged> judged = new ArrayList<>();
         rows(
                 perCase,
                 (at, strip) -> {
                     Scope inner = at.inner();
                     brought.forEach(inner::put);
+                    if (!caseNames.isEmpty()) {
+                        inner.put(CASE_NAME, caseNames.get(next[0]++));
+                    }
                     judged.add(limitRows.lay(limit, inner, strip));
                 },
                 true);

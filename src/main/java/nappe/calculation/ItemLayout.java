@@ -7,6 +7,8 @@ import nappe.formula.Function;
 import nappe.formula.PlainReading;
 import nappe.formula.Value;
 import nappe.method.Item;
+import nappe.unit.Unit;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Lays items of a method sheet as cells under a scope. One recursion serves case columns, trial rows and rating tables;
@@ -43,7 +45,15 @@ public final class ItemLayout {
      * @param run what the summary names, one cell per case
      */
     public void layOverCases(Item.Line line, Formula.Summary over, Run run, Scope scope, Strip strip) {
-        Scope inner = scope.inner();
+        Cell cell = overCases(strip.next(), line.symbol(), line.unit(), over, run);
+        scope.put(line.symbol(), cell);
+        strip.add(new Strip.Laid(
+                line.symbol(), line.label(), PlainReading.of(over) + " over the cases", line.source(), cell));
+    }
+
+    /** The highest or lowest of a run of one cell per case; no result where one of them has none. */
+    public Cell overCases(Place place, String symbol, @Nullable Unit unit, Formula.Summary over, Run run) {
+        Scope inner = Scope.ofElement();
         inner.put(over.name(), run);
         boolean sure = run.cells().stream().allMatch(cell -> cell.sureness() == Sureness.SURE);
         Formula all = Formulas.compare(
@@ -51,10 +61,7 @@ public final class ItemLayout {
                 Comparator.EQUAL,
                 Formulas.number(Integer.toString(run.cells().size())));
         Formula formula = sure ? over : Formulas.iff(all, over, new Formula.NoResult(Value.NO_RESULT));
-        Cell cell = cells.live(strip.next(), line.symbol(), line.unit(), formula, inner);
-        scope.put(line.symbol(), cell);
-        strip.add(new Strip.Laid(
-                line.symbol(), line.label(), PlainReading.of(over) + " over the cases", line.source(), cell));
+        return cells.live(place, symbol, unit, formula, inner);
     }
 
     private void lay(Item.Line line, String shownAs, String where, Scope scope, Strip strip) {

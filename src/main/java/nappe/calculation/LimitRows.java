@@ -49,7 +49,12 @@ final class LimitRows {
             strip.add(new Strip.Laid("", limit.label() + ": left to the limit", "", "", leftCell));
             left = symbol("left");
         }
-        Cell margin = cells.live(strip.next(), "", Unit.one(), over(left, scale), inner);
+        Formula measured = over(left, scale);
+        if (limit.when() != null) {
+            // what is left to a limit that does not apply is no margin, and must not count as the tightest
+            measured = iff(limit.when(), measured, new Formula.NoResult(DOES_NOT_APPLY));
+        }
+        Cell margin = cells.live(strip.next(), "", Unit.one(), measured, inner);
         strip.add(new Strip.Laid("", limit.label() + ": margin", "", limit.source(), margin));
         Formula comparison = iff(compare(lesser, Comparator.AT_MOST, greater), word(MET), word(NOT_MET));
         Formula verdict = limit.when() == null ? comparison : iff(limit.when(), comparison, word(DOES_NOT_APPLY));

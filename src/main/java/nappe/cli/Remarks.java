@@ -2,10 +2,14 @@ package nappe.cli;
 
 import java.util.ArrayList;
 import java.util.List;
+import nappe.formula.Value;
 import nappe.station.Design;
+import nappe.unit.WorkingSystem;
 
 /** What is legal but worth a second look before a package goes out; told on the screen, and nothing is refused for it. */
 final class Remarks {
+    private static final double SAME = 1e-9;
+
     private Remarks() {}
 
     static List<String> of(Design design) {
@@ -23,11 +27,31 @@ final class Remarks {
                     + " still open");
         }
         design.cases().stream()
-                .filter(one -> one.tailwater().value() instanceof nappe.formula.Value.None)
+                .filter(one -> design.levels().isEmpty() && one.tailwater().value() instanceof Value.None)
                 .forEach(one -> remarks.add("case " + one.name() + " has no water level downstream (sheet "
                         + one.tailwater().origin().sheet() + ", "
                         + one.tailwater().origin().cell()
                         + "): whether its flow is free is not given, and no head follows from it"));
+        if (!design.levels().isEmpty()) {
+            design.cases().stream()
+                    .filter(one -> one.tailwater().value() instanceof Value.None && !isOnCurve(one, design.levels()))
+                    .forEach(one -> remarks.add("case " + one.name() + " has no water level downstream (sheet "
+                            + one.tailwater().origin().sheet() + ", "
+                            + one.tailwater().origin().cell()
+                            + "), and its flow lies beyond the ends of the tailwater curve: nothing follows from it"));
+        }
         return remarks;
+    }
+
+    private static boolean isOnCurve(Design.FlowCase one, List<Design.LevelPair> levels) {
+        double flow = size(one.flow());
+        return flow >= size(levels.get(0).flow()) * (1 - SAME)
+                && flow <= size(levels.get(levels.size() - 1).flow()) * (1 + SAME);
+    }
+
+    private static double size(Design.Typed typed) {
+        return typed.value() instanceof Value.Number number
+                ? number.value() * typed.unit().sizeIn(WorkingSystem.SI)
+                : Double.NaN;
     }
 }

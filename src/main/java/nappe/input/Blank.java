@@ -12,6 +12,7 @@ import nappe.input.BlankWriter.Chosen;
 import nappe.method.Declared;
 import nappe.method.MethodCatalogue;
 import nappe.unit.Dimension;
+import nappe.unit.Unit;
 import nappe.unit.WorkingSystem;
 import org.apache.poi.xssf.usermodel.XSSFCellStyle;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
@@ -19,6 +20,7 @@ import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 /** The sheets of one blank, in their order. */
 final class Blank {
     static final int ROWS = 24;
+    private static final int COMBINATION_ROWS = 16;
     static final String REQUIRED = "required";
     static final String OPTIONAL = "optional";
     static final String FRAMES = "Write only into the cells with a frame. ";
@@ -43,9 +45,11 @@ final class Blank {
     void write() {
         project();
         FlowsBlank flows = new FlowsBlank(system, elements, methods);
-        flows.write(sheet(Layout.FLOWS, "Flow cases", flows.widths()), styles, offers);
+        String cases = flows.write(sheet(Layout.FLOWS, "Flow cases", flows.widths()), styles, offers);
+        levels();
+        combinations(cases);
         elements.forEach(this::element);
-        demands();
+        demands(cases);
         list(
                 Layout.ASSUMPTIONS,
                 30,
@@ -178,16 +182,66 @@ final class Blank {
         }
     }
 
-    private void demands() {
-        BlankSheet sheet = sheet(Layout.DEMANDS, "Limits demanded by others", 10, 12, 14, 12, 12, 50, 50);
+    private void levels() {
+        BlankSheet sheet = sheet(Layout.LEVELS, "Tailwater curve", 12, 10, 13, 10, 60, 11);
+        sheet.lines(List.of(
+                FRAMES
+                        + "Optional. The water level downstream at some flows of the whole station, the least flow first.",
+                "A case on the sheet " + Layout.FLOWS
+                        + " whose water level is blank takes it from here, straight between two rows; beyond the first and"
+                        + " the last flow there is no result."));
+        sheet.marks(List.of(REQUIRED, REQUIRED, REQUIRED, REQUIRED, OPTIONAL, REQUIRED));
+        sheet.head(Layout.LEVEL_HEADS, true);
+        Unit flow = system.coherentUnit(Dimension.FLOW);
+        Unit level = system.coherentUnit(Dimension.LENGTH);
+        int first = sheet.rows(
+                ROWS,
+                List.of("", system == WorkingSystem.US ? "MGD" : "L/s", "", level.text(), "", ""),
+                List.of(
+                        styles.numberEntry,
+                        styles.textEntry,
+                        styles.numberEntry,
+                        styles.textEntry,
+                        styles.textEntry,
+                        styles.textEntry));
+        int last = first + ROWS - 1;
+        sheet.number(first, last, 0, Sign.NOT_NEGATIVE, "Flow", "Flow of the whole station, rising from row to row.");
+        sheet.offer(first, last, 1, offers.units(flow), false);
+        sheet.number(first, last, 2, Sign.ANY, "Water level", "Level of the receiving water at this flow.");
+        sheet.offer(first, last, 3, offers.units(level), false);
+        offers.standing(sheet, first, last, 5);
+    }
+
+    private void combinations(String cases) {
+        BlankSheet sheet = sheet(Layout.COMBINATIONS, "Combinations of flow and water level", 26, 26, 26, 10, 70);
+        sheet.lines(List.of(
+                FRAMES
+                        + "Optional. The flow of one case with the water level downstream of another, under a name of its own.",
+                "Where you state that both can occur together the limits are judged as in any case; where not, the"
+                        + " combination is shown and not judged."));
+        sheet.marks(Collections.nCopies(5, REQUIRED));
+        sheet.head(Layout.COMBINATION_HEADS, true);
+        int first = sheet.rows(COMBINATION_ROWS, Collections.nCopies(5, ""), Collections.nCopies(5, styles.textEntry));
+        int last = first + COMBINATION_ROWS - 1;
+        sheet.offer(first, last, 1, cases, false);
+        sheet.offer(first, last, 2, cases, false);
+        sheet.offer(first, last, 3, lists.range("Yes or no", Layout.YES), true);
+    }
+
+    private void demands(String cases) {
+        BlankSheet sheet = sheet(Layout.DEMANDS, "Limits demanded by others", 10, 12, 14, 12, 12, 50, 50, 26);
         sheet.lines(List.of(
                 FRAMES + "One limit a row: a result of an element, by its tag and symbol, at most or at least a value.",
-                "No limit of an authority is built in: each stands here with its citation."));
-        sheet.marks(List.of(REQUIRED, REQUIRED, REQUIRED, REQUIRED, REQUIRED, OPTIONAL, REQUIRED));
-        sheet.head(Layout.DEMAND_HEADS, true);
-        List<XSSFCellStyle> cellStyles = new ArrayList<>(Collections.nCopies(7, styles.textEntry));
+                "No limit of an authority is built in: each stands here with its citation. In case: the case or"
+                        + " combination in which alone it is judged; blank for every one."));
+        sheet.marks(List.of(REQUIRED, REQUIRED, REQUIRED, REQUIRED, REQUIRED, OPTIONAL, REQUIRED, OPTIONAL));
+        sheet.head(
+                Stream.concat(Layout.DEMAND_HEADS.stream(), Layout.DEMAND_OPTIONAL.stream())
+                        .toList(),
+                true);
+        List<XSSFCellStyle> cellStyles = new ArrayList<>(Collections.nCopies(8, styles.textEntry));
         cellStyles.set(3, styles.numberEntry);
-        int first = sheet.rows(ROWS, Collections.nCopies(7, ""), cellStyles);
+        int first = sheet.rows(ROWS, Collections.nCopies(8, ""), cellStyles);
         int last = first + ROWS - 1;
         sheet.offer(
                 first,
@@ -198,6 +252,7 @@ final class Blank {
         sheet.offer(first, last, 2, lists.range("At most or at least", Layout.SIDES), true);
         sheet.number(first, last, 3, Sign.ANY, "Value", "The value demanded.");
         sheet.offer(first, last, 4, lists.range("Units", UnitOffer.all()), false);
+        sheet.offer(first, last, 7, cases, false);
     }
 
     private void list(String name, int rows, List<String> heads, List<String> marks, String line, int... widths) {

@@ -135,6 +135,22 @@ final class BlankSheet {
         sheet.addValidationData(validation);
     }
 
+    /** Takes only whole numbers from one up. */
+    void count(int firstRow, int lastRow, int column, int most, String what, String prompt) {
+        XSSFDataValidation validation = validation(
+                helper().createNumericConstraint(
+                                ValidationType.INTEGER, OperatorType.BETWEEN, "1", Integer.toString(most)),
+                firstRow,
+                lastRow,
+                column);
+        validation.setErrorStyle(ErrorStyle.STOP);
+        validation.createErrorBox("Not a count", "Write a whole number from 1 to " + most + ", or leave it blank.");
+        validation.setShowErrorBox(true);
+        validation.createPromptBox(cut(what, LONGEST_PROMPT_TITLE), cut(prompt, LONGEST_PROMPT));
+        validation.setShowPromptBox(true);
+        sheet.addValidationData(validation);
+    }
+
     /** Protection without a password, print set-up. */
     void finish(boolean letter) {
         sheet.enableLocking();

@@ -8,6 +8,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Stream;
 import nappe.formula.Sign;
 import nappe.input.BlankWriter.Chosen;
 import nappe.method.Declared;
@@ -21,6 +22,9 @@ import org.apache.poi.xssf.usermodel.XSSFCellStyle;
 final class FlowsBlank {
     /** @param filled what stands in each row from the start */
     private record Column(String head, int width, String mark, boolean number, String filled) {}
+
+    private static final List<String> FIXED = Stream.concat(Layout.FLOW_HEADS.stream(), Layout.FLOW_OPTIONAL.stream())
+            .toList();
 
     private final WorkingSystem system;
     private final Unit level;
@@ -37,7 +41,7 @@ final class FlowsBlank {
                 }
             }
         }
-        Layout.FLOW_HEADS.forEach(head -> columns.add(column(head)));
+        FIXED.forEach(head -> columns.add(column(head)));
         perCase.forEach((key, declared) -> {
             String mark = declared.optional() ? OPTIONAL : REQUIRED;
             boolean quantity = declared.words().isEmpty();
@@ -54,6 +58,7 @@ final class FlowsBlank {
             case "Flow unit" -> new Column(head, 10, REQUIRED, false, system == WorkingSystem.US ? "MGD" : "L/s");
             case "Water level downstream" -> new Column(head, 13, OPTIONAL, true, "");
             case "Water level unit" -> new Column(head, 10, OPTIONAL, false, level.text());
+            case Layout.UNITS -> new Column(head, 10, OPTIONAL, true, "");
             case "Source or basis" -> new Column(head, 36, OPTIONAL, false, "");
             case "Standing" -> new Column(head, 11, REQUIRED, false, "");
             default -> new Column(head, 14, OPTIONAL, false, "");
@@ -64,10 +69,14 @@ final class FlowsBlank {
         return columns.stream().mapToInt(Column::width).toArray();
     }
 
-    void write(BlankSheet sheet, BlankStyles styles, Offers offers) {
+    /** Writes the sheet, and returns the range of the names of the cases. */
+    String write(BlankSheet sheet, BlankStyles styles, Offers offers) {
         List<String> lines = new ArrayList<>(List.of(
-                FRAMES + "One case a row; a case is one flow with one water level downstream, under a name of its own.",
-                "The same flow may stand in several cases. A row with nothing but units in it is passed over."));
+                FRAMES
+                        + "One case a row: one flow of the whole station with one water level downstream, under a name of"
+                        + " its own; the same flow may stand in several.",
+                "Units in service, blank: one. Water level, blank: from the sheet " + Layout.LEVELS
+                        + ", if filled in. A row with nothing but units of measure in it is passed over."));
         perCase.forEach((key, declared) -> lines.add(key + ": " + declared.label() + ", for each case."));
         sheet.lines(lines);
         sheet.marks(columns.stream().map(Column::mark).toList());
@@ -76,24 +85,34 @@ final class FlowsBlank {
                 .map(c -> c.number() ? styles.numberEntry : styles.textEntry)
                 .toList();
         int first = sheet.rows(Blank.ROWS, columns.stream().map(Column::filled).toList(), cellStyles);
-        offer(sheet, offers, first, first + Blank.ROWS - 1);
+        int last = first + Blank.ROWS - 1;
+        offer(sheet, offers, first, last);
+        return Layout.FLOWS + "!" + DropDowns.fixed(RawCell.address(first, 0)) + ":"
+                + DropDowns.fixed(RawCell.address(last, 0));
     }
 
     private void offer(BlankSheet sheet, Offers offers, int first, int last) {
-        int flow = Layout.FLOW_HEADS.indexOf("Flow");
+        int flow = FIXED.indexOf("Flow");
         sheet.number(first, last, flow, Sign.POSITIVE, "Flow", "Flow of the case, greater than zero.");
         sheet.offer(first, last, flow + 1, offers.units(system.coherentUnit(Dimension.FLOW)), false);
-        int water = Layout.FLOW_HEADS.indexOf("Water level downstream");
+        int water = FIXED.indexOf("Water level downstream");
         sheet.number(
                 first,
                 last,
                 water,
                 Sign.ANY,
                 "Water level downstream",
-                "Level of the receiving water; blank where there is none.");
+                "Level of the receiving water; blank where there is none, or where it comes from the tailwater curve.");
         sheet.offer(first, last, water + 1, offers.units(level), false);
-        offers.standing(sheet, first, last, Layout.FLOW_HEADS.indexOf("Standing"));
-        int column = Layout.FLOW_HEADS.size();
+        sheet.count(
+                first,
+                last,
+                FIXED.indexOf(Layout.UNITS),
+                FlowsSheet.MOST_UNITS,
+                Layout.UNITS,
+                "Like devices side by side that share the flow of the case; blank for one.");
+        offers.standing(sheet, first, last, FIXED.indexOf("Standing"));
+        int column = FIXED.size();
         for (Declared declared : perCase.values()) {
             offers.entry(sheet, first, last, column, declared);
             if (declared.words().isEmpty()) {

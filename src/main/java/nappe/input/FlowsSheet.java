@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.stream.Stream;
 import nappe.formula.Sign;
+import nappe.formula.Value;
 import nappe.input.ProjectSheet.Named;
 import nappe.input.TypedReader.Backing;
 import nappe.method.Declared;
@@ -19,12 +20,14 @@ import nappe.unit.WorkingSystem;
 /** Reads the flow cases, with what single elements ask for in each of them. */
 final class FlowsSheet {
     static final int LONGEST_CASE = 40;
+    static final int MOST_UNITS = 50;
     private static final List<String> PREFILLED = List.of("Flow unit", "Water level unit");
 
     private final RawSheet sheet;
     private final Entries entries;
     private final Faults faults;
     private final TypedReader typedReader;
+    private final Quantities quantities;
     private final Unit flow;
     private final Unit level;
     private final Map<String, Declared> perCase = new LinkedHashMap<>();
@@ -34,6 +37,7 @@ final class FlowsSheet {
         this.entries = entries;
         this.faults = faults;
         this.typedReader = new TypedReader(entries);
+        this.quantities = new Quantities(entries);
         this.flow = system.coherentUnit(Dimension.FLOW);
         this.level = system.coherentUnit(Dimension.LENGTH);
     }
@@ -47,7 +51,7 @@ final class FlowsSheet {
             }
         }
         List<FlowCase> cases = new ArrayList<>();
-        Table table = Table.find(sheet, heads(perCase.keySet().stream()), faults);
+        Table table = Table.find(sheet, heads(perCase.keySet().stream()), Layout.FLOW_OPTIONAL, faults);
         if (table == null) {
             return cases;
         }
@@ -119,6 +123,7 @@ final class FlowsSheet {
                 entries.text(row.field("Design year"), "the design year", Entries.LONGEST_NAME),
                 typedReader.quantity(
                         "the flow", flow, Sign.POSITIVE, false, row.field("Flow"), row.field("Flow unit"), backing),
+                units(row.field(Layout.UNITS), backing),
                 typedReader.quantity(
                         "the water level downstream",
                         level,
@@ -129,6 +134,24 @@ final class FlowsSheet {
                         backing),
                 entries.text(row.field("Return period of the level"), "the return period", Entries.LONGEST_NAME),
                 typed);
+    }
+
+    /** How many like units share the flow; blank for one. */
+    private Typed units(Field field, Backing backing) {
+        String what = "the number of units in service";
+        Value value = quantities.number(field, what, Sign.ANY);
+        if (value instanceof Value.Number number && !isCount(number.value())) {
+            entries.fault(
+                    field,
+                    "count-expected",
+                    Plain.number(number.value()) + " can't be " + what + "; write a whole number from 1 to "
+                            + MOST_UNITS + ", or leave it blank for one");
+        }
+        return new Typed(value, Unit.one(), backing.source(), backing.standing(), field.origin());
+    }
+
+    private static boolean isCount(double number) {
+        return number == Math.rint(number) && number >= 1 && number <= MOST_UNITS;
     }
 
     private static Declared named(String key, Declared declared) {

@@ -47,15 +47,20 @@ public final class InputReader {
         List<FlowCase> cases = cases(named, project == null ? WorkingSystem.SI : project.system());
         List<Element> elements = elements(named);
         OtherSheets others = new OtherSheets(entries, faults);
-        List<Design.Demand> demands = others.demands(sheet(Layout.DEMANDS), tagsKnown ? named : List.of());
+        CaseNames names = new CaseNames(cases, entries);
+        List<Design.LevelPair> levels = levels(project == null ? WorkingSystem.SI : project.system());
+        List<Design.Combination> combinations = combinations(names);
+        List<Design.Demand> demands = others.demands(sheet(Layout.DEMANDS), tagsKnown ? named : List.of(), names);
         List<Design.Assumption> assumptions = others.assumptions(sheet(Layout.ASSUMPTIONS));
         List<String> references = others.references(sheet(Layout.REFERENCES));
         List<Design.Requirement> requirements = others.requirements(sheet(Layout.REQUIREMENTS));
         List<Design.RevisionNote> revisions = others.revisions(sheet(Layout.REVISIONS));
         if (reader != null && project != null) {
-            List<String> names = cases.stream().map(FlowCase::name).toList();
-            project = withWorkedCase(project, names.isEmpty() ? "" : reader.workedCase(project.workedCase(), names));
+            List<String> worked = cases.stream().map(FlowCase::name).toList();
+            project = withWorkedCase(project, worked.isEmpty() ? "" : reader.workedCase(project.workedCase(), worked));
         }
+        refuseStray(Layout.LEVELS, Layout.LEVEL_HEADS);
+        refuseStray(Layout.COMBINATIONS, Layout.COMBINATION_HEADS);
         if (tagsKnown) {
             refuseStraySheets(named);
         }
@@ -63,7 +68,27 @@ public final class InputReader {
         if (project == null) {
             throw new IllegalStateException("no project and no fault");
         }
-        return new Design(project, elements, cases, demands, assumptions, references, requirements, revisions);
+        return new Design(
+                project,
+                elements,
+                cases,
+                demands,
+                assumptions,
+                references,
+                requirements,
+                revisions,
+                combinations,
+                levels);
+    }
+
+    private List<Design.LevelPair> levels(WorkingSystem system) {
+        RawSheet sheet = optionalSheet(Layout.LEVELS);
+        return sheet == null ? List.of() : new LevelsSheet(sheet, system, entries, faults).pairs();
+    }
+
+    private List<Design.Combination> combinations(CaseNames names) {
+        RawSheet sheet = optionalSheet(Layout.COMBINATIONS);
+        return sheet == null ? List.of() : new CombinationsSheet(sheet, entries, faults).combinations(names);
     }
 
     private List<FlowCase> cases(List<Named> named, WorkingSystem system) {
@@ -91,10 +116,32 @@ public final class InputReader {
                     "sheet-missing",
                     "there is no sheet of this name; it was removed or renamed, name it " + name
                             + " again or start from a new blank");
-        } else if (sheet.isHidden()) {
+            return null;
+        }
+        return optionalSheet(name);
+    }
+
+    /** A sheet that may be missing, as in workbooks of before there was one. */
+    private @Nullable RawSheet optionalSheet(String name) {
+        RawSheet sheet = workbook.sheet(name);
+        if (sheet != null && sheet.isHidden()) {
             faults.add(sheet.name(), null, "sheet-hidden", "the sheet is hidden; show it and check what stands there");
         }
         return sheet;
+    }
+
+    /** A sheet that may be missing and was renamed: its entries would be lost in silence. */
+    private void refuseStray(String name, List<String> heads) {
+        for (RawSheet sheet : workbook.sheets()) {
+            if (!sheet.name().equalsIgnoreCase(name) && Table.looksLike(sheet, heads)) {
+                faults.add(
+                        sheet.name(),
+                        null,
+                        "sheet-stray",
+                        "the sheet has the columns of the sheet " + name + " under another name; name it " + name
+                                + ", or remove it");
+            }
+        }
     }
 
     /** A sheet that looks like an element's but is none: its entries would be lost in silence. */

@@ -10,6 +10,8 @@ import nappe.unit.WorkingSystem;
 final class Layout {
     static final String PROJECT = "Project";
     static final String FLOWS = "Flows";
+    static final String LEVELS = "Tailwater curve";
+    static final String COMBINATIONS = "Combinations";
     static final String DEMANDS = "Demands";
     static final String ASSUMPTIONS = "Assumptions";
     static final String REFERENCES = "References";
@@ -81,8 +83,23 @@ final class Layout {
             "Return period of the level",
             "Source or basis",
             "Standing");
+
+    static final String UNITS = "Units in service";
+
+    /** Columns of the sheet Flows that may be missing, as in workbooks of before there were any. */
+    static final List<String> FLOW_OPTIONAL = List.of(UNITS);
+
+    static final List<String> LEVEL_HEADS =
+            List.of("Flow", "Flow unit", "Water level", "Water level unit", "Source or basis", "Standing");
+    static final List<String> COMBINATION_HEADS =
+            List.of("Combination", "Flow of case", "Level of case", "Can coincide", "Basis");
     static final List<String> DEMAND_HEADS =
             List.of("Element", "Symbol", "At most or at least", "Value", "Unit", "What is demanded", "Citation");
+    static final String IN_CASE = "In case";
+
+    /** Columns of the sheet Demands that may be missing. */
+    static final List<String> DEMAND_OPTIONAL = List.of(IN_CASE);
+
     static final List<String> ASSUMPTION_HEADS = List.of("Assumption", "Basis", "Owner", "Open or closed");
     static final List<String> REFERENCE_HEADS = List.of("Reference");
     static final List<String> REQUIREMENT_HEADS = List.of("Requirement", "Citation", "Answered where");
@@ -136,6 +153,7 @@ final class Layout {
             "CONSTANT",
             "UNITS",
             "LEVELS",
+            "YEARS",
             "STATION",
             "ENTRIES",
             "REGISTER",

@@ -30,13 +30,15 @@ final class OtherSheets {
      * The demands.
      *
      * @param elements empty where faults leave open which tags there are
+     * @param columns the cases and combinations that a demand may be confined to
      */
-    List<Demand> demands(@Nullable RawSheet sheet, List<Named> elements) {
+    List<Demand> demands(@Nullable RawSheet sheet, List<Named> elements, CaseNames columns) {
         List<String> tags = elements.stream().map(Named::tag).toList();
-        return list(sheet, Layout.DEMAND_HEADS, List.of("Unit"), row -> demand(row, tags));
+        return list(
+                sheet, Layout.DEMAND_HEADS, Layout.DEMAND_OPTIONAL, List.of("Unit"), row -> demand(row, tags, columns));
     }
 
-    private Demand demand(Table.Row row, List<String> tags) {
+    private Demand demand(Table.Row row, List<String> tags, CaseNames columns) {
         String tag = entries.requiredText(row.field("Element"), "the tag of the element", Entries.LONGEST_NAME);
         if (!tag.isEmpty() && !tags.isEmpty() && !tags.contains(tag)) {
             entries.fault(
@@ -67,7 +69,8 @@ final class OtherSheets {
                 what,
                 citation,
                 row.field("Symbol").origin(),
-                row.field("Unit").origin());
+                row.field("Unit").origin(),
+                columns.judged(row.field(Layout.IN_CASE)));
     }
 
     /** A unit of any kind: what a demanded result measures is known only where it is calculated. */
@@ -131,8 +134,17 @@ final class OtherSheets {
 
     private <T> List<T> list(
             @Nullable RawSheet sheet, List<String> heads, List<String> prefilled, Function<Table.Row, T> read) {
+        return list(sheet, heads, List.of(), prefilled, read);
+    }
+
+    private <T> List<T> list(
+            @Nullable RawSheet sheet,
+            List<String> heads,
+            List<String> optional,
+            List<String> prefilled,
+            Function<Table.Row, T> read) {
         List<T> list = new ArrayList<>();
-        Table table = sheet == null ? null : Table.find(sheet, heads, faults);
+        Table table = sheet == null ? null : Table.find(sheet, heads, optional, faults);
         if (table != null) {
             for (Table.Row row : table.rows(prefilled, faults)) {
                 list.add(read.apply(row));

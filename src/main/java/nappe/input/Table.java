@@ -2,6 +2,7 @@ package nappe.input;
 
 import java.util.ArrayList;
 import java.util.BitSet;
+import java.util.Collection;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
@@ -12,6 +13,7 @@ import java.util.Set;
 import java.util.TreeMap;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 
 /** A table of one sheet: a row of head words and what stands in the rows below it. */
@@ -26,6 +28,9 @@ final class Table {
 
         Field field(String head) {
             Integer column = columns.get(head);
+            if (column == null && optional.contains(head)) {
+                return new Field(sheet.name(), RawCell.address(index, 0), null, "");
+            }
             if (column == null) {
                 throw new IllegalArgumentException("no column " + head);
             }
@@ -43,17 +48,28 @@ final class Table {
     private final RawSheet sheet;
     private final int headRow;
     private final Map<String, Integer> columns;
+    private final List<String> optional;
     private final int end;
 
-    private Table(RawSheet sheet, int headRow, Map<String, Integer> columns, int end) {
+    private Table(RawSheet sheet, int headRow, Map<String, Integer> columns, List<String> optional, int end) {
         this.sheet = sheet;
         this.headRow = headRow;
         this.columns = columns;
+        this.optional = optional;
         this.end = end;
     }
 
     /** The table whose head row has all the words; where it is missing or incomplete that is a fault, and null. */
     static @Nullable Table find(RawSheet sheet, List<String> heads, Faults faults) {
+        return find(sheet, heads, List.of(), faults);
+    }
+
+    /**
+     * The same, with words that may be missing.
+     *
+     * @param optional the field of a missing column is blank
+     */
+    static @Nullable Table find(RawSheet sheet, List<String> heads, List<String> optional, Faults faults) {
         int best = 0;
         int headRow = -1;
         for (Map.Entry<Integer, NavigableMap<Integer, RawCell>> row :
@@ -73,17 +89,22 @@ final class Table {
                             + " above the entries");
             return null;
         }
-        return at(sheet, headRow, heads, faults);
+        return at(sheet, headRow, heads, optional, faults);
     }
 
-    private static @Nullable Table at(RawSheet sheet, int headRow, List<String> heads, Faults faults) {
+    private static @Nullable Table at(
+            RawSheet sheet, int headRow, List<String> heads, List<String> optional, Faults faults) {
         Map<String, Integer> columns = new LinkedHashMap<>();
+        Collection<RawCell> row =
+                sheet.rows().getOrDefault(headRow, new TreeMap<>()).values();
         boolean whole = true;
-        for (String head : heads) {
-            List<RawCell> cells = sheet.rows().getOrDefault(headRow, new TreeMap<>()).values().stream()
-                    .filter(c -> word(c).equals(key(head)))
-                    .toList();
-            if (cells.isEmpty()) {
+        List<String> all = Stream.concat(heads.stream(), optional.stream()).toList();
+        for (String head : all) {
+            List<RawCell> cells =
+                    row.stream().filter(c -> word(c).equals(key(head))).toList();
+            if (cells.isEmpty() && optional.contains(head)) {
+                whole &= !isMisspelt(sheet, row, head, all, faults);
+            } else if (cells.isEmpty()) {
                 faults.add(
                         sheet.name(),
                         null,
@@ -102,7 +123,24 @@ final class Table {
                 columns.put(head, cells.get(0).column());
             }
         }
-        return whole ? new Table(sheet, headRow, columns, Integer.MAX_VALUE) : null;
+        return whole ? new Table(sheet, headRow, columns, optional, Integer.MAX_VALUE) : null;
+    }
+
+    /** What stands under a misspelt head of a column that may be missing would be lost in silence. */
+    private static boolean isMisspelt(
+            RawSheet sheet, Collection<RawCell> row, String head, List<String> all, Faults faults) {
+        for (RawCell cell : row) {
+            boolean known = all.stream().anyMatch(other -> word(cell).equals(key(other)));
+            if (!known && !word(cell).isEmpty() && Near.to(cell.text(), List.of(head)) != null) {
+                faults.add(
+                        sheet.name(),
+                        cell.address(),
+                        "head-word-unknown",
+                        Shown.quoted(cell.text()) + " is not a column of this sheet; did you mean " + head + "?");
+                return true;
+            }
+        }
+        return false;
     }
 
     /** Whether a sheet has a table with these head words. */
@@ -117,7 +155,7 @@ final class Table {
 
     /** The same table, ending above the head row of another. */
     Table above(@Nullable Table other) {
-        return other == null ? this : new Table(sheet, headRow, columns, other.headRow);
+        return other == null ? this : new Table(sheet, headRow, columns, optional, other.headRow);
     }
 
     String sheet() {

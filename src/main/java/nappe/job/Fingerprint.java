@@ -75,6 +75,7 @@ public final class Fingerprint {
         for (Design.FlowCase one : design.cases()) {
             add("case", joined(one.name(), one.period(), one.year(), one.tailwaterReturn()));
             add("flow", shown(one.flow()));
+            add("units", shown(one.units()));
             add("tailwater", shown(one.tailwater()));
             add(one.typed());
         }
@@ -87,7 +88,13 @@ public final class Fingerprint {
                                 Boolean.toString(d.atMost()),
                                 shown(d.value()),
                                 d.description(),
-                                d.citation())));
+                                d.citation(),
+                                d.inCase())));
+        design.combinations()
+                .forEach(c -> add(
+                        "combination",
+                        joined(c.name(), c.flowOf(), c.levelOf(), Boolean.toString(c.canCoincide()), c.basis())));
+        design.levels().forEach(pair -> add("level", joined(shown(pair.flow()), shown(pair.level()))));
         design.assumptions().forEach(a -> add("assumption", a.toString()));
         design.references().forEach(r -> add("reference", r));
         design.requirements().forEach(r -> add("requirement", r.toString()));

@@ -20,6 +20,7 @@ import nappe.results.Furniture;
 import nappe.results.Results;
 import nappe.solve.Evaluation;
 import nappe.station.Design;
+import nappe.station.FoundFlows;
 import nappe.station.PackageLayout;
 import nappe.station.SoftwareStatement;
 import nappe.unit.WorkingSystem;
@@ -49,14 +50,29 @@ public final class Job {
         this.version = version;
     }
 
-    /** The results of a design, with the rating table of each element by its tag. */
-    public record Done(Results results, Map<String, Block.Table> ratings) {}
+    /**
+     * The results of a design.
+     *
+     * @param ratings the rating table of each element, by its tag
+     * @param found the flows at which limits are first reached, with the entries as issued
+     */
+    public record Done(Results results, Map<String, Block.Table> ratings, FoundFlows found) {}
 
     /**
      * @param checks check values to run for the methods used; their outcome is part of the package
      * @throws nappe.station.StationException where entries do not fit the methods
      */
     public Done run(Design design, List<CheckRow> checks) {
+        return run(design, checks, FlowSearch.of(design, methods::sheet));
+    }
+
+    /**
+     * The same with flows found before, which are not looked for anew: what an issued workbook shows once an entry of it
+     * is changed.
+     *
+     * @throws nappe.station.StationException where entries do not fit the methods
+     */
+    public Done run(Design design, List<CheckRow> checks, FoundFlows found) {
         Map<String, MethodSheet> used = new LinkedHashMap<>();
         design.elements().forEach(e -> used.computeIfAbsent(e.method(), methods::sheet));
         SoftwareStatement software = statement(used, checks);
@@ -64,7 +80,9 @@ public final class Job {
                 design,
                 methods::sheet,
                 method -> drawings.of(method).map(FigureSheet::printed).orElse(List.of()),
-                software);
+                found,
+                software,
+                new SizeReruns(design, methods::sheet).run());
         Map<Cell, Value> values = Evaluation.of(layout.cells());
         return new Done(
                 new Results(
@@ -73,13 +91,14 @@ public final class Job {
                         layout.cells(),
                         values,
                         figures(design, layout, values)),
-                layout.ratings());
+                layout.ratings(),
+                found);
     }
 
     private Map<String, Figure> figures(Design design, PackageLayout.Layout layout, Map<Cell, Value> values) {
         Map<String, Figure> figures = new LinkedHashMap<>();
         WorkingSystem system = design.project().system();
-        List<String> names = design.cases().stream().map(Design.FlowCase::name).toList();
+        List<String> names = layout.caseNames();
         layout.sheets().stream()
                 .filter(sheet -> sheet.blocks().stream()
                         .anyMatch(block ->

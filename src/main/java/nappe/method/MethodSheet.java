@@ -14,6 +14,7 @@ import org.jspecify.annotations.Nullable;
  * @param about paragraphs on the method and the limits of its use
  * @param cautions printed on the sheets of the device
  * @param items in the order of the text
+ * @param screen what is compared over the words of a choice, or null
  * @param gives role ("water level") to the symbol offered to the neighbour upstream
  * @param reach for each symbol, all the symbols it rests on, less those that are bound on the way
  * @param text the text itself, with all it includes, for the fingerprint
@@ -28,6 +29,7 @@ public record MethodSheet(
         List<Item> items,
         List<Limit> limits,
         List<Rating> ratings,
+        @Nullable Screen screen,
         Map<String, String> gives,
         Map<String, CitedTable> tables,
         Map<String, Set<String>> reach,

@@ -44,6 +44,9 @@ final class SheetDraft {
 
     boolean openTableIsBroken;
 
+    @Nullable
+    Screen screen;
+
     private final Map<String, DimensionReading.Outcome> outcomes = new LinkedHashMap<>();
     private final Set<String> broken = new HashSet<>();
     private final Set<String> brokenTables = new HashSet<>();
@@ -76,7 +79,7 @@ final class SheetDraft {
     }
 
     /** Whether a symbol rests on what is typed once per case: what sums it up over the cases does not. */
-    private boolean isPerCase(String symbol) {
+    boolean isPerCase(String symbol) {
         return reach.getOrDefault(symbol, Set.of(symbol)).stream().anyMatch(this::isTypedPerCase);
     }
 
@@ -151,6 +154,7 @@ final class SheetDraft {
                 List.copyOf(items),
                 List.copyOf(limits),
                 List.copyOf(ratings),
+                screen,
                 Map.copyOf(gives),
                 new LinkedHashMap<>(tables),
                 new LinkedHashMap<>(reach),

@@ -70,6 +70,7 @@ final class StatementReader {
             case "at" -> formulas.at();
             case "limit" -> formulas.limit();
             case "rating" -> formulas.rating();
+            case "screen" -> new ScreenStatement(parts).read();
             case "give" -> give();
             default ->
                 throw new FormulaException(

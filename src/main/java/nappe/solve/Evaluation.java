@@ -1,8 +1,11 @@
 package nappe.solve;
 
+import java.util.ArrayList;
+import java.util.Collections;
 import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import nappe.calculation.Cell;
 import nappe.calculation.Reference;
 import nappe.calculation.Run;
@@ -19,17 +22,63 @@ import nappe.unit.Unit;
  */
 public final class Evaluation {
     private final Map<Cell, Value> values = new IdentityHashMap<>();
+    private final Map<Cell, Value> before;
 
-    private Evaluation() {}
+    private Evaluation(Map<Cell, Value> before) {
+        this.before = before;
+    }
 
     /**
      * @param cells each after all that it refers to
      * @return the value of each cell, by identity
      */
     public static Map<Cell, Value> of(List<Cell> cells) {
-        Evaluation evaluation = new Evaluation();
+        return again(Map.of(), Map.of(), cells);
+    }
+
+    /**
+     * The same as if other values had been typed into some cells.
+     *
+     * @param typedAnew what stands in these typed cells instead; a number where a number was, a word where a word was
+     */
+    public static Map<Cell, Value> of(List<Cell> cells, Map<Cell, Value> typedAnew) {
+        return again(
+                Map.of(),
+                typedAnew,
+                cells.stream().filter(cell -> !typedAnew.containsKey(cell)).toList());
+    }
+
+    /**
+     * Evaluates cells once more, where some others hold other values than before.
+     *
+     * @param before the values of all cells that are neither changed nor evaluated
+     * @param changed what some cells hold now
+     * @param cells those that rest on the changed ones, each after all that it refers to
+     * @return the value of each changed and each evaluated cell, by identity
+     */
+    public static Map<Cell, Value> again(Map<Cell, Value> before, Map<Cell, Value> changed, List<Cell> cells) {
+        Evaluation evaluation = new Evaluation(before);
+        evaluation.values.putAll(changed);
         cells.forEach(cell -> evaluation.values.put(cell, evaluation.value(cell)));
         return evaluation.values;
+    }
+
+    /** Of the cells, those that rest on one, directly or through others, in the same order. */
+    public static List<Cell> restingOn(Cell one, List<Cell> cells) {
+        Set<Cell> moved = Collections.newSetFromMap(new IdentityHashMap<>());
+        moved.add(one);
+        List<Cell> resting = new ArrayList<>();
+        for (Cell cell : cells) {
+            boolean rests = cell.references().values().stream()
+                    .anyMatch(reference -> reference instanceof Run run
+                            ? run.cells().stream().anyMatch(moved::contains)
+                            : reference instanceof Cell other && moved.contains(other));
+            if (rests) {
+                moved.add(cell);
+                resting.add(cell);
+            }
+        }
+        return resting;
     }
 
     private Value value(Cell cell) {
@@ -50,6 +99,9 @@ public final class Evaluation {
 
     private Value known(Cell cell) {
         Value value = values.get(cell);
+        if (value == null) {
+            value = before.get(cell);
+        }
         if (value == null) {
             throw new IllegalStateException(cell + " is referred to before it is evaluated");
         }

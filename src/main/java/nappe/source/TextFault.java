@@ -15,6 +15,9 @@ package nappe.source;
  * @param text the line as written
  */
 public record TextFault(String file, int line, int column, String message, String code, String text) {
+    /** Of a line that is longer than a screen only the part around the fault is shown. */
+    private static final int LONG = 140;
+
     /** A fault of a whole file or folder. */
     public static TextFault ofFile(String file, String message, String code) {
         return new TextFault(file, 0, 0, message, code, "");
@@ -26,7 +29,9 @@ public record TextFault(String file, int line, int column, String message, Strin
         if (line == 0) {
             return file + ": " + said;
         }
-        return file + ":" + line + ":" + column + ": " + said + "\n    " + text.replaceAll("\\p{Cntrl}", "?") + "\n    "
-                + " ".repeat(Math.max(0, column - 1)) + "^";
+        int from = column > LONG ? column - LONG / 2 : 0;
+        String near = text.substring(Math.min(from, text.length()), Math.min(text.length(), from + 2 * LONG));
+        return file + ":" + line + ":" + column + ": " + said + "\n    " + near.replaceAll("\\p{Cntrl}", "?") + "\n    "
+                + " ".repeat(Math.max(0, column - 1 - from)) + "^";
     }
 }

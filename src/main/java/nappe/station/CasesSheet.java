@@ -37,9 +37,11 @@ final class CasesSheet {
     private final List<Cell> names = new ArrayList<>();
     private final List<Cell> judgedNames = new ArrayList<>();
     private final List<Cell> flows = new ArrayList<>();
+    private final List<Cell> reported = new ArrayList<>();
     private final List<Cell> units = new ArrayList<>();
     private final List<Cell> flowsThroughOne = new ArrayList<>();
     private final List<Cell> levels = new ArrayList<>();
+    private @Nullable LevelCurve curve;
 
     CasesSheet(Cells cells, SheetDraft sheet, Design design) {
         this.cells = cells;
@@ -52,7 +54,7 @@ final class CasesSheet {
                 .toList();
     }
 
-    /** The columns: the cases as typed, the combinations that can coincide, and those that cannot. */
+    /** The columns laid here: the cases as typed, the combinations that can coincide, and those that cannot. */
     CaseColumns columns() {
         List<String> all = Stream.concat(
                         cases.stream().map(Design.FlowCase::name),
@@ -83,17 +85,66 @@ final class CasesSheet {
         return levels.get(i);
     }
 
+    /** Adds a column after those of the cases and combinations. */
+    void add(Cell name, Cell flow, Cell inService, Cell throughOne, Cell level) {
+        names.add(name);
+        flows.add(flow);
+        units.add(inService);
+        flowsThroughOne.add(throughOne);
+        levels.add(level);
+    }
+
+    /** The tailwater curve, where there is one. */
+    LevelCurve curve() {
+        return java.util.Objects.requireNonNull(curve);
+    }
+
+    /** The cells with the names of all columns. */
+    List<Cell> names() {
+        return List.copyOf(names);
+    }
+
+    /** The flows in the working unit, in the order of the columns. */
+    List<Cell> flows() {
+        return List.copyOf(flows);
+    }
+
+    /** The flows of the cases as typed in the reporting unit. */
+    List<Cell> reported() {
+        return List.copyOf(reported);
+    }
+
+    /** The units in service, in the order of the columns. */
+    List<Cell> units() {
+        return List.copyOf(units);
+    }
+
+    /** The flows through one unit, in the order of the columns. */
+    List<Cell> flowsThroughOne() {
+        return List.copyOf(flowsThroughOne);
+    }
+
+    /** The water levels downstream that rule, in the order of the columns. */
+    List<Cell> levels() {
+        return List.copyOf(levels);
+    }
+
     /** The names of the judged columns. */
     Run judgedNames() {
         return new Run(judgedNames.subList(0, columns().judged()));
     }
 
-    void lay() {
+    /** @param isShared whether an element of the station takes the flow through one of the units in service */
+    void lay(boolean isShared) {
         Unit flowReport = design.project().flowUnit();
         String datum = design.project().datum();
-        sheet.note("Elevations refer to " + datum
-                + ". Flows and water levels are as supplied; the governing combination is for"
-                + " the engineer to confirm.");
+        sheet.note(
+                "Elevations refer to " + datum
+                        + ". Flows and water levels are as supplied; the governing combination is for"
+                        + " the engineer to confirm."
+                        + (isShared
+                                ? ""
+                                : " No element here shares the flow among units: each takes the flow through all of the station."));
         TableDraft flowTable = sheet.table(
                 "Flows",
                 List.of(
@@ -128,6 +179,13 @@ final class CasesSheet {
             level(levelTable, one);
         }
         sheet.gap();
+        if (!design.levels().isEmpty()) {
+            LevelCurve laid = new LevelCurve(cells, sheet, design.levels());
+            curve = laid;
+            List<Cell> used = laid.lay(names, flows, levels);
+            levels.clear();
+            levels.addAll(used);
+        }
         if (!combinations.isEmpty()) {
             combinations();
         }
@@ -158,7 +216,8 @@ final class CasesSheet {
         return cells.typed(Cell.Kind.ENTRY, place, "N", Unit.one(), count, Sign.POSITIVE);
     }
 
-    private Cell throughOne(Place place, Cell flow, Cell inService) {
+    /** The flow through one of the units in service. */
+    Cell throughOne(Place place, Cell flow, Cell inService) {
         Scope scope = Scope.ofElement();
         scope.put("Q", flow);
         scope.put("N", inService);
@@ -184,6 +243,7 @@ final class CasesSheet {
         Cell working = cells.factors().toWorking(table.place(5), "Q", flow);
         Cell report = cells.factors().toReport(table.place(6), "Q", working, flowReport);
         flows.add(working);
+        reported.add(report);
         Cell inService = inService(table.place(7), one.units());
         units.add(inService);
         flowsThroughOne.add(throughOne(table.place(8), working, inService));
@@ -203,7 +263,9 @@ final class CasesSheet {
 
     private void level(TableDraft table, Design.FlowCase one) {
         Design.Typed typed = one.tailwater();
-        Cell level = cells.typed(Cell.Kind.ENTRY, table.place(3), "z", typed.unit(), typed.value(), Sign.ANY);
+        Cell level = design.levels().isEmpty()
+                ? cells.typed(Cell.Kind.ENTRY, table.place(3), "z", typed.unit(), typed.value(), Sign.ANY)
+                : cells.optional(table.place(3), "z", typed.unit(), typed.value(), Sign.ANY);
         Cell working = cells.factors().toWorking(table.place(5), "z", level);
         levels.add(working);
         table.add(List.of(
@@ -314,7 +376,8 @@ final class CasesSheet {
         throw new IllegalArgumentException("no case " + name);
     }
 
-    private Cell same(Place place, Cell other) {
+    /** A cell that repeats another. */
+    Cell same(Place place, Cell other) {
         Scope scope = Scope.ofElement();
         scope.put("x", other);
         return cells.raw(place, other.symbol(), other.unit(), Formulas.symbol("x"), scope, null, false);

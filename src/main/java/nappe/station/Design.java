@@ -132,7 +132,12 @@ public record Design(
     /** A pair of the table of levels downstream: at this flow of all the station the water stands so high. */
     public record LevelPair(Typed flow, Typed level) {}
 
-    /** A limit demanded by an authority or owner: a result of an element at most or at least a value, with citation and cells. */
+    /**
+     * A limit demanded by an authority or owner: a result of an element at most or at least a value, with citation and
+     * cells.
+     *
+     * @param inCase name of the case or combination in which alone it is judged; empty for every one
+     */
     public record Demand(
             String tag,
             String symbol,
@@ -141,10 +146,16 @@ public record Design(
             String description,
             String citation,
             Origin symbolAt,
-            Origin unitAt) {
-        /** A demand whose parts all stand where its value stands. */
+            Origin unitAt,
+            String inCase) {
+        /** What is demanded, with the case in which alone it is judged. */
+        public String label() {
+            return inCase.isEmpty() ? description : description + " (in case " + inCase + ")";
+        }
+
+        /** A demand in every case, whose parts all stand where its value stands. */
         public Demand(String tag, String symbol, boolean atMost, Typed value, String description, String citation) {
-            this(tag, symbol, atMost, value, description, citation, value.origin(), value.origin());
+            this(tag, symbol, atMost, value, description, citation, value.origin(), value.origin(), "");
         }
     }
 
@@ -155,6 +166,21 @@ public record Design(
     public record Requirement(String text, String citation, String answer) {}
 
     public record RevisionNote(String revision, String date, String what) {}
+
+    /** The same with other elements in their places. */
+    public Design withElements(List<Element> others) {
+        return new Design(
+                project,
+                others,
+                cases,
+                demands,
+                assumptions,
+                references,
+                requirements,
+                revisions,
+                combinations,
+                levels);
+    }
 
     /** The element with the tag, or null. */
     public @Nullable Element element(String tag) {

@@ -109,7 +109,7 @@ final class EntriesSheet {
             working.put(demand, inWorking);
             table.add(List.of(
                     new Block.Text(demand.tag() + " " + demand.symbol()),
-                    new Block.Text(demand.description()),
+                    new Block.Text(demand.label()),
                     new Block.Content(cell),
                     new Block.Text(unitText(typed.unit())),
                     new Block.Content(inWorking),

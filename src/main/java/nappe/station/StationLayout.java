@@ -11,10 +11,13 @@ import nappe.calculation.CaseColumns;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
 import nappe.calculation.ElementSheet;
+import nappe.calculation.Formulas;
 import nappe.calculation.ItemLayout;
+import nappe.calculation.RatingGrid;
 import nappe.calculation.Scope;
 import nappe.calculation.SheetDraft;
 import nappe.calculation.TrialRows;
+import nappe.formula.Comparator;
 import nappe.formula.Formula;
 import nappe.method.Item;
 import nappe.method.Limit;
@@ -35,6 +38,7 @@ public final class StationLayout {
             SheetDraft tables,
             SheetDraft standing,
             SheetDraft trials,
+            SheetDraft found,
             Function<String, SheetDraft> element) {}
 
     private final Design design;
@@ -44,6 +48,7 @@ public final class StationLayout {
     private final ItemLayout items;
     private final TrialRows trialRows;
     private final CasesSheet cases;
+    private final FoundColumns found;
     private final CaseColumns columns;
     private final Map<String, Scope> scopes = new LinkedHashMap<>();
     private final Map<String, List<Scope>> casesOf = new LinkedHashMap<>();
@@ -52,9 +57,10 @@ public final class StationLayout {
 
     /**
      * @param methodOf the method sheet of a name
+     * @param foundCases flows found, each a column after all others
      * @throws StationException where entries do not fit the methods
      */
-    StationLayout(Design design, Function<String, MethodSheet> methodOf, Sheets sheets) {
+    StationLayout(Design design, Function<String, MethodSheet> methodOf, List<FoundCase> foundCases, Sheets sheets) {
         this.design = design;
         this.sheets = sheets;
         design.elements().forEach(e -> methods.put(e.tag(), methodOf.apply(e.method())));
@@ -66,7 +72,8 @@ public final class StationLayout {
         this.trialRows = new TrialRows(cells, sheets.trials());
         this.items = new ItemLayout(cells, trialRows);
         this.cases = new CasesSheet(cells, sheets.cases(), design);
-        this.columns = cases.columns();
+        this.found = new FoundColumns(cells, sheets.found(), design, foundCases);
+        this.columns = found.after(cases.columns());
         lay();
     }
 
@@ -77,10 +84,22 @@ public final class StationLayout {
      * @throws StationException where entries do not fit the methods
      */
     public static StationLayout bare(Design design, Function<String, MethodSheet> methodOf) {
+        return bare(design, methodOf, List.of());
+    }
+
+    /**
+     * The calculation alone, with columns for flows to be tried.
+     *
+     * @param methodOf the method sheet of a name
+     * @throws StationException where entries do not fit the methods
+     */
+    public static StationLayout bare(
+            Design design, Function<String, MethodSheet> methodOf, List<FoundCase> foundCases) {
         SheetDraft tables = new SheetDraft("Tables", "");
         return new StationLayout(
                 design,
                 methodOf,
+                foundCases,
                 new Sheets(
                         new SheetDraft("Cases", ""),
                         new SheetDraft("Entries", ""),
@@ -88,13 +107,15 @@ public final class StationLayout {
                         tables,
                         tables,
                         new SheetDraft("Trials", ""),
+                        new SheetDraft("Found", ""),
                         tag -> new SheetDraft(tag, "")));
     }
 
     private void lay() {
         Sources sources = new Sources(cells, sheets.constants(), sheets.tables(), sheets.standing());
         Map<String, Map<String, Cell>> constants = sources.layConstants(distinctMethods());
-        cases.lay();
+        cases.lay(isShared());
+        found.lay(cases);
         EntriesSheet entries = new EntriesSheet(cells, sheets.entries());
         for (Design.Element element : design.elements()) {
             Scope scope = Scope.ofElement();
@@ -115,6 +136,14 @@ public final class StationLayout {
             linesOf.put(tag, laid.lines());
             below = tag;
         }
+    }
+
+    private boolean isShared() {
+        return methods.values().stream()
+                .flatMap(method -> method.items().stream())
+                .anyMatch(item -> item instanceof Item.Given given
+                        && (given.role().equals("flow through one")
+                                || given.role().equals("units in service")));
     }
 
     Cells cells() {
@@ -138,6 +167,41 @@ public final class StationLayout {
         return cases;
     }
 
+    /** The columns of the flows found. */
+    FoundColumns foundColumns() {
+        return found;
+    }
+
+    /** The cells that hold the flows found, in the working unit, in the order of their columns. */
+    public List<Cell> foundFlows() {
+        return List.copyOf(found.flows());
+    }
+
+    /**
+     * The flows at the ends of every rating table, through one device: what a search must span. They are laid on a sheet
+     * that goes nowhere.
+     */
+    public List<Cell> ratedFlows() {
+        List<Cell> ends = new ArrayList<>();
+        SheetDraft nowhere = new SheetDraft("Rated", "");
+        methods.forEach((tag, method) -> method.ratings().forEach(rating -> {
+            trialRows.nowFor(tag, "rating");
+            List<Block.Row> rows = new RatingGrid(items, method, Map.of())
+                    .lay(rating, scope(tag), nowhere, tag)
+                    .table()
+                    .rows();
+            for (Block.Row row : List.of(rows.get(0), rows.get(rows.size() - 1))) {
+                for (Block.Item item : row.items()) {
+                    if (item instanceof Block.Content content
+                            && content.cell().unit().dimension().equals(Dimension.FLOW)) {
+                        ends.add(content.cell());
+                    }
+                }
+            }
+        }));
+        return ends;
+    }
+
     /** The columns of every element's calculation. */
     public CaseColumns columns() {
         return columns;
@@ -146,6 +210,19 @@ public final class StationLayout {
     /** The scope of what serves all cases of an element. */
     public Scope scope(String tag) {
         return Objects.requireNonNull(scopes.get(tag));
+    }
+
+    /** The cell into which a symbol of an element is typed, behind the cells that hand it on. */
+    public Cell entry(String tag, String symbol) {
+        Cell cell = scope(tag).cell(symbol);
+        while (cell.formula() != null) {
+            cell = cell.references().values().stream()
+                    .filter(Cell.class::isInstance)
+                    .map(Cell.class::cast)
+                    .findFirst()
+                    .orElseThrow();
+        }
+        return cell;
     }
 
     /** The scopes of an element's cases, one per column. */
@@ -190,8 +267,9 @@ public final class StationLayout {
         List<Scope> inners = new ArrayList<>();
         for (int c = 0; c < columns.count(); c++) {
             Scope inner = scope(tag).inner();
-            for (Map.Entry<String, List<Cell>> typed : own.entrySet()) {
-                inner.put(typed.getKey(), typed.getValue().get(c));
+            for (Item.Given given : asked) {
+                List<Cell> typed = Objects.requireNonNull(own.get(given.symbol()));
+                inner.put(given.symbol(), c < typed.size() ? typed.get(c) : found.notGiven(tag, given));
             }
             for (Item item : method.items()) {
                 if (item instanceof Item.Given given && !given.role().isEmpty()) {
@@ -237,11 +315,19 @@ public final class StationLayout {
                 Formula value = new Formula.Symbol(demand.symbol());
                 Formula bound = new Formula.Symbol(name);
                 Formula scale = scale(demand);
+                Formula when = demand.inCase().isEmpty()
+                        ? null
+                        : Formulas.compare(
+                                Formulas.symbol(ElementSheet.CASE_NAME),
+                                Comparator.EQUAL,
+                                Formulas.word(demand.inCase()));
                 Limit limit = demand.atMost()
-                        ? new Limit(value, bound, true, scale, null, demand.description(), demand.citation())
-                        : new Limit(bound, value, false, scale, null, demand.description(), demand.citation());
-                demanded.add(
-                        new ElementSheet.Demanded(limit, Map.of(name, Objects.requireNonNull(bounds.get(demand)))));
+                        ? new Limit(value, bound, true, scale, when, demand.label(), demand.citation())
+                        : new Limit(bound, value, false, scale, when, demand.label(), demand.citation());
+                demanded.add(new ElementSheet.Demanded(
+                        limit,
+                        Map.of(name, Objects.requireNonNull(bounds.get(demand))),
+                        when == null ? List.of() : cases.names()));
             }
         }
         return demanded;

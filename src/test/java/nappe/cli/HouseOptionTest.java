@@ -258,13 +258,33 @@ class HouseOptionTest {
     @Test
     void houseSheetIncludesBuiltInTextsAndUsesBuiltInTables() throws IOException {
         put("methods/two-weirs.txt", "method Twin\ninclude rectangular-weir subscript a\n");
-        put("methods/sized.txt", "method Sized\nchoice size from parshall-sizes ; size\n");
+        put(
+                "methods/sized.txt",
+                "method Sized\nsource A ; invented\nchoice size from parshall-sizes ; size\n"
+                        + "entry b ; m ; width\nlimit b <= 3 m ; not too wide ; A\n");
         Said said = nappe("verify", "--house", house);
         assertThat(said.status()).as(said.err()).isZero();
         assertThat(said.out()).contains("two-weirs: UNVERIFIED", "sized: UNVERIFIED");
         assertThat(nappe("blank", "S1=sized", "--house", house, "-o", folder.resolve("s.xlsx"))
                         .status())
                 .isZero();
+    }
+
+    @Test
+    void methodWithoutAnyLimitIsRefused() throws IOException {
+        put("methods/bare.txt", "method Bare\nentry b ; m ; width\n");
+        String err = refused(nappe("blank", "B1=bare", "--house", house, "-o", folder.resolve("b.xlsx")))
+                .err();
+        assertThat(err).contains("methods/bare.txt: a method states at least one limit of its use");
+    }
+
+    @Test
+    void checkValuesThatCannotBeReadAreNamedWhereTheyAreOfNoMethod() throws IOException {
+        put("checks/others.csv", "id,method\n");
+        Said said = nappe("issue", station(), "--house", house, "-o", folder.resolve("out"));
+        assertThat(said.status()).isZero();
+        assertThat(said.err())
+                .contains("remark: no check value of " + house + "/checks/others.csv is run: it has 1 fault");
     }
 
     @Test

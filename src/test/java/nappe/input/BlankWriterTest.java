@@ -35,6 +35,8 @@ class BlankWriterTest {
                     .containsExactly(
                             "Project",
                             "Flows",
+                            "Tailwater curve",
+                            "Combinations",
                             "F1",
                             "R1",
                             "Demands",

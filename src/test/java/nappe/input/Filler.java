@@ -41,7 +41,7 @@ public final class Filler {
     public Filler row(String name, Object... values) {
         XSSFSheet sheet = workbook.getSheet(name);
         int row = rowOf(sheet, 0, heads(name).get(0)) + 1;
-        while (!text(sheet, row, 0).isEmpty()) {
+        while (isFilled(cell(sheet, row, 0))) {
             row++;
         }
         for (int i = 0; i < values.length; i++) {
@@ -88,6 +88,8 @@ public final class Filler {
         return switch (sheet) {
             case "Flows" -> Layout.FLOW_HEADS;
             case "Demands" -> Layout.DEMAND_HEADS;
+            case "Tailwater curve" -> Layout.LEVEL_HEADS;
+            case "Combinations" -> Layout.COMBINATION_HEADS;
             case "Assumptions" -> Layout.ASSUMPTION_HEADS;
             case "References" -> Layout.REFERENCE_HEADS;
             case "Requirements" -> Layout.REQUIREMENT_HEADS;
@@ -112,6 +114,11 @@ public final class Filler {
     private static String text(XSSFSheet sheet, int row, int column) {
         XSSFCell cell = cell(sheet, row, column);
         return cell.getCellType() == org.apache.poi.ss.usermodel.CellType.STRING ? cell.getStringCellValue() : "";
+    }
+
+    private static boolean isFilled(XSSFCell cell) {
+        return cell.getCellType() != org.apache.poi.ss.usermodel.CellType.BLANK
+                && !cell.toString().isEmpty();
     }
 
     private static int rowOf(XSSFSheet sheet, int column, String text) {

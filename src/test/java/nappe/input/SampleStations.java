@@ -86,6 +86,7 @@ public final class SampleStations {
                         "",
                         brief,
                         "known",
+                        null,
                         5.6,
                         "in")
                 .row("Flows", "Design, average day", "1 d", "2040", 5, "MGD", 412.6, "ft", "", brief, "known")
@@ -114,7 +115,23 @@ public final class SampleStations {
                         "ft",
                         "",
                         brief,
-                        "assumed")
+                        "assumed",
+                        2)
+                .row(
+                        "Combinations",
+                        "Build-out peak, high river",
+                        "Build-out, peak instantaneous",
+                        "Design, peak hour, high river",
+                        "yes",
+                        "Invented river study RS-1, section 6: one long storm brings both.")
+                .row(
+                        "Combinations",
+                        "Least flow, high river",
+                        "Start-up, minimum hour",
+                        "Design, peak hour, high river",
+                        "no",
+                        "Invented river study RS-1, section 6: the river is high only after days of rain, when flow is above the"
+                                + " average.")
                 .entry("F1", "size", "3 ft", null, "Invented drawing C-12, rev. 1", "known")
                 .entry("F1", "form", "1967 form", null, "Invented design brief DB-3, clause 4.3", "known")
                 .entry("F1", "submerged", "refused", null, "Invented design brief DB-3, clause 4.3", "known")
@@ -185,7 +202,7 @@ public final class SampleStations {
                 .project("Space for a seal on the cover", "no")
                 .row("Flows", "Leakage only", "1 h", "2030", 4, "L/s", 17.6, "m", "", log, "assumed")
                 .row("Flows", "One pump", "1 h", "2030", 30, "L/s", 17.7, "m", "", log, "known")
-                .row("Flows", "Two pumps", "1 h", "2030", 60, "L/s", 17.8, "m", "", log, "known", 142, "mm")
+                .row("Flows", "Two pumps", "1 h", "2030", 60, "L/s", 17.8, "m", "", log, "known", null, 142, "mm")
                 .row("Flows", "Four pumps", "1 h", "2030", 120, "L/s", 17.95, "m", "", log, "known")
                 .row("Flows", "Four pumps, pond full", "1 h", "2035", 432, "m3/h", 18.22, "m", "", log, "known")
                 .entry("W1", "b", 600, "mm", "Invented drawing S-3", "known")

@@ -48,6 +48,7 @@ final class Samples {
                             "100 years",
                             "invented",
                             "assumed",
+                            null,
                             1.25,
                             "ft")
                     .row(

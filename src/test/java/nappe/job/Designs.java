@@ -229,6 +229,40 @@ final class Designs {
                         d.references(),
                         d.requirements(),
                         d.revisions()));
+        changed.put("units in service", withCase(d, 0, inService(d.cases().get(0), 2)));
+        changed.put("3 units in service", withCase(d, 0, inService(d.cases().get(0), 3)));
+        changed.put(
+                "demand in one case",
+                withDemands(
+                        d,
+                        List.of(new Design.Demand(
+                                "F1",
+                                "z_u",
+                                true,
+                                number(9, "m"),
+                                "pretend",
+                                "invented",
+                                new Design.Origin("", ""),
+                                new Design.Origin("", ""),
+                                "Low"))));
+        for (Design.Combination one : List.of(
+                combination("Both", "Low", "High", true, "invented"),
+                combination("Other", "Low", "High", true, "invented"),
+                combination("Both", "High", "High", true, "invented"),
+                combination("Both", "Low", "Low", true, "invented"),
+                combination("Both", "Low", "High", false, "invented"),
+                combination("Both", "Low", "High", true, "another"))) {
+            changed.put(one.toString(), combined(d, List.of(one), List.of()));
+        }
+        Design.Typed flow = number(0.1, "m3/s");
+        Design.Typed level = number(0.5, "m");
+        changed.put("level", combined(d, List.of(), List.of(new Design.LevelPair(flow, level))));
+        others(flow)
+                .forEach(other -> changed.put(
+                        "level at " + other, combined(d, List.of(), List.of(new Design.LevelPair(other, level)))));
+        others(level)
+                .forEach(other -> changed.put(
+                        "level of " + other, combined(d, List.of(), List.of(new Design.LevelPair(flow, other)))));
         changed.put(
                 "assumption",
                 new Design(
@@ -300,6 +334,52 @@ final class Designs {
         others.add(new Design.Typed(t.value(), t.unit(), "another source", t.standing(), t.origin()));
         others.add(new Design.Typed(t.value(), t.unit(), t.source(), "assumed", t.origin()));
         return others;
+    }
+
+    static Design.FlowCase inService(Design.FlowCase one, int units) {
+        return new Design.FlowCase(
+                one.name(),
+                one.period(),
+                one.year(),
+                one.flow(),
+                number(units, "1"),
+                one.tailwater(),
+                one.tailwaterReturn(),
+                one.typed());
+    }
+
+    static Design.Combination combination(
+            String name, String flowOf, String levelOf, boolean canCoincide, String basis) {
+        return new Design.Combination(
+                name, flowOf, levelOf, canCoincide, basis, new Design.Origin("Combinations", "A7"));
+    }
+
+    static Design combined(Design d, List<Design.Combination> combinations, List<Design.LevelPair> levels) {
+        return new Design(
+                d.project(),
+                d.elements(),
+                d.cases(),
+                d.demands(),
+                d.assumptions(),
+                d.references(),
+                d.requirements(),
+                d.revisions(),
+                combinations,
+                levels);
+    }
+
+    static Design withDemands(Design d, List<Design.Demand> demands) {
+        return new Design(
+                d.project(),
+                d.elements(),
+                d.cases(),
+                demands,
+                d.assumptions(),
+                d.references(),
+                d.requirements(),
+                d.revisions(),
+                d.combinations(),
+                d.levels());
     }
 
     private static Design withElement(Design d, int at, Design.Element element) {

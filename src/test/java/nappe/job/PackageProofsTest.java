@@ -33,7 +33,7 @@ class PackageProofsTest {
     @ParameterizedTest
     @EnumSource(WorkingSystem.class)
     void twoSpreadsheetProgramsComputeEveryCellAlike(WorkingSystem system) throws IOException {
-        Results results = PretendStation.AS_ISSUED.results(system);
+        Results results = PretendStation.AS_ISSUED.done(system).results();
         Path spoilt = Files.write(folder.resolve("spoilt.xlsx"), Spoiler.spoil(XlsxDelivery.render(results)));
         assertThat(Recalculated.disagreements(Recalculated.byGnumeric(spoilt), results))
                 .isEmpty();
@@ -54,22 +54,37 @@ class PackageProofsTest {
     @ParameterizedTest
     @MethodSource("changes")
     void anEntryTypedIntoTheWorkbookGivesWhatANewIssueGives(PretendStation changed) throws IOException {
-        byte[] issued = XlsxDelivery.render(PretendStation.AS_ISSUED.results(WorkingSystem.US));
-        Results anew = changed.results(WorkingSystem.US);
+        Job.Done before = PretendStation.AS_ISSUED.done(WorkingSystem.US);
+        byte[] issued = XlsxDelivery.render(before.results());
+        Results anew = changed.results(WorkingSystem.US, before.found());
         Path retyped = Files.write(folder.resolve("retyped.xlsx"), Retyper.type(issued, numbersTyped(anew)));
-        assertThat(Recalculated.disagreements(Recalculated.byGnumeric(retyped), anew))
+        assertThat(Recalculated.disagreements(Recalculated.byGnumeric(retyped), live(anew)))
                 .isEmpty();
+    }
+
+    /** Without what reruns found as issued, which says that it does not follow a changed entry. */
+    private static Results live(Results all) {
+        return new Results(
+                all.furniture(),
+                all.sheets(),
+                all.cells().stream()
+                        .filter(cell -> cell.kind() != Cell.Kind.RERUN)
+                        .toList(),
+                all.values(),
+                all.figures());
     }
 
     @Test
     void sameInputGivesTheSameWorkbookInAnyLocaleAndTimeZone() {
-        byte[] here = XlsxDelivery.render(PretendStation.AS_ISSUED.results(WorkingSystem.SI));
+        byte[] here = XlsxDelivery.render(
+                PretendStation.AS_ISSUED.done(WorkingSystem.SI).results());
         Locale locale = Locale.getDefault();
         TimeZone zone = TimeZone.getDefault();
         try {
             Locale.setDefault(Locale.forLanguageTag("ar-EG"));
             TimeZone.setDefault(TimeZone.getTimeZone("Pacific/Auckland"));
-            assertThat(XlsxDelivery.render(PretendStation.AS_ISSUED.results(WorkingSystem.SI)))
+            assertThat(XlsxDelivery.render(
+                            PretendStation.AS_ISSUED.done(WorkingSystem.SI).results()))
                     .isEqualTo(here);
         } finally {
             Locale.setDefault(locale);

@@ -11,6 +11,7 @@ import nappe.results.Results;
 import nappe.source.BuiltInLibrary;
 import nappe.station.Design;
 import nappe.station.Design.Typed;
+import nappe.station.FoundFlows;
 import nappe.unit.Unit;
 import nappe.unit.WorkingSystem;
 
@@ -27,9 +28,15 @@ record PretendStation(double floor, List<Double> flows, List<Double> levels, dou
     static final PretendStation AS_ISSUED = new PretendStation(
             101.25, List.of(0.0, 0.5, 2.2, 7.4, 30.0), List.of(Double.NaN, 100.0, 101.5, 102.2, 103.5), 13.2, 24);
 
-    Results results(WorkingSystem system) {
-        MethodLibrary methods = new MethodLibrary(new BuiltInLibrary());
-        return new Job(methods, "0.0.0").run(design(system), List.of()).results();
+    private static final Job JOB = new Job(new MethodLibrary(new BuiltInLibrary()), "0.0.0");
+
+    Job.Done done(WorkingSystem system) {
+        return JOB.run(design(system), List.of());
+    }
+
+    /** With flows found before. */
+    Results results(WorkingSystem system, FoundFlows found) {
+        return JOB.run(design(system), List.of(), found).results();
     }
 
     private Design design(WorkingSystem system) {

@@ -8,6 +8,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.DoubleStream;
 import nappe.calculation.Cell;
 import nappe.calculation.ElementSheet;
 import nappe.calculation.Scope;
@@ -28,8 +29,9 @@ import org.junit.jupiter.api.Test;
  */
 class StationWalkTest {
     private static final double G = 9.80665;
-    private static final double[] FLOWS = {0, 0.3, 1.001, 6, 0, 0.999, 3, 10};
-    private static final double[] SUBMERGENCES = {-2, 0.3, 0.6, 0.78, 0.87, 0.99, 3};
+    private static final double[] OF_LEAST = {0, 0.3, 1.001};
+    private static final double[] OF_GREATEST = {0.2, 0.999, 10};
+    private static final double[] SUBMERGENCES = {-2, 0.6, 0.78, 0.87, 3};
     private static final double[] CRESTS = {0.05, 0.6};
 
     private final MethodLibrary methods = new MethodLibrary(new BuiltInLibrary());
@@ -59,8 +61,10 @@ class StationWalkTest {
         double greatest = known(known, first.scope("F1"), "Q_max");
         double head = known(known, first.scope("F1"), "h_max");
         List<Design.FlowCase> cases = new ArrayList<>();
-        for (int i = 0; i < FLOWS.length; i++) {
-            double flow = FLOWS[i] * (i < 4 ? least : greatest);
+        List<Double> flows = new ArrayList<>();
+        DoubleStream.of(OF_LEAST).forEach(share -> flows.add(share * least));
+        DoubleStream.of(OF_GREATEST).forEach(share -> flows.add(share * greatest));
+        for (double flow : flows) {
             double freeHead = head * Math.pow(Math.max(flow, least / 10) / greatest, 1 / 1.55);
             for (double submergence : SUBMERGENCES) {
                 cases.add(Designs.flowCase("case " + cases.size(), flow, 10 + submergence * freeHead));

@@ -16,6 +16,7 @@ import nappe.method.MethodLibrary;
 import nappe.results.Results;
 import nappe.source.BuiltInLibrary;
 import nappe.station.Design;
+import nappe.station.FoundFlows;
 import org.junit.jupiter.api.Test;
 
 /** A weir downstream, a Parshall flume upstream: the flume takes the weir's level upstream, case by case. */
@@ -76,7 +77,7 @@ class WaterLevelLinkTest {
     }
 
     private static Results run(Design design) {
-        return JOB.run(design, List.of()).results();
+        return JOB.run(design, List.of(), FoundFlows.NONE).results();
     }
 
     private static List<String> described(Results results) {

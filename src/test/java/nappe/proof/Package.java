@@ -12,9 +12,10 @@ import nappe.method.MethodLibrary;
 import nappe.results.Results;
 import nappe.source.BuiltInLibrary;
 import nappe.station.Design;
+import nappe.station.FoundFlows;
 
 /** The package of one design: what was typed, what Java computed, the workbook that is issued. */
-record Package(Design design, Results results, Map<String, Block.Table> ratings, byte[] workbook) {
+record Package(Design design, Results results, Map<String, Block.Table> ratings, FoundFlows found, byte[] workbook) {
     private static final BuiltInLibrary LIBRARY = new BuiltInLibrary();
     private static final MethodLibrary METHODS = new MethodLibrary(LIBRARY);
     private static final Map<String, Package> SAMPLES = new LinkedHashMap<>();
@@ -22,8 +23,16 @@ record Package(Design design, Results results, Map<String, Block.Table> ratings,
     static final Path INPUTS = Path.of("sample-inputs");
 
     static Package of(Design design) {
-        Job.Done done = new Job(METHODS, "0.0.0").run(design, CheckRow.builtIn(LIBRARY));
-        return new Package(design, done.results(), done.ratings(), XlsxDelivery.render(done.results()));
+        return of(design, new Job(METHODS, "0.0.0").run(design, CheckRow.builtIn(LIBRARY)));
+    }
+
+    /** The package with flows found before: what does not follow a changed entry stays as issued. */
+    static Package of(Design design, FoundFlows found) {
+        return of(design, new Job(METHODS, "0.0.0").run(design, CheckRow.builtIn(LIBRARY), found));
+    }
+
+    private static Package of(Design design, Job.Done done) {
+        return new Package(design, done.results(), done.ratings(), done.found(), XlsxDelivery.render(done.results()));
     }
 
     /** The package of an input workbook in {@code sample-inputs}, made once. */

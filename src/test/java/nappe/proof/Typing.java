@@ -48,6 +48,7 @@ sealed interface Typing {
                             one.period(),
                             one.year(),
                             retyped(one.flow(), number),
+                            one.units(),
                             one.tailwater(),
                             one.tailwaterReturn(),
                             one.typed()));
@@ -76,7 +77,37 @@ sealed interface Typing {
                             one.period(),
                             one.year(),
                             one.flow(),
+                            one.units(),
                             retyped(one.tailwater(), number),
+                            one.tailwaterReturn(),
+                            one.typed()));
+        }
+    }
+
+    /** The units in service in a case. */
+    record Units(int of, double number) implements Typing {
+        @Override
+        public Object content() {
+            return number;
+        }
+
+        @Override
+        public Place place(Package issued) {
+            return entry(issued, "Cases", "N", of).place();
+        }
+
+        @Override
+        public Design in(Design design, Package issued) {
+            return inCase(
+                    design,
+                    of,
+                    one -> new FlowCase(
+                            one.name(),
+                            one.period(),
+                            one.year(),
+                            one.flow(),
+                            retyped(one.units(), number),
+                            one.tailwater(),
                             one.tailwaterReturn(),
                             one.typed()));
         }
@@ -105,6 +136,7 @@ sealed interface Typing {
                         one.period(),
                         one.year(),
                         one.flow(),
+                        one.units(),
                         one.tailwater(),
                         one.tailwaterReturn(),
                         typed);
@@ -132,7 +164,9 @@ sealed interface Typing {
                     design.assumptions(),
                     design.references(),
                     design.requirements(),
-                    design.revisions());
+                    design.revisions(),
+                    design.combinations(),
+                    design.levels());
         }
 
         private Map<String, Typed> with(Map<String, Typed> before) {
@@ -167,7 +201,10 @@ sealed interface Typing {
                             d.atMost(),
                             retyped(d.value(), number),
                             d.description(),
-                            d.citation()));
+                            d.citation(),
+                            d.symbolAt(),
+                            d.unitAt(),
+                            d.inCase()));
             return new Design(
                     design.project(),
                     design.elements(),
@@ -176,7 +213,9 @@ sealed interface Typing {
                     design.assumptions(),
                     design.references(),
                     design.requirements(),
-                    design.revisions());
+                    design.revisions(),
+                    design.combinations(),
+                    design.levels());
         }
     }
 
@@ -208,6 +247,8 @@ sealed interface Typing {
                 design.assumptions(),
                 design.references(),
                 design.requirements(),
-                design.revisions());
+                design.revisions(),
+                design.combinations(),
+                design.levels());
     }
 }

@@ -68,7 +68,7 @@ final class Canvas {
                         cell,
                         new Filling.Live(SpreadsheetReading.of(cell), value));
             case ENTRY -> put(place.row(), place.column(), Role.ENTRY, align, cell, typed(value));
-            case CONSTANT, TABLE -> put(place.row(), place.column(), Role.CONSTANT, align, cell, typed(value));
+            case CONSTANT, TABLE, RERUN -> put(place.row(), place.column(), Role.CONSTANT, align, cell, typed(value));
         }
     }
 
