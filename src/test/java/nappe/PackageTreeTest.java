@@ -50,14 +50,14 @@ class PackageTreeTest {
         return List.of(
                 new Row("unit", "", "javax.measure.. tech.units.. " + CSV + " " + FRACTIONS),
                 new Row("formula", "unit", FRACTIONS),
-                new Row("source", "formula unit", CSV),
+                new Row("source", "formula unit", ""),
                 new Row("method", "source formula unit", ""),
                 new Row("calculation", "method source formula unit", ""),
                 new Row("results", "calculation source formula unit", ""),
                 new Row("station", "results calculation method source formula unit", ""),
                 new Row("solve", "results calculation formula unit", "org.apache.commons.math3.."),
                 new Row("figure", "results calculation method source formula unit", ""),
-                new Row("job", "figure station solve results calculation method source formula unit", CSV),
+                new Row("job", "figure station solve results calculation method source formula unit", ""),
                 new Row("input", "station method source formula unit", "org.apache.poi.. " + XML),
                 new Row("deliver.csv", "results calculation formula source unit", ""),
                 new Row(
@@ -101,10 +101,9 @@ class PackageTreeTest {
                 .isInstanceOf(AssertionError.class)
                 .hasMessageContaining("nappe.method.StatementReader")
                 .hasMessageContaining("nappe.formula.FormulaParser");
-        assertThatThrownBy(
-                        () -> new Row("job", "figure station solve results calculation method source formula unit", "")
-                                .rule()
-                                .check(NAPPE))
+        assertThatThrownBy(() -> new Row("unit", "", "javax.measure.. tech.units.. " + FRACTIONS)
+                        .rule()
+                        .check(NAPPE))
                 .isInstanceOf(AssertionError.class)
                 .hasMessageContaining("org.apache.commons.csv");
     }

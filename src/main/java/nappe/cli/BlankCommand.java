@@ -28,6 +28,9 @@ import picocli.CommandLine.Parameters;
             "Example: a Parshall flume, in US customary units",
             "  nappe blank F1=parshall-flume --units US -o headworks.xlsx",
             "",
+            "Example: a weir by a method of the house's own, methods/our-weir.txt in the folder our-methods",
+            "  nappe blank W1=our-weir --house our-methods -o mill.xlsx",
+            "",
             "The methods are listed by:  nappe blank --methods"
         })
 final class BlankCommand implements Callable<Integer> {
@@ -50,18 +53,22 @@ final class BlankCommand implements Callable<Integer> {
     @Option(names = "--methods", description = "list the methods and write nothing")
     private boolean list;
 
+    @CommandLine.Mixin
+    private HouseOption house = new HouseOption();
+
     @CommandLine.Spec
     private CommandLine.Model.CommandSpec spec;
 
     @Override
     public Integer call() throws IOException {
-        Desk desk = new Desk();
+        Desk desk = house.desk();
         if (list) {
             for (String name : desk.methods().names()) {
                 spec.commandLine()
                         .getOut()
-                        .printf("%-24s %s%n", name, desk.methods().title(name));
+                        .printf("%-24s %s%s%n", name, desk.methods().title(name), house.mark(desk, name));
             }
+            house.tellRemarks(desk, List.of());
             return ExitStatus.DONE;
         }
         List<BlankWriter.Chosen> chosen = chosen(desk);
@@ -73,8 +80,14 @@ final class BlankCommand implements Callable<Integer> {
             throw new Refusal(
                     ExitStatus.WRONG_USAGE, target + " is there already; it is not written over. Name another file.");
         }
+        List<String> used =
+                chosen.stream().map(BlankWriter.Chosen::method).distinct().toList();
+        desk.requireSound(used);
+        house.tellRemarks(desk, used);
         BlankWriter.write(target, system(), chosen, desk.methods());
-        spec.commandLine().getOut().println("Wrote " + target + ". Fill it in, then: nappe inspect " + target);
+        spec.commandLine()
+                .getOut()
+                .println("Wrote " + target + ". Fill it in, then: nappe inspect " + target + house.asTyped());
         return ExitStatus.DONE;
     }
 
@@ -108,7 +121,7 @@ final class BlankCommand implements Callable<Integer> {
             }
             if (!desk.methods().knows(method)) {
                 throw usage("there is no method \"" + method + "\"; there are "
-                        + String.join(", ", desk.methods().names()));
+                        + String.join(", ", desk.methods().names()) + house.hint(desk, method));
             }
             chosen.add(new BlankWriter.Chosen(tag, method));
         }

@@ -7,8 +7,9 @@ import java.nio.file.Path;
 import java.util.List;
 import nappe.input.Fault;
 import nappe.input.InputRefused;
-import nappe.job.CheckException;
 import nappe.method.MethodException;
+import nappe.source.TextException;
+import nappe.source.TextFault;
 import nappe.station.DesignFault;
 import nappe.station.StationException;
 import picocli.CommandLine;
@@ -21,9 +22,11 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
         if (failure instanceof InputRefused refused) {
             return refused(err, refused.faults());
         }
-        if (failure instanceof CheckException || failure instanceof MethodException) {
-            err.println(failure.getMessage());
-            return ExitStatus.INPUT_REFUSED;
+        if (failure instanceof TextException text) {
+            return inTexts(err, text.faults());
+        }
+        if (failure instanceof MethodException method) {
+            return inTexts(err, method.faults());
         }
         if (failure instanceof Refusal refusal) {
             err.println(refusal.getMessage());
@@ -42,6 +45,13 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
                 faults.size() == 1
                         ? "1 fault; no package was written."
                         : faults.size() + " faults; no package was written.");
+        return ExitStatus.INPUT_REFUSED;
+    }
+
+    private static int inTexts(PrintWriter err, List<TextFault> faults) {
+        faults.forEach(fault -> err.println(fault));
+        err.println(
+                faults.size() == 1 ? "1 fault; nothing was written." : faults.size() + " faults; nothing was written.");
         return ExitStatus.INPUT_REFUSED;
     }
 

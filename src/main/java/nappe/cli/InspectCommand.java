@@ -15,7 +15,7 @@ import picocli.CommandLine.Parameters;
         mixinStandardHelpOptions = true,
         description =
                 "Read an input workbook, report every fault at its cell or the verdicts on its limits, and write nothing.",
-        footer = {"", "Example:", "  nappe inspect headworks.xlsx"})
+        footer = {"", "Examples:", "  nappe inspect headworks.xlsx", "  nappe inspect mill.xlsx --house our-methods"})
 final class InspectCommand implements Callable<Integer> {
     @Parameters(paramLabel = "IN.xlsx", description = "the input workbook")
     private Path input;
@@ -23,13 +23,18 @@ final class InspectCommand implements Callable<Integer> {
     @CommandLine.Mixin
     private MarkedOption marked = new MarkedOption();
 
+    @CommandLine.Mixin
+    private HouseOption house = new HouseOption();
+
     @CommandLine.Spec
     private CommandLine.Model.CommandSpec spec;
 
     @Override
     public Integer call() {
-        Desk desk = new Desk();
+        Desk desk = house.desk();
         Design design = marked.read(desk, input);
+        house.tellRemarks(
+                desk, design.elements().stream().map(Design.Element::method).toList());
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
         Job.Done done = desk.compute(input, design);
         PrintWriter out = spec.commandLine().getOut();

@@ -29,8 +29,9 @@ import picocli.CommandLine.Parameters;
                 "Make the calculation package: a PDF, a workbook with live formulas, and the rating tables as CSV.",
         footer = {
             "",
-            "Example:",
+            "Examples:",
             "  nappe issue headworks.xlsx -o output",
+            "  nappe issue mill.xlsx --house our-methods -o output",
             "",
             "The package goes into a folder of its own, named for the calculation number and the revision. A preliminary package is written"
                     + " over; one whose status is issued never is."
@@ -49,13 +50,18 @@ final class IssueCommand implements Callable<Integer> {
     @CommandLine.Mixin
     private MarkedOption marked = new MarkedOption();
 
+    @CommandLine.Mixin
+    private HouseOption house = new HouseOption();
+
     @CommandLine.Spec
     private CommandLine.Model.CommandSpec spec;
 
     @Override
     public Integer call() throws IOException {
-        Desk desk = new Desk();
+        Desk desk = house.desk();
         Design design = marked.read(desk, input);
+        house.tellRemarks(
+                desk, design.elements().stream().map(Design.Element::method).toList());
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
         PackageFolder target = PackageFolder.of(
                 folder, design.project().number(), design.project().revision());

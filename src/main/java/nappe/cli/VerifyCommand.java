@@ -10,8 +10,13 @@ import java.util.Locale;
 import java.util.concurrent.Callable;
 import nappe.job.CheckOutcome;
 import nappe.job.CheckRow;
+import nappe.job.HouseReview;
 import nappe.job.Verification;
 import nappe.results.Digits;
+import nappe.source.HouseLibrary;
+import nappe.source.StrictText;
+import nappe.source.TextException;
+import nappe.source.TextFault;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Parameters;
@@ -20,12 +25,14 @@ import picocli.CommandLine.Parameters;
 @Command(
         name = "verify",
         mixinStandardHelpOptions = true,
-        description = "Run check values through the method sheets: the built-in ones, or those of the files named.",
+        description =
+                "Run check values through the method sheets: the built-in ones, or those of the files or of the house folder named.",
         footer = {
             "",
             "Examples:",
             "  nappe verify",
             "  nappe verify firm-checks.csv",
+            "  nappe verify --house our-methods    (all texts of the folder checked, and its check values run)",
             "",
             "A row of a file: id,method,entries,target,expected,unit,tolerance,source,kind,note",
             "  H1,parshall-flume,\"size = \"\"3 ft\"\"; h = 2 ft\",Q_h,35.5,ft3/s,0.6 %%,our test of 1 May,derived,"
@@ -34,34 +41,80 @@ final class VerifyCommand implements Callable<Integer> {
     @Parameters(arity = "0..*", paramLabel = "FILE.csv", description = "files with check values of your own")
     private List<Path> files = new ArrayList<>();
 
+    @CommandLine.Mixin
+    private HouseOption house = new HouseOption();
+
     @CommandLine.Spec
     private CommandLine.Model.CommandSpec spec;
 
     @Override
     public Integer call() throws IOException {
-        Desk desk = new Desk();
-        List<CheckRow> rows = new ArrayList<>();
-        if (files.isEmpty()) {
+        Desk desk = house.desk();
+        HouseReview review = desk.review();
+        if (review != null) {
+            requireSound(review);
+            review.notLookedAt().forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
+        }
+        List<CheckRow> rows = new ArrayList<>(review == null ? List.of() : review.rows());
+        if (files.isEmpty() && review == null) {
             rows.addAll(desk.checks());
         }
-        for (Path file : files) {
-            if (!Files.isRegularFile(file)) {
-                throw new Refusal(ExitStatus.INPUT_REFUSED, "there is no file " + file + " (fault: file-missing)");
-            }
-            rows.addAll(CheckRow.read(file.toString(), Files.readString(file)));
-        }
+        rows.addAll(named());
         Verification verification = new Verification(desk.methods());
         PrintWriter out = spec.commandLine().getOut();
+        HouseLibrary own = desk.house();
+        if (own != null) {
+            out.println("Check values of the house, folder " + own.name() + ":");
+        }
         List<CheckOutcome> outcomes = rows.stream().map(verification::run).toList();
         outcomes.forEach(outcome -> print(out, outcome));
         out.println();
-        out.printf("%-24s %-12s %6s %6s%n", "Method", "Kind", "Rows", "Met");
+        out.printf("%-24s %-22s %6s %6s%n", "Method", "Kind", "Rows", "Met");
         for (List<String> count : CheckOutcome.counts(outcomes)) {
-            out.printf("%-24s %-12s %6s %6s%n", count.toArray());
+            out.printf("%-24s %-22s %6s %6s%n", count.toArray());
+        }
+        if (review != null) {
+            tellUnverified(review, rows, out);
         }
         long met = outcomes.stream().filter(CheckOutcome::met).count();
         out.printf(Locale.ROOT, "%d rows, %d met, %d not met.%n", outcomes.size(), met, outcomes.size() - met);
         return met == outcomes.size() ? ExitStatus.DONE : ExitStatus.INPUT_REFUSED;
+    }
+
+    /** All the faults of the house, used or not. */
+    private static void requireSound(HouseReview review) {
+        List<TextFault> faults = List.copyOf(review.all());
+        if (!faults.isEmpty()) {
+            throw new TextException(faults);
+        }
+    }
+
+    /** The rows of the files named on the command line; the faults of all of them at once. */
+    private List<CheckRow> named() throws IOException {
+        List<CheckRow> rows = new ArrayList<>();
+        List<TextFault> faults = new ArrayList<>();
+        for (Path file : files) {
+            if (!Files.isRegularFile(file)) {
+                throw new Refusal(ExitStatus.INPUT_REFUSED, "there is no file " + file + " (fault: file-missing)");
+            }
+            try {
+                rows.addAll(CheckRow.read(file.toString(), StrictText.of(file.toString(), Files.readAllBytes(file))));
+            } catch (TextException e) {
+                faults.addAll(e.faults());
+            }
+        }
+        if (!faults.isEmpty()) {
+            throw new TextException(faults);
+        }
+        return rows;
+    }
+
+    private static void tellUnverified(HouseReview review, List<CheckRow> rows, PrintWriter out) {
+        for (String method : review.ownMethods()) {
+            if (rows.stream().noneMatch(row -> row.method().equals(method))) {
+                out.println(method + ": UNVERIFIED, the house has no check values for it");
+            }
+        }
     }
 
     private static void print(PrintWriter out, CheckOutcome outcome) {
@@ -81,6 +134,6 @@ final class VerifyCommand implements Callable<Integer> {
                 outcome.difference(),
                 row.tolerance(),
                 row.source(),
-                row.kind());
+                row.standing());
     }
 }

@@ -3,7 +3,9 @@ package nappe.figure;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
+import nappe.method.MethodException;
 import nappe.method.MethodSheet;
+import nappe.source.TextException;
 import nappe.source.TextLibrary;
 
 /** The figure files of a library, read when they are first asked for. */
@@ -26,7 +28,12 @@ public final class FigureLibrary {
     }
 
     private Optional<FigureSheet> read(MethodSheet method) {
-        String text = library.text("figures/" + method.name() + ".txt");
-        return text == null ? Optional.empty() : Optional.of(FigureReader.read(method, text));
+        String path = "figures/" + method.name() + ".txt";
+        try {
+            String text = library.text(path);
+            return text == null ? Optional.empty() : Optional.of(FigureReader.read(method, library.shown(path), text));
+        } catch (TextException e) {
+            throw new MethodException(e.faults());
+        }
     }
 }

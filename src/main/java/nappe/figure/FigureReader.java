@@ -12,11 +12,11 @@ import nappe.formula.FormulaException;
 import nappe.formula.FormulaParser;
 import nappe.method.Item;
 import nappe.method.MethodException;
-import nappe.method.MethodFault;
 import nappe.method.MethodSheet;
 import nappe.method.Statement;
 import nappe.results.Drawing.Pen;
 import nappe.results.Drawing.Side;
+import nappe.source.TextFault;
 import nappe.unit.Dimension;
 import nappe.unit.Unit;
 import org.jspecify.annotations.Nullable;
@@ -59,15 +59,13 @@ final class FigureReader {
     }
 
     /** @throws MethodException with all faults */
-    static FigureSheet read(MethodSheet method, String text) {
-        String file = "figures/" + method.name() + ".txt";
+    static FigureSheet read(MethodSheet method, String file, String text) {
         List<Statement> statements = Statement.of(file, text);
         if (statements.isEmpty()) {
-            throw new MethodException(
-                    List.of(new MethodFault(file, 1, 1, "there is no statement", "figure-empty", "")));
+            throw new MethodException(List.of(new TextFault(file, 1, 1, "there is no statement", "figure-empty", "")));
         }
         FigureReader reader = new FigureReader(method, statements.get(0));
-        List<MethodFault> faults = new ArrayList<>();
+        List<TextFault> faults = new ArrayList<>();
         for (Statement statement : statements) {
             reader.statement = statement;
             reader.base = 0;
@@ -80,7 +78,7 @@ final class FigureReader {
         if (!faults.isEmpty()) {
             throw new MethodException(faults);
         }
-        return new FigureSheet(reader.lets, reader.schematic, reader.views, reader.worded, reader.notes);
+        return new FigureSheet(reader.lets, reader.schematic, reader.views, reader.worded, reader.notes, text);
     }
 
     private void read() {

@@ -15,13 +15,15 @@ import org.jspecify.annotations.Nullable;
  * What one text says about the drawing of one kind of element: checked, and without numbers of a design.
  *
  * @param lets lengths of the drawing's own, in order, each resting on what stands above it
+ * @param text the text itself, for the fingerprint
  */
 public record FigureSheet(
         Map<String, Formula> lets,
         @Nullable Schematic schematic,
         List<View> views,
         List<Worded> worded,
-        List<String> notes) {
+        List<String> notes,
+        String text) {
     public FigureSheet {
         lets = java.util.Collections.unmodifiableMap(new LinkedHashMap<>(lets));
         views = List.copyOf(views);

@@ -26,12 +26,25 @@ import nappe.unit.Unit;
  * word, and so on, with one parser.
  */
 public final class FormulaParser {
+    /** Spreadsheets have a bound of this kind too; a formula that needs more is better read in several lines. */
+    private static final int DEEPEST = 60;
+
+    private static final int LONGEST = 2000;
+
     private final List<Token> tokens;
     private final Map<Formula, Integer> offsets = new IdentityHashMap<>();
     private int at;
+    private int depth;
 
     public FormulaParser(String text) {
         this.tokens = Tokens.of(text);
+        if (tokens.size() > LONGEST) {
+            throw new FormulaException(
+                    "a formula of more than " + LONGEST + " parts; write it in several lines",
+                    tokens.get(LONGEST).offset(),
+                    1,
+                    "formula-long");
+        }
     }
 
     /** A whole text as one formula. */
@@ -123,7 +136,10 @@ public final class FormulaParser {
 
     private Formula not() {
         int start = offset();
-        return passes("not") ? at(start, new Formula.Logic("not", List.of(not()))) : comparison();
+        goDeeper();
+        Formula read = passes("not") ? at(start, new Formula.Logic("not", List.of(not()))) : comparison();
+        depth--;
+        return read;
     }
 
     private Formula comparison() {
@@ -175,7 +191,21 @@ public final class FormulaParser {
 
     private Formula signed() {
         int start = offset();
-        return passes("-") ? at(start, new Formula.Negation(signed())) : power();
+        goDeeper();
+        Formula read = passes("-") ? at(start, new Formula.Negation(signed())) : power();
+        depth--;
+        return read;
+    }
+
+    private void goDeeper() {
+        depth++;
+        if (depth > 2 * DEEPEST) {
+            throw new FormulaException(
+                    "brackets or signs nested more than " + DEEPEST + " deep; write the formula in several lines",
+                    offset(),
+                    1,
+                    "formula-deep");
+        }
     }
 
     private Formula power() {

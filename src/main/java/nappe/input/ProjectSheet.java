@@ -170,7 +170,10 @@ final class ProjectSheet {
                 field,
                 "method-unknown",
                 Shown.quoted(method) + " is not a known method; "
-                        + (near == null ? "choose " + Entries.listed(methods.names()) : "did you mean " + near + "?"));
+                        + (near == null
+                                ? "choose " + Entries.listed(methods.names())
+                                        + "; a method of the house's own is known where --house names its folder"
+                                : "did you mean " + near + "?"));
         return "";
     }
 

@@ -39,7 +39,7 @@ public record CheckOutcome(CheckRow row, double computed, String words) {
         String unit = row.unit().text().equals("1") ? "" : " " + row.unit();
         return List.of(
                 row.id() + "  " + row.method() + ": " + row.entriesText(),
-                row.source() + " (" + row.kind() + ")",
+                row.source() + " (" + row.standing() + ")",
                 row.target(),
                 shown() + (words.isEmpty() ? unit : ""),
                 nappe.results.Digits.asTyped(row.expected()) + unit,
@@ -52,7 +52,7 @@ public record CheckOutcome(CheckRow row, double computed, String words) {
         Map<String, int[]> counts = new TreeMap<>();
         for (CheckOutcome outcome : outcomes) {
             int[] count = counts.computeIfAbsent(
-                    outcome.row().method() + "\t" + outcome.row().kind(), k -> new int[2]);
+                    outcome.row().method() + "\t" + outcome.row().standing(), k -> new int[2]);
             count[0]++;
             count[1] += outcome.met() ? 1 : 0;
         }

@@ -13,18 +13,27 @@ import nappe.station.Design;
 
 /**
  * The mark by which sheets, workbook and PDF are known to belong together: a hash of the typed values in a fixed order,
- * the texts of the methods and the version; not of any file's bytes.
+ * the texts of the methods with all they include, their tables and drawings, and the version; not of any file's bytes.
  */
 public final class Fingerprint {
     private final StringBuilder text = new StringBuilder();
 
     private Fingerprint() {}
 
-    /** Sixteen hexadecimal digits in groups of four. */
-    public static String of(Design design, Collection<MethodSheet> methods, String version) {
+    /**
+     * Sixteen hexadecimal digits in groups of four.
+     *
+     * @param drawings the texts of the figures, by the name of their method
+     */
+    public static String of(
+            Design design, Collection<MethodSheet> methods, Map<String, String> drawings, String version) {
         Fingerprint fingerprint = new Fingerprint();
         fingerprint.add("version", version);
-        methods.forEach(method -> fingerprint.add("method " + method.name(), method.text()));
+        methods.forEach(method -> {
+            fingerprint.add("method " + method.name(), method.text());
+            fingerprint.add("house", method.house());
+            fingerprint.add("figure", drawings.getOrDefault(method.name(), ""));
+        });
         fingerprint.add(design);
         return fingerprint.shown();
     }

@@ -1,5 +1,6 @@
 package nappe.job;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -18,7 +19,6 @@ import nappe.results.Figure;
 import nappe.results.Furniture;
 import nappe.results.Results;
 import nappe.solve.Evaluation;
-import nappe.source.BuiltInLibrary;
 import nappe.station.Design;
 import nappe.station.FoundFlows;
 import nappe.station.PackageLayout;
@@ -38,9 +38,9 @@ public final class Job {
     private final FigureLibrary drawings;
     private final String version;
 
-    /** With the built-in drawings of the devices. */
+    /** With the drawings that stand beside the method sheets. */
     public Job(MethodLibrary methods, String version) {
-        this(methods, new FigureLibrary(new BuiltInLibrary()), version);
+        this(methods, new FigureLibrary(methods.library()), version);
     }
 
     /** @param drawings the figure files beside the method sheets */
@@ -131,6 +131,8 @@ public final class Job {
 
     private Furniture furniture(Design design, Map<String, MethodSheet> used) {
         Design.Project p = design.project();
+        Map<String, String> drawn = new LinkedHashMap<>();
+        used.forEach((name, method) -> drawings.of(method).ifPresent(figure -> drawn.put(name, figure.text())));
         return new Furniture(
                 p.project(),
                 p.firm(),
@@ -140,7 +142,7 @@ public final class Job {
                 p.revision(),
                 p.date(),
                 p.status(),
-                Fingerprint.of(design, used.values(), version),
+                Fingerprint.of(design, used.values(), drawn, version),
                 version,
                 p.letterPaper(),
                 FOOT,
@@ -148,18 +150,42 @@ public final class Job {
     }
 
     private SoftwareStatement statement(Map<String, MethodSheet> used, List<CheckRow> checks) {
-        List<List<String>> texts = used.values().stream()
-                .map(method -> List.of(method.name(), Fingerprint.ofText(method.text())))
-                .toList();
         Verification verification = new Verification(methods);
         List<CheckOutcome> outcomes = checks.stream()
                 .filter(row -> used.containsKey(row.method()))
                 .map(verification::run)
                 .toList();
+        List<List<String>> texts = new ArrayList<>();
+        for (MethodSheet method : used.values()) {
+            texts.add(List.of(method.name(), Fingerprint.ofText(method.text()), standing(method, outcomes)));
+            drawings.of(method)
+                    .ifPresent(figure -> texts.add(
+                            List.of(method.name() + ", figure", Fingerprint.ofText(figure.text()), whose(method))));
+        }
         List<List<String>> rows = outcomes.stream().map(CheckOutcome::printed).toList();
         List<List<String>> off = used.keySet().stream()
                 .flatMap(method -> CheckRow.knownToBeOff(methods.library(), method).stream())
                 .toList();
         return new SoftwareStatement(version, texts, CheckOutcome.counts(outcomes), rows, off);
+    }
+
+    private static String whose(MethodSheet method) {
+        return method.house().isEmpty() ? "comes with Nappe" : "the house's own, folder " + method.house();
+    }
+
+    /** Whose a method is; for one of the house, what speaks for it. */
+    private static String standing(MethodSheet method, List<CheckOutcome> outcomes) {
+        if (method.house().isEmpty()) {
+            return whose(method);
+        }
+        List<CheckOutcome> own = outcomes.stream()
+                .filter(outcome -> outcome.row().method().equals(method.name()))
+                .toList();
+        long met = own.stream().filter(CheckOutcome::met).count();
+        return whose(method) + "; not verified by Nappe's check values; "
+                + (own.isEmpty()
+                        ? "UNVERIFIED: the house has no check values for it"
+                        : own.size() + (own.size() == 1 ? " check value" : " check values") + " of the house run, "
+                                + met + " met");
     }
 }

@@ -166,7 +166,7 @@ public final class Verification {
                 Map.Entry<Double, Unit> positive = quantity(negation.of());
                 return Map.entry(-positive.getKey(), positive.getValue());
             }
-            throw new CheckException("an entry is a number with its unit, or words in quotes");
+            throw new IllegalArgumentException("an entry is a number with its unit, or words in quotes");
         }
 
         private void table(CitedTable table) {

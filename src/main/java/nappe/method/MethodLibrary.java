@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
+import nappe.source.TextException;
 import nappe.source.TextLibrary;
 import org.jspecify.annotations.Nullable;
 
@@ -33,7 +34,7 @@ public final class MethodLibrary implements MethodCatalogue {
         List<String> known = names;
         if (known == null) {
             known = library.names("methods").stream()
-                    .filter(name -> name.endsWith(".txt") && startsWithMethod(name))
+                    .filter(name -> name.endsWith(".txt") && isMethod(name))
                     .map(name -> name.substring(0, name.length() - 4))
                     .toList();
             names = known;
@@ -41,14 +42,26 @@ public final class MethodLibrary implements MethodCatalogue {
         return known;
     }
 
-    private boolean startsWithMethod(String file) {
-        String text = library.text("methods/" + file);
-        return text != null
-                && text.lines()
-                        .filter(l -> !l.isBlank() && !l.startsWith("#"))
-                        .findFirst()
-                        .orElse("")
-                        .startsWith("method ");
+    /** A text that cannot be read counts as a method, so that whoever names it is told why. */
+    private boolean isMethod(String file) {
+        try {
+            return String.valueOf(library.text("methods/" + file))
+                    .lines()
+                    .filter(l -> !l.isBlank() && !l.startsWith("#"))
+                    .findFirst()
+                    .orElse("")
+                    .startsWith("method ");
+        } catch (TextException e) {
+            return true;
+        }
+    }
+
+    private String textOf(String file) {
+        try {
+            return String.valueOf(library.text("methods/" + file));
+        } catch (TextException e) {
+            return "";
+        }
     }
 
     @Override
@@ -56,9 +69,14 @@ public final class MethodLibrary implements MethodCatalogue {
         return names().contains(name);
     }
 
+    /** The title as the text has it; known even where the text has faults. */
     @Override
     public String title(String name) {
-        return sheet(name).title();
+        return Statement.of(name, textOf(name + ".txt")).stream()
+                .filter(statement -> statement.word().equals("method"))
+                .map(Statement::rest)
+                .findFirst()
+                .orElse("");
     }
 
     @Override

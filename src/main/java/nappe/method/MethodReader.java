@@ -2,7 +2,8 @@ package nappe.method;
 
 import java.util.Set;
 import nappe.formula.FormulaException;
-import nappe.source.TableException;
+import nappe.source.TextException;
+import nappe.source.TextFault;
 import nappe.source.TextLibrary;
 import nappe.unit.UnitException;
 import org.jspecify.annotations.Nullable;
@@ -25,26 +26,35 @@ public final class MethodReader {
      */
     public MethodSheet read(String name) {
         SheetDraft draft = new SheetDraft();
-        String text = library.text("methods/" + name + ".txt");
+        String path = "methods/" + name + ".txt";
+        String text = text(path);
         if (text == null) {
             throw new MethodException(java.util.List.of(
-                    new MethodFault(name + ".txt", 1, 1, "there is no such method sheet", "method-missing", "")));
+                    new TextFault(library.shown(path), 1, 1, "there is no such method sheet", "method-missing", "")));
         }
         readInto(draft, name, text, null, Set.of(name));
         if (draft.title.isEmpty()) {
-            draft.faults.add(new MethodFault(
-                    name + ".txt", 1, 1, "the first statement is \"method\" with a title", "title-missing", ""));
+            draft.faults.add(new TextFault(
+                    library.shown(path), 1, 1, "the first statement is \"method\" with a title", "title-missing", ""));
         }
         if (!draft.faults.isEmpty()) {
             throw new MethodException(draft.faults);
         }
-        return draft.finish(name);
+        return draft.finish(name, library.house(path));
+    }
+
+    private @Nullable String text(String path) {
+        try {
+            return library.text(path);
+        } catch (TextException e) {
+            throw new MethodException(e.faults());
+        }
     }
 
     /** Reads a text, or one that it includes, into the draft. */
     void readInto(SheetDraft draft, String name, String text, @Nullable String subscript, Set<String> open) {
         draft.text.append(text).append('\n');
-        for (Statement statement : Statement.of(name + ".txt", text)) {
+        for (Statement statement : Statement.of(library.shown("methods/" + name + ".txt"), text)) {
             StatementParts parts = new StatementParts(draft, statement, subscript);
             try {
                 new StatementReader(parts, this, library, open).read();
@@ -57,9 +67,9 @@ public final class MethodReader {
             } catch (UnitException e) {
                 parts.spoil();
                 draft.faults.add(statement.fault(parts.base(), String.valueOf(e.getMessage()), "unit-unknown"));
-            } catch (TableException e) {
+            } catch (TextException e) {
                 parts.spoil();
-                draft.faults.add(statement.fault(parts.base(), e.fault(), e.code()));
+                draft.faults.addAll(e.faults());
             }
         }
     }

@@ -10,6 +10,7 @@ import org.jspecify.annotations.Nullable;
 /**
  * What one text says about one kind of element: checked, and without numbers of a design.
  *
+ * @param house the name of the house whose own method it is; empty for one that comes with Nappe
  * @param about paragraphs on the method and the limits of its use
  * @param cautions printed on the sheets of the device
  * @param items in the order of the text
@@ -20,6 +21,7 @@ import org.jspecify.annotations.Nullable;
  */
 public record MethodSheet(
         String name,
+        String house,
         String title,
         List<String> about,
         List<String> cautions,

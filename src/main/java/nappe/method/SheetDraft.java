@@ -12,11 +12,12 @@ import nappe.formula.Formula;
 import nappe.formula.FormulaException;
 import nappe.source.CitedTable;
 import nappe.source.Publication;
+import nappe.source.TextFault;
 import org.jspecify.annotations.Nullable;
 
 /** A method sheet while it is being read: what is known so far, and the faults so far. */
 final class SheetDraft {
-    final List<MethodFault> faults = new ArrayList<>();
+    final List<TextFault> faults = new ArrayList<>();
     final List<String> about = new ArrayList<>();
     final List<String> cautions = new ArrayList<>();
     final Map<String, Publication> sources = new LinkedHashMap<>();
@@ -28,6 +29,9 @@ final class SheetDraft {
     final Map<String, Set<String>> reach = new LinkedHashMap<>();
     final StringBuilder text = new StringBuilder();
     String title = "";
+
+    /** Where an included text could not be had, what it would have defined is not known. */
+    boolean lacksText;
 
     @Nullable
     CitedTable openTable;
@@ -57,7 +61,7 @@ final class SheetDraft {
         if (outcome != null) {
             return outcome;
         }
-        throw broken.contains(symbol)
+        throw lacksText || broken.contains(symbol)
                 ? new FormulaException(symbol, 0, 1, FOLLOWS)
                 : new FormulaException(symbol + " is not defined above", 0, symbol.length(), "symbol-unknown");
     }
@@ -139,9 +143,10 @@ final class SheetDraft {
         return item instanceof Item.At at ? at.free() : item instanceof Item.Root root ? root.free() : null;
     }
 
-    MethodSheet finish(String name) {
+    MethodSheet finish(String name, String house) {
         return new MethodSheet(
                 name,
+                house,
                 title,
                 List.copyOf(about),
                 List.copyOf(cautions),

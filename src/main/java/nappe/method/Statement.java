@@ -2,6 +2,7 @@ package nappe.method;
 
 import java.util.ArrayList;
 import java.util.List;
+import nappe.source.TextFault;
 
 /**
  * One statement of a method sheet: a word, then fields separated by semicolons. Indented lines continue it; {@code #}
@@ -110,8 +111,8 @@ public final class Statement {
     }
 
     /** A fault at an offset of the statement's text. */
-    public MethodFault fault(int offset, String message, String code) {
+    public TextFault fault(int offset, String message, String code) {
         int i = Math.max(0, Math.min(offset, lines.length - 1));
-        return new MethodFault(file, lines[i] + 1, columns[i] + 1, message, code, sheet.get(lines[i]));
+        return new TextFault(file, lines[i] + 1, columns[i] + 1, message, code, sheet.get(lines[i]));
     }
 }

@@ -10,9 +10,11 @@ import nappe.formula.FormulaParser;
 import nappe.formula.Sign;
 import nappe.source.Citation;
 import nappe.source.Publication;
+import nappe.source.TextException;
 import nappe.source.TextLibrary;
 import nappe.unit.Dimension;
 import nappe.unit.Unit;
+import org.jspecify.annotations.Nullable;
 
 /** Reads one statement into the draft; says which method reads each statement word. */
 final class StatementReader {
@@ -98,7 +100,7 @@ final class StatementReader {
         if (words.length != 1 && !withSubscript) {
             throw parts.fault("write: include file, or: include file subscript s", "include-unclear");
         }
-        String included = library.text("methods/" + name + ".txt");
+        String included = text("methods/" + name + ".txt");
         if (included == null) {
             throw parts.fault("there is no text methods/" + name + ".txt to include", "include-missing");
         }
@@ -110,6 +112,16 @@ final class StatementReader {
         String inner =
                 withSubscript ? (parts.subscript == null ? words[2] : words[2] + parts.subscript) : parts.subscript;
         files.readInto(draft, name, included, inner, nowOpen);
+    }
+
+    /** A text that is there and cannot be read: no later fault of a symbol follows from that. */
+    private @Nullable String text(String path) {
+        try {
+            return library.text(path);
+        } catch (TextException e) {
+            draft.lacksText = true;
+            throw e;
+        }
     }
 
     private void requires() {

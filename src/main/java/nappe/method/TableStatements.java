@@ -79,14 +79,13 @@ final class TableStatements {
             throw parts.fault(name, SheetDraft.FOLLOWS);
         }
         draft.markBrokenTable(name);
-        String text = library.text("tables/" + name + ".csv");
-        if (text == null) {
+        CitedTable table = CitedTable.from(library, name);
+        if (table == null) {
             throw parts.fault("there is no table tables/" + name + ".csv", "table-missing");
         }
-        CitedTable table = CitedTable.read(name, text);
         draft.tables.put(name, table);
         draft.markReadTable(name);
-        draft.text.append(text).append('\n');
+        draft.text.append(library.text("tables/" + name + ".csv")).append('\n');
         return table;
     }
 }

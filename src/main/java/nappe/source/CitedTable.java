@@ -1,18 +1,9 @@
 package nappe.source;
 
-import java.io.IOException;
-import java.io.StringReader;
-import java.util.ArrayList;
 import java.util.List;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
 import nappe.formula.Sign;
 import nappe.formula.Value;
 import nappe.unit.Unit;
-import nappe.unit.UnitException;
-import org.apache.commons.csv.CSVFormat;
-import org.apache.commons.csv.CSVParser;
-import org.apache.commons.csv.CSVRecord;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -50,16 +41,16 @@ public final class CitedTable {
         }
     }
 
-    private static final Pattern HEAD = Pattern.compile("([A-Za-z][A-Za-z0-9_]*)(?: \\[(.+)])?");
-
     private final String name;
+    private final String house;
     private final String title;
     private final String source;
     private final List<String> remarks;
     private final List<Column> columns;
 
-    private CitedTable(String name, String title, String source, List<String> remarks, List<Column> columns) {
+    CitedTable(String name, String house, String title, String source, List<String> remarks, List<Column> columns) {
         this.name = name;
+        this.house = house;
         this.title = title;
         this.source = source;
         this.remarks = remarks;
@@ -69,6 +60,11 @@ public final class CitedTable {
     /** The file name without its ending: {@code kindsvater-carter}. */
     public String name() {
         return name;
+    }
+
+    /** The name of the house whose own table it is; empty for one that comes with Nappe. */
+    public String house() {
+        return house;
     }
 
     public String title() {
@@ -105,102 +101,22 @@ public final class CitedTable {
     }
 
     /**
-     * Reads a table.
+     * Reads a table that comes with Nappe.
      *
-     * @throws TableException with file and line, where it is not such a table
+     * @throws TextException with all faults by line and column, where it is not such a table
      */
     public static CitedTable read(String name, String text) {
-        String file = name + ".csv";
-        List<String> remarks = new ArrayList<>();
-        String title = "";
-        String source = "";
-        for (String line : text.lines().takeWhile(line -> line.startsWith("#")).toList()) {
-            String remark = line.substring(1).strip();
-            if (remark.startsWith("title:")) {
-                title = remark.substring(6).strip();
-            } else if (remark.startsWith("source:")) {
-                source = remark.substring(7).strip();
-            } else if (!remark.isEmpty()) {
-                remarks.add(remark);
-            }
-        }
-        if (title.isEmpty() || source.isEmpty()) {
-            throw new TableException(
-                    file + ":1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
-        }
-        return new CitedTable(name, title, source, List.copyOf(remarks), readColumns(file, text));
+        return TableReader.read(name, "", name + ".csv", text);
     }
 
-    private static List<Column> readColumns(String file, String text) {
-        CSVFormat format = CSVFormat.DEFAULT
-                .builder()
-                .setCommentMarker('#')
-                .setTrim(true)
-                .setIgnoreSurroundingSpaces(true)
-                .get();
-        try (CSVParser parser = format.parse(new StringReader(text))) {
-            List<Row> rows = new ArrayList<>();
-            for (CSVRecord row : parser) {
-                rows.add(new Row(row, parser.getCurrentLineNumber()));
-            }
-            if (rows.size() < 2) {
-                throw new TableException(file + ":1: the table has no rows (fault: table-empty)");
-            }
-            List<Column> columns = new ArrayList<>();
-            for (int i = 0; i < rows.get(0).fields().size(); i++) {
-                Column column = readColumn(file, rows, i);
-                if (columns.stream().anyMatch(c -> c.symbol().equals(column.symbol()))) {
-                    throw new TableException(file + ":" + rows.get(0).line() + ": there are two columns "
-                            + column.symbol() + " (fault: head-twice)");
-                }
-                columns.add(column);
-            }
-            return List.copyOf(columns);
-        } catch (IOException | java.io.UncheckedIOException e) {
-            throw new TableException(file + ": " + e.getMessage() + " (fault: table-unreadable)");
-        }
-    }
-
-    /** A row of the file with the line it ends on. */
-    private record Row(CSVRecord fields, long line) {}
-
-    private static Column readColumn(String file, List<Row> rows, int i) {
-        Row first = rows.get(0);
-        Matcher head = HEAD.matcher(first.fields().get(i));
-        if (!head.matches()) {
-            throw new TableException(file + ":" + first.line() + ": column head \""
-                    + first.fields().get(i)
-                    + "\" is not a symbol with its unit in brackets, such as h [m] (fault: head-unclear)");
-        }
-        Unit unit = unit(file, first.line(), head.group(2));
-        List<Value> values = new ArrayList<>();
-        for (Row row : rows.subList(1, rows.size())) {
-            if (row.fields().size() != first.fields().size()) {
-                throw new TableException(
-                        file + ":" + row.line() + ": " + row.fields().size() + " columns where the head has "
-                                + first.fields().size() + " (fault: row-length)");
-            }
-            String field = row.fields().get(i);
-            values.add(unit == null ? Value.word(field) : number(file, row.line(), field));
-        }
-        return new Column(head.group(1), unit, List.copyOf(values));
-    }
-
-    private static @Nullable Unit unit(String file, long line, @Nullable String text) {
-        try {
-            return text == null ? null : Unit.parse(text);
-        } catch (UnitException e) {
-            throw new TableException(file + ":" + line + ": " + e.getMessage() + " (fault: unit-unknown)");
-        }
-    }
-
-    private static Value number(String file, long line, String text) {
-        if (text.isEmpty()) {
-            return new Value.None(Value.NOT_GIVEN);
-        }
-        if (!text.matches("-?\\d+(\\.\\d+)?([eE][+-]?\\d+)?") || !Double.isFinite(Double.parseDouble(text))) {
-            throw new TableException(file + ":" + line + ": \"" + text + "\" is not a number (fault: number-expected)");
-        }
-        return Value.of(Double.parseDouble(text));
+    /**
+     * The table of a library, or null where it has none of the name.
+     *
+     * @throws TextException with all faults by line and column, where it is not such a table
+     */
+    public static @Nullable CitedTable from(TextLibrary library, String name) {
+        String path = "tables/" + name + ".csv";
+        String text = library.text(path);
+        return text == null ? null : TableReader.read(name, library.house(path), library.shown(path), text);
     }
 }

@@ -95,6 +95,7 @@ final class BackSheets {
     }
 
     void references(SheetDraft sheet, Collection<MethodSheet> methods) {
+        houseMethods(sheet, methods);
         TableDraft table = sheet.table(
                 "Publications cited by the methods",
                 List.of(
@@ -102,13 +103,19 @@ final class BackSheets {
                         new Block.Column("Publication", 90, Block.Align.LEFT),
                         new Block.Column("Standing", 26, Block.Align.LEFT)));
         Map<String, Publication> known = new LinkedHashMap<>();
-        methods.forEach(m -> m.sources().forEach(p -> known.putIfAbsent(p.key() + p.text(), p)));
-        for (Publication publication : known.values()) {
-            table.add(List.of(
-                    new Block.Text(publication.key()),
-                    new Block.Text(publication.text()),
-                    new Block.Text(publication.memory() ? "from memory, not confirmed" : "as cited")));
+        Map<String, String> citing = new LinkedHashMap<>();
+        for (MethodSheet method : methods) {
+            for (Publication publication : method.sources()) {
+                String key = publication.key() + publication.text();
+                known.putIfAbsent(key, publication);
+                citing.merge(key, method.house(), (a, b) -> a.isEmpty() || b.isEmpty() ? "" : a);
+            }
         }
+        known.forEach((key, publication) -> table.add(List.of(
+                new Block.Text(publication.key()),
+                new Block.Text(publication.text()),
+                new Block.Text((publication.memory() ? "from memory, not confirmed" : "as cited")
+                        + (citing.getOrDefault(key, "").isEmpty() ? "" : ", by a house method only")))));
         sheet.gap();
         TableDraft tables = sheet.table(
                 "Cited tables",
@@ -120,7 +127,12 @@ final class BackSheets {
         methods.forEach(m -> cited.putAll(m.tables()));
         cited.values()
                 .forEach(t -> tables.add(List.of(
-                        new Block.Text(t.title()), new Block.Text(t.source()), new Block.Text("see sheet Tables"))));
+                        new Block.Text(t.title()),
+                        new Block.Text(t.source()),
+                        new Block.Text(
+                                t.house().isEmpty()
+                                        ? "see sheet Tables"
+                                        : "house table, folder " + t.house() + "; see sheet Tables"))));
         sheet.gap();
         sheet.heading("References of the engineer");
         if (design.references().isEmpty()) {
@@ -129,11 +141,36 @@ final class BackSheets {
         design.references().forEach(sheet::note);
     }
 
+    /** Which methods are the house's own; nothing where all come with Nappe. */
+    private static void houseMethods(SheetDraft sheet, Collection<MethodSheet> methods) {
+        List<MethodSheet> own =
+                methods.stream().filter(m -> !m.house().isEmpty()).toList();
+        if (own.isEmpty()) {
+            return;
+        }
+        TableDraft table = sheet.table(
+                "House methods: written by the house, no part of Nappe",
+                List.of(
+                        new Block.Column("Method", 24, Block.Align.LEFT),
+                        new Block.Column("Title", 66, Block.Align.LEFT),
+                        new Block.Column("Standing", 36, Block.Align.LEFT)));
+        own.forEach(m -> table.add(List.of(
+                new Block.Text(m.name()),
+                new Block.Text(m.title()),
+                new Block.Text("house method, folder " + m.house()))));
+        sheet.gap();
+    }
+
     void software(SheetDraft sheet, SoftwareStatement statement) {
         sheet.note("Made by Nappe " + statement.version()
                 + ". Each formula is written once, as text in a method sheet; the number, the live"
                 + " formula in the workbook and the printed equation are readings of that text.");
-        texts(sheet, "Method sheets used", List.of("Method", "Hash of its text"), List.of(40, 30), statement.methods());
+        texts(
+                sheet,
+                "Texts of the methods used",
+                List.of("Method", "Hash of its text", "Whose it is"),
+                List.of(40, 20, 60),
+                statement.methods());
         texts(
                 sheet,
                 "Check values run for these methods when this package was made",

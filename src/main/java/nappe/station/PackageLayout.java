@@ -155,6 +155,7 @@ public final class PackageLayout {
                     element.tag() + " method",
                     element.tag() + "  Method and limits of use",
                     "what the method says, and where it holds");
+            houseMethod(methodSheet, method(element));
             method(element).about().forEach(methodSheet::note);
             methodSheet.heading("Cautions");
             method(element).cautions().forEach(methodSheet::caution);
@@ -290,6 +291,14 @@ public final class PackageLayout {
                 casesOf,
                 limits,
                 station.workedCase());
+    }
+
+    private static void houseMethod(SheetDraft sheet, MethodSheet method) {
+        if (!method.house().isEmpty()) {
+            sheet.caution(
+                    "House method " + method.name() + " of folder " + method.house()
+                            + ": written by the house, no part of Nappe. What check values speak for it stands on sheet Software.");
+        }
     }
 
     private boolean hasRemarks() {

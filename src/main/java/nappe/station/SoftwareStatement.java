@@ -5,7 +5,7 @@ import java.util.List;
 /**
  * What the package says of the program that made it.
  *
- * @param methods method name and the start of the hash of its text
+ * @param methods texts used: method name, the start of the hash of its text, and whose it is
  * @param counts check values by method and kind, in words
  * @param rows the check values: id, method and entries, target, computed, expected, tolerance,
  *     source, verdict

@@ -111,7 +111,8 @@ final class Sources {
 
     private Map<String, Run> lay(CitedTable table) {
         tables.heading(table.title());
-        tables.note("Source: " + table.source());
+        tables.note((table.house().isEmpty() ? "" : "House table, folder " + table.house() + ". ") + "Source: "
+                + table.source());
         table.remarks().forEach(tables::note);
         List<CitedTable.Column> narrow =
                 table.columns().stream().filter(c -> !isRemark(c)).toList();

@@ -15,7 +15,8 @@ class FigureReaderTest {
     private static final MethodSheet FLUME = new MethodLibrary(LIBRARY).sheet("parshall-flume");
 
     private static List<String> faults(String text) {
-        MethodException thrown = catchThrowableOfType(MethodException.class, () -> FigureReader.read(FLUME, text));
+        MethodException thrown = catchThrowableOfType(
+                MethodException.class, () -> FigureReader.read(FLUME, "figures/parshall-flume.txt", text));
         return thrown.faults().stream()
                 .map(f -> f.line() + ":" + f.column() + " " + f.message() + " (" + f.code() + ")")
                 .toList();

@@ -1,6 +1,7 @@
 package nappe.formula;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.catchThrowableOfType;
 
 import nappe.unit.Unit;
@@ -168,5 +169,24 @@ class FormulaParserTest {
 
     private static Formula feet(String digits) {
         return new Formula.Quantity(Double.parseDouble(digits), digits, Unit.parse("ft"));
+    }
+
+    @Test
+    void aFormulaThatIsTooDeepOrTooLongIsRefusedInWords() {
+        assertThat(FormulaParser.parse("(".repeat(59) + "1" + ")".repeat(59))).isEqualTo(FormulaParser.parse("1"));
+        for (String deep : new String[] {
+            "(".repeat(200_000) + "1" + ")".repeat(200_000),
+            "-".repeat(100_000) + "1",
+            "not ".repeat(300) + "a < b",
+            "(".repeat(300) + "1" + ")".repeat(300),
+            "-".repeat(300) + "1"
+        }) {
+            assertThatThrownBy(() -> FormulaParser.parse(deep))
+                    .isInstanceOf(FormulaException.class)
+                    .hasMessageContaining("write");
+        }
+        assertThatThrownBy(() -> FormulaParser.parse("1" + "+1".repeat(2000)))
+                .isInstanceOf(FormulaException.class)
+                .hasMessageContaining("more than 2000 parts");
     }
 }

@@ -18,9 +18,11 @@ class FingerprintTest {
     private static final MethodLibrary METHODS = new MethodLibrary(new BuiltInLibrary());
     private static final List<MethodSheet> USED =
             List.of(METHODS.sheet("rectangular-weir"), METHODS.sheet("parshall-flume"));
+    private static final Map<String, String> DRAWN =
+            Map.of("rectangular-weir", "view a\n", "parshall-flume", "view b\n");
     private static final Design DESIGN =
             Designs.weirBelowFlume(1.6, Designs.flowCase("Low", 0.01, 0.5), Designs.flowCase("High", 0.1, 0.6));
-    private static final String MARK = Fingerprint.of(DESIGN, USED, "0.1.0");
+    private static final String MARK = Fingerprint.of(DESIGN, USED, DRAWN, "0.1.0");
 
     @Test
     void itIsSixteenHexadecimalDigitsInGroupsOfFour() {
@@ -32,14 +34,14 @@ class FingerprintTest {
     void theSameDesignHasTheSameMark() {
         Design again =
                 Designs.weirBelowFlume(1.6, Designs.flowCase("Low", 0.01, 0.5), Designs.flowCase("High", 0.1, 0.6));
-        assertThat(Fingerprint.of(again, USED, "0.1.0")).isEqualTo(MARK);
+        assertThat(Fingerprint.of(again, USED, DRAWN, "0.1.0")).isEqualTo(MARK);
     }
 
     @Test
     void everyTypedValueChangesIt() {
         Map<String, Design> changed = Designs.changedInOneValue(DESIGN);
         Map<String, String> marks = new LinkedHashMap<>();
-        changed.forEach((what, design) -> marks.put(what, Fingerprint.of(design, USED, "0.1.0")));
+        changed.forEach((what, design) -> marks.put(what, Fingerprint.of(design, USED, DRAWN, "0.1.0")));
         assertThat(changed).hasSizeGreaterThan(60);
         assertThat(marks.values()).doesNotContain(MARK).doesNotHaveDuplicates();
     }
@@ -48,7 +50,7 @@ class FingerprintTest {
     void whereAValueWasTypedDoesNotChangeIt() {
         Design moved = Designs.design(
                 DESIGN.elements().stream().map(FingerprintTest::moved).toList(), DESIGN.cases());
-        assertThat(Fingerprint.of(moved, USED, "0.1.0")).isEqualTo(MARK);
+        assertThat(Fingerprint.of(moved, USED, DRAWN, "0.1.0")).isEqualTo(MARK);
     }
 
     @Test
@@ -62,7 +64,7 @@ class FingerprintTest {
                     return new Design.Element(e.tag(), e.title(), e.method(), typed);
                 })
                 .toList();
-        assertThat(Fingerprint.of(Designs.design(turned, DESIGN.cases()), USED, "0.1.0"))
+        assertThat(Fingerprint.of(Designs.design(turned, DESIGN.cases()), USED, DRAWN, "0.1.0"))
                 .isEqualTo(MARK);
     }
 
@@ -78,16 +80,28 @@ class FingerprintTest {
         assertThat(mark(text.replace("; curve", "; the curve"), "r [1],c [1]\n1,2\n2,3\n"))
                 .isNotEqualTo(plain);
         assertThat(mark(text, "r [1],c [1]\n1,2\n2,3.1\n")).isNotEqualTo(plain);
-        assertThat(Fingerprint.of(DESIGN, USED, "0.1.1")).isNotEqualTo(MARK);
+        assertThat(Fingerprint.of(DESIGN, USED, DRAWN, "0.1.1")).isNotEqualTo(MARK);
+    }
+
+    @Test
+    void aDrawingAndWhoseAMethodIsChangeIt() {
+        Map<String, String> other = Map.of("rectangular-weir", "view a\n", "parshall-flume", "view c\n");
+        assertThat(Fingerprint.of(DESIGN, USED, other, "0.1.0")).isNotEqualTo(MARK);
+        String text = "method Pretend\nentry r ; 1 ; key\n";
+        MethodSheet builtIn = new MethodReader(new Texts().method("pretend", text)).read("pretend");
+        MethodSheet house = new MethodReader(new Texts().ofHouse("our folder").method("pretend", text)).read("pretend");
+        assertThat(house.house()).isEqualTo("our folder");
+        assertThat(Fingerprint.of(DESIGN, List.of(house), DRAWN, "0.1.0"))
+                .isNotEqualTo(Fingerprint.of(DESIGN, List.of(builtIn), DRAWN, "0.1.0"));
     }
 
     private static String mark(String text, String table) {
         MethodSheet sheet = new MethodReader(new Texts().table("curve", table).method("pretend", text)).read("pretend");
-        return Fingerprint.of(DESIGN, List.of(sheet), "0.1.0");
+        return Fingerprint.of(DESIGN, List.of(sheet), DRAWN, "0.1.0");
     }
 
     private static String mark(Design design) {
-        return Fingerprint.of(design, USED, "0.1.0");
+        return Fingerprint.of(design, USED, DRAWN, "0.1.0");
     }
 
     private static Design named(String project, String firm) {

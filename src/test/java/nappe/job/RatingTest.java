@@ -95,6 +95,7 @@ class RatingTest {
                 "0 abs",
                 "this test",
                 "derived",
+                "",
                 "");
         CheckOutcome outcome = VERIFICATION.run(row, system);
         if (bench.value(cell) instanceof Value.Number number) {

@@ -163,6 +163,7 @@ class VerificationTest {
                 tolerance,
                 row.source(),
                 row.kind(),
-                row.note());
+                row.note(),
+                row.house());
     }
 }

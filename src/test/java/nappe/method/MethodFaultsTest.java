@@ -3,6 +3,7 @@ package nappe.method;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.catchThrowableOfType;
 
+import nappe.source.TextFault;
 import org.junit.jupiter.api.Test;
 
 /** Every fault of a method sheet, with line, column and mark; all at once, and none that only follows from another. */
@@ -196,9 +197,9 @@ class MethodFaultsTest {
                 pretend.txt:23:7: b1 is not defined above (fault: symbol-unknown)
                     table pretend-falling between b1
                           ^
-                pretend.txt:24:7: pretend-broken.csv:4: "x" is not a number (fault: number-expected)
-                    table pretend-broken between b1
-                          ^""");
+                pretend-broken.csv:4:5: "x" is not a number; write it like 2.5 or -1e-3, without a unit (fault: number-expected)
+                    0.4,x
+                        ^""");
     }
 
     @Test
@@ -225,9 +226,9 @@ class MethodFaultsTest {
                 pretend.txt:5:7: the first column of pretend-falling must rise from row to row, without blanks (fault: table-not-rising)
                     table pretend-falling between r ; A
                           ^
-                pretend.txt:7:7: pretend-broken.csv:4: "x" is not a number (fault: number-expected)
-                    table pretend-broken between r ; A
-                          ^
+                pretend-broken.csv:4:5: "x" is not a number; write it like 2.5 or -1e-3, without a unit (fault: number-expected)
+                    0.4,x
+                        ^
                 pretend.txt:9:8: pretend-curve.csv has no column q; it has r, c, e (fault: column-unknown)
                     column q ; 1 ; l
                            ^
@@ -540,7 +541,7 @@ class MethodFaultsTest {
                 catchThrowableOfType(MethodException.class, () -> new MethodReader(new Texts()).read("nothing"));
         assertThat(faults.faults())
                 .containsExactly(
-                        new MethodFault("nothing.txt", 1, 1, "there is no such method sheet", "method-missing", ""));
+                        new TextFault("nothing.txt", 1, 1, "there is no such method sheet", "method-missing", ""));
     }
 
     private static String faults(Texts texts) {

@@ -9,6 +9,18 @@ import org.jspecify.annotations.Nullable;
 /** A library of texts in memory: invented methods and tables for tests. */
 public final class Texts implements TextLibrary {
     private final Map<String, String> texts = new TreeMap<>();
+    private String house = "";
+
+    /** Makes all of it the own texts of a house. */
+    public Texts ofHouse(String name) {
+        this.house = name;
+        return this;
+    }
+
+    @Override
+    public String house(String path) {
+        return house;
+    }
 
     public Texts with(String path, String text) {
         texts.put(path, text);

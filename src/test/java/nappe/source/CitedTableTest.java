@@ -2,6 +2,7 @@ package nappe.source;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
+import static org.assertj.core.api.Assertions.catchThrowableOfType;
 
 import nappe.formula.Sign;
 import nappe.formula.Value;
@@ -65,69 +66,102 @@ class CitedTableTest {
     void aTableWithoutSourceIsRefused() {
         refused(
                 "# title: Pretend sizes\nC [1]\n1\n",
-                "pretend.csv:1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
+                "pretend.csv:1:1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
         refused(
                 "# title: Pretend sizes\n# source:\nC [1]\n1\n",
-                "pretend.csv:1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
-        refused("", "pretend.csv:1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
+                "pretend.csv:1:1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
+        refused(
+                "",
+                "pretend.csv:1:1: a cited table starts with \"# title:\" and \"# source:\" (fault: source-missing)");
     }
 
     @Test
     void aTableWithoutRowsIsRefused() {
-        refused(HEAD + "C [1]\n", "pretend.csv:1: the table has no rows (fault: table-empty)");
+        refused(HEAD + "C [1]\n", "pretend.csv:3:1: the table has no rows (fault: table-empty)");
     }
 
     @Test
     void aHeadThatIsNoSymbolWithItsUnitIsRefused() {
         refused(
                 HEAD + "size,C (1)\na,1\n",
-                "pretend.csv:3: column head \"C (1)\" is not a symbol with its unit in brackets, such as h [m] (fault: head-unclear)");
+                "pretend.csv:3:6: column head \"C (1)\" is not a symbol with its unit in brackets, such as h [m] (fault: head-unclear)");
         refused(
                 HEAD + "2nd,C [1]\na,1\n",
-                "pretend.csv:3: column head \"2nd\" is not a symbol with its unit in brackets, such as h [m] (fault: head-unclear)");
+                "pretend.csv:3:1: column head \"2nd\" is not a symbol with its unit in brackets, such as h [m] (fault: head-unclear)");
     }
 
     @Test
     void twoColumnsOfOneNameAreRefused() {
-        refused(HEAD + "C [1],C [mm]\n1,2\n", "pretend.csv:3: there are two columns C (fault: head-twice)");
+        refused(HEAD + "C [1],C [mm]\n1,2\n", "pretend.csv:3:7: there are two columns C (fault: head-twice)");
     }
 
     @Test
     void anUnknownUnitIsRefusedAtTheHead() {
-        refused(HEAD + "C [furlong]\n1\n", "pretend.csv:3: \"furlong\" is not a known unit (fault: unit-unknown)");
+        refused(HEAD + "C [furlong]\n1\n", "pretend.csv:3:4: \"furlong\" is not a known unit (fault: unit-unknown)");
     }
 
     @Test
     void aRowOfAnotherLengthIsRefused() {
-        refused(HEAD + "size,C [1]\na,1\nb\n", "pretend.csv:5: 1 columns where the head has 2 (fault: row-length)");
-        refused(HEAD + "size,C [1]\na,1,2\n", "pretend.csv:4: 3 columns where the head has 2 (fault: row-length)");
+        refused(
+                HEAD + "size,C [1]\na,1\nb\n",
+                "pretend.csv:5:2: 1 column where the head has 2; a field with a comma in it stands in quotation marks (fault: row-length)");
+        refused(
+                HEAD + "size,C [1]\na,1,2\n",
+                "pretend.csv:4:5: 3 columns where the head has 2; a field with a comma in it stands in quotation marks (fault: row-length)");
     }
 
     @Test
     void whatIsNoNumberIsRefusedAtItsLine() {
-        refused(HEAD + "C [1]\n1\n2,5\n", "pretend.csv:5: 2 columns where the head has 1 (fault: row-length)");
-        refused(HEAD + "C [1]\n1\n\"2,5\"\n", "pretend.csv:5: \"2,5\" is not a number (fault: number-expected)");
-        refused(HEAD + "C [1]\n.5\n", "pretend.csv:4: \".5\" is not a number (fault: number-expected)");
-        refused(HEAD + "C [1]\n1e999\n", "pretend.csv:4: \"1e999\" is not a number (fault: number-expected)");
+        refused(
+                HEAD + "C [1]\n1\n2,5\n",
+                "pretend.csv:5:3: 2 columns where the head has 1; a field with a comma in it stands in quotation marks (fault: row-length)");
+        refused(
+                HEAD + "C [1]\n1\n\"2,5\"\n",
+                "pretend.csv:5:2: \"2,5\" is not a number; write it like 2.5 or -1e-3, without a unit (fault: number-expected)");
+        refused(
+                HEAD + "C [1]\n.5\n",
+                "pretend.csv:4:1: \".5\" is not a number; write it like 2.5 or -1e-3, without a unit (fault: number-expected)");
+        refused(
+                HEAD + "C [1]\n1e999\n",
+                "pretend.csv:4:1: \"1e999\" is not a number; write it like 2.5 or -1e-3, without a unit (fault: number-expected)");
     }
 
     @Test
     void blankLinesAndRemarksBetweenRowsCountAsLines() {
-        refused(HEAD + "C [1]\n1\n\n# a remark\nx\n", "pretend.csv:7: \"x\" is not a number (fault: number-expected)");
+        refused(
+                HEAD + "C [1]\n1\n\n# a remark\nx\n",
+                "pretend.csv:7:1: \"x\" is not a number; write it like 2.5 or -1e-3, without a unit (fault: number-expected)");
+    }
+
+    @Test
+    void allFaultsAreToldAtOnceByLineAndColumn() {
+        String text = "# title: Pretend sizes\nsize,C [furlong],d (m),e [m]\na,1,2,\"2,5\"\nb,1\nc,x,,  1 m\n";
+        TextException thrown = catchThrowableOfType(TextException.class, () -> CitedTable.read("pretend", text));
+        assertThat(thrown.faults())
+                .extracting(fault -> fault.line() + ":" + fault.column() + " " + fault.code())
+                .containsExactly(
+                        "1:1 source-missing",
+                        "2:9 unit-unknown",
+                        "2:18 head-unclear",
+                        "3:8 number-expected",
+                        "4:4 row-length",
+                        "5:8 number-expected");
     }
 
     @Test
     void aFileThatIsNoCsvIsRefused() {
         assertThatThrownBy(() -> CitedTable.read("pretend", HEAD + "C [1]\n\"1\n"))
-                .isInstanceOf(TableException.class)
-                .hasMessageStartingWith("pretend.csv: ")
-                .hasMessageEndingWith(" (fault: table-unreadable)");
+                .isInstanceOf(TextException.class)
+                .hasMessageStartingWith(
+                        "pretend.csv:4:1: the quotation marks opened here are not closed on this line (fault: quote-open)");
     }
 
     private static void refused(String text, String message) {
         assertThatThrownBy(() -> CitedTable.read("pretend", text))
-                .isInstanceOf(TableException.class)
-                .hasMessage(message);
+                .isInstanceOf(TextException.class)
+                .satisfies(
+                        e -> assertThat(String.valueOf(e.getMessage()).lines().findFirst())
+                                .hasValue(message));
     }
 
     private static CitedTable.Column column(String symbol) {

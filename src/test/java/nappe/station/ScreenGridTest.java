@@ -141,6 +141,7 @@ class ScreenGridTest {
             Screen screen = new Screen("size", method.screen().targets(), fewer);
             MethodSheet broken = new MethodSheet(
                     method.name(),
+                    method.house(),
                     method.title(),
                     method.about(),
                     method.cautions(),
