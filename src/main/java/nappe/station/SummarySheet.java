@@ -69,7 +69,7 @@ final class SummarySheet {
         work.heading("Order of the limits in the summary");
         work.note(
                 "The order of a limit is the rank of its worst verdict (0 not met, 1 no result, 2 not given, 3 met, 4 does not apply) times"
-                        + " three, plus its tightest margin m as m/(1 + |m|), plus a millionth for each limit before it.");
+                        + " three, plus its tightest margin m as m/(1 + |m|) or 1 where it has none, plus a millionth for each limit before it.");
         TableDraft table = work.workbookTable("", workColumns(), limits.size());
         for (LimitResult limit : limits) {
             work(table, limit);
@@ -127,6 +127,7 @@ final class SummarySheet {
                     limit.forAll()
                             ? typed(table, 7, "all cases")
                             : live(table, 7, call(Function.INDEX, symbol("names"), worst), scope, false));
+            order = plus(order, number("1"));
         } else {
             scope.put("held", new Run(held));
             scope.put("margins", new Run(margins));

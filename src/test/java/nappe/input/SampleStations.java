@@ -324,7 +324,7 @@ public final class SampleStations {
                 .entry("A1", "m", 0, "1", drawing, "known")
                 .entry("A1", "z_f", 21.8, "m", drawing, "known")
                 .entry("A1", "L_c", 15, "m", drawing, "known")
-                .entry("A1", "S_0", 0.001, "1", drawing, "known")
+                .entry("A1", "S_0", 0.0005, "1", drawing, "known")
                 .entry("A1", "n", 0.014, "1", "Invented design brief MG-1, table 6: rendered walls", "assumed")
                 .entry("A1", "C_t", 0.1, "1", "Invented design brief MG-1, table 6", "assumed")
                 .entry("A1", "K", 0, "1", "no screen in the channel", "known")

@@ -29,6 +29,9 @@ final class Leaves {
         this.pictures = pictures;
     }
 
+    /** So many tables that stand in the workbook only are told one by one. */
+    private static final int FEW = 4;
+
     List<View.Leaf> leaves() {
         return results.sheets().stream().map(this::leaf).toList();
     }
@@ -45,7 +48,14 @@ final class Leaves {
             parts.add(new View.SealSpace());
         }
         List<Block.Heading> headings = new ArrayList<>();
+        List<Block.Table> elsewhere = new ArrayList<>();
         for (Block block : sheet.blocks()) {
+            if (block instanceof Block.WorkbookOnly only && headings.isEmpty()) {
+                elsewhere.add(only.table());
+                continue;
+            }
+            parts.addAll(elsewhere(sheet, elsewhere));
+            elsewhere.clear();
             if (block instanceof Block.Heading heading) {
                 headings.add(heading);
             } else if (!isSealSpace(sheet, block)) {
@@ -53,6 +63,7 @@ final class Leaves {
                 headings.clear();
             }
         }
+        parts.addAll(elsewhere(sheet, elsewhere));
         parts.addAll(under(headings, List.of()));
         String style = (wide ? "landscape" : "portrait") + (sheet.name().equals(COVER) ? " cover" : "");
         return new View.Leaf(Links.id(sheet.number()), sheet.number(), XmlText.safe(sheet.title()), style, parts);
@@ -70,7 +81,7 @@ final class Leaves {
             grids.addAll(new CasesGrids(results, lines).grids(width));
             return grids;
         } else if (block instanceof Block.WorkbookOnly elsewhere) {
-            return under(headings, List.of(elsewhere(sheet, elsewhere.table())));
+            return under(headings, elsewhere(sheet, List.of(elsewhere.table())));
         } else if (block instanceof Block.Note note) {
             return under(headings, note(note));
         } else if (block instanceof Block.Chart) {
@@ -106,16 +117,30 @@ final class Leaves {
         return paragraphs;
     }
 
-    private static View.Paragraph elsewhere(Sheet sheet, Block.Table table) {
-        int last = table.row() + 1 + table.rows().size();
-        String range = new Place(sheet.name(), table.row(), 0).address() + ":"
-                + new Place(sheet.name(), last, table.columns().size() - 1).address();
-        String title = table.title().isEmpty() ? "Rows" : table.title();
-        return new View.Paragraph(
-                "elsewhere",
-                View.Text.plain(
-                        "",
-                        title + ": " + table.rows().size() + " rows stand in the workbook only, sheet " + sheet.name()
-                                + ", cells " + range + "."));
+    /** Where tables of the workbook stand: each by its title, or many in one line. */
+    private static List<View.Part> elsewhere(Sheet sheet, List<Block.Table> tables) {
+        if (tables.size() > FEW) {
+            int rows = tables.stream().mapToInt(table -> table.rows().size()).sum();
+            Block.Table first = tables.get(0);
+            Block.Table last = tables.get(tables.size() - 1);
+            return List.of(elsewhere(tables.size() + " tables of " + rows
+                    + " rows in all stand in the workbook only, sheet " + sheet.name() + ", rows " + (first.row() + 1)
+                    + " to " + (last.row() + 2 + last.rows().size()) + ", each under its title: the first is \""
+                    + first.title() + "\", the last \"" + last.title() + "\"."));
+        }
+        List<View.Part> parts = new ArrayList<>();
+        for (Block.Table table : tables) {
+            int last = table.row() + 1 + table.rows().size();
+            String range = new Place(sheet.name(), table.row(), 0).address() + ":"
+                    + new Place(sheet.name(), last, table.columns().size() - 1).address();
+            String title = table.title().isEmpty() ? "Rows" : table.title();
+            parts.add(elsewhere(title + ": " + table.rows().size() + " rows stand in the workbook only, sheet "
+                    + sheet.name() + ", cells " + range + "."));
+        }
+        return parts;
+    }
+
+    private static View.Paragraph elsewhere(String text) {
+        return new View.Paragraph("elsewhere", View.Text.plain("", text));
     }
 }
