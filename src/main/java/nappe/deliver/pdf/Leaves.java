@@ -112,7 +112,7 @@ final class Leaves {
     private static List<View.Part> note(Block.Note note) {
         List<View.Part> paragraphs = new ArrayList<>();
         for (String line : note.text().split("\n")) {
-            paragraphs.add(new View.Paragraph(note.caution() ? "warn" : "note", View.Text.plain("", line)));
+            paragraphs.add(new View.Paragraph(note.caution() ? "warn" : "note", View.Text.of("", Labels.note(line))));
         }
         return paragraphs;
     }

@@ -160,11 +160,11 @@ final class TableGrid {
         if (item instanceof Block.Text words) {
             return column.head().toLowerCase(Locale.ROOT).endsWith("unit")
                     ? View.Text.of("whole", UnitPrint.named(words.text()))
-                    : View.Text.of("", List.of(Verdicts.weigh(words.text())));
+                    : words(words.text(), column);
         } else if (item instanceof Block.Symbol symbol) {
             return View.Text.of("whole", SymbolPrint.pieces(symbol.symbol()));
         } else if (item instanceof Block.Content content) {
-            return content(content.cell());
+            return content(content.cell(), column);
         } else if (item instanceof Block.Equation equation) {
             return View.Text.plain("formula", plain(equation.cell()));
         } else if (item instanceof Block.Address address) {
@@ -179,11 +179,17 @@ final class TableGrid {
         throw new IllegalArgumentException("unknown item " + item);
     }
 
-    private View.Text content(Cell cell) {
+    private View.Text words(String text, Block.Column column) {
+        return View.Text.of(
+                "",
+                Verdicts.isGrave(text) ? List.of(Verdicts.weigh(text)) : Labels.inColumn(results, column.head(), text));
+    }
+
+    private View.Text content(Cell cell, Block.Column column) {
         String value = Printed.value(results, cell);
         return Printed.isNumber(results, cell)
                 ? View.Text.of("whole", List.of(Piece.plain(value)))
-                : View.Text.of("", List.of(Verdicts.weigh(value)));
+                : words(value, column);
     }
 
     /** The symbol and the formula behind a live cell as plain text, to be measured and then drawn. */
