@@ -15,6 +15,9 @@ final class TableGrid {
     private static final double SIZE = 8.5;
     private static final double TIGHT = 7;
 
+    /** Words so short, like the name of a size or "found 12", stay on one line. */
+    private static final int SHORT = 10;
+
     private final Results results;
     private final Links links;
     private final Drawings drawings;
@@ -75,6 +78,8 @@ final class TableGrid {
         for (ColumnWidths widths : List.of(measured, tight)) {
             if (whole) {
                 widths.whole(column, characters + "00");
+            } else if (!head && characters.length() <= SHORT) {
+                widths.whole(column, characters);
             } else {
                 widths.text(column, characters, head);
             }
