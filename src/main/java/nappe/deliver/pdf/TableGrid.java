@@ -104,7 +104,8 @@ final class TableGrid {
         if (isCut()) {
             titles.add(View.Text.plain(
                     "small",
-                    "the row in use; all " + table.rows().size() + " rows stand in the workbook, rows " + firstRow()
+                    (texts.size() == 1 ? "the row in use; all " : "the " + texts.size() + " rows in use; all ")
+                            + table.rows().size() + " rows stand in the workbook, rows " + firstRow()
                             + " to " + (firstRow() + table.rows().size() - 1)));
         }
         double over = titles.stream()
