@@ -69,12 +69,13 @@ final class BarsPicture {
         double middle = top + ROW / 2;
         List<String> lines =
                 lines(bar.number() + "\u2002" + words(bar.tag()) + "  " + words(bar.label()), width * 0.4 - 4);
+        boolean typed = Labels.isTyped(results, words(bar.label()));
         for (int i = 0; i < lines.size(); i++) {
             double x = i == 0 ? 0 : 4;
             sketch.text(
                     new At(x, middle + 1 + (i - (lines.size() - 1) / 2.0) * 3.5),
                     SIZE,
-                    Labels.label(results, lines.get(i)));
+                    typed ? List.of(Piece.plain(lines.get(i))) : SymbolPrint.inText(lines.get(i)));
         }
         Value margin = results.value(bar.margin());
         String verdict = words(bar.verdict());

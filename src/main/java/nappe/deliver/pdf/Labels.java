@@ -35,7 +35,8 @@ final class Labels {
         return TYPED_NOTES.stream().anyMatch(text::startsWith) ? List.of(Piece.plain(text)) : SymbolPrint.inText(text);
     }
 
-    private static boolean isTyped(Results results, String text) {
+    /** Whether the name of a limit is what the engineer wrote of a demand. */
+    static boolean isTyped(Results results, String text) {
         return results.sheets().stream()
                 .flatMap(sheet -> sheet.blocks().stream())
                 .filter(Block.Table.class::isInstance)
