@@ -79,7 +79,8 @@ class ScreenGridTest {
                 headworks(WorkingSystem.US),
                 headworks(WorkingSystem.SI),
                 sized(headworks(WorkingSystem.US), "0.6 m"),
-                sized(headworks(WorkingSystem.SI), "50 ft"));
+                sized(headworks(WorkingSystem.SI), "50 ft"),
+                InputReader.read(Path.of("sample-inputs", "inlet-works.xlsx"), METHODS));
     }
 
     /** Typing another size into the cells of one layout is the same as laying out anew with it: in every cell. */
@@ -154,7 +155,8 @@ class ScreenGridTest {
                     method.tables(),
                     method.reach(),
                     method.text());
-            Map<String, MethodSheet> methods = Map.of("parshall-flume", broken);
+            Map<String, MethodSheet> methods = methods(design);
+            methods.put("parshall-flume", broken);
             assertThat(apart(design, methods, Laid.of(design, methods)))
                     .as("without " + forgotten.outputs())
                     .isNotEmpty();
