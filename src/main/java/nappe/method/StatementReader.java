@@ -28,6 +28,9 @@ final class StatementReader {
             "rapid depth",
             "head at the gauge",
             "state of flow",
+            "measurement",
+            "reason",
+            "standing of the level",
             "control width");
 
     private final StatementParts parts;

@@ -117,6 +117,10 @@ public final class PackageLayout {
         SheetDraft cover = draft("Cover", "Cover", "what this calculation is for, status, approvals, cautions");
         SheetDraft index = draft(
                 "Index", "Index, requirements and revisions", "this list; requirements and where they are answered");
+        SheetDraft overviewSheet = draft(
+                "Overview",
+                "Overview of the cases",
+                "for each case: what is measured, how high the water stands, which limit governs");
         SheetDraft limitSheet =
                 draft("Limits", "Summary of limits", "every limit in its worst case, and in every case");
         SheetDraft foundDraft = draft(
@@ -253,6 +257,7 @@ public final class PackageLayout {
                         caseNames,
                         station.cases().judgedNames())
                 .lay(limits);
+        new OverviewSheet(design, station, overviewSheet).lay(trialSheet);
         if (combinationSheet != null) {
             new CombinationsSheet(design, station, combinationSheet).lay(trialSheet);
         }

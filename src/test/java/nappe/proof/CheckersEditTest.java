@@ -33,10 +33,15 @@ class CheckersEditTest {
     Path folder;
 
     private static final Map<String, List<Typing>> FLUME = new LinkedHashMap<>();
+    private static final Map<String, List<Typing>> INLET = new LinkedHashMap<>();
     private static final Map<String, List<Typing>> WEIR = new LinkedHashMap<>();
 
     private static void flume(String what, Typing... typings) {
         FLUME.put(what, Arrays.asList(typings));
+    }
+
+    private static void inlet(String what, Typing... typings) {
+        INLET.put(what, Arrays.asList(typings));
     }
 
     private static void weir(String what, Typing... typings) {
@@ -80,6 +85,21 @@ class CheckersEditTest {
                 new Head(0, "F1", 0.2),
                 new Head(1, "F1", 9),
                 new Demand(1, 5));
+
+        inlet("channel wider and steeper", new Entry("A1", "b", 2.1), new Entry("A1", "S_0", 0.004));
+        inlet("channel so shallow that flow is critical", new Entry("A1", "z_f", 22.4));
+        inlet(
+                "sloping sides, a screen, walls too low",
+                new Entry("A1", "m", 1.5),
+                new Entry("A1", "K", 3),
+                new Entry("A1", "z_w", 22.4));
+        inlet("inflow with a jump", new Entry("A1", "inflow", "rapid, with a jump"));
+        inlet("one channel for all", new Entry("A1", "serves", "all units"), new Units(3, 2));
+        inlet("submerged readings refused", new Entry("F1", "submerged", "refused"));
+        inlet("crest lower: submerged by the curve", new Entry("F1", "z_f", 21.5));
+        inlet("a level typed where the curve served", new Level(0, 22.1));
+        inlet("flow beyond the curve", new Flow(6, 1.3));
+        inlet("demand in one case", new Demand(2, 0.2));
 
         weir("notch wider", new Entry("W1", "b", 850));
         weir("notch as wide as the channel", new Entry("W1", "b", 1100));
@@ -180,6 +200,11 @@ class CheckersEditTest {
     }
 
     @Test
+    void editsOfTheInletGiveWhatIssuingAnewGives() throws IOException {
+        proven("inlet-works.xlsx", INLET, 5);
+    }
+
+    @Test
     void editsOfTheWeirGiveWhatIssuingAnewGives() throws IOException {
         proven("return-weir.xlsx", WEIR, 5);
     }
@@ -205,10 +230,11 @@ class CheckersEditTest {
     /** What may be typed over in the issued workbook is what these edits type over: numbers and choices. */
     @Test
     void wordsThatAreUnlockedAreChoices() {
-        for (String sample : List.of("headworks.xlsx", "return-weir.xlsx")) {
+        for (String sample : List.of("headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx")) {
             assertThat(Package.ofSample(sample).results().cells())
                     .filteredOn(c -> c.kind() == Cell.Kind.ENTRY && c.typed() instanceof Value.Word)
-                    .allMatch(c -> List.of("size", "form", "submerged").contains(c.symbol()));
+                    .allMatch(c -> List.of("size", "form", "submerged", "serves", "inflow")
+                            .contains(c.symbol()));
         }
     }
 

@@ -46,7 +46,7 @@ class StrangerTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
     void everyValueStandsOnItsSheetAsOftenAsItIsDue(String name) throws IOException {
         Package sample = Package.ofSample(name);
         List<String> pages = pages(name);
@@ -110,7 +110,7 @@ class StrangerTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
     void everyPageHasTheWholeCautionsTheRevisionAndItsSheet(String name) throws IOException {
         Package sample = Package.ofSample(name);
         Furniture furniture = sample.results().furniture();
@@ -146,7 +146,7 @@ class StrangerTest {
 
     /** All words, those of equations too: the setting leaves even sub- and superscripts clear of one another. */
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
     void noWordStandsInAMarginOrOnAnother(String name) throws IOException {
         PdfBoxes boxes = PdfBoxes.of(Issued.of(name).pdf(), folder);
         assertThat(boxes.pages())
@@ -157,7 +157,7 @@ class StrangerTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
     void noPageEndsWithAHeading(String name) throws IOException {
         Set<String> headings = new HashSet<>();
         for (Sheet sheet : Package.ofSample(name).results().sheets()) {
