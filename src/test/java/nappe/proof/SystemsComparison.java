@@ -9,9 +9,13 @@ import java.util.Set;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.calculation.Sheet;
+import nappe.formula.Formula;
+import nappe.formula.Function;
+import nappe.formula.Operator;
 import nappe.formula.Value;
 import nappe.results.Results;
 import nappe.unit.Dimension;
+import nappe.unit.Unit;
 
 /**
  * One design worked in two systems of units, compared result by result: numbers in SI, words as they are. Numbers agree
@@ -19,10 +23,18 @@ import nappe.unit.Dimension;
  * dimension, for the reason told in {@link Comparison}.
  *
  * <p>All tables and lines are compared place by place, except the conversion factors, which only one of the systems
- * needs, and the trials, which are steps on the way to what the lines hold.
+ * needs, the trials, which are steps on the way to what the lines hold, and the ranks of the limits.
  */
 final class SystemsComparison {
     private static final Set<String> LEFT_OUT = Set.of("Constants", "Trials");
+
+    /**
+     * What takes the least of unlike margins: those of demanded lengths count feet in one system and metres in the other, so
+     * that the order of the limits is the system's own. What is ordered is compared elsewhere, on the lines.
+     */
+    private static final Set<String> RANKED = Set.of("Cover", "Limits");
+
+    private static final String GOVERNING = "Governing limit";
 
     /** A result with its name: element, symbol and case, or the cell where it has no such name. */
     private record Named(String name, Cell cell) {}
@@ -74,13 +86,34 @@ final class SystemsComparison {
     private void largest(Results results) {
         for (Cell cell : results.cells()) {
             if (results.value(cell) instanceof Value.Number number) {
-                largest.merge(cell.unit().dimension(), Math.abs(inSi(cell, number)), Math::max);
+                largest.merge(unit(cell).dimension(), Math.abs(inSi(cell, number)), Math::max);
             }
         }
     }
 
     private static double inSi(Cell cell, Value.Number number) {
-        return number.value() * cell.unit().sizeInSi() + cell.unit().zeroInSi();
+        return number.value() * unit(cell).sizeInSi() + unit(cell).zeroInSi();
+    }
+
+    /** The unit of a number; that of the margin of a demanded length is the one it counts, though the cell holds a pure number. */
+    private static Unit unit(Cell cell) {
+        Formula formula = cell.formula();
+        if (cell.unit().dimension().isNone()) {
+            if (formula instanceof Formula.Symbol same && cell.references().get(same.name()) instanceof Cell shown) {
+                return unit(shown);
+            }
+            if (formula instanceof Formula.Call chosen && chosen.function() == Function.IF) {
+                formula = chosen.arguments().get(1);
+            }
+            if (formula instanceof Formula.Operation over
+                    && over.operator() == Operator.OVER
+                    && over.right() instanceof Formula.Quantity one
+                    && over.left() instanceof Formula.Symbol left
+                    && left.name().equals("left")) {
+                return one.unit();
+            }
+        }
+        return cell.unit();
     }
 
     private void sheets() {
@@ -90,7 +123,7 @@ final class SystemsComparison {
         }
         for (int i = 0; i < here.sheets().size(); i++) {
             Sheet one = here.sheets().get(i);
-            if (!LEFT_OUT.contains(one.name())) {
+            if (!LEFT_OUT.contains(one.name()) && !RANKED.contains(one.name())) {
                 compare(one.name(), named(one), named(there.sheets().get(i)));
             }
         }
@@ -111,7 +144,7 @@ final class SystemsComparison {
         Value a = here.value(ours.cell());
         Value b = there.value(theirs.cell());
         boolean alike = ours.name().equals(theirs.name())
-                && ours.cell().unit().dimension().equals(theirs.cell().unit().dimension());
+                && unit(ours.cell()).dimension().equals(unit(theirs.cell()).dimension());
         if (alike && a instanceof Value.Number one && b instanceof Value.Number other) {
             numbers++;
             alike = agree(ours.cell(), inSi(ours.cell(), one), inSi(theirs.cell(), other));
@@ -128,7 +161,7 @@ final class SystemsComparison {
     private boolean agree(Cell cell, double one, double other) {
         double apart = Math.abs(one - other);
         double size = Math.max(Math.abs(one), Math.abs(other));
-        double floor = Comparison.FLOOR * largest.getOrDefault(cell.unit().dimension(), 0.0);
+        double floor = Comparison.FLOOR * largest.getOrDefault(unit(cell).dimension(), 0.0);
         if (size > floor / Comparison.RELATIVE) {
             worst = Math.max(worst, apart / size);
         }
@@ -137,7 +170,7 @@ final class SystemsComparison {
 
     private static String shown(Named named, Value value) {
         return value instanceof Value.Number number
-                ? number.value() + " " + named.cell().unit()
+                ? number.value() + " " + unit(named.cell())
                 : value instanceof Value.Word word ? "\"" + word.text() + "\"" : ((Value.None) value).why();
     }
 
@@ -162,12 +195,19 @@ final class SystemsComparison {
                     ? table.title() + ", " + text(row.items().get(1)) + " "
                             + text(row.items().get(2)) + ", " + text(row.items().get(4))
                     : "";
-            for (Block.Item item : row.items()) {
-                if (item instanceof Block.Content content) {
+            for (int i = 0; i < row.items().size(); i++) {
+                if (row.items().get(i) instanceof Block.Content content && !isRanked(table, i)) {
                     all.add(new Named(isRegister ? name : content.cell().place().full(), content.cell()));
                 }
             }
         }
+    }
+
+    /** The governing limit of a case and its margin. */
+    private static boolean isRanked(Block.Table table, int column) {
+        List<String> heads = table.columns().stream().map(Block.Column::head).toList();
+        return heads.contains(GOVERNING)
+                && (heads.get(column).equals(GOVERNING) || heads.get(column).equals("Margin"));
     }
 
     private static String text(Block.Item item) {
