@@ -50,6 +50,11 @@ public final class SampleStations {
         }
     }
 
+    /** A blank for one element, to be filled in. */
+    public static Filler blank(WorkingSystem system, String tag, String method) throws IOException {
+        return filler(system, new Chosen(tag, method));
+    }
+
     private static Filler filler(WorkingSystem system, Chosen... elements) throws IOException {
         return new Filler(BlankWriter.bytes(system, List.of(elements), METHODS));
     }
