@@ -26,7 +26,12 @@ public final class ElementSheet {
 
     /** A limit with its verdicts: one for all cases, or one per case. */
     public record LimitResult(
-            String tag, String label, String source, List<@Nullable Cell> margins, List<Cell> verdicts) {
+            String tag,
+            String label,
+            String source,
+            Limit.Kind kind,
+            List<@Nullable Cell> margins,
+            List<Cell> verdicts) {
         public boolean forAll() {
             return verdicts.size() == 1;
         }
@@ -34,7 +39,7 @@ public final class ElementSheet {
         /** The same for the first columns only. */
         public LimitResult first(int columnCount) {
             int count = Math.min(columnCount, verdicts.size());
-            return new LimitResult(tag, label, source, margins.subList(0, count), verdicts.subList(0, count));
+            return new LimitResult(tag, label, source, kind, margins.subList(0, count), verdicts.subList(0, count));
         }
     }
 
@@ -113,15 +118,28 @@ public final class ElementSheet {
         heading("Limits");
         LimitRows limitRows = new LimitRows(items.cells());
         for (Limit limit : method.limits()) {
-            limit(limitRows, limit, Map.of(), List.of());
+            if (limit.kind() != Limit.Kind.THRESHOLD) {
+                limit(limitRows, limit, Map.of(), List.of());
+            }
         }
         closings(limitRows);
         if (!demands.isEmpty()) {
             heading("Limits demanded by others");
             demands.forEach(demand -> limit(limitRows, demand.limit(), demand.cells(), demand.caseNames()));
         }
+        thresholds(limitRows);
         sheet.lines(columns, workedCase, lines);
         return List.copyOf(limits);
+    }
+
+    private void thresholds(LimitRows limitRows) {
+        List<Limit> thresholds = method.limits().stream()
+                .filter(limit -> limit.kind() == Limit.Kind.THRESHOLD)
+                .toList();
+        if (!thresholds.isEmpty()) {
+            heading("Thresholds: searched for, not judged");
+            thresholds.forEach(limit -> limit(limitRows, limit, Map.of(), List.of()));
+        }
     }
 
     /** A line over the cases stands once; it knows what it sums up as the run of the judged cases. */
@@ -258,7 +276,7 @@ public final class ElementSheet {
                     judged.add(limitRows.lay(limit, inner, strip));
                 },
                 true);
-        keep(limit.label(), limit.source(), judged);
+        keep(limit.label(), limit.source(), limit.kind(), judged);
     }
 
     private void closings(LimitRows limitRows) {
@@ -291,17 +309,22 @@ public final class ElementSheet {
                     (at, strip) ->
                             judged.add(limitRows.closing(byCase.get(next[0]++).get(place), at, strip)),
                     true);
-            keep("the trials for " + root.symbol() + " have closed" + (k == 0 ? "" : " (" + (k + 1) + ")"), "", judged);
+            keep(
+                    "the trials for " + root.symbol() + " have closed" + (k == 0 ? "" : " (" + (k + 1) + ")"),
+                    "",
+                    Limit.Kind.LAYOUT,
+                    judged);
         }
     }
 
-    private void keep(String label, String source, List<LimitRows.Judged> judged) {
+    private void keep(String label, String source, Limit.Kind kind, List<LimitRows.Judged> judged) {
         List<@Nullable Cell> margins = new ArrayList<>();
         judged.forEach(j -> margins.add(j.margin()));
         limits.add(new LimitResult(
                 tag,
                 label,
                 source,
+                kind,
                 margins,
                 judged.stream().map(LimitRows.Judged::verdict).toList()));
     }

@@ -96,7 +96,7 @@ final class LimitRows {
                 word(MET),
                 iff(
                         compare(closing, Comparator.EQUAL, word("not given")),
-                        word("not given"),
+                        word(DOES_NOT_APPLY),
                         iff(
                                 compare(closing, Comparator.EQUAL, word("no result")),
                                 word("no result"),

@@ -20,6 +20,7 @@ import nappe.results.Drawing;
 import nappe.unit.Dimension;
 import nappe.unit.Unit;
 import nappe.unit.WorkingSystem;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Draws a figure for one case: coordinates as numbers in the working unit. A part without a number is left out, and the
@@ -64,20 +65,22 @@ public final class Drafting {
 
     private Drawing draw(String caseName) {
         figure.lets().forEach((name, formula) -> lets.put(name, value(formula)));
-        FigureSheet.Schematic schematic = figure.schematic();
-        boolean isSchematic = schematic != null && reading().holds(schematic.when());
         List<Drawing.View> views = new ArrayList<>();
         for (FigureSheet.View view : figure.views()) {
             List<Drawing.Part> parts = new ArrayList<>();
             view.parts().forEach(placed -> placed(placed).ifPresent(parts::add));
-            views.add(new Drawing.View(view.title(), parts));
+            views.add(new Drawing.View(view.title(), why(view.schematic()), parts));
         }
         return new Drawing(
                 "Geometry and levels, case " + caseName,
                 system.coherentUnit(Dimension.LENGTH),
-                isSchematic && schematic != null ? schematic.why() : "",
+                why(figure.schematic()),
                 views,
                 notes());
+    }
+
+    private String why(FigureSheet.@Nullable Schematic schematic) {
+        return schematic != null && reading().holds(schematic.when()) ? schematic.why() : "";
     }
 
     private Optional<Drawing.Part> placed(FigureSheet.Placed placed) {
@@ -217,7 +220,12 @@ public final class Drafting {
         byWords.forEach(
                 (words, symbols) -> notes.add("Not drawn, since there is " + why(words) + ": " + named(symbols) + "."));
         notes.addAll(said);
-        notes.addAll(figure.notes());
+        for (FigureSheet.Note note : figure.notes()) {
+            Formula when = note.when();
+            if (when == null || reading().holds(when)) {
+                notes.add(note.text());
+            }
+        }
         return notes;
     }
 

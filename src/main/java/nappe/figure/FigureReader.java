@@ -25,7 +25,7 @@ import org.jspecify.annotations.Nullable;
  * Reads the text form of a figure, one statement a row as in method sheets:
  *
  * <pre>
- * schematic when CONDITION ; why it is not to scale
+ * schematic when CONDITION ; why it is not to scale    of the whole drawing, or below a view of that view
  * let       x = formula
  * view      title
  * wall      x, y ; x, y ; ...            line, hidden, axis, floor: other pens; outline: closed
@@ -36,7 +36,7 @@ import org.jspecify.annotations.Nullable;
  * label     x, y ; words
  * flow      x, y ; x, y
  * words     symbol ; words
- * note      text
+ * note      text                                      note when CONDITION ; text: only where it holds
  * </pre>
  *
  * Any part of a view may end in {@code ; when CONDITION ; words}: where the condition does not hold it is left out, and the
@@ -48,7 +48,7 @@ final class FigureReader {
     private final Map<String, DimensionReading.Outcome> known = new HashMap<>();
     private final List<FigureSheet.View> views = new ArrayList<>();
     private final List<FigureSheet.Worded> worded = new ArrayList<>();
-    private final List<String> notes = new ArrayList<>();
+    private final List<FigureSheet.Note> notes = new ArrayList<>();
     private FigureSheet.@Nullable Schematic schematic;
     private Statement statement;
     private int base;
@@ -85,7 +85,7 @@ final class FigureReader {
         switch (statement.word()) {
             case "let" -> let();
             case "schematic" -> schematic();
-            case "view" -> views.add(new FigureSheet.View(text(0), new ArrayList<>()));
+            case "view" -> views.add(new FigureSheet.View(text(0), null, new ArrayList<>()));
             case "wall" -> add(new FigureSheet.Path(Pen.WALL, false, points(0, own())));
             case "outline" -> add(new FigureSheet.Path(Pen.WALL, true, points(0, own())));
             case "line" -> add(new FigureSheet.Path(Pen.LINE, false, points(0, own())));
@@ -101,7 +101,7 @@ final class FigureReader {
             case "label" -> add(new FigureSheet.Label(points(0, 1), text(1)));
             case "flow" -> add(new FigureSheet.Flow(points(0, 2)));
             case "words" -> words();
-            case "note" -> notes.add(statement.rest());
+            case "note" -> note();
             default ->
                 throw new FormulaException(
                         "\"" + statement.word() + "\" is not a statement word of a figure",
@@ -156,7 +156,34 @@ final class FigureReader {
         Formula when = parser.condition();
         parser.end();
         dimensions(parser).condition(when);
-        schematic = new FigureSheet.Schematic(when, text(1));
+        FigureSheet.Schematic read = new FigureSheet.Schematic(when, text(1));
+        if (views.isEmpty()) {
+            schematic = read;
+        } else {
+            FigureSheet.View last = views.remove(views.size() - 1);
+            views.add(new FigureSheet.View(last.title(), read, last.parts()));
+        }
+    }
+
+    /** What stands after the first semicolon: a sentence may hold further ones. */
+    private static String afterFirst(String rest) {
+        return rest.substring(rest.indexOf(';') + 1).strip();
+    }
+
+    private void note() {
+        if (!text(0).startsWith("when ")) {
+            notes.add(new FigureSheet.Note(null, statement.rest()));
+            return;
+        }
+        FormulaParser parser = parser(0);
+        parser.expect("when");
+        Formula when = parser.condition();
+        parser.end();
+        dimensions(parser).condition(when);
+        if (text(1).isEmpty()) {
+            throw new FormulaException("a note needs its sentence", parser.offset(), 1, "note-empty");
+        }
+        notes.add(new FigureSheet.Note(when, afterFirst(statement.rest())));
     }
 
     private void words() {

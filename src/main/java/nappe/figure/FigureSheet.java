@@ -22,7 +22,7 @@ public record FigureSheet(
         @Nullable Schematic schematic,
         List<View> views,
         List<Worded> worded,
-        List<String> notes,
+        List<Note> notes,
         String text) {
     public FigureSheet {
         lets = java.util.Collections.unmodifiableMap(new LinkedHashMap<>(lets));
@@ -37,7 +37,15 @@ public record FigureSheet(
     /** A result in words that is printed below the drawing. */
     public record Worded(String symbol, String words) {}
 
-    public record View(String title, List<Placed> parts) {}
+    /**
+     * A sentence below the drawing.
+     *
+     * @param when null for always
+     */
+    public record Note(@Nullable Formula when, String text) {}
+
+    /** @param schematic where this view alone is not to scale; null for nowhere */
+    public record View(String title, @Nullable Schematic schematic, List<Placed> parts) {}
 
     /**
      * A part, and where it is drawn at all.

@@ -71,7 +71,7 @@ final class SizeReruns {
         List<SizeRerun.Failure> notMet = new ArrayList<>();
         List<SizeRerun.Failure> noResult = new ArrayList<>();
         boolean lacks = false;
-        for (ElementSheet.LimitResult limit : station.limits()) {
+        for (ElementSheet.LimitResult limit : station.judgedLimits()) {
             ElementSheet.LimitResult judged = limit.first(judgedCases);
             List<String> verdicts = judged.verdicts().stream()
                     .map(cell -> words(Objects.requireNonNull(values.get(cell))))

@@ -152,6 +152,9 @@ final class FormulaStatements {
         }
         @Nullable Formula when = parser.passes("when") ? renamed(parser.condition()) : null;
         @Nullable Formula scale = parser.passes("scale") ? renamed(parser.sum()) : null;
+        Limit.Kind kind = parser.passes("layout")
+                ? Limit.Kind.LAYOUT
+                : parser.passes("threshold") ? Limit.Kind.THRESHOLD : Limit.Kind.JUDGED;
         parser.end();
         if (chain.size() < 2 || chain.size() > 3) {
             throw parts.fault("a limit is a <= b, or a <= b <= c", "limit-unclear");
@@ -181,11 +184,13 @@ final class FormulaStatements {
             throw parts.fault("a limit names its source", "source-missing");
         }
         if (chain.size() == 3) {
-            draft.limits.add(new Limit(chain.get(0), chain.get(1), false, scale, when, label + ", lower end", source));
-            draft.limits.add(new Limit(chain.get(1), chain.get(2), true, scale, when, label + ", upper end", source));
+            draft.limits.add(
+                    new Limit(chain.get(0), chain.get(1), false, scale, when, label + ", lower end", source, kind));
+            draft.limits.add(
+                    new Limit(chain.get(1), chain.get(2), true, scale, when, label + ", upper end", source, kind));
         } else {
             boolean valueIsLesser = varies(chain.get(0)) || !varies(chain.get(1)) && !isBound(chain.get(0));
-            draft.limits.add(new Limit(chain.get(0), chain.get(1), valueIsLesser, scale, when, label, source));
+            draft.limits.add(new Limit(chain.get(0), chain.get(1), valueIsLesser, scale, when, label, source, kind));
         }
     }
 

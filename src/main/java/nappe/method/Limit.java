@@ -17,7 +17,30 @@ public record Limit(
         @Nullable Formula scale,
         @Nullable Formula when,
         String label,
-        String source) {
+        String source,
+        Kind kind) {
+    /** What a limit is about. */
+    public enum Kind {
+        /** Each case is judged by it. */
+        JUDGED,
+        /** It is about how the station is built, or how it is calculated: it governs no case unless it is not met. */
+        LAYOUT,
+        /** Nothing is judged by it: the flows at which it turns are searched for. */
+        THRESHOLD
+    }
+
+    /** A limit that each case is judged by. */
+    public Limit(
+            Formula lesser,
+            Formula greater,
+            boolean valueIsLesser,
+            @Nullable Formula scale,
+            @Nullable Formula when,
+            String label,
+            String source) {
+        this(lesser, greater, valueIsLesser, scale, when, label, source, Kind.JUDGED);
+    }
+
     /** The side that is judged. */
     public Formula value() {
         return valueIsLesser ? lesser : greater;

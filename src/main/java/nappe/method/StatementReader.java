@@ -31,6 +31,8 @@ final class StatementReader {
             "measurement",
             "reason",
             "standing of the level",
+            "remark",
+            "scale of levels",
             "control width");
 
     private final StatementParts parts;

@@ -6,12 +6,16 @@ import nappe.unit.Dimension;
 import nappe.unit.Unit;
 
 /**
- * How many digits are printed: lengths and levels to 0.001 ft or 0.1 mm, pure numbers that are whole without decimals,
+ * How many digits are printed: lengths and levels to 0.001 ft or 0.1 mm, or to two figures where they would be printed
+ * as nought, pure numbers that are whole without decimals,
  * all else to four figures. Verdicts are made
  * with full precision; only print is rounded.
  */
 public final class Digits {
     private static final int FIGURES = 4;
+
+    /** A length no greater than this, in any unit, is what is left by rounding or by a search. */
+    private static final double REST = 1e-7;
 
     private Digits() {}
 
@@ -19,15 +23,21 @@ public final class Digits {
     public static int decimals(Unit unit, double value) {
         if (unit.dimension().equals(Dimension.LENGTH)) {
             return switch (unit.text()) {
-                case "m" -> 4;
-                case "ft" -> 3;
-                case "in" -> 2;
-                case "mm" -> 1;
+                case "m" -> ofLength(value, 4);
+                case "ft" -> ofLength(value, 3);
+                case "in" -> ofLength(value, 2);
+                case "mm" -> ofLength(value, 1);
                 default -> figures(value, FIGURES);
             };
         }
         boolean whole = unit.dimension().isNone() && value == Math.rint(value) && Math.abs(value) < 1e6;
         return whole ? 0 : figures(value, FIGURES);
+    }
+
+    /** What a computation leaves of a difference that is nought is printed as nought. */
+    private static int ofLength(double value, int usual) {
+        boolean vanishes = Math.abs(value) < 0.5 * Math.pow(10, -usual) && Math.abs(value) > REST;
+        return vanishes ? figures(value, 2) : usual;
     }
 
     /** The decimals that show so many figures of a value, at most 9. */

@@ -7,13 +7,17 @@ import nappe.calculation.Cell;
  * A device as drawn for the worked case, in working units of length.
  *
  * @param unit the unit of every coordinate
- * @param schematic why it is not to scale; empty where it is
+ * @param schematic why none of it is to scale; empty where it is
  * @param notes what is said below it, what could not be drawn included; one sentence each
  */
 public record Drawing(String title, nappe.unit.Unit unit, String schematic, List<View> views, List<String> notes)
         implements Figure {
-    /** One view; y points up. */
-    public record View(String title, List<Part> parts) {}
+    /**
+     * One view; y points up.
+     *
+     * @param schematic why this view is not to scale, where others are; empty where it is
+     */
+    public record View(String title, String schematic, List<Part> parts) {}
 
     public record Point(double x, double y) {}
 

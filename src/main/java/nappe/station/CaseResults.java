@@ -9,17 +9,18 @@ import nappe.unit.Unit;
 
 /** What an element has to show for a case where cases stand side by side: by role, so that no device is known by name. */
 final class CaseResults {
-    private static final List<String> ROLES = List.of("state of flow", RatingCurve.GAUGE_HEAD, "water level");
+    private static final String STANDING = "standing of the level";
+    private static final List<String> ROLES = List.of("state of flow", RatingCurve.GAUGE_HEAD, "water level", STANDING);
     private static final List<String> ALL_ROLES = List.of(
             "state of flow",
             "measurement",
             "reason",
             RatingCurve.GAUGE_HEAD,
             "water level",
-            "standing of the level",
-            "energy level");
-    private static final List<String> IN_WORDS =
-            List.of("state of flow", "measurement", "reason", "standing of the level");
+            "energy level",
+            STANDING,
+            "remark");
+    private static final List<String> IN_WORDS = List.of("state of flow", "measurement", "reason", STANDING, "remark");
 
     private CaseResults() {}
 
@@ -51,19 +52,37 @@ final class CaseResults {
     }
 
     private static List<Row> of(StationLayout station, String tag, List<String> roles) {
-        MethodSheet method = station.method(tag);
         List<Row> rows = new ArrayList<>();
         for (String role : roles) {
-            String symbol = method.gives().get(role);
-            boolean passedOn = symbol != null && method.item(symbol) instanceof Item.Given;
-            if (symbol != null && !passedOn) {
-                rows.add(new Row(
-                        role,
-                        station.cases(tag).stream()
-                                .map(scope -> scope.cell(symbol))
-                                .toList()));
+            List<Cell> cells = cells(station, tag, role);
+            if (!cells.isEmpty()) {
+                rows.add(new Row(role, cells));
             }
         }
         return rows;
+    }
+
+    /** The standing of an element's levels, one per column; empty where no device below says it. */
+    static List<Cell> standings(StationLayout station, String tag) {
+        return cells(station, tag, STANDING);
+    }
+
+    /** A level that rests on a bound downstream is no surer than that: its standing is handed on from the device below. */
+    private static List<Cell> cells(StationLayout station, String tag, String role) {
+        List<String> tags = station.tags();
+        for (int i = tags.indexOf(tag); i >= 0; i--) {
+            MethodSheet method = station.method(tags.get(i));
+            String symbol = method.gives().get(role);
+            boolean passedOn = symbol != null && method.item(symbol) instanceof Item.Given;
+            if (symbol != null && !passedOn) {
+                return station.cases(tags.get(i)).stream()
+                        .map(scope -> scope.cell(symbol))
+                        .toList();
+            }
+            if (!role.equals(STANDING)) {
+                break;
+            }
+        }
+        return List.of();
     }
 }

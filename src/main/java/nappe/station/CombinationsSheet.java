@@ -74,7 +74,7 @@ final class CombinationsSheet {
             verdicts.add(new ArrayList<>());
         });
         Cells cells = station.cells();
-        List<LimitResult> limits = station.limits();
+        List<LimitResult> limits = station.judgedLimits();
         TableDraft table = work.workbookTable("Verdicts in each combination", columns, limits.size());
         for (LimitResult limit : limits) {
             labels.add(cells.typed(
@@ -174,7 +174,7 @@ final class CombinationsSheet {
         List<Block.Column> columns = new ArrayList<>(List.of(new Block.Column("Combination", 26, Block.Align.LEFT)));
         for (CaseResults.Row row : rows) {
             String unit = unitText(row.unit());
-            boolean words = row.role().equals("state of flow");
+            boolean words = row.isWords();
             columns.add(new Block.Column(
                     row.label() + (unit.isEmpty() || words ? "" : " [" + unit + "]"),
                     22,
@@ -226,7 +226,7 @@ final class CombinationsSheet {
     }
 
     private void matrix(List<List<Cell>> verdicts) {
-        List<LimitResult> limits = station.limits();
+        List<LimitResult> limits = station.judgedLimits();
         for (int from = 0; from < combinations.size(); from += SIDE_BY_SIDE) {
             int to = Math.min(combinations.size(), from + SIDE_BY_SIDE);
             List<Block.Column> columns = new ArrayList<>(List.of(

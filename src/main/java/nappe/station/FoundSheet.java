@@ -77,7 +77,8 @@ final class FoundSheet {
                         new Block.Column(
                                 (top == null ? "Level upstream" : "Level upstream of " + top) + " [" + length + "]",
                                 12,
-                                Block.Align.RIGHT)));
+                                Block.Align.RIGHT),
+                        new Block.Column("Standing of the level", 22, Block.Align.LEFT)));
         int first = station.columns().count() - found.cases().size();
         for (int i = 0; i < found.cases().size(); i++) {
             FoundCase one = found.cases().get(i);
@@ -98,6 +99,7 @@ final class FoundSheet {
                             : new Block.Content(cells.factors().toReport(table.place(6), "h", head, report)));
             row.add(shown(cells, table, 7, offered(station, one.tag(), "state of flow", column)));
             row.add(shown(cells, table, 8, top == null ? null : offered(station, top, "water level", column)));
+            row.add(shown(cells, table, 9, standing(station, top, column)));
             table.add(row);
         }
         sheet.gap();
@@ -121,6 +123,11 @@ final class FoundSheet {
             }
         }
         return top;
+    }
+
+    private static @Nullable Cell standing(StationLayout station, @Nullable String top, int column) {
+        List<Cell> standings = top == null ? List.of() : CaseResults.standings(station, top);
+        return standings.isEmpty() ? null : standings.get(column);
     }
 
     private static @Nullable Cell offered(StationLayout station, String tag, String role, int column) {

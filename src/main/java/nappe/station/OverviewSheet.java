@@ -25,6 +25,7 @@ import nappe.formula.Formula;
 import nappe.formula.Function;
 import nappe.formula.Sign;
 import nappe.formula.Value;
+import nappe.method.Limit;
 import nappe.unit.Unit;
 import org.jspecify.annotations.Nullable;
 
@@ -58,13 +59,14 @@ final class OverviewSheet {
         List<Column> columns = workTable(work, new Run(labels(work, labels)));
         sheet.note(
                 "One row for each case, and for each combination that can occur. The governing limit is the first in the"
-                        + " order of the summary: not met before no result before met, then the least margin.");
+                        + " order of the summary: not met before no result before met, then the least margin; one that is about the"
+                        + " layout (a length, a step) stands after the others of its verdict.");
         governing(new Run(labels), columns);
         design.elements().forEach(this::element);
     }
 
     private List<Cell> labels(SheetDraft work, List<Cell> labels) {
-        List<LimitResult> limits = station.limits();
+        List<LimitResult> limits = station.judgedLimits();
         TableDraft table = work.workbookTable(
                 "Limits, as the overview of the cases names them",
                 List.of(new Block.Column("Limit", 40, Block.Align.LEFT)),
@@ -90,7 +92,7 @@ final class OverviewSheet {
             TableDraft table = work.workbookTable(
                     "Limits in case " + names.get(c)
                             + ": the order is three times the rank of the verdict, plus m/(1 + |m|) of"
-                            + " the margin m, or 1",
+                            + " the margin m, or 1; and 1 more where it is about the layout",
                     List.of(
                             new Block.Column("Limit", 40, Block.Align.LEFT),
                             new Block.Column("Verdict", 16, Block.Align.LEFT),
@@ -100,11 +102,15 @@ final class OverviewSheet {
             List<Cell> verdicts = new ArrayList<>();
             List<Cell> margins = new ArrayList<>();
             List<Cell> orders = new ArrayList<>();
-            for (LimitResult limit : station.limits()) {
+            for (LimitResult limit : station.judgedLimits()) {
                 int at = limit.forAll() ? 0 : c;
                 verdicts.add(same(table, 1, limit.verdicts().get(at)));
                 margins.add(margin(table, limit.margins().get(at)));
-                orders.add(order(table, verdicts.get(verdicts.size() - 1), margins.get(margins.size() - 1)));
+                orders.add(order(
+                        table,
+                        verdicts.get(verdicts.size() - 1),
+                        margins.get(margins.size() - 1),
+                        limit.forAll() || limit.kind() == Limit.Kind.LAYOUT));
                 table.add(List.of(
                         new Block.Text(limit.tag() + "  " + limit.label()),
                         new Block.Content(verdicts.get(verdicts.size() - 1)),
@@ -129,7 +135,7 @@ final class OverviewSheet {
                 : same(table, 2, margin);
     }
 
-    private Cell order(TableDraft table, Cell verdict, Cell margin) {
+    private Cell order(TableDraft table, Cell verdict, Cell margin, boolean ofTheLayout) {
         Scope scope = Scope.ofElement();
         scope.put("verdict", verdict);
         scope.put("margin", margin);
@@ -143,7 +149,8 @@ final class OverviewSheet {
         Formula held = over(symbol("margin"), plus(number("1"), call(Function.ABS, symbol("margin"))));
         boolean never = margin.typed() != null;
         Formula share = never ? number("1") : iff(call(Function.IS_NUMBER, symbol("margin")), held, number("1"));
-        return cells.raw(table.place(3), "", Unit.one(), plus(rank, share), scope, null, false);
+        Formula order = ofTheLayout ? plus(plus(rank, share), number("1")) : plus(rank, share);
+        return cells.raw(table.place(3), "", Unit.one(), order, scope, null, false);
     }
 
     private void governing(Run labels, List<Column> columns) {
@@ -172,10 +179,10 @@ final class OverviewSheet {
             table.add(List.of(
                     new Block.Jump(
                             names.get(c),
-                            station.limits()
+                            station.judgedLimits()
                                     .get(0)
                                     .verdicts()
-                                    .get(station.limits().get(0).forAll() ? 0 : c)),
+                                    .get(station.judgedLimits().get(0).forAll() ? 0 : c)),
                     new Block.Content(
                             again
                                     ? cells.factors().toReport(table.place(1), "Q", cases.flow(c), report)
@@ -191,6 +198,25 @@ final class OverviewSheet {
         sheet.gap();
     }
 
+    /** In how many of the cases the element measures. */
+    private void measured(String tag, Run words) {
+        TableDraft table = sheet.table(
+                "",
+                List.of(
+                        new Block.Column("Element", 26, Block.Align.LEFT),
+                        new Block.Column("Cases", 14, Block.Align.RIGHT),
+                        new Block.Column("measured", 14, Block.Align.RIGHT),
+                        new Block.Column("not measured", 14, Block.Align.RIGHT)));
+        Scope scope = Scope.ofElement();
+        scope.put("words", words);
+        table.add(List.of(
+                new Block.Text(tag),
+                new Block.Text(Integer.toString(names.size())),
+                live(table, 2, call(Function.TALLY, symbol("words"), word("measured")), scope),
+                live(table, 3, call(Function.TALLY, symbol("words"), word("not measured")), scope)));
+        sheet.gap();
+    }
+
     private Block.Content live(TableDraft table, int column, Formula formula, Scope scope) {
         return new Block.Content(cells.raw(table.place(column), "", Unit.one(), formula, scope, null, column == 8));
     }
@@ -200,6 +226,9 @@ final class OverviewSheet {
         if (rows.isEmpty()) {
             return;
         }
+        rows.stream()
+                .filter(row -> row.role().equals("measurement"))
+                .forEach(row -> measured(element.tag(), new Run(row.cells().subList(0, names.size()))));
         List<Block.Column> columns = new ArrayList<>(List.of(new Block.Column("Case", 26, Block.Align.LEFT)));
         for (CaseResults.Row row : rows) {
             String unit = unitText(row.unit());

@@ -215,8 +215,9 @@ public final class PackageLayout {
         Cells cells = station.cells();
         int judged = station.columns().judged();
         List<String> caseNames = station.columns().judgedNames();
-        List<ElementSheet.LimitResult> limits =
-                station.limits().stream().map(limit -> limit.first(judged)).toList();
+        List<ElementSheet.LimitResult> limits = station.judgedLimits().stream()
+                .map(limit -> limit.first(judged))
+                .toList();
         Map<String, Block.Table> ratings = new LinkedHashMap<>();
         Map<String, List<Scope>> casesOf = new LinkedHashMap<>();
         Map<String, List<Block.Line>> linesOf = station.lines();

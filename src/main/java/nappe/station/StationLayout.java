@@ -255,6 +255,18 @@ public final class StationLayout {
         return List.copyOf(limits);
     }
 
+    /** Those that a case is judged by, or the layout: without the thresholds that are only searched for. */
+    public List<ElementSheet.LimitResult> judgedLimits() {
+        return limits.stream()
+                .filter(limit -> limit.kind() != Limit.Kind.THRESHOLD)
+                .toList();
+    }
+
+    /** The tags of the elements, from the downstream end up. */
+    List<String> tags() {
+        return design.elements().stream().map(Design.Element::tag).toList();
+    }
+
     public MethodSheet method(String tag) {
         return Objects.requireNonNull(methods.get(tag));
     }
@@ -329,7 +341,7 @@ public final class StationLayout {
                 String name = "bound";
                 Formula value = new Formula.Symbol(demand.symbol());
                 Formula bound = new Formula.Symbol(name);
-                Formula scale = scale(demand);
+                Formula scale = scale(demand, method(element.tag()));
                 Formula when = demand.inCase().isEmpty()
                         ? null
                         : Formulas.compare(
@@ -348,9 +360,16 @@ public final class StationLayout {
         return demanded;
     }
 
-    /** A fraction of an elevation means nothing: what is left to a demanded length or level is counted in feet or metres. */
-    private Formula scale(Design.Demand demand) {
+    /**
+     * A fraction of an elevation means nothing: what is left to a demanded length or level is measured by the height that
+     * the element names, so that it stands beside other margins in any unit; where it names none, by one foot or metre.
+     */
+    private Formula scale(Design.Demand demand, MethodSheet method) {
         Dimension dimension = demand.value().unit().dimension();
+        String height = method.gives().get("scale of levels");
+        if (dimension.equals(Dimension.LENGTH) && height != null) {
+            return new Formula.Symbol(height);
+        }
         return dimension.equals(Dimension.LENGTH)
                 ? new Formula.Quantity(1, "1", design.project().system().coherentUnit(dimension))
                 : new Formula.Call(nappe.formula.Function.ABS, List.of(new Formula.Symbol("bound")));

@@ -204,7 +204,8 @@ final class SummarySheet {
         summary.note(
                 "Verdicts rest on full precision, with a tolerance of 1e-9 relative to the bound; print is rounded. The verdict of a limit is"
                         + " its worst over the cases. Margin: what is left to the limit over the size of the bound, unless the limit names another"
-                        + " scale; for lengths and levels demanded by others, what is left in the working unit.");
+                        + " scale; for lengths and levels demanded by others, what is left over the height that the element names (greatest"
+                        + " rated head, height of the walls), or over one working unit where it names none.");
         TableDraft table = summary.table(
                 "Limits, the worst first",
                 List.of(

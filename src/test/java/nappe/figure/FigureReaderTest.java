@@ -81,6 +81,23 @@ class FigureReaderTest {
                 .containsExactly("2:27 a condition is needed here, such as h < 2 ft (not-a-condition)");
     }
 
+    @Test
+    void aNoteWithAConditionKeepsItsFurtherSemicolons() {
+        FigureSheet figure = FigureReader.read(
+                FLUME,
+                "figures/parshall-flume.txt",
+                "view Plan\nschematic when W > 1 m ; why\nnote when W > 1 m ; one; two\nnote a; b");
+        assertThat(figure.notes()).extracting(FigureSheet.Note::text).containsExactly("one; two", "a; b");
+        assertThat(figure.notes().get(1).when()).isNull();
+        assertThat(figure.schematic()).isNull();
+        assertThat(figure.views().get(0).schematic()).isNotNull();
+    }
+
+    @Test
+    void aNoteWithoutItsSentenceIsAFault() {
+        assertThat(faults("note when W > 1 m")).containsExactly("1:17 a note needs its sentence (note-empty)");
+    }
+
     /** A library with nothing in it. */
     private static final class NoTexts implements nappe.source.TextLibrary {
         @Override

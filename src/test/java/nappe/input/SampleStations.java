@@ -153,7 +153,7 @@ public final class SampleStations {
                 .entry("A1", "S_0", 0.0005, "1", drawing, "known")
                 .entry("A1", "n", 0.013, "1", "Invented design brief DB-3, table 5: concrete, some slime", "assumed")
                 .entry("A1", "C_t", 0.1, "1", "Invented design brief DB-3, table 5: walls rounded", "assumed")
-                .entry("A1", "K", 0.4, "1", "Invented screen sheet SC-1: bars half blinded", "assumed")
+                .entry("A1", "K", 4.3, "1", "Invented screen sheet SC-1: bars half blinded", "assumed")
                 .entry("A1", "z_w", 416.5, "ft", drawing, "known")
                 .entry("A1", "L_s", 56, "ft", drawing, "known")
                 .row(
@@ -179,7 +179,7 @@ public final class SampleStations {
                         "A1",
                         "V_m",
                         "at least",
-                        2,
+                        1.5,
                         "ft/s",
                         "channel cleans itself at the daily peak of the design year",
                         "Invented design brief DB-3, clause 4.6",
@@ -220,7 +220,7 @@ public final class SampleStations {
                         "Requirements",
                         "Show that the flume measures from the start-up minimum hour to the build-out peak.",
                         "Invented design brief DB-3, clause 4.1",
-                        "Limits")
+                        "Overview")
                 .row(
                         "Requirements",
                         "State the origin of each design flow.",
@@ -375,7 +375,7 @@ public final class SampleStations {
                         "Requirements",
                         "Show what is measured at spring tide, and how high the water stands.",
                         "Invented permit draft MG-P, condition 7",
-                        "Limits")
+                        "Overview")
                 .row("Revisions", "0", "2031-09-08", "First issue for checking.");
     }
 

@@ -91,7 +91,7 @@ class StationWalkTest {
         limit.verdicts()
                 .forEach(verdict -> assertThat(values.get(verdict))
                         .as(size + ": " + limit.label() + " at " + verdict)
-                        .isEqualTo(Value.word("met")));
+                        .isIn(Value.word("met"), Value.word("does not apply")));
     }
 
     private void check(String what, StationLayout station, Map<Cell, Value> values, int c) {

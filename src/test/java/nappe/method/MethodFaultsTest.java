@@ -158,7 +158,7 @@ class MethodFaultsTest {
                 pretend.txt:6:7: an entry has no role; it is typed (fault: role-unknown)
                     entry e = flow ; m3/s ; l
                           ^
-                pretend.txt:7:6: "flaw" is no role; roles are flow, flow through one, units in service, water level, energy level, rapid depth, head at the gauge, state of flow, measurement, reason, standing of the level, control width (fault: role-unknown)
+                pretend.txt:7:6: "flaw" is no role; roles are flow, flow through one, units in service, water level, energy level, rapid depth, head at the gauge, state of flow, measurement, reason, standing of the level, remark, scale of levels, control width (fault: role-unknown)
                     case e2 = flaw ; m3/s ; l
                          ^
                 pretend.txt:8:6: what is taken has a role: take z_t = water level (fault: role-missing)
@@ -446,7 +446,7 @@ class MethodFaultsTest {
                 pretend.txt:48:6: q rests on the free symbol h and has no value by itself; name one with at (fault: no-value)
                     give water level = q
                          ^
-                pretend.txt:49:6: "water table" is no role; roles are flow, flow through one, units in service, water level, energy level, rapid depth, head at the gauge, state of flow, measurement, reason, standing of the level, control width (fault: role-unknown)
+                pretend.txt:49:6: "water table" is no role; roles are flow, flow through one, units in service, water level, energy level, rapid depth, head at the gauge, state of flow, measurement, reason, standing of the level, remark, scale of levels, control width (fault: role-unknown)
                     give water table = b
                          ^""");
     }

@@ -49,33 +49,44 @@ class CheckersEditTest {
     }
 
     static {
-        flume("smallest size", new Entry("F1", "size", "1 in"));
-        flume("size whose transition is under the published limit", new Entry("F1", "size", "6 in"));
-        flume("other size of the general formula", new Entry("F1", "size", "8 ft"));
-        flume("size of the other general formula", new Entry("F1", "size", "10 ft"));
-        flume("greatest size", new Entry("F1", "size", "50 ft"));
-        flume("ISO metric size", new Entry("F1", "size", "0.9 m"));
-        flume("ISO metric size without a general formula", new Entry("F1", "size", "0.152 m"));
-        flume("size in other letters", new Entry("F1", "size", "3 FT"));
-        flume("other submerged form", new Entry("F1", "form", "subtraction"));
-        flume("submerged readings accepted", new Entry("F1", "submerged", "accepted"), new Level(3, 413.45));
-        flume("width at the gauge typed", new Entry("F1", "W_g", 1.7));
-        flume("head read in submerged flow", new Level(1, 412.85));
-        flume("crest lower: most cases drown", new Entry("F1", "z_f", 411.1));
-        flume("crest higher: all flow free", new Entry("F1", "z_f", 414.5));
-        flume("crest below nought", new Entry("F1", "z_f", -2.5));
-        flume("no flow in a case", new Flow(1, 0));
-        flume("flow beyond the rating", new Flow(6, 80));
-        flume("smallest flow", new Flow(0, 1e-6));
-        flume("tailwater frees the flow", new Level(5, 413.2));
-        flume("tailwater drowns the least flow", new Level(0, 412.9));
-        flume("tailwater at the crest", new Level(2, 412.5));
-        flume("head read where none was given", new Head(4, "F1", 1.4));
-        flume("head read taken out, in words", new Head(1, "F1", "not given"));
-        flume("head read beyond the rating", new Head(1, "F1", 40));
-        flume("demand no longer met", new Demand(0, 413.0));
-        flume("units in service in a case", new Units(6, 3), new Units(0, 2));
-        flume("flow and level that combinations take", new Flow(6, 9), new Level(5, 412.45));
+        // a sample of this size takes LibreOffice many seconds each: so several edits go together where they do not
+        // meet
+        flume("smallest size, a head read in submerged flow", new Entry("F1", "size", "1 in"), new Level(1, 412.85));
+        flume(
+                "the subtraction, submerged readings accepted, width at the gauge typed",
+                new Entry("F1", "form", "subtraction"),
+                new Entry("F1", "submerged", "accepted"),
+                new Entry("F1", "W_g", 1.7),
+                new Level(3, 413.45));
+        flume(
+                "size of the other general formula, in other letters; crest below nought",
+                new Entry("F1", "size", "10 FT"),
+                new Entry("F1", "z_f", -2.5));
+        flume(
+                "ISO metric size without a general formula; crest lower: most cases drown",
+                new Entry("F1", "size", "0.152 m"),
+                new Entry("F1", "z_f", 411.1));
+        flume(
+                "crest higher: all flow free; no flow, the smallest flow, and flow beyond the rating",
+                new Entry("F1", "z_f", 414.5),
+                new Flow(0, 1e-6),
+                new Flow(1, 0),
+                new Flow(6, 80));
+        flume(
+                "tailwater at the crest, frees the flow, drowns the least flow; heads read and taken out",
+                new Level(5, 413.2),
+                new Level(0, 412.9),
+                new Level(2, 412.5),
+                new Head(4, "F1", 1.4),
+                new Head(1, "F1", "not given"));
+        flume(
+                "demand no longer met, head read beyond the rating, units in service, what combinations take",
+                new Demand(0, 413.0),
+                new Head(1, "F1", 40),
+                new Units(6, 3),
+                new Units(0, 2),
+                new Flow(6, 9),
+                new Level(5, 412.45));
         flume(
                 "many at once",
                 new Entry("F1", "size", "2.4 m"),
@@ -86,20 +97,26 @@ class CheckersEditTest {
                 new Head(1, "F1", 9),
                 new Demand(1, 5));
 
-        inlet("channel wider and steeper", new Entry("A1", "b", 2.1), new Entry("A1", "S_0", 0.004));
+        inlet(
+                "channel wider and steeper, submerged readings refused",
+                new Entry("A1", "b", 2.1),
+                new Entry("A1", "S_0", 0.004),
+                new Entry("F1", "submerged", "refused"));
         inlet("channel so shallow that flow is critical", new Entry("A1", "z_f", 22.4));
         inlet(
-                "sloping sides, a screen, walls too low",
+                "sloping sides, a screen, walls too low, a jump; one channel for all",
                 new Entry("A1", "m", 1.5),
                 new Entry("A1", "K", 3),
-                new Entry("A1", "z_w", 22.4));
-        inlet("inflow with a jump", new Entry("A1", "inflow", "rapid, with a jump"));
-        inlet("one channel for all", new Entry("A1", "serves", "all units"), new Units(3, 2));
-        inlet("submerged readings refused", new Entry("F1", "submerged", "refused"));
-        inlet("crest lower: submerged by the curve", new Entry("F1", "z_f", 21.5));
-        inlet("a level typed where the curve served", new Level(0, 22.1));
-        inlet("flow beyond the curve", new Flow(6, 1.3));
-        inlet("demand in one case", new Demand(2, 0.2));
+                new Entry("A1", "z_w", 22.4),
+                new Entry("A1", "inflow", "rapid, with a jump"),
+                new Entry("A1", "serves", "all units"),
+                new Units(3, 2));
+        inlet(
+                "crest lower: submerged by the curve; a level typed where the curve served; flow beyond the curve; a demand",
+                new Entry("F1", "z_f", 21.5),
+                new Level(0, 22.1),
+                new Flow(6, 1300),
+                new Demand(2, 0.2));
 
         weir("notch wider", new Entry("W1", "b", 850));
         weir("notch as wide as the channel", new Entry("W1", "b", 1100));
@@ -196,12 +213,12 @@ class CheckersEditTest {
 
     @Test
     void editsOfTheFlumeGiveWhatIssuingAnewGives() throws IOException {
-        proven("headworks.xlsx", FLUME, 5);
+        proven("headworks.xlsx", FLUME, 4);
     }
 
     @Test
     void editsOfTheInletGiveWhatIssuingAnewGives() throws IOException {
-        proven("inlet-works.xlsx", INLET, 5);
+        proven("inlet-works.xlsx", INLET, 4);
     }
 
     @Test

@@ -74,7 +74,7 @@ final class BarsPicture {
             sketch.text(
                     new At(x, middle + 1 + (i - (lines.size() - 1) / 2.0) * 3.5),
                     SIZE,
-                    List.of(Piece.plain(lines.get(i))));
+                    Labels.label(results, lines.get(i)));
         }
         Value margin = results.value(bar.margin());
         String verdict = words(bar.verdict());

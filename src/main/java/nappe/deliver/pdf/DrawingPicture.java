@@ -54,9 +54,8 @@ final class DrawingPicture {
         double perUnit = mmPerUnit / denominator;
         double y = 0;
         for (ViewSketch view : views) {
-            String scale = drawing.schematic().isEmpty()
-                    ? "scale 1:" + number(denominator)
-                    : "not to scale: " + drawing.schematic();
+            String why = drawing.schematic().isEmpty() ? view.schematic() : drawing.schematic();
+            String scale = why.isEmpty() ? "scale 1:" + number(denominator) : "not to scale: " + why;
             sketch.text(new At(0, y + 4), 9, List.of(Piece.bold(view.title()), Piece.plain(", " + scale)));
             y += TITLE + view.above();
             double indent = left + (across - view.width() * perUnit) / 2;

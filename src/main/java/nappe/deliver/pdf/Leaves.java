@@ -112,7 +112,7 @@ final class Leaves {
     private static List<View.Part> note(Block.Note note) {
         List<View.Part> paragraphs = new ArrayList<>();
         for (String line : note.text().split("\n")) {
-            paragraphs.add(new View.Paragraph(note.caution() ? "warn" : "note", View.Text.plain("", line)));
+            paragraphs.add(new View.Paragraph(note.caution() ? "warn" : "note", View.Text.of("", Labels.note(line))));
         }
         return paragraphs;
     }
@@ -133,8 +133,10 @@ final class Leaves {
             int last = table.row() + 1 + table.rows().size();
             String range = new Place(sheet.name(), table.row(), 0).address() + ":"
                     + new Place(sheet.name(), last, table.columns().size() - 1).address();
-            String title = table.title().isEmpty() ? "Rows" : table.title();
-            parts.add(elsewhere(title + ": " + table.rows().size() + " rows stand in the workbook only, sheet "
+            int rows = table.rows().size();
+            String title = table.title().isEmpty() ? "A table of " : table.title() + ": ";
+            String verb = table.title().isEmpty() || rows == 1 ? " stands" : " stand";
+            parts.add(elsewhere(title + rows + (rows == 1 ? " row" : " rows") + verb + " in the workbook only, sheet "
                     + sheet.name() + ", cells " + range + "."));
         }
         return parts;

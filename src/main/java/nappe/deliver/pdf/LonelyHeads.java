@@ -1,22 +1,29 @@
 package nappe.deliver.pdf;
 
+import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Objects;
 import java.util.Set;
+import org.jspecify.annotations.Nullable;
 import org.w3c.dom.Element;
 import org.xhtmlrenderer.newtable.TableBox;
 import org.xhtmlrenderer.newtable.TableRowBox;
+import org.xhtmlrenderer.newtable.TableSectionBox;
 import org.xhtmlrenderer.pdf.ITextRenderer;
 import org.xhtmlrenderer.render.Box;
 import org.xhtmlrenderer.render.PageBox;
 
 /**
- * Finds tables whose head stands at the foot of a page while the first row went to the next one, which the renderer
- * lets happen where rows are kept whole, and moves them.
+ * Finds tables whose head stands at the foot of a page with no row or a single one below it, which the renderer lets
+ * happen where rows are kept whole, and moves them; and tables whose last row stands alone on a page, to which it sends
+ * the row before.
  */
 final class LonelyHeads {
     private static final String MOVED = " ahead";
+
+    /** A table of no more rows is not split for the sake of its last one. */
+    private static final int MOST_ALONE = 2;
 
     private final List<PageBox> pages;
     private final Set<Integer> changed = new HashSet<>();
@@ -38,11 +45,8 @@ final class LonelyHeads {
     /** Of each sheet only the first is moved, since that moves all that follows on the sheet. */
     private void search(Box box, int sheet) {
         if (box instanceof TableBox table) {
-            Element element = table.getElement();
-            if (element != null && !changed.contains(sheet) && isLonely(table) && !isMoved(element)) {
-                element.setAttribute("class", element.getAttribute("class") + MOVED);
-                changed.add(sheet);
-                found = true;
+            if (!changed.contains(sheet)) {
+                table(table, sheet);
             }
             return;
         }
@@ -54,9 +58,58 @@ final class LonelyHeads {
         }
     }
 
-    private boolean isLonely(TableBox table) {
-        TableRowBox first = table.getFirstBodyRow();
-        return first != null && page(first.getAbsY()) != page(table.getAbsY());
+    private void table(TableBox table, int sheet) {
+        List<TableRowBox> rows = rows(table);
+        if (isLonely(table, rows)) {
+            move(table.getElement(), sheet);
+        } else if (rows.size() > MOST_ALONE && isWidow(rows)) {
+            move(rows.get(rows.size() - 2).getElement(), sheet);
+        }
+    }
+
+    private void move(@Nullable Element element, int sheet) {
+        if (element != null && !isMoved(element)) {
+            element.setAttribute("class", element.getAttribute("class") + MOVED);
+            changed.add(sheet);
+            found = true;
+        }
+    }
+
+    private boolean isLonely(TableBox table, List<TableRowBox> rows) {
+        if (rows.isEmpty()) {
+            return false;
+        }
+        int start = page(table.getAbsY());
+        if (page(rows.get(0).getAbsY()) != start) {
+            return true;
+        }
+        return rows.size() > 1 && page(rows.get(1).getAbsY()) != start && isLow(table.getAbsY(), pages.get(start));
+    }
+
+    /** Only there is little lost when the rest of a page stays empty. */
+    private static boolean isLow(int y, PageBox page) {
+        return y > page.getTop() + 0.6 * (page.getBottom() - page.getTop());
+    }
+
+    private boolean isWidow(List<TableRowBox> rows) {
+        int last = rows.size() - 1;
+        int page = page(rows.get(last).getAbsY());
+        return page != page(rows.get(last - 1).getAbsY());
+    }
+
+    /** The rows below the head, in order. */
+    private static List<TableRowBox> rows(TableBox table) {
+        List<TableRowBox> rows = new ArrayList<>();
+        for (int i = 0; i < table.getChildCount(); i++) {
+            if (table.getChild(i) instanceof TableSectionBox section && !section.isHeader() && !section.isFooter()) {
+                for (int j = 0; j < section.getChildCount(); j++) {
+                    if (section.getChild(j) instanceof TableRowBox row) {
+                        rows.add(row);
+                    }
+                }
+            }
+        }
+        return rows;
     }
 
     private static boolean isMoved(Element element) {

@@ -2,6 +2,7 @@ package nappe.deliver.pdf;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Function;
 import nappe.deliver.pdf.Ink.At;
 
 /** A picture while it is made: strokes first, then texts over them, each on a clear ground. */
@@ -96,10 +97,19 @@ final class Sketch {
 
     /** Sets a text at the place where it hides least; the first of equals. */
     Ink.Lettering choose(List<Ink.Lettering> places) {
+        return choose(places, place -> List.of());
+    }
+
+    /**
+     * The same for a text with a leader, which is to cross nothing either.
+     *
+     * @param leader its two ends for a place, or none
+     */
+    Ink.Lettering choose(List<Ink.Lettering> places, Function<Ink.Lettering, List<At>> leader) {
         Ink.Lettering best = places.get(0);
         double least = Double.POSITIVE_INFINITY;
         for (Ink.Lettering place : places) {
-            double hidden = hidden(place);
+            double hidden = hidden(place) + crossed(leader.apply(place));
             if (hidden < least - 1e-9) {
                 best = place;
                 least = hidden;
@@ -127,6 +137,30 @@ final class Sketch {
             }
         }
         return hidden;
+    }
+
+    /**
+     * How much a leader would cross: a text much, a line less. Its first tenth lies in the point that it leads from, where
+     * lines may meet.
+     */
+    private double crossed(List<At> leader) {
+        if (leader.isEmpty()) {
+            return 0;
+        }
+        At from = leader.get(0);
+        At to = leader.get(1);
+        At start = new At(from.x() + 0.1 * (to.x() - from.x()), from.y() + 0.1 * (to.y() - from.y()));
+        List<At> line = List.of(start, to);
+        double crossed = 0;
+        for (Ink.Lettering other : texts) {
+            crossed += separated(line, other.corners()) <= 0 ? 50 : 0;
+        }
+        for (Ink ink : strokes) {
+            if (ink instanceof Ink.Stroke stroke && stroke.grey() == 0) {
+                crossed += crosses(stroke, line) ? 5 * stroke.width() : 0;
+            }
+        }
+        return crossed;
     }
 
     private static boolean crosses(Ink.Stroke stroke, List<At> corners) {

@@ -15,6 +15,9 @@ final class TableGrid {
     private static final double SIZE = 8.5;
     private static final double TIGHT = 7;
 
+    /** Words so short, like the name of a size or "found 12", stay on one line. */
+    private static final int SHORT = 10;
+
     private final Results results;
     private final Links links;
     private final Drawings drawings;
@@ -75,6 +78,8 @@ final class TableGrid {
         for (ColumnWidths widths : List.of(measured, tight)) {
             if (whole) {
                 widths.whole(column, characters + "00");
+            } else if (!head && characters.length() <= SHORT) {
+                widths.whole(column, characters);
             } else {
                 widths.text(column, characters, head);
             }
@@ -99,7 +104,8 @@ final class TableGrid {
         if (isCut()) {
             titles.add(View.Text.plain(
                     "small",
-                    "the row in use; all " + table.rows().size() + " rows stand in the workbook, rows " + firstRow()
+                    (texts.size() == 1 ? "the row in use; all " : "the " + texts.size() + " rows in use; all ")
+                            + table.rows().size() + " rows stand in the workbook, rows " + firstRow()
                             + " to " + (firstRow() + table.rows().size() - 1)));
         }
         double over = titles.stream()
@@ -160,11 +166,11 @@ final class TableGrid {
         if (item instanceof Block.Text words) {
             return column.head().toLowerCase(Locale.ROOT).endsWith("unit")
                     ? View.Text.of("whole", UnitPrint.named(words.text()))
-                    : View.Text.of("", List.of(Verdicts.weigh(words.text())));
+                    : words(words.text(), column);
         } else if (item instanceof Block.Symbol symbol) {
             return View.Text.of("whole", SymbolPrint.pieces(symbol.symbol()));
         } else if (item instanceof Block.Content content) {
-            return content(content.cell());
+            return content(content.cell(), column);
         } else if (item instanceof Block.Equation equation) {
             return View.Text.plain("formula", plain(equation.cell()));
         } else if (item instanceof Block.Address address) {
@@ -179,11 +185,17 @@ final class TableGrid {
         throw new IllegalArgumentException("unknown item " + item);
     }
 
-    private View.Text content(Cell cell) {
+    private View.Text words(String text, Block.Column column) {
+        return View.Text.of(
+                "",
+                Verdicts.isGrave(text) ? List.of(Verdicts.weigh(text)) : Labels.inColumn(results, column.head(), text));
+    }
+
+    private View.Text content(Cell cell, Block.Column column) {
         String value = Printed.value(results, cell);
         return Printed.isNumber(results, cell)
                 ? View.Text.of("whole", List.of(Piece.plain(value)))
-                : View.Text.of("", List.of(Verdicts.weigh(value)));
+                : words(value, column);
     }
 
     /** The symbol and the formula behind a live cell as plain text, to be measured and then drawn. */

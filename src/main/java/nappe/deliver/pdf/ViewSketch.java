@@ -61,6 +61,10 @@ final class ViewSketch {
         return view.title();
     }
 
+    String schematic() {
+        return view.schematic();
+    }
+
     double width() {
         return rightmost - leftmost;
     }
@@ -175,7 +179,7 @@ final class ViewSketch {
         double width = Sketch.width(pieces, SIZE);
         List<Ink.Lettering> places = new ArrayList<>();
         for (double up : new double[] {2.9, 6.3, 9.7, -5.6, -9, 13.1}) {
-            for (double share : new double[] {0.5, 0.35, 0.65, 0.1, 0.9, -0.15, 1.15}) {
+            for (double share : new double[] {0.5, 0.35, 0.65, 0.1, 0.9, -0.15, 1.15, -0.3, 1.3}) {
                 places.add(new Ink.Lettering(new At(sign.x() - share * width, sign.y() - up), SIZE, 0, pieces));
             }
         }
@@ -203,21 +207,22 @@ final class ViewSketch {
         List<Piece> pieces = quantity(level.value());
         double width = Sketch.width(pieces, SIZE);
         List<Ink.Lettering> places = new ArrayList<>();
-        for (double down : new double[] {9, -8, 13, -12, 17, -16, -20}) {
+        for (double down : new double[] {9, -8, 13, -12, 17, -16, -20, -5.5, 6.5}) {
             for (double right : new double[] {5, -5 - width, 9, -9 - width, 14, -14 - width}) {
                 places.add(new Ink.Lettering(new At(at.x() + right, at.y() + down), SIZE, 0, pieces));
             }
         }
-        Ink.Lettering text = sketch.choose(places);
+        Ink.Lettering text = sketch.choose(places, place -> List.of(at, leaderEnd(at, place, width)));
         sketch.circle(at, 0.5, false);
-        boolean isRight = text.at().x() >= at.x();
-        sketch.stroke(
-                Sketch.THIN,
-                Sketch.WHOLE,
-                at,
-                new At(
-                        isRight ? text.at().x() - 0.8 : text.at().x() + width + 0.8,
-                        text.at().y() - 0.9));
+        sketch.stroke(Sketch.THIN, Sketch.WHOLE, at, leaderEnd(at, text, width));
+    }
+
+    /** Where the leader from a point meets its text. */
+    private static At leaderEnd(At from, Ink.Lettering text, double width) {
+        boolean isRight = text.at().x() >= from.x();
+        return new At(
+                isRight ? text.at().x() - 0.8 : text.at().x() + width + 0.8,
+                text.at().y() - 0.9);
     }
 
     private void mark(At at) {
