@@ -102,7 +102,7 @@ class NappeTest {
 
     @Test
     void preliminaryPackageIsWrittenOver() throws IOException {
-        Path input = SampleStations.headworks().save(folder.resolve("in.xlsx"));
+        Path input = SampleStations.weir().project("Status", "preliminary").save(folder.resolve("in.xlsx"));
         Path out = folder.resolve("out");
         assertThat(nappe("issue", input, "-o", out).status()).isZero();
         Map<String, byte[]> first = files(out);

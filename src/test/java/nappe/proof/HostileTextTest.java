@@ -381,6 +381,9 @@ class HostileTextTest {
     /** One run of LibreOffice over all workbooks that the other tests made; their texts are on the printed sheets. */
     @AfterAll
     void anotherProgramOpensEveryWorkbook() throws IOException {
+        if (workbooks.isEmpty()) {
+            return; // every test has failed, and LibreOffice without a file would wait for one
+        }
         Path books = Files.createDirectory(folder.resolve("books"));
         List<String> command = new ArrayList<>(List.of(
                 "soffice",
