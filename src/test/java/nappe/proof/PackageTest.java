@@ -274,7 +274,7 @@ class PackageTest {
                         printed(all, line).forEach(cell -> require(missing, text, line.code(), print(sample, cell)));
                     }
                 } else if (block instanceof Block.Table table) {
-                    table.rows()
+                    printed(table, sample)
                             .forEach(row -> row.items().forEach(item -> {
                                 if (item instanceof Block.Content content
                                         && sample.results().value(content.cell()) instanceof Value.Number) {
@@ -287,9 +287,29 @@ class PackageTest {
         assertThat(missing).isEmpty();
     }
 
-    /** The cases of a line that the PDF shows. */
+    /**
+     * The cases of a line that the PDF shows: of a step on the way the case worked in full, of a verdict that case here
+     * and every case on the sheet of limits.
+     */
     private static List<Cell> printed(Block.Lines all, Block.Line line) {
-        return line.perCase().isEmpty() ? List.of() : line.perCase().subList(0, all.printed());
+        boolean workedOnly = line.kind() == Block.LineKind.STEP || line.kind() == Block.LineKind.LIMIT_VERDICT;
+        if (line.perCase().isEmpty()) {
+            return List.of();
+        }
+        return workedOnly
+                ? List.of(line.perCase().get(all.workedCase()))
+                : line.perCase().subList(0, all.printed());
+    }
+
+    /** The rows that the PDF shows: of a table that is looked up by a word, those in use. */
+    private static List<Block.Row> printed(Block.Table table, Package sample) {
+        List<Value> keys =
+                table.keys().stream().map(key -> sample.results().value(key)).toList();
+        return table.rows().stream()
+                .filter(row -> keys.isEmpty()
+                        || row.items().get(0) instanceof Block.Content first
+                                && keys.contains(sample.results().value(first.cell())))
+                .toList();
     }
 
     private static String print(Package sample, Cell cell) {
