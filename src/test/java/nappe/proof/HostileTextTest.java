@@ -46,8 +46,8 @@ class HostileTextTest {
             Pattern.compile("(?m)^\\S+, sheet ([\\w ]+), cell ([A-Z]+[0-9]+): .*\\(fault: [a-z-]+\\)$");
     private static final Pattern QUOTED = Pattern.compile("\"(?:[^\"]|\"\")*\"");
 
-    /** Of what is typed, outside of quotes; B11+1 and 1+1.2E-5 are none of it. */
-    private static final Pattern WORKED_OUT = Pattern.compile("q1\\d\\dq|7\\*7|(?<![A-Z0-9])1\\+1(?![0-9.])");
+    /** What is typed, outside of quotes. */
+    private static final Pattern WORKED_OUT = Pattern.compile("q1\\d\\dq|7\\*7|61\\+67");
 
     @TempDir
     static Path folder;
@@ -66,8 +66,8 @@ class HostileTextTest {
             "<script>&amp;</b>",
             "${7*7} [[${7*7}]] *{x} @{x}",
             "[(${7*7})] #{x} ~{x} th:text",
-            "=1+1",
-            "@SUM(1) +1+1",
+            "=61+67",
+            "@SUM(61) +61+67",
             "]]> <![CDATA[ <!--",
             "<!DOCTYPE a [<!ENTITY b \"c\">]>",
             "&P &L &&P &\"Arial\"&D",
