@@ -59,9 +59,9 @@ class CheckersEditTest {
                 new Entry("F1", "W_g", 1.7),
                 new Level(3, 413.45));
         flume(
-                "size of the other general formula, in other letters; crest below nought",
+                "size of the other general formula, in other letters; crest lower, in metres no whole number",
                 new Entry("F1", "size", "10 FT"),
-                new Entry("F1", "z_f", -2.5));
+                new Entry("F1", "z_f", 408.3));
         flume(
                 "ISO metric size without a general formula; crest lower: most cases drown",
                 new Entry("F1", "size", "0.152 m"),
@@ -263,7 +263,8 @@ class CheckersEditTest {
         assertThat(issued.results().cells().stream()
                         .filter(c -> c.kind() == Cell.Kind.FORMULA
                                 && List.of("h_f", "h_a", "z_u", "Q_h", "Q_min").contains(c.symbol())
-                                && !c.place().sheet().equals("Entries"))
+                                && !c.place().sheet().equals("Entries")
+                                && !c.place().sheet().startsWith("F1 size"))
                         .map(c -> values.get(c.place().sheet() + "!" + c.place().address())))
                 .hasSizeGreaterThan(20)
                 .noneMatch(Double.class::isInstance);

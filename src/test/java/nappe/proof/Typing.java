@@ -148,7 +148,11 @@ sealed interface Typing {
     record Entry(String tag, String symbol, Object content) implements Typing {
         @Override
         public Place place(Package issued) {
-            return entry(issued, "Entries", symbol, 0).place();
+            int before = (int) issued.design().elements().stream()
+                    .takeWhile(e -> !e.tag().equals(tag))
+                    .filter(e -> e.typed().containsKey(symbol))
+                    .count();
+            return entry(issued, "Entries", symbol, before).place();
         }
 
         @Override
