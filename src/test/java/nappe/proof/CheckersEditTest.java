@@ -59,9 +59,9 @@ class CheckersEditTest {
                 new Entry("F1", "W_g", 1.7),
                 new Level(3, 413.45));
         flume(
-                "size of the other general formula, in other letters; crest lower, in metres no whole number",
-                new Entry("F1", "size", "10 FT"),
-                new Entry("F1", "z_f", 408.3));
+                "other size of the general formula, in other letters; crest a little higher",
+                new Entry("F1", "size", "8 FT"),
+                new Entry("F1", "z_f", 412.75));
         flume(
                 "ISO metric size without a general formula; crest lower: most cases drown",
                 new Entry("F1", "size", "0.152 m"),

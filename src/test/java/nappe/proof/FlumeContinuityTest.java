@@ -74,7 +74,7 @@ class FlumeContinuityTest {
                 "1 ft | 1967 form | + (1 - S_end)*h_v | + 0*h_v",
                 "1 ft | 1967 form | max(h_v, h_b + (1 - S_end)*h_v) | h_v",
                 "3 in | 1967 form | max(h_d, h_r) | h_r",
-                "1.5 ft | 1967 form | , h_lo, h_3)/h_d - 1 | , h_d, h_3)/h_d - 1",
+                "1.5 ft | 1967 form | used = \"1967 form\", h_lo, | used = \"1967 form\", h_d,",
                 "2 ft | subtraction | h_lo, if(given(h_3), h_3, none()) | h_lo, if(given(h_3), h_d, none())",
                 "50 ft | 1967 form | min(max(h_t/h, S_x), S_end) | min(max(h_t/h, 0.3), S_end)",
                 "6 in | 1967 form | 1.001*h_hi | 0.95*h_hi",

@@ -291,7 +291,7 @@ class PackageTest {
      * The cases of a line that the PDF shows: of a step on the way the case worked in full, of a verdict that case here
      * and every case on the sheet of limits.
      */
-    private static List<Cell> printed(Block.Lines all, Block.Line line) {
+    static List<Cell> printed(Block.Lines all, Block.Line line) {
         boolean workedOnly = line.kind() == Block.LineKind.STEP || line.kind() == Block.LineKind.LIMIT_VERDICT;
         if (line.perCase().isEmpty()) {
             return List.of();
@@ -302,7 +302,7 @@ class PackageTest {
     }
 
     /** The rows that the PDF shows: of a table that is looked up by a word, those in use. */
-    private static List<Block.Row> printed(Block.Table table, Package sample) {
+    static List<Block.Row> printed(Block.Table table, Package sample) {
         List<Value> keys =
                 table.keys().stream().map(key -> sample.results().value(key)).toList();
         return table.rows().stream()

@@ -220,7 +220,8 @@ class SizesTest {
     @Test
     void onlyOneSheetHoldsWhatRerunsFound() {
         assertThat(headworks().results().cells())
-                .filteredOn(c -> c.kind() == Cell.Kind.RERUN && !c.place().sheet().equals("Found"))
+                .filteredOn(
+                        c -> c.kind() == Cell.Kind.RERUN && !c.place().sheet().equals("Found"))
                 .hasSize(4 * SIZES.size())
                 .allMatch(c -> c.place().sheet().equals("F1 size reruns"));
     }
