@@ -92,7 +92,7 @@ final class OverviewSheet {
             TableDraft table = work.workbookTable(
                     "Limits in case " + names.get(c)
                             + ": the order is three times the rank of the verdict, plus m/(1 + |m|) of"
-                            + " the margin m, or 1; and 1 more where it is about the layout",
+                            + " the margin m, or 1; and 1 more where it is about the layout; a billionth for each limit before",
                     List.of(
                             new Block.Column("Limit", 40, Block.Align.LEFT),
                             new Block.Column("Verdict", 16, Block.Align.LEFT),
@@ -110,7 +110,8 @@ final class OverviewSheet {
                         table,
                         verdicts.get(verdicts.size() - 1),
                         margins.get(margins.size() - 1),
-                        limit.forAll() || limit.kind() == Limit.Kind.LAYOUT));
+                        limit.forAll() || limit.kind() == Limit.Kind.LAYOUT,
+                        orders.size()));
                 table.add(List.of(
                         new Block.Text(limit.tag() + "  " + limit.label()),
                         new Block.Content(verdicts.get(verdicts.size() - 1)),
@@ -135,7 +136,7 @@ final class OverviewSheet {
                 : same(table, 2, margin);
     }
 
-    private Cell order(TableDraft table, Cell verdict, Cell margin, boolean ofTheLayout) {
+    private Cell order(TableDraft table, Cell verdict, Cell margin, boolean ofTheLayout, int before) {
         Scope scope = Scope.ofElement();
         scope.put("verdict", verdict);
         scope.put("margin", margin);
@@ -150,7 +151,8 @@ final class OverviewSheet {
         boolean never = margin.typed() != null;
         Formula share = never ? number("1") : iff(call(Function.IS_NUMBER, symbol("margin")), held, number("1"));
         Formula order = ofTheLayout ? plus(plus(rank, share), number("1")) : plus(rank, share);
-        return cells.raw(table.place(3), "", Unit.one(), order, scope, null, false);
+        Formula apart = before == 0 ? order : plus(order, number(before + "e-9"));
+        return cells.raw(table.place(3), "", Unit.one(), apart, scope, null, false);
     }
 
     private void governing(Run labels, List<Column> columns) {

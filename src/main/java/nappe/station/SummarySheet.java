@@ -69,7 +69,7 @@ final class SummarySheet {
         work.heading("Order of the limits in the summary");
         work.note(
                 "The order of a limit is the rank of its worst verdict (0 not met, 1 no result, 2 not given, 3 met, 4 does not apply) times"
-                        + " three, plus its tightest margin m as m/(1 + |m|) or 1 where it has none, plus a millionth for each limit before it.");
+                        + " three, plus its tightest margin m as m/(1 + |m|) or 1 where it has none (and a billionth for each case before), plus a millionth for each limit before it.");
         TableDraft table = work.workbookTable("", workColumns(), limits.size());
         for (LimitResult limit : limits) {
             work(table, limit);
@@ -106,7 +106,7 @@ final class SummarySheet {
         }
         List<Cell> margins = margins(limit);
         for (int c = 0; c < margins.size(); c++) {
-            held.add(held(table, margins.get(c), first + caseNames.size() + c));
+            held.add(held(table, margins.get(c), first + caseNames.size() + c, c));
         }
         Scope scope = Scope.ofElement();
         scope.put("ranks", new Run(ranks));
@@ -192,12 +192,16 @@ final class SummarySheet {
         return live(table, column, rank, scope, false);
     }
 
-    /** A margin of any size held between -1 and 1 in its order; 1 where there is none. */
-    private Cell held(TableDraft table, Cell margin, int column) {
+    /**
+     * A margin of any size held between -1 and 1 in its order; 1 where there is none. A billionth for each case before
+     * lets the first of equal margins stand, whatever the last digits are in a spreadsheet program.
+     */
+    private Cell held(TableDraft table, Cell margin, int column, int before) {
         Scope scope = Scope.ofElement();
         scope.put("margin", margin);
         Formula held = over(symbol("margin"), plus(number("1"), call(Function.ABS, symbol("margin"))));
-        return live(table, column, iff(call(Function.IS_NUMBER, symbol("margin")), held, number("1")), scope, false);
+        Formula known = iff(call(Function.IS_NUMBER, symbol("margin")), held, number("1"));
+        return live(table, column, before == 0 ? known : plus(known, number(before + "e-9")), scope, false);
     }
 
     private Sorted sorted(int count) {
