@@ -77,7 +77,7 @@ class TrialRowsTest {
     void aSideThatIsNotGivenIsNotGiven() {
         Bench bench = root("x^3", "between 0 and 10", null);
         assertThat(bench.value("x_r", 0)).isEqualTo(new Value.None("not given"));
-        assertThat(bench.verdict(CLOSED, 0)).isEqualTo(Value.word("not given"));
+        assertThat(bench.verdict(CLOSED, 0)).isEqualTo(Value.word("does not apply"));
     }
 
     @Test
