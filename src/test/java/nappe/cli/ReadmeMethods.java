@@ -18,7 +18,9 @@ final class ReadmeMethods {
 
     public static void main(String[] args) throws IOException {
         String readme = Files.readString(README);
-        Files.writeString(README, readme.replace(written(readme), table()));
+        int start = readme.indexOf(START) + START.length();
+        String after = readme.substring(start + written(readme).length());
+        Files.writeString(README, readme.substring(0, start) + table() + after);
     }
 
     /** What stands between the marks. */
