@@ -5,6 +5,8 @@ import java.io.InputStream;
 import java.io.PrintWriter;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.InvalidPathException;
+import java.nio.file.Path;
 import java.util.Locale;
 import java.util.Properties;
 import picocli.CommandLine;
@@ -51,7 +53,22 @@ public final class Nappe implements Runnable {
                 .setUsageHelpWidth(110)
                 .setParameterExceptionHandler(Nappe::wrongUsage)
                 .setExecutionExceptionHandler(new Failures());
-        return line.execute(args);
+        line.registerConverter(Path.class, Nappe::path);
+        try {
+            return line.execute(args);
+        } catch (OutOfMemoryError | StackOverflowError e) {
+            return Failures.internal(err, e);
+        }
+    }
+
+    private static Path path(String typed) {
+        try {
+            return Path.of(typed);
+        } catch (InvalidPathException e) {
+            throw new CommandLine.TypeConversionException("\"" + typed
+                    + "\" has signs that a file name cannot have here. If it looks right, the language set in this shell has no"
+                    + " such letters: set one that has, such as LC_ALL=C.UTF-8, and run again");
+        }
     }
 
     private static int wrongUsage(CommandLine.ParameterException e, String[] args) {
