@@ -70,7 +70,7 @@ final class IssueCommand implements Callable<Integer> {
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
         PackageFolder target = PackageFolder.of(
                 folder, design.project().number(), design.project().revision());
-        target.refuseIfIssued();
+        target.prepare();
         Job.Done done = desk.compute(design, stage);
         target.write(files(target.name(), done, stage), done.results().furniture());
         PrintWriter out = spec.commandLine().getOut();
