@@ -6,6 +6,7 @@ import java.util.Collection;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.function.Consumer;
 import nappe.input.InputReader;
 import nappe.input.InputRefused;
 import nappe.job.CheckRow;
@@ -83,10 +84,10 @@ final class Desk {
         return review == null ? List.of() : review.remarks(names);
     }
 
-    /** Reads an input workbook and computes it; faults as InputRefused. */
-    Job.Done compute(Path input, Design design) {
+    /** Computes the design of an input workbook and tells the stages; faults as InputRefused. */
+    Job.Done compute(Path input, Design design, Consumer<String> stage) {
         try {
-            return new Job(methods, Nappe.version()).run(design, checks());
+            return new Job(methods, Nappe.version()).telling(stage).run(design, checks());
         } catch (StationException e) {
             throw Failures.at(String.valueOf(input.getFileName()), e);
         }

@@ -3,6 +3,7 @@ package nappe.cli;
 import java.io.PrintWriter;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
+import java.util.function.Consumer;
 import nappe.job.Job;
 import nappe.station.Design;
 import picocli.CommandLine;
@@ -31,12 +32,14 @@ final class InspectCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        Consumer<String> stage = Nappe.stage(spec);
+        stage.accept("reading the workbook");
         Desk desk = house.desk();
         Design design = marked.read(desk, input);
         house.tellRemarks(
                 desk, design.elements().stream().map(Design.Element::method).toList());
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
-        Job.Done done = desk.compute(input, design);
+        Job.Done done = desk.compute(input, design, stage);
         PrintWriter out = spec.commandLine().getOut();
         out.println(design.project().project() + ": " + design.project().subject());
         out.println(design.elements().size() + " element(s), " + design.cases().size() + " flow case(s), no faults.");

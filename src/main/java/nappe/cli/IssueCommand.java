@@ -7,6 +7,7 @@ import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.concurrent.Callable;
+import java.util.function.Consumer;
 import nappe.calculation.Block;
 import nappe.deliver.csv.RatingCsv;
 import nappe.deliver.pdf.Attachment;
@@ -58,6 +59,8 @@ final class IssueCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws IOException {
+        Consumer<String> stage = Nappe.stage(spec);
+        stage.accept("reading the workbook");
         Desk desk = house.desk();
         Design design = marked.read(desk, input);
         house.tellRemarks(
@@ -66,19 +69,21 @@ final class IssueCommand implements Callable<Integer> {
         PackageFolder target = PackageFolder.of(
                 folder, design.project().number(), design.project().revision());
         target.refuseIfIssued();
-        Job.Done done = desk.compute(input, design);
-        target.write(files(target.name(), done), done.results().furniture());
+        Job.Done done = desk.compute(input, design, stage);
+        target.write(files(target.name(), done, stage), done.results().furniture());
         PrintWriter out = spec.commandLine().getOut();
         out.println("Wrote " + target.path());
         new VerdictList(done.results()).print(out);
         return ExitStatus.DONE;
     }
 
-    private Map<String, byte[]> files(String name, Job.Done done) {
+    private Map<String, byte[]> files(String name, Job.Done done, Consumer<String> stage) {
         Results results = done.results();
         Furniture furniture = results.furniture();
         Map<String, byte[]> files = new LinkedHashMap<>();
+        stage.accept("writing the workbook");
         byte[] workbook = XlsxDelivery.render(results);
+        stage.accept("setting the PDF");
         PdfDelivery pdf = PdfDelivery.render(results, new Attachment(name + ".xlsx", workbook));
         pdf.warnings().forEach(warning -> spec.commandLine().getErr().println("nappe: " + warning));
         files.put(name + ".pdf", pdf.bytes());

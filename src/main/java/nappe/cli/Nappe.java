@@ -2,11 +2,14 @@ package nappe.cli;
 
 import java.io.IOException;
 import java.io.InputStream;
+import java.io.OutputStreamWriter;
 import java.io.PrintWriter;
 import java.io.UncheckedIOException;
+import java.io.Writer;
 import java.nio.charset.StandardCharsets;
 import java.util.Locale;
 import java.util.Properties;
+import java.util.function.Consumer;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 
@@ -31,21 +34,42 @@ public final class Nappe implements Runnable {
     @CommandLine.Spec
     private CommandLine.Model.CommandSpec spec;
 
+    /** So long a person waits before being told what the program is busy with. */
+    private static final long PATIENCE_MILLIS = 1000;
+
+    private final Consumer<String> stage;
+
+    private Nappe(Consumer<String> stage) {
+        this.stage = stage;
+    }
+
     /** Runs the program and ends with its exit status. */
     public static void main(String[] args) {
+        Writer out = new OutputStreamWriter(System.out, StandardCharsets.UTF_8);
+        Writer err = new OutputStreamWriter(System.err, StandardCharsets.UTF_8);
+        if (!Terminal.isWatched()) {
+            System.exit(run(args, new PrintWriter(out, true), new PrintWriter(err, true)));
+        }
+        ProgressLine line = ProgressLine.on(err, PATIENCE_MILLIS);
+        Runtime.getRuntime().addShutdownHook(new Thread(line::end, "progress-end"));
         System.exit(run(
+                new Nappe(line::stage),
                 args,
-                new PrintWriter(new java.io.OutputStreamWriter(System.out, StandardCharsets.UTF_8), true),
-                new PrintWriter(new java.io.OutputStreamWriter(System.err, StandardCharsets.UTF_8), true)));
+                new PrintWriter(line.before(out), true),
+                new PrintWriter(line.before(err), true)));
     }
 
     /** Runs one command; results go to the first writer, messages to the second. */
     public static int run(String[] args, PrintWriter out, PrintWriter err) {
+        return run(new Nappe(words -> {}), args, out, err);
+    }
+
+    private static int run(Nappe nappe, String[] args, PrintWriter out, PrintWriter err) {
         System.setProperty("java.awt.headless", "true");
         System.setProperty("log4j.provider", "org.apache.logging.log4j.simple.internal.SimpleProvider");
         System.setProperty("org.apache.logging.log4j.simplelog.level", "OFF");
         Locale.setDefault(Locale.ROOT);
-        CommandLine line = new CommandLine(new Nappe())
+        CommandLine line = new CommandLine(nappe)
                 .setOut(out)
                 .setErr(err)
                 .setUsageHelpWidth(110)
@@ -65,6 +89,11 @@ public final class Nappe implements Runnable {
     @Override
     public void run() {
         spec.commandLine().usage(spec.commandLine().getOut());
+    }
+
+    /** Where a command tells, in words, what it is busy with; shown only to a person who waits. */
+    static Consumer<String> stage(CommandLine.Model.CommandSpec command) {
+        return command.root().userObject() instanceof Nappe nappe ? nappe.stage : words -> {};
     }
 
     /** The version, from the build. */

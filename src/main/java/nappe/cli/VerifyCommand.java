@@ -60,6 +60,7 @@ final class VerifyCommand implements Callable<Integer> {
             rows.addAll(desk.checks());
         }
         rows.addAll(named());
+        Nappe.stage(spec).accept("running " + rows.size() + " check values");
         Verification verification = new Verification(desk.methods());
         PrintWriter out = spec.commandLine().getOut();
         HouseLibrary own = desk.house();
