@@ -69,7 +69,7 @@ final class IssueCommand implements Callable<Integer> {
         PackageFolder target = PackageFolder.of(
                 folder, design.project().number(), design.project().revision());
         target.refuseIfIssued();
-        Job.Done done = desk.compute(input, design, stage);
+        Job.Done done = desk.compute(design, stage);
         target.write(files(target.name(), done, stage), done.results().furniture());
         PrintWriter out = spec.commandLine().getOut();
         out.println("Wrote " + target.path());
