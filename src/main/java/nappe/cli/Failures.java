@@ -11,7 +11,6 @@ import nappe.method.MethodException;
 import nappe.source.TextException;
 import nappe.source.TextFault;
 import nappe.station.DesignFault;
-import nappe.station.StationException;
 import picocli.CommandLine;
 
 /** Turns what a command throws into messages and an exit status; never a stack trace on the screen. */
@@ -56,9 +55,8 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
     }
 
     /** The faults of a design at their cells of the input workbook. */
-    static InputRefused at(String file, StationException e) {
-        return new InputRefused(
-                e.faults().stream().map(fault -> at(file, fault)).toList());
+    static InputRefused at(String file, List<DesignFault> faults) {
+        return new InputRefused(faults.stream().map(fault -> at(file, fault)).toList());
     }
 
     private static Fault at(String file, DesignFault fault) {

@@ -36,7 +36,7 @@ final class InspectCommand implements Callable<Integer> {
         house.tellRemarks(
                 desk, design.elements().stream().map(Design.Element::method).toList());
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
-        Job.Done done = desk.compute(input, design);
+        Job.Done done = desk.compute(design);
         PrintWriter out = spec.commandLine().getOut();
         out.println(design.project().project() + ": " + design.project().subject());
         out.println(design.elements().size() + " element(s), " + design.cases().size() + " flow case(s), no faults.");

@@ -66,7 +66,7 @@ final class IssueCommand implements Callable<Integer> {
         PackageFolder target = PackageFolder.of(
                 folder, design.project().number(), design.project().revision());
         target.refuseIfIssued();
-        Job.Done done = desk.compute(input, design);
+        Job.Done done = desk.compute(design);
         target.write(files(target.name(), done), done.results().furniture());
         PrintWriter out = spec.commandLine().getOut();
         out.println("Wrote " + target.path());

@@ -47,7 +47,17 @@ final class StatementParts {
     /** Notes the symbols that the statement would define, however much of it can be read. */
     void noteDefined() {
         String defines = switch (statement.word()) {
-            case "method", "about", "caution", "source", "include", "table", "limit", "rating", "screen", "give" -> "";
+            case "method",
+                    "about",
+                    "caution",
+                    "source",
+                    "include",
+                    "table",
+                    "limit",
+                    "geometry",
+                    "rating",
+                    "screen",
+                    "give" -> "";
             case "at" -> text(0).substring(text(0).indexOf(':') + 1);
             default -> text(0).split(",", 2)[0];
         };

@@ -74,6 +74,7 @@ final class StatementReader {
             case "root" -> formulas.root();
             case "at" -> formulas.at();
             case "limit" -> formulas.limit();
+            case "geometry" -> formulas.geometry();
             case "rating" -> formulas.rating();
             case "screen" -> new ScreenStatement(parts).read();
             case "give" -> give();
