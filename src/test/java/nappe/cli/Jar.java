@@ -14,12 +14,16 @@ import java.util.stream.Stream;
 /** The packed program in a Java of its own, as a user runs it. */
 final class Jar {
     private static final long PATIENCE_SECONDS = 120;
+    private final Path jar;
     private final Path folder;
     private final List<String> before;
+    private final String language;
 
-    private Jar(Path folder, List<String> before) {
+    private Jar(Path jar, Path folder, List<String> before, String language) {
+        this.jar = jar;
         this.folder = folder;
         this.before = before;
+        this.language = language;
     }
 
     /** What one run said, and how long it took. */
@@ -50,16 +54,23 @@ final class Jar {
     /** The packed program, run from a folder; what it wants to keep for itself goes into a folder {@code tmp} there. */
     static Jar in(Path folder) throws IOException {
         Files.createDirectories(folder.resolve("tmp"));
-        return new Jar(folder, List.of());
+        Path packed = Path.of(System.getProperty("nappe.jar", "target/nappe-0.1.0.jar"));
+        return new Jar(packed.toAbsolutePath(), folder, List.of(), "C.UTF-8");
     }
 
     /** The same, with words before the command: another user, a limit. */
     Jar after(String... words) {
-        return new Jar(folder, List.of(words));
+        return new Jar(jar, folder, List.of(words), language);
     }
 
-    static Path file() {
-        return Path.of(System.getProperty("nappe.jar", "target/nappe-0.1.0.jar")).toAbsolutePath();
+    /** The same, in a shell set to another language. */
+    Jar inLanguage(String name) {
+        return new Jar(jar, folder, before, name);
+    }
+
+    /** The same, from a copy of the packed program. */
+    Jar copiedTo(Path copy) throws IOException {
+        return new Jar(Files.copy(jar, copy), folder, before, language);
     }
 
     Said run(Object... args) throws IOException {
@@ -67,7 +78,7 @@ final class Jar {
     }
 
     Started start(Object... args) throws IOException {
-        List<String> command = java("-jar", file().toString());
+        List<String> command = java("-jar", jar.toString());
         Stream.of(args).map(Object::toString).forEach(command::add);
         return start(command);
     }
@@ -76,7 +87,7 @@ final class Jar {
     Said runClass(Class<?> main, List<String> args) throws IOException {
         List<String> command = java(
                 "-cp",
-                file() + java.io.File.pathSeparator + Path.of("target/test-classes").toAbsolutePath(),
+                jar + java.io.File.pathSeparator + Path.of("target/test-classes").toAbsolutePath(),
                 main.getName());
         command.addAll(args);
         return start(command).said();
@@ -97,7 +108,7 @@ final class Jar {
                 .directory(folder.toFile())
                 .redirectOutput(out.toFile())
                 .redirectError(err.toFile());
-        builder.environment().put("LC_ALL", "C.UTF-8");
+        builder.environment().put("LC_ALL", language);
         return new Started(builder.start(), out, err, System.nanoTime());
     }
 
