@@ -13,6 +13,7 @@ import nappe.deliver.csv.RatingCsv;
 import nappe.deliver.pdf.Attachment;
 import nappe.deliver.pdf.PdfDelivery;
 import nappe.deliver.xlsx.XlsxDelivery;
+import nappe.job.Beside;
 import nappe.job.Job;
 import nappe.results.Furniture;
 import nappe.results.Results;
@@ -70,7 +71,7 @@ final class IssueCommand implements Callable<Integer> {
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
         PackageFolder target = PackageFolder.of(
                 folder, design.project().number(), design.project().revision());
-        target.refuseIfIssued();
+        target.prepare();
         Job.Done done = desk.compute(design, stage);
         target.write(files(target.name(), done, stage), done.results().furniture());
         PrintWriter out = spec.commandLine().getOut();
@@ -83,13 +84,18 @@ final class IssueCommand implements Callable<Integer> {
         Results results = done.results();
         Furniture furniture = results.furniture();
         Map<String, byte[]> files = new LinkedHashMap<>();
-        stage.accept("writing the workbook");
-        byte[] workbook = XlsxDelivery.render(results);
-        stage.accept("setting the PDF");
-        PdfDelivery pdf = PdfDelivery.render(results, new Attachment(name + ".xlsx", workbook));
+        stage.accept("writing the workbook and setting the PDF");
+        Beside<byte[]> workbook = Beside.start("workbook", () -> XlsxDelivery.render(results));
+        PdfDelivery pdf;
+        try {
+            pdf = PdfDelivery.render(results, new Attachment(name + ".xlsx", workbook::outcome));
+        } finally {
+            // where both fail, the workbook's failure is told
+            workbook.outcome();
+        }
         pdf.warnings().forEach(warning -> spec.commandLine().getErr().println("nappe: " + warning));
         files.put(name + ".pdf", pdf.bytes());
-        files.put(name + ".xlsx", workbook);
+        files.put(name + ".xlsx", workbook.outcome());
         for (Map.Entry<String, Block.Table> rating : done.ratings().entrySet()) {
             String csv = RatingCsv.write(results, rating.getValue());
             files.put(name + "_" + rating.getKey() + "-rating.csv", csv.getBytes(StandardCharsets.UTF_8));

@@ -7,6 +7,8 @@ import java.io.PrintWriter;
 import java.io.UncheckedIOException;
 import java.io.Writer;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.InvalidPathException;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
 import java.util.Properties;
@@ -108,7 +110,22 @@ public final class Nappe implements Runnable {
                 .setUsageHelpWidth(110)
                 .setParameterExceptionHandler(new WrongUsage())
                 .setExecutionExceptionHandler(new Failures());
-        return line.execute(asHelp(args));
+        line.registerConverter(Path.class, Nappe::path);
+        try {
+            return line.execute(asHelp(args));
+        } catch (OutOfMemoryError | StackOverflowError e) {
+            return Failures.internal(err, e);
+        }
+    }
+
+    private static Path path(String typed) {
+        try {
+            return Path.of(typed);
+        } catch (InvalidPathException e) {
+            throw new CommandLine.TypeConversionException("\"" + typed
+                    + "\" has signs that a file name cannot have here. If it looks right, the language set in this shell has no"
+                    + " such letters: set one that has, such as LC_ALL=C.UTF-8, and run again");
+        }
     }
 
     /** {@code nappe help issue} is {@code nappe issue --help}. */

@@ -77,7 +77,12 @@ public final class Job {
      */
     public Done run(Design design, List<CheckRow> checks) {
         stage.accept("looking for the flows at the limits");
-        return run(design, checks, FlowSearch.of(design, methods::sheet));
+        Map<String, MethodSheet> used = used(design);
+        Beside<SoftwareStatement> software = Beside.start("check values", () -> statement(used, checks));
+        Beside<Map<String, List<SizeRerun>>> sizes =
+                Beside.start("sizes", () -> new SizeReruns(design, methods::sheet).run());
+        FoundFlows found = FlowSearch.of(design, methods::sheet);
+        return done(design, used, found, software.outcome(), sizes.outcome());
     }
 
     /**
@@ -87,12 +92,26 @@ public final class Job {
      * @throws nappe.station.StationException where entries do not fit the methods
      */
     public Done run(Design design, List<CheckRow> checks, FoundFlows found) {
-        Map<String, MethodSheet> used = new LinkedHashMap<>();
-        design.elements().forEach(e -> used.computeIfAbsent(e.method(), methods::sheet));
+        Map<String, MethodSheet> used = used(design);
         stage.accept("running the check values");
         SoftwareStatement software = statement(used, checks);
         stage.accept("comparing sizes");
         Map<String, List<SizeRerun>> sizes = new SizeReruns(design, methods::sheet).run();
+        return done(design, used, found, software, sizes);
+    }
+
+    private Map<String, MethodSheet> used(Design design) {
+        Map<String, MethodSheet> used = new LinkedHashMap<>();
+        design.elements().forEach(e -> used.computeIfAbsent(e.method(), methods::sheet));
+        return used;
+    }
+
+    private Done done(
+            Design design,
+            Map<String, MethodSheet> used,
+            FoundFlows found,
+            SoftwareStatement software,
+            Map<String, List<SizeRerun>> sizes) {
         stage.accept("computing");
         PackageLayout.Layout layout = PackageLayout.of(
                 design,

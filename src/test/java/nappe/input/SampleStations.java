@@ -27,6 +27,10 @@ public final class SampleStations {
                 () -> bytes(SampleStations::headworks),
                 "inlet-works.xlsx",
                 () -> bytes(SampleStations::inlet),
+                "pumping-main.xlsx",
+                () -> bytes(PressureStations::pumpingMain),
+                "reuse-line.xlsx",
+                () -> bytes(PressureStations::reuseLine),
                 "return-weir.xlsx",
                 () -> bytes(SampleStations::weir));
     }
@@ -55,7 +59,7 @@ public final class SampleStations {
         return filler(system, new Chosen(tag, method));
     }
 
-    private static Filler filler(WorkingSystem system, Chosen... elements) throws IOException {
+    static Filler filler(WorkingSystem system, Chosen... elements) throws IOException {
         return new Filler(BlankWriter.bytes(system, List.of(elements), METHODS));
     }
 
