@@ -69,9 +69,15 @@ class MethodOverviewTest {
         assertThat(NUMERAL.matcher(said).results().map(found -> found.group())).allMatch(known::contains, "stands in what is calculated");
     }
 
-    /** How many rows a table has, and how many with each of its words. */
+    /** How many rows a table has, and how many with each of its words; the numbers in its words. */
     private static Set<String> counts(CitedTable table) {
         Set<String> counts = new TreeSet<>(Set.of(Integer.toString(table.rows())));
+        table.columns().stream()
+                .flatMap(column -> column.values().stream())
+                .filter(Value.Word.class::isInstance)
+                .forEach(word -> NUMERAL.matcher(((Value.Word) word).text())
+                        .results()
+                        .forEach(found -> counts.add(found.group())));
         for (CitedTable.Column column : table.columns()) {
             Map<Value, Long> rows =
                     column.values().stream().collect(Collectors.groupingBy(value -> value, Collectors.counting()));
@@ -92,10 +98,17 @@ class MethodOverviewTest {
 
     @Test
     void aRangeFollowsFromTheLimitsWhereTheSheetSaysNone() {
-        NappeTest.Said said = nappe("blank", "--methods", "--house", MillRace.HOUSE);
+        NappeTest.Said said = nappe("blank", "--methods", "mill-race-weir", "--house", MillRace.HOUSE);
         assertThat(said.out())
                 .contains("mill-race-weir  Broad-crested weir with a rounded nose (house method, folder house-example)")
                 .contains("least head (h_1 from 0.06 m)", "flow is free: drowning ratio (s_t up to 0.66)")
                 .contains("check values of the house: ");
+    }
+
+    @Test
+    void theListToChooseFromHasEveryMethodInTwoLines() {
+        NappeTest.Said said = nappe("blank", "--methods");
+        assertThat(said.out().lines()).hasSize(2 * names().size() + 2);
+        names().forEach(name -> assertThat(said.out()).contains(name + "  "));
     }
 }
