@@ -7,6 +7,7 @@ import java.nio.file.Path;
 import java.util.List;
 import nappe.input.Fault;
 import nappe.input.InputRefused;
+import nappe.input.NotWritten;
 import nappe.method.MethodException;
 import nappe.source.TextException;
 import nappe.source.TextFault;
@@ -66,16 +67,20 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
 
     private static String inWords(java.io.IOException failure) {
         String message = String.valueOf(failure.getMessage());
-        if (failure instanceof java.nio.file.AccessDeniedException) {
-            return "no right to write " + message;
+        if (failure instanceof NotWritten) {
+            return message;
         }
-        if (failure instanceof java.nio.file.NoSuchFileException) {
-            return "cannot write " + message + ": there is no such folder, or no right to make one";
+        if (failure instanceof java.nio.file.FileAlreadyExistsException) {
+            return message + " is there already; it is not written over. Name another file.";
+        }
+        if (failure instanceof java.nio.file.AccessDeniedException) {
+            return "no right to use " + message + ", or it is open in another program";
         }
         return message;
     }
 
-    private static int internal(PrintWriter err, Exception failure) {
+    /** A fault of the program itself, or of the machine it runs on; the details go into a file. */
+    static int internal(PrintWriter err, Throwable failure) {
         StringWriter trace = new StringWriter();
         failure.printStackTrace(new PrintWriter(trace));
         try {

@@ -26,7 +26,7 @@ class MarkedCopyTest {
         Path copy = folder.resolve("headworks-marked.xlsx");
         InputRefused refused = catchThrowableOfType(InputRefused.class, () -> InputReader.read(file, Samples.METHODS));
 
-        assertThat(MarkedCopy.write(file, copy, refused.faults())).isEqualTo(3);
+        assertThat(MarkedCopy.write(file, copy, refused.faults())).isEqualTo(new MarkedCopy.Outcome(3, "Faults", null));
 
         assertThat(Files.readAllBytes(file)).isEqualTo(before);
         try (XSSFWorkbook workbook = new XSSFWorkbook(Files.newInputStream(copy))) {
@@ -49,8 +49,11 @@ class MarkedCopyTest {
     void faultOfTheWholeFileMakesNoCopy() throws IOException {
         Path copy = folder.resolve("copy.xlsx");
         assertThat(MarkedCopy.write(
-                        folder.resolve("none.xlsx"), copy, List.of(new Fault("none.xlsx", null, null, "x", "y"))))
-                .isZero();
+                                folder.resolve("none.xlsx"),
+                                copy,
+                                List.of(new Fault("none.xlsx", null, null, "x", "y")))
+                        .written())
+                .isFalse();
         assertThat(copy).doesNotExist();
     }
 }

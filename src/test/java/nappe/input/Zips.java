@@ -14,10 +14,10 @@ import java.util.zip.ZipInputStream;
 import java.util.zip.ZipOutputStream;
 
 /** A workbook taken apart, to be put together with something wrong in it. */
-final class Zips {
+public final class Zips {
     private final Map<String, byte[]> parts = new LinkedHashMap<>();
 
-    static Zips of(byte[] zip) throws IOException {
+    public static Zips of(byte[] zip) throws IOException {
         Zips zips = new Zips();
         try (ZipInputStream in = new ZipInputStream(new ByteArrayInputStream(zip))) {
             for (ZipEntry entry = in.getNextEntry(); entry != null; entry = in.getNextEntry()) {
@@ -32,17 +32,17 @@ final class Zips {
         return of(Samples.filled().bytes());
     }
 
-    Zips with(String name, String text) {
+    public Zips with(String name, String text) {
         parts.put(name, text.getBytes(StandardCharsets.UTF_8));
         return this;
     }
 
-    Zips without(String name) {
+    public Zips without(String name) {
         parts.remove(name);
         return this;
     }
 
-    Zips change(String name, UnaryOperator<String> change) {
+    public Zips change(String name, UnaryOperator<String> change) {
         String before = new String(parts.get(name), StandardCharsets.UTF_8);
         String after = change.apply(before);
         if (after.equals(before)) {
@@ -51,7 +51,7 @@ final class Zips {
         return with(name, after);
     }
 
-    byte[] bytes() throws IOException {
+    public byte[] bytes() throws IOException {
         ByteArrayOutputStream bytes = new ByteArrayOutputStream();
         try (ZipOutputStream out = new ZipOutputStream(bytes)) {
             for (Map.Entry<String, byte[]> part : parts.entrySet()) {
@@ -63,7 +63,7 @@ final class Zips {
         return bytes.toByteArray();
     }
 
-    Path save(Path file) throws IOException {
+    public Path save(Path file) throws IOException {
         return Files.write(file, bytes());
     }
 }
