@@ -47,9 +47,10 @@ public final class RatingGrid {
         List<Block.Column> columns = new ArrayList<>();
         TableDraft table = sheet.table(title, columns);
         for (int i = 0; i <= rating.steps(); i++) {
-            Strip members = row(rating, free, inner, table, i);
+            List<String> reported = new ArrayList<>();
+            Strip members = row(rating, free, inner, table, i, reported);
             if (i == 0) {
-                columns.addAll(columns(rating, free, members));
+                columns.addAll(columns(free, members, reported));
             }
         }
         sheet.gap();
@@ -62,7 +63,8 @@ public final class RatingGrid {
         return cell;
     }
 
-    private Strip row(Rating rating, Item.Free free, Scope ends, TableDraft table, int i) {
+    /** @param reported takes the heads of the results that are shown once more in the unit of reports */
+    private Strip row(Rating rating, Item.Free free, Scope ends, TableDraft table, int i, List<String> reported) {
         Cells cells = items.cells();
         List<Block.Item> shown = new ArrayList<>(List.of(new Block.Text(Integer.toString(i))));
         Formula share = over(
@@ -89,13 +91,14 @@ public final class RatingGrid {
             Unit report = reports.get(cell.unit().dimension());
             if (report != null) {
                 shown.add(new Block.Content(cells.factors().toReport(table.place(column++), result, cell, report)));
+                reported.add(result + " [" + report + "]");
             }
         }
         table.add(shown);
         return strip;
     }
 
-    private List<Block.Column> columns(Rating rating, Item.Free free, Strip members) {
+    private List<Block.Column> columns(Item.Free free, Strip members, List<String> reported) {
         List<Block.Column> columns = new ArrayList<>();
         columns.add(new Block.Column("Step", 6, Block.Align.RIGHT));
         columns.add(column(head(free.symbol(), free.unit())));
@@ -104,14 +107,7 @@ public final class RatingGrid {
             columns.add(column(free.symbol() + " [" + freeReport + "]"));
         }
         members.heads().forEach(head -> columns.add(column(head)));
-        for (String result : rating.results()) {
-            if (method.item(result) instanceof Item.Line line && line.unit() != null) {
-                Unit report = reports.get(line.unit().dimension());
-                if (report != null) {
-                    columns.add(column(result + " [" + report + "]"));
-                }
-            }
-        }
+        reported.forEach(head -> columns.add(column(head)));
         return columns;
     }
 
