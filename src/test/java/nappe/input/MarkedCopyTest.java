@@ -104,7 +104,9 @@ class MarkedCopyTest {
                     sheet.getRow(8).getCell(3).setCellComment(note);
                 })
                 .save(folder.resolve("with a note.xlsx"));
-        Zips.sound().change(FLOWS, s -> s.replace(cell, cell.replace("1.5", "abc"))).save(folder.resolve("number.xlsx"));
+        Zips.sound()
+                .change(FLOWS, s -> s.replace(cell, cell.replace("1.5", "abc")))
+                .save(folder.resolve("number.xlsx"));
         Zips.sound()
                 .change(FLOWS, s -> s.replace(cell, cell.replace("\"7\"", "\"999\"")))
                 .save(folder.resolve("style.xlsx"));
@@ -152,8 +154,10 @@ class MarkedCopyTest {
             XSSFSheet list = workbook.getSheet("Faults");
             assertThat(workbook.getSheetIndex(list)).isEqualTo(workbook.getNumberOfSheets() - 1);
             for (int i = 0; i < faults.size(); i++) {
-                assertThat(list.getRow(4 + i).getCell(2)).hasToString(faults.get(i).message());
-                assertThat(list.getRow(4 + i).getCell(3)).hasToString(faults.get(i).code());
+                assertThat(list.getRow(4 + i).getCell(2))
+                        .hasToString(faults.get(i).message());
+                assertThat(list.getRow(4 + i).getCell(3))
+                        .hasToString(faults.get(i).code());
             }
             assertThat(list.getLastRowNum()).isEqualTo(3 + faults.size());
         }
@@ -168,10 +172,14 @@ class MarkedCopyTest {
                 assertThat(bare(is)).as(kind + " " + part).isEqualTo(bare(was));
             } else if (part.equals("xl/sharedStrings.xml") || part.equals("xl/styles.xml")) {
                 for (String list : List.of("si", "xf", "font", "fill", "border", "numFmt")) {
-                    assertThat(elements(is, list)).as(kind + " " + part).startsWith(elements(was, list).toArray(String[]::new));
+                    assertThat(elements(is, list))
+                            .as(kind + " " + part)
+                            .startsWith(elements(was, list).toArray(String[]::new));
                 }
             } else if (part.equals("xl/workbook.xml")) {
-                assertThat(is.replaceFirst("<sheet name=\"Faults\"[^>]*/>", "")).as(kind).isEqualTo(was);
+                assertThat(is.replaceFirst("<sheet name=\"Faults\"[^>]*/>", ""))
+                        .as(kind)
+                        .isEqualTo(was);
             } else if (part.startsWith("docProps") || part.contains("externalLink")) {
                 assertThat(bare(is)).as(kind + " " + part).isEqualTo(bare(was));
             }
@@ -199,7 +207,12 @@ class MarkedCopyTest {
         Path copy = folder.resolve("copy.xlsx");
         MarkedCopy.write(file, copy, refused(file).faults());
         try (XSSFWorkbook workbook = new XSSFWorkbook(Files.newInputStream(copy))) {
-            assertThat(workbook.getSheet("Flows").getRow(8).getCell(3).getCellComment().getString().getString())
+            assertThat(workbook.getSheet("Flows")
+                            .getRow(8)
+                            .getCell(3)
+                            .getCellComment()
+                            .getString()
+                            .getString())
                     .isEqualTo("of the engineer\n\"12,5\" is not a number; write 12.5 (fault: number-expected)");
         }
     }
@@ -220,7 +233,10 @@ class MarkedCopyTest {
         files.put(
                 "large",
                 Zips.sound()
-                        .change(FLOWS, s -> s.replace(cell, cell.replace("1.5", "abc")).replace("</sheetData>", large + "</sheetData>")));
+                        .change(
+                                FLOWS,
+                                s -> s.replace(cell, cell.replace("1.5", "abc"))
+                                        .replace("</sheetData>", large + "</sheetData>")));
         files.put(
                 "odd elsewhere",
                 Zips.sound()
