@@ -6,6 +6,7 @@ import java.util.Collection;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.function.Consumer;
 import nappe.input.InputReader;
 import nappe.input.InputRefused;
 import nappe.job.CheckRow;
@@ -17,7 +18,8 @@ import nappe.source.HouseLibrary;
 import nappe.source.TextException;
 import nappe.source.TextFault;
 import nappe.station.Design;
-import nappe.station.StationException;
+import nappe.station.DesignCheck;
+import nappe.station.DesignFault;
 import org.jspecify.annotations.Nullable;
 
 /** What the commands share: the methods, built in and of the house, the check values, one design carried through. */
@@ -83,13 +85,9 @@ final class Desk {
         return review == null ? List.of() : review.remarks(names);
     }
 
-    /** Reads an input workbook and computes it; faults as InputRefused. */
-    Job.Done compute(Path input, Design design) {
-        try {
-            return new Job(methods, Nappe.version()).run(design, checks());
-        } catch (StationException e) {
-            throw Failures.at(String.valueOf(input.getFileName()), e);
-        }
+    /** Computes a design that was read and checked, and tells the stages. */
+    Job.Done compute(Design design, Consumer<String> stage) {
+        return new Job(methods, Nappe.version()).telling(stage).run(design, checks());
     }
 
     /** Reads an input workbook; where its methods have faults, these are told and not what follows from them. */
@@ -98,6 +96,10 @@ final class Desk {
         try {
             Design design = InputReader.read(input, asked);
             requireSound(asked.asked());
+            List<DesignFault> faults = DesignCheck.faults(design, methods::sheet);
+            if (!faults.isEmpty()) {
+                throw Failures.at(String.valueOf(input.getFileName()), faults);
+            }
             return design;
         } catch (InputRefused e) {
             requireSound(asked.asked());

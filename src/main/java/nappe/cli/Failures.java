@@ -12,11 +12,13 @@ import nappe.method.MethodException;
 import nappe.source.TextException;
 import nappe.source.TextFault;
 import nappe.station.DesignFault;
-import nappe.station.StationException;
 import picocli.CommandLine;
 
 /** Turns what a command throws into messages and an exit status; never a stack trace on the screen. */
 final class Failures implements CommandLine.IExecutionExceptionHandler {
+    /** So the faults of a damaged file start, whatever is wrong inside. */
+    private static final String DAMAGED = "the file is damaged";
+
     @Override
     public int handleExecutionException(Exception failure, CommandLine line, CommandLine.ParseResult parsed) {
         PrintWriter err = line.getErr();
@@ -42,6 +44,10 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
 
     private static int refused(PrintWriter err, List<Fault> faults) {
         faults.forEach(fault -> err.println(fault));
+        if (faults.stream().anyMatch(fault -> fault.message().startsWith(DAMAGED))) {
+            err.println("A damaged file: open it in a spreadsheet program, look it through and save it under a new name, or get"
+                    + " it again from where it came from.");
+        }
         err.println(
                 faults.size() == 1
                         ? "1 fault; no package was written."
@@ -57,9 +63,8 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
     }
 
     /** The faults of a design at their cells of the input workbook. */
-    static InputRefused at(String file, StationException e) {
-        return new InputRefused(
-                e.faults().stream().map(fault -> at(file, fault)).toList());
+    static InputRefused at(String file, List<DesignFault> faults) {
+        return new InputRefused(faults.stream().map(fault -> at(file, fault)).toList());
     }
 
     private static Fault at(String file, DesignFault fault) {

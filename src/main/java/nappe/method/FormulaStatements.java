@@ -194,6 +194,34 @@ final class FormulaStatements {
         }
     }
 
+    void geometry() {
+        FormulaParser parser = parts.parser(0);
+        Formula condition = renamed(parser.condition());
+        parser.end();
+        dimensions(parser).condition(condition);
+        List<String> entries = new ArrayList<>();
+        for (String symbol : SymbolsReading.of(condition)) {
+            Item item = draft.item(symbol);
+            if (item instanceof Item.Given given
+                    && (given.from() == Item.From.ENTRY || given.from() == Item.From.CHOICE)) {
+                entries.add(symbol);
+            } else if (!(item instanceof Item.Constant)) {
+                throw parts.fault(
+                        symbol + " is not typed once for the device; geometry compares entries, choices and constants",
+                        "not-an-entry");
+            }
+        }
+        if (entries.isEmpty()) {
+            throw parts.fault("geometry compares at least one entry", "not-an-entry");
+        }
+        String label = parts.text(1);
+        if (label.isEmpty()) {
+            throw parts.fault(
+                    "say in words what is asked: geometry d < D ; the bore is smaller than the pipe", "label-missing");
+        }
+        draft.geometry.add(new Geometry(condition, List.copyOf(entries), label));
+    }
+
     /** Whether a side rests on a case: then it is what is judged. */
     private boolean varies(Formula side) {
         return SymbolsReading.of(side).stream()

@@ -14,6 +14,7 @@ import org.jspecify.annotations.Nullable;
  * @param about paragraphs on the method and the limits of its use
  * @param cautions printed on the sheets of the device
  * @param items in the order of the text
+ * @param geometry what a device must satisfy to exist at all
  * @param screen what is compared over the words of a choice, or null
  * @param gives role ("water level") to the symbol offered to the neighbour upstream
  * @param reach for each symbol, all the symbols it rests on, less those that are bound on the way
@@ -28,6 +29,7 @@ public record MethodSheet(
         List<Publication> sources,
         List<Item> items,
         List<Limit> limits,
+        List<Geometry> geometry,
         List<Rating> ratings,
         @Nullable Screen screen,
         Map<String, String> gives,
@@ -37,10 +39,12 @@ public record MethodSheet(
 
     /** The item that defines a symbol, or null. */
     public @Nullable Item item(String symbol) {
-        return items.stream()
-                .filter(item -> item.outputs().contains(symbol))
-                .findFirst()
-                .orElse(null);
+        for (Item item : items) {
+            if (item.outputs().contains(symbol)) {
+                return item;
+            }
+        }
+        return null;
     }
 
     /** What a symbol rests on that is typed once per case or comes from a neighbour. */

@@ -23,6 +23,7 @@ final class SheetDraft {
     final Map<String, Publication> sources = new LinkedHashMap<>();
     final List<Item> items = new ArrayList<>();
     final List<Limit> limits = new ArrayList<>();
+    final List<Geometry> geometry = new ArrayList<>();
     final List<Rating> ratings = new ArrayList<>();
     final Map<String, String> gives = new LinkedHashMap<>();
     final Map<String, CitedTable> tables = new LinkedHashMap<>();
@@ -81,6 +82,15 @@ final class SheetDraft {
     /** Whether a symbol rests on what is typed once per case: what sums it up over the cases does not. */
     boolean isPerCase(String symbol) {
         return reach.getOrDefault(symbol, Set.of(symbol)).stream().anyMatch(this::isTypedPerCase);
+    }
+
+    /** The item that defines a symbol, or null. */
+    @Nullable
+    Item item(String symbol) {
+        return items.stream()
+                .filter(item -> item.outputs().contains(symbol))
+                .findFirst()
+                .orElse(null);
     }
 
     boolean isFree(String symbol) {
@@ -153,6 +163,7 @@ final class SheetDraft {
                 List.copyOf(sources.values()),
                 List.copyOf(items),
                 List.copyOf(limits),
+                List.copyOf(geometry),
                 List.copyOf(ratings),
                 screen,
                 Map.copyOf(gives),

@@ -47,7 +47,17 @@ final class StatementParts {
     /** Notes the symbols that the statement would define, however much of it can be read. */
     void noteDefined() {
         String defines = switch (statement.word()) {
-            case "method", "about", "caution", "source", "include", "table", "limit", "rating", "screen", "give" -> "";
+            case "method",
+                    "about",
+                    "caution",
+                    "source",
+                    "include",
+                    "table",
+                    "limit",
+                    "geometry",
+                    "rating",
+                    "screen",
+                    "give" -> "";
             case "at" -> text(0).substring(text(0).indexOf(':') + 1);
             default -> text(0).split(",", 2)[0];
         };
@@ -75,7 +85,13 @@ final class StatementParts {
 
     Unit unit(int field) {
         moveTo(field);
-        Unit unit = Unit.parse(text(field));
+        String text = text(field);
+        if (text.contains(" ") && !text.matches(".*[0-9/*^].*")) {
+            throw fault(
+                    "a unit stands here, not \"" + text + "\"; the unit of a pure number is 1: sym ; 1 ; label",
+                    "unit-missing");
+        }
+        Unit unit = Unit.parse(text);
         moveTo(0);
         return unit;
     }

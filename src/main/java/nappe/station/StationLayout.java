@@ -64,7 +64,7 @@ public final class StationLayout {
         this.design = design;
         this.sheets = sheets;
         design.elements().forEach(e -> methods.put(e.tag(), methodOf.apply(e.method())));
-        List<DesignFault> faults = DemandCheck.faults(design, methods);
+        List<DesignFault> faults = DesignCheck.faults(design, methodOf);
         if (!faults.isEmpty()) {
             throw new StationException(faults);
         }
@@ -327,11 +327,7 @@ public final class StationLayout {
         if (below == null && (role.equals("water level") || role.equals("energy level"))) {
             return cases.level(c);
         }
-        throw new StationException(List.of(new DesignFault(
-                new Design.Origin("Project", ""),
-                "nothing downstream gives a " + role
-                        + " to this element; put an element below it that does, or take it away",
-                "link-missing")));
+        throw new IllegalStateException("nothing gives a " + role + "; a design is checked for that before");
     }
 
     private List<ElementSheet.Demanded> demanded(Design.Element element, Map<Design.Demand, Cell> bounds) {

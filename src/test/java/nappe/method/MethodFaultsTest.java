@@ -544,6 +544,37 @@ class MethodFaultsTest {
                         new TextFault("nothing.txt", 1, 1, "there is no such method sheet", "method-missing", ""));
     }
 
+    @Test
+    void geometryComparesWhatIsTypedAndSaysItInWords() {
+        Texts texts = new Texts().method("pretend", """
+                        method Pretend
+                        entry d ; m ; bore
+                        entry D ; m ; pipe
+                        line b = d/D ; 1 ; ratio
+                        geometry d < D ; smaller
+                        geometry b < 1 ; smaller
+                        geometry d < 1 ; smaller
+                        geometry 1 < 2 ; smaller
+                        geometry d < D
+                        geometry d ; smaller""");
+        assertThat(faults(texts)).isEqualTo("""
+                pretend.txt:6:10: b is not typed once for the device; geometry compares entries, choices and constants (fault: not-an-entry)
+                    geometry b < 1 ; smaller
+                             ^
+                pretend.txt:7:10: length compared with a pure number; both sides must be alike (fault: unlike-dimensions)
+                    geometry d < 1 ; smaller
+                             ^
+                pretend.txt:8:10: geometry compares at least one entry (fault: not-an-entry)
+                    geometry 1 < 2 ; smaller
+                             ^
+                pretend.txt:9:10: say in words what is asked: geometry d < D ; the bore is smaller than the pipe (fault: label-missing)
+                    geometry d < D
+                             ^
+                pretend.txt:10:10: a condition is needed here, such as h < 2 ft (fault: not-a-condition)
+                    geometry d ; smaller
+                             ^""");
+    }
+
     private static String faults(Texts texts) {
         texts.table("pretend-sizes", "size,C [1],d [mm],kind\nsmall,2.5,3,narrow\nlarge,3.5,,wide\n")
                 .table("pretend-curve", "r [1],c [1],e [mm]\n0.2,0.5,1\n0.4,0.6,3\n0.8,0.7,4\n")

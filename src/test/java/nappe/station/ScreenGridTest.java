@@ -149,6 +149,7 @@ class ScreenGridTest {
                     method.sources(),
                     method.items(),
                     method.limits(),
+                    method.geometry(),
                     method.ratings(),
                     screen,
                     method.gives(),
