@@ -51,10 +51,27 @@ public final class PressureStations {
                         94,
                         "mm")
                 .row("Flows", "Three pumps", "1 h", "2040", 350, "L/s", 134.9, "m", "", brief, "known")
-                .row("Flows", "Three pumps, burst below", "15 min", "2040", 330, "L/s", 124.2, "m", "", brief, "assumed")
+                .row(
+                        "Flows",
+                        "Three pumps, burst below",
+                        "15 min",
+                        "2040",
+                        330,
+                        "L/s",
+                        124.2,
+                        "m",
+                        "",
+                        brief,
+                        "assumed")
                 .entry("V1", "kind", "as cast", null, drawing, "known")
                 .entry("V1", "reading", "two codes and memory", null, brief, "known")
-                .entry("V1", "loss", "fit, 15 degree exit", null, "Invented design brief OB-2, clause 3.2: the largest", "known")
+                .entry(
+                        "V1",
+                        "loss",
+                        "fit, 15 degree exit",
+                        null,
+                        "Invented design brief OB-2, clause 3.2: the largest",
+                        "known")
                 .entry("V1", "T", 8, "degC", "Invented water survey OB-W, winter", "known")
                 .entry("V1", "T_x", 21, "degC", "Invented water survey OB-W, summer", "known")
                 .entry("V1", "z_s", 120, "m", "Invented survey", "known")
