@@ -66,9 +66,9 @@ class PlateWeirTest {
             }
             weirs.add(weir("cipolletti-weir", random, random.nextDouble()));
             for (String set : List.of("curve points", "polynomial")) {
-                weirs.add(notch(random, "fully contracted", set, 20 + 80 * random.nextDouble()));
+                weirs.add(notch("v-notch-weir", random, "set", set));
             }
-            weirs.add(notch(random, "partially contracted, 90 degrees", "polynomial", 90));
+            weirs.add(notch("v-notch-weir-partial", random));
         }
         return weirs.stream();
     }
@@ -91,23 +91,16 @@ class PlateWeirTest {
         return new Weir(method, entries, width, crest);
     }
 
-    private static Weir notch(Random random, String contraction, String set, double angle) {
+    private static Weir notch(String method, Random random, String... choice) {
         double channel = 0.06 * Math.pow(10, 2.5 * random.nextDouble());
-        Weir weir = weir(
-                "v-notch-weir",
-                random,
-                channel,
-                channel,
-                "contraction",
-                contraction,
-                "rules",
-                random.nextBoolean() ? "ISO 1438" : "US manual",
-                "set",
-                set);
+        Weir weir = weir(method, random, channel, channel, choice);
         Map<String, String> entries = new LinkedHashMap<>(weir.entries());
         entries.remove("b");
-        entries.put("theta", plain(angle) + " deg");
-        return new Weir("v-notch-weir", entries, 0, weir.crest());
+        entries.put("rules", random.nextBoolean() ? "\"ISO 1438\"" : "\"US manual\"");
+        if (method.equals("v-notch-weir")) {
+            entries.put("theta", plain(20 + 80 * random.nextDouble()) + " deg");
+        }
+        return new Weir(method, entries, 0, weir.crest());
     }
 
     @ParameterizedTest(name = "{0}")
@@ -158,13 +151,13 @@ class PlateWeirTest {
                 "full-width-weir; 0.2; formula=White, b=1 m, p=0.5 m",
                 "francis-weir; 0.1; ends=both ends contracted, b=1 m, B=3 m, p=0.8 m",
                 "cipolletti-weir; 0.1; b=1 m, B=3 m, p=0.8 m",
-                "v-notch-weir; 0.02; contraction=fully contracted, rules=ISO 1438, set=curve points, theta=60 deg, B=2 m, p=0.6 m",
-                "v-notch-weir; 0.02; contraction=partially contracted/ 90 degrees, rules=ISO 1438, set=polynomial, theta=90 deg, B=0.8 m, p=0.3 m",
+                "v-notch-weir; 0.02; rules=ISO 1438, set=curve points, theta=60 deg, B=2 m, p=0.6 m",
+                "v-notch-weir-partial; 0.02; rules=ISO 1438, B=0.8 m, p=0.3 m",
             })
     void aHeadReadGivesTheFlowBack(String method, double flow, String typed) {
         Map<String, String> entries = new LinkedHashMap<>(Map.of("z_c", "10 m"));
         for (String pair : typed.split(", ")) {
-            String value = pair.substring(pair.indexOf('=') + 1).replace('/', ',');
+            String value = pair.substring(pair.indexOf('=') + 1);
             boolean number = value.matches("[0-9.]+ (m|ft|deg)");
             entries.put(pair.substring(0, pair.indexOf('=')), number ? value : "\"" + value + "\"");
         }
