@@ -26,20 +26,19 @@ import picocli.CommandLine.Parameters;
 /** {@code nappe issue station.xlsx -o output}. */
 @Command(
         name = "issue",
-        mixinStandardHelpOptions = true,
         description =
                 "Make the calculation package: a PDF, a workbook with live formulas, and the rating tables as CSV.",
         footer = {
             "",
             "Examples:",
-            "  nappe issue headworks.xlsx -o output",
+            "  nappe issue station.xlsx -o output",
             "  nappe issue mill.xlsx --house our-methods -o output",
             "",
-            "The package goes into a folder of its own, named for the calculation number and the revision. A preliminary package is written"
-                    + " over; one whose status is issued never is."
+            "The package goes into a folder of its own in FOLDER, named for the calculation number and the revision. A preliminary"
+                    + " package is written over; one whose status is issued never is: a change is a new revision."
         })
 final class IssueCommand implements Callable<Integer> {
-    @Parameters(paramLabel = "IN.xlsx", description = "the input workbook")
+    @Parameters(paramLabel = "IN.xlsx", description = "the input workbook, filled in")
     private Path input;
 
     @Option(
@@ -51,6 +50,9 @@ final class IssueCommand implements Callable<Integer> {
 
     @CommandLine.Mixin
     private MarkedOption marked = new MarkedOption();
+
+    @CommandLine.Mixin
+    private HelpOption help = new HelpOption();
 
     @CommandLine.Mixin
     private HouseOption house = new HouseOption();
@@ -73,7 +75,7 @@ final class IssueCommand implements Callable<Integer> {
         Remarks.of(design).forEach(remark -> spec.commandLine().getErr().println("remark: " + remark));
         PackageFolder target = PackageFolder.of(
                 folder, design.project().number(), design.project().revision());
-        target.refuseIfIssued();
+        target.prepare();
         Job.Done done = desk.compute(design, stage);
         target.write(files(target.name(), done, stage), done.results().furniture());
         PrintWriter out = spec.commandLine().getOut();
