@@ -30,7 +30,7 @@ class AgreementTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"canal-turnout.xlsx", "headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
     void everyStoredValueIsWhatJavaComputed(String name) throws IOException {
         Package sample = Package.ofSample(name);
         assertThat(Recalculated.disagreements(issued(sample), sample.results(), 0))
@@ -38,7 +38,7 @@ class AgreementTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"canal-turnout.xlsx", "headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
     void threeProgramsAgreeOnEveryCell(String name) throws IOException {
         Package sample = Package.ofSample(name);
         Path spoilt = file(Spoiler.spoil(sample.workbook()));

@@ -35,6 +35,7 @@ class CheckersEditTest {
     private static final Map<String, List<Typing>> FLUME = new LinkedHashMap<>();
     private static final Map<String, List<Typing>> INLET = new LinkedHashMap<>();
     private static final Map<String, List<Typing>> WEIR = new LinkedHashMap<>();
+    private static final Map<String, List<Typing>> TURNOUT = new LinkedHashMap<>();
 
     private static void flume(String what, Typing... typings) {
         FLUME.put(what, Arrays.asList(typings));
@@ -48,7 +49,23 @@ class CheckersEditTest {
         WEIR.put(what, Arrays.asList(typings));
     }
 
+    private static void turnout(String what, Typing... typings) {
+        TURNOUT.put(what, Arrays.asList(typings));
+    }
+
     static {
+        turnout(
+                "published modular limit, sudden end, rougher throat: free flow is lost in more cases",
+                new Entry("F1", "modular", "published"),
+                new Entry("F1", "EM", 0.0),
+                new Entry("F1", "L_d", 0.0),
+                new Entry("F1", "finish", "field concrete"),
+                new Level(2, 52.66));
+        turnout(
+                "throat as a sill over the whole floor, no flow, level below the bed downstream",
+                new Entry("F1", "b", 0.88),
+                new Flow(0, 0.0),
+                new Level(1, 52.1));
         // a sample of this size takes LibreOffice many seconds each: so several edits go together where they do not
         // meet
         flume("smallest size, a head read in submerged flow", new Entry("F1", "size", "1 in"), new Level(1, 412.85));
@@ -226,6 +243,11 @@ class CheckersEditTest {
         proven("return-weir.xlsx", WEIR, 5);
     }
 
+    @Test
+    void editsOfTheTurnoutGiveWhatIssuingAnewGives() throws IOException {
+        proven("canal-turnout.xlsx", TURNOUT, 2);
+    }
+
     /** A cell that is emptied is empty where "not given" stood; all that rests on it reads as not given. */
     @Test
     void headReadThatIsDeletedIsNotGiven() throws IOException {
@@ -247,10 +269,10 @@ class CheckersEditTest {
     /** What may be typed over in the issued workbook is what these edits type over: numbers and choices. */
     @Test
     void wordsThatAreUnlockedAreChoices() {
-        for (String sample : List.of("headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx")) {
+        for (String sample : List.of("canal-turnout.xlsx", "headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx")) {
             assertThat(Package.ofSample(sample).results().cells())
                     .filteredOn(c -> c.kind() == Cell.Kind.ENTRY && c.typed() instanceof Value.Word)
-                    .allMatch(c -> List.of("size", "form", "submerged", "serves", "inflow")
+                    .allMatch(c -> List.of("size", "form", "submerged", "serves", "inflow", "finish", "modular")
                             .contains(c.symbol()));
         }
     }
