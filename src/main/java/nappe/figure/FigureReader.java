@@ -39,6 +39,7 @@ import org.jspecify.annotations.Nullable;
  * note      text                                      note when CONDITION ; text: only where it holds
  * </pre>
  *
+ * After a rank, two blanks keep a symbol that is also the name of a unit from being read as one ({@code 1  L}).
  * Any part of a view may end in {@code ; when CONDITION ; words}: where the condition does not hold it is left out, and the
  * words are said below the drawing. Coordinates are formulas of dimension length over the symbols of the method. All faults are collected.
  */

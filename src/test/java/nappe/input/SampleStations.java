@@ -39,6 +39,11 @@ public final class SampleStations {
                 () -> bytes(SampleStations::weir));
     }
 
+    /** Their file names, in order. */
+    public static List<String> names() {
+        return all().keySet().stream().sorted().toList();
+    }
+
     public static void main(String[] args) throws IOException {
         for (Map.Entry<String, Supplier<byte[]>> sample : all().entrySet()) {
             Files.write(
