@@ -15,6 +15,9 @@ import java.util.stream.Stream;
  * {@code NAPPE_ALL_TOOLS=1} stands in the environment they fail instead.
  */
 public final class Tools {
+    /** The system's own, which has the packages of the system. */
+    public static final String PYTHON = "/usr/bin/python3";
+
     private static final long PATIENCE_SECONDS = 600;
 
     private Tools() {}
@@ -26,7 +29,21 @@ public final class Tools {
         if (found) {
             return;
         }
-        String message = "NOT PROVEN: " + name + " (" + program + ") is not installed";
+        notProven(name + " (" + program + ") is not installed");
+    }
+
+    /** Goes on only where the system's Python has the module. */
+    public static void requirePythonModule(String module, String name) throws IOException {
+        require("python3", "Python");
+        try {
+            run(PYTHON, "-c", "import " + module);
+        } catch (IOException e) {
+            notProven(name + " (Python module " + module + ") is not installed");
+        }
+    }
+
+    private static void notProven(String why) {
+        String message = "NOT PROVEN: " + why;
         System.err.println(message);
         if ("1".equals(System.getenv("NAPPE_ALL_TOOLS"))) {
             fail(message + ", and NAPPE_ALL_TOOLS=1 asks for all tools");

@@ -2,8 +2,10 @@ package nappe.calculation;
 
 import java.util.Collections;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import nappe.formula.Formula;
+import nappe.formula.Guard;
 import nappe.formula.Sign;
 import nappe.formula.Value;
 import nappe.unit.Unit;
@@ -38,6 +40,7 @@ public final class Cell implements Reference {
     private final Map<String, Reference> references;
     private final Sureness sureness;
     private final @Nullable Allowed allowed;
+    private volatile @Nullable List<Cell> guards;
 
     private Cell(
             Kind kind,
@@ -136,6 +139,25 @@ public final class Cell implements Reference {
      */
     public Map<String, Reference> references() {
         return references;
+    }
+
+    /**
+     * The cells that its formula needs as numbers and that may hold words, by the rule of {@link Guard}, in the order in
+     * which they decide. Found once: a cell is evaluated many times while flows and sizes are tried.
+     */
+    public List<Cell> guards() {
+        List<Cell> known = guards;
+        if (known == null) {
+            known = formula == null
+                    ? List.of()
+                    : Guard.guarded(formula).stream()
+                            .map(references::get)
+                            .filter(other -> other instanceof Cell cell && cell.sureness() != Sureness.SURE)
+                            .map(Cell.class::cast)
+                            .toList();
+            guards = known;
+        }
+        return known;
     }
 
     public Sureness sureness() {

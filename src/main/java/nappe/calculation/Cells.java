@@ -103,6 +103,13 @@ public final class Cells {
         return keep(cell, knownSign == null ? finding.sign() : knownSign);
     }
 
+    /** A live cell that repeats another, in its unit; the symbol is that of the line it stands in, or empty. */
+    public Cell same(Place place, String symbol, Cell other) {
+        Scope scope = Scope.ofElement();
+        scope.put("x", other);
+        return raw(place, symbol, other.unit(), Formulas.symbol("x"), scope, null, false);
+    }
+
     /** Nought is nought in every unit: it is written in the working unit, and needs no factor. */
     private Formula.Quantity withPlainZero(Formula.Quantity quantity) {
         return quantity.value() == 0

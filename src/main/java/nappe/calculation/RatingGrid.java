@@ -47,10 +47,9 @@ public final class RatingGrid {
         List<Block.Column> columns = new ArrayList<>();
         TableDraft table = sheet.table(title, columns);
         for (int i = 0; i <= rating.steps(); i++) {
-            List<String> reported = new ArrayList<>();
-            Strip members = row(rating, free, inner, table, i, reported);
+            Laid row = row(rating, free, inner, table, i);
             if (i == 0) {
-                columns.addAll(columns(free, members, reported));
+                columns.addAll(columns(free, row));
             }
         }
         sheet.gap();
@@ -63,8 +62,10 @@ public final class RatingGrid {
         return cell;
     }
 
-    /** @param reported takes the heads of the results that are shown once more in the unit of reports */
-    private Strip row(Rating rating, Item.Free free, Scope ends, TableDraft table, int i, List<String> reported) {
+    /** What stands in a row behind the free symbol: its members, and the heads of results in reporting units. */
+    private record Laid(Strip members, List<String> reported) {}
+
+    private Laid row(Rating rating, Item.Free free, Scope ends, TableDraft table, int i) {
         Cells cells = items.cells();
         List<Block.Item> shown = new ArrayList<>(List.of(new Block.Text(Integer.toString(i))));
         Formula share = over(
@@ -86,6 +87,7 @@ public final class RatingGrid {
         }
         strip.laid().forEach(line -> shown.add(new Block.Content(line.cell())));
         column += strip.laid().size();
+        List<String> reported = new ArrayList<>();
         for (String result : rating.results()) {
             Cell cell = variant.cell(result);
             Unit report = reports.get(cell.unit().dimension());
@@ -95,10 +97,10 @@ public final class RatingGrid {
             }
         }
         table.add(shown);
-        return strip;
+        return new Laid(strip, reported);
     }
 
-    private List<Block.Column> columns(Item.Free free, Strip members, List<String> reported) {
+    private List<Block.Column> columns(Item.Free free, Laid row) {
         List<Block.Column> columns = new ArrayList<>();
         columns.add(new Block.Column("Step", 6, Block.Align.RIGHT));
         columns.add(column(head(free.symbol(), free.unit())));
@@ -106,8 +108,8 @@ public final class RatingGrid {
         if (freeReport != null) {
             columns.add(column(free.symbol() + " [" + freeReport + "]"));
         }
-        members.heads().forEach(head -> columns.add(column(head)));
-        reported.forEach(head -> columns.add(column(head)));
+        row.members().heads().forEach(head -> columns.add(column(head)));
+        row.reported().forEach(head -> columns.add(column(head)));
         return columns;
     }
 

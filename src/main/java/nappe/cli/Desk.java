@@ -6,6 +6,7 @@ import java.util.Collection;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.function.Consumer;
 import nappe.input.InputReader;
 import nappe.input.InputRefused;
 import nappe.job.CheckRow;
@@ -84,9 +85,9 @@ final class Desk {
         return review == null ? List.of() : review.remarks(names);
     }
 
-    /** Computes a design that was read and checked. */
-    Job.Done compute(Design design) {
-        return new Job(methods, Nappe.version()).run(design, checks());
+    /** Computes a design that was read and checked, and tells the stages. */
+    Job.Done compute(Design design, Consumer<String> stage) {
+        return new Job(methods, Nappe.version()).telling(stage).run(design, checks());
     }
 
     /** Reads an input workbook; where its methods have faults, these are told and not what follows from them. */

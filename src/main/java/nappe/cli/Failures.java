@@ -7,6 +7,7 @@ import java.nio.file.Path;
 import java.util.List;
 import nappe.input.Fault;
 import nappe.input.InputRefused;
+import nappe.input.NotWritten;
 import nappe.method.MethodException;
 import nappe.source.TextException;
 import nappe.source.TextFault;
@@ -15,6 +16,9 @@ import picocli.CommandLine;
 
 /** Turns what a command throws into messages and an exit status; never a stack trace on the screen. */
 final class Failures implements CommandLine.IExecutionExceptionHandler {
+    /** So the faults of a damaged file start, whatever is wrong inside. */
+    private static final String DAMAGED = "the file is damaged";
+
     @Override
     public int handleExecutionException(Exception failure, CommandLine line, CommandLine.ParseResult parsed) {
         PrintWriter err = line.getErr();
@@ -40,6 +44,10 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
 
     private static int refused(PrintWriter err, List<Fault> faults) {
         faults.forEach(fault -> err.println(fault));
+        if (faults.stream().anyMatch(fault -> fault.message().startsWith(DAMAGED))) {
+            err.println("A damaged file: open it in a spreadsheet program, look it through and save it under a new name, or get"
+                    + " it again from where it came from.");
+        }
         err.println(
                 faults.size() == 1
                         ? "1 fault; no package was written."
@@ -66,16 +74,20 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
 
     private static String inWords(java.io.IOException failure) {
         String message = String.valueOf(failure.getMessage());
-        if (failure instanceof java.nio.file.AccessDeniedException) {
-            return "no right to write " + message;
+        if (failure instanceof NotWritten) {
+            return message;
         }
-        if (failure instanceof java.nio.file.NoSuchFileException) {
-            return "cannot write " + message + ": there is no such folder, or no right to make one";
+        if (failure instanceof java.nio.file.FileAlreadyExistsException) {
+            return message + " is there already; it is not written over. Name another file.";
+        }
+        if (failure instanceof java.nio.file.AccessDeniedException) {
+            return "no right to use " + message + ", or it is open in another program";
         }
         return message;
     }
 
-    private static int internal(PrintWriter err, Exception failure) {
+    /** A fault of the program itself, or of the machine it runs on; the details go into a file. */
+    static int internal(PrintWriter err, Throwable failure) {
         StringWriter trace = new StringWriter();
         failure.printStackTrace(new PrintWriter(trace));
         try {

@@ -1,7 +1,8 @@
 package nappe.cli;
 
 import java.io.IOException;
-import java.io.UncheckedIOException;
+import java.io.PrintWriter;
+import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import nappe.input.InputRefused;
@@ -17,7 +18,8 @@ final class MarkedOption {
             names = "--marked",
             paramLabel = "COPY.xlsx",
             description =
-                    "where the input is refused, write a copy with a note on each faulty cell; it must not be there yet")
+                    "where the input is refused, write a copy with a note on each faulty cell and a sheet that lists the faults; it must"
+                            + " not be there yet")
     private @Nullable Path copy;
 
     @CommandLine.Spec(CommandLine.Spec.Target.MIXEE)
@@ -37,21 +39,23 @@ final class MarkedOption {
     }
 
     private void mark(Path input, Path target, InputRefused refused) {
+        PrintWriter err = spec.commandLine().getErr();
         if (Files.exists(target)) {
-            spec.commandLine().getErr().println("nappe: " + target + " is there already; no marked copy was written");
+            err.println("nappe: " + target + " is there already; no marked copy was written");
             return;
         }
         try {
-            int cells = MarkedCopy.write(input, target, refused.faults());
-            spec.commandLine()
-                    .getErr()
-                    .println(
-                            cells == 0
-                                    ? "nappe: no fault stands in a cell; no marked copy was written"
-                                    : "Wrote " + target + ", " + cells
-                                            + (cells == 1 ? " cell marked" : " cells marked"));
+            MarkedCopy.Outcome outcome = MarkedCopy.write(input, target, refused.faults());
+            err.println(
+                    outcome.written()
+                            ? "Wrote " + target + ": " + outcome.cells()
+                                    + (outcome.cells() == 1 ? " cell marked" : " cells marked")
+                                    + ", all faults on its sheet " + outcome.sheet()
+                            : "nappe: no marked copy was written, because " + outcome.why());
+        } catch (FileAlreadyExistsException e) {
+            err.println("nappe: " + target + " is there already; no marked copy was written");
         } catch (IOException e) {
-            throw new UncheckedIOException(e);
+            err.println("nappe: no marked copy was written: " + e.getMessage());
         }
     }
 }

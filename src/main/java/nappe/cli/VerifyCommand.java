@@ -24,7 +24,6 @@ import picocli.CommandLine.Parameters;
 /** {@code nappe verify [FILE.csv...]}. */
 @Command(
         name = "verify",
-        mixinStandardHelpOptions = true,
         description =
                 "Run check values through the method sheets: the built-in ones, or those of the files or of the house folder named.",
         footer = {
@@ -32,14 +31,20 @@ import picocli.CommandLine.Parameters;
             "Examples:",
             "  nappe verify",
             "  nappe verify firm-checks.csv",
-            "  nappe verify --house our-methods    (all texts of the folder checked, and its check values run)",
+            "  nappe verify --house our-methods",
             "",
-            "A row of a file: id,method,entries,target,expected,unit,tolerance,source,kind,note",
+            "With --house all texts of the folder are read, used or not, every fault is told, and its check values are run.",
+            "",
+            "A file holds a head and rows, such as:",
+            "  id,method,entries,target,expected,unit,tolerance,source,kind,note",
             "  H1,parshall-flume,\"size = \"\"3 ft\"\"; h = 2 ft\",Q_h,35.5,ft3/s,0.6 %%,our test of 1 May,derived,"
         })
 final class VerifyCommand implements Callable<Integer> {
     @Parameters(arity = "0..*", paramLabel = "FILE.csv", description = "files with check values of your own")
     private List<Path> files = new ArrayList<>();
+
+    @CommandLine.Mixin
+    private HelpOption help = new HelpOption();
 
     @CommandLine.Mixin
     private HouseOption house = new HouseOption();
@@ -60,6 +65,7 @@ final class VerifyCommand implements Callable<Integer> {
             rows.addAll(desk.checks());
         }
         rows.addAll(named());
+        Nappe.stage(spec).accept("running " + rows.size() + " check values");
         Verification verification = new Verification(desk.methods());
         PrintWriter out = spec.commandLine().getOut();
         HouseLibrary own = desk.house();

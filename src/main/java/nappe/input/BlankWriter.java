@@ -2,9 +2,7 @@ package nappe.input;
 
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardOpenOption;
 import java.util.Date;
 import java.util.HashSet;
 import java.util.List;
@@ -32,7 +30,7 @@ public final class BlankWriter {
     public record Chosen(String tag, String method) {}
 
     /**
-     * Writes a new file; the same arguments give the same bytes.
+     * Writes a new file, whole or not at all; the same arguments give the same bytes.
      *
      * @param elements from the downstream end up
      * @throws java.nio.file.FileAlreadyExistsException where there is a file, which may have been filled in
@@ -41,7 +39,7 @@ public final class BlankWriter {
     public static void write(Path path, WorkingSystem system, List<Chosen> elements, MethodCatalogue methods)
             throws IOException {
         byte[] bytes = bytes(system, elements, methods);
-        Files.write(path, bytes, StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE);
+        NewFile.write(path, bytes);
     }
 
     static byte[] bytes(WorkingSystem system, List<Chosen> elements, MethodCatalogue methods) throws IOException {

@@ -5,7 +5,9 @@ import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Locale;
+import java.util.stream.Stream;
 
 /** Tells from its first bytes whether a file can be an .xlsx workbook, and what it looks like where it can't. */
 final class FileKind {
@@ -24,7 +26,7 @@ final class FileKind {
     /** Throws where the file isn't a zip of bearable size that can be read. */
     void requireZip() {
         if (!Files.exists(file)) {
-            throw faults.refuse("file-missing", "there is no such file in " + folder());
+            throw faults.refuse("file-missing", "there is no such file in " + folder() + near());
         }
         if (Files.isDirectory(file)) {
             throw faults.refuse("file-is-folder", "this is a folder" + REMEDY);
@@ -84,7 +86,7 @@ final class FileKind {
         return true;
     }
 
-    private static String look(String start) {
+    private String look(String start) {
         if (start.startsWith("%pdf")) {
             return " (it looks like a PDF)";
         }
@@ -94,8 +96,30 @@ final class FileKind {
         if (start.contains("<?xml")) {
             return " (it looks like XML)";
         }
+        if (file.toString().toLowerCase(Locale.ROOT).endsWith(".csv")) {
+            return " (it looks like a CSV file)";
+        }
         boolean text = start.chars().allMatch(c -> c >= ' ' || c == '\t' || c == '\r' || c == '\n');
         return text ? " (it looks like plain text)" : " (what it is can't be told)";
+    }
+
+    /** The workbook beside it that was most likely meant. */
+    private String near() {
+        Path folder = file.toAbsolutePath().getParent();
+        if (folder == null || !Files.isDirectory(folder)) {
+            return folder == null ? "" : ", which is no folder";
+        }
+        try (Stream<Path> all = Files.list(folder)) {
+            List<String> workbooks = all.map(path -> String.valueOf(path.getFileName()))
+                    .filter(name -> name.toLowerCase(Locale.ROOT).endsWith(".xlsx"))
+                    .sorted()
+                    .toList();
+            String typed = String.valueOf(file.getFileName());
+            String bare = typed.toLowerCase(Locale.ROOT).endsWith(".xlsx") ? typed : typed.replaceAll("\\.\\w*$", "") + ".xlsx";
+            return Near.question(bare, workbooks);
+        } catch (IOException e) {
+            return "";
+        }
     }
 
     private String folder() {

@@ -5,11 +5,11 @@ import java.util.Locale;
 import org.jspecify.annotations.Nullable;
 
 /** The word of a list that was most likely meant. */
-final class Near {
+public final class Near {
     private Near() {}
 
     /** The nearest word, at most a third of its letters off, in capitals or not; null where none is near. */
-    static @Nullable String to(String text, Collection<String> words) {
+    public static @Nullable String to(String text, Collection<String> words) {
         String typed = plain(text);
         String best = null;
         int least = Integer.MAX_VALUE;
@@ -24,7 +24,7 @@ final class Near {
     }
 
     /** {@code ; did you mean known?}, or nothing. */
-    static String question(String text, Collection<String> words) {
+    public static String question(String text, Collection<String> words) {
         String near = to(text, words);
         return near == null ? "" : "; did you mean " + near + "?";
     }

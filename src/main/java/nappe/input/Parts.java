@@ -59,6 +59,11 @@ final class Parts implements AutoCloseable {
         return sizes.getOrDefault(key(name), 0L);
     }
 
+    /** How many bytes all parts unpack to. */
+    long size() {
+        return sizes.values().stream().mapToLong(Long::longValue).sum();
+    }
+
     /** The part as a stream; the caller has asked {@link #has}. */
     InputStream stream(String name) throws IOException {
         ZipEntry entry = entries.get(key(name));

@@ -1,5 +1,6 @@
 package nappe.input;
 
+import java.util.BitSet;
 import java.util.List;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -10,6 +11,7 @@ import org.jspecify.annotations.Nullable;
 /** Reads one sheet part; what is damaged in it becomes faults at its cells. */
 final class SheetPart {
     static final int MOST_CELLS = 200_000;
+    static final int MOST_ROWS = 100_000;
     private static final int MOST_MERGES = 2_000;
     private static final int LONGEST_NUMBER = 64;
     private static final int ROWS = 1_048_576;
@@ -25,6 +27,8 @@ final class SheetPart {
     private final NumberFormats formats;
     private final Faults faults;
     private int filled;
+    private final BitSet seen = new BitSet();
+    private int rows;
     private int row = -1;
     private int column = -1;
 
@@ -76,7 +80,28 @@ final class SheetPart {
                     "wild-address",
                     "the file is damaged: it has a row numbered " + Shown.quoted(String.valueOf(typed)));
             row = -1;
-        } else if (xml.isTrue("hidden")) {
+        } else {
+            count();
+        }
+    }
+
+    private void count() {
+        if (++rows > MOST_ROWS) {
+            throw faults.refuse(
+                    "too-many-rows",
+                    "the sheet " + sheet.name() + " has more than " + MOST_ROWS
+                            + " rows, filled or formatted, the most that an input workbook may have; delete the rows below"
+                            + " the entries and save it again");
+        }
+        if (seen.get(row)) {
+            faults.add(
+                    sheet.name(),
+                    RawCell.address(row, 0),
+                    "row-twice",
+                    "the file is damaged: this row appears twice; get it again from where it came from");
+        }
+        seen.set(row);
+        if (xml.isTrue("hidden")) {
             sheet.hiddenRows.set(row);
         }
     }

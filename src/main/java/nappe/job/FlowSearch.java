@@ -150,7 +150,7 @@ final class FlowSearch {
         double[] flow = {high - share * (high - low), low + share * (high - low)};
         double[] margin = new double[2];
         for (int k = 0; k < 2; k++) {
-            Point point = new Point(flow[k], trials.at(condition, flow[k]).get(limit));
+            Point point = new Point(flow[k], trials.at(condition, limit, flow[k]));
             if (isBeyond(point, verdict, all)) {
                 return;
             }
@@ -170,7 +170,7 @@ final class FlowSearch {
                 margin[0] = margin[1];
                 flow[1] = low + share * (high - low);
             }
-            Point point = new Point(flow[next], trials.at(condition, flow[next]).get(limit));
+            Point point = new Point(flow[next], trials.at(condition, limit, flow[next]));
             if (isBeyond(point, verdict, all)) {
                 return;
             }
@@ -201,12 +201,7 @@ final class FlowSearch {
             }
             if (before != null && before.judged().verdict() != point.judged().verdict()) {
                 turned = true;
-                Turn turn = gap
-                        ? null
-                        : Bracket.turn(
-                                before,
-                                point,
-                                flow -> trials.at(condition, flow).get(limit));
+                Turn turn = gap ? null : Bracket.turn(before, point, flow -> trials.at(condition, limit, flow));
                 if (turn == null) {
                     notReached(limit, condition, acrossAGap(before, point));
                 } else {

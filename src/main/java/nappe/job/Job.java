@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.Consumer;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.calculation.Scope;
@@ -22,6 +23,7 @@ import nappe.solve.Evaluation;
 import nappe.station.Design;
 import nappe.station.FoundFlows;
 import nappe.station.PackageLayout;
+import nappe.station.SizeRerun;
 import nappe.station.SoftwareStatement;
 import nappe.unit.WorkingSystem;
 
@@ -37,6 +39,7 @@ public final class Job {
     private final MethodLibrary methods;
     private final FigureLibrary drawings;
     private final String version;
+    private final Consumer<String> stage;
 
     /** With the drawings that stand beside the method sheets. */
     public Job(MethodLibrary methods, String version) {
@@ -45,9 +48,19 @@ public final class Job {
 
     /** @param drawings the figure files beside the method sheets */
     public Job(MethodLibrary methods, FigureLibrary drawings, String version) {
+        this(methods, drawings, version, words -> {});
+    }
+
+    private Job(MethodLibrary methods, FigureLibrary drawings, String version, Consumer<String> stage) {
         this.methods = methods;
         this.drawings = drawings;
         this.version = version;
+        this.stage = stage;
+    }
+
+    /** The same, telling in words what it is busy with. */
+    public Job telling(Consumer<String> listener) {
+        return new Job(methods, drawings, version, listener);
     }
 
     /**
@@ -63,7 +76,13 @@ public final class Job {
      * @throws nappe.station.StationException where entries do not fit the methods
      */
     public Done run(Design design, List<CheckRow> checks) {
-        return run(design, checks, FlowSearch.of(design, methods::sheet));
+        stage.accept("looking for the flows at the limits");
+        Map<String, MethodSheet> used = used(design);
+        Beside<SoftwareStatement> software = Beside.start("check values", () -> statement(used, checks));
+        Beside<Map<String, List<SizeRerun>>> sizes =
+                Beside.start("sizes", () -> new SizeReruns(design, methods::sheet).run());
+        FoundFlows found = FlowSearch.of(design, methods::sheet);
+        return done(design, used, found, software.outcome(), sizes.outcome());
     }
 
     /**
@@ -73,16 +92,34 @@ public final class Job {
      * @throws nappe.station.StationException where entries do not fit the methods
      */
     public Done run(Design design, List<CheckRow> checks, FoundFlows found) {
+        Map<String, MethodSheet> used = used(design);
+        stage.accept("running the check values");
+        SoftwareStatement software = statement(used, checks);
+        stage.accept("comparing sizes");
+        Map<String, List<SizeRerun>> sizes = new SizeReruns(design, methods::sheet).run();
+        return done(design, used, found, software, sizes);
+    }
+
+    Map<String, MethodSheet> used(Design design) {
         Map<String, MethodSheet> used = new LinkedHashMap<>();
         design.elements().forEach(e -> used.computeIfAbsent(e.method(), methods::sheet));
-        SoftwareStatement software = statement(used, checks);
+        return used;
+    }
+
+    Done done(
+            Design design,
+            Map<String, MethodSheet> used,
+            FoundFlows found,
+            SoftwareStatement software,
+            Map<String, List<SizeRerun>> sizes) {
+        stage.accept("computing");
         PackageLayout.Layout layout = PackageLayout.of(
                 design,
                 methods::sheet,
                 method -> drawings.of(method).map(FigureSheet::printed).orElse(List.of()),
                 found,
                 software,
-                new SizeReruns(design, methods::sheet).run());
+                sizes);
         Map<Cell, Value> values = Evaluation.of(layout.cells());
         return new Done(
                 new Results(
@@ -149,7 +186,7 @@ public final class Job {
                 p.release());
     }
 
-    private SoftwareStatement statement(Map<String, MethodSheet> used, List<CheckRow> checks) {
+    SoftwareStatement statement(Map<String, MethodSheet> used, List<CheckRow> checks) {
         Verification verification = new Verification(methods);
         List<CheckOutcome> outcomes = checks.stream()
                 .filter(row -> used.containsKey(row.method()))

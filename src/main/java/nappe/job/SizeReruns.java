@@ -20,6 +20,7 @@ import nappe.station.SizeRerun;
 import nappe.station.StationException;
 import nappe.station.StationLayout;
 import nappe.unit.Unit;
+import org.jspecify.annotations.Nullable;
 
 /** Evaluates the whole station anew for each word of a choice that is screened, and keeps which limits fail. */
 final class SizeReruns {
@@ -47,7 +48,10 @@ final class SizeReruns {
         return found;
     }
 
-    /** The station is laid out once: its layout is the same for every word, and only what is typed differs. */
+    /**
+     * The station is laid out once: its layout is the same for every word, and only what is typed differs. Evaluated anew
+     * is what rests on the word and leads to a verdict.
+     */
     private List<SizeRerun> reruns(Design.Element element, Item.Given choice) {
         StationLayout station;
         try {
@@ -59,14 +63,26 @@ final class SizeReruns {
                     .map(word -> new SizeRerun(word, List.of(), false, why))
                     .toList();
         }
-        List<Cell> cells = station.allCells();
         Cell entry = station.entry(element.tag(), choice.symbol());
+        Map<Cell, Value> first = Evaluation.of(station.allCells());
+        List<Cell> moved = Evaluation.leadingTo(verdicts(station), Evaluation.restingOn(entry, station.allCells()));
         return choice.words().stream()
-                .map(word -> found(word, station, Evaluation.of(cells, Map.of(entry, Value.word(word)))))
+                .map(word -> {
+                    Map<Cell, Value> anew = Evaluation.again(first, Map.of(entry, Value.word(word)), moved);
+                    return found(word, station, cell -> anew.getOrDefault(cell, first.get(cell)));
+                })
                 .toList();
     }
 
-    private static SizeRerun found(String word, StationLayout station, Map<Cell, Value> values) {
+    /** All that is read after a rerun. */
+    private static List<Cell> verdicts(StationLayout station) {
+        int judgedCases = station.columns().judged();
+        return station.judgedLimits().stream()
+                .flatMap(limit -> limit.first(judgedCases).verdicts().stream())
+                .toList();
+    }
+
+    private static SizeRerun found(String word, StationLayout station, Function<Cell, @Nullable Value> valueOf) {
         int judgedCases = station.columns().judged();
         List<SizeRerun.Failure> notMet = new ArrayList<>();
         List<SizeRerun.Failure> noResult = new ArrayList<>();
@@ -74,7 +90,7 @@ final class SizeReruns {
         for (ElementSheet.LimitResult limit : station.judgedLimits()) {
             ElementSheet.LimitResult judged = limit.first(judgedCases);
             List<String> verdicts = judged.verdicts().stream()
-                    .map(cell -> words(Objects.requireNonNull(values.get(cell))))
+                    .map(cell -> words(Objects.requireNonNull(valueOf.apply(cell))))
                     .toList();
             if (verdicts.contains(NOT_MET)) {
                 notMet.add(failure(limit, verdicts, NOT_MET));

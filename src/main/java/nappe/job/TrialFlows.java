@@ -36,11 +36,13 @@ final class TrialFlows {
     private final StationLayout station;
     private final Map<Cell, Value> asTyped;
     private final List<Cell> flows;
+    /** What rests on the flow of each condition and leads to any searched limit; and the same for each searched limit. */
     private final List<List<Cell>> resting = new ArrayList<>();
+
+    private final List<List<List<Cell>>> restingOfEach = new ArrayList<>();
     private final List<Integer> limits = new ArrayList<>();
     private final List<Double> rated = new ArrayList<>();
     private final int firstColumn;
-    private int trials;
 
     /** @throws nappe.station.StationException where entries do not fit the methods */
     TrialFlows(Design design, Function<String, MethodSheet> methodOf, List<Condition> conditions) {
@@ -57,8 +59,17 @@ final class TrialFlows {
                 limits.add(i);
             }
         }
-        for (Cell flow : flows) {
-            resting.add(Evaluation.restingOn(flow, station.allCells()));
+        for (int i = 0; i < flows.size(); i++) {
+            List<Cell> moved = Evaluation.restingOn(flows.get(i), station.allCells());
+            List<Cell> read = new ArrayList<>();
+            List<List<Cell>> ofEach = new ArrayList<>();
+            for (int index : limits) {
+                List<Cell> targets = List.of(verdict(i, index), margin(i, index));
+                read.addAll(targets);
+                ofEach.add(Evaluation.leadingTo(targets, moved));
+            }
+            resting.add(Evaluation.leadingTo(read, moved));
+            restingOfEach.add(ofEach);
         }
         for (Cell end : ends) {
             if (asTyped.get(end) instanceof Value.Number number && number.value() > 0) {
@@ -87,9 +98,12 @@ final class TrialFlows {
         return rated;
     }
 
-    /** How many trials were made. */
-    int trials() {
-        return trials;
+    private Cell verdict(int condition, int index) {
+        return limit(index).verdicts().get(firstColumn + condition);
+    }
+
+    private Cell margin(int condition, int index) {
+        return Objects.requireNonNull(limit(index).margins().get(firstColumn + condition));
     }
 
     /**
@@ -99,17 +113,30 @@ final class TrialFlows {
      * @param flow in the working unit
      */
     List<Judged> at(int condition, double flow) {
-        trials++;
-        Map<Cell, Value> values =
-                Evaluation.again(asTyped, Map.of(flows.get(condition), Value.of(flow)), resting.get(condition));
-        List<Judged> judged = new ArrayList<>();
-        for (int index : limits) {
-            LimitResult limit = limit(index);
-            Value verdict = value(values, limit.verdicts().get(firstColumn + condition));
-            Value margin = value(values, Objects.requireNonNull(limit.margins().get(firstColumn + condition)));
-            judged.add(new Judged(verdict(verdict), margin instanceof Value.Number number ? number.value() : null));
-        }
-        return judged;
+        Map<Cell, Value> values = values(condition, flow, resting.get(condition));
+        return limits.stream().map(index -> judged(values, condition, index)).toList();
+    }
+
+    /**
+     * What one searched limit says at a flow.
+     *
+     * @param condition index of the condition
+     * @param limit which of {@link #limits}
+     * @param flow in the working unit
+     */
+    Judged at(int condition, int limit, double flow) {
+        List<Cell> cells = restingOfEach.get(condition).get(limit);
+        return judged(values(condition, flow, cells), condition, limits.get(limit));
+    }
+
+    private Map<Cell, Value> values(int condition, double flow, List<Cell> cells) {
+        return Evaluation.again(asTyped, Map.of(flows.get(condition), Value.of(flow)), cells);
+    }
+
+    private Judged judged(Map<Cell, Value> values, int condition, int index) {
+        Value verdict = value(values, verdict(condition, index));
+        Value margin = value(values, margin(condition, index));
+        return new Judged(verdict(verdict), margin instanceof Value.Number number ? number.value() : null);
     }
 
     /** A limit may not rest on the flow at all. */

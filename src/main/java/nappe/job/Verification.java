@@ -3,6 +3,7 @@ package nappe.job;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.stream.Collectors;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
 import nappe.calculation.ItemLayout;
@@ -60,7 +61,7 @@ public final class Verification {
         if (target == null) {
             return new CheckOutcome(row, Double.NaN, "a free symbol is not given");
         }
-        Map<Cell, Value> values = Evaluation.of(bench.cells.all());
+        Map<Cell, Value> values = Evaluation.of(Evaluation.leadingTo(List.of(target), bench.cells.all()));
         Value value = java.util.Objects.requireNonNull(values.get(target));
         if (!(value instanceof Value.Number number)) {
             return new CheckOutcome(row, Double.NaN, value instanceof Value.None none ? none.why() : "words");
@@ -75,6 +76,7 @@ public final class Verification {
     /** A scratch sheet with the cells of one row. */
     private static final class Bench {
         private final MethodSheet method;
+        private final Set<String> free;
         private final Cells cells;
         private final ItemLayout items;
         private final Scope scope = Scope.ofElement();
@@ -82,6 +84,10 @@ public final class Verification {
 
         Bench(MethodSheet method, WorkingSystem system) {
             this.method = method;
+            this.free = method.items().stream()
+                    .filter(Item.Free.class::isInstance)
+                    .map(item -> ((Item.Free) item).symbol())
+                    .collect(Collectors.toSet());
             this.cells = new Cells(system, new SheetDraft("Constants", ""));
             this.items = new ItemLayout(cells, new TrialRows(cells, new SheetDraft("Trials", "")));
         }
@@ -127,8 +133,7 @@ public final class Verification {
             for (String output : item.outputs()) {
                 Set<String> reach = method.reach().getOrDefault(output, Set.of());
                 if (reach.stream()
-                        .anyMatch(s -> method.item(s) instanceof Item.Free
-                                && !row.entries().containsKey(s))) {
+                        .anyMatch(s -> free.contains(s) && !row.entries().containsKey(s))) {
                     return false;
                 }
             }

@@ -39,10 +39,12 @@ public record MethodSheet(
 
     /** The item that defines a symbol, or null. */
     public @Nullable Item item(String symbol) {
-        return items.stream()
-                .filter(item -> item.outputs().contains(symbol))
-                .findFirst()
-                .orElse(null);
+        for (Item item : items) {
+            if (item.outputs().contains(symbol)) {
+                return item;
+            }
+        }
+        return null;
     }
 
     /** What a symbol rests on that is typed once per case or comes from a neighbour. */

@@ -57,6 +57,7 @@ final class StatementReader {
         parts.noteDefined();
         switch (parts.statement.word()) {
             case "method" -> draft.title = parts.statement.rest();
+            case "range" -> range();
             case "about" -> draft.about.add(parts.statement.rest());
             case "caution" -> draft.cautions.add(parts.statement.rest());
             case "source" -> source();
@@ -84,6 +85,13 @@ final class StatementReader {
                         0,
                         parts.statement.word().length(),
                         "statement-unknown");
+        }
+    }
+
+    /** Words for the list of methods, which takes them from the text; nothing is calculated with them. */
+    private void range() {
+        if (parts.statement.rest().isEmpty()) {
+            throw parts.fault("a range says in words where the method holds: range heads of 0.03 m to 0.6 m", "range-unclear");
         }
     }
 

@@ -1,6 +1,7 @@
 package nappe.solve;
 
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.Collections;
 import java.util.IdentityHashMap;
 import java.util.List;
@@ -9,16 +10,14 @@ import java.util.Set;
 import nappe.calculation.Cell;
 import nappe.calculation.Reference;
 import nappe.calculation.Run;
-import nappe.calculation.Sureness;
 import nappe.formula.Formula;
-import nappe.formula.Guard;
 import nappe.formula.NumberReading;
 import nappe.formula.Value;
 import nappe.unit.Unit;
 
 /**
  * Evaluates cells in their order. A cell first passes on the words of what its formula needs as a number, by the rule of
- * {@link Guard} that the workbook's formulas follow too.
+ * {@link Cell#guards} that the workbook's formulas follow too.
  */
 public final class Evaluation {
     private final Map<Cell, Value> values = new IdentityHashMap<>();
@@ -81,17 +80,32 @@ public final class Evaluation {
         return resting;
     }
 
+    /** Of the cells, those that the targets rest on, directly or through others, and the targets, in the same order. */
+    public static List<Cell> leadingTo(Collection<Cell> targets, List<Cell> cells) {
+        Set<Cell> wanted = Collections.newSetFromMap(new IdentityHashMap<>());
+        wanted.addAll(targets);
+        List<Cell> leading = new ArrayList<>();
+        for (int i = cells.size() - 1; i >= 0; i--) {
+            if (wanted.contains(cells.get(i))) {
+                leading.add(cells.get(i));
+                for (Reference reference : cells.get(i).references().values()) {
+                    wanted.addAll(reference instanceof Run run ? run.cells() : List.of((Cell) reference));
+                }
+            }
+        }
+        Collections.reverse(leading);
+        return leading;
+    }
+
     private Value value(Cell cell) {
         Formula formula = cell.formula();
         if (formula == null) {
             return java.util.Objects.requireNonNull(cell.typed());
         }
-        for (String symbol : Guard.guarded(formula)) {
-            if (cell.references().get(symbol) instanceof Cell needed && needed.sureness() != Sureness.SURE) {
-                Value there = known(needed);
-                if (!(there instanceof Value.Number)) {
-                    return there instanceof Value.Word word ? new Value.None(word.text()) : there;
-                }
+        for (Cell needed : cell.guards()) {
+            Value there = known(needed);
+            if (!(there instanceof Value.Number)) {
+                return there instanceof Value.Word word ? new Value.None(word.text()) : there;
             }
         }
         return NumberReading.of(formula, new Seen(cell));

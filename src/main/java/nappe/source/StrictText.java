@@ -44,6 +44,7 @@ public final class StrictText {
     }
 
     private String text() {
+        refuseOtherKinds();
         decode();
         List<String> lines = decoded.toString().lines().toList();
         int line = 1;
@@ -77,6 +78,29 @@ public final class StrictText {
         }
         String text = decoded.toString().replace("\r\n", "\n").replace('\r', '\n');
         return text.startsWith("\uFEFF") ? text.substring(1) : text;
+    }
+
+    /** A workbook, or a text in another encoding throughout, would give a fault for every letter. */
+    private void refuseOtherKinds() {
+        if (startsWith(0x50, 0x4B, 3, 4) || startsWith(0xD0, 0xCF, 0x11, 0xE0)) {
+            throw refuse("this is a workbook or a packed file, not a text; save what it holds as plain text (a table as CSV)");
+        }
+        if (startsWith(0xFF, 0xFE) || startsWith(0xFE, 0xFF)) {
+            throw refuse("this text is saved in UTF-16; save the file in UTF-8");
+        }
+    }
+
+    private boolean startsWith(int... first) {
+        for (int i = 0; i < first.length; i++) {
+            if (i >= bytes.length || (bytes[i] & 0xFF) != first[i]) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    private TextException refuse(String message) {
+        return new TextException(List.of(TextFault.ofFile(file, message, "encoding")));
     }
 
     private void add(int line, int column, String message, List<String> lines) {

@@ -347,11 +347,7 @@ final class CasesSheet {
             Cell all = same(table.place(5), flows.get(flowOf));
             Cell level = same(table.place(6), levels.get(levelOf));
             Cell through = throughOne(table.place(8), all, inService);
-            names.add(name);
-            units.add(inService);
-            flows.add(all);
-            levels.add(level);
-            flowsThroughOne.add(through);
+            add(name, all, inService, through, level);
             table.add(List.of(
                     new Block.Content(name),
                     new Block.Text(one.flowOf()),
@@ -378,8 +374,6 @@ final class CasesSheet {
 
     /** A cell that repeats another. */
     Cell same(Place place, Cell other) {
-        Scope scope = Scope.ofElement();
-        scope.put("x", other);
-        return cells.raw(place, other.symbol(), other.unit(), Formulas.symbol("x"), scope, null, false);
+        return cells.same(place, other.symbol(), other);
     }
 }

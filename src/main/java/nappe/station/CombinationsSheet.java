@@ -86,9 +86,9 @@ final class CombinationsSheet {
                     Sign.POSITIVE));
             List<Block.Item> row = new ArrayList<>(List.of(new Block.Content(labels.get(labels.size() - 1))));
             for (int k = 0; k < combinations.size(); k++) {
-                Scope scope = Scope.ofElement();
-                scope.put("verdict", limit.verdicts().get(limit.forAll() ? 0 : column(combinations.get(k))));
-                Cell verdict = cells.raw(table.place(1 + k), "", Unit.one(), symbol("verdict"), scope, null, false);
+                int column = limit.forAll() ? 0 : column(combinations.get(k));
+                Cell verdict =
+                        cells.same(table.place(1 + k), "", limit.verdicts().get(column));
                 verdicts.get(k).add(verdict);
                 row.add(new Block.Content(verdict));
             }

@@ -8,7 +8,6 @@ import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
 import nappe.calculation.ElementSheet.LimitResult;
-import nappe.calculation.Scope;
 import nappe.calculation.SheetDraft;
 import nappe.calculation.TableDraft;
 import nappe.unit.Dimension;
@@ -106,12 +105,7 @@ final class FoundSheet {
     }
 
     private static Block.Item shown(Cells cells, TableDraft table, int column, @Nullable Cell cell) {
-        if (cell == null) {
-            return new Block.Text("-");
-        }
-        Scope scope = Scope.ofElement();
-        scope.put("value", cell);
-        return new Block.Content(cells.raw(table.place(column), "", cell.unit(), symbol("value"), scope, null, false));
+        return cell == null ? new Block.Text("-") : new Block.Content(cells.same(table.place(column), "", cell));
     }
 
     /** The uppermost element that gives a water level, or null. */

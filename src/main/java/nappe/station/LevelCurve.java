@@ -216,9 +216,7 @@ final class LevelCurve {
         if (cell.place().equals(place)) {
             return cell;
         }
-        Scope scope = Scope.ofElement();
-        scope.put("x", cell);
-        return cells.raw(place, cell.symbol(), cell.unit(), symbol("x"), scope, null, false);
+        return cells.same(place, cell.symbol(), cell);
     }
 
     /** The row at or below the flow, at most the last but one; none outside the curve, or where the curve is no curve. */

@@ -125,9 +125,7 @@ final class OverviewSheet {
     }
 
     private Cell same(TableDraft table, int column, Cell other) {
-        Scope scope = Scope.ofElement();
-        scope.put("x", other);
-        return cells.raw(table.place(column), "", other.unit(), symbol("x"), scope, null, false);
+        return cells.same(table.place(column), "", other);
     }
 
     private Cell margin(TableDraft table, @Nullable Cell margin) {

@@ -5,8 +5,6 @@ import java.util.Map;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.calculation.Cells;
-import nappe.calculation.Formulas;
-import nappe.calculation.Scope;
 import nappe.calculation.SheetDraft;
 import nappe.calculation.TableDraft;
 
@@ -64,9 +62,7 @@ final class RegisterSheet {
 
     private static void row(
             TableDraft table, Cells cells, String number, Block.Line line, String caseName, Cell result) {
-        Scope scope = Scope.ofElement();
-        scope.put("value", result);
-        Cell shown = cells.raw(table.place(5), "", result.unit(), Formulas.symbol("value"), scope, null, false);
+        Cell shown = cells.same(table.place(5), "", result);
         table.add(List.of(
                 new Block.Text(number),
                 new Block.Text(line.code()),

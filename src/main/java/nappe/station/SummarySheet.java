@@ -264,9 +264,8 @@ final class SummarySheet {
                     new Block.Jump(limit.tag(), limit.verdicts().get(0)),
                     new Block.Text(limit.label())));
             for (int c = 0; c < caseNames.size(); c++) {
-                Scope scope = Scope.ofElement();
-                scope.put("verdict", limit.verdicts().get(limit.forAll() ? 0 : c));
-                row.add(new Block.Content(live(table, 3 + c, symbol("verdict"), scope, false)));
+                row.add(new Block.Content(
+                        cells.same(table.place(3 + c), "", limit.verdicts().get(limit.forAll() ? 0 : c))));
             }
             table.add(row);
         }

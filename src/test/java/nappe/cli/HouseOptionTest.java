@@ -118,7 +118,7 @@ class HouseOptionTest {
         Said inspected = nappe("inspect", input, "--house", house);
         assertThat(inspected.status()).as(inspected.err()).isZero();
         assertThat(inspected.out())
-                .contains("3 flow case(s), no faults")
+                .contains("1 element, 3 flow cases, no faults")
                 .containsPattern("not met +W1 +flow is free: drowning ratio.*Flood in the tailwater");
         Path issued = issue(input, "out");
         assertThat(sheet(issued, "References"))

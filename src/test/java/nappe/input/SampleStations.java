@@ -29,6 +29,12 @@ public final class SampleStations {
                 () -> bytes(SampleStations::headworks),
                 "inlet-works.xlsx",
                 () -> bytes(SampleStations::inlet),
+                "pumping-main.xlsx",
+                () -> bytes(PressureStations::pumpingMain),
+                "reuse-line.xlsx",
+                () -> bytes(PressureStations::reuseLine),
+                "seepage-pond.xlsx",
+                () -> bytes(SampleStations::pond),
                 "return-weir.xlsx",
                 () -> bytes(SampleStations::weir));
     }
@@ -57,7 +63,7 @@ public final class SampleStations {
         return filler(system, new Chosen(tag, method));
     }
 
-    private static Filler filler(WorkingSystem system, Chosen... elements) throws IOException {
+    static Filler filler(WorkingSystem system, Chosen... elements) throws IOException {
         return new Filler(BlankWriter.bytes(system, List.of(elements), METHODS));
     }
 
@@ -381,6 +387,99 @@ public final class SampleStations {
                 .row("Revisions", "0", "2031-09-08", "First issue for checking.");
     }
 
+    /** A V-notch for low flows above a contracted weir for high ones, open to changes. */
+    public static Filler pond() throws IOException {
+        String study = "Invented seepage study SS-4, table 2";
+        String survey = "Invented brook survey BS-1, figure 3";
+        String drawing = "Invented drawing HM-31, rev. 2";
+        return filler(WorkingSystem.SI, new Chosen("W1", "rectangular-weir"), new Chosen("V1", "v-notch-weir"))
+                .project("Project", "Hollow Marl storage pond, seepage gauging (fictional)")
+                .project("Firm", "Any Firm of Engineers (fictional)")
+                .project("Client", "Hollow Marl Water Users (fictional)")
+                .project("Calculation number", "HM-S-009")
+                .project(
+                        "Subject", "V-notch at the toe drain and contracted weir at the pond outlet: ranges and levels")
+                .project("Revision", "0")
+                .project("Revision date", "2031-04-22")
+                .project("Status", "for checking")
+                .project("Paper", "A4")
+                .project("Flow reported in", "L/s")
+                .project("Head reported in", "mm")
+                .project("Elevations refer to", "invented dam datum, 60.000 m at the crest stone")
+                .project("Case worked in full", "After rain")
+                .project("Purpose of release", "Released for checking of the sample only.")
+                .project("Space for a seal on the cover", "no")
+                .row(
+                        "Flows",
+                        "Dry season",
+                        "1 d",
+                        "2031",
+                        1.6,
+                        "L/s",
+                        49.9,
+                        "m",
+                        "",
+                        study,
+                        "known",
+                        null,
+                        null,
+                        "mm",
+                        66,
+                        "mm")
+                .row("Flows", "After rain", "1 d", "2031", 9, "L/s", 49.95, "m", "", study, "known")
+                .row("Flows", "Pond drawn down", "1 h", "2031", 70, "L/s", 50.1, "m", "", study, "assumed")
+                .row(
+                        "Flows",
+                        "Storm, brook in flood",
+                        "1 h",
+                        "2031",
+                        70,
+                        "L/s",
+                        50.32,
+                        "m",
+                        "25 years",
+                        survey,
+                        "known")
+                .entry("W1", "set", "ISO 1438", null, "Invented monitoring plan MP-2, clause 3", "known")
+                .entry("W1", "b", 500, "mm", drawing, "known")
+                .entry("W1", "B", 2, "m", drawing, "known")
+                .entry("W1", "p", 0.5, "m", drawing, "known")
+                .entry("W1", "z_c", 50.2, "m", drawing, "known")
+                .entry("W1", "h_n", 0.4, "m", drawing, "known")
+                .entry("W1", "x_g", 1.2, "m", drawing, "known")
+                .entry("W1", "L_a", 10.5, "m", drawing, "known")
+                .entry("V1", "rules", "ISO 1438", null, "Invented monitoring plan MP-2, clause 3", "known")
+                .entry("V1", "set", "curve points", null, "Invented monitoring plan MP-2, clause 3", "known")
+                .entry("V1", "theta", 90, "deg", drawing, "known")
+                .entry("V1", "B", 1.2, "m", drawing, "known")
+                .entry("V1", "p", 0.5, "m", drawing, "known")
+                .entry("V1", "z_c", 50.62, "m", drawing, "known")
+                .entry("V1", "h_n", 0.25, "m", drawing, "known")
+                .entry("V1", "x_g", 0.9, "m", drawing, "known")
+                .row(
+                        "Demands",
+                        "V1",
+                        "z_u",
+                        "at most",
+                        51.0,
+                        "m",
+                        "water at the V-notch stays under the mouth of the toe drain",
+                        "Invented monitoring plan MP-2, clause 5")
+                .row(
+                        "Assumptions",
+                        "No water joins between the two weirs.",
+                        "site visit to follow",
+                        "project engineer",
+                        "open")
+                .row("References", "Invented monitoring plan MP-2, edition of 2030")
+                .row(
+                        "Requirements",
+                        "Show which of the two weirs measures at each flow.",
+                        "Invented monitoring plan MP-2, clause 4",
+                        "Overview")
+                .row("Revisions", "0", "2031-04-22", "First issue for checking.");
+    }
+
     /** The weir, open to changes. */
     public static Filler weir() throws IOException {
         String log = "Invented pump schedule PS-2";
@@ -405,6 +504,7 @@ public final class SampleStations {
                 .row("Flows", "Two pumps", "1 h", "2030", 60, "L/s", 17.8, "m", "", log, "known", null, 142, "mm")
                 .row("Flows", "Four pumps", "1 h", "2030", 120, "L/s", 17.95, "m", "", log, "known")
                 .row("Flows", "Four pumps, pond full", "1 h", "2035", 432, "m3/h", 18.22, "m", "", log, "known")
+                .entry("W1", "set", "ISO 1438", null, "Invented operating permit, item 6", "known")
                 .entry("W1", "b", 600, "mm", "Invented drawing S-3", "known")
                 .entry("W1", "B", 1.1, "m", "Invented drawing S-3", "known")
                 .entry("W1", "p", 0.45, "m", "Invented drawing S-3", "known")

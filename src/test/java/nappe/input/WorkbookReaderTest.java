@@ -336,8 +336,9 @@ class WorkbookReaderTest {
         assertThat(refusal(parts))
                 .contains("more than the 1000 that an input workbook may have (fault: too-many-parts)");
         StringBuilder rows = new StringBuilder();
-        for (int i = 1000; i < 201_000; i++) {
-            rows.append("<row r=\"").append(i).append("\"><c><v>1</v></c></row>");
+        for (int i = 1000; i < 51_000; i++) {
+            rows.append("<row r=\"").append(i).append("\">");
+            rows.append("<c><v>1</v></c>".repeat(4)).append("</row>");
         }
         assertThat(refusal(Zips.sound().change(FLOWS, s -> s.replace("</sheetData>", rows + "</sheetData>"))))
                 .isEqualTo("in.xlsx: the workbook has more than 200000 filled cells, the most that an input workbook "
@@ -345,15 +346,36 @@ class WorkbookReaderTest {
     }
 
     @Test
+    void aMillionFormattedRowsAreRefused() throws IOException {
+        assertThat(refusal(Zips.sound().change(FLOWS, s -> formatted(s, 1_048_576))))
+                .isEqualTo("in.xlsx: the sheet Flows has more than 100000 rows, filled or formatted, the most that an "
+                        + "input workbook may have; delete the rows below the entries and save it again "
+                        + "(fault: too-many-rows)");
+    }
+
+    @Test
     void manyFormattedRowsAreRead() throws IOException {
+        Path file = Zips.sound().change(FLOWS, s -> formatted(s, 100_000)).save(folder.resolve("in.xlsx"));
+        assertThat(InputReader.read(file, Samples.METHODS).cases()).hasSize(3);
+    }
+
+    private static String formatted(String sheet, int last) {
         StringBuilder rows = new StringBuilder();
-        for (int i = 1000; i <= 1_048_576; i++) {
+        for (int i = 1000; i <= last; i++) {
             rows.append("<row r=\"").append(i).append("\"><c s=\"1\"/></row>");
         }
-        Path file = Zips.sound()
-                .change(FLOWS, s -> s.replace("</sheetData>", rows + "</sheetData>"))
-                .save(folder.resolve("in.xlsx"));
-        assertThat(InputReader.read(file, Samples.METHODS).cases()).hasSize(3);
+        return sheet.replace("</sheetData>", rows + "</sheetData>");
+    }
+
+    @Test
+    void rowThatAppearsTwiceIsRefused() throws IOException {
+        assertThat(refusal(Zips.sound()
+                        .change(
+                                FLOWS,
+                                s -> s.replace(
+                                        "</sheetData>", "<row r=\"9\"><c r=\"Z9\"><v>1</v></c></row></sheetData>"))))
+                .isEqualTo("in.xlsx, sheet Flows, cell A9: the file is damaged: this row appears twice; get it again "
+                        + "from where it came from (fault: row-twice)");
     }
 
     @Test

@@ -30,7 +30,14 @@ class AgreementTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"canal-turnout.xlsx", "headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(
+            strings = {
+                "canal-turnout.xlsx",
+                "headworks.xlsx",
+                "inlet-works.xlsx",
+                "return-weir.xlsx",
+                "seepage-pond.xlsx"
+            })
     void everyStoredValueIsWhatJavaComputed(String name) throws IOException {
         Package sample = Package.ofSample(name);
         assertThat(Recalculated.disagreements(issued(sample), sample.results(), 0))
@@ -38,7 +45,14 @@ class AgreementTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"canal-turnout.xlsx", "headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(
+            strings = {
+                "canal-turnout.xlsx",
+                "headworks.xlsx",
+                "inlet-works.xlsx",
+                "return-weir.xlsx",
+                "seepage-pond.xlsx"
+            })
     void threeProgramsAgreeOnEveryCell(String name) throws IOException {
         Package sample = Package.ofSample(name);
         Path spoilt = file(Spoiler.spoil(sample.workbook()));

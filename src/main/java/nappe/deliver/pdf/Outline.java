@@ -10,7 +10,7 @@ import java.util.Map;
 import java.util.regex.Pattern;
 import org.w3c.dom.Document;
 import org.w3c.dom.Element;
-import org.w3c.dom.NodeList;
+import org.w3c.dom.Node;
 import org.xhtmlrenderer.pdf.ITextRenderer;
 import org.xhtmlrenderer.pdf.PagePosition;
 
@@ -33,13 +33,18 @@ final class Outline {
     /** Finds what gets a bookmark, and gives each heading an id by which it is found on the page. */
     static Outline of(Document document) {
         Outline outline = new Outline();
-        NodeList all = document.getElementsByTagName("*");
-        for (int i = 0; i < all.getLength(); i++) {
-            if (all.item(i) instanceof Element element) {
-                outline.add(element);
+        outline.addAll(document.getDocumentElement());
+        return outline;
+    }
+
+    /** By hand: the document's list of all elements starts from the front again whenever an attribute is set. */
+    private void addAll(Element element) {
+        add(element);
+        for (Node child = element.getFirstChild(); child != null; child = child.getNextSibling()) {
+            if (child instanceof Element inner) {
+                addAll(inner);
             }
         }
-        return outline;
     }
 
     private void add(Element element) {

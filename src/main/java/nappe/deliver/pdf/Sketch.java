@@ -27,6 +27,9 @@ final class Sketch {
     private final List<Ink> strokes = new ArrayList<>();
     private final List<Ink.Lettering> texts = new ArrayList<>();
 
+    /** The corners of the texts. */
+    private final List<List<At>> taken = new ArrayList<>();
+
     /** @param width in mm, over which no text is to reach */
     Sketch(double width) {
         this.width = width;
@@ -84,8 +87,13 @@ final class Sketch {
 
     Ink.Lettering turned(At at, double size, double degrees, List<Piece> pieces) {
         Ink.Lettering text = new Ink.Lettering(at, size, degrees, pieces);
-        texts.add(text);
+        add(text);
         return text;
+    }
+
+    private void add(Ink.Lettering text) {
+        texts.add(text);
+        taken.add(text.corners());
     }
 
     /** A text with its middle at a place, on the line of writing. */
@@ -115,17 +123,17 @@ final class Sketch {
                 least = hidden;
             }
         }
-        texts.add(best);
+        add(best);
         return best;
     }
 
     /** How much a text would hide of what is there already: another text much, a heavy line some, a thin one little. */
     private double hidden(Ink.Lettering text) {
         double hidden = 0;
-        for (Ink.Lettering other : texts) {
-            hidden += separated(text.corners(AIR), other.corners()) <= 0 ? 100 : 0;
-        }
         List<At> corners = text.corners(AIR);
+        for (List<At> other : taken) {
+            hidden += separated(corners, other) <= 0 ? 100 : 0;
+        }
         for (At corner : text.corners()) {
             hidden += corner.x() < 0 || corner.x() > width || corner.y() < 0 ? 1000 : 0;
         }
@@ -152,8 +160,8 @@ final class Sketch {
         At start = new At(from.x() + 0.1 * (to.x() - from.x()), from.y() + 0.1 * (to.y() - from.y()));
         List<At> line = List.of(start, to);
         double crossed = 0;
-        for (Ink.Lettering other : texts) {
-            crossed += separated(line, other.corners()) <= 0 ? 50 : 0;
+        for (List<At> other : taken) {
+            crossed += separated(line, other) <= 0 ? 50 : 0;
         }
         for (Ink ink : strokes) {
             if (ink instanceof Ink.Stroke stroke && stroke.grey() == 0) {
@@ -200,11 +208,14 @@ final class Sketch {
     }
 
     private static double[] shadow(List<At> corners, double ux, double uy) {
-        double[] along = corners.stream()
-                .mapToDouble(c -> c.x() * ux + c.y() * uy)
-                .sorted()
-                .toArray();
-        return new double[] {along[0], along[along.length - 1]};
+        double from = Double.POSITIVE_INFINITY;
+        double to = Double.NEGATIVE_INFINITY;
+        for (At corner : corners) {
+            double along = corner.x() * ux + corner.y() * uy;
+            from = Math.min(from, along);
+            to = Math.max(to, along);
+        }
+        return new double[] {from, to};
     }
 
     /** The width of pieces in mm at a size in points. */

@@ -58,6 +58,8 @@ final class Stamp extends DefaultPDFCreationListener {
     public void onClose(ITextRenderer renderer) {
         PdfWriter writer = Objects.requireNonNull(renderer.getWriter());
         stamp(writer);
+        String identity = digest();
+        writer.getInfo().put(PdfName.FILEID, new PdfLiteral("[<" + identity + "><" + identity + ">]"));
         attachments.forEach(attachment -> AttachedFile.add(writer, attachment, date()));
         writer.setXmpMetadata(Identification.xmp(writer.getInfo(), furniture.date() + "T00:00:00Z"));
         try {
@@ -83,8 +85,6 @@ final class Stamp extends DefaultPDFCreationListener {
         info.put(PdfName.MODDATE, date());
         info.put(PdfName.PRODUCER, new PdfString("Nappe " + furniture.version(), PdfString.TEXT_UNICODE));
         info.put(PdfName.CREATOR, new PdfString("Nappe " + furniture.version(), PdfString.TEXT_UNICODE));
-        String identity = digest();
-        info.put(PdfName.FILEID, new PdfLiteral("[<" + identity + "><" + identity + ">]"));
     }
 
     /** The first 16 bytes of a hash of all that is printed or attached. */

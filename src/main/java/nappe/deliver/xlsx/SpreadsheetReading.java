@@ -1,6 +1,5 @@
 package nappe.deliver.xlsx;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Collectors;
 import nappe.calculation.Cell;
@@ -50,22 +49,12 @@ public final class SpreadsheetReading implements Reading<Written> {
         if (cell.sureness() == Sureness.MAY_FAIL) {
             text = "IFERROR(" + text + "," + quoted(Value.NO_RESULT) + ")";
         }
-        List<Cell> guards = reading.guards(formula);
+        List<Cell> guards = cell.guards();
         for (int i = guards.size() - 1; i >= 0; i--) {
             String address = reading.addressOf(guards.get(i));
             text = "IF(ISNUMBER(" + address + ")," + text + "," + reading.orNotGiven(guards.get(i)) + ")";
         }
         return text;
-    }
-
-    private List<Cell> guards(Formula formula) {
-        List<Cell> guards = new ArrayList<>();
-        for (String symbol : Guard.guarded(formula)) {
-            if (cell.references().get(symbol) instanceof Cell other && other.sureness() != Sureness.SURE) {
-                guards.add(other);
-            }
-        }
-        return guards;
     }
 
     private String handedOn(Formula.Symbol symbol) {

@@ -2,26 +2,28 @@ package nappe.deliver.pdf;
 
 import com.lowagie.text.pdf.PdfWriter;
 import java.io.ByteArrayOutputStream;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
-import java.util.Map;
 import java.util.Set;
 import java.util.SortedSet;
 import java.util.TreeSet;
-import nappe.results.Furniture;
 import org.w3c.dom.Document;
 import org.xhtmlrenderer.pdf.ITextRenderer;
 
-/** Lays out the filled template and writes the file, with nothing in it that depends on hour or machine. */
-final class PdfWriting {
-    private PdfWriting() {}
+/** The pages with everything in its place, ready to be painted into a file in which nothing depends on hour or machine. */
+final class LaidOutPages {
+    private final FilledPages filled;
+    private final ITextRenderer renderer;
+    private final Glyphs glyphs;
 
-    static PdfDelivery write(
-            String xhtml,
-            Furniture furniture,
-            Drawings drawings,
-            Map<String, Picture> pictures,
-            List<Attachment> attachments) {
+    private LaidOutPages(FilledPages filled, ITextRenderer renderer, Glyphs glyphs) {
+        this.filled = filled;
+        this.renderer = renderer;
+        this.glyphs = glyphs;
+    }
+
+    static LaidOutPages of(FilledPages filled, List<Attachment> attachments) {
         float dots = ITextRenderer.DEFAULT_DOTS_PER_POINT;
         FaceResolver faces = new FaceResolver();
         Glyphs glyphs = new Glyphs(faces);
@@ -32,21 +34,28 @@ final class PdfWriting {
                 paper,
                 new ClosedAgent(paper),
                 faces,
-                new DrawnElements(drawings, dots, new PictureFactory(pictures, dots)),
+                new DrawnElements(filled.drawings(), dots, new PictureFactory(filled.pictures(), dots)),
                 glyphs);
         renderer.setPDFVersion(PdfWriter.VERSION_1_7);
         renderer.getSharedContext().setLineBreakingStrategy(new SpaceBreaks());
-        Document document = Xhtml.parse(xhtml);
-        renderer.setListener(new Stamp(xhtml, furniture, attachments, Outline.of(document)));
+        Document document = Xhtml.parse(filled.xhtml());
+        renderer.setListener(new Stamp(filled.xhtml(), filled.furniture(), attachments, Outline.of(document)));
+        renderer.setDocument(document, null, new PlainNames());
         do {
-            renderer.setDocument(document, null, new PlainNames());
             renderer.layout();
         } while (LonelyHeads.moved(renderer));
+        return new LaidOutPages(filled, renderer, glyphs);
+    }
+
+    /** The file; waits for what is attached once all pages are painted. */
+    PdfDelivery painted() {
         ByteArrayOutputStream bytes = new ByteArrayOutputStream();
         renderer.createPDF(bytes);
         SortedSet<Integer> missing = new TreeSet<>(glyphs.missing());
-        missing.addAll(drawings.missing());
-        return new PdfDelivery(bytes.toByteArray(), warnings(missing));
+        missing.addAll(filled.drawings().missing());
+        List<String> warnings = new ArrayList<>(filled.warnings());
+        warnings.addAll(warnings(missing));
+        return new PdfDelivery(bytes.toByteArray(), List.copyOf(warnings));
     }
 
     private static List<String> warnings(Set<Integer> missing) {
