@@ -30,6 +30,9 @@ public final class Speed {
 
     /** JAR, FOLDER, then {@code [-n ROUNDS] [INPUT.xlsx ...]}. */
     public static void main(String[] args) throws IOException, InterruptedException {
+        // else the library that reads the workbook complains on standard output
+        System.setProperty("log4j.provider", "org.apache.logging.log4j.simple.internal.SimpleProvider");
+        System.setProperty("org.apache.logging.log4j.simplelog.level", "OFF");
         List<String> rest = new ArrayList<>(List.of(args).subList(2, args.length));
         int rounds = 5;
         if (!rest.isEmpty() && rest.get(0).equals("-n")) {

@@ -45,8 +45,9 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
     private static int refused(PrintWriter err, List<Fault> faults) {
         faults.forEach(fault -> err.println(fault));
         if (faults.stream().anyMatch(fault -> fault.message().startsWith(DAMAGED))) {
-            err.println("A damaged file: open it in a spreadsheet program, look it through and save it under a new name, or get"
-                    + " it again from where it came from.");
+            err.println(
+                    "A damaged file: open it in a spreadsheet program, look it through and save it under a new name, or get"
+                            + " it again from where it came from.");
         }
         err.println(
                 faults.size() == 1

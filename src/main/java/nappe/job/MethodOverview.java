@@ -54,8 +54,8 @@ public record MethodOverview(String name, String title, List<String> standards, 
     private static boolean isCited(MethodSheet sheet, Publication source) {
         return Statement.of(sheet.name(), sheet.text()).stream()
                 .filter(statement -> CITING.contains(statement.word()))
-                .anyMatch(statement -> Arrays.asList(statement.rest().split("[^A-Za-z0-9_]+"))
-                        .contains(source.key()));
+                .anyMatch(statement ->
+                        Arrays.asList(statement.rest().split("[^A-Za-z0-9_]+")).contains(source.key()));
     }
 
     private static List<String> ranges(MethodSheet sheet) {

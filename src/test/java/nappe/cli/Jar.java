@@ -87,7 +87,9 @@ final class Jar {
     Said runClass(Class<?> main, List<String> args) throws IOException {
         List<String> command = java(
                 "-cp",
-                jar + java.io.File.pathSeparator + Path.of("target/test-classes").toAbsolutePath(),
+                jar
+                        + java.io.File.pathSeparator
+                        + Path.of("target/test-classes").toAbsolutePath(),
                 main.getName());
         command.addAll(args);
         return start(command).said();

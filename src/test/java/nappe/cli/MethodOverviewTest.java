@@ -45,9 +45,8 @@ class MethodOverviewTest {
         assertThat(method.standards()).isNotEmpty().noneMatch(text -> text.startsWith("SI Brochure"));
         assertThat(method.ranges()).isNotEmpty();
         assertThat(method.state()).contains("check value");
-        long counted = desk.checks().stream()
-                .filter(row -> row.method().equals(name))
-                .count();
+        long counted =
+                desk.checks().stream().filter(row -> row.method().equals(name)).count();
         assertThat(method.state()).startsWith(counted + " check value");
     }
 
@@ -66,7 +65,8 @@ class MethodOverviewTest {
             }
         }
         sheet.tables().values().forEach(table -> known.addAll(counts(table)));
-        assertThat(NUMERAL.matcher(said).results().map(found -> found.group())).allMatch(known::contains, "stands in what is calculated");
+        assertThat(NUMERAL.matcher(said).results().map(found -> found.group()))
+                .allMatch(known::contains, "stands in what is calculated");
     }
 
     /** How many rows a table has, and how many with each of its words; the numbers in its words. */
@@ -90,7 +90,8 @@ class MethodOverviewTest {
     void methodsAreToldWithStandardRangeAndState() {
         NappeTest.Said said = nappe("blank", "--methods", "parshall-flume");
         assertThat(said.out())
-                .contains("parshall-flume  Parshall flume", "standards  ", "ISO 9826:1992", "range      ", "state      ")
+                .contains(
+                        "parshall-flume  Parshall flume", "standards  ", "ISO 9826:1992", "range      ", "state      ")
                 .contains("check values: ")
                 .doesNotContain("approach-channel");
         assertThat(said.out().lines()).allMatch(line -> line.length() <= 100);

@@ -103,12 +103,27 @@ enum Damage {
             List.of("abc", "NaN", "1e999", "-1e999", "Infinity", "INF", "0x10", "1,5", "1 2", "1d", "\u0664", "1.2.3");
 
     private static final List<String> WILD = List.of(
-            "abc", "NaN", "1e999", "inf", "-1", "0", "1", "7", "1e300", "1e-300", "99999999999", "", " ", "0x1p3", "true", "A1");
+            "abc",
+            "NaN",
+            "1e999",
+            "inf",
+            "-1",
+            "0",
+            "1",
+            "7",
+            "1e300",
+            "1e-300",
+            "99999999999",
+            "",
+            " ",
+            "0x1p3",
+            "true",
+            "A1");
     private static final List<String> KINDS = List.of("s", "str", "b", "e", "d", "inlineStr", "n", "zz", "");
     private static final Pattern ATTRIBUTE = Pattern.compile(" [\\w:]+=\"[^\"]*\"");
     private static final Pattern VALUE = Pattern.compile("\"[^\"]*\"");
-    private static final Pattern ELEMENT =
-            Pattern.compile("<(c|si|xf|sheet|col|numFmt|Relationship|Override|Default) [^<>]*(/>|>(?:(?!</\\1>).)*</\\1>)");
+    private static final Pattern ELEMENT = Pattern.compile(
+            "<(c|si|xf|sheet|col|numFmt|Relationship|Override|Default) [^<>]*(/>|>(?:(?!</\\1>).)*</\\1>)");
     private static final Pattern ROW = Pattern.compile("<row .*?</row>");
     private static final Pattern ROW_START = Pattern.compile("<row ");
     private static final Pattern CONTENT = Pattern.compile("<v>[^<]*</v>");

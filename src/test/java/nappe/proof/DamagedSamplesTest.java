@@ -81,7 +81,8 @@ class DamagedSamplesTest {
             Damage damage = Damage.values()[lot.nextInt(Damage.values().length)];
             List<String> parts = parts(sound);
             String part = parts.get(lot.nextInt(parts.size()));
-            Path file = Zips.of(sound).damage(part, text -> damage.to(text, lot)).save(folder.resolve("in.xlsx"));
+            Path file =
+                    Zips.of(sound).damage(part, text -> damage.to(text, lot)).save(folder.resolve("in.xlsx"));
             String what = "seed " + seed + ": " + damage + " in " + part + " of " + name;
             try {
                 Design read = InputReader.read(file, METHODS);
@@ -92,7 +93,10 @@ class DamagedSamplesTest {
                 }
             } catch (InputRefused e) {
                 assertThat(e.faults()).as(what).isNotEmpty();
-                counts.merge(e.faults().stream().anyMatch(f -> f.sheet() != null) ? "refused in a sheet" : "refused", 1, Integer::sum);
+                counts.merge(
+                        e.faults().stream().anyMatch(f -> f.sheet() != null) ? "refused in a sheet" : "refused",
+                        1,
+                        Integer::sum);
             } catch (RuntimeException | StackOverflowError e) {
                 throw new AssertionError(what, e);
             }
@@ -120,7 +124,8 @@ class DamagedSamplesTest {
         }
         assertThat(done.results().values().values())
                 .allMatch(v -> !(v instanceof Value.Number n) || Double.isFinite(n.value()));
-        try (ZipInputStream in = new ZipInputStream(new java.io.ByteArrayInputStream(XlsxDelivery.render(done.results())))) {
+        try (ZipInputStream in =
+                new ZipInputStream(new java.io.ByteArrayInputStream(XlsxDelivery.render(done.results())))) {
             while (in.getNextEntry() != null) {
                 assertThat(new String(in.readAllBytes(), StandardCharsets.UTF_8))
                         .doesNotContain("<v>NaN", "<v>Infinity", "<v>-Infinity");
@@ -132,7 +137,8 @@ class DamagedSamplesTest {
     private static List<Design.Origin> numbers(Design design) {
         Stream<Design.Typed> typed = Stream.of(
                         design.cases().stream()
-                                .flatMap(c -> Stream.concat(Stream.of(c.flow(), c.units(), c.tailwater()), c.typed().values().stream())),
+                                .flatMap(c -> Stream.concat(
+                                        Stream.of(c.flow(), c.units(), c.tailwater()), c.typed().values().stream())),
                         design.elements().stream().flatMap(e -> e.typed().values().stream()),
                         design.levels().stream().flatMap(l -> Stream.of(l.flow(), l.level())),
                         design.demands().stream().map(Design.Demand::value))
@@ -167,7 +173,8 @@ class DamagedSamplesTest {
                     Path file = Zips.of(sound)
                             .change(part, text -> text.replaceFirst(start, by))
                             .save(folder.resolve("in.xlsx"));
-                    InputRefused refused = catchThrowableOfType(InputRefused.class, () -> InputReader.read(file, METHODS));
+                    InputRefused refused =
+                            catchThrowableOfType(InputRefused.class, () -> InputReader.read(file, METHODS));
                     assertThat(refused).as(name + " " + entry + " " + by).isNotNull();
                     assertThat(refused.faults()).extracting(Fault::sheet).contains(entry.sheet());
                 }
@@ -179,7 +186,8 @@ class DamagedSamplesTest {
     @Test
     void theSamplesThemselvesAreRead() {
         for (String name : SAMPLES) {
-            assertThatCode(() -> InputReader.read(Package.INPUTS.resolve(name), METHODS)).doesNotThrowAnyException();
+            assertThatCode(() -> InputReader.read(Package.INPUTS.resolve(name), METHODS))
+                    .doesNotThrowAnyException();
         }
     }
 }
