@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Collectors;
+import nappe.formula.Guard;
 import nappe.formula.NumberReading;
 import nappe.formula.PlainReading;
 import nappe.formula.Value;
@@ -15,7 +16,10 @@ import nappe.station.Design.Typed;
 import nappe.unit.Unit;
 import org.jspecify.annotations.Nullable;
 
-/** Checks that what was typed of a device can be built; what is left blank is not judged. */
+/**
+ * Checks that what was typed of a device can be built. What is left blank is not judged, unless the condition itself asks
+ * whether it is given.
+ */
 final class GeometryCheck implements NumberReading.Values {
     private final Element element;
     private final MethodSheet method;
@@ -39,10 +43,21 @@ final class GeometryCheck implements NumberReading.Values {
     private List<DesignFault> faults() {
         NumberReading reading = new NumberReading(this);
         return method.geometry().stream()
-                .filter(geometry -> geometry.entries().stream().allMatch(this::isGiven))
+                .filter(this::isJudged)
                 .filter(geometry -> !reading.holds(geometry.condition()))
                 .map(this::fault)
                 .toList();
+    }
+
+    /** What the condition asks for by {@code given(...)} may be blank; all else it names must be there. */
+    private boolean isJudged(Geometry geometry) {
+        return geometry.entries().stream().allMatch(symbol -> isGiven(symbol) || isAsked(geometry, symbol));
+    }
+
+    private boolean isAsked(Geometry geometry, String symbol) {
+        return method.item(symbol) instanceof Item.Given given
+                && given.from() == Item.From.ENTRY
+                && !Guard.guarded(geometry.condition()).contains(symbol);
     }
 
     private boolean isGiven(String symbol) {
@@ -51,15 +66,21 @@ final class GeometryCheck implements NumberReading.Values {
     }
 
     private DesignFault fault(Geometry geometry) {
-        String read = geometry.entries().stream().map(this::shown).collect(Collectors.joining(", "));
+        List<String> entries = geometry.entries();
+        String read = entries.stream().map(this::shown).collect(Collectors.joining(", "));
+        String first = entries.stream().filter(this::isGiven).findFirst().orElse(entries.get(0));
+        boolean compares = entries.stream().noneMatch(symbol -> isAsked(geometry, symbol));
         return new DesignFault(
-                typed(geometry.entries().get(0)).origin(),
-                "with " + read + " this cannot be built: " + geometry.label() + ", "
-                        + PlainReading.of(geometry.condition()) + "; correct what is wrong",
+                typed(first).origin(),
+                "with " + read + " this cannot be built: " + geometry.label()
+                        + (compares ? ", " + PlainReading.of(geometry.condition()) : "") + "; correct what is wrong",
                 "geometry-impossible");
     }
 
     private String shown(String symbol) {
+        if (!isGiven(symbol)) {
+            return symbol + " left blank";
+        }
         Typed typed = typed(symbol);
         if (typed.value() instanceof Value.Number number) {
             String unit = typed.unit().text();
@@ -82,6 +103,9 @@ final class GeometryCheck implements NumberReading.Values {
         @Nullable Item item = method.item(symbol);
         if (item instanceof Item.Constant constant) {
             return Value.of(inSi(constant.value(), constant.unit()));
+        }
+        if (!isGiven(symbol)) {
+            return new Value.None(Value.NOT_GIVEN);
         }
         Typed typed = typed(symbol);
         return typed.value() instanceof Value.Number number

@@ -99,7 +99,9 @@ final class HostileFiles {
         add(
                 "open.ods",
                 "open-document",
-                new Zips().with("mimetype", "application/vnd.oasis.opendocument.spreadsheet").bytes());
+                new Zips()
+                        .with("mimetype", "application/vnd.oasis.opendocument.spreadsheet")
+                        .bytes());
     }
 
     private void otherKinds() throws IOException {
@@ -126,16 +128,29 @@ final class HostileFiles {
         String macros = "application/vnd.ms-excel.sheet.macroEnabled.main+xml";
         changed("macros.xlsm", "macros", TYPES, PLAIN, macros);
         changed("macros.xlsx", "macros", TYPES, PLAIN, macros);
-        add("macros in a plain one.xlsx", "macros", zips().with("xl/vbaProject.bin", "x").bytes());
+        add(
+                "macros in a plain one.xlsx",
+                "macros",
+                zips().with("xl/vbaProject.bin", "x").bytes());
         changed("template.xltx", "template", TYPES, "sheet.main+xml", "template.main+xml");
-        changed("template with macros.xltm", "template", TYPES, PLAIN, "application/vnd.ms-excel.template.macroEnabled.main+xml");
+        changed(
+                "template with macros.xltm",
+                "template",
+                TYPES,
+                PLAIN,
+                "application/vnd.ms-excel.template.macroEnabled.main+xml");
         changed(
                 "strict.xlsx",
                 "strict-variant",
                 "xl/workbook.xml",
                 "http://schemas.openxmlformats.org/spreadsheetml/2006/main",
                 "http://purl.oclc.org/ooxml/spreadsheetml/main");
-        changed("text document.xlsx", "not-a-workbook", TYPES, PLAIN, PLAIN.replace("spreadsheetml.sheet", "wordprocessingml.document"));
+        changed(
+                "text document.xlsx",
+                "not-a-workbook",
+                TYPES,
+                PLAIN,
+                PLAIN.replace("spreadsheetml.sheet", "wordprocessingml.document"));
         changed(
                 "links.xlsx",
                 "external-links",
@@ -159,16 +174,23 @@ final class HostileFiles {
 
     private void damagedParts() throws IOException {
         add("no sheet part.xlsx", "sheet-part-missing", zips().without(FLOWS).bytes());
-        add("no texts.xlsx", "text-unknown", zips().without("xl/sharedStrings.xml").bytes());
+        add(
+                "no texts.xlsx",
+                "text-unknown",
+                zips().without("xl/sharedStrings.xml").bytes());
         add("no styles.xlsx", "style-unknown", zips().without("xl/styles.xml").bytes());
-        add("no workbook.xlsx", "not-a-workbook", zips().without("xl/workbook.xml").bytes());
+        add(
+                "no workbook.xlsx",
+                "not-a-workbook",
+                zips().without("xl/workbook.xml").bytes());
         add("no types.xlsx", "not-a-workbook", zips().without(TYPES).bytes());
         add("no relations.xlsx", "sheet-part-missing", zips().without(RELATIONS).bytes());
         for (String part : new String[] {TYPES, "_rels/.rels", RELATIONS, "xl/workbook.xml", "xl/styles.xml", FLOWS}) {
             add(
                     "bomb in " + part.replace('/', ' ') + ".xlsx",
                     "doctype",
-                    zips().change(part, s -> s.replaceFirst("(<[A-Za-z])", BOMB + "$1")).bytes());
+                    zips().change(part, s -> s.replaceFirst("(<[A-Za-z])", BOMB + "$1"))
+                            .bytes());
         }
         changed("bomb in texts.xlsx", "doctype", "xl/sharedStrings.xml", "<sst", BOMB + "<sst");
         flows("reaches out.xlsx", "doctype", "<worksheet", "<!DOCTYPE x SYSTEM \"file:///etc/passwd\"><worksheet");
@@ -176,8 +198,13 @@ final class HostileFiles {
 
     private void damagedCells() throws IOException {
         String cell = "<c r=\"D9\" s=\"7\" t=\"n\"><v>4.0</v></c>";
-        for (String number : new String[] {"abc", "NaN", "INF", "1e999", "0x1p3", "4,0", "4.0.0", "--4", "4d", "9".repeat(70)}) {
-            flows("number " + number.substring(0, Math.min(9, number.length())) + ".xlsx", "damaged-number", cell, cell.replace("4.0", number));
+        for (String number :
+                new String[] {"abc", "NaN", "INF", "1e999", "0x1p3", "4,0", "4.0.0", "--4", "4d", "9".repeat(70)}) {
+            flows(
+                    "number " + number.substring(0, Math.min(9, number.length())) + ".xlsx",
+                    "damaged-number",
+                    cell,
+                    cell.replace("4.0", number));
         }
         flows("number away.xlsx", "entry-missing", cell, cell.replace("4.0", ""));
         flows("cell twice.xlsx", "cell-twice", cell, cell + cell);
@@ -193,7 +220,11 @@ final class HostileFiles {
         for (String index : new String[] {"99999", "-1", "1e3", "NaN", ""}) {
             String named = index.isEmpty() ? "none" : index;
             flows("style " + named + ".xlsx", "style-unknown", cell, cell.replace("s=\"7\"", "s=\"" + index + "\""));
-            flows("text " + named + ".xlsx", "text-unknown", cell, cell.replace("\"n\"", "\"s\"").replace("4.0", index));
+            flows(
+                    "text " + named + ".xlsx",
+                    "text-unknown",
+                    cell,
+                    cell.replace("\"n\"", "\"s\"").replace("4.0", index));
         }
     }
 
@@ -203,10 +234,19 @@ final class HostileFiles {
                 "sheet hidden well.xlsx",
                 "sheet-hidden",
                 w -> w.setSheetVisibility(w.getSheetIndex("W1"), SheetVisibility.VERY_HIDDEN));
-        edited("row hidden.xlsx", "entry-unseen", w -> w.getSheet("Flows").getRow(8).setZeroHeight(true));
+        edited(
+                "row hidden.xlsx",
+                "entry-unseen",
+                w -> w.getSheet("Flows").getRow(8).setZeroHeight(true));
         edited("column hidden.xlsx", "entry-unseen", w -> w.getSheet("Flows").setColumnHidden(3, true));
-        edited("merged.xlsx", "entry-unseen", w -> w.getSheet("Flows").addMergedRegion(CellRangeAddress.valueOf("D9:D10")));
-        edited("merged over a number.xlsx", "entry-unseen", w -> w.getSheet("Flows").addMergedRegion(CellRangeAddress.valueOf("C9:D9")));
+        edited(
+                "merged.xlsx",
+                "entry-unseen",
+                w -> w.getSheet("Flows").addMergedRegion(CellRangeAddress.valueOf("D9:D10")));
+        edited(
+                "merged over a number.xlsx",
+                "entry-unseen",
+                w -> w.getSheet("Flows").addMergedRegion(CellRangeAddress.valueOf("C9:D9")));
     }
 
     private void oversized() throws IOException {

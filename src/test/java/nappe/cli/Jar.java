@@ -13,7 +13,7 @@ import java.util.stream.Stream;
 
 /** The packed program in a Java of its own, as a user runs it. */
 final class Jar {
-    private static final long PATIENCE_SECONDS = 120;
+    private static final long PATIENCE_SECONDS = 400;
     private final Path jar;
     private final Path folder;
     private final List<String> before;
@@ -87,7 +87,9 @@ final class Jar {
     Said runClass(Class<?> main, List<String> args) throws IOException {
         List<String> command = java(
                 "-cp",
-                jar + java.io.File.pathSeparator + Path.of("target/test-classes").toAbsolutePath(),
+                jar
+                        + java.io.File.pathSeparator
+                        + Path.of("target/test-classes").toAbsolutePath(),
                 main.getName());
         command.addAll(args);
         return start(command).said();

@@ -60,7 +60,11 @@ class PackageFolderTest {
     }
 
     private static Map<String, byte[]> files(String text) {
-        return Map.of("a.pdf", text.getBytes(StandardCharsets.UTF_8), "b.csv", (text + text).getBytes(StandardCharsets.UTF_8));
+        return Map.of(
+                "a.pdf",
+                text.getBytes(StandardCharsets.UTF_8),
+                "b.csv",
+                (text + text).getBytes(StandardCharsets.UTF_8));
     }
 
     private void write(String text, String status) throws IOException {
@@ -138,12 +142,15 @@ class PackageFolderTest {
     void theFilesOfARunAtWorkAreNotTouched() throws IOException {
         Path fresh = Files.createDirectory(out.resolve(".C-1_rev-A.new"));
         Files.writeString(fresh.resolve("a.pdf"), "at work");
-        FolderLock.hold(out, Duration.ZERO, () -> assertThatThrownBy(() -> FolderLock.hold(out, Duration.ofMillis(50), () -> {
-                    throw new AssertionError("two at once");
-                }))
-                .isInstanceOf(Refusal.class)
-                .hasMessage("another run of nappe is writing into " + out
-                        + "; wait until it has ended and run again (fault: at-work)"));
+        FolderLock.hold(
+                out,
+                Duration.ZERO,
+                () -> assertThatThrownBy(() -> FolderLock.hold(out, Duration.ofMillis(50), () -> {
+                            throw new AssertionError("two at once");
+                        }))
+                        .isInstanceOf(Refusal.class)
+                        .hasMessage("another run of nappe is writing into " + out
+                                + "; wait until it has ended and run again (fault: at-work)"));
         assertThat(fresh.resolve("a.pdf")).hasContent("at work");
         assertThat(names(out)).containsExactly(".C-1_rev-A.new");
     }
@@ -277,7 +284,8 @@ class PackageFolderTest {
     @Test
     void aFolderNameThatIsTooLongIsTold() {
         Path parent = out.resolve("x".repeat(300));
-        assertThatThrownBy(() -> PackageFolder.of(parent, "C-1", "A").write(files("x"), furniture("C-1", "A", "issued")))
+        assertThatThrownBy(
+                        () -> PackageFolder.of(parent, "C-1", "A").write(files("x"), furniture("C-1", "A", "issued")))
                 .isInstanceOf(NotWritten.class)
                 .hasMessageContaining("could not be written")
                 .hasMessageContaining("name another place. Nothing was changed.");
@@ -317,7 +325,8 @@ class PackageFolderTest {
             try (FileChannel other = FileChannel.open(out.resolve(FolderLock.FILE), StandardOpenOption.WRITE)) {
                 assertThat(other.isOpen()).isTrue();
             }
-            assertThat(Files.getPosixFilePermissions(out.resolve(FolderLock.FILE))).hasSize(6);
+            assertThat(Files.getPosixFilePermissions(out.resolve(FolderLock.FILE)))
+                    .hasSize(6);
         });
     }
 }

@@ -37,7 +37,8 @@ final class ReadmeMethods {
     static String table() {
         Desk desk = new Desk();
         List<CheckRow> checks = desk.checks();
-        StringBuilder table = new StringBuilder("| name | what it is | standards | range | check values |\n|---|---|---|---|---|\n");
+        StringBuilder table =
+                new StringBuilder("| name | what it is | standards | range | check values |\n|---|---|---|---|---|\n");
         for (String name : desk.methods().names()) {
             MethodOverview method = MethodOverview.of(desk.methods(), name, checks);
             table.append("| `")

@@ -48,17 +48,20 @@ class WholeProgramIT {
         Jar nappe = Jar.in(work).copiedTo(tools.resolve("the calculator.jar"));
 
         assertThat(done(nappe.run("--version")).out()).startsWith("nappe ");
-        assertThat(done(nappe.run("blank", "F1=parshall-flume", "-o", "the flume.xlsx")).out())
+        assertThat(done(nappe.run("blank", "F1=parshall-flume", "-o", "the flume.xlsx"))
+                        .out())
                 .contains("Wrote the flume.xlsx");
         Path input = work.resolve("the flume.xlsx");
         Jar.Said refused = nappe.run("inspect", "the flume.xlsx", "--marked", "the flume, marked.xlsx");
         assertThat(refused.status()).isEqualTo(ExitStatus.INPUT_REFUSED);
-        assertThat(refused.err()).contains("Calculation number is missing", "cells marked, all faults on its sheet Faults");
+        assertThat(refused.err())
+                .contains("Calculation number is missing", "cells marked, all faults on its sheet Faults");
         assertThat(work.resolve("the flume, marked.xlsx")).isNotEmptyFile();
 
         fill(input);
         Map<String, String> before = Jar.listing(folder);
-        assertThat(done(nappe.run("inspect", "the flume.xlsx")).out()).contains("1 element(s), 1 flow case(s), no faults.");
+        assertThat(done(nappe.run("inspect", "the flume.xlsx")).out())
+                .contains("1 element(s), 1 flow case(s), no faults.");
         assertThat(Jar.listing(folder)).isEqualTo(before);
         assertThat(done(nappe.run("issue", "the flume.xlsx")).out()).contains("Wrote output/C-001-b_rev-A");
         Path made = work.resolve("output/C-001-b_rev-A");

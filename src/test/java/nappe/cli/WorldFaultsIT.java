@@ -41,8 +41,10 @@ class WorldFaultsIT {
     private Path earlier(Path parent) throws IOException {
         Path made = Files.createDirectories(parent.resolve(NAME));
         Files.writeString(made.resolve("old.pdf"), "of before");
-        Files.writeString(made.resolve("contents.txt"), "calculation: LF-W-004\nrevision: 0\nstatus: preliminary\nsha256 "
-                + Contents.hash("of before".getBytes()) + "  old.pdf\n");
+        Files.writeString(
+                made.resolve("contents.txt"),
+                "calculation: LF-W-004\nrevision: 0\nstatus: preliminary\nsha256 "
+                        + Contents.hash("of before".getBytes()) + "  old.pdf\n");
         assertThat(Contents.of(made).isWhole(made)).isTrue();
         return made;
     }
@@ -60,8 +62,7 @@ class WorldFaultsIT {
     private void assertWhole(Path parent) throws IOException {
         assertThat(names(parent)).containsExactly(NAME);
         Path made = parent.resolve(NAME);
-        assertThat(names(made))
-                .containsExactly(NAME + ".pdf", NAME + ".xlsx", NAME + "_W1-rating.csv", "contents.txt");
+        assertThat(names(made)).containsExactly(NAME + ".pdf", NAME + ".xlsx", NAME + "_W1-rating.csv", "contents.txt");
         assertThat(Contents.of(made).isWhole(made)).isTrue();
     }
 
@@ -134,7 +135,8 @@ class WorldFaultsIT {
         try {
             Tools.run("mount", "-t", "tmpfs", "-o", options, "tmpfs", disk.toString());
         } catch (IOException e) {
-            System.err.println("NOT PROVEN: a full disk, because no disk may be mounted here; the limit on a file stands for it");
+            System.err.println(
+                    "NOT PROVEN: a full disk, because no disk may be mounted here; the limit on a file stands for it");
             Assumptions.abort("no disk may be mounted");
         }
     }
@@ -149,14 +151,18 @@ class WorldFaultsIT {
         Map<String, String> before = Jar.listing(work);
         Jar.Said issue = nobody.run("issue", sound, "-o", work);
         assertThat(issue.status()).isEqualTo(ExitStatus.INTERNAL_FAULT);
-        assertThat(issue.err()).contains("there is no right to write in the folder " + work, "name another folder with -o");
+        assertThat(issue.err())
+                .contains("there is no right to write in the folder " + work, "name another folder with -o");
         Jar.Said blank = nobody.run("blank", "W1=rectangular-weir", "-o", work.resolve("station.xlsx"));
         assertThat(blank.status()).isEqualTo(ExitStatus.INTERNAL_FAULT);
         assertThat(blank.err()).contains("station.xlsx could not be written: there is no right to write there");
         Jar.Said marked = nobody.run("inspect", faulty, "--marked", work.resolve("copy.xlsx"));
         assertThat(marked.status()).isEqualTo(ExitStatus.INPUT_REFUSED);
         assertThat(marked.err())
-                .contains("no marked copy was written: " + work.resolve("copy.xlsx") + " could not be written", "write 4.0", "1 fault;");
+                .contains(
+                        "no marked copy was written: " + work.resolve("copy.xlsx") + " could not be written",
+                        "write 4.0",
+                        "1 fault;");
         for (Jar.Said said : List.of(issue, blank, marked)) {
             assertThat(said.err()).doesNotContain("\tat ", "Exception");
         }
@@ -204,6 +210,8 @@ class WorldFaultsIT {
         Path input = SampleStations.weir().save(folder.resolve("Зуб.xlsx"));
         Jar.Said said = jar.inLanguage("C").run("inspect", input);
         assertThat(said.status()).isEqualTo(ExitStatus.WRONG_USAGE);
-        assertThat(said.err()).contains("set one that has, such as LC_ALL=C.UTF-8").doesNotContain("Exception", "java.");
+        assertThat(said.err())
+                .contains("set one that has, such as LC_ALL=C.UTF-8")
+                .doesNotContain("Exception", "java.");
     }
 }

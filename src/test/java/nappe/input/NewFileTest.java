@@ -60,8 +60,7 @@ class NewFileTest {
     void theFileOfARunAtWorkIsNotTouched() throws IOException {
         Path file = folder.resolve("a.xlsx");
         Path left = folder.resolve(".nappe-" + Integer.toHexString("a.xlsx".hashCode()) + ".new");
-        try (FileChannel other =
-                FileChannel.open(Files.writeString(left, "at work"), StandardOpenOption.WRITE)) {
+        try (FileChannel other = FileChannel.open(Files.writeString(left, "at work"), StandardOpenOption.WRITE)) {
             other.lock();
             assertThatThrownBy(() -> NewFile.write(file, "whole".getBytes()))
                     .isInstanceOf(NotWritten.class)

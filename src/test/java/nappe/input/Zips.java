@@ -9,6 +9,8 @@ import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.function.UnaryOperator;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import java.util.zip.ZipEntry;
 import java.util.zip.ZipInputStream;
 import java.util.zip.ZipOutputStream;
@@ -49,6 +51,34 @@ public final class Zips {
             throw new IllegalStateException("nothing was changed in " + name + ": " + before);
         }
         return with(name, after);
+    }
+
+    /** Changes a part byte for character, which may leave it as it was. */
+    public Zips damage(String name, UnaryOperator<String> change) {
+        String before = new String(parts.get(name), StandardCharsets.ISO_8859_1);
+        parts.put(name, change.apply(before).getBytes(StandardCharsets.ISO_8859_1));
+        return this;
+    }
+
+    /** The names of the parts. */
+    public java.util.Set<String> names() {
+        return parts.keySet();
+    }
+
+    /** A part as text; empty where there is none. */
+    public String text(String name) {
+        return new String(parts.getOrDefault(name, new byte[0]), StandardCharsets.UTF_8);
+    }
+
+    /** The parts with the cells, by the name of the sheet, as our own blank numbers them. */
+    public Map<String, String> sheetParts() {
+        Map<String, String> sheets = new LinkedHashMap<>();
+        String workbook = new String(parts.get("xl/workbook.xml"), StandardCharsets.UTF_8);
+        Matcher sheet = Pattern.compile("<sheet name=\"([^\"]*)\"").matcher(workbook);
+        while (sheet.find()) {
+            sheets.put(sheet.group(1), "xl/worksheets/sheet" + (sheets.size() + 1) + ".xml");
+        }
+        return sheets;
     }
 
     public byte[] bytes() throws IOException {

@@ -242,7 +242,7 @@ class FlowSearchTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void atEachFlowFoundTheMarginIsZeroAndBesideItTheVerdictTurns(String sample) {
         MethodLibrary methods = new MethodLibrary(new BuiltInLibrary());
         Design design = InputReader.read(Path.of("sample-inputs", sample), methods);

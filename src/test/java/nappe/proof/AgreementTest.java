@@ -31,7 +31,14 @@ class AgreementTest {
 
     @ParameterizedTest
     @ValueSource(
-            strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "pumping-main.xlsx", "reuse-line.xlsx"})
+            strings = {
+                "headworks.xlsx",
+                "inlet-works.xlsx",
+                "return-weir.xlsx",
+                "seepage-pond.xlsx",
+                "pumping-main.xlsx",
+                "reuse-line.xlsx"
+            })
     void everyStoredValueIsWhatJavaComputed(String name) throws IOException {
         Package sample = Package.ofSample(name);
         assertThat(Recalculated.disagreements(issued(sample), sample.results(), 0))
@@ -40,7 +47,14 @@ class AgreementTest {
 
     @ParameterizedTest
     @ValueSource(
-            strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "pumping-main.xlsx", "reuse-line.xlsx"})
+            strings = {
+                "headworks.xlsx",
+                "inlet-works.xlsx",
+                "return-weir.xlsx",
+                "seepage-pond.xlsx",
+                "pumping-main.xlsx",
+                "reuse-line.xlsx"
+            })
     void threeProgramsAgreeOnEveryCell(String name) throws IOException {
         Package sample = Package.ofSample(name);
         Path spoilt = file(Spoiler.spoil(sample.workbook()));

@@ -35,6 +35,7 @@ class CheckersEditTest {
     private static final Map<String, List<Typing>> FLUME = new LinkedHashMap<>();
     private static final Map<String, List<Typing>> INLET = new LinkedHashMap<>();
     private static final Map<String, List<Typing>> WEIR = new LinkedHashMap<>();
+    private static final Map<String, List<Typing>> POND = new LinkedHashMap<>();
 
     private static final Map<String, List<Typing>> MAIN = new LinkedHashMap<>();
     private static final Map<String, List<Typing>> REUSE = new LinkedHashMap<>();
@@ -57,6 +58,10 @@ class CheckersEditTest {
 
     private static void reuse(String what, Typing... typings) {
         REUSE.put(what, Arrays.asList(typings));
+    }
+
+    private static void pond(String what, Typing... typings) {
+        POND.put(what, Arrays.asList(typings));
     }
 
     static {
@@ -198,6 +203,28 @@ class CheckersEditTest {
                 new Flow(4, 300),
                 new Level(1, 18.29),
                 new Head(3, "W1", 0.33));
+
+        pond(
+                "the other sets and limits, another angle, a head read",
+                new Entry("W1", "set", "US constants"),
+                new Entry("V1", "set", "polynomial"),
+                new Entry("V1", "rules", "US manual"),
+                new Entry("V1", "theta", 53.13),
+                new Head(1, "W1", 48));
+        pond(
+                "weir as wide as the pond's outlet, with vents; crest higher, so that the V-notch is not free",
+                new Entry("W1", "b", 2000),
+                new Entry("W1", "z_d", 49.6),
+                new Entry("W1", "A_v", 0.01),
+                new Entry("W1", "K_v", 3),
+                new Entry("W1", "z_c", 50.6));
+        pond(
+                "width correction read from the figure; both weirs drowned; no flow in a case",
+                new Entry("W1", "b", 1800),
+                new Entry("W1", "k_y", 0.0035),
+                new Level(3, 50.75),
+                new Flow(0, 0),
+                new Entry("V1", "p", 0.3));
     }
 
     private Path file(byte[] workbook) throws IOException {
@@ -286,6 +313,11 @@ class CheckersEditTest {
         proven("reuse-line.xlsx", REUSE, 3);
     }
 
+    @Test
+    void editsOfThePondGiveWhatIssuingAnewGives() throws IOException {
+        proven("seepage-pond.xlsx", POND, 2);
+    }
+
     /** A cell that is emptied is empty where "not given" stood; all that rests on it reads as not given. */
     @Test
     void headReadThatIsDeletedIsNotGiven() throws IOException {
@@ -307,10 +339,10 @@ class CheckersEditTest {
     /** What may be typed over in the issued workbook is what these edits type over: numbers and choices. */
     @Test
     void wordsThatAreUnlockedAreChoices() {
-        for (String sample : List.of("headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx")) {
+        for (String sample : List.of("headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx")) {
             assertThat(Package.ofSample(sample).results().cells())
                     .filteredOn(c -> c.kind() == Cell.Kind.ENTRY && c.typed() instanceof Value.Word)
-                    .allMatch(c -> List.of("size", "form", "submerged", "serves", "inflow")
+                    .allMatch(c -> List.of("size", "form", "submerged", "serves", "inflow", "set", "rules")
                             .contains(c.symbol()));
         }
     }

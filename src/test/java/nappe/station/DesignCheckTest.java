@@ -29,6 +29,9 @@ class DesignCheckTest {
             geometry d + t < D ; the bore is smaller than the pipe
             geometry shape = "round" or d < 0.5 m ; a square bore is narrow
             geometry T > 273.15 K ; water is not ice
+            entry e ; m ; first end ; optional
+            entry f ; m ; second end ; optional
+            geometry given(e) or not given(f) ; the second end follows the first
             case Q = flow ; m3/s ; flow
             take z_t = water level ; m ; level
             line v = Q/d^2 ; m/s ; velocity
@@ -76,6 +79,18 @@ class DesignCheckTest {
                 "shape", typed("shape", Value.word("round"), "1"),
                 "T", typed("T", Value.of(-1), "degC"))));
         assertThat(codes(cold)).containsExactly("geometry-impossible");
+    }
+
+    @Test
+    void whatTheConditionAsksForIsJudgedWhereItIsBlankToo() {
+        Map<String, Typed> second = Map.of("f", typed("f", Value.of(2), "m"));
+        DesignFault fault = faults(design(element(second))).get(0);
+        assertThat(fault.origin()).isEqualTo(new Origin("X1", "f"));
+        assertThat(fault.message())
+                .isEqualTo("with e left blank, f = 2 m this cannot be built: the second end follows the first; correct what"
+                        + " is wrong");
+        assertThat(codes(design(element(Map.of("e", typed("e", Value.of(2), "m")))))).isEmpty();
+        assertThat(codes(design(element(Map.of())))).isEmpty();
     }
 
     @Test
