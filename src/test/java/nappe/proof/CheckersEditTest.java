@@ -40,6 +40,9 @@ class CheckersEditTest {
     private static final Map<String, List<Typing>> POND = new LinkedHashMap<>();
     private static final Map<String, List<Typing>> TURNOUT = new LinkedHashMap<>();
 
+    private static final Map<String, List<Typing>> MAIN = new LinkedHashMap<>();
+    private static final Map<String, List<Typing>> REUSE = new LinkedHashMap<>();
+
     private static void flume(String what, Typing... typings) {
         FLUME.put(what, Arrays.asList(typings));
     }
@@ -50,6 +53,14 @@ class CheckersEditTest {
 
     private static void weir(String what, Typing... typings) {
         WEIR.put(what, Arrays.asList(typings));
+    }
+
+    private static void main(String what, Typing... typings) {
+        MAIN.put(what, Arrays.asList(typings));
+    }
+
+    private static void reuse(String what, Typing... typings) {
+        REUSE.put(what, Arrays.asList(typings));
     }
 
     private static void pond(String what, Typing... typings) {
@@ -73,6 +84,45 @@ class CheckersEditTest {
                 new Entry("F1", "b", 0.88),
                 new Flow(0, 0.0),
                 new Level(1, 52.1));
+        main(
+                "machined kind by the other sources, another loss, lengths of 1991",
+                new Entry("V1", "kind", "machined"),
+                new Entry("V1", "reading", "the other sources"),
+                new Entry("V1", "loss", "curve of the annex"),
+                new Entry("V1", "edition", "edition of 1991"));
+        main(
+                "throat too wide, density typed, a fitting that the edition of 1991 lacks",
+                new Entry("V1", "d", 400),
+                new Entry("V1", "rho_t", 1010),
+                new Entry("V1", "edition", "edition of 1991"),
+                new Entry("V1", "fitting", "reducer 1.33 D to D, 2.3 D long"));
+        main(
+                "inclined limb whose slope is not typed, no transmitter, coefficient typed, warmer water",
+                new Entry("V1", "gauge", "inclined limb, heavier liquid"),
+                new Entry("V1", "p_s", "not given"),
+                new Entry("V1", "C_t", 0.99),
+                new Entry("V1", "T", 30));
+        main(
+                "crown higher: not full; no flow; flow beyond everything",
+                new Entry("V1", "z_k", 133.5),
+                new Flow(1, 0),
+                new Flow(3, 1900));
+
+        reuse("corner taps, bore beyond the range", new Entry("O1", "taps", "corner"), new Entry("O1", "d", 9.3));
+        reuse(
+                "small pipe, small flows, no friction",
+                new Entry("O1", "D", 2.5),
+                new Entry("O1", "d", 1.2),
+                new Entry("O1", "f_D", 0),
+                new Flow(2, 0.05));
+        reuse(
+                "straight lengths too short, a second fitting, a U-tube of a light liquid, the pond full",
+                new Entry("O1", "L_s", 9),
+                new Entry("O1", "second", "full-bore ball or gate valve fully open"),
+                new Entry("O1", "gauge", "inverted U-tube"),
+                new Entry("O1", "rho_m", 1.6),
+                new Level(4, 4190));
+
         // a sample of this size takes LibreOffice many seconds each: so several edits go together where they do not
         // meet
         flume("smallest size, a head read in submerged flow", new Entry("F1", "size", "1 in"), new Level(1, 412.85));
@@ -270,6 +320,16 @@ class CheckersEditTest {
     @Test
     void editsOfTheWeirGiveWhatIssuingAnewGives() throws IOException {
         proven("return-weir.xlsx", WEIR, 5);
+    }
+
+    @Test
+    void editsOfThePumpingMainGiveWhatIssuingAnewGives() throws IOException {
+        proven("pumping-main.xlsx", MAIN, 3);
+    }
+
+    @Test
+    void editsOfTheReuseLineGiveWhatIssuingAnewGives() throws IOException {
+        proven("reuse-line.xlsx", REUSE, 3);
     }
 
     @Test
