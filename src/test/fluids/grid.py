@@ -9,7 +9,7 @@ import math
 import sys
 
 import fluids
-from fluids import flow_meter
+from fluids import flow_meter, open_flow
 
 RHO, MU = 998.2, 0.001002
 SOURCE = "general-purpose library fluids " + fluids.__version__
@@ -110,6 +110,34 @@ def loss():
             yield "pressure-meter", meter(0.2, beta, C=repr(C)), "K_e", flow_meter.discharge_coefficient_to_K(0.2, beta * 0.2, C), "1"
 
 
+def full_width(most, widths, heights, heads):
+    """Width, crest height and head of weirs as wide as their channel, heads from 0.03 m up to a part of the crest height."""
+    for b in steps(0.3, 6, widths):
+        for p in steps(0.1, 1.5, heights):
+            for h in steps(0.03, most * p, heads):
+                yield b, p, h
+
+
+def kindsvater_carter():
+    # the library has a k_b of -1.0 mm, Nappe -0.9 mm; its formula for contracted weirs and its V-notches are wrong and left out
+    for b, p, h in full_width(2.5, 13, 13, 12):
+        typed = dict(set='"ISO 1438"', b=f"{b!r} m", B=f"{b!r} m", p=f"{p!r} m", h=f"{h!r} m")
+        yield "rectangular-weir", typed, "Q_h", open_flow.Q_weir_rectangular_full_Kindsvater_Carter(h, p, b), "m3/s"
+
+
+def rehbock():
+    # the library has 0.0832 and 1.25 mm, Nappe 0.083 and 1.2 mm
+    for b, p, h in full_width(1, 10, 10, 10):
+        typed = dict(formula='"Rehbock, range of 1980"', b=f"{b!r} m", p=f"{p!r} m", h=f"{h!r} m")
+        yield "full-width-weir", typed, "Q_h", open_flow.Q_weir_rectangular_full_Rehbock(h, p, b), "m3/s"
+
+
+def ackers():
+    for b, p, h in full_width(2.2, 10, 11, 10):
+        typed = dict(formula='"Ackers 1978"', b=f"{b!r} m", p=f"{p!r} m", h=f"{h!r} m")
+        yield "full-width-weir", typed, "Q_h", open_flow.Q_weir_rectangular_full_Ackers(h, p, b), "m3/s"
+
+
 # one tuple a device: the name, its rows, the tolerance. A coefficient is closed; a flow is found by either side's iteration.
 DEVICES = [
     ("orifice-coefficient", orifice_coefficient, "0.0000001 %"),
@@ -119,6 +147,9 @@ DEVICES = [
     ("venturi-flow", venturi_flow, "0.000001 %"),
     ("typed-coefficient-flow", typed_coefficient_flow, "0.0000001 %"),
     ("loss-of-plates", loss, "0.0000001 %"),
+    ("full-width-kindsvater-carter", kindsvater_carter, "0.034 %"),
+    ("full-width-rehbock", rehbock, "0.25 %"),
+    ("full-width-ackers", ackers, "0.0001 %"),
 ]
 
 

@@ -47,9 +47,9 @@ public final class RatingGrid {
         List<Block.Column> columns = new ArrayList<>();
         TableDraft table = sheet.table(title, columns);
         for (int i = 0; i <= rating.steps(); i++) {
-            Strip members = row(rating, free, inner, table, i);
+            Laid row = row(rating, free, inner, table, i);
             if (i == 0) {
-                columns.addAll(columns(rating, free, members));
+                columns.addAll(columns(free, row));
             }
         }
         sheet.gap();
@@ -62,7 +62,10 @@ public final class RatingGrid {
         return cell;
     }
 
-    private Strip row(Rating rating, Item.Free free, Scope ends, TableDraft table, int i) {
+    /** What stands in a row behind the free symbol: its members, and the heads of results in reporting units. */
+    private record Laid(Strip members, List<String> reported) {}
+
+    private Laid row(Rating rating, Item.Free free, Scope ends, TableDraft table, int i) {
         Cells cells = items.cells();
         List<Block.Item> shown = new ArrayList<>(List.of(new Block.Text(Integer.toString(i))));
         Formula share = over(
@@ -84,18 +87,20 @@ public final class RatingGrid {
         }
         strip.laid().forEach(line -> shown.add(new Block.Content(line.cell())));
         column += strip.laid().size();
+        List<String> reported = new ArrayList<>();
         for (String result : rating.results()) {
             Cell cell = variant.cell(result);
             Unit report = reports.get(cell.unit().dimension());
             if (report != null) {
                 shown.add(new Block.Content(cells.factors().toReport(table.place(column++), result, cell, report)));
+                reported.add(result + " [" + report + "]");
             }
         }
         table.add(shown);
-        return strip;
+        return new Laid(strip, reported);
     }
 
-    private List<Block.Column> columns(Rating rating, Item.Free free, Strip members) {
+    private List<Block.Column> columns(Item.Free free, Laid row) {
         List<Block.Column> columns = new ArrayList<>();
         columns.add(new Block.Column("Step", 6, Block.Align.RIGHT));
         columns.add(column(head(free.symbol(), free.unit())));
@@ -103,15 +108,8 @@ public final class RatingGrid {
         if (freeReport != null) {
             columns.add(column(free.symbol() + " [" + freeReport + "]"));
         }
-        members.heads().forEach(head -> columns.add(column(head)));
-        for (String result : rating.results()) {
-            if (method.item(result) instanceof Item.Line line && line.unit() != null) {
-                Unit report = reports.get(line.unit().dimension());
-                if (report != null) {
-                    columns.add(column(result + " [" + report + "]"));
-                }
-            }
-        }
+        row.members().heads().forEach(head -> columns.add(column(head)));
+        row.reported().forEach(head -> columns.add(column(head)));
         return columns;
     }
 

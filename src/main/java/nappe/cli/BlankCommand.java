@@ -1,6 +1,7 @@
 package nappe.cli;
 
 import java.io.IOException;
+import java.io.PrintWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -58,7 +59,7 @@ final class BlankCommand implements Callable<Integer> {
 
     @Option(
             names = "--methods",
-            description = "list the methods, or those named, with their standards, ranges and check values; write nothing")
+            description = "list the methods, or tell standards, ranges and check values of those named; write nothing")
     private boolean list;
 
     @CommandLine.Mixin
@@ -104,11 +105,21 @@ final class BlankCommand implements Callable<Integer> {
                 .map(element -> element.substring(element.indexOf('=') + 1))
                 .toList();
         asked.forEach(method -> requireKnown(desk, method));
-        MethodList out = new MethodList(spec.commandLine().getOut());
+        PrintWriter screen = spec.commandLine().getOut();
+        MethodList out = new MethodList(screen);
         List<CheckRow> checks = desk.checks();
-        names.stream()
-                .filter(name -> asked.isEmpty() || asked.contains(name))
-                .forEach(name -> out.print(MethodOverview.of(desk.methods(), name, checks), house.mark(desk, name)));
+        for (String name : asked.isEmpty() ? names : asked) {
+            MethodOverview method = MethodOverview.of(desk.methods(), name, checks);
+            if (asked.isEmpty()) {
+                out.printShort(method, house.mark(desk, name));
+            } else {
+                out.print(method, house.mark(desk, name));
+            }
+        }
+        if (asked.isEmpty()) {
+            screen.println();
+            screen.println("Standards and range of one:  nappe blank --methods " + names.get(0) + house.asTyped());
+        }
         house.tellRemarks(desk, List.of());
     }
 

@@ -91,7 +91,7 @@ record Contents(Map<String, String> words, Map<String, String> hashes) {
         return true;
     }
 
-    private static String hash(byte[] bytes) {
+    static String hash(byte[] bytes) {
         try {
             return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(bytes));
         } catch (NoSuchAlgorithmException e) {

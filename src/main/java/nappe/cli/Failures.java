@@ -16,6 +16,9 @@ import picocli.CommandLine;
 
 /** Turns what a command throws into messages and an exit status; never a stack trace on the screen. */
 final class Failures implements CommandLine.IExecutionExceptionHandler {
+    /** So the faults of a damaged file start, whatever is wrong inside. */
+    private static final String DAMAGED = "the file is damaged";
+
     @Override
     public int handleExecutionException(Exception failure, CommandLine line, CommandLine.ParseResult parsed) {
         PrintWriter err = line.getErr();
@@ -41,6 +44,11 @@ final class Failures implements CommandLine.IExecutionExceptionHandler {
 
     private static int refused(PrintWriter err, List<Fault> faults) {
         faults.forEach(fault -> err.println(fault));
+        if (faults.stream().anyMatch(fault -> fault.message().startsWith(DAMAGED))) {
+            err.println(
+                    "A damaged file: open it in a spreadsheet program, look it through and save it under a new name, or get"
+                            + " it again from where it came from.");
+        }
         err.println(
                 faults.size() == 1
                         ? "1 fault; no package was written."

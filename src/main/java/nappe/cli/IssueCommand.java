@@ -64,6 +64,10 @@ final class IssueCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         Consumer<String> stage = Nappe.stage(spec);
         stage.accept("reading the workbook");
+        Beside.start("pages", () -> {
+            PdfDelivery.warmUp();
+            return true;
+        });
         Desk desk = house.desk();
         Design design = marked.read(desk, input);
         house.tellRemarks(

@@ -15,6 +15,12 @@ final class MethodList {
         this.out = out;
     }
 
+    /** Name, title and state only, to choose from. */
+    void printShort(MethodOverview method, String mark) {
+        out.println(method.name() + "  " + method.title() + mark);
+        out.println("    " + method.state());
+    }
+
     /** @param mark whose the method is, behind its title */
     void print(MethodOverview method, String mark) {
         out.println(method.name() + "  " + method.title() + mark);

@@ -50,7 +50,7 @@ public final class Nappe implements Runnable {
             "Nappe makes the calculation package of a flow-measurement station from one input workbook.",
             "",
             "  nappe blank --methods",
-            "      the methods for flumes, weirs and channels, with their ranges",
+            "      the methods for flumes, weirs, meters and channels",
             "  nappe blank F1=parshall-flume A1=approach-channel --units US -o station.xlsx",
             "      an input workbook to fill in, for the devices of your station from the downstream end up",
             "  nappe inspect station.xlsx",

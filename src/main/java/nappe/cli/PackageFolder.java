@@ -50,10 +50,12 @@ final class PackageFolder {
     /** Refuses, before anything is computed, what could not be written afterwards. */
     void prepare() throws IOException {
         requireWritableParent();
-        if (Files.exists(fresh) || Files.exists(old)) {
-            FolderLock.hold(parent, PATIENCE, this::clear);
+        if (Files.exists(path) || Files.exists(fresh) || Files.exists(old)) {
+            FolderLock.hold(parent, PATIENCE, () -> {
+                clear();
+                requireReplaceable();
+            });
         }
-        requireReplaceable();
     }
 
     private void requireWritableParent() {

@@ -39,6 +39,7 @@ import org.jspecify.annotations.Nullable;
  * note      text                                      note when CONDITION ; text: only where it holds
  * </pre>
  *
+ * After a rank, two blanks keep a symbol that is also the name of a unit from being read as one ({@code 1  L}).
  * Any part of a view may end in {@code ; when CONDITION ; words}: where the condition does not hold it is left out, and the
  * words are said below the drawing. Coordinates are formulas of dimension length over the symbols of the method. All faults are collected.
  */
@@ -194,16 +195,18 @@ final class FigureReader {
         worded.add(new FigureSheet.Worded(symbol, text(1)));
     }
 
+    /** Read word by word: as a formula, "1 d" would be one day. */
     private void dimension() {
-        FormulaParser parser = parser(0);
-        String name = parser.name();
-        Side side = side(name);
-        int rank = parser.count();
-        int at = parser.offset();
-        String symbol = parser.name();
-        parser.end();
-        lengthOf(symbol, at);
-        add(new FigureSheet.Dimension(side, rank, symbol, points(1, 3)));
+        String text = text(0);
+        String[] words = text.split("\\s+");
+        base = statement.field(0).offset();
+        if (words.length != 3 || !words[1].matches("\\d{1,2}")) {
+            throw new FormulaException(
+                    "write: dimension side rank symbol, such as dimension left 1 D", 0, 1, "dimension-unclear");
+        }
+        Side side = side(words[0]);
+        lengthOf(words[2], text.length() - words[2].length());
+        add(new FigureSheet.Dimension(side, Integer.parseInt(words[1]), words[2], points(1, 3)));
     }
 
     private static Side side(String name) {

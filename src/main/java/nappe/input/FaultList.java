@@ -3,6 +3,7 @@ package nappe.input;
 import java.util.List;
 import org.apache.poi.common.usermodel.HyperlinkType;
 import org.apache.poi.ss.usermodel.VerticalAlignment;
+import org.apache.poi.ss.util.CellRangeAddress;
 import org.apache.poi.xssf.usermodel.XSSFCell;
 import org.apache.poi.xssf.usermodel.XSSFCellStyle;
 import org.apache.poi.xssf.usermodel.XSSFFont;
@@ -46,6 +47,10 @@ final class FaultList {
         for (int i = 0; i < WIDTHS.length; i++) {
             sheet.setColumnWidth(i, WIDTHS[i] * 256);
         }
+        sheet.setFitToPage(true);
+        sheet.getPrintSetup().setLandscape(true);
+        sheet.getPrintSetup().setFitHeight((short) 0);
+        sheet.addMergedRegion(new CellRangeAddress(1, 1, 0, HEADS.size() - 1));
         put(sheet.createRow(0), 0, "Faults of " + faults.get(0).file() + " as it was read", bold);
         put(
                 sheet.createRow(1),

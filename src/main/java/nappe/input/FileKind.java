@@ -115,7 +115,9 @@ final class FileKind {
                     .sorted()
                     .toList();
             String typed = String.valueOf(file.getFileName());
-            String bare = typed.toLowerCase(Locale.ROOT).endsWith(".xlsx") ? typed : typed.replaceAll("\\.\\w*$", "") + ".xlsx";
+            String bare = typed.toLowerCase(Locale.ROOT).endsWith(".xlsx")
+                    ? typed
+                    : typed.replaceAll("\\.\\w*$", "") + ".xlsx";
             return Near.question(bare, workbooks);
         } catch (IOException e) {
             return "";

@@ -24,12 +24,12 @@ public final class MarkedCopy {
     /** The library that copies needs some twenty times as much memory. */
     static final long MOST_BYTES = 12_000_000;
 
-    /** Faults of the whole file that can be opened all the same. */
-    private static final Set<String> OPENED = Set.of("external-links", "too-many-faults");
+    /** Faults of a whole file that can be opened all the same. One with links to other files is not copied. */
+    private static final Set<String> OPENED = Set.of("too-many-faults");
 
     /** Damage that the library would mend in silence, so that the copy would not be what was sent. */
     private static final Set<String> MENDED =
-            Set.of("wild-address", "row-twice", "cell-twice", "sheet-twice", "sheet-part-missing");
+            Set.of("wild-address", "row-twice", "cell-twice", "sheet-twice", "sheet-part-missing", "style-unknown");
 
     private static final String AUTHOR = "Nappe";
     private static final int COLUMNS = 3;

@@ -26,15 +26,18 @@ final class NewFile {
         Path fresh = path.resolveSibling(".nappe-"
                 + Integer.toHexString(String.valueOf(path.getFileName()).hashCode()) + ".new");
         refuseExisting(path);
-        try {
-            try (FileChannel channel = FileChannel.open(fresh, StandardOpenOption.CREATE, StandardOpenOption.WRITE)) {
-                if (locked(channel) == null) {
-                    throw new FileSystemException(path.toString(), null, "another run of nappe is writing it");
-                }
+        try (FileChannel channel = FileChannel.open(fresh, StandardOpenOption.CREATE, StandardOpenOption.WRITE)) {
+            if (locked(channel) == null) {
+                throw new FileSystemException(path.toString(), null, "another run of nappe is writing it");
+            }
+            try {
                 // Once more: what was just opened may be the file of a run that has moved it to its place since.
                 refuseExisting(path);
-                fill(channel, bytes, fresh);
+                fill(channel, bytes);
                 Files.move(fresh, path);
+            } catch (IOException e) {
+                Files.deleteIfExists(fresh);
+                throw e;
             }
         } catch (FileAlreadyExistsException e) {
             throw e;
@@ -49,16 +52,11 @@ final class NewFile {
         }
     }
 
-    private static void fill(FileChannel channel, byte[] bytes, Path fresh) throws IOException {
-        try {
-            channel.truncate(0);
-            ByteBuffer rest = ByteBuffer.wrap(bytes);
-            while (rest.hasRemaining()) {
-                channel.write(rest);
-            }
-        } catch (IOException e) {
-            Files.deleteIfExists(fresh);
-            throw e;
+    private static void fill(FileChannel channel, byte[] bytes) throws IOException {
+        channel.truncate(0);
+        ByteBuffer rest = ByteBuffer.wrap(bytes);
+        while (rest.hasRemaining()) {
+            channel.write(rest);
         }
     }
 

@@ -100,13 +100,13 @@ public final class Job {
         return done(design, used, found, software, sizes);
     }
 
-    private Map<String, MethodSheet> used(Design design) {
+    Map<String, MethodSheet> used(Design design) {
         Map<String, MethodSheet> used = new LinkedHashMap<>();
         design.elements().forEach(e -> used.computeIfAbsent(e.method(), methods::sheet));
         return used;
     }
 
-    private Done done(
+    Done done(
             Design design,
             Map<String, MethodSheet> used,
             FoundFlows found,
@@ -186,7 +186,7 @@ public final class Job {
                 p.release());
     }
 
-    private SoftwareStatement statement(Map<String, MethodSheet> used, List<CheckRow> checks) {
+    SoftwareStatement statement(Map<String, MethodSheet> used, List<CheckRow> checks) {
         Verification verification = new Verification(methods);
         List<CheckOutcome> outcomes = checks.stream()
                 .filter(row -> used.containsKey(row.method()))

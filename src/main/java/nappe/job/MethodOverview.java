@@ -1,7 +1,7 @@
 package nappe.job;
 
-import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -54,8 +54,8 @@ public record MethodOverview(String name, String title, List<String> standards, 
     private static boolean isCited(MethodSheet sheet, Publication source) {
         return Statement.of(sheet.name(), sheet.text()).stream()
                 .filter(statement -> CITING.contains(statement.word()))
-                .anyMatch(statement -> Arrays.asList(statement.rest().split("[^A-Za-z0-9_]+"))
-                        .contains(source.key()));
+                .anyMatch(statement ->
+                        Arrays.asList(statement.rest().split("[^A-Za-z0-9_]+")).contains(source.key()));
     }
 
     private static List<String> ranges(MethodSheet sheet) {
@@ -66,17 +66,23 @@ public record MethodOverview(String name, String title, List<String> standards, 
         if (!said.isEmpty()) {
             return said;
         }
-        List<String> ranges = new ArrayList<>();
+        Map<String, String> ranges = new LinkedHashMap<>();
         for (Limit limit : sheet.limits()) {
             String bound = number(sheet, limit.bound());
-            if (bound != null && limit.kind() != Limit.Kind.THRESHOLD) {
-                String value = PlainReading.of(limit.value());
-                String comparison =
-                        limit.valueIsLesser() ? value + " up to " + bound : value + " from " + bound;
-                ranges.add(limit.label() + " (" + comparison + ")");
+            if (bound != null && limit.kind() != Limit.Kind.THRESHOLD && !isAboutAReading(limit)) {
+                String side = (limit.valueIsLesser() ? " up to " : " from ") + bound;
+                String label = limit.label().replaceAll(", (lower|upper) end$", "");
+                ranges.merge(label + " (" + PlainReading.of(limit.value()), side, (from, to) -> from + to);
             }
         }
-        return ranges;
+        return ranges.entrySet().stream()
+                .map(range -> range.getKey() + range.getValue() + ")")
+                .toList();
+    }
+
+    /** A limit that applies only where something optional was typed, such as a head read: it says again what another says. */
+    private static boolean isAboutAReading(Limit limit) {
+        return limit.when() != null && PlainReading.of(limit.when()).contains("given(");
     }
 
     /** A bound that is a number or a cited constant, with its unit; null for one that follows from the entries. */

@@ -85,7 +85,13 @@ final class StatementParts {
 
     Unit unit(int field) {
         moveTo(field);
-        Unit unit = Unit.parse(text(field));
+        String text = text(field);
+        if (text.contains(" ") && !text.matches(".*[0-9/*^].*")) {
+            throw fault(
+                    "a unit stands here, not \"" + text + "\"; the unit of a pure number is 1: sym ; 1 ; label",
+                    "unit-missing");
+        }
+        Unit unit = Unit.parse(text);
         moveTo(0);
         return unit;
     }

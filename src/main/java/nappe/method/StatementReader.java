@@ -91,7 +91,8 @@ final class StatementReader {
     /** Words for the list of methods, which takes them from the text; nothing is calculated with them. */
     private void range() {
         if (parts.statement.rest().isEmpty()) {
-            throw parts.fault("a range says in words where the method holds: range heads of 0.03 m to 0.6 m", "range-unclear");
+            throw parts.fault(
+                    "a range says in words where the method holds: range heads of 0.03 m to 0.6 m", "range-unclear");
         }
     }
 

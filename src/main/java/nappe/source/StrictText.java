@@ -83,7 +83,8 @@ public final class StrictText {
     /** A workbook, or a text in another encoding throughout, would give a fault for every letter. */
     private void refuseOtherKinds() {
         if (startsWith(0x50, 0x4B, 3, 4) || startsWith(0xD0, 0xCF, 0x11, 0xE0)) {
-            throw refuse("this is a workbook or a packed file, not a text; save what it holds as plain text (a table as CSV)");
+            throw refuse(
+                    "this is a workbook or a packed file, not a text; save what it holds as plain text (a table as CSV)");
         }
         if (startsWith(0xFF, 0xFE) || startsWith(0xFE, 0xFF)) {
             throw refuse("this text is saved in UTF-16; save the file in UTF-8");

@@ -87,7 +87,8 @@ final class CombinationsSheet {
             List<Block.Item> row = new ArrayList<>(List.of(new Block.Content(labels.get(labels.size() - 1))));
             for (int k = 0; k < combinations.size(); k++) {
                 int column = limit.forAll() ? 0 : column(combinations.get(k));
-                Cell verdict = cells.same(table.place(1 + k), "", limit.verdicts().get(column));
+                Cell verdict =
+                        cells.same(table.place(1 + k), "", limit.verdicts().get(column));
                 verdicts.get(k).add(verdict);
                 row.add(new Block.Content(verdict));
             }

@@ -26,7 +26,8 @@ class HelpTest {
 
     /** Every line of the helps, of what the bare name prints and of the guide that runs the program. */
     static List<String> examples() throws IOException {
-        List<String> texts = new ArrayList<>(List.of(nappe().out(), nappe("--help").out()));
+        List<String> texts =
+                new ArrayList<>(List.of(nappe().out(), nappe("--help").out()));
         COMMANDS.forEach(command -> texts.add(nappe(command, "--help").out()));
         texts.add(Files.readString(Path.of("README.md")));
         return texts.stream()
@@ -60,7 +61,8 @@ class HelpTest {
             MillRace.filled(mill).save(mill);
             Files.writeString(folder.resolve("firm-checks.csv"), rowsShownByVerify());
         }
-        Object[] args = Stream.of(example.split(" +")).skip(1).map(this::inFolder).toArray();
+        Object[] args =
+                Stream.of(example.split(" +")).skip(1).map(this::inFolder).toArray();
         Said said = nappe(args);
         assertThat(said.status()).as(said.err()).isZero();
     }
@@ -123,9 +125,8 @@ class HelpTest {
     void aSlipIsAnsweredWithWhatWasMeant(String line, String answer, String code) {
         String[] args = line.split(" ");
         boolean writes = line.startsWith("blank") && line.contains("--units");
-        Said said = nappe(
-                Stream.concat(Stream.of(args), writes ? Stream.of("-o", "x.xlsx") : Stream.empty())
-                        .toArray());
+        Said said = nappe(Stream.concat(Stream.of(args), writes ? Stream.of("-o", "x.xlsx") : Stream.empty())
+                .toArray());
         assertThat(said.status()).isEqualTo(ExitStatus.WRONG_USAGE);
         assertThat(said.err()).contains(answer, "(fault: " + code + ")", "--help");
         assertThat(said.out()).isEmpty();

@@ -41,6 +41,7 @@ class HousePageTest {
             methods/mill-race-weir.txt | r_L = h_1/L_b | r_L = h_1/L_c | L_c is not defined above
             methods/mill-race-weir.txt | 0.30 m <= b | 0.30 <= b | the sides of the limit differ in dimension
             methods/mill-race-weir.txt | r_p = h_1/p ; 1 | r_p = h_1/p ; m | the formula comes out as a pure number, but m is length
+            methods/mill-race-weir.txt | r_p = h_1/p ; 1 ; head to height | r_p = h_1/p ; head to height | a unit stands here, not "head to height
             methods/mill-race-weir.txt | L_b - r ; m | L_b - 0.1 ; m | length minus a pure number; both sides must be alike
             methods/mill-race-weir.txt | growth of the boundary layer ; ISO ; memory | growth ; ISO ; memori | the only mark known here is "memory"
             methods/mill-race-weir.txt | limit     r_p <= 1.5 | limit     Q_h <= 2 m3/s | rests on the free symbol h and has no value by itself

@@ -45,9 +45,8 @@ class MethodOverviewTest {
         assertThat(method.standards()).isNotEmpty().noneMatch(text -> text.startsWith("SI Brochure"));
         assertThat(method.ranges()).isNotEmpty();
         assertThat(method.state()).contains("check value");
-        long counted = desk.checks().stream()
-                .filter(row -> row.method().equals(name))
-                .count();
+        long counted =
+                desk.checks().stream().filter(row -> row.method().equals(name)).count();
         assertThat(method.state()).startsWith(counted + " check value");
     }
 
@@ -66,12 +65,19 @@ class MethodOverviewTest {
             }
         }
         sheet.tables().values().forEach(table -> known.addAll(counts(table)));
-        assertThat(NUMERAL.matcher(said).results().map(found -> found.group())).allMatch(known::contains, "stands in what is calculated");
+        assertThat(NUMERAL.matcher(said).results().map(found -> found.group()))
+                .allMatch(known::contains, "stands in what is calculated");
     }
 
-    /** How many rows a table has, and how many with each of its words. */
+    /** How many rows a table has, and how many with each of its words; the numbers in its words. */
     private static Set<String> counts(CitedTable table) {
         Set<String> counts = new TreeSet<>(Set.of(Integer.toString(table.rows())));
+        table.columns().stream()
+                .flatMap(column -> column.values().stream())
+                .filter(Value.Word.class::isInstance)
+                .forEach(word -> NUMERAL.matcher(((Value.Word) word).text())
+                        .results()
+                        .forEach(found -> counts.add(found.group())));
         for (CitedTable.Column column : table.columns()) {
             Map<Value, Long> rows =
                     column.values().stream().collect(Collectors.groupingBy(value -> value, Collectors.counting()));
@@ -84,7 +90,8 @@ class MethodOverviewTest {
     void methodsAreToldWithStandardRangeAndState() {
         NappeTest.Said said = nappe("blank", "--methods", "parshall-flume");
         assertThat(said.out())
-                .contains("parshall-flume  Parshall flume", "standards  ", "ISO 9826:1992", "range      ", "state      ")
+                .contains(
+                        "parshall-flume  Parshall flume", "standards  ", "ISO 9826:1992", "range      ", "state      ")
                 .contains("check values: ")
                 .doesNotContain("approach-channel");
         assertThat(said.out().lines()).allMatch(line -> line.length() <= 100);
@@ -92,10 +99,17 @@ class MethodOverviewTest {
 
     @Test
     void aRangeFollowsFromTheLimitsWhereTheSheetSaysNone() {
-        NappeTest.Said said = nappe("blank", "--methods", "--house", MillRace.HOUSE);
+        NappeTest.Said said = nappe("blank", "--methods", "mill-race-weir", "--house", MillRace.HOUSE);
         assertThat(said.out())
                 .contains("mill-race-weir  Broad-crested weir with a rounded nose (house method, folder house-example)")
                 .contains("least head (h_1 from 0.06 m)", "flow is free: drowning ratio (s_t up to 0.66)")
                 .contains("check values of the house: ");
+    }
+
+    @Test
+    void theListToChooseFromHasEveryMethodInTwoLines() {
+        NappeTest.Said said = nappe("blank", "--methods");
+        assertThat(said.out().lines()).hasSize(2 * names().size() + 2);
+        names().forEach(name -> assertThat(said.out()).contains(name + "  "));
     }
 }

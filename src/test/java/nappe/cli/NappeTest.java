@@ -88,7 +88,7 @@ class NappeTest {
         Said inspected = nappe("inspect", file);
         assertThat(inspected.err()).isEqualTo("remark: revision A is not among the revisions on sheet Revisions\n");
         assertThat(inspected.status()).isZero();
-        assertThat(inspected.out()).contains("no faults", "flow is free: submergence");
+        assertThat(inspected.out()).contains("no faults", "flume is not drowned: submergence");
         assertThat(files(folder)).hasSize(1);
         Said issued = nappe("issue", file, "-o", folder.resolve("out"));
         assertThat(issued.status()).isZero();

@@ -59,7 +59,7 @@ class ProgressLineTest {
         Path seen = folder.resolve("seen");
         Tools.run(issue("script", "-qec", String.join(" ", java()), seen.toString()));
         String text = Files.readString(seen);
-        assertThat(text).contains("nappe: writing the workbook ...", "nappe: setting the PDF ...", "Wrote ");
+        assertThat(text).contains("nappe: writing the workbook and setting the PDF ...", "Wrote ");
         assertThat(afterWiping(text)).contains("Wrote ").doesNotContain("...");
     }
 

@@ -37,7 +37,8 @@ final class ReadmeMethods {
     static String table() {
         Desk desk = new Desk();
         List<CheckRow> checks = desk.checks();
-        StringBuilder table = new StringBuilder("| name | what it is | standards | range | check values |\n|---|---|---|---|---|\n");
+        StringBuilder table =
+                new StringBuilder("| name | what it is | standards | range | check values |\n|---|---|---|---|---|\n");
         for (String name : desk.methods().names()) {
             MethodOverview method = MethodOverview.of(desk.methods(), name, checks);
             table.append("| `")
@@ -45,7 +46,7 @@ final class ReadmeMethods {
                     .append("` | ")
                     .append(cell(List.of(method.title())))
                     .append(" | ")
-                    .append(cell(method.standards()))
+                    .append(cell(brief(method.standards())))
                     .append(" | ")
                     .append(cell(method.ranges()))
                     .append(" | ")
@@ -53,6 +54,16 @@ final class ReadmeMethods {
                     .append(" |\n");
         }
         return table.toString();
+    }
+
+    /** Publications by their number or first author: {@code blank --methods NAME} tells them in full. */
+    private static List<String> brief(List<String> standards) {
+        return standards.stream()
+                .filter(standard -> !standard.startsWith("Common practice"))
+                .map(standard -> standard.split("[,:(] ?(?![0-9])", 2)[0].strip()
+                        + (standard.contains("from memory") ? " (memory)" : ""))
+                .distinct()
+                .toList();
     }
 
     private static String cell(List<String> parts) {

@@ -53,7 +53,9 @@ final class ReadmePictures {
     private void issued() throws IOException {
         run("issue", "sample-inputs/headworks.xlsx", "-o", folder.resolve("output"));
         try (Stream<Path> all = Files.walk(folder.resolve("output"))) {
-            Path pdf = all.filter(path -> path.toString().endsWith(".pdf")).findFirst().orElseThrow();
+            Path pdf = all.filter(path -> path.toString().endsWith(".pdf"))
+                    .findFirst()
+                    .orElseThrow();
             picture(pdf, "Approvals, to be filled in by hand", "cover.png");
             picture(pdf, "What governs each case", "overview.png");
             picture(pdf, "submerged discharge, 1967 form", "worked.png");

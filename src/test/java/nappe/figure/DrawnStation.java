@@ -41,6 +41,7 @@ public final class DrawnStation {
     /** A weir whose crest is at 100 m. */
     static Results weir(double notch, double channel, double height, double flow, double level) {
         Map<String, Typed> typed = new LinkedHashMap<>();
+        typed.put("set", typed(Value.word("ISO 1438"), "1"));
         typed.put("b", typed(Value.of(notch), "m"));
         typed.put("B", typed(Value.of(channel), "m"));
         typed.put("p", typed(Value.of(height), "m"));

@@ -23,12 +23,25 @@ public final class SampleStations {
     /** The samples by file name. */
     public static Map<String, Supplier<byte[]>> all() {
         return Map.of(
+                "canal-turnout.xlsx",
+                () -> bytes(SampleStations::turnout),
                 "headworks.xlsx",
                 () -> bytes(SampleStations::headworks),
                 "inlet-works.xlsx",
                 () -> bytes(SampleStations::inlet),
+                "pumping-main.xlsx",
+                () -> bytes(PressureStations::pumpingMain),
+                "reuse-line.xlsx",
+                () -> bytes(PressureStations::reuseLine),
+                "seepage-pond.xlsx",
+                () -> bytes(SampleStations::pond),
                 "return-weir.xlsx",
                 () -> bytes(SampleStations::weir));
+    }
+
+    /** Their file names, in order. */
+    public static List<String> names() {
+        return all().keySet().stream().sorted().toList();
     }
 
     public static void main(String[] args) throws IOException {
@@ -55,7 +68,7 @@ public final class SampleStations {
         return filler(system, new Chosen(tag, method));
     }
 
-    private static Filler filler(WorkingSystem system, Chosen... elements) throws IOException {
+    static Filler filler(WorkingSystem system, Chosen... elements) throws IOException {
         return new Filler(BlankWriter.bytes(system, List.of(elements), METHODS));
     }
 
@@ -379,6 +392,71 @@ public final class SampleStations {
                 .row("Revisions", "0", "2031-09-08", "First issue for checking.");
     }
 
+    /** A V-notch for low flows above a contracted weir for high ones, open to changes. */
+    public static Filler pond() throws IOException {
+        String study = "Invented seepage study SS-4, table 2";
+        String survey = "Invented brook survey BS-1, figure 3";
+        String drawing = "Invented drawing HM-31, rev. 2";
+        return filler(WorkingSystem.SI, new Chosen("W1", "rectangular-weir"), new Chosen("V1", "v-notch-weir"))
+                .project("Project", "Hollow Marl storage pond, seepage gauging (fictional)")
+                .project("Firm", "Any Firm of Engineers (fictional)")
+                .project("Client", "Hollow Marl Water Users (fictional)")
+                .project("Calculation number", "HM-S-009")
+                .project("Subject", "V-notch at the toe drain and contracted weir at the pond outlet: ranges and levels")
+                .project("Revision", "0")
+                .project("Revision date", "2031-04-22")
+                .project("Status", "for checking")
+                .project("Paper", "A4")
+                .project("Flow reported in", "L/s")
+                .project("Head reported in", "mm")
+                .project("Elevations refer to", "invented dam datum, 60.000 m at the crest stone")
+                .project("Case worked in full", "After rain")
+                .project("Purpose of release", "Released for checking of the sample only.")
+                .project("Space for a seal on the cover", "no")
+                .row("Flows", "Dry season", "1 d", "2031", 1.6, "L/s", 49.9, "m", "", study, "known", null, null, "mm", 66, "mm")
+                .row("Flows", "After rain", "1 d", "2031", 9, "L/s", 49.95, "m", "", study, "known")
+                .row("Flows", "Pond drawn down", "1 h", "2031", 70, "L/s", 50.1, "m", "", study, "assumed")
+                .row("Flows", "Storm, brook in flood", "1 h", "2031", 70, "L/s", 50.32, "m", "25 years", survey, "known")
+                .entry("W1", "set", "ISO 1438", null, "Invented monitoring plan MP-2, clause 3", "known")
+                .entry("W1", "b", 500, "mm", drawing, "known")
+                .entry("W1", "B", 2, "m", drawing, "known")
+                .entry("W1", "p", 0.5, "m", drawing, "known")
+                .entry("W1", "z_c", 50.2, "m", drawing, "known")
+                .entry("W1", "h_n", 0.4, "m", drawing, "known")
+                .entry("W1", "x_g", 1.2, "m", drawing, "known")
+                .entry("W1", "L_a", 10.5, "m", drawing, "known")
+                .entry("V1", "rules", "ISO 1438", null, "Invented monitoring plan MP-2, clause 3", "known")
+                .entry("V1", "set", "curve points", null, "Invented monitoring plan MP-2, clause 3", "known")
+                .entry("V1", "theta", 90, "deg", drawing, "known")
+                .entry("V1", "B", 1.2, "m", drawing, "known")
+                .entry("V1", "p", 0.5, "m", drawing, "known")
+                .entry("V1", "z_c", 50.62, "m", drawing, "known")
+                .entry("V1", "h_n", 0.25, "m", drawing, "known")
+                .entry("V1", "x_g", 0.9, "m", drawing, "known")
+                .row(
+                        "Demands",
+                        "V1",
+                        "z_u",
+                        "at most",
+                        51.0,
+                        "m",
+                        "water at the V-notch stays under the mouth of the toe drain",
+                        "Invented monitoring plan MP-2, clause 5")
+                .row(
+                        "Assumptions",
+                        "No water joins between the two weirs.",
+                        "site visit to follow",
+                        "project engineer",
+                        "open")
+                .row("References", "Invented monitoring plan MP-2, edition of 2030")
+                .row(
+                        "Requirements",
+                        "Show which of the two weirs measures at each flow.",
+                        "Invented monitoring plan MP-2, clause 4",
+                        "Overview")
+                .row("Revisions", "0", "2031-04-22", "First issue for checking.");
+    }
+
     /** The weir, open to changes. */
     public static Filler weir() throws IOException {
         String log = "Invented pump schedule PS-2";
@@ -403,6 +481,7 @@ public final class SampleStations {
                 .row("Flows", "Two pumps", "1 h", "2030", 60, "L/s", 17.8, "m", "", log, "known", null, 142, "mm")
                 .row("Flows", "Four pumps", "1 h", "2030", 120, "L/s", 17.95, "m", "", log, "known")
                 .row("Flows", "Four pumps, pond full", "1 h", "2035", 432, "m3/h", 18.22, "m", "", log, "known")
+                .entry("W1", "set", "ISO 1438", null, "Invented operating permit, item 6", "known")
                 .entry("W1", "b", 600, "mm", "Invented drawing S-3", "known")
                 .entry("W1", "B", 1.1, "m", "Invented drawing S-3", "known")
                 .entry("W1", "p", 0.45, "m", "Invented drawing S-3", "known")
@@ -420,5 +499,112 @@ public final class SampleStations {
                         "Invented operating permit, item 7",
                         "Limits")
                 .row("Revisions", "0", "2030-05-02", "First issue for checking.");
+    }
+
+    /** A trapezoidal long-throated flume at a canal turnout, open to changes. */
+    public static Filler turnout() throws IOException {
+        String roster = "Invented delivery roster DR-7";
+        String drawing = "Invented drawing TC-07, rev. 2";
+        return filler(
+                        WorkingSystem.SI,
+                        new Chosen("F1", "long-throat-trapezoidal"),
+                        new Chosen("A1", "approach-channel"))
+                .project("Project", "Thistledown Canal, turnout 7 (fictional)")
+                .project("Firm", "Any Firm of Engineers (fictional)")
+                .project("Client", "Thistledown Water Users (fictional)")
+                .project("Calculation number", "TC-T-007")
+                .project("Subject", "Turnout flume and its approach: range, modular flow and levels")
+                .project("Revision", "0")
+                .project("Revision date", "2032-02-20")
+                .project("Status", "for checking")
+                .project("Paper", "A4")
+                .project("Flow reported in", "L/s")
+                .project("Head reported in", "mm")
+                .project("Elevations refer to", "invented canal datum, 0.000 m at the intake sill")
+                .project("Case worked in full", "Full delivery")
+                .project("Purpose of release", "Released for checking of the sample only.")
+                .project("Space for a seal on the cover", "no")
+                .row("Flows", "Leakage past the gate", "1 d", "2032", 4, "L/s", 52.25, "m", "", roster, "assumed")
+                .row("Flows", "Least delivery", "1 d", "2032", 60, "L/s", 52.42, "m", "", roster, "known")
+                .row(
+                        "Flows",
+                        "Usual delivery",
+                        "1 d",
+                        "2032",
+                        180,
+                        "L/s",
+                        52.56,
+                        "m",
+                        "",
+                        roster,
+                        "known",
+                        null,
+                        280,
+                        "mm")
+                .row("Flows", "Full delivery", "1 d", "2032", 420, "L/s", 52.72, "m", "", roster, "known")
+                .row(
+                        "Flows",
+                        "Usual delivery, check gate below shut",
+                        "6 h",
+                        "2032",
+                        180,
+                        "L/s",
+                        52.78,
+                        "m",
+                        "",
+                        roster,
+                        "known")
+                .entry("F1", "finish", "smooth", null, drawing, "known")
+                .entry("F1", "modular", "losses", null, "Invented design note TN-2, clause 3", "known")
+                .entry("F1", "b", 450, "mm", drawing, "known")
+                .entry("F1", "m", 1, "1", drawing, "known")
+                .entry("F1", "b_a", 600, "mm", drawing, "known")
+                .entry("F1", "m_a", 1, "1", drawing, "known")
+                .entry("F1", "b_t", 600, "mm", drawing, "known")
+                .entry("F1", "m_t", 1, "1", drawing, "known")
+                .entry("F1", "z_c", 52.4, "m", drawing, "known")
+                .entry("F1", "p", 150, "mm", drawing, "known")
+                .entry("F1", "L", 0.9, "m", drawing, "known")
+                .entry("F1", "L_a", 1.5, "m", drawing, "known")
+                .entry("F1", "L_b", 450, "mm", drawing, "known")
+                .entry("F1", "L_d", 1.2, "m", drawing, "known")
+                .entry("F1", "EM", 6, "1", drawing, "known")
+                .entry("F1", "k_s", 0.2, "mm", "Invented design note TN-2, table 1: trowelled concrete", "assumed")
+                .entry("F1", "nu", 1.14, "cSt", "Invented design note TN-2, table 1: water at 15 degrees", "assumed")
+                .entry("F1", "z_b", 52.2, "m", drawing, "known")
+                .entry("A1", "serves", "all units", null, drawing, "known")
+                .entry("A1", "inflow", "tranquil", null, drawing, "known")
+                .entry("A1", "b", 600, "mm", drawing, "known")
+                .entry("A1", "m", 1, "1", drawing, "known")
+                .entry("A1", "z_f", 52.25, "m", drawing, "known")
+                .entry("A1", "L_c", 20, "m", drawing, "known")
+                .entry("A1", "S_0", 0.0004, "1", drawing, "known")
+                .entry("A1", "n", 0.014, "1", "Invented design note TN-2, table 1: trowelled concrete", "assumed")
+                .entry("A1", "C_t", 0, "1", "no transition: the gauge stands in the channel", "known")
+                .entry("A1", "K", 0, "1", "no screen", "known")
+                .entry("A1", "z_w", 53.1, "m", drawing, "known")
+                .entry("A1", "L_s", 18, "m", drawing, "known")
+                .row(
+                        "Demands",
+                        "A1",
+                        "f_b",
+                        "at least",
+                        0.15,
+                        "m",
+                        "freeboard to the top of the lining",
+                        "Invented design note TN-2, clause 5")
+                .row(
+                        "Assumptions",
+                        "The lateral below the flume is free of weed when its levels are as in the roster.",
+                        roster,
+                        "project engineer",
+                        "open")
+                .row("References", "Invented drawing TC-07, rev. 2")
+                .row(
+                        "Requirements",
+                        "Say which deliveries are measured, and how high the canal stands when the check gate is shut.",
+                        "Invented water order, item 4",
+                        "Overview")
+                .row("Revisions", "0", "2032-02-20", "First issue for checking.");
     }
 }

@@ -35,6 +35,7 @@ final class Designs {
     /** A weir downstream of a Parshall flume; the flume's floor is 1.6 m, the weir's crest 1.2 m above the datum. */
     static Design weirBelowFlume(double floor, Design.FlowCase... cases) {
         Map<String, Design.Typed> weir = new LinkedHashMap<>();
+        weir.put("set", typed(Value.word("ISO 1438"), "1"));
         weir.put("b", number(0.8, "m"));
         weir.put("B", number(1.6, "m"));
         weir.put("p", number(0.6, "m"));

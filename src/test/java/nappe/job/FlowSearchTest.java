@@ -24,6 +24,7 @@ import nappe.station.FoundFlows.NotReached;
 import nappe.station.StationLayout;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /** The flows at which limits are first reached, on an invented sill whose turns are known by hand. */
@@ -242,7 +243,7 @@ class FlowSearchTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @MethodSource("nappe.input.SampleStations#names")
     void atEachFlowFoundTheMarginIsZeroAndBesideItTheVerdictTurns(String sample) {
         MethodLibrary methods = new MethodLibrary(new BuiltInLibrary());
         Design design = InputReader.read(Path.of("sample-inputs", sample), methods);

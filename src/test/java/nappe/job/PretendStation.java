@@ -64,6 +64,7 @@ record PretendStation(double floor, List<Double> flows, List<Double> levels, dou
         flume.put("submerged", typed(Value.word("refused"), "1"));
         flume.put("z_f", typed(Value.of(floor), "ft"));
         Map<String, Typed> weir = new LinkedHashMap<>();
+        weir.put("set", typed(Value.word("ISO 1438"), "1"));
         weir.put("b", typed(Value.of(notch), "in"));
         weir.put("B", typed(Value.of(6), "ft"));
         weir.put("p", typed(Value.of(1.5), "ft"));

@@ -43,14 +43,14 @@ class RatingTest {
         rowsAreReruns(
                 "rectangular-weir",
                 WorkingSystem.SI,
-                typed("b", b + " m", "B", channel + " m", "p", p + " m", "z_c", "2 m"));
+                typed("set", "\"ISO 1438\"", "b", b + " m", "B", channel + " m", "p", p + " m", "z_c", "2 m"));
     }
 
     @Test
     void soItIsInUsCustomaryUnits() {
         rowsAreReruns("parshall-flume", WorkingSystem.US, typed("size", "\"3 ft\"", "z_f", "1 ft"));
         rowsAreReruns(
-                "rectangular-weir", WorkingSystem.US, typed("b", "2 ft", "B", "4.5 ft", "p", "1.25 ft", "z_c", "2 ft"));
+                "rectangular-weir", WorkingSystem.US, typed("set", "\"US constants\"", "b", "2 ft", "B", "4.5 ft", "p", "1.25 ft", "z_c", "2 ft"));
     }
 
     private static void rowsAreReruns(String method, WorkingSystem system, Map<String, String> entries) {

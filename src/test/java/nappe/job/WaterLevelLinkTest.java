@@ -39,14 +39,37 @@ class WaterLevelLinkTest {
     }
 
     @Test
-    void whereTheLowerIsDrownedThereIsNoResultAbove() {
+    void whereTheLowerIsNotFreeItsLevelServesAboveAllTheSame() {
         Results results = run(Designs.weirBelowFlume(1.6, flowCase("Low", 0.02, 0.5), flowCase("Flood", 0.02, 1.19)));
         assertThat(values(results, "W1", "state")).containsExactly(Value.word("free"), Value.word("not free"));
-        assertThat(values(results, "W1", "z_u").get(1)).isEqualTo(new Value.None("no result"));
-        assertThat(values(results, "F1", "z_t").get(1)).isEqualTo(new Value.None("no result"));
-        assertThat(values(results, "F1", "h_a").get(0)).isInstanceOf(Value.Number.class);
-        assertThat(values(results, "F1", "h_a").get(1)).isEqualTo(new Value.None("no result"));
-        assertThat(values(results, "F1", "z_u").get(1)).isEqualTo(new Value.None("no result"));
+        assertThat(values(results, "W1", "h_1").get(1)).isEqualTo(new Value.None("no result"));
+        assertThat(values(results, "W1", "level").get(1)).isEqualTo(Value.word("bounding level, not a measurement"));
+        assertThat(values(results, "W1", "z_u").get(1))
+                .isEqualTo(values(results, "W1", "z_u").get(0));
+        assertThat(values(results, "F1", "z_t")).isEqualTo(values(results, "W1", "z_u"));
+        assertThat(values(results, "F1", "h_a")).allMatch(Value.Number.class::isInstance);
+    }
+
+    @Test
+    void whereTheTailwaterIsNotGivenThereIsNoLevelAbove() {
+        Results results = run(Designs.weirBelowFlume(
+                1.6,
+                flowCase("Low", 0.02, 0.5),
+                new Design.FlowCase(
+                        "Unknown",
+                        "1 h",
+                        "2030",
+                        Designs.number(0.02, "m3/s"),
+                        Designs.typed(new Value.None("not given"), "m"),
+                        "",
+                        java.util.Map.of())));
+        Value none = new Value.None("not given");
+        for (String symbol : List.of("z_u", "h_1")) {
+            assertThat(values(results, "W1", symbol).get(1)).as(symbol).isEqualTo(none);
+        }
+        for (String symbol : List.of("z_t", "z_u", "h_a")) {
+            assertThat(values(results, "F1", symbol).get(1)).as(symbol).isEqualTo(none);
+        }
     }
 
     @Test

@@ -14,7 +14,7 @@ import nappe.formula.Value;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
+import org.junit.jupiter.params.provider.MethodSource;
 
 /** Java, LibreOffice and Gnumeric agree on every cell of every sample, whatever was stored in the file before. */
 class AgreementTest {
@@ -30,7 +30,7 @@ class AgreementTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @MethodSource("nappe.input.SampleStations#names")
     void everyStoredValueIsWhatJavaComputed(String name) throws IOException {
         Package sample = Package.ofSample(name);
         assertThat(Recalculated.disagreements(issued(sample), sample.results(), 0))
@@ -38,7 +38,7 @@ class AgreementTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @MethodSource("nappe.input.SampleStations#names")
     void threeProgramsAgreeOnEveryCell(String name) throws IOException {
         Package sample = Package.ofSample(name);
         Path spoilt = file(Spoiler.spoil(sample.workbook()));

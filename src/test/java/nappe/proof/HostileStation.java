@@ -52,6 +52,7 @@ final class HostileStation {
                                 SampleStations.blank(WorkingSystem.SI, "W1", "rectangular-weir"),
                                 List.of("First", "Second", "Third", "Fourth"),
                                 17.5)
+                        .entry("W1", "set", "ISO 1438", null, "invented", "known")
                         .entry("W1", "b", 600, "mm", "invented", "known")
                         .entry("W1", "B", 1.1, "m", "invented", "known")
                         .entry("W1", "p", 0.45, "m", "invented", "known")

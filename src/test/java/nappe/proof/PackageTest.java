@@ -93,7 +93,7 @@ class PackageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void everyNumberIsAnEntryAConstantACitedNumberOrLive(String name) throws IOException {
         Package sample = Package.ofSample(name);
         Set<String> typed = new LinkedHashSet<>();
@@ -115,7 +115,7 @@ class PackageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void flowsFoundStandAsIssuedAndNobodyTypesIntoThem(String name) throws IOException {
         Package sample = Package.ofSample(name);
         List<Cell> found = sample.results().cells().stream()
@@ -136,7 +136,7 @@ class PackageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void nothingIsHidden(String name) throws IOException {
         Package sample = Package.ofSample(name);
         try (XSSFWorkbook book = open(sample)) {
@@ -157,7 +157,7 @@ class PackageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void noMacroNoLinkOutAndNoVolatileFunction(String name) throws IOException {
         Package sample = Package.ofSample(name);
         Map<String, String> parts = parts(sample.workbook());
@@ -179,7 +179,7 @@ class PackageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void noFormulaLeadsBackToItselfOrToAnEmptyCell(String name) throws IOException {
         Package sample = Package.ofSample(name);
         try (XSSFWorkbook book = open(sample)) {
@@ -227,7 +227,7 @@ class PackageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void everyNumberOfTheWorkedCaseIsPrintedWithItsWorkbookAddress(String name) throws IOException {
         Package sample = Package.ofSample(name);
         List<String> missing = new ArrayList<>();
@@ -261,7 +261,7 @@ class PackageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void everyNumberOfEveryCaseAndTableIsPrinted(String name) throws IOException {
         Package sample = Package.ofSample(name);
         List<String> missing = new ArrayList<>();
@@ -332,7 +332,7 @@ class PackageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void pdfAndWorkbookCarryTheSameSheets(String name) throws IOException {
         Package sample = Package.ofSample(name);
         PdfPages pages = pdf(sample);
@@ -365,7 +365,7 @@ class PackageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void everyPageHasItsCautionsAndItsPlace(String name) throws IOException {
         Package sample = Package.ofSample(name);
         List<String> pages = pdf(sample).all();
@@ -390,7 +390,7 @@ class PackageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void nothingThatIsNoNumberIsShown(String name) throws IOException {
         Package sample = Package.ofSample(name);
         Pattern wrong = Pattern.compile(

@@ -191,7 +191,7 @@ class PrintedWorkbookTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void everyEntryButANameIsChecked(String name) throws IOException {
         Package sample = Package.ofSample(name);
         try (XSSFWorkbook book = open(sample)) {
@@ -221,7 +221,7 @@ class PrintedWorkbookTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void linksLeadToTheIndexAndBackAndToWhereALineComesFrom(String name) throws IOException {
         Package sample = Package.ofSample(name);
         try (XSSFWorkbook book = open(sample)) {

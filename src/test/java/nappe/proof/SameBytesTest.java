@@ -69,7 +69,7 @@ class SameBytesTest {
 
     /** Side by side; one of them compiled by halves, which must not matter either. */
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void anotherLocaleZoneAndEncodingGiveTheSameBytes(String name) {
         Path input = Package.INPUTS.resolve(name);
         CompletableFuture<Map<String, byte[]>> beside = CompletableFuture.supplyAsync(

@@ -46,7 +46,7 @@ class StrangerTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void everyValueStandsOnItsSheetAsOftenAsItIsDue(String name) throws IOException {
         Package sample = Package.ofSample(name);
         List<String> pages = pages(name);
@@ -111,7 +111,7 @@ class StrangerTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void everyPageHasTheWholeCautionsTheRevisionAndItsSheet(String name) throws IOException {
         Package sample = Package.ofSample(name);
         Furniture furniture = sample.results().furniture();
@@ -147,7 +147,7 @@ class StrangerTest {
 
     /** All words, those of equations too: the setting leaves even sub- and superscripts clear of one another. */
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void noWordStandsInAMarginOrOnAnother(String name) throws IOException {
         PdfBoxes boxes = PdfBoxes.of(Issued.of(name).pdf(), folder);
         assertThat(boxes.pages())
@@ -158,7 +158,7 @@ class StrangerTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx"})
+    @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void noPageEndsWithAHeading(String name) throws IOException {
         Set<String> headings = new HashSet<>();
         for (Sheet sheet : Package.ofSample(name).results().sheets()) {

@@ -186,7 +186,7 @@ class SystemsAgreeTest {
         Package sample = Package.ofSample(WEIR);
         Design other = inTheOther(sample.design());
         MethodLibrary rounded =
-                mutated("methods/rectangular-weir.txt", "g = 9.80665 m/s2 ; m/s2", "g = 32.17 ft/s2 ; m/s2");
+                mutated("methods/plate-weir-site.txt", "g = 9.80665 m/s2 ; m/s2", "g = 32.17 ft/s2 ; m/s2");
         assertThat(compared(sample, other, rounded).faults())
                 .hasSizeGreaterThan(50)
                 .anyMatch(fault -> fault.startsWith("Register of W1, ") && fault.contains(" h_1, Four pumps: "));
@@ -202,7 +202,7 @@ class SystemsAgreeTest {
         assertThat(compared(
                                 sample,
                                 other,
-                                mutated("methods/rectangular-weir.txt", "c_t = 0.06 m", "c_t = 0.06000000012 m"))
+                                mutated("methods/plate-weir-site.txt", "c_t = 0.2 ft", "c_t = 0.2000000004 ft"))
                         .faults())
                 .isNotEmpty()
                 .allMatch(fault -> fault.matches(".*(W1|Overview).*"));

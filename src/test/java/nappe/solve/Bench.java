@@ -23,6 +23,7 @@ import nappe.formula.Value;
 import nappe.method.Item;
 import nappe.method.MethodSheet;
 import nappe.source.CitedTable;
+import nappe.unit.Dimension;
 import nappe.unit.Unit;
 import nappe.unit.WorkingSystem;
 
@@ -33,6 +34,7 @@ public final class Bench {
     private final Scope scope = Scope.ofElement();
     private final List<Scope> cases = new ArrayList<>();
     private final TrialRows trialRows;
+    private final ItemLayout items;
     private final List<ElementSheet.LimitResult> limits;
     private final SheetDraft sheet = new SheetDraft("E1", "Element");
     private final SheetDraft trials = new SheetDraft("Trials", "Trials");
@@ -52,7 +54,7 @@ public final class Bench {
         this.method = method;
         this.cells = new Cells(system, new SheetDraft("Constants", "Constants"));
         this.trialRows = new TrialRows(cells, trials);
-        ItemLayout items = new ItemLayout(cells, trialRows);
+        this.items = new ItemLayout(cells, trialRows);
         method.tables().values().forEach(this::table);
         typedPerCase.forEach(c -> cases.add(scope.inner()));
         for (Item item : method.items()) {
@@ -97,6 +99,13 @@ public final class Bench {
     /** The cells in the order of evaluation. */
     public List<Cell> cells() {
         return cells.all();
+    }
+
+    /** The first rating table once more, on a sheet of its own, with results in reporting units too; without values. */
+    public Block.Table rating(Map<Dimension, Unit> reports) {
+        return new RatingGrid(items, method, reports)
+                .lay(method.ratings().get(0), scope, new SheetDraft("E1 reported", "Rating"), "Rating")
+                .table();
     }
 
     public List<Block.Table> ratings() {

@@ -5,10 +5,13 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
+import java.util.Map;
 import nappe.formula.Value;
 import nappe.method.MethodReader;
 import nappe.method.MethodSheet;
 import nappe.method.Texts;
+import nappe.unit.Dimension;
+import nappe.unit.Unit;
 import nappe.unit.WorkingSystem;
 import org.junit.jupiter.api.Test;
 
@@ -51,6 +54,16 @@ class NestedRootTest {
         Bench bench = bench(HEAD + "rating y from 1 to 27 steps 2 : s\n", "1", "2");
         nappe.calculation.Block.Table table = bench.ratings().get(0);
         assertThat(table.rows()).hasSize(3);
+        assertThat(table.rows()).allSatisfy(row -> assertThat(row.items()).hasSameSizeAs(table.columns()));
+    }
+
+    @Test
+    void aRootAndWhatIsTakenAtItHaveAHeadInTheReportingUnitToo() {
+        Bench bench = bench(HEAD + "at x = x_r : f_r = f\nrating y from 1 to 27 steps 2 : x_r, f_r\n", "1", "2");
+        nappe.calculation.Block.Table table = bench.rating(Map.of(Dimension.NONE, Unit.parse("%")));
+        assertThat(table.columns())
+                .extracting(nappe.calculation.Block.Column::head)
+                .contains("y [%]", "x_r [%]", "f_r [%]");
         assertThat(table.rows()).allSatisfy(row -> assertThat(row.items()).hasSameSizeAs(table.columns()));
     }
 

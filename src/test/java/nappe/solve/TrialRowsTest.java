@@ -144,7 +144,7 @@ class TrialRowsTest {
         return new Bench(
                 WEIR,
                 WorkingSystem.SI,
-                typed("b", width + " m", "B", channel + " m", "p", crest + " m", "z_c", "10 m"),
+                typed("set", "\"ISO 1438\"", "b", width + " m", "B", channel + " m", "p", crest + " m", "z_c", "10 m"),
                 List.of(typed("Q", flow + " m3/s", "z_t", "1 m")));
     }
 

@@ -40,8 +40,8 @@ final class LaidOutPages {
         renderer.getSharedContext().setLineBreakingStrategy(new SpaceBreaks());
         Document document = Xhtml.parse(filled.xhtml());
         renderer.setListener(new Stamp(filled.xhtml(), filled.furniture(), attachments, Outline.of(document)));
+        renderer.setDocument(document, null, new PlainNames());
         do {
-            renderer.setDocument(document, null, new PlainNames());
             renderer.layout();
         } while (LonelyHeads.moved(renderer));
         return new LaidOutPages(filled, renderer, glyphs);

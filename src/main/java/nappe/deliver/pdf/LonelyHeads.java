@@ -20,26 +20,31 @@ import org.xhtmlrenderer.render.PageBox;
  * the row before.
  */
 final class LonelyHeads {
-    private static final String MOVED = " ahead";
+    /** A style of the element itself: its class is asked for once and then remembered. */
+    private static final String MOVED = "; page-break-before: always";
 
     /** A table of no more rows is not split for the sake of its last one. */
     private static final int MOST_ALONE = 2;
 
     private final List<PageBox> pages;
     private final Set<Integer> changed = new HashSet<>();
-    private boolean found;
+    private final List<Element> moved = new ArrayList<>();
 
     private LonelyHeads(List<PageBox> pages) {
         this.pages = pages;
     }
 
-    /** Marks such tables in the document that was laid out; true where there were any and it must be laid out again. */
+    /**
+     * Marks such tables in the document that was laid out; where there are any, they get a style anew and it must be laid
+     * out again. The mark has no bearing on what is inside, which keeps its style.
+     */
     static boolean moved(ITextRenderer renderer) {
         Box root = Objects.requireNonNull(renderer.getRootBox());
         LonelyHeads heads =
                 new LonelyHeads(Objects.requireNonNull(root.getLayer()).getPages());
         heads.search(root, -1);
-        return heads.found;
+        heads.moved.forEach(element -> renderer.getSharedContext().getStyle(element, true));
+        return !heads.moved.isEmpty();
     }
 
     /** Of each sheet only the first is moved, since that moves all that follows on the sheet. */
@@ -69,9 +74,9 @@ final class LonelyHeads {
 
     private void move(@Nullable Element element, int sheet) {
         if (element != null && !isMoved(element)) {
-            element.setAttribute("class", element.getAttribute("class") + MOVED);
+            element.setAttribute("style", element.getAttribute("style") + MOVED);
             changed.add(sheet);
-            found = true;
+            moved.add(element);
         }
     }
 
@@ -113,7 +118,7 @@ final class LonelyHeads {
     }
 
     private static boolean isMoved(Element element) {
-        return element.getAttribute("class").endsWith(MOVED);
+        return element.getAttribute("style").endsWith(MOVED);
     }
 
     private int page(int y) {

@@ -1,0 +1,79 @@
+package nappe.cli;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Map;
+import nappe.input.Filler;
+import org.apache.poi.xssf.usermodel.XSSFWorkbook;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** The packed program as a user runs it: from a folder of the own, all of whose names have blanks and other signs. */
+class WholeProgramIT {
+    @TempDir
+    Path folder;
+
+    private static void fill(Path blank) throws IOException {
+        new Filler(Files.readAllBytes(blank))
+                .project("Project", "Invented works at Nowhere")
+                .project("Calculation number", "C/001 b")
+                .project("Subject", "Flume")
+                .project("Revision", "A")
+                .project("Revision date", "2030-01-31")
+                .project("Elevations refer to", "invented datum")
+                .project("Purpose of release", "For trying out only.")
+                .row("Flows", "Peak hour", "1 h", "2050", 2.5, "MGD", 100.1, "ft", "", "invented", "known")
+                .entry("F1", "size", "1 ft", null, "invented", "known")
+                .entry("F1", "form", "subtraction", null, "invented", "known")
+                .entry("F1", "submerged", "accepted", null, "invented", "known")
+                .entry("F1", "z_f", 100, "ft", "invented", "known")
+                .row("Revisions", "A", "2030-01-31", "First issue.")
+                .save(blank);
+    }
+
+    private static Jar.Said done(Jar.Said said) {
+        assertThat(said.status()).as(said.err() + said.out()).isZero();
+        assertThat(said.err()).isEmpty();
+        return said;
+    }
+
+    @Test
+    void fromAnEmptyFolderToACheckedPackage() throws IOException {
+        Path tools = Files.createDirectory(folder.resolve("our programs"));
+        Path work = Files.createDirectory(folder.resolve("Station 7, Überlauf & Ölfang (100%)"));
+        Jar nappe = Jar.in(work).copiedTo(tools.resolve("the calculator.jar"));
+
+        assertThat(done(nappe.run("--version")).out()).startsWith("nappe ");
+        assertThat(done(nappe.run("blank", "F1=parshall-flume", "-o", "the flume.xlsx"))
+                        .out())
+                .contains("Wrote the flume.xlsx");
+        Path input = work.resolve("the flume.xlsx");
+        Jar.Said refused = nappe.run("inspect", "the flume.xlsx", "--marked", "the flume, marked.xlsx");
+        assertThat(refused.status()).isEqualTo(ExitStatus.INPUT_REFUSED);
+        assertThat(refused.err())
+                .contains("Calculation number is missing", "cells marked, all faults on its sheet Faults");
+        assertThat(work.resolve("the flume, marked.xlsx")).isNotEmptyFile();
+
+        fill(input);
+        Map<String, String> before = Jar.listing(folder);
+        assertThat(done(nappe.run("inspect", "the flume.xlsx")).out())
+                .contains("1 element(s), 1 flow case(s), no faults.");
+        assertThat(Jar.listing(folder)).isEqualTo(before);
+        assertThat(done(nappe.run("issue", "the flume.xlsx")).out()).contains("Wrote output/C-001-b_rev-A");
+        Path made = work.resolve("output/C-001-b_rev-A");
+        assertThat(Contents.of(made).isWhole(made)).isTrue();
+        String pdf = Files.readString(made.resolve("C-001-b_rev-A.pdf"), StandardCharsets.ISO_8859_1);
+        assertThat(pdf).startsWith("%PDF-1.7").endsWith("%%EOF\n");
+        try (XSSFWorkbook workbook = new XSSFWorkbook(Files.newInputStream(made.resolve("C-001-b_rev-A.xlsx")))) {
+            assertThat(workbook.getNumberOfSheets()).isGreaterThan(10);
+        }
+        Map<String, String> first = Jar.listing(work.resolve("output"));
+        done(nappe.run("issue", input, "-o", "output"));
+        assertThat(Jar.listing(work.resolve("output"))).isEqualTo(first);
+        assertThat(done(nappe.run("verify")).out()).contains(", 0 not met.");
+    }
+}
