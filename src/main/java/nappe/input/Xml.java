@@ -54,7 +54,7 @@ final class Xml implements AutoCloseable {
         InputStream in = InputStream.nullInputStream();
         try {
             in = new RunLimit(parts.stream(part));
-            Xml xml = new Xml(part, parts.faults(), in, FACTORY.createXMLStreamReader(in));
+            Xml xml = new Xml(part, parts.faults(), in, XmlText.open(FACTORY, in));
             while (xml.next() && !xml.isStart()) {
                 // what stands before the root
             }

@@ -402,7 +402,8 @@ public final class SampleStations {
                 .project("Firm", "Any Firm of Engineers (fictional)")
                 .project("Client", "Hollow Marl Water Users (fictional)")
                 .project("Calculation number", "HM-S-009")
-                .project("Subject", "V-notch at the toe drain and contracted weir at the pond outlet: ranges and levels")
+                .project(
+                        "Subject", "V-notch at the toe drain and contracted weir at the pond outlet: ranges and levels")
                 .project("Revision", "0")
                 .project("Revision date", "2031-04-22")
                 .project("Status", "for checking")
@@ -413,10 +414,37 @@ public final class SampleStations {
                 .project("Case worked in full", "After rain")
                 .project("Purpose of release", "Released for checking of the sample only.")
                 .project("Space for a seal on the cover", "no")
-                .row("Flows", "Dry season", "1 d", "2031", 1.6, "L/s", 49.9, "m", "", study, "known", null, null, "mm", 66, "mm")
+                .row(
+                        "Flows",
+                        "Dry season",
+                        "1 d",
+                        "2031",
+                        1.6,
+                        "L/s",
+                        49.9,
+                        "m",
+                        "",
+                        study,
+                        "known",
+                        null,
+                        null,
+                        "mm",
+                        66,
+                        "mm")
                 .row("Flows", "After rain", "1 d", "2031", 9, "L/s", 49.95, "m", "", study, "known")
                 .row("Flows", "Pond drawn down", "1 h", "2031", 70, "L/s", 50.1, "m", "", study, "assumed")
-                .row("Flows", "Storm, brook in flood", "1 h", "2031", 70, "L/s", 50.32, "m", "25 years", survey, "known")
+                .row(
+                        "Flows",
+                        "Storm, brook in flood",
+                        "1 h",
+                        "2031",
+                        70,
+                        "L/s",
+                        50.32,
+                        "m",
+                        "25 years",
+                        survey,
+                        "known")
                 .entry("W1", "set", "ISO 1438", null, "Invented monitoring plan MP-2, clause 3", "known")
                 .entry("W1", "b", 500, "mm", drawing, "known")
                 .entry("W1", "B", 2, "m", drawing, "known")

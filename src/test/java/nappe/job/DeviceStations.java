@@ -77,7 +77,8 @@ public final class DeviceStations {
             }
             return formula instanceof Formula.Quantity quantity
                     ? Designs.number(quantity.value(), quantity.unit().text())
-                    : Designs.number(((Formula.Numeral) formula).value(), Unit.one().text());
+                    : Designs.number(
+                            ((Formula.Numeral) formula).value(), Unit.one().text());
         }
     }
 
@@ -93,7 +94,9 @@ public final class DeviceStations {
                 all.add(new Station(
                         cells.get(0),
                         entries(cells.get(1)),
-                        Arrays.stream(cells.get(2).split(" ")).map(Double::valueOf).toList(),
+                        Arrays.stream(cells.get(2).split(" "))
+                                .map(Double::valueOf)
+                                .toList(),
                         Double.parseDouble(cells.get(3)),
                         Double.parseDouble(cells.get(4))));
             }

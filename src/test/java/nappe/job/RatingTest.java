@@ -50,7 +50,9 @@ class RatingTest {
     void soItIsInUsCustomaryUnits() {
         rowsAreReruns("parshall-flume", WorkingSystem.US, typed("size", "\"3 ft\"", "z_f", "1 ft"));
         rowsAreReruns(
-                "rectangular-weir", WorkingSystem.US, typed("set", "\"US constants\"", "b", "2 ft", "B", "4.5 ft", "p", "1.25 ft", "z_c", "2 ft"));
+                "rectangular-weir",
+                WorkingSystem.US,
+                typed("set", "\"US constants\"", "b", "2 ft", "B", "4.5 ft", "p", "1.25 ft", "z_c", "2 ft"));
     }
 
     private static void rowsAreReruns(String method, WorkingSystem system, Map<String, String> entries) {

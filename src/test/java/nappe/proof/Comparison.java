@@ -97,7 +97,7 @@ final class Comparison {
             double floor = floors.getOrDefault(address, 0.0);
             double size = Math.max(Math.abs(a), Math.abs(b));
             double share = apart == 0 ? 0 : apart / size;
-            inFloors = Math.max(inFloors, apart == 0 ? 0 : apart / floor);
+            inFloors = Math.max(inFloors, apart == 0 || floor == 0 ? 0 : apart / floor);
             if (size > floor / RELATIVE) {
                 worst = Math.max(worst, share);
             }

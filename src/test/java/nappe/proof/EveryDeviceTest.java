@@ -62,7 +62,9 @@ class EveryDeviceTest {
             String level = method.gives().get("water level");
             assertThat(results(station, head)).as(station + " " + head).hasAtLeastOneElementOfType(Value.Number.class);
             assertThat(results(station, head)).as(station + " " + head).contains(new Value.None("no result"));
-            assertThat(results(station, level)).as(station + " " + level).hasAtLeastOneElementOfType(Value.Number.class);
+            assertThat(results(station, level))
+                    .as(station + " " + level)
+                    .hasAtLeastOneElementOfType(Value.Number.class);
         }
     }
 

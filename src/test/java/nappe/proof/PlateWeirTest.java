@@ -139,8 +139,8 @@ class PlateWeirTest {
         }
         texts.with("methods/plate-weir-levels.txt", part.replace(text, altered));
         MethodLibrary methods = new MethodLibrary(texts);
-        boolean found = weirs().anyMatch(
-                weir -> !faults(methods.sheet(weir.method()), weir, new TreeMap<>()).isEmpty());
+        boolean found = weirs().anyMatch(weir ->
+                !faults(methods.sheet(weir.method()), weir, new TreeMap<>()).isEmpty());
         assertThat(found).isTrue();
     }
 

@@ -87,9 +87,11 @@ class DesignCheckTest {
         DesignFault fault = faults(design(element(second))).get(0);
         assertThat(fault.origin()).isEqualTo(new Origin("X1", "f"));
         assertThat(fault.message())
-                .isEqualTo("with e left blank, f = 2 m this cannot be built: the second end follows the first; correct what"
-                        + " is wrong");
-        assertThat(codes(design(element(Map.of("e", typed("e", Value.of(2), "m")))))).isEmpty();
+                .isEqualTo(
+                        "with e left blank, f = 2 m this cannot be built: the second end follows the first; correct what"
+                                + " is wrong");
+        assertThat(codes(design(element(Map.of("e", typed("e", Value.of(2), "m"))))))
+                .isEmpty();
         assertThat(codes(design(element(Map.of())))).isEmpty();
     }
 
