@@ -4,15 +4,20 @@ import static nappe.solve.Bench.typed;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.formula.Formula;
 import nappe.formula.FormulaParser;
 import nappe.formula.Value;
+import nappe.method.Item;
 import nappe.method.MethodLibrary;
+import nappe.method.MethodSheet;
+import nappe.method.Rating;
 import nappe.solve.Bench;
 import nappe.source.BuiltInLibrary;
 import nappe.unit.Unit;
@@ -55,25 +60,47 @@ class RatingTest {
                 typed("set", "\"US constants\"", "b", "2 ft", "B", "4.5 ft", "p", "1.25 ft", "z_c", "2 ft"));
     }
 
+    static List<DeviceStations.Station> stations() {
+        return DeviceStations.all();
+    }
+
+    @ParameterizedTest
+    @MethodSource("stations")
+    void everyRowOfEveryDeviceIsARerun(DeviceStations.Station station) {
+        rowsAreReruns(station.method(), WorkingSystem.SI, station.entries());
+    }
+
     private static void rowsAreReruns(String method, WorkingSystem system, Map<String, String> entries) {
         Bench bench =
                 new Bench(METHODS.sheet(method), system, entries, List.of(typed("Q", "0.1 m3/s", "z_t", "0.1 m")));
         Block.Table table = bench.ratings().get(0);
-        assertThat(table.rows()).hasSize(21);
+        Rating rating = METHODS.sheet(method).ratings().get(0);
+        assertThat(table.rows()).hasSize(rating.steps() + 1);
+        Set<String> compared = new HashSet<>();
         for (Block.Row row : table.rows()) {
             double head = 0;
             for (Block.Item item : row.items()) {
                 if (item instanceof Block.Content content) {
                     Cell cell = content.cell();
-                    if (cell.symbol().equals("h")) {
+                    if (cell.symbol().equals(rating.free())) {
                         head = ((Value.Number) bench.value(cell)).value();
-                    } else {
+                    } else if (restsOnlyOn(rating.free(), method, cell.symbol())) {
                         rerun(bench, system, method, entries, head, cell);
+                        compared.add(cell.symbol());
                     }
                 }
             }
             assertThat(head).isPositive();
         }
+        assertThat(compared).containsAnyElementsOf(rating.results());
+    }
+
+    /** Members of a root inside the row rest on the root's own free symbol: a rerun at the head alone does not name them. */
+    private static boolean restsOnlyOn(String free, String method, String symbol) {
+        MethodSheet sheet = METHODS.sheet(method);
+        return sheet.item(symbol) != null
+                && sheet.reach().getOrDefault(symbol, Set.of()).stream()
+                        .noneMatch(s -> sheet.item(s) instanceof Item.Free && !s.equals(free));
     }
 
     private static void rerun(
@@ -81,7 +108,7 @@ class RatingTest {
         Map<String, Formula> all = new LinkedHashMap<>();
         entries.forEach((symbol, text) -> all.put(symbol, FormulaParser.parse(text)));
         all.put(
-                "h",
+                METHODS.sheet(method).ratings().get(0).free(),
                 new Formula.Quantity(
                         head,
                         Double.toString(head),
