@@ -272,16 +272,6 @@ class CheckersEditTest {
                 .toList();
     }
 
-    /** Without the cells that say they hold what reruns found as issued: these do not follow a changed entry. */
-    private static Map<String, Object> live(Map<String, Object> values, Package of) {
-        Map<String, Object> live = new LinkedHashMap<>(values);
-        of.results().cells().stream()
-                .filter(cell -> cell.kind() == Cell.Kind.RERUN)
-                .forEach(cell ->
-                        live.remove(cell.place().sheet() + "!" + cell.place().address()));
-        return live;
-    }
-
     private void proven(String sample, Map<String, List<Typing>> edits, int byGnumericToo) throws IOException {
         Package issued = Package.ofSample(sample);
         List<Path> books = new ArrayList<>();
@@ -293,12 +283,12 @@ class CheckersEditTest {
         int i = 0;
         for (Map.Entry<String, List<Typing>> edit : edits.entrySet()) {
             Package anew = anew(issued, inJava(edit.getValue()));
-            Map<String, Object> expected = live(Recalculated.asStored(file(anew.workbook())), anew);
-            Comparison comparison = Comparison.of(live(recalculated.get(i), anew), expected, anew.results());
+            Map<String, Object> expected = anew.live(Recalculated.asStored(file(anew.workbook())));
+            Comparison comparison = Comparison.of(anew.live(recalculated.get(i)), expected, anew.results());
             System.out.println(sample + ", " + edit.getKey() + ": " + comparison);
             comparison.faults().forEach(fault -> faults.add(edit.getKey() + ", LibreOffice: " + fault));
             if (i % byGnumericToo == 0) {
-                Comparison.of(live(Recalculated.byGnumeric(books.get(i)), anew), expected, anew.results())
+                Comparison.of(anew.live(Recalculated.byGnumeric(books.get(i))), expected, anew.results())
                         .faults()
                         .forEach(fault -> faults.add(edit.getKey() + ", Gnumeric: " + fault));
             }

@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import nappe.calculation.Block;
+import nappe.calculation.Cell;
 import nappe.deliver.xlsx.XlsxDelivery;
 import nappe.input.InputReader;
 import nappe.job.CheckRow;
@@ -38,6 +39,16 @@ record Package(Design design, Results results, Map<String, Block.Table> ratings,
     /** The package of an input workbook in {@code sample-inputs}, made once. */
     static Package ofSample(String name) {
         return SAMPLES.computeIfAbsent(name, key -> of(InputReader.read(INPUTS.resolve(key), METHODS)));
+    }
+
+    /** Values without those of cells that say they hold what reruns found as issued: these do not follow a changed entry. */
+    Map<String, Object> live(Map<String, Object> values) {
+        Map<String, Object> live = new LinkedHashMap<>(values);
+        results.cells().stream()
+                .filter(cell -> cell.kind() == Cell.Kind.RERUN)
+                .forEach(cell ->
+                        live.remove(cell.place().sheet() + "!" + cell.place().address()));
+        return live;
     }
 
     @Override
