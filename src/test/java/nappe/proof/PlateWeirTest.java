@@ -154,7 +154,7 @@ class PlateWeirTest {
                 "full-width-weir; 0.2; formula=White, b=1 m, p=0.5 m",
                 "francis-weir; 0.1; ends=both ends contracted, b=1 m, B=3 m, p=0.8 m",
                 "cipolletti-weir; 0.1; b=1 m, B=3 m, p=0.8 m",
-                "v-notch-weir; 0.02; rules=ISO 1438, set=curve points, theta=60 deg, B=2 m, p=0.6 m",
+                "v-notch-weir; 0.02; rules=ISO 1438, set=curve points, theta=60 deg, B=2 m, p=0.7 m",
                 "v-notch-weir-partial; 0.02; rules=ISO 1438, B=0.8 m, p=0.3 m",
             })
     void aHeadReadGivesTheFlowBack(String method, double flow, String typed) {
