@@ -20,8 +20,7 @@ class XmlTextTest {
     private static final byte[] DAMAGED = "<a>Abfluß im Schacht</a>".getBytes(StandardCharsets.ISO_8859_1);
 
     private static String text(byte[] xml) throws IOException, XMLStreamException {
-        XMLStreamReader reader =
-                XmlText.open(XMLInputFactory.newDefaultFactory(), new ByteArrayInputStream(xml));
+        XMLStreamReader reader = XmlText.open(XMLInputFactory.newDefaultFactory(), new ByteArrayInputStream(xml));
         StringBuilder text = new StringBuilder();
         while (reader.hasNext()) {
             if (reader.next() == XMLStreamConstants.CHARACTERS) {
@@ -37,7 +36,8 @@ class XmlTextTest {
         ByteArrayOutputStream said = new ByteArrayOutputStream();
         System.setErr(new PrintStream(said, true, StandardCharsets.UTF_8));
         try {
-            assertThat(catchThrowableOfType(XMLStreamException.class, () -> text(DAMAGED))).isNotNull();
+            assertThat(catchThrowableOfType(XMLStreamException.class, () -> text(DAMAGED)))
+                    .isNotNull();
         } finally {
             System.setErr(before);
         }
@@ -57,6 +57,7 @@ class XmlTextTest {
 
     @Test
     void anEmptyPartIsNoXml() {
-        assertThat(catchThrowableOfType(XMLStreamException.class, () -> text(new byte[0]))).isNotNull();
+        assertThat(catchThrowableOfType(XMLStreamException.class, () -> text(new byte[0])))
+                .isNotNull();
     }
 }

@@ -100,8 +100,7 @@ class VerificationTest {
                     .filter(row -> row.method().equals(method))
                     .toList();
             assertThat(own).as(method).isNotEmpty();
-            if (own.stream()
-                    .noneMatch(row -> List.of("published", "library").contains(row.kind()))) {
+            if (own.stream().noneMatch(row -> List.of("published", "library").contains(row.kind()))) {
                 without.add(method);
             }
         }

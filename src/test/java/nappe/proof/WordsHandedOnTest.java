@@ -32,7 +32,8 @@ class WordsHandedOnTest {
                 .map(Item.Line::symbol)
                 .collect(Collectors.toSet());
         assertThat(lines)
-                .allSatisfy(line ->
-                        assertThat(Guard.guarded(line.formula())).as(line.symbol()).doesNotContainAnyElementsOf(words));
+                .allSatisfy(line -> assertThat(Guard.guarded(line.formula()))
+                        .as(line.symbol())
+                        .doesNotContainAnyElementsOf(words));
     }
 }
