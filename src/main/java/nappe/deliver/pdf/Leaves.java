@@ -125,8 +125,7 @@ final class Leaves {
             Block.Table last = tables.get(tables.size() - 1);
             return List.of(elsewhere(tables.size() + " tables of " + rows
                     + " rows in all stand in the workbook only, sheet " + sheet.name() + ", rows " + (first.row() + 1)
-                    + " to " + (last.row() + 2 + last.rows().size()) + ", each under its title: the first is \""
-                    + first.title() + "\", the last \"" + last.title() + "\"."));
+                    + " to " + (last.row() + 2 + last.rows().size()) + firstAndLast(tables) + "."));
         }
         List<View.Part> parts = new ArrayList<>();
         for (Block.Table table : tables) {
@@ -140,6 +139,15 @@ final class Leaves {
                     + sheet.name() + ", cells " + range + "."));
         }
         return parts;
+    }
+
+    private static String firstAndLast(List<Block.Table> tables) {
+        List<String> titles =
+                tables.stream().map(Block.Table::title).filter(title -> !title.isEmpty()).toList();
+        return titles.isEmpty()
+                ? ""
+                : ", each under its title: the first is \"" + titles.get(0) + "\", the last \""
+                        + titles.get(titles.size() - 1) + "\"";
     }
 
     private static View.Paragraph elsewhere(String text) {
