@@ -95,7 +95,8 @@ final class BlankCommand implements Callable<Integer> {
         BlankWriter.write(target, system(), chosen, desk.methods());
         spec.commandLine()
                 .getOut()
-                .println("Wrote " + target + ". Fill it in, then: nappe inspect " + target + house.asTyped());
+                .println("Wrote " + target + ". Fill it in, then: nappe inspect " + HouseOption.inShell(target)
+                        + house.asTyped());
         return ExitStatus.DONE;
     }
 

@@ -27,7 +27,13 @@ final class HouseOption {
 
     /** The option again, for an example of the next command. */
     String asTyped() {
-        return folder == null ? "" : " --house " + folder;
+        return folder == null ? "" : " --house " + inShell(folder);
+    }
+
+    /** A path as it can be typed in a shell: in quotation marks where it holds a blank. */
+    static String inShell(Path path) {
+        String text = path.toString();
+        return text.chars().anyMatch(Character::isWhitespace) ? "\"" + text + "\"" : text;
     }
 
     /** Tells what is wrong in the folder and does not hinder the methods that are used. */

@@ -55,7 +55,7 @@ final class InspectCommand implements Callable<Integer> {
         out.println();
         new VerdictList(done.results()).print(out);
         out.println();
-        out.println("The package:  nappe issue " + input + house.asTyped() + " -o output");
+        out.println("The package:  nappe issue " + HouseOption.inShell(input) + house.asTyped() + " -o output");
         return ExitStatus.DONE;
     }
 

@@ -2,6 +2,7 @@ package nappe.cli;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Stream;
 import nappe.formula.Value;
 import nappe.station.Design;
 import nappe.unit.WorkingSystem;
@@ -9,6 +10,7 @@ import nappe.unit.WorkingSystem;
 /** What is legal but worth a second look before a package goes out; told on the screen, and nothing is refused for it. */
 final class Remarks {
     private static final double SAME = 1e-9;
+    private static final int NAMED = 6;
 
     private Remarks() {}
 
@@ -40,7 +42,28 @@ final class Remarks {
                             + one.tailwater().origin().cell()
                             + "), and its flow lies beyond the ends of the tailwater curve: nothing follows from it"));
         }
+        remarks.addAll(unsourced(design));
         return remarks;
+    }
+
+    /** One remark on all values that say nothing of where they come from; the first few by their cells. */
+    private static List<String> unsourced(Design design) {
+        List<String> cells = Stream.concat(
+                        design.cases().stream().map(Design.FlowCase::flow),
+                        design.elements().stream().flatMap(element -> element.typed().values().stream()))
+                .filter(typed ->
+                        !(typed.value() instanceof Value.None) && typed.source().isBlank())
+                .map(typed -> typed.origin().sheet() + " " + typed.origin().cell())
+                .distinct()
+                .toList();
+        if (cells.isEmpty()) {
+            return List.of();
+        }
+        String named = String.join(", ", cells.subList(0, Math.min(NAMED, cells.size())));
+        return List.of("no source or basis is typed beside "
+                + (cells.size() == 1 ? "the value in " : "the values in ")
+                + named
+                + (cells.size() > NAMED ? " and " + (cells.size() - NAMED) + " more" : ""));
     }
 
     private static boolean isOnCurve(Design.FlowCase one, List<Design.LevelPair> levels) {

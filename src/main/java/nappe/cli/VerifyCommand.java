@@ -83,7 +83,13 @@ final class VerifyCommand implements Callable<Integer> {
             tellUnverified(review, rows, out);
         }
         long met = outcomes.stream().filter(CheckOutcome::met).count();
-        out.printf(Locale.ROOT, "%d rows, %d met, %d not met.%n", outcomes.size(), met, outcomes.size() - met);
+        out.printf(
+                Locale.ROOT,
+                "%d %s, %d met, %d not met.%n",
+                outcomes.size(),
+                outcomes.size() == 1 ? "row" : "rows",
+                met,
+                outcomes.size() - met);
         return met == outcomes.size() ? ExitStatus.DONE : ExitStatus.INPUT_REFUSED;
     }
 

@@ -8,7 +8,7 @@ import org.jspecify.annotations.Nullable;
 public final class Near {
     private Near() {}
 
-    /** The nearest word, at most a third of its letters off, in capitals or not; null where none is near. */
+    /** The nearest word, at most a third of its letters off, in capitals or not, with inch or feet written out or not; null where none is near. */
     public static @Nullable String to(String text, Collection<String> words) {
         String typed = plain(text);
         String best = null;
@@ -30,7 +30,10 @@ public final class Near {
     }
 
     private static String plain(String text) {
-        String lower = text.toLowerCase(Locale.ROOT).replaceAll("[\\s_-]", "");
+        String lower = text.toLowerCase(Locale.ROOT)
+                .replaceAll("[\\s_-]", "")
+                .replaceAll("(?<=\\d)(inches|inch|\")", "in")
+                .replaceAll("(?<=\\d)(feet|foot|')", "ft");
         return lower.substring(0, Math.min(60, lower.length()));
     }
 

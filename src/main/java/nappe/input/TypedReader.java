@@ -54,8 +54,10 @@ final class TypedReader {
                     value,
                     what,
                     "write a number"
-                            + (sign == Sign.ANY ? "" : ", " + sign.words() + ",")
-                            + (declared.dimension().isNone() ? "" : " of " + UnitOffer.examples(declared)));
+                            + (sign == Sign.ANY ? "" : ", " + sign.words())
+                            + (declared.dimension().isNone()
+                                    ? ""
+                                    : (sign == Sign.ANY ? "" : ",") + " of " + UnitOffer.examples(declared)));
         }
         Unit unit = blank && unitField.isBlank() ? declared : quantities.unit(unitField, what, declared);
         return new Typed(number, unit, backing.source(), backing.standing(), value.origin());

@@ -155,7 +155,7 @@ final class UnitOffer {
 
     /** The first few units that will do: {@code ft, m, in or mm}. */
     static String examples(Unit unit) {
-        List<String> some = offered(unit).stream().map(Unit::text).limit(6).toList();
+        List<String> some = offered(unit).stream().map(Unit::text).limit(10).toList();
         return some.size() == 1
                 ? some.get(0)
                 : some.stream().limit(some.size() - 1).collect(Collectors.joining(", ")) + " or "

@@ -3,6 +3,7 @@ package nappe.station;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 import nappe.method.Item;
 import nappe.method.MethodSheet;
 import nappe.unit.Unit;
@@ -24,8 +25,8 @@ final class DemandCheck {
             if (unit == null) {
                 faults.add(new DesignFault(
                         demand.symbolAt(),
-                        "\"" + demand.symbol() + "\" is not a result of " + demand.tag() + "; it has "
-                                + results(method),
+                        "\"" + demand.symbol() + "\" is not a result of " + demand.tag() + "; "
+                                + remedy(method, demand.symbol()),
                         "symbol-unknown"));
             } else if (!unit.dimension().equals(demand.value().unit().dimension())) {
                 faults.add(new DesignFault(
@@ -41,13 +42,25 @@ final class DemandCheck {
         return faults;
     }
 
-    /** The results that a demand may name, each with its description: those that stand in the case columns. */
-    private static String results(MethodSheet method) {
+    /** The result that was meant, where only its stroke is missing, as the package prints it; else all there are. */
+    private static String remedy(MethodSheet method, String typed) {
+        List<String> results = results(method);
+        return results.stream()
+                .filter(symbol -> symbol.replace("_", "").equals(typed.replace("_", "")))
+                .findFirst()
+                .map(symbol -> "did you mean " + symbol + label(method, symbol) + "?")
+                .orElseGet(() -> "it has "
+                        + results.stream()
+                                .map(symbol -> symbol + label(method, symbol))
+                                .collect(Collectors.joining(", ")));
+    }
+
+    /** The results that a demand may name: those that stand in the case columns. */
+    private static List<String> results(MethodSheet method) {
         return method.items().stream()
                 .flatMap(item -> item.outputs().stream())
                 .filter(symbol -> unit(method, symbol) != null && method.perCase(symbol))
-                .map(symbol -> symbol + label(method, symbol))
-                .collect(java.util.stream.Collectors.joining(", "));
+                .toList();
     }
 
     private static String label(MethodSheet method, String symbol) {

@@ -224,6 +224,17 @@ class HouseOptionTest {
     }
 
     @Test
+    void nextCommandQuotesPathsWithABlank() throws IOException {
+        Path input = Files.createDirectories(folder.resolve("a b")).resolve("mill.xlsx");
+        String quoted = "\"" + input + "\"";
+        assertThat(nappe("blank", "W1=mill-race-weir", "--units", "SI", "--house", house, "-o", input)
+                        .out())
+                .contains("nappe inspect " + quoted + " --house " + house);
+        MillRace.filled(input).save(input);
+        assertThat(nappe("inspect", input, "--house", house).out()).contains("nappe issue " + quoted + " --house");
+    }
+
+    @Test
     void brokenSheetThatIsNotUsedHindersNothingButIsNamed() throws IOException {
         put("methods/unfinished.txt", "method Unfinished\nline x = y ; m ; from nothing\n");
         Path input = folder.resolve("mill.xlsx");

@@ -90,6 +90,18 @@ class NappeTest {
         assertThat(inspected.status()).isZero();
         assertThat(inspected.out()).contains("no faults", "flume is not drowned: submergence");
         assertThat(files(folder)).hasSize(1);
+        new Filler(Files.readAllBytes(file))
+                .entry("F1", "z_f", 100, "ft", "", "known")
+                .save(file);
+        assertThat(nappe("inspect", file).err())
+                .contains("remark: no source or basis is typed beside the value in F1 C10\n");
+        Path demanding = Files.createDirectories(folder.resolve("demand")).resolve("in.xlsx");
+        new Filler(Files.readAllBytes(file))
+                .row("Demands", "F1", "zu", "at most", 103, "ft", "", "invented")
+                .save(demanding);
+        assertThat(nappe("inspect", demanding).err())
+                .contains("\"zu\" is not a result of F1; did you mean z_u (")
+                .doesNotContain("it has");
         Said issued = nappe("issue", file, "-o", folder.resolve("out"));
         assertThat(issued.status()).isZero();
         assertThat(files(folder.resolve("out")).keySet())

@@ -45,7 +45,7 @@ class InputFaultsTest {
     void missingEntryIsTold() throws IOException {
         assertThat(fault("F1", "C9", ""))
                 .isEqualTo("headworks.xlsx, sheet F1, cell C9: D (width of the approach) is missing; write a number, "
-                        + "greater than zero, of m, ft, mm, cm, km or in (fault: entry-missing)");
+                        + "greater than zero, of m, ft, mm, cm, km, in, yd or mi (fault: entry-missing)");
     }
 
     @Test
@@ -62,7 +62,7 @@ class InputFaultsTest {
         assertThat(fault("F1", "D9", "psi"))
                 .isEqualTo(
                         "headworks.xlsx, sheet F1, cell D9: \"psi\" stands for a pressure, but D (width of the "
-                                + "approach) asks for a length; write one such as m, ft, mm, cm, km or in (fault: unit-dimension)");
+                                + "approach) asks for a length; write one such as m, ft, mm, cm, km, in, yd or mi (fault: unit-dimension)");
     }
 
     @Test
@@ -347,7 +347,7 @@ class InputFaultsTest {
                         headworks.xlsx, sheet Flows, cell D9: "1,500" is not a number; write 1500 or 1.500, whichever is meant (fault: number-expected)
                         headworks.xlsx, sheet Flows, cell J9: the standing is missing; choose known or assumed (fault: entry-missing)
                         headworks.xlsx, sheet F1, cell C8: "99.5 ft" is not a number; write 99.5 here and "ft" as its unit (fault: number-expected)
-                        headworks.xlsx, sheet F1, cell D9: "psi" stands for a pressure, but D (width of the approach) asks for a length; write one such as m, ft, mm, cm, km or in (fault: unit-dimension)""");
+                        headworks.xlsx, sheet F1, cell D9: "psi" stands for a pressure, but D (width of the approach) asks for a length; write one such as m, ft, mm, cm, km, in, yd or mi (fault: unit-dimension)""");
     }
 
     @Test
