@@ -21,7 +21,8 @@ import nappe.results.Results;
  * crest to a tailwater, or what a trial of a root leaves, is only as exact as its largest term: LibreOffice hands on 15
  * digits and takes nearly equal terms as equal, Gnumeric computes with longer numbers than Java, so the terms differ by
  * up to 5e-15 of their size. The largest number in the unit bounds the largest term, and 1e-12 leaves room for a chain of
- * some hundred operations. For an elevation of 414 ft it is 4e-10 ft.
+ * some hundred operations. For an elevation of 414 ft it is 4e-10 ft. A figure's list of dimensions repeats cells; the floor
+ * there is 1e-12 of one.
  */
 final class Comparison {
     static final double RELATIVE = 1e-9;
@@ -94,7 +95,7 @@ final class Comparison {
         if (here instanceof Double a && there instanceof Double b) {
             numbers++;
             double apart = Math.abs(a - b);
-            double floor = floors.getOrDefault(address, 0.0);
+            double floor = floors.getOrDefault(address, FLOOR);
             double size = Math.max(Math.abs(a), Math.abs(b));
             double share = apart == 0 ? 0 : apart / size;
             inFloors = Math.max(inFloors, apart == 0 || floor == 0 ? 0 : apart / floor);
