@@ -142,8 +142,10 @@ final class Leaves {
     }
 
     private static String firstAndLast(List<Block.Table> tables) {
-        List<String> titles =
-                tables.stream().map(Block.Table::title).filter(title -> !title.isEmpty()).toList();
+        List<String> titles = tables.stream()
+                .map(Block.Table::title)
+                .filter(title -> !title.isEmpty())
+                .toList();
         return titles.isEmpty()
                 ? ""
                 : ", each under its title: the first is \"" + titles.get(0) + "\", the last \""
