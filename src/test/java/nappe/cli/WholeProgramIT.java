@@ -60,8 +60,7 @@ class WholeProgramIT {
 
         fill(input);
         Map<String, String> before = Jar.listing(folder);
-        assertThat(done(nappe.run("inspect", "the flume.xlsx")).out())
-                .contains("1 element, 1 flow case, no faults.");
+        assertThat(done(nappe.run("inspect", "the flume.xlsx")).out()).contains("1 element, 1 flow case, no faults.");
         assertThat(Jar.listing(folder)).isEqualTo(before);
         assertThat(done(nappe.run("issue", "the flume.xlsx")).out()).contains("Wrote output/C-001-b_rev-A");
         Path made = work.resolve("output/C-001-b_rev-A");

@@ -1,6 +1,7 @@
 package nappe.proof;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.io.IOException;
 import java.nio.file.Files;
@@ -81,7 +82,7 @@ class CheckersEditTest {
                 new Level(2, 52.66));
         turnout(
                 "throat as a sill over the whole floor, no flow, level below the bed downstream",
-                new Entry("F1", "b", 0.88),
+                new Entry("F1", "b", 880),
                 new Flow(0, 0.0),
                 new Level(1, 52.1));
         main(
@@ -194,7 +195,6 @@ class CheckersEditTest {
 
         weir("notch wider", new Entry("W1", "b", 850));
         weir("notch as wide as the channel", new Entry("W1", "b", 1100));
-        weir("notch wider than the channel", new Entry("W1", "b", 1300));
         weir("notch too narrow", new Entry("W1", "b", 90));
         weir("width ratio in the zone that is refused", new Entry("W1", "b", 990));
         weir("width ratio at the end of that zone", new Entry("W1", "b", 880));
@@ -358,6 +358,22 @@ class CheckersEditTest {
                     .filteredOn(c -> c.kind() == Cell.Kind.ENTRY && c.typed() instanceof Value.Word)
                     .allMatch(c -> c.allowed() instanceof Allowed.Words);
         }
+    }
+
+    /** What cannot be built is refused when issued anew; typed over in the issued workbook, a limit there is not met. */
+    @Test
+    void aNotchWiderThanItsChannelIsToldByALimit() throws IOException {
+        Package issued = Package.ofSample("return-weir.xlsx");
+        List<Typing> wider = List.of(new Entry("W1", "b", 1300));
+        assertThatThrownBy(() -> anew(issued, wider)).hasMessageContaining("the notch is no wider than the channel");
+        long before = notMet(Recalculated.asStored(file(issued.workbook())));
+        assertThat(notMet(Recalculated.byLibreOffice(typed(issued, wider)))).isGreaterThan(before);
+    }
+
+    private static long notMet(Map<String, Object> values) {
+        return values.entrySet().stream()
+                .filter(one -> one.getKey().startsWith("W1!") && "not met".equals(one.getValue()))
+                .count();
     }
 
     @Test
