@@ -63,16 +63,10 @@ class NappeTest {
         assertThat(nappe().status()).isIn(ExitStatus.DONE, ExitStatus.WRONG_USAGE);
     }
 
-    @Test
-    void blankFilledInspectedAndIssued() throws IOException {
-        Path file = folder.resolve("station.xlsx");
-        assertThat(nappe("blank", "F1=parshall-flume", "--units", "US", "-o", file)
-                        .status())
-                .isZero();
-        new Filler(Files.readAllBytes(file))
+    /** A blank of one flume {@code F1}, filled in but for firm, client and revisions. */
+    static Filler flume(Path blank) throws IOException {
+        return new Filler(Files.readAllBytes(blank))
                 .project("Project", "Invented works at Nowhere")
-                .project("Firm", "Any Firm")
-                .project("Client", "Any Town")
                 .project("Calculation number", "C/001 b")
                 .project("Subject", "Flume")
                 .project("Revision", "A")
@@ -83,8 +77,16 @@ class NappeTest {
                 .entry("F1", "size", "1 ft", null, "invented", "known")
                 .entry("F1", "form", "subtraction", null, "invented", "known")
                 .entry("F1", "submerged", "accepted", null, "invented", "known")
-                .entry("F1", "z_f", 100, "ft", "invented", "known")
-                .save(file);
+                .entry("F1", "z_f", 100, "ft", "invented", "known");
+    }
+
+    @Test
+    void blankFilledInspectedAndIssued() throws IOException {
+        Path file = folder.resolve("station.xlsx");
+        assertThat(nappe("blank", "F1=parshall-flume", "--units", "US", "-o", file)
+                        .status())
+                .isZero();
+        flume(file).project("Firm", "Any Firm").project("Client", "Any Town").save(file);
         Said inspected = nappe("inspect", file);
         assertThat(inspected.err()).isEqualTo("remark: revision A is not among the revisions on sheet Revisions\n");
         assertThat(inspected.status()).isZero();

@@ -7,7 +7,6 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Map;
-import nappe.input.Filler;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -18,19 +17,7 @@ class WholeProgramIT {
     Path folder;
 
     private static void fill(Path blank) throws IOException {
-        new Filler(Files.readAllBytes(blank))
-                .project("Project", "Invented works at Nowhere")
-                .project("Calculation number", "C/001 b")
-                .project("Subject", "Flume")
-                .project("Revision", "A")
-                .project("Revision date", "2030-01-31")
-                .project("Elevations refer to", "invented datum")
-                .project("Purpose of release", "For trying out only.")
-                .row("Flows", "Peak hour", "1 h", "2050", 2.5, "MGD", 100.1, "ft", "", "invented", "known")
-                .entry("F1", "size", "1 ft", null, "invented", "known")
-                .entry("F1", "form", "subtraction", null, "invented", "known")
-                .entry("F1", "submerged", "accepted", null, "invented", "known")
-                .entry("F1", "z_f", 100, "ft", "invented", "known")
+        NappeTest.flume(blank)
                 .row("Revisions", "A", "2030-01-31", "First issue.")
                 .save(blank);
     }
