@@ -15,7 +15,12 @@ import java.util.stream.Stream;
  */
 public final class Speed {
     private static final List<String> FLAGS =
-            List.of("-XX:+UseSerialGC", "-XX:TieredStopAtLevel=1", "-Xshare:auto", "-Xlog:disable");
+            List.of(
+            "-XX:+UseSerialGC",
+            "-XX:TieredStopAtLevel=1",
+            "-XX:+UseTransparentHugePages",
+            "-Xshare:auto",
+            "-Xlog:disable");
     private static final int WARM = 6;
 
     private final Path jar;

@@ -64,10 +64,7 @@ final class IssueCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         Consumer<String> stage = Nappe.stage(spec);
         stage.accept("reading the workbook");
-        Beside.start("pages", () -> {
-            PdfDelivery.warmUp();
-            return true;
-        });
+        Beside<Boolean> rehearsal = Rehearsal.started();
         Desk desk = house.desk();
         Design design = marked.read(desk, input);
         house.tellRemarks(
@@ -77,6 +74,8 @@ final class IssueCommand implements Callable<Integer> {
                 folder, design.project().number(), design.project().revision());
         target.prepare();
         Job.Done done = desk.compute(design, stage);
+        // the typefaces serve one document at a time
+        rehearsal.outcome();
         target.write(files(target.name(), done, stage), done.results().furniture());
         PrintWriter out = spec.commandLine().getOut();
         out.println("Wrote " + target.path());

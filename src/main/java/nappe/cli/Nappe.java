@@ -104,6 +104,9 @@ public final class Nappe implements Runnable {
         System.setProperty("log4j.provider", "org.apache.logging.log4j.simple.internal.SimpleProvider");
         System.setProperty("org.apache.logging.log4j.simplelog.level", "OFF");
         Locale.setDefault(Locale.ROOT);
+        if (args.length > 1 && args[0].equals("issue")) {
+            Rehearsal.started();
+        }
         CommandLine line = new CommandLine(nappe)
                 .setOut(out)
                 .setErr(err)
