@@ -64,7 +64,7 @@ final class IssueCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         Consumer<String> stage = Nappe.stage(spec);
         stage.accept("reading the workbook");
-        Beside<Boolean> rehearsal = Rehearsal.started();
+        Beside<Boolean> rehearsal = Rehearsal.ofPages();
         Desk desk = house.desk();
         Design design = marked.read(desk, input);
         house.tellRemarks(
@@ -88,7 +88,10 @@ final class IssueCommand implements Callable<Integer> {
         Furniture furniture = results.furniture();
         Map<String, byte[]> files = new LinkedHashMap<>();
         stage.accept("writing the workbook and setting the PDF");
-        Beside<byte[]> workbook = Beside.start("workbook", () -> XlsxDelivery.render(results));
+        Beside<byte[]> workbook = Beside.start("workbook", () -> {
+            Rehearsal.ofWorkbook().outcome();
+            return XlsxDelivery.render(results);
+        });
         PdfDelivery pdf;
         try {
             pdf = PdfDelivery.render(results, new Attachment(name + ".xlsx", workbook::outcome));

@@ -27,17 +27,25 @@ final class Rehearsal {
     private Rehearsal() {}
 
     private static final class Once {
-        static final Beside<Boolean> HELD = Beside.start("rehearsal", () -> {
-            Results results = results();
-            XlsxDelivery.render(results);
-            PdfDelivery.render(results);
+        static final Beside<Boolean> PAGES = Beside.start("rehearsal of the pages", () -> {
+            PdfDelivery.render(results());
+            return true;
+        });
+
+        static final Beside<Boolean> WORKBOOK = Beside.start("rehearsal of the workbook", () -> {
+            PAGES.outcome();
+            XlsxDelivery.render(results());
             return true;
         });
     }
 
-    /** Starts it, where it has not been. */
-    static Beside<Boolean> started() {
-        return Once.HELD;
+    /** Starts it, where it has not been; the pages come first, since they take longest later on. */
+    static Beside<Boolean> ofPages() {
+        return Once.PAGES;
+    }
+
+    static Beside<Boolean> ofWorkbook() {
+        return Once.WORKBOOK;
     }
 
     private static Results results() {

@@ -7,7 +7,8 @@ import org.junit.jupiter.api.Test;
 class RehearsalTest {
     @Test
     void workbook_and_pages_can_be_made_and_it_is_done_once() {
-        assertThat(Rehearsal.started().outcome()).isTrue();
-        assertThat(Rehearsal.started()).isSameAs(Rehearsal.started());
+        assertThat(Rehearsal.ofPages().outcome()).isTrue();
+        assertThat(Rehearsal.ofWorkbook().outcome()).isTrue();
+        assertThat(Rehearsal.ofPages()).isSameAs(Rehearsal.ofPages());
     }
 }
