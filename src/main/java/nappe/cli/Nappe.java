@@ -63,7 +63,14 @@ public final class Nappe implements Runnable {
             "Help: nappe --help, and nappe blank --help and so on. A guide with pictures: README.md.");
 
     private static final Map<String, Supplier<Object>> COMMANDS = new TreeMap<>(Map.of(
-            "blank", BlankCommand::new, "inspect", InspectCommand::new, "issue", IssueCommand::new, "verify", VerifyCommand::new));
+            "blank",
+            BlankCommand::new,
+            "inspect",
+            InspectCommand::new,
+            "issue",
+            IssueCommand::new,
+            "verify",
+            VerifyCommand::new));
 
     /** So long a person waits before being told what the program is busy with. */
     private static final long PATIENCE_MILLIS = 1000;

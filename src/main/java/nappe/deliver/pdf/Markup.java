@@ -18,15 +18,22 @@ final class Markup {
     static String of(View.GridRow row, String element) {
         Markup markup = new Markup();
         for (View.GridCell cell : row.cells()) {
-            markup.open(element, "class", cell.style(), "colspan", Integer.toString(cell.span()));
-            for (View.Text text : cell.texts()) {
-                markup.open("p", "class", text.style());
-                markup.line(text);
-                markup.close("p");
+            markup.open(
+                    element, "class", cell.style(), "colspan", cell.span() == 1 ? "" : Integer.toString(cell.span()));
+            if (cell.texts().size() == 1 && !cell.texts().get(0).hasLook()) {
+                markup.line(cell.texts().get(0));
+            } else {
+                cell.texts().forEach(markup::paragraph);
             }
             markup.close(element);
         }
         return markup.written.toString();
+    }
+
+    private void paragraph(View.Text text) {
+        open("p", "class", text.style());
+        line(text);
+        close("p");
     }
 
     private void line(View.Text text) {
@@ -66,9 +73,13 @@ final class Markup {
         }
     }
 
+    /** @param attributes name and value in turn; one without a value is left out */
     private void open(String name, String... attributes) {
         written.append('<').append(name);
         for (int i = 0; i < attributes.length; i += 2) {
+            if (attributes[i + 1].isEmpty()) {
+                continue;
+            }
             written.append(' ').append(attributes[i]).append("=\"");
             characters(attributes[i + 1]);
             written.append('"');

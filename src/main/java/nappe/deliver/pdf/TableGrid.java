@@ -74,7 +74,9 @@ final class TableGrid {
     private void measure(int column, View.Text text, boolean head) {
         String characters = text.characters();
         boolean whole = !head
-                && (Decimals.isNumber(characters) || text.style().equals("whole") || Verdicts.isGrave(characters));
+                && (Decimals.isNumber(characters)
+                        || text.style().equals(View.Text.WHOLE)
+                        || Verdicts.isGrave(characters));
         for (ColumnWidths widths : List.of(measured, tight)) {
             if (whole) {
                 widths.whole(column, characters + "00");
@@ -165,17 +167,17 @@ final class TableGrid {
     private View.Text text(Block.Item item, Block.Column column) {
         if (item instanceof Block.Text words) {
             return column.head().toLowerCase(Locale.ROOT).endsWith("unit")
-                    ? View.Text.of("whole", UnitPrint.named(words.text()))
+                    ? View.Text.of(View.Text.WHOLE, UnitPrint.named(words.text()))
                     : words(words.text(), column);
         } else if (item instanceof Block.Symbol symbol) {
-            return View.Text.of("whole", SymbolPrint.pieces(symbol.symbol()));
+            return View.Text.of(View.Text.WHOLE, SymbolPrint.pieces(symbol.symbol()));
         } else if (item instanceof Block.Content content) {
             return content(content.cell(), column);
         } else if (item instanceof Block.Equation equation) {
             return View.Text.plain("formula", plain(equation.cell()));
         } else if (item instanceof Block.Address address) {
             return new View.Text(
-                    "whole", List.of(Piece.plain(links.address(address.cell()))), links.to(address.cell()));
+                    View.Text.WHOLE, List.of(Piece.plain(links.address(address.cell()))), links.to(address.cell()));
         } else if (item instanceof Block.Jump jump) {
             return new View.Text("", List.of(Piece.plain(jump.text())), links.to(jump.to()));
         } else if (item instanceof Block.SheetLink link) {
@@ -194,7 +196,7 @@ final class TableGrid {
     private View.Text content(Cell cell, Block.Column column) {
         String value = Printed.value(results, cell);
         return Printed.isNumber(results, cell)
-                ? View.Text.of("whole", List.of(Piece.plain(value)))
+                ? View.Text.of(View.Text.WHOLE, List.of(Piece.plain(value)))
                 : words(value, column);
     }
 

@@ -139,6 +139,9 @@ public final class View {
             List<Piece> pieces,
             String target,
             @Nullable Inset inset) {
+        /** The style of what is never broken over two lines; it looks as its surroundings do. */
+        static final String WHOLE = "whole";
+
         Text(String style, List<Piece> pieces, String target) {
             this(style, pieces, target, null);
         }
@@ -154,6 +157,11 @@ public final class View {
 
         static Text plain(String style, String text) {
             return of(style, List.of(Piece.plain(text)));
+        }
+
+        /** Whether its style says how it looks. */
+        boolean hasLook() {
+            return !style.isEmpty() && !style.equals(WHOLE);
         }
 
         /** The characters with their looks, as XHTML. */
