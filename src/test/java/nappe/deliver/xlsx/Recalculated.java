@@ -70,7 +70,7 @@ public final class Recalculated {
             command.add(Files.copy(workbooks.get(i), folder.resolve("book" + i + ".xlsx"))
                     .toString());
         }
-        Tools.run(command.toArray(String[]::new));
+        spreadsheet(command);
         return i -> {
             try {
                 return SheetsAsText.of(folder.resolve("out"), "book" + i);
@@ -85,9 +85,18 @@ public final class Recalculated {
         Tools.require("ssconvert", "Gnumeric");
         return in(folder -> {
             Path out = folder.resolve("out.xlsx");
-            Tools.run("ssconvert", "--recalc", "-T", "Gnumeric_Excel:xlsx2", workbook.toString(), out.toString());
+            spreadsheet(List.of(
+                    "ssconvert", "--recalc", "-T", "Gnumeric_Excel:xlsx2", workbook.toString(), out.toString()));
             return StoredCells.of(out);
         });
+    }
+
+    /** Runs a program that takes memory from the system in large pieces and keeps it, which saves a sixth of its time. */
+    private static void spreadsheet(List<String> command) throws IOException {
+        ProcessBuilder builder = new ProcessBuilder(command);
+        builder.environment().put("MALLOC_TOP_PAD_", "134217728");
+        builder.environment().put("MALLOC_TRIM_THRESHOLD_", "4000000000");
+        Tools.run(builder);
     }
 
     /** The values that are stored in a workbook, nothing recalculated. */
