@@ -1,9 +1,5 @@
 package nappe.bench;
 
-import java.io.BufferedInputStream;
-import java.io.BufferedOutputStream;
-import java.io.DataInputStream;
-import java.io.DataOutputStream;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -14,17 +10,44 @@ import java.util.regex.Pattern;
 import org.apache.poi.ss.usermodel.Cell;
 import org.apache.poi.ss.usermodel.CellType;
 import org.apache.poi.ss.usermodel.Row;
+import org.apache.poi.ss.util.CellRangeAddress;
+import org.apache.poi.xssf.usermodel.XSSFName;
+import org.apache.poi.xssf.usermodel.XSSFRow;
 import org.apache.poi.xssf.usermodel.XSSFSheet;
 import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
-/** What stands in a package: each cell with its style, formula and value; each word with its place on its page. */
-record Content(int styles, List<Sheet> sheets, List<Page> pages) {
-    record Sheet(String name, List<Filled> cells) {}
+/**
+ * What stands in a package: each cell with its style, formula and value, links, names and the sizes of rows and columns;
+ * each word with its place on its page, each rule and line of a drawing, links and bookmarks.
+ */
+record Content(int styles, List<Sheet> sheets, List<Name> names, List<Page> pages, List<String> bookmarks) {
+    /**
+     * @param merged such as {@code A1:H1}
+     * @param widths of the columns, in 256ths of a character
+     * @param heights by row, in points; 0 for a row as high as others
+     */
+    record Sheet(
+            String name,
+            List<Filled> cells,
+            List<Link> links,
+            List<String> merged,
+            List<Integer> widths,
+            List<Float> heights) {}
+
+    record Link(int row, int column, String target) {}
+
+    record Name(String name, String target) {}
 
     /** @param formula empty where there is none; @param text null where the value is a number or blank */
     record Filled(int row, int column, int style, String formula, String text, double number, boolean blank) {}
 
-    record Page(float width, float height, List<Word> words) {}
+    /**
+     * @param marks what is drawn, as operators of the page with their numbers
+     * @param links rectangles: left, bottom, right, top
+     */
+    record Page(float width, float height, List<Word> words, List<Mark> marks, List<float[]> links) {}
+
+    record Mark(String operator, float[] numbers) {}
 
     /** @param y of the line of writing, from the foot of the page, in points */
     record Word(float x, float y, float size, String text) {}
@@ -40,28 +63,62 @@ record Content(int styles, List<Sheet> sheets, List<Page> pages) {
                 .count();
     }
 
+    int links() {
+        return sheets.stream().mapToInt(sheet -> sheet.links().size()).sum()
+                + pages.stream().mapToInt(page -> page.links().size()).sum();
+    }
+
+    int marks() {
+        return pages.stream().mapToInt(page -> page.marks().size()).sum();
+    }
+
     int words() {
         return pages.stream().mapToInt(page -> page.words().size()).sum();
     }
 
-    /** Reads an issued package: the workbook by POI, the words of the PDF by pdftotext. */
+    /** Reads an issued package: the workbook by POI, the PDF by OpenPDF and its words by pdftotext. */
     static Content of(Path workbook, Path pdf) throws IOException, InterruptedException {
         List<Sheet> sheets = new ArrayList<>();
+        List<Name> names = new ArrayList<>();
         int styles;
         try (XSSFWorkbook read = new XSSFWorkbook(Files.newInputStream(workbook))) {
             styles = read.getNumCellStyles();
             for (int i = 0; i < read.getNumberOfSheets(); i++) {
-                XSSFSheet sheet = read.getSheetAt(i);
-                List<Filled> cells = new ArrayList<>();
-                for (Row row : sheet) {
-                    for (Cell cell : row) {
-                        cells.add(filled(cell));
-                    }
+                sheets.add(sheet(read.getSheetAt(i)));
+            }
+            for (XSSFName name : read.getAllNames()) {
+                if (!name.getNameName().startsWith("_xlnm")) {
+                    names.add(new Name(name.getNameName(), name.getRefersToFormula()));
                 }
-                sheets.add(new Sheet(sheet.getSheetName(), cells));
             }
         }
-        return new Content(styles, sheets, pages(pdf));
+        List<Page> pages = pages(pdf);
+        return new Content(styles, sheets, names, pages, Drawn.onto(pages, pdf));
+    }
+
+    private static Sheet sheet(XSSFSheet sheet) {
+        List<Filled> cells = new ArrayList<>();
+        List<Float> heights = new ArrayList<>();
+        for (Row row : sheet) {
+            while (heights.size() < row.getRowNum()) {
+                heights.add(0f);
+            }
+            heights.add(((XSSFRow) row).getCTRow().isSetHt() ? row.getHeightInPoints() : 0f);
+            for (Cell cell : row) {
+                cells.add(filled(cell));
+            }
+        }
+        List<Link> links = sheet.getHyperlinkList().stream()
+                .map(link -> new Link(link.getFirstRow(), link.getFirstColumn(), link.getLocation()))
+                .toList();
+        List<String> merged = sheet.getMergedRegions().stream()
+                .map(CellRangeAddress::formatAsString)
+                .toList();
+        List<Integer> widths = new ArrayList<>();
+        for (int column = 0; column < 20; column++) {
+            widths.add(sheet.getColumnWidth(column));
+        }
+        return new Sheet(sheet.getSheetName(), cells, links, merged, widths, heights);
     }
 
     private static Filled filled(Cell cell) {
@@ -92,7 +149,7 @@ record Content(int styles, List<Sheet> sheets, List<Page> pages) {
             Matcher page = PAGE.matcher(line);
             Matcher word = WORD.matcher(line);
             if (page.find()) {
-                pages.add(new Page(Float.parseFloat(page.group(1)), Float.parseFloat(page.group(2)), new ArrayList<>()));
+                pages.add(new Page(Float.parseFloat(page.group(1)), Float.parseFloat(page.group(2)), new ArrayList<>(), new ArrayList<>(), new ArrayList<>()));
             } else if (word.find()) {
                 Page on = pages.get(pages.size() - 1);
                 float size = (Float.parseFloat(word.group(3)) - Float.parseFloat(word.group(2))) * 0.75f;
@@ -102,67 +159,5 @@ record Content(int styles, List<Sheet> sheets, List<Page> pages) {
         }
         Files.delete(boxes);
         return pages;
-    }
-
-    void save(Path file) throws IOException {
-        try (DataOutputStream out = new DataOutputStream(new BufferedOutputStream(Files.newOutputStream(file)))) {
-            out.writeInt(styles);
-            out.writeInt(sheets.size());
-            for (Sheet sheet : sheets) {
-                out.writeUTF(sheet.name());
-                out.writeInt(sheet.cells().size());
-                for (Filled cell : sheet.cells()) {
-                    out.writeInt(cell.row());
-                    out.writeInt(cell.column());
-                    out.writeInt(cell.style());
-                    out.writeUTF(cell.formula());
-                    out.writeBoolean(cell.text() != null);
-                    out.writeUTF(cell.text() == null ? "" : cell.text());
-                    out.writeDouble(cell.number());
-                    out.writeBoolean(cell.blank());
-                }
-            }
-            out.writeInt(pages.size());
-            for (Page page : pages) {
-                out.writeFloat(page.width());
-                out.writeFloat(page.height());
-                out.writeInt(page.words().size());
-                for (Word word : page.words()) {
-                    out.writeFloat(word.x());
-                    out.writeFloat(word.y());
-                    out.writeFloat(word.size());
-                    out.writeUTF(word.text());
-                }
-            }
-        }
-    }
-
-    static Content load(Path file) throws IOException {
-        try (DataInputStream in = new DataInputStream(new BufferedInputStream(Files.newInputStream(file)))) {
-            int styles = in.readInt();
-            List<Sheet> sheets = new ArrayList<>();
-            for (int s = in.readInt(); s > 0; s--) {
-                Sheet sheet = new Sheet(in.readUTF(), new ArrayList<>());
-                for (int c = in.readInt(); c > 0; c--) {
-                    int row = in.readInt();
-                    int column = in.readInt();
-                    int style = in.readInt();
-                    String formula = in.readUTF();
-                    boolean words = in.readBoolean();
-                    String text = in.readUTF();
-                    sheet.cells().add(new Filled(row, column, style, formula, words ? text : null, in.readDouble(), in.readBoolean()));
-                }
-                sheets.add(sheet);
-            }
-            List<Page> pages = new ArrayList<>();
-            for (int p = in.readInt(); p > 0; p--) {
-                Page page = new Page(in.readFloat(), in.readFloat(), new ArrayList<>());
-                for (int w = in.readInt(); w > 0; w--) {
-                    page.words().add(new Word(in.readFloat(), in.readFloat(), in.readFloat(), in.readUTF()));
-                }
-                pages.add(page);
-            }
-            return new Content(styles, sheets, pages);
-        }
     }
 }

@@ -15,7 +15,12 @@ import java.util.stream.Stream;
  */
 public final class Speed {
     private static final List<String> FLAGS =
-            List.of("-XX:+UseSerialGC", "-XX:TieredStopAtLevel=1", "-Xshare:auto", "-Xlog:disable");
+            List.of(
+            "-XX:+UseSerialGC",
+            "-XX:TieredStopAtLevel=1",
+            "-XX:+UseTransparentHugePages",
+            "-Xshare:auto",
+            "-Xlog:disable");
     private static final int WARM = 6;
 
     private final Path jar;
@@ -63,7 +68,7 @@ public final class Speed {
         Path workbook = newest(folder, ".xlsx");
         Content content = Content.of(workbook, newest(folder, ".pdf"));
         Path saved = out.resolve("content.bin");
-        content.save(saved);
+        ContentFile.save(content, saved);
         Path bareArchive = out.resolve("bare.jsa");
         Files.deleteIfExists(bareArchive);
         run(bare("xssf", saved, "-XX:ArchiveClassesAtExit=" + bareArchive));
@@ -73,14 +78,16 @@ public final class Speed {
         }
         System.out.printf(
                 Locale.ROOT,
-                "%n%s: %d sheets, %d cells of which %d formulas, %d styles; %d pages, %d words%n",
+                "%n%s: %d sheets, %d cells of which %d formulas, %d styles; %d pages, %d words, %d strokes; %d links%n",
                 input.getFileName(),
                 content.sheets().size(),
                 content.cells(),
                 content.formulas(),
                 content.styles(),
                 content.pages().size(),
-                content.words());
+                content.words(),
+                content.marks(),
+                content.links());
         Figures stages = new Figures();
         Figures whole = new Figures();
         Figures processors = new Figures();

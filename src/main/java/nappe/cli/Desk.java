@@ -87,7 +87,7 @@ final class Desk {
 
     /** Computes a design that was read and checked, and tells the stages. */
     Job.Done compute(Design design, Consumer<String> stage) {
-        return new Job(methods, Nappe.version()).telling(stage).run(design, checks());
+        return new Job(methods, Nappe.version()).telling(stage).run(design, this::checks);
     }
 
     /** Reads an input workbook; where its methods have faults, these are told and not what follows from them. */

@@ -64,10 +64,7 @@ final class IssueCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         Consumer<String> stage = Nappe.stage(spec);
         stage.accept("reading the workbook");
-        Beside.start("pages", () -> {
-            PdfDelivery.warmUp();
-            return true;
-        });
+        Beside<Boolean> rehearsal = Rehearsal.ofPages();
         Desk desk = house.desk();
         Design design = marked.read(desk, input);
         house.tellRemarks(
@@ -77,6 +74,8 @@ final class IssueCommand implements Callable<Integer> {
                 folder, design.project().number(), design.project().revision());
         target.prepare();
         Job.Done done = desk.compute(design, stage);
+        // the typefaces serve one document at a time
+        rehearsal.outcome();
         target.write(files(target.name(), done, stage), done.results().furniture());
         PrintWriter out = spec.commandLine().getOut();
         out.println("Wrote " + target.path());
@@ -89,7 +88,10 @@ final class IssueCommand implements Callable<Integer> {
         Furniture furniture = results.furniture();
         Map<String, byte[]> files = new LinkedHashMap<>();
         stage.accept("writing the workbook and setting the PDF");
-        Beside<byte[]> workbook = Beside.start("workbook", () -> XlsxDelivery.render(results));
+        Beside<byte[]> workbook = Beside.start("workbook", () -> {
+            Rehearsal.ofWorkbook().outcome();
+            return XlsxDelivery.render(results);
+        });
         PdfDelivery pdf;
         try {
             pdf = PdfDelivery.render(results, new Attachment(name + ".xlsx", workbook::outcome));

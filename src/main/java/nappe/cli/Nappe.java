@@ -11,8 +11,11 @@ import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Properties;
+import java.util.TreeMap;
 import java.util.function.Consumer;
+import java.util.function.Supplier;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 
@@ -39,8 +42,7 @@ import picocli.CommandLine.Command;
             "  2  the command line was not understood",
             "  3  the input was refused, or a check value was not met",
             "  4  an issued revision would have been written over"
-        },
-        subcommands = {BlankCommand.class, InspectCommand.class, IssueCommand.class, VerifyCommand.class})
+        })
 public final class Nappe implements Runnable {
     @CommandLine.Spec
     private CommandLine.Model.CommandSpec spec;
@@ -59,6 +61,9 @@ public final class Nappe implements Runnable {
             "      the package: a PDF, a workbook with live formulas, rating tables",
             "",
             "Help: nappe --help, and nappe blank --help and so on. A guide with pictures: README.md.");
+
+    private static final Map<String, Supplier<Object>> COMMANDS = new TreeMap<>(Map.of(
+            "blank", BlankCommand::new, "inspect", InspectCommand::new, "issue", IssueCommand::new, "verify", VerifyCommand::new));
 
     /** So long a person waits before being told what the program is busy with. */
     private static final long PATIENCE_MILLIS = 1000;
@@ -104,15 +109,22 @@ public final class Nappe implements Runnable {
         System.setProperty("log4j.provider", "org.apache.logging.log4j.simple.internal.SimpleProvider");
         System.setProperty("org.apache.logging.log4j.simplelog.level", "OFF");
         Locale.setDefault(Locale.ROOT);
-        CommandLine line = new CommandLine(nappe)
-                .setOut(out)
+        if (args.length > 1 && args[0].equals("issue")) {
+            Rehearsal.ofPages();
+        }
+        String[] typed = asHelp(args);
+        CommandLine line = new CommandLine(nappe);
+        // a command takes a while to set up, and one that is named needs no other
+        Supplier<Object> named = typed.length == 0 ? null : COMMANDS.get(typed[0]);
+        (named == null ? COMMANDS.values() : List.of(named)).forEach(command -> line.addSubcommand(command.get()));
+        line.setOut(out)
                 .setErr(err)
                 .setUsageHelpWidth(110)
                 .setParameterExceptionHandler(new WrongUsage())
                 .setExecutionExceptionHandler(new Failures());
         line.registerConverter(Path.class, Nappe::path);
         try {
-            return line.execute(asHelp(args));
+            return line.execute(typed);
         } catch (OutOfMemoryError | StackOverflowError e) {
             return Failures.internal(err, e);
         }

@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.function.Consumer;
+import java.util.function.Supplier;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.calculation.Scope;
@@ -76,9 +77,18 @@ public final class Job {
      * @throws nappe.station.StationException where entries do not fit the methods
      */
     public Done run(Design design, List<CheckRow> checks) {
+        return run(design, () -> checks);
+    }
+
+    /**
+     * The same with check values that are read beside the search for flows.
+     *
+     * @throws nappe.station.StationException where entries do not fit the methods
+     */
+    public Done run(Design design, Supplier<List<CheckRow>> checks) {
         stage.accept("looking for the flows at the limits");
         Map<String, MethodSheet> used = used(design);
-        Beside<SoftwareStatement> software = Beside.start("check values", () -> statement(used, checks));
+        Beside<SoftwareStatement> software = Beside.start("check values", () -> statement(used, checks.get()));
         Beside<Map<String, List<SizeRerun>>> sizes =
                 Beside.start("sizes", () -> new SizeReruns(design, methods::sheet).run());
         FoundFlows found = FlowSearch.of(design, methods::sheet);

@@ -272,7 +272,10 @@ public final class StationLayout {
     }
 
     List<MethodSheet> distinctMethods() {
-        return methods.values().stream().distinct().toList();
+        // by name: a method sheet is a whole text, slow to compare
+        Map<String, MethodSheet> distinct = new LinkedHashMap<>();
+        methods.values().forEach(method -> distinct.putIfAbsent(method.name(), method));
+        return List.copyOf(distinct.values());
     }
 
     /** Index of the case worked in full. */

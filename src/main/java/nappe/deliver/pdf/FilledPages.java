@@ -34,14 +34,6 @@ record FilledPages(
                 xhtml, results.furniture(), drawings, pictures.made(), furnishing.warnings(results.furniture()));
     }
 
-    /** A package without sheets; what is loaded for it serves the next. */
-    static String ofNothing() {
-        Furnishing blank = new Furnishing("", "", "", "", "", "", "", "", "", "", "", List.of());
-        double width = Typefaces.width(" ", Typefaces.REGULAR, 1);
-        return Xhtml.fill(
-                Map.of("title", "", "furnishing", blank, "pageRule", "" + width, "leaves", List.of(), "index", ""));
-    }
-
     LaidOutPages laidOut(List<Attachment> attachments) {
         return LaidOutPages.of(this, attachments);
     }

@@ -28,19 +28,22 @@ final class LaidOutPages {
         FaceResolver faces = new FaceResolver();
         Glyphs glyphs = new Glyphs(faces);
         Paper paper = new Paper(dots);
+        ClosedAgent agent = new ClosedAgent(paper);
         ITextRenderer renderer = new ITextRenderer(
                 dots,
                 ITextRenderer.DEFAULT_DOTS_PER_PIXEL,
                 paper,
-                new ClosedAgent(paper),
+                agent,
                 faces,
                 new DrawnElements(filled.drawings(), dots, new PictureFactory(filled.pictures(), dots)),
                 glyphs);
         renderer.setPDFVersion(PdfWriter.VERSION_1_7);
         renderer.getSharedContext().setLineBreakingStrategy(new SpaceBreaks());
+        PlainNames names = new PlainNames();
+        renderer.getSharedContext().setCss(new StyleMemory(agent, names));
         Document document = Xhtml.parse(filled.xhtml());
         renderer.setListener(new Stamp(filled.xhtml(), filled.furniture(), attachments, Outline.of(document)));
-        renderer.setDocument(document, null, new PlainNames());
+        renderer.setDocument(document, null, names);
         do {
             renderer.layout();
         } while (LonelyHeads.moved(renderer));

@@ -10,11 +10,6 @@ import nappe.results.Results;
  * @param warnings what a reader of the PDF would miss, one line each
  */
 public record PdfDelivery(byte[] bytes, List<String> warnings) {
-    /** Loads what every PDF needs, so that it can be there when the results are. */
-    public static void warmUp() {
-        FilledPages.ofNothing();
-    }
-
     /** Prints the results: every sheet on pages of its own, no number that is not in the results. */
     public static PdfDelivery render(Results results) {
         return FilledPages.of(results).laidOut(List.of()).painted();

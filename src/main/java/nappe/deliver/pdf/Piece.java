@@ -19,6 +19,9 @@ public record Piece(String text, Face face, Shift shift) {
         RAISED_TWICE
     }
 
+    /** The style of what looks as its surroundings do. */
+    static final String PLAIN = "t";
+
     public Piece {
         text = XmlText.safe(text);
     }
@@ -53,7 +56,7 @@ public record Piece(String text, Face face, Shift shift) {
     /** Class names for the style sheet. */
     public String style() {
         String look = switch (face) {
-            case PLAIN -> "t";
+            case PLAIN -> PLAIN;
             case ITALIC -> "i";
             case BOLD -> "b";
         };

@@ -99,7 +99,12 @@ public final class View {
     }
 
     /** One row of a grid. */
-    public record GridRow(String style, List<GridCell> cells) {}
+    public record GridRow(String style, List<GridCell> cells) {
+        /** The cells, each an element of this name, as XHTML. */
+        public String markup(String element) {
+            return Markup.of(this, element);
+        }
+    }
 
     /** One cell of a grid, with its lines of text. */
     public record GridCell(String style, int span, List<Text> texts) {
@@ -151,9 +156,9 @@ public final class View {
             return of(style, List.of(Piece.plain(text)));
         }
 
-        /** The same, gathered into words. */
-        public List<Word> words() {
-            return Words.of(pieces);
+        /** The characters with their looks, as XHTML. */
+        public String markup() {
+            return Markup.of(this);
         }
 
         /** All characters in a row, for measuring. */

@@ -1,0 +1,97 @@
+package nappe.deliver.pdf;
+
+/**
+ * Lines and the cells of tables as XHTML, which the template takes as they are: they are by far the most of what it
+ * prints, and an element of the template costs many times what writing these few letters does.
+ */
+final class Markup {
+    private final StringBuilder written = new StringBuilder();
+
+    private Markup() {}
+
+    static String of(View.Text text) {
+        Markup markup = new Markup();
+        markup.line(text);
+        return markup.written.toString();
+    }
+
+    static String of(View.GridRow row, String element) {
+        Markup markup = new Markup();
+        for (View.GridCell cell : row.cells()) {
+            markup.open(element, "class", cell.style(), "colspan", Integer.toString(cell.span()));
+            for (View.Text text : cell.texts()) {
+                markup.open("p", "class", text.style());
+                markup.line(text);
+                markup.close("p");
+            }
+            markup.close(element);
+        }
+        return markup.written.toString();
+    }
+
+    private void line(View.Text text) {
+        boolean linked = !text.target().isEmpty();
+        if (linked) {
+            open("a", "href", text.target());
+        }
+        for (View.Word word : Words.of(text.pieces())) {
+            word(word);
+        }
+        View.Inset inset = text.inset();
+        if (inset != null) {
+            open("span", "class", "drawn", Drawings.ATTRIBUTE, inset.name(), "title", inset.text());
+            close("span");
+        }
+        if (linked) {
+            close("a");
+        }
+    }
+
+    private void word(View.Word word) {
+        if (word.whole()) {
+            open("span", "class", "word");
+        }
+        for (Piece piece : word.pieces()) {
+            boolean plain = piece.style().equals(Piece.PLAIN);
+            if (!plain) {
+                open("span", "class", piece.style());
+            }
+            characters(piece.text());
+            if (!plain) {
+                close("span");
+            }
+        }
+        if (word.whole()) {
+            close("span");
+        }
+    }
+
+    private void open(String name, String... attributes) {
+        written.append('<').append(name);
+        for (int i = 0; i < attributes.length; i += 2) {
+            written.append(' ').append(attributes[i]).append("=\"");
+            characters(attributes[i + 1]);
+            written.append('"');
+        }
+        written.append('>');
+    }
+
+    private void close(String name) {
+        written.append("</").append(name).append('>');
+    }
+
+    private void characters(String text) {
+        for (int i = 0; i < text.length(); i++) {
+            char c = text.charAt(i);
+            switch (c) {
+                case '&' -> written.append("&amp;");
+                case '<' -> written.append("&lt;");
+                case '>' -> written.append("&gt;");
+                case '"' -> written.append("&quot;");
+                // else a reader of XML would take them for blanks or change them
+                case '\t', '\n', '\r' -> written.append("&#").append((int) c).append(';');
+                default -> written.append(c);
+            }
+        }
+    }
+}
