@@ -5,15 +5,17 @@ import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
+import java.util.regex.MatchResult;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.zip.ZipEntry;
 import java.util.zip.ZipInputStream;
 import java.util.zip.ZipOutputStream;
 import nappe.calculation.Place;
-import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /** An issued workbook in which typed cells are changed, all else left as it is. */
 final class Edited {
@@ -21,22 +23,34 @@ final class Edited {
     private final Map<String, String> partOfSheet = new LinkedHashMap<>();
 
     Edited(byte[] workbook) {
-        try (ZipInputStream in = new ZipInputStream(new ByteArrayInputStream(workbook));
-                XSSFWorkbook book = new XSSFWorkbook(new ByteArrayInputStream(workbook))) {
+        try (ZipInputStream in = new ZipInputStream(new ByteArrayInputStream(workbook))) {
             for (ZipEntry entry = in.getNextEntry(); entry != null; entry = in.getNextEntry()) {
                 parts.put(entry.getName(), in.readAllBytes());
             }
-            book.sheetIterator()
-                    .forEachRemaining(sheet -> partOfSheet.put(
-                            sheet.getSheetName(),
-                            book.getSheet(sheet.getSheetName())
-                                    .getPackagePart()
-                                    .getPartName()
-                                    .getName()
-                                    .substring(1)));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
+        Map<String, String> targets = new HashMap<>();
+        found("xl/_rels/workbook.xml.rels", "<Relationship [^>]*>")
+                .forEach(one -> targets.put(attribute(one, "Id"), attribute(one, "Target")));
+        found("xl/workbook.xml", "<sheet [^>]*>")
+                .forEach(one -> partOfSheet.put(attribute(one, "name"), "xl/" + targets.get(attribute(one, "r:id"))));
+    }
+
+    private List<String> found(String part, String pattern) {
+        return Pattern.compile(pattern)
+                .matcher(new String(parts.get(part), StandardCharsets.UTF_8))
+                .results()
+                .map(MatchResult::group)
+                .toList();
+    }
+
+    private static String attribute(String element, String name) {
+        Matcher found = Pattern.compile(" " + name + "=\"([^\"]*)\"").matcher(element);
+        if (!found.find()) {
+            throw new IllegalArgumentException(element + " has no " + name);
+        }
+        return found.group(1);
     }
 
     /** Types a number, or words, over what was typed; null empties the cell. */

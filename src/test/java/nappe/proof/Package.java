@@ -3,6 +3,7 @@ package nappe.proof;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.function.Supplier;
 import nappe.calculation.Block;
 import nappe.calculation.Cell;
 import nappe.deliver.xlsx.XlsxDelivery;
@@ -16,7 +17,8 @@ import nappe.station.Design;
 import nappe.station.FoundFlows;
 
 /** The package of one design: what was typed, what Java computed, the workbook that is issued. */
-record Package(Design design, Results results, Map<String, Block.Table> ratings, FoundFlows found, byte[] workbook) {
+record Package(
+        Design design, Results results, Map<String, Block.Table> ratings, FoundFlows found, Supplier<byte[]> rendered) {
     private static final BuiltInLibrary LIBRARY = new BuiltInLibrary();
     private static final MethodLibrary METHODS = new MethodLibrary(LIBRARY);
     private static final Map<String, Package> SAMPLES = new LinkedHashMap<>();
@@ -33,7 +35,22 @@ record Package(Design design, Results results, Map<String, Block.Table> ratings,
     }
 
     private static Package of(Design design, Job.Done done) {
-        return new Package(design, done.results(), done.ratings(), done.found(), XlsxDelivery.render(done.results()));
+        return new Package(design, done.results(), done.ratings(), done.found(), once(done.results()));
+    }
+
+    /** Written when it is first asked for: not every test looks into the workbook. */
+    private static Supplier<byte[]> once(Results results) {
+        byte[][] written = new byte[1][];
+        return () -> {
+            if (written[0] == null) {
+                written[0] = XlsxDelivery.render(results);
+            }
+            return written[0];
+        };
+    }
+
+    byte[] workbook() {
+        return rendered.get();
     }
 
     /** The package of an input workbook in {@code sample-inputs}, made once. */

@@ -43,13 +43,10 @@ class PackageTest {
     private static final Pattern REFERENCE =
             Pattern.compile("(?:'([^']+)'!)?\\$?([A-Z]{1,3})\\$?(\\d+)(?![\\d(])(?::\\$?([A-Z]{1,3})\\$?(\\d+))?");
     private static final Map<String, PdfPages> PDFS = new HashMap<>();
+    private static final Map<String, Map<String, String>> FORMULAS = new HashMap<>();
 
     @TempDir
     Path folder;
-
-    private static XSSFWorkbook open(Package sample) throws IOException {
-        return new XSSFWorkbook(new ByteArrayInputStream(sample.workbook()));
-    }
 
     private static Map<String, String> parts(byte[] workbook) throws IOException {
         Map<String, String> parts = new LinkedHashMap<>();
@@ -71,6 +68,10 @@ class PackageTest {
     }
 
     /** The formulas of the workbook by {@code "Sheet!A1"}. */
+    private static Map<String, String> formulas(String name) {
+        return FORMULAS.computeIfAbsent(name, sample -> formulas(OpenedBooks.of(sample)));
+    }
+
     private static Map<String, String> formulas(XSSFWorkbook book) {
         Map<String, String> formulas = new LinkedHashMap<>();
         book.forEach(sheet -> sheet.forEach(row -> row.forEach(cell -> {
@@ -95,7 +96,7 @@ class PackageTest {
 
     @ParameterizedTest
     @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
-    void everyNumberIsAnEntryAConstantACitedNumberOrLive(String name) throws IOException {
+    void everyNumberIsAnEntryAConstantACitedNumberOrLive(String name) {
         Package sample = Package.ofSample(name);
         Set<String> typed = new LinkedHashSet<>();
         Set<String> live = new LinkedHashSet<>();
@@ -103,24 +104,23 @@ class PackageTest {
                 .cells()
                 .forEach(cell -> (cell.kind() == Cell.Kind.FORMULA ? live : typed)
                         .add(cell.place().sheet() + "!" + cell.place().address()));
-        try (XSSFWorkbook book = open(sample)) {
-            // containsAll of AssertJ would look through all of them once for each cell
-            Set<String> missing = new HashSet<>(live);
-            missing.removeAll(formulas(book).keySet());
-            assertThat(missing).isEmpty();
-            book.forEach(sheet -> sheet.forEach(row -> row.forEach(cell -> {
-                String address = sheet.getSheetName() + "!" + cell.getAddress();
-                assertThat(cell.getCellType()).as(address).isNotIn(CellType.BOOLEAN, CellType.ERROR);
-                if (cell.getCellType() == CellType.NUMERIC) {
-                    assertThat(typed).contains(address);
-                }
-            })));
-        }
+        XSSFWorkbook book = OpenedBooks.of(name);
+        // containsAll of AssertJ would look through all of them once for each cell
+        Set<String> missing = new HashSet<>(live);
+        missing.removeAll(formulas(name).keySet());
+        assertThat(missing).isEmpty();
+        book.forEach(sheet -> sheet.forEach(row -> row.forEach(cell -> {
+            String address = sheet.getSheetName() + "!" + cell.getAddress();
+            assertThat(cell.getCellType()).as(address).isNotIn(CellType.BOOLEAN, CellType.ERROR);
+            if (cell.getCellType() == CellType.NUMERIC) {
+                assertThat(typed).contains(address);
+            }
+        })));
     }
 
     @ParameterizedTest
     @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
-    void flowsFoundStandAsIssuedAndNobodyTypesIntoThem(String name) throws IOException {
+    void flowsFoundStandAsIssuedAndNobodyTypesIntoThem(String name) {
         Package sample = Package.ofSample(name);
         List<Cell> found = sample.results().cells().stream()
                 .filter(cell -> cell.kind() == Cell.Kind.RERUN
@@ -128,14 +128,13 @@ class PackageTest {
                         && cell.place().sheet().equals("Found"))
                 .toList();
         assertThat(found).hasSameSizeAs(sample.found().cases()).isNotEmpty();
-        try (XSSFWorkbook book = open(sample)) {
-            for (Cell cell : found) {
-                var there = book.getSheet("Found")
-                        .getRow(cell.place().row())
-                        .getCell(cell.place().column());
-                assertThat(there.getCellType()).isEqualTo(CellType.NUMERIC);
-                assertThat(there.getCellStyle().getLocked()).isTrue();
-            }
+        XSSFWorkbook book = OpenedBooks.of(name);
+        for (Cell cell : found) {
+            var there = book.getSheet("Found")
+                    .getRow(cell.place().row())
+                    .getCell(cell.place().column());
+            assertThat(there.getCellType()).isEqualTo(CellType.NUMERIC);
+            assertThat(there.getCellStyle().getLocked()).isTrue();
         }
     }
 
@@ -143,19 +142,18 @@ class PackageTest {
     @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
     void nothingIsHidden(String name) throws IOException {
         Package sample = Package.ofSample(name);
-        try (XSSFWorkbook book = open(sample)) {
-            for (int i = 0; i < book.getNumberOfSheets(); i++) {
-                XSSFSheet sheet = book.getSheetAt(i);
-                assertThat(book.getSheetVisibility(i)).isEqualTo(SheetVisibility.VISIBLE);
-                sheet.forEach(row -> assertThat(row.getZeroHeight() || row.getHeightInPoints() < 3)
-                        .isFalse());
-                for (int column = 0; column < 60; column++) {
-                    assertThat(sheet.isColumnHidden(column) || sheet.getColumnWidth(column) < 256)
-                            .isFalse();
-                }
+        XSSFWorkbook book = OpenedBooks.of(name);
+        for (int i = 0; i < book.getNumberOfSheets(); i++) {
+            XSSFSheet sheet = book.getSheetAt(i);
+            assertThat(book.getSheetVisibility(i)).isEqualTo(SheetVisibility.VISIBLE);
+            sheet.forEach(row -> assertThat(row.getZeroHeight() || row.getHeightInPoints() < 3)
+                    .isFalse());
+            for (int column = 0; column < 60; column++) {
+                assertThat(sheet.isColumnHidden(column) || sheet.getColumnWidth(column) < 256)
+                        .isFalse();
             }
-            assertThat(book.getAllNames()).noneMatch(one -> one.isHidden() || one.isFunctionName());
         }
+        assertThat(book.getAllNames()).noneMatch(one -> one.isHidden() || one.isFunctionName());
         assertThat(parts(sample.workbook()).values())
                 .noneMatch(part -> part.contains("hidden=\"1\"") || part.contains("eryHidden"));
     }
@@ -170,64 +168,57 @@ class PackageTest {
                         part.matches("(?i).*(vba|macro|externalLink|activeX|embedding|connections|queryTable).*"));
         assertThat(parts.get("[Content_Types].xml")).doesNotContainIgnoringCase("macro");
         assertThat(parts.values()).noneMatch(part -> part.contains("TargetMode=\"External\""));
-        try (XSSFWorkbook book = open(sample)) {
-            assertThat(book.isMacroEnabled()).isFalse();
-            assertThat(formulas(book).values())
-                    .isNotEmpty()
-                    .allSatisfy(formula -> assertThat(TEXT.matcher(formula).replaceAll(""))
-                            .doesNotContainPattern(
-                                    "\\b(NOW|TODAY|RAND|RANDBETWEEN|OFFSET|INDIRECT|CELL|INFO|EVALUATE|CALL|HYPERLINK|WEBSERVICE)\\(")
-                            .doesNotContain("[", "{", "_xl"));
-            assertThat(parts.get("xl/workbook.xml")).contains("iterate=\"false\"");
-        }
+        XSSFWorkbook book = OpenedBooks.of(name);
+        assertThat(book.isMacroEnabled()).isFalse();
+        assertThat(formulas(name).values())
+                .isNotEmpty()
+                .allSatisfy(formula -> assertThat(TEXT.matcher(formula).replaceAll(""))
+                        .doesNotContainPattern(
+                                "\\b(NOW|TODAY|RAND|RANDBETWEEN|OFFSET|INDIRECT|CELL|INFO|EVALUATE|CALL|HYPERLINK|WEBSERVICE)\\(")
+                        .doesNotContain("[", "{", "_xl"));
+        assertThat(parts.get("xl/workbook.xml")).contains("iterate=\"false\"");
     }
 
     @ParameterizedTest
     @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
-    void noFormulaLeadsBackToItselfOrToAnEmptyCell(String name) throws IOException {
+    void noFormulaLeadsBackToItselfOrToAnEmptyCell(String name) {
         Package sample = Package.ofSample(name);
-        try (XSSFWorkbook book = open(sample)) {
-            Map<String, String> formulas = formulas(book);
-            Map<String, List<String>> needs = new LinkedHashMap<>();
-            Map<String, List<String>> neededBy = new HashMap<>();
-            formulas.forEach((cell, formula) -> {
-                List<String> referred = referred(cell, formula);
-                needs.put(
-                        cell,
-                        referred.stream()
-                                .filter(formulas::containsKey)
-                                .distinct()
-                                .toList());
-                for (String one : referred) {
-                    String sheet = one.substring(0, one.indexOf('!'));
-                    var at = new org.apache.poi.ss.util.CellReference(one.substring(one.indexOf('!') + 1));
-                    var row = book.getSheet(sheet).getRow(at.getRow());
-                    assertThat(row == null
-                                    || row.getCell(at.getCol()) == null
-                                    || row.getCell(at.getCol()).getCellType() == CellType.BLANK)
-                            .as(cell + " =" + formula + " refers to the empty " + one)
-                            .isFalse();
-                }
-            });
-            needs.forEach((cell, all) -> all.forEach(one ->
-                    neededBy.computeIfAbsent(one, key -> new ArrayList<>()).add(cell)));
-            Map<String, Integer> open = new HashMap<>();
-            needs.forEach((cell, all) -> open.put(cell, all.size()));
-            Deque<String> ready = new ArrayDeque<>(
-                    open.keySet().stream().filter(c -> open.get(c) == 0).toList());
-            int done = 0;
-            while (!ready.isEmpty()) {
-                done++;
-                for (String next : neededBy.getOrDefault(ready.pop(), List.of())) {
-                    if (open.merge(next, -1, Integer::sum) == 0) {
-                        ready.push(next);
-                    }
+        XSSFWorkbook book = OpenedBooks.of(name);
+        Map<String, String> formulas = formulas(name);
+        Map<String, List<String>> needs = new LinkedHashMap<>();
+        Map<String, List<String>> neededBy = new HashMap<>();
+        formulas.forEach((cell, formula) -> {
+            List<String> referred = referred(cell, formula);
+            needs.put(
+                    cell,
+                    referred.stream().filter(formulas::containsKey).distinct().toList());
+            for (String one : referred) {
+                String sheet = one.substring(0, one.indexOf('!'));
+                var at = new org.apache.poi.ss.util.CellReference(one.substring(one.indexOf('!') + 1));
+                var row = book.getSheet(sheet).getRow(at.getRow());
+                assertThat(row == null
+                                || row.getCell(at.getCol()) == null
+                                || row.getCell(at.getCol()).getCellType() == CellType.BLANK)
+                        .as(cell + " =" + formula + " refers to the empty " + one)
+                        .isFalse();
+            }
+        });
+        needs.forEach((cell, all) -> all.forEach(
+                one -> neededBy.computeIfAbsent(one, key -> new ArrayList<>()).add(cell)));
+        Map<String, Integer> open = new HashMap<>();
+        needs.forEach((cell, all) -> open.put(cell, all.size()));
+        Deque<String> ready = new ArrayDeque<>(
+                open.keySet().stream().filter(c -> open.get(c) == 0).toList());
+        int done = 0;
+        while (!ready.isEmpty()) {
+            done++;
+            for (String next : neededBy.getOrDefault(ready.pop(), List.of())) {
+                if (open.merge(next, -1, Integer::sum) == 0) {
+                    ready.push(next);
                 }
             }
-            assertThat(done)
-                    .as("formulas that can be computed one after another")
-                    .isEqualTo(formulas.size());
         }
+        assertThat(done).as("formulas that can be computed one after another").isEqualTo(formulas.size());
     }
 
     @ParameterizedTest
@@ -238,6 +229,7 @@ class PackageTest {
         int lines = 0;
         for (Sheet sheet : sample.results().sheets()) {
             String printed = pdf(sample).ofSheet(sheet.number());
+            Map<String, String> printedLines = PdfPages.lines(printed);
             for (Block block : sheet.blocks()) {
                 if (block instanceof Block.Lines all) {
                     for (Block.Line line : all.lines()) {
@@ -248,7 +240,7 @@ class PackageTest {
                                         : line.perCase().get(all.workedCase());
                         if (cell != null) {
                             lines++;
-                            String text = PdfPages.ofLine(printed, line.code());
+                            String text = printedLines.getOrDefault(line.code(), "");
                             require(missing, text, line.code(), print(sample, cell));
                             require(
                                     missing,
@@ -271,10 +263,11 @@ class PackageTest {
         List<String> missing = new ArrayList<>();
         for (Sheet sheet : sample.results().sheets()) {
             String printed = pdf(sample).ofSheet(sheet.number());
+            Map<String, String> printedLines = PdfPages.lines(printed);
             for (Block block : sheet.blocks()) {
                 if (block instanceof Block.Lines all) {
                     for (Block.Line line : all.lines()) {
-                        String text = PdfPages.ofLine(printed, line.code());
+                        String text = printedLines.getOrDefault(line.code(), "");
                         printed(all, line).forEach(cell -> require(missing, text, line.code(), print(sample, cell)));
                     }
                 } else if (block instanceof Block.Table table) {
@@ -342,29 +335,27 @@ class PackageTest {
         PdfPages pages = pdf(sample);
         int count = sample.results().sheets().size();
         String fingerprint = sample.results().furniture().fingerprint();
-        try (XSSFWorkbook book = open(sample)) {
-            assertThat(book.getNumberOfSheets()).isEqualTo(count);
-            for (Sheet sheet : sample.results().sheets()) {
-                XSSFSheet there = book.getSheetAt(sheet.number() - 1);
-                assertThat(there.getSheetName()).isEqualTo(sheet.name());
-                String head = there.getRow(0).getCell(0).getStringCellValue();
-                assertThat(head).isEqualTo("Sheet " + sheet.number() + " of " + count + "   " + sheet.title());
-                assertThat(there.getRow(1).getCell(0).getStringCellValue())
-                        .contains(
-                                "Calculation " + sample,
-                                "Revision " + sample.results().furniture().revision());
-                assertThat(there.getRow(2).getCell(0).getStringCellValue()).contains(fingerprint);
-                assertThat(there.getFooter().getLeft()
-                                + there.getFooter().getCenter()
-                                + there.getFooter().getRight())
-                        .contains(fingerprint);
-                String printed = pages.ofSheet(sheet.number());
-                assertThat(PdfPages.holds(printed, "Sheet " + sheet.number() + " of " + count))
-                        .as(head)
-                        .isTrue();
-                assertThat(printed.replaceAll("\\s+", " "))
-                        .contains(sheet.title().replaceAll("\\s+", " "));
-            }
+        XSSFWorkbook book = OpenedBooks.of(name);
+        assertThat(book.getNumberOfSheets()).isEqualTo(count);
+        for (Sheet sheet : sample.results().sheets()) {
+            XSSFSheet there = book.getSheetAt(sheet.number() - 1);
+            assertThat(there.getSheetName()).isEqualTo(sheet.name());
+            String head = there.getRow(0).getCell(0).getStringCellValue();
+            assertThat(head).isEqualTo("Sheet " + sheet.number() + " of " + count + "   " + sheet.title());
+            assertThat(there.getRow(1).getCell(0).getStringCellValue())
+                    .contains(
+                            "Calculation " + sample,
+                            "Revision " + sample.results().furniture().revision());
+            assertThat(there.getRow(2).getCell(0).getStringCellValue()).contains(fingerprint);
+            assertThat(there.getFooter().getLeft()
+                            + there.getFooter().getCenter()
+                            + there.getFooter().getRight())
+                    .contains(fingerprint);
+            String printed = pages.ofSheet(sheet.number());
+            assertThat(PdfPages.holds(printed, "Sheet " + sheet.number() + " of " + count))
+                    .as(head)
+                    .isTrue();
+            assertThat(printed.replaceAll("\\s+", " ")).contains(sheet.title().replaceAll("\\s+", " "));
         }
     }
 

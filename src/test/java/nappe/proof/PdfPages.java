@@ -5,7 +5,9 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import nappe.Tools;
@@ -53,18 +55,18 @@ final class PdfPages {
                         .toList());
     }
 
-    /** All that stands between a line's code and the next code, wherever the line is printed on its sheet. */
-    static String ofLine(String sheet, String code) {
-        StringBuilder text = new StringBuilder();
+    /** All that stands between a line's code and the next code, wherever the line is printed on its sheet, by code. */
+    static Map<String, String> lines(String sheet) {
+        Map<String, String> lines = new HashMap<>();
         Matcher matcher = CODE.matcher(sheet);
-        int from = -1;
-        while (matcher.find()) {
-            if (from >= 0) {
-                text.append(sheet, from, matcher.start()).append('\n');
-            }
-            from = matcher.group(1).equals(code) ? matcher.start() : -1;
+        boolean more = matcher.find();
+        while (more) {
+            String code = matcher.group(1);
+            int from = matcher.start();
+            more = matcher.find();
+            lines.merge(code, sheet.substring(from, more ? matcher.start() : sheet.length()), (a, c) -> a + '\n' + c);
         }
-        return from >= 0 ? text.append(sheet.substring(from)).toString() : text.toString();
+        return lines;
     }
 
     /** Whether a number or words stand in a text by themselves, not as a part of another number. */

@@ -2,8 +2,6 @@ package nappe.proof;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.io.ByteArrayInputStream;
-import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Stream;
@@ -31,10 +29,6 @@ import org.openxmlformats.schemas.drawingml.x2006.chart.CTScatterSer;
 
 /** What an issued workbook holds beside its cells: the chart of a rating, checks on what is typed, links, ends of pages. */
 class PrintedWorkbookTest {
-    private static XSSFWorkbook open(Package sample) throws IOException {
-        return new XSSFWorkbook(new ByteArrayInputStream(sample.workbook()));
-    }
-
     private static XSSFChart chart(XSSFWorkbook book, String sheet) {
         List<XSSFChart> charts = book.getSheet(sheet).getDrawingPatriarch().getCharts();
         assertThat(charts).hasSize(1);
@@ -61,32 +55,27 @@ class PrintedWorkbookTest {
         "headworks.xlsx, F1 rating, flow [ft3/s], head [ft]",
         "return-weir.xlsx, W1 rating, flow [m3/s], head [m]"
     })
-    void chartRefersToTheCellsAndShowsWhatWasComputed(String name, String sheet, String across, String up)
-            throws IOException {
+    void chartRefersToTheCellsAndShowsWhatWasComputed(String name, String sheet, String across, String up) {
         Package sample = Package.ofSample(name);
         Block.Chart laid = laid(sample, sheet);
         assertThat(List.of(laid.across(), laid.up())).containsExactly(across, up);
-        try (XSSFWorkbook book = open(sample)) {
-            XSSFChart chart = chart(book, sheet);
-            List<CTScatterSer> drawn = chart.getCTChart()
-                    .getPlotArea()
-                    .getScatterChartList()
-                    .get(0)
-                    .getSerList();
-            assertThat(drawn).hasSize(2).hasSameSizeAs(laid.series());
-            for (int i = 0; i < drawn.size(); i++) {
-                holds(
-                        sample,
-                        drawn.get(i).getXVal().getNumRef(),
-                        laid.series().get(i).across());
-                holds(
-                        sample,
-                        drawn.get(i).getYVal().getNumRef(),
-                        laid.series().get(i).up());
-            }
-            String xml = chart.getCTChart().xmlText();
-            assertThat(xml).contains(across, up, "sourceLinked=\"false\"").doesNotContain("#N/A");
+        XSSFWorkbook book = OpenedBooks.of(name);
+        XSSFChart chart = chart(book, sheet);
+        List<CTScatterSer> drawn =
+                chart.getCTChart().getPlotArea().getScatterChartList().get(0).getSerList();
+        assertThat(drawn).hasSize(2).hasSameSizeAs(laid.series());
+        for (int i = 0; i < drawn.size(); i++) {
+            holds(
+                    sample,
+                    drawn.get(i).getXVal().getNumRef(),
+                    laid.series().get(i).across());
+            holds(
+                    sample,
+                    drawn.get(i).getYVal().getNumRef(),
+                    laid.series().get(i).up());
         }
+        String xml = chart.getCTChart().xmlText();
+        assertThat(xml).contains(across, up, "sourceLinked=\"false\"").doesNotContain("#N/A");
     }
 
     private static void holds(Package sample, CTNumRef drawn, Run run) {
@@ -118,18 +107,17 @@ class PrintedWorkbookTest {
     }
 
     @Test
-    void noPageEndsInsideAChart() throws IOException {
+    void noPageEndsInsideAChart() {
         for (String name : List.of("headworks.xlsx", "return-weir.xlsx")) {
             Package sample = Package.ofSample(name);
-            try (XSSFWorkbook book = open(sample)) {
-                for (Sheet sheet : sample.results().sheets()) {
-                    for (Block block : sheet.blocks()) {
-                        if (block instanceof Block.Chart chart) {
-                            for (int end : book.getSheet(sheet.name()).getRowBreaks()) {
-                                assertThat(end < chart.row() || end >= chart.row() + chart.rows() - 1)
-                                        .as("page of %s ends after row %d", sheet.name(), end)
-                                        .isTrue();
-                            }
+            XSSFWorkbook book = OpenedBooks.of(name);
+            for (Sheet sheet : sample.results().sheets()) {
+                for (Block block : sheet.blocks()) {
+                    if (block instanceof Block.Chart chart) {
+                        for (int end : book.getSheet(sheet.name()).getRowBreaks()) {
+                            assertThat(end < chart.row() || end >= chart.row() + chart.rows() - 1)
+                                    .as("page of %s ends after row %d", sheet.name(), end)
+                                    .isTrue();
                         }
                     }
                 }
@@ -138,32 +126,31 @@ class PrintedWorkbookTest {
     }
 
     @Test
-    void aSizeIsChosenFromTheCitedTable() throws IOException {
+    void aSizeIsChosenFromTheCitedTable() {
         Package sample = Package.ofSample("headworks.xlsx");
         Cell size = entry(sample, "size");
-        try (XSSFWorkbook book = open(sample)) {
-            XSSFDataValidation check = check(book, size.place());
-            assertThat(check.getValidationConstraint().getValidationType()).isEqualTo(ValidationType.LIST);
-            // true where the arrow is shown
-            assertThat(check.getSuppressDropDownArrow()).isTrue();
-            String range = check.getValidationConstraint().getFormula1();
-            List<String> words = sample.results().cells().stream()
-                    .filter(cell -> cell.kind() == Cell.Kind.TABLE
-                            && cell.place().sheet().equals("Tables")
-                            && cell.place().column() == 0
-                            && cell.typed() instanceof Value.Word)
-                    .filter(cell -> within(range, cell.place()))
-                    .map(cell -> ((Value.Word) cell.typed()).text())
-                    .toList();
-            assertThat(words)
-                    .hasSizeGreaterThan(30)
-                    .contains("1 in", "3 ft", "50 ft", "0.9 m")
-                    .doesNotHaveDuplicates();
-            assertThat(range)
-                    .startsWith("'Tables'!$A$")
-                    .isEqualTo("'Tables'!$A$" + range.replaceAll(".*\\$A\\$(\\d+):.*", "$1") + ":$A$"
-                            + (Integer.parseInt(range.replaceAll(".*\\$A\\$(\\d+):.*", "$1")) + words.size() - 1));
-        }
+        XSSFWorkbook book = OpenedBooks.of("headworks.xlsx");
+        XSSFDataValidation check = check(book, size.place());
+        assertThat(check.getValidationConstraint().getValidationType()).isEqualTo(ValidationType.LIST);
+        // true where the arrow is shown
+        assertThat(check.getSuppressDropDownArrow()).isTrue();
+        String range = check.getValidationConstraint().getFormula1();
+        List<String> words = sample.results().cells().stream()
+                .filter(cell -> cell.kind() == Cell.Kind.TABLE
+                        && cell.place().sheet().equals("Tables")
+                        && cell.place().column() == 0
+                        && cell.typed() instanceof Value.Word)
+                .filter(cell -> within(range, cell.place()))
+                .map(cell -> ((Value.Word) cell.typed()).text())
+                .toList();
+        assertThat(words)
+                .hasSizeGreaterThan(30)
+                .contains("1 in", "3 ft", "50 ft", "0.9 m")
+                .doesNotHaveDuplicates();
+        assertThat(range)
+                .startsWith("'Tables'!$A$")
+                .isEqualTo("'Tables'!$A$" + range.replaceAll(".*\\$A\\$(\\d+):.*", "$1") + ":$A$"
+                        + (Integer.parseInt(range.replaceAll(".*\\$A\\$(\\d+):.*", "$1")) + words.size() - 1));
     }
 
     private static boolean within(String range, Place place) {
@@ -182,24 +169,22 @@ class PrintedWorkbookTest {
     })
     void aNumberIsTypedWithItsSign(String name, String symbol, String operator) throws Exception {
         Package sample = Package.ofSample(name);
-        try (XSSFWorkbook book = open(sample)) {
-            XSSFDataValidation check = check(book, entry(sample, symbol).place());
-            assertThat(check.getValidationConstraint().getValidationType()).isEqualTo(ValidationType.DECIMAL);
-            assertThat(check.getValidationConstraint().getOperator())
-                    .isEqualTo(OperatorType.class.getField(operator).getInt(null));
-        }
+        XSSFWorkbook book = OpenedBooks.of(name);
+        XSSFDataValidation check = check(book, entry(sample, symbol).place());
+        assertThat(check.getValidationConstraint().getValidationType()).isEqualTo(ValidationType.DECIMAL);
+        assertThat(check.getValidationConstraint().getOperator())
+                .isEqualTo(OperatorType.class.getField(operator).getInt(null));
     }
 
     @ParameterizedTest
     @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
-    void everyEntryButANameIsChecked(String name) throws IOException {
+    void everyEntryButANameIsChecked(String name) {
         Package sample = Package.ofSample(name);
-        try (XSSFWorkbook book = open(sample)) {
-            for (Cell cell : sample.results().cells()) {
-                boolean isName = cell.symbol().isEmpty();
-                if (cell.kind() == Cell.Kind.ENTRY && !isName) {
-                    check(book, cell.place());
-                }
+        XSSFWorkbook book = OpenedBooks.of(name);
+        for (Cell cell : sample.results().cells()) {
+            boolean isName = cell.symbol().isEmpty();
+            if (cell.kind() == Cell.Kind.ENTRY && !isName) {
+                check(book, cell.place());
             }
         }
     }
@@ -222,31 +207,30 @@ class PrintedWorkbookTest {
 
     @ParameterizedTest
     @ValueSource(strings = {"headworks.xlsx", "inlet-works.xlsx", "return-weir.xlsx", "seepage-pond.xlsx"})
-    void linksLeadToTheIndexAndBackAndToWhereALineComesFrom(String name) throws IOException {
+    void linksLeadToTheIndexAndBackAndToWhereALineComesFrom(String name) {
         Package sample = Package.ofSample(name);
-        try (XSSFWorkbook book = open(sample)) {
-            List<String> fromIndex = targets(book.getSheet("Index"));
-            for (int i = 0; i < book.getNumberOfSheets(); i++) {
-                XSSFSheet sheet = book.getSheetAt(i);
-                assertThat(fromIndex).contains("'" + sheet.getSheetName() + "'!A1");
-                if (!sheet.getSheetName().equals("Index")) {
-                    assertThat(sheet.getHyperlink(new CellAddress("A1")).getLocation())
-                            .isEqualTo("'Index'!A1");
-                }
-                for (String target : targets(sheet)) {
-                    assertThat(book.getSheet(target.replaceAll("^'(.*)'!.*$", "$1")))
-                            .as(target)
-                            .isNotNull();
-                }
+        XSSFWorkbook book = OpenedBooks.of(name);
+        List<String> fromIndex = targets(book.getSheet("Index"));
+        for (int i = 0; i < book.getNumberOfSheets(); i++) {
+            XSSFSheet sheet = book.getSheetAt(i);
+            assertThat(fromIndex).contains("'" + sheet.getSheetName() + "'!A1");
+            if (!sheet.getSheetName().equals("Index")) {
+                assertThat(sheet.getHyperlink(new CellAddress("A1")).getLocation())
+                        .isEqualTo("'Index'!A1");
             }
-            String element = sample.design().elements().get(0).tag();
-            assertThat(targets(book.getSheet("Limits")))
-                    .filteredOn(to -> to.startsWith("'" + element + "'!"))
-                    .hasSizeGreaterThan(5);
-            assertThat(targets(book.getSheet(element))).anyMatch(to -> to.startsWith("'Entries'!"));
-            if (name.equals("return-weir.xlsx")) {
-                assertThat(targets(book.getSheet(element))).anyMatch(to -> to.startsWith("'Trials'!"));
+            for (String target : targets(sheet)) {
+                assertThat(book.getSheet(target.replaceAll("^'(.*)'!.*$", "$1")))
+                        .as(target)
+                        .isNotNull();
             }
+        }
+        String element = sample.design().elements().get(0).tag();
+        assertThat(targets(book.getSheet("Limits")))
+                .filteredOn(to -> to.startsWith("'" + element + "'!"))
+                .hasSizeGreaterThan(5);
+        assertThat(targets(book.getSheet(element))).anyMatch(to -> to.startsWith("'Entries'!"));
+        if (name.equals("return-weir.xlsx")) {
+            assertThat(targets(book.getSheet(element))).anyMatch(to -> to.startsWith("'Trials'!"));
         }
     }
 

@@ -3,6 +3,7 @@ package nappe.proof;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -31,8 +32,13 @@ class SizesTest {
         return Package.ofSample("headworks.xlsx");
     }
 
+    private static final Map<String, Package> WITH = new HashMap<>();
+
+    /** The sample issued with another size, made once. */
     private static Package with(Object size) {
-        return Package.of(new Entry("F1", "size", size).in(headworks().design(), headworks()));
+        return WITH.computeIfAbsent(
+                String.valueOf(size),
+                key -> Package.of(new Entry("F1", "size", size).in(headworks().design(), headworks())));
     }
 
     private static Sheet sheet(Results results, String name) {

@@ -35,14 +35,20 @@ class StrangerTest {
                 .strip();
     }
 
+    private static final Map<String, List<String>> PAGES = new HashMap<>();
+
     /** The text of each page in the order of drawing: head and foot, the content, the label of the page. */
     private List<String> pages(String name) throws IOException {
-        Tools.require("pdftotext", "poppler");
-        Path text = folder.resolve("raw.txt");
-        Tools.run("pdftotext", "-raw", "-enc", "UTF-8", Issued.of(name).pdf().toString(), text.toString());
-        List<String> pages = Arrays.asList(Files.readString(text).split("\f"));
-        assertThat(pages).hasSizeGreaterThan(20);
-        return pages;
+        if (!PAGES.containsKey(name)) {
+            Tools.require("pdftotext", "poppler");
+            Path text = folder.resolve("raw.txt");
+            Tools.run(
+                    "pdftotext", "-raw", "-enc", "UTF-8", Issued.of(name).pdf().toString(), text.toString());
+            List<String> pages = Arrays.asList(Files.readString(text).split("\f"));
+            assertThat(pages).hasSizeGreaterThan(20);
+            PAGES.put(name, pages);
+        }
+        return PAGES.get(name);
     }
 
     @ParameterizedTest

@@ -1,33 +1,26 @@
 package nappe.deliver.xlsx;
 
 import java.io.IOException;
-import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Comparator;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.IntFunction;
+import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import nappe.Tools;
 import nappe.calculation.Cell;
 import nappe.formula.Value;
 import nappe.results.Results;
-import org.apache.poi.ss.usermodel.CellType;
-import org.apache.poi.xssf.usermodel.XSSFWorkbook;
 
 /**
  * A workbook as a spreadsheet program sees it after it has recalculated every cell: values by {@code "Sheet!A1"},
  * numbers as Double, all else as String. LibreOffice hands on 15 digits, Gnumeric all of them.
  */
 public final class Recalculated {
-    static {
-        // Gnumeric repeats one style so often that its styles look like a zip bomb to POI
-        org.apache.poi.openxml4j.util.ZipSecureFile.setMinInflateRatio(0.001);
-    }
-
     /** As loose as the comparison of one value needs: LibreOffice rounds to 15 digits and snaps sums near zero. */
     public static final double RELATIVE = 1e-9;
 
@@ -48,35 +41,43 @@ public final class Recalculated {
 
     /** Several workbooks recalculated by one run of LibreOffice, in their order. */
     public static List<Map<String, Object>> byLibreOffice(List<Path> workbooks) {
-        Tools.require("soffice", "LibreOffice");
         return in(folder -> {
-            Path profile = Files.createDirectories(folder.resolve("profile/user"));
-            Files.writeString(profile.resolve("registrymodifications.xcu"), """
-                    <?xml version="1.0" encoding="UTF-8"?>
-                    <oor:items xmlns:oor="http://openoffice.org/2001/registry">
-                    <item oor:path="/org.openoffice.Office.Calc/Formula/Load"><prop oor:name="OOXMLRecalcMode"
-                     oor:op="fuse"><value>0</value></prop></item>
-                    </oor:items>
-                    """);
-            List<String> command = new ArrayList<>(List.of(
-                    "soffice",
-                    "-env:UserInstallation=" + folder.resolve("profile").toUri(),
-                    "--headless",
-                    "--convert-to",
-                    "xlsx",
-                    "--outdir",
-                    folder.resolve("out").toString()));
-            for (int i = 0; i < workbooks.size(); i++) {
-                command.add(Files.copy(workbooks.get(i), folder.resolve("book" + i + ".xlsx"))
-                        .toString());
-            }
-            Tools.run(command.toArray(String[]::new));
-            List<Map<String, Object>> values = new ArrayList<>();
-            for (int i = 0; i < workbooks.size(); i++) {
-                values.add(read(folder.resolve("out/book" + i + ".xlsx")));
-            }
-            return values;
+            IntFunction<Map<String, Object>> recalculated = byLibreOffice(workbooks, folder);
+            return IntStream.range(0, workbooks.size()).mapToObj(recalculated).toList();
         });
+    }
+
+    /** The same into a folder that is kept, where each is read when it is asked for: all at once are many. */
+    public static IntFunction<Map<String, Object>> byLibreOffice(List<Path> workbooks, Path folder) throws IOException {
+        Tools.require("soffice", "LibreOffice");
+        Path profile = Files.createDirectories(folder.resolve("profile/user"));
+        Files.writeString(profile.resolve("registrymodifications.xcu"), """
+                <?xml version="1.0" encoding="UTF-8"?>
+                <oor:items xmlns:oor="http://openoffice.org/2001/registry">
+                <item oor:path="/org.openoffice.Office.Calc/Formula/Load"><prop oor:name="OOXMLRecalcMode"
+                 oor:op="fuse"><value>0</value></prop></item>
+                </oor:items>
+                """);
+        List<String> command = new ArrayList<>(List.of(
+                "soffice",
+                "-env:UserInstallation=" + folder.resolve("profile").toUri(),
+                "--headless",
+                "--convert-to",
+                SheetsAsText.FORMAT,
+                "--outdir",
+                folder.resolve("out").toString()));
+        for (int i = 0; i < workbooks.size(); i++) {
+            command.add(Files.copy(workbooks.get(i), folder.resolve("book" + i + ".xlsx"))
+                    .toString());
+        }
+        spreadsheet(command);
+        return i -> {
+            try {
+                return SheetsAsText.of(folder.resolve("out"), "book" + i);
+            } catch (IOException e) {
+                throw new UncheckedIOException(e);
+            }
+        };
     }
 
     /** Recalculated by Gnumeric; the test is skipped, with a message, where it is not installed. */
@@ -84,15 +85,24 @@ public final class Recalculated {
         Tools.require("ssconvert", "Gnumeric");
         return in(folder -> {
             Path out = folder.resolve("out.xlsx");
-            Tools.run("ssconvert", "--recalc", "-T", "Gnumeric_Excel:xlsx2", workbook.toString(), out.toString());
-            return read(out);
+            spreadsheet(List.of(
+                    "ssconvert", "--recalc", "-T", "Gnumeric_Excel:xlsx2", workbook.toString(), out.toString()));
+            return StoredCells.of(out);
         });
+    }
+
+    /** Runs a program that takes memory from the system in large pieces and keeps it, which saves a sixth of its time. */
+    private static void spreadsheet(List<String> command) throws IOException {
+        ProcessBuilder builder = new ProcessBuilder(command);
+        builder.environment().put("MALLOC_TOP_PAD_", "134217728");
+        builder.environment().put("MALLOC_TRIM_THRESHOLD_", "4000000000");
+        Tools.run(builder);
     }
 
     /** The values that are stored in a workbook, nothing recalculated. */
     public static Map<String, Object> asStored(Path workbook) {
         try {
-            return read(workbook);
+            return StoredCells.of(workbook);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
@@ -129,27 +139,6 @@ public final class Recalculated {
                     && Math.abs(a - b) <= relative * Math.max(Math.abs(a), Math.abs(b)) + floor;
         }
         return SheetRows.words(here).equals(there);
-    }
-
-    private static Map<String, Object> read(Path workbook) throws IOException {
-        Map<String, Object> values = new LinkedHashMap<>();
-        try (InputStream in = Files.newInputStream(workbook);
-                XSSFWorkbook book = new XSSFWorkbook(in)) {
-            book.forEach(sheet -> sheet.forEach(row -> row.forEach(cell -> {
-                CellType type =
-                        cell.getCellType() == CellType.FORMULA ? cell.getCachedFormulaResultType() : cell.getCellType();
-                Object value = switch (type) {
-                    case NUMERIC -> (Object) cell.getNumericCellValue();
-                    case BOOLEAN -> cell.getBooleanCellValue() ? "TRUE" : "FALSE";
-                    case ERROR -> "error " + cell.getErrorCellValue();
-                    default -> cell.getStringCellValue();
-                };
-                if (type != CellType.BLANK) {
-                    values.put(sheet.getSheetName() + "!" + cell.getAddress(), value);
-                }
-            })));
-        }
-        return values;
     }
 
     private interface Work<T> {
