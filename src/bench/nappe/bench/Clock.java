@@ -19,7 +19,7 @@ public final class Clock {
     }
 
     /** A clock that has been running since the process was started. */
-    static Clock sinceProcessStart() {
+    public static Clock sinceProcessStart() {
         Instant started = ProcessHandle.current().info().startInstant().orElse(Instant.now());
         return new Clock(
                 System.nanoTime() - Duration.between(started, Instant.now()).toNanos());
@@ -33,7 +33,7 @@ public final class Clock {
     }
 
     /** Each stage on a line: name, tab, seconds. */
-    void print() {
+    public void print() {
         laps.forEach((stage, seconds) -> System.out.println(stage + "\t" + seconds));
     }
 }

@@ -23,6 +23,15 @@ final class Figures {
         }
     }
 
+    /** The sum of two figures, round by round. */
+    void addSum(String name, String one, String other) {
+        List<Double> a = all.get(one);
+        List<Double> b = all.get(other);
+        for (int i = 0; i < Math.min(a.size(), b.size()); i++) {
+            add(name, a.get(i) + b.get(i));
+        }
+    }
+
     boolean has(String name) {
         return all.containsKey(name);
     }

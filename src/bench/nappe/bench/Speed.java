@@ -23,6 +23,9 @@ public final class Speed {
             "-Xlog:disable");
     private static final int WARM = 6;
 
+    /** The last stage that the program tells; both files, written side by side, what was loaded for them before. */
+    private static final String WRITING = "as told: writing the workbook and setting the PDF";
+
     private final Path jar;
     private final Path out;
     private final int rounds;
@@ -72,6 +75,9 @@ public final class Speed {
         Path bareArchive = out.resolve("bare.jsa");
         Files.deleteIfExists(bareArchive);
         run(bare("xssf", saved, "-XX:ArchiveClassesAtExit=" + bareArchive));
+        Path archive = out.resolve("nappe.jsa");
+        Files.deleteIfExists(archive);
+        run(told(input, folder, "-XX:ArchiveClassesAtExit=" + archive));
         boolean hasOffice = has("soffice");
         if (hasOffice) {
             run(office(workbook));
@@ -106,6 +112,8 @@ public final class Speed {
             if (hasOffice) {
                 take(whole, processors, "LibreOffice, workbook to PDF", office(workbook));
             }
+            run(told(input, folder, "-XX:SharedArchiveFile=" + archive));
+            readLaps(stages, "as told: ");
             run(stages(input, 1));
             readLaps(stages, "cold: ");
         }
@@ -120,6 +128,11 @@ public final class Speed {
                 stages.add("warm: " + lap[0], Double.parseDouble(lap[1]));
             }
         }
+        for (String way : List.of("XSSF", "SXSSF")) {
+            String both = "bare " + way + ": both files";
+            stages.addSum(both, "bare " + way + ": workbook", "bare " + way + ": PDF");
+            stages.addRatio("RATIO of writing the files to bare " + way, WRITING, both);
+        }
         for (Figures figures : List.of(whole, processors)) {
             String launch = "nappe issue, by the launcher";
             figures.addRatio("RATIO to the bare libraries, XSSF", launch, "bare libraries, XSSF");
@@ -132,8 +145,8 @@ public final class Speed {
         whole.print();
         System.out.println(" The same, seconds of processors:");
         processors.print();
-        System.out.println(" Stages one after the other on one thread, seconds on the wall"
-                + " (warm: without flags, runs " + (WARM / 2 + 1) + " to " + WARM + " of one Java):");
+        System.out.println(" Stages, seconds on the wall (as told: of the program as it is started; cold: one after the other on one"
+                + " thread; warm: the same without flags, runs " + (WARM / 2 + 1) + " to " + WARM + " of one Java):");
         stages.print();
         System.out.printf(
                 Locale.ROOT,
@@ -172,6 +185,15 @@ public final class Speed {
         command.add(archive);
         command.addAll(List.of(
                 "-cp", classPath(), "nappe.bench.Bare", saved.toString(), out.resolve("bare").toString(), way));
+        return command;
+    }
+
+    private List<String> told(Path input, Path folder, String archive) {
+        List<String> command = new ArrayList<>(List.of("java"));
+        command.addAll(FLAGS);
+        command.add(archive);
+        command.addAll(List.of(
+                "-cp", classPath(), "nappe.cli.ToldStages", "issue", input.toString(), "-o", folder.toString()));
         return command;
     }
 

@@ -100,18 +100,16 @@ public final class Nappe implements Runnable {
         ProgressLine line = ProgressLine.on(err, PATIENCE_MILLIS);
         Runtime.getRuntime().addShutdownHook(new Thread(line::end, "progress-end"));
         System.exit(run(
-                new Nappe(line::stage),
-                args,
-                new PrintWriter(line.before(out), true),
-                new PrintWriter(line.before(err), true)));
+                line::stage, args, new PrintWriter(line.before(out), true), new PrintWriter(line.before(err), true)));
     }
 
     /** Runs one command; results go to the first writer, messages to the second. */
     public static int run(String[] args, PrintWriter out, PrintWriter err) {
-        return run(new Nappe(words -> {}), args, out, err);
+        return run(words -> {}, args, out, err);
     }
 
-    private static int run(Nappe nappe, String[] args, PrintWriter out, PrintWriter err) {
+    /** The same, telling in words what it is busy with. */
+    static int run(Consumer<String> stage, String[] args, PrintWriter out, PrintWriter err) {
         System.setProperty("java.awt.headless", "true");
         System.setProperty("log4j.provider", "org.apache.logging.log4j.simple.internal.SimpleProvider");
         System.setProperty("org.apache.logging.log4j.simplelog.level", "OFF");
@@ -120,7 +118,7 @@ public final class Nappe implements Runnable {
             Rehearsal.ofPages();
         }
         String[] typed = asHelp(args);
-        CommandLine line = new CommandLine(nappe);
+        CommandLine line = new CommandLine(new Nappe(stage));
         // a command takes a while to set up, and one that is named needs no other
         Supplier<Object> named = typed.length == 0 ? null : COMMANDS.get(typed[0]);
         (named == null ? COMMANDS.values() : List.of(named)).forEach(command -> line.addSubcommand(command.get()));
