@@ -356,7 +356,7 @@ public final class PackageLayout {
             }
         }
         sheet.note(
-                "Only for free flow as the method defines it. Outside this range, or where a limit of the device is not met, no result is claimed.");
+                "Only for flow as the method takes it: not slowed by the level downstream, unless the head is a difference of two levels; in a meter, through a full pipe. Outside this range, or where a limit of the device is not met, no result is claimed.");
         method.cautions().forEach(sheet::caution);
         sheet.gap();
         sheet.figure("Rating curve of " + element.tag(), element.tag() + RATING_FIGURE);

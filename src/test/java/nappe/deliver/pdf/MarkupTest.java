@@ -49,8 +49,23 @@ class MarkupTest {
     @Test
     void a_row_has_a_cell_for_each_with_its_lines() {
         GridRow row = new GridRow(
-                "r", List.of(new GridCell("right", 2, List.of(Text.plain("small", "a < b"), Text.plain("", "c")))));
+                "r",
+                List.of(
+                        new GridCell("right", 2, List.of(Text.plain("small", "a < b"), Text.plain("", "c"))),
+                        GridCell.of("", Text.plain("small", "d"))));
         assertThat(row.markup("td"))
-                .isEqualTo("<td class=\"right\" colspan=\"2\"><p class=\"small\">a &lt; b</p><p class=\"\">c</p></td>");
+                .isEqualTo("<td class=\"right\" colspan=\"2\"><p class=\"small\">a &lt; b</p><p>c</p></td>"
+                        + "<td><p class=\"small\">d</p></td>");
+    }
+
+    @Test
+    void a_line_alone_in_its_cell_and_without_a_look_is_no_paragraph() {
+        GridRow row = new GridRow(
+                "",
+                List.of(
+                        GridCell.of("", Text.plain("", "a")),
+                        GridCell.of("", Text.plain(Text.WHOLE, "b")),
+                        GridCell.of("")));
+        assertThat(row.markup("th")).isEqualTo("<th>a</th><th>b</th><th></th>");
     }
 }
