@@ -20,7 +20,7 @@ final class Markup {
         for (View.GridCell cell : row.cells()) {
             markup.open(
                     element, "class", cell.style(), "colspan", cell.span() == 1 ? "" : Integer.toString(cell.span()));
-            if (cell.texts().size() == 1 && !cell.texts().get(0).hasLook()) {
+            if (cell.texts().size() == 1 && isBare(cell.texts().get(0))) {
                 markup.line(cell.texts().get(0));
             } else {
                 cell.texts().forEach(markup::paragraph);
@@ -28,6 +28,11 @@ final class Markup {
             markup.close(element);
         }
         return markup.written.toString();
+    }
+
+    /** A word of several pieces would stand lower in a cell at the head of a page than in a paragraph there. */
+    private static boolean isBare(View.Text text) {
+        return !text.hasLook() && text.pieces().size() < 2 && text.inset() == null;
     }
 
     private void paragraph(View.Text text) {

@@ -59,13 +59,22 @@ class MarkupTest {
     }
 
     @Test
-    void a_line_alone_in_its_cell_and_without_a_look_is_no_paragraph() {
+    void a_run_alone_in_its_cell_and_without_a_look_is_no_paragraph() {
         GridRow row = new GridRow(
                 "",
                 List.of(
                         GridCell.of("", Text.plain("", "a")),
                         GridCell.of("", Text.plain(Text.WHOLE, "b")),
+                        GridCell.of(
+                                "",
+                                Text.of(
+                                        "",
+                                        List.of(
+                                                Piece.italic("h"),
+                                                Piece.plain("a").lowered()))),
                         GridCell.of("")));
-        assertThat(row.markup("th")).isEqualTo("<th>a</th><th>b</th><th></th>");
+        assertThat(row.markup("th"))
+                .isEqualTo("<th>a</th><th>b</th><th><p><span class=\"word\"><span class=\"i\">h</span>"
+                        + "<span class=\"t sub\">a</span></span></p></th><th></th>");
     }
 }
