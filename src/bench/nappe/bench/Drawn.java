@@ -19,7 +19,7 @@ import java.util.Set;
 /** What a PDF holds beside its words: rules and lines, links, bookmarks. */
 final class Drawn {
     private static final Set<String> KEPT =
-            Set.of("m", "l", "c", "h", "re", "S", "f", "B", "n", "w", "g", "G", "rg", "RG", "d", "q", "Q", "cm", "W");
+            Set.of("m", "l", "c", "h", "re", "S", "f", "B", "n", "w", "g", "G", "rg", "RG", "q", "Q", "cm", "W");
 
     private Drawn() {}
 

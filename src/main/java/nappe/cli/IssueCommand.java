@@ -64,7 +64,6 @@ final class IssueCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         Consumer<String> stage = Nappe.stage(spec);
         stage.accept("reading the workbook");
-        Beside<Boolean> rehearsal = Rehearsal.ofPages();
         Desk desk = house.desk();
         Design design = marked.read(desk, input);
         house.tellRemarks(
@@ -75,7 +74,7 @@ final class IssueCommand implements Callable<Integer> {
         target.prepare();
         Job.Done done = desk.compute(design, stage);
         // the typefaces serve one document at a time
-        rehearsal.outcome();
+        Rehearsal.ofPages().outcome();
         target.write(files(target.name(), done, stage), done.results().furniture());
         PrintWriter out = spec.commandLine().getOut();
         out.println("Wrote " + target.path());

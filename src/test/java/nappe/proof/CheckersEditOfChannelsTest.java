@@ -6,7 +6,6 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.io.IOException;
 import java.nio.file.Path;
-import java.util.List;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -21,10 +20,7 @@ class CheckersEditOfChannelsTest {
 
     @BeforeAll
     static void type() throws IOException {
-        books = new EditedBooks(folder);
-        for (String sample : List.of(INLET, TURNOUT)) {
-            books.addAll(sample);
-        }
+        books = new EditedBooks(folder, INLET, TURNOUT);
     }
 
     @ParameterizedTest

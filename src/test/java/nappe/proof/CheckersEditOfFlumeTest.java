@@ -24,8 +24,7 @@ class CheckersEditOfFlumeTest {
 
     @BeforeAll
     static void type() throws IOException {
-        books = new EditedBooks(folder);
-        books.addAll(FLUME);
+        books = new EditedBooks(folder, FLUME);
         books.add(FLUME, List.of(IN_NO_TABLE));
     }
 

@@ -37,10 +37,7 @@ class CheckersEditTest {
 
     @BeforeAll
     static void type() throws IOException {
-        books = new EditedBooks(folder);
-        for (String sample : List.of(WEIR, MAIN, REUSE, POND)) {
-            books.addAll(sample);
-        }
+        books = new EditedBooks(folder, WEIR, MAIN, REUSE, POND);
         for (Typing typing : List.of(DELETED, WIDER_THAN_ITS_CHANNEL, NOT_MADE_IN_THE_DESIGN)) {
             books.add(WEIR, List.of(typing));
         }

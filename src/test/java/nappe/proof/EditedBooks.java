@@ -26,9 +26,18 @@ final class EditedBooks {
     private final Map<Book, Path> files = new LinkedHashMap<>();
     private IntFunction<Map<String, Object>> byLibreOffice;
 
-    /** @param folder for files, kept until the last is asked for */
-    EditedBooks(Path folder) {
+    /**
+     * All edits of some samples.
+     *
+     * @param folder for files, kept until the last is asked for
+     */
+    EditedBooks(Path folder, String... samples) throws IOException {
         this.folder = folder;
+        for (String sample : samples) {
+            for (List<Typing> typings : CheckersEdits.of(sample).values()) {
+                add(sample, typings);
+            }
+        }
     }
 
     /** One more, before the first is asked for. */
@@ -37,13 +46,6 @@ final class EditedBooks {
         Edited edited = new Edited(Spoiler.spoil(issued.workbook()));
         typings.forEach(typing -> edited.type(typing.place(issued), typing.content()));
         files.put(new Book(sample, typings), file(edited.bytes()));
-    }
-
-    /** All edits of a sample. */
-    void addAll(String sample) throws IOException {
-        for (List<Typing> typings : CheckersEdits.of(sample).values()) {
-            add(sample, typings);
-        }
     }
 
     /** What LibreOffice gives for one that was added. */

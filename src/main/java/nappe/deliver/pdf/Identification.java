@@ -53,9 +53,6 @@ final class Identification {
 
     private static String text(PdfDictionary info, PdfName key) {
         String text = info.get(key) instanceof PdfString string ? string.toUnicodeString() : "";
-        return text.replace("&", "&amp;")
-                .replace("<", "&lt;")
-                .replace(">", "&gt;")
-                .replace("\r", "&#13;");
+        return XmlText.escaped(text);
     }
 }

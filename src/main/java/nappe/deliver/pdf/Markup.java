@@ -68,7 +68,7 @@ final class Markup {
             if (!plain) {
                 open("span", "class", piece.style());
             }
-            characters(piece.text());
+            written.append(XmlText.escaped(piece.text()));
             if (!plain) {
                 close("span");
             }
@@ -85,29 +85,16 @@ final class Markup {
             if (attributes[i + 1].isEmpty()) {
                 continue;
             }
-            written.append(' ').append(attributes[i]).append("=\"");
-            characters(attributes[i + 1]);
-            written.append('"');
+            written.append(' ')
+                    .append(attributes[i])
+                    .append("=\"")
+                    .append(XmlText.escaped(attributes[i + 1]))
+                    .append('"');
         }
         written.append('>');
     }
 
     private void close(String name) {
         written.append("</").append(name).append('>');
-    }
-
-    private void characters(String text) {
-        for (int i = 0; i < text.length(); i++) {
-            char c = text.charAt(i);
-            switch (c) {
-                case '&' -> written.append("&amp;");
-                case '<' -> written.append("&lt;");
-                case '>' -> written.append("&gt;");
-                case '"' -> written.append("&quot;");
-                // else a reader of XML would take them for blanks or change them
-                case '\t', '\n', '\r' -> written.append("&#").append((int) c).append(';');
-                default -> written.append(c);
-            }
-        }
     }
 }

@@ -1,7 +1,7 @@
 package nappe.deliver.pdf;
 
-/** A run of characters set alike; public so that the template can read it. */
-public record Piece(String text, Face face, Shift shift) {
+/** A run of characters set alike. */
+record Piece(String text, Face face, Shift shift) {
     /** How the characters look. */
     public enum Face {
         PLAIN,

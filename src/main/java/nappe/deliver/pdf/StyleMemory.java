@@ -19,8 +19,8 @@ import org.xhtmlrenderer.extend.UserAgentCallback;
  */
 final class StyleMemory extends StyleReference {
     /** Elements that are alike. */
-    private record Kind(@Nullable Kind parent, int number, String name, String look, String style) {
-        /** Kinds are made once each, so that the number of the parent tells it. */
+    private record Kind(@Nullable Kind parent, String name, String look, String style) {
+        /** Kinds are kept once each, so that a parent is told by what it is, not by all that it stands in. */
         @Override
         public boolean equals(@Nullable Object other) {
             return other instanceof Kind kind
@@ -32,8 +32,8 @@ final class StyleMemory extends StyleReference {
 
         @Override
         public int hashCode() {
-            int hash = parent == null ? 0 : parent.number;
-            return ((hash * 31 + name.hashCode()) * 31 + look.hashCode()) * 31 + style.hashCode();
+            return ((System.identityHashCode(parent) * 31 + name.hashCode()) * 31 + look.hashCode()) * 31
+                    + style.hashCode();
         }
     }
 
@@ -85,7 +85,6 @@ final class StyleMemory extends StyleReference {
             Kind parent = element.getParentNode() instanceof Element above ? kind(above) : null;
             Kind fresh = new Kind(
                     parent,
-                    kinds.size() + 1,
                     element.getNodeName(),
                     said(names.getClass(element)),
                     said(names.getElementStyling(element)) + ";" + said(names.getNonCssStyling(element)));

@@ -118,7 +118,7 @@ public final class View {
      *
      * @param whole whether they are one word of several pieces, never broken over two lines
      */
-    public record Word(boolean whole, List<Piece> pieces) {}
+    record Word(boolean whole, List<Piece> pieces) {}
 
     /**
      * Something drawn that stands in a line.
@@ -126,7 +126,7 @@ public final class View {
      * @param name of the drawing
      * @param text what stands for it, in characters
      */
-    public record Inset(String name, String text) {}
+    record Inset(String name, String text) {}
 
     /**
      * Characters that are set as one line or paragraph.

@@ -14,6 +14,24 @@ final class XmlText {
         return safe.toString();
     }
 
+    /** The text as it is written between tags or in an attribute. */
+    static String escaped(String text) {
+        StringBuilder written = new StringBuilder(text.length() + 16);
+        for (int i = 0; i < text.length(); i++) {
+            char c = text.charAt(i);
+            switch (c) {
+                case '&' -> written.append("&amp;");
+                case '<' -> written.append("&lt;");
+                case '>' -> written.append("&gt;");
+                case '"' -> written.append("&quot;");
+                // else a reader of XML would take them for blanks or change them
+                case '\t', '\n', '\r' -> written.append("&#").append((int) c).append(';');
+                default -> written.append(c);
+            }
+        }
+        return written.toString();
+    }
+
     private static boolean allowed(int c) {
         return c == '\t'
                 || c == '\n'
